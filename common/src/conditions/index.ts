@@ -1,0 +1,2 @@
+export * from './conditionFields.js';
+export * from './conditions.js';

@@ -1,0 +1,3 @@
+export * from './cautions.js';
+export * from './contributors.js';
+export * from './figures.js';

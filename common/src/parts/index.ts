@@ -1,0 +1,5 @@
+export * from './amplifier.js';
+export * from './opAmpParameters.js';
+export * from './parameter.js';
+export * from './partFields.js';
+export * from './vocabulary.js';

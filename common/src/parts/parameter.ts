@@ -1,0 +1,34 @@
+import type { QuantityKind } from '../units/index.js';
+
+/** Bounds of a physical value in SI units. `above` is exclusive, `from` and `to` are inclusive. */
+export interface Bounds {
+  above?: number;
+  from?: number;
+  to: number;
+}
+
+/** What every catalogue says of one numeric field, for forms, API, grid and import alike. */
+export interface QuantityField {
+  label: string;
+  /** The symbol that the trade writes, such as `e_n`. */
+  symbol?: string;
+  kind: QuantityKind;
+  bounds: Bounds;
+  /** Only whole numbers are allowed. */
+  integer?: boolean;
+  /** One sentence for the field's help. */
+  help: string;
+}
+
+/** One parameter of a part: the single place where form, API, grid, database column and import learn of it. */
+export interface ParameterDefinition<Key extends string = string> extends QuantityField {
+  key: Key;
+  /** A part can't be saved without it. */
+  required?: boolean;
+  /** What stands when the parameter is left out; `null` = unknown. */
+  fallback: number | null;
+  /** The unit of the CSV column and of grid and form, such as `nV/√Hz`. */
+  displayUnit: string;
+  /** Other names that lists give this column; compared without case, accents and punctuation. */
+  synonyms: readonly string[];
+}
