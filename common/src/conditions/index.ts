@@ -1,2 +1,3 @@
 export * from './conditionFields.js';
 export * from './conditions.js';
+export * from './checkConditions.js';

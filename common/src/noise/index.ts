@@ -1,3 +1,12 @@
+export * from './amplifierNoise.js';
+export * from './band.js';
 export * from './cautions.js';
+export * from './constants.js';
 export * from './contributors.js';
+export * from './evaluateStage.js';
+export * from './excess.js';
 export * from './figures.js';
+export * from './relativeSpread.js';
+export * from './shot.js';
+export { flatFeedbackCapacitance } from './stage/transimpedance.js';
+export * from './thermal.js';

@@ -1,0 +1,105 @@
+import { boundsError, type FieldError } from '../parts/index.js';
+import { CONDITION_FIELDS, type ConditionFieldPath } from './conditionFields.js';
+import type { RankingRequest, StageConditions, Topology } from './conditions.js';
+
+/** The stage's fields that each topology has, and which of them it can't do without. */
+export const STAGE_FIELDS = {
+  'non-inverting': { required: ['gain'], optional: ['gainResistance', 'loadResistance', 'network'] },
+  inverting: { required: ['gain', 'gainResistance'], optional: ['biasResistance', 'network'] },
+  transimpedance: { required: ['feedbackResistance'], optional: ['feedbackCapacitance', 'network'] },
+} as const satisfies Record<
+  Topology,
+  { required: readonly (keyof StageConditions)[]; optional: readonly (keyof StageConditions)[] }
+>;
+
+/**
+ * Everything that is wrong with a ranking request, field by field: values out of bounds, fields that
+ * the topology needs or doesn't have, limits that contradict each other. Empty = it can be ranked.
+ */
+export function checkConditions(request: RankingRequest): FieldError[] {
+  const bounds = checkBounds(request);
+  return bounds.length > 0
+    ? bounds
+    : [...checkStage(request), ...checkBand(request), ...checkSupply(request)];
+}
+
+function checkBounds(request: RankingRequest): FieldError[] {
+  return (Object.keys(CONDITION_FIELDS) as ConditionFieldPath[]).flatMap((field) => {
+    const value = valueAt(request, field);
+    if (value === undefined || value === 'auto') return [];
+    const message = boundsError(CONDITION_FIELDS[field], value);
+    return message === null ? [] : [{ field, message }];
+  });
+}
+
+function valueAt(request: RankingRequest, path: string): unknown {
+  return path
+    .split('.')
+    .reduce<unknown>((value, key) => (value as Record<string, unknown> | undefined)?.[key], request);
+}
+
+function checkStage({ conditions }: RankingRequest): FieldError[] {
+  const { stage, source } = conditions;
+  const { required, optional } = STAGE_FIELDS[stage.topology];
+  const allowed: readonly string[] = ['topology', ...required, ...optional];
+  const errors: FieldError[] = [];
+  const add = (field: string, message: string) => errors.push({ field: `conditions.${field}`, message });
+  for (const key of required) {
+    if (stage[key as keyof StageConditions] === undefined)
+      add(`stage.${key}`, `${article(stage.topology)} stage needs this value`);
+  }
+  for (const [key, value] of Object.entries(stage)) {
+    if (value !== undefined && !allowed.includes(key))
+      add(`stage.${key}`, `${article(stage.topology)} stage doesn’t have this: leave it out`);
+  }
+  if (stage.topology === 'non-inverting') checkNonInverting(stage, add);
+  if (stage.topology === 'inverting' && source.resistance + (stage.gainResistance ?? 0) <= 0)
+    add('stage.gainResistance', 'gain resistance and source resistance can’t both be 0 Ω');
+  if (stage.topology === 'transimpedance') checkCurrentSource(source, add);
+  else if (source.directCurrent)
+    add('source.directCurrent', 'only a transimpedance stage has a detector’s direct current: leave it out');
+  return errors;
+}
+
+type AddError = (field: string, message: string) => void;
+
+function checkNonInverting(stage: StageConditions, add: AddError): void {
+  if (stage.gain === undefined) return;
+  if (stage.gain < 1) add('stage.gain', 'gain: a non-inverting stage has a gain of 1 or more');
+  if (stage.gain > 1 && !stage.gainResistance)
+    add('stage.gainResistance', 'gain resistance: a value above 0 Ω is needed where the gain is above 1');
+}
+
+function checkCurrentSource(source: RankingRequest['conditions']['source'], add: AddError): void {
+  if (source.resistance <= 0)
+    add('source.resistance', 'source resistance: a current source needs a resistance above 0 Ω across it');
+  if (source.inductance > 0)
+    add('source.inductance', 'source inductance: a current source has none, set it to 0 H');
+}
+
+function article(topology: Topology): string {
+  return topology === 'inverting' ? 'an inverting' : `a ${topology}`;
+}
+
+function checkBand({ conditions: { band, referenceFrequency } }: RankingRequest): FieldError[] {
+  if (band.upper <= band.lower)
+    return [
+      {
+        field: 'conditions.band.upper',
+        message: 'upper band limit: a frequency above the lower limit was expected',
+      },
+    ];
+  if (referenceFrequency < band.lower || referenceFrequency > band.upper)
+    return [
+      {
+        field: 'conditions.referenceFrequency',
+        message: 'reference frequency: a frequency inside the band was expected',
+      },
+    ];
+  return [];
+}
+
+function checkSupply({ filter }: RankingRequest): FieldError[] {
+  if (!filter?.supply || filter.supply.maximum >= filter.supply.minimum) return [];
+  return [{ field: 'filter.supply.maximum', message: 'supply, highest: not below the lowest supply' }];
+}

@@ -1,0 +1,102 @@
+import type { Origin } from '../parts/index.js';
+import { CONTRIBUTORS, type Contributions, type Contributor } from './contributors.js';
+import { ORIGIN_SPREAD, type Spread } from './relativeSpread.js';
+import { INTEGRAL } from './stage/model.js';
+
+/** An amplifier's generators at the ambient temperature: squared densities and corners, nothing unknown. */
+export interface Generators {
+  /** V²/Hz */
+  voltage2: number;
+  /** Hz */
+  voltageCorner: number;
+  /** A²/Hz */
+  current2: number;
+  /** Hz */
+  currentCorner: number;
+}
+
+/**
+ * Powers at the output by contributor in V², from a stage's integrals and an amplifier's generators: each
+ * integral times its generator's e_n², e_n²·f_ce, i_n² or i_n²·f_ci.
+ */
+export function outputPowers(integrals: Float64Array, generators: Generators): Contributions {
+  const { voltage2, voltageCorner, current2, currentCorner } = generators;
+  const shaped = (white: number, flicker: number, corner: number) =>
+    integrals[white] + corner * integrals[flicker];
+  return {
+    source: integrals[INTEGRAL.source],
+    amplifierVoltage: voltage2 * shaped(INTEGRAL.voltageWhite, INTEGRAL.voltageFlicker, voltageCorner),
+    amplifierCurrentSource:
+      current2 * shaped(INTEGRAL.currentSourceWhite, INTEGRAL.currentSourceFlicker, currentCorner),
+    amplifierCurrentFeedback:
+      current2 * shaped(INTEGRAL.currentFeedbackWhite, INTEGRAL.currentFeedbackFlicker, currentCorner),
+    feedback: integrals[INTEGRAL.feedback],
+    bias: integrals[INTEGRAL.bias],
+    excess: 0,
+  };
+}
+
+/** The whole power at the output in V²: the sum of `outputPowers`, without making the budget. */
+export function outputPower(integrals: Float64Array, generators: Generators): number {
+  const { voltage2, voltageCorner, current2, currentCorner } = generators;
+  return (
+    integrals[INTEGRAL.source] +
+    integrals[INTEGRAL.feedback] +
+    integrals[INTEGRAL.bias] +
+    voltage2 * (integrals[INTEGRAL.voltageWhite] + voltageCorner * integrals[INTEGRAL.voltageFlicker]) +
+    current2 *
+      (integrals[INTEGRAL.currentSourceWhite] +
+        integrals[INTEGRAL.currentFeedbackWhite] +
+        currentCorner *
+          (integrals[INTEGRAL.currentSourceFlicker] + integrals[INTEGRAL.currentFeedbackFlicker]))
+  );
+}
+
+/** Where the figures of an amplifier's four noise parameters come from. */
+export interface NoiseOrigins {
+  voltageNoise: Origin;
+  voltageNoiseCorner: Origin;
+  currentNoise: Origin;
+  currentNoiseCorner: Origin;
+}
+
+/**
+ * Relative spread of a total rms that follows from the spreads of the amplifier's noise parameters:
+ * each parameter's spread times the share of the power that it makes (half of the 1/f share for a
+ * corner), as root-sum-square.
+ *
+ * @param power the whole power at the output, V²
+ * Source: Gaussian propagation of uncertainty, JCGM 100:2008 (GUM), 5.1.2.
+ */
+export function totalSpread(
+  integrals: Float64Array,
+  generators: Generators,
+  origins: NoiseOrigins,
+  power: number,
+): Spread {
+  const { voltage2, voltageCorner, current2, currentCorner } = generators;
+  const voltageFlicker = voltage2 * voltageCorner * integrals[INTEGRAL.voltageFlicker];
+  const voltage = voltage2 * integrals[INTEGRAL.voltageWhite] + voltageFlicker;
+  const currentFlicker =
+    current2 *
+    currentCorner *
+    (integrals[INTEGRAL.currentSourceFlicker] + integrals[INTEGRAL.currentFeedbackFlicker]);
+  const current =
+    current2 * (integrals[INTEGRAL.currentSourceWhite] + integrals[INTEGRAL.currentFeedbackWhite]) +
+    currentFlicker;
+  const side = (of: keyof Spread) =>
+    Math.hypot(
+      voltage * ORIGIN_SPREAD[origins.voltageNoise][of],
+      (voltageFlicker / 2) * ORIGIN_SPREAD[origins.voltageNoiseCorner][of],
+      current * ORIGIN_SPREAD[origins.currentNoise][of],
+      (currentFlicker / 2) * ORIGIN_SPREAD[origins.currentNoiseCorner][of],
+    ) / power;
+  return { below: side('below'), above: side('above') };
+}
+
+/** The contributor with the largest power. */
+export function dominantContributor(powers: Contributions): Contributor {
+  return CONTRIBUTORS.reduce((largest, contributor) =>
+    powers[contributor] > powers[largest] ? contributor : largest,
+  );
+}

@@ -1,0 +1,46 @@
+import type { Complex } from '../../numeric/index.js';
+import type { Nodes } from './nodes.js';
+
+/** Where each integral stands in the array that a stage fills: powers at the output, V² per unit of the generator. */
+export const INTEGRAL = {
+  /** the source's own noise, V² */
+  source: 0,
+  /** of e_n², white and 1/f part */
+  voltageWhite: 1,
+  voltageFlicker: 2,
+  /** of i_n² at the + input, Ω² */
+  currentSourceWhite: 3,
+  currentSourceFlicker: 4,
+  /** of i_n² at the − input, Ω² */
+  currentFeedbackWhite: 5,
+  currentFeedbackFlicker: 6,
+  /** thermal noise of the feedback network, V² */
+  feedback: 7,
+  /** thermal noise of load or bias resistor, V² */
+  bias: 8,
+} as const;
+
+export const INTEGRALS = 9;
+
+/** Sums a stage's integrals over nodes for one amplifier: `out` receives INTEGRALS numbers. */
+export type Evaluate = (gainBandwidth: number, inputCapacitance: number, out: Float64Array) => void;
+
+/** A topology at given conditions: the transfer of every generator to the output. */
+export interface StageModel {
+  /** Prepares the nodes once for all amplifiers. GBW in Hz, Infinity = ideal; capacitance in F. */
+  compile(nodes: Nodes): Evaluate;
+  /** |noise gain| of an amplifier at a frequency in Hz. */
+  noiseGain(frequency: number, gainBandwidth: number, inputCapacitance: number): number;
+  /** Noise gain where the loop gain falls to one, against which the minimum stable gain is held. */
+  crossoverNoiseGain(gainBandwidth: number, inputCapacitance: number): number;
+  /** Poles of the transfers in rad/s, in the left half plane, both of each pair. */
+  poles(gainBandwidth: number, inputCapacitance: number): Complex[];
+  /** Whether some amplifier of this input capacitance can have poles off the real axis. */
+  mayResonate(inputCapacitance: number): boolean;
+  /** By how many powers of f the densities grow towards infinity with an ideal amplifier: 0 or 2. */
+  growth(inputCapacitance: number): 0 | 2;
+  /** Nothing depends on frequency with an ideal amplifier without input capacitance. */
+  resistive: boolean;
+  /** Ω that the feedback network puts on the output, Infinity where there is none. */
+  networkResistance: number;
+}

@@ -1,0 +1,107 @@
+import type { OperatingConditions } from '../../conditions/index.js';
+import { polynomialRoots } from '../../numeric/index.js';
+import { INTEGRAL, type Evaluate, type StageModel } from './model.js';
+import type { Nodes } from './nodes.js';
+
+/**
+ * Follower and non-inverting stage. With Z = R + jωL and C the source's and the input capacitance,
+ * D = 1 + Z·(jωC + 1/R_L) divides the source's voltage, and Z/D is the impedance that the current noise of
+ * the + input sees. Noise gain N = gain; the closed loop is N/(1 + jf·N/GBW).
+ * Source: Motchenbacher & Connelly 1993.
+ */
+export function nonInvertingModel({ source, stage }: OperatingConditions): StageModel {
+  const gain = stage.gain ?? 1;
+  const gainResistance = gain > 1 ? (stage.gainResistance ?? 0) : 0;
+  const loadConductance = stage.loadResistance === undefined ? 0 : 1 / stage.loadResistance;
+  const divider = 1 + source.resistance * loadConductance;
+  return {
+    compile: (nodes) =>
+      compile(nodes, { ...source, gain, loadConductance, parallel: gainResistance * (1 - 1 / gain) }),
+    noiseGain: () => gain,
+    crossoverNoiseGain: () => gain,
+    poles(gainBandwidth, inputCapacitance) {
+      const capacitance = source.capacitance + inputCapacitance;
+      return [
+        ...polynomialRoots([
+          divider,
+          source.resistance * capacitance + source.inductance * loadConductance,
+          source.inductance * capacitance,
+        ]),
+        ...(Number.isFinite(gainBandwidth) ? [{ re: (-2 * Math.PI * gainBandwidth) / gain, im: 0 }] : []),
+      ];
+    },
+    mayResonate: (inputCapacitance) => source.inductance > 0 && source.capacitance + inputCapacitance > 0,
+    growth: (inputCapacitance) =>
+      source.inductance > 0 && loadConductance === 0 && source.capacitance + inputCapacitance === 0 ? 2 : 0,
+    resistive: source.inductance === 0 && source.capacitance === 0,
+    networkResistance: gainResistance > 0 ? gainResistance * gain : Infinity,
+  };
+}
+
+interface Circuit {
+  resistance: number;
+  inductance: number;
+  capacitance: number;
+  gain: number;
+  loadConductance: number;
+  /** R_f ∥ R_g */
+  parallel: number;
+}
+
+function compile(nodes: Nodes, circuit: Circuit): Evaluate {
+  const { resistance, inductance, gain, loadConductance, parallel } = circuit;
+  const { count, white, flicker, sourcePower, ambientPower } = nodes;
+  const real = new Float64Array(count);
+  const imaginary = new Float64Array(count);
+  const realPerFarad = new Float64Array(count);
+  const imaginaryPerFarad = new Float64Array(count);
+  const impedance2 = new Float64Array(count);
+  const frequency2 = new Float64Array(count);
+  for (let k = 0; k < count; k++) {
+    const w = nodes.angular[k];
+    realPerFarad[k] = -w * w * inductance;
+    imaginaryPerFarad[k] = w * resistance;
+    real[k] = 1 + resistance * loadConductance + realPerFarad[k] * circuit.capacitance;
+    imaginary[k] = w * inductance * loadConductance + imaginaryPerFarad[k] * circuit.capacitance;
+    impedance2[k] = resistance * resistance + w * w * inductance * inductance;
+    frequency2[k] = nodes.frequency[k] ** 2;
+  }
+  return (gainBandwidth, inputCapacitance, out) => {
+    const slowness = (gain / gainBandwidth) ** 2;
+    let voltageWhite = 0;
+    let voltageFlicker = 0;
+    let source = 0;
+    let currentWhite = 0;
+    let currentFlicker = 0;
+    let feedback = 0;
+    let bias = 0;
+    for (let k = 0; k < count; k++) {
+      const re = real[k] + realPerFarad[k] * inputCapacitance;
+      const im = imaginary[k] + imaginaryPerFarad[k] * inputCapacitance;
+      const divider2 = re * re + im * im;
+      const both = 1 / (divider2 * (1 + frequency2[k] * slowness));
+      const loop = both * divider2;
+      const w = white[k];
+      const weighted = w * loop;
+      const seen = impedance2[k] * both;
+      voltageWhite += weighted;
+      voltageFlicker += flicker[k] * loop;
+      feedback += ambientPower[k] * weighted;
+      source += w * sourcePower[k] * both;
+      currentWhite += w * seen;
+      currentFlicker += flicker[k] * seen;
+      bias += w * ambientPower[k] * seen;
+    }
+    const gain2 = gain * gain;
+    const parallel2 = gain2 * parallel * parallel;
+    out[INTEGRAL.source] = gain2 * source;
+    out[INTEGRAL.voltageWhite] = gain2 * voltageWhite;
+    out[INTEGRAL.voltageFlicker] = gain2 * voltageFlicker;
+    out[INTEGRAL.currentSourceWhite] = gain2 * currentWhite;
+    out[INTEGRAL.currentSourceFlicker] = gain2 * currentFlicker;
+    out[INTEGRAL.currentFeedbackWhite] = parallel2 * voltageWhite;
+    out[INTEGRAL.currentFeedbackFlicker] = parallel2 * voltageFlicker;
+    out[INTEGRAL.feedback] = gain2 * parallel * feedback;
+    out[INTEGRAL.bias] = gain2 * loadConductance * bias;
+  };
+}
