@@ -52,7 +52,10 @@ function checkStage({ conditions }: RankingRequest): FieldError[] {
     if (value !== undefined && !allowed.includes(key))
       add(`stage.${key}`, `${article(stage.topology)} stage doesn’t have this: leave it out`);
   }
-  if (stage.topology === 'non-inverting') checkNonInverting(stage, add);
+  if (stage.topology === 'non-inverting') {
+    checkNonInverting(stage, add);
+    checkLosses(source, stage, add);
+  }
   if (stage.topology === 'inverting' && source.resistance + (stage.gainResistance ?? 0) <= 0)
     add('stage.gainResistance', 'gain resistance and source resistance can’t both be 0 Ω');
   if (stage.topology === 'transimpedance') checkCurrentSource(source, add);
@@ -68,6 +71,16 @@ function checkNonInverting(stage: StageConditions, add: AddError): void {
   if (stage.gain < 1) add('stage.gain', 'gain: a non-inverting stage has a gain of 1 or more');
   if (stage.gain > 1 && !stage.gainResistance)
     add('stage.gainResistance', 'gain resistance: a value above 0 Ω is needed where the gain is above 1');
+}
+
+/** Without any loss, the resonance of the coil with the capacitance across it has an infinite peak. */
+function checkLosses(
+  { resistance, inductance }: RankingRequest['conditions']['source'],
+  { loadResistance }: StageConditions,
+  add: AddError,
+): void {
+  if (resistance === 0 && inductance > 0 && loadResistance === undefined)
+    add('source.resistance', 'source resistance: a coil has one above 0 Ω, or give it a load resistance');
 }
 
 function checkCurrentSource(source: RankingRequest['conditions']['source'], add: AddError): void {

@@ -14,8 +14,9 @@ export interface AmplifierGroup {
   evaluate: Evaluate;
 }
 
-/** Poles nearer to the axis of ln f than this angle make a resonance for which nodes must be found. */
-const SHARP = 0.7;
+/** Resonances of a higher quality get nodes of their own; at this one the poles' angle is about 0.7. */
+const SHARP_QUALITY = 0.776;
+const SHARP_ANGLE = 0.7;
 /** A group's resonances may spread over this many times their width. */
 const SPREAD = 4;
 
@@ -39,10 +40,8 @@ export function groupAmplifiers(
     const inputCapacitance = columns.inputCapacitance[row];
     if (staysClosed && inputCapacitance === 0 && columns.gainBandwidth[row] === Infinity)
       closedForm.push(row);
-    else if (!model.mayResonate(inputCapacitance)) smooth.add(row);
-    else placeByPoles(model, columns, row, smooth, resonant);
+    else placeByQuality(model, columns, row, smooth, resonant);
   }
-  smooth.widenByExtremes();
   return [
     ...(closedForm.length > 0
       ? [{ rows: closedForm, evaluate: model.compile(closedFormNode(conditions)) }]
@@ -59,17 +58,23 @@ interface ResonantRow {
   poles: PoleRange[];
 }
 
-function placeByPoles(
+function placeByQuality(
   model: StageModel,
   columns: DynamicColumns,
   row: number,
   smooth: QuadratureRows,
   resonant: ResonantRow[],
 ): void {
-  const poles = model.poles(columns.gainBandwidth[row], columns.inputCapacitance[row]).map(poleRange);
-  const sharpest = poles.reduce((least, pole) => (pole.angle < least.angle ? pole : least));
-  if (sharpest.angle < SHARP) resonant.push({ row, sharpest, poles });
-  else smooth.add(row, poles);
+  const gainBandwidth = columns.gainBandwidth[row];
+  const inputCapacitance = columns.inputCapacitance[row];
+  const quality = model.quality(gainBandwidth, inputCapacitance);
+  if (quality < SHARP_QUALITY) {
+    smooth.addSmooth(row, quality);
+    return;
+  }
+  const poles = model.poles(gainBandwidth, inputCapacitance).map(poleRange);
+  poles.sort((a, b) => a.angle - b.angle);
+  resonant.push({ row, sharpest: poles[0], poles });
 }
 
 function splitByResonance(
@@ -88,7 +93,7 @@ function splitByResonance(
       start = sharpest.from;
       angle = sharpest.angle;
     }
-    groups[groups.length - 1].add(row, poles);
+    groups[groups.length - 1].addResonant(row, poles);
   }
   return groups;
 }
@@ -96,57 +101,67 @@ function splitByResonance(
 /** Rows that share a quadrature, with the ranges in which their poles lie. */
 class QuadratureRows {
   readonly rows: number[] = [];
-  private readonly ranges = new Map<string, PoleRange>();
-  private readonly slowest = [Infinity, Infinity];
-  private readonly fastest = [0, 0];
-  private growth: 0 | 2 = 0;
+  private readonly ranges: PoleRange[] = [];
+  private readonly gainBandwidths = { least: Infinity, most: 0 };
+  private readonly inputCapacitances = { least: Infinity, most: 0 };
+  private quality = 0;
 
   constructor(
     private readonly model: StageModel,
     private readonly columns: DynamicColumns,
   ) {}
 
-  /** Takes a row with its poles; without them, its extremes are noted. */
-  add(row: number, poles?: PoleRange[]): void {
-    this.rows.push(row);
-    const inputCapacitance = this.columns.inputCapacitance[row];
-    if (this.model.growth(inputCapacitance) === 2) this.growth = 2;
-    if (poles) this.widen(poles);
-    else this.noteExtremes(this.columns.gainBandwidth[row], inputCapacitance);
+  addSmooth(row: number, quality: number): void {
+    this.add(row);
+    if (quality > this.quality) this.quality = quality;
   }
 
-  /** Poles on the real axis move one way with each parameter: those of the extremes enclose all. */
-  widenByExtremes(): void {
-    if (this.slowest[0] === Infinity && this.slowest[1] === Infinity) return;
-    for (const gainBandwidth of [this.slowest[0], this.fastest[0]]) {
-      for (const inputCapacitance of [this.slowest[1], this.fastest[1]])
-        this.widen(this.model.poles(gainBandwidth, inputCapacitance).map(poleRange));
-    }
+  /** Takes a row with its poles, the sharpest first: the n-th poles of all rows make one range. */
+  addResonant(row: number, poles: PoleRange[]): void {
+    this.add(row);
+    poles.forEach((pole, place) => {
+      const range = (this.ranges[place] ??= { ...pole });
+      range.from = Math.min(range.from, pole.from);
+      range.to = Math.max(range.to, pole.to);
+      range.angle = Math.min(range.angle, pole.angle);
+    });
   }
 
   toGroup(conditions: OperatingConditions): AmplifierGroup {
-    const nodes = quadratureNodes(conditions, [...this.ranges.values()], this.growth);
+    const { most } = this.inputCapacitances;
+    const nodes = quadratureNodes(
+      conditions,
+      this.ranges.length > 0 ? this.ranges : this.smoothRanges(),
+      Math.max(this.model.growth(this.inputCapacitances.least), this.model.growth(most)) as 0 | 2,
+    );
     return { rows: this.rows, evaluate: this.model.compile(nodes) };
   }
 
-  private noteExtremes(gainBandwidth: number, inputCapacitance: number): void {
-    this.slowest[0] = Math.min(this.slowest[0], gainBandwidth);
-    this.slowest[1] = Math.min(this.slowest[1], inputCapacitance);
-    this.fastest[0] = Math.max(this.fastest[0], gainBandwidth);
-    this.fastest[1] = Math.max(this.fastest[1], inputCapacitance);
+  private add(row: number): void {
+    this.rows.push(row);
+    widen(this.gainBandwidths, this.columns.gainBandwidth[row]);
+    widen(this.inputCapacitances, this.columns.inputCapacitance[row]);
   }
 
-  private widen(poles: PoleRange[]): void {
-    poles.sort((a, b) => a.angle - b.angle);
-    poles.forEach((pole, place) => {
-      const name = pole.angle < SHARP ? `sharp ${place}` : 'smooth';
-      const range = this.ranges.get(name);
-      if (!range) this.ranges.set(name, { ...pole });
-      else {
-        range.from = Math.min(range.from, pole.from);
-        range.to = Math.max(range.to, pole.to);
-        range.angle = Math.min(range.angle, pole.angle);
-      }
-    });
+  /** Smooth poles move one way with each parameter: those of the extremes enclose all. */
+  private smoothRanges(): PoleRange[] {
+    const corners = Object.values(this.gainBandwidths).flatMap((gainBandwidth) =>
+      Object.values(this.inputCapacitances).flatMap((inputCapacitance) =>
+        this.model.poles(gainBandwidth, inputCapacitance).map(poleRange),
+      ),
+    );
+    if (corners.length === 0) return [];
+    return [
+      {
+        from: Math.min(...corners.map(({ from }) => from)),
+        to: Math.max(...corners.map(({ to }) => to)),
+        angle: this.quality > 0.5 ? SHARP_ANGLE : Math.PI / 2,
+      },
+    ];
   }
+}
+
+function widen(range: { least: number; most: number }, value: number): void {
+  if (value < range.least) range.least = value;
+  if (value > range.most) range.most = value;
 }

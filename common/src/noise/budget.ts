@@ -84,13 +84,14 @@ export function totalSpread(
   const current =
     current2 * (integrals[INTEGRAL.currentSourceWhite] + integrals[INTEGRAL.currentFeedbackWhite]) +
     currentFlicker;
+  const terms = [
+    [voltage, origins.voltageNoise],
+    [voltageFlicker / 2, origins.voltageNoiseCorner],
+    [current, origins.currentNoise],
+    [currentFlicker / 2, origins.currentNoiseCorner],
+  ] as const;
   const side = (of: keyof Spread) =>
-    Math.hypot(
-      voltage * ORIGIN_SPREAD[origins.voltageNoise][of],
-      (voltageFlicker / 2) * ORIGIN_SPREAD[origins.voltageNoiseCorner][of],
-      current * ORIGIN_SPREAD[origins.currentNoise][of],
-      (currentFlicker / 2) * ORIGIN_SPREAD[origins.currentNoiseCorner][of],
-    ) / power;
+    Math.hypot(...terms.map(([share, origin]) => share * ORIGIN_SPREAD[origin][of])) / power;
   return { below: side('below'), above: side('above') };
 }
 

@@ -45,46 +45,39 @@ function durandKerner(coefficients: readonly number[]): Complex[] {
   const degree = coefficients.length - 1;
   const scale = (Math.abs(coefficients[0] / coefficients[degree]) || 1) ** (1 / degree);
   const monic = coefficients.map((c, k) => (c / coefficients[degree]) * scale ** (k - degree));
-  const roots = Array.from({ length: degree }, (_, k) => polar(1, (2 * Math.PI * k) / degree + 0.4));
+  const re = Float64Array.from(monic.slice(1), (_, k) => Math.cos((2 * Math.PI * k) / degree + 0.4));
+  const im = Float64Array.from(monic.slice(1), (_, k) => Math.sin((2 * Math.PI * k) / degree + 0.4));
   for (let iteration = 0; iteration < ITERATIONS; iteration++) {
-    let largest = 0;
-    for (let k = 0; k < degree; k++) {
-      const step = divide(evaluate(monic, roots[k]), separation(roots, k));
-      roots[k] = { re: roots[k].re - step.re, im: roots[k].im - step.im };
-      largest = Math.max(largest, Math.hypot(step.re, step.im) / Math.hypot(roots[k].re, roots[k].im));
+    if (improve(monic, re, im) < TOLERANCE) break;
+  }
+  return Array.from(re, (x, k) => ({ re: x * scale, im: im[k] * scale }));
+}
+
+/** Moves each root by the polynomial over the product of its distances to the others; answers the largest relative step. */
+function improve(monic: readonly number[], re: Float64Array, im: Float64Array): number {
+  let largest = 0;
+  for (let k = 0; k < re.length; k++) {
+    const x = re[k];
+    const y = im[k];
+    let valueRe = 1;
+    let valueIm = 0;
+    for (let j = monic.length - 2; j >= 0; j--) {
+      [valueRe, valueIm] = [valueRe * x - valueIm * y + monic[j], valueRe * y + valueIm * x];
     }
-    if (largest < TOLERANCE) break;
+    let productRe = 1;
+    let productIm = 0;
+    for (let j = 0; j < re.length; j++) {
+      if (j === k) continue;
+      const dx = x - re[j];
+      const dy = y - im[j];
+      [productRe, productIm] = [productRe * dx - productIm * dy, productRe * dy + productIm * dx];
+    }
+    const norm = productRe * productRe + productIm * productIm;
+    const stepRe = (valueRe * productRe + valueIm * productIm) / norm;
+    const stepIm = (valueIm * productRe - valueRe * productIm) / norm;
+    re[k] -= stepRe;
+    im[k] -= stepIm;
+    largest = Math.max(largest, Math.hypot(stepRe, stepIm) / Math.hypot(re[k], im[k]));
   }
-  return roots.map(({ re, im }) => ({ re: re * scale, im: im * scale }));
-}
-
-function separation(roots: readonly Complex[], k: number): Complex {
-  let product: Complex = { re: 1, im: 0 };
-  for (let j = 0; j < roots.length; j++) {
-    if (j !== k)
-      product = multiply(product, { re: roots[k].re - roots[j].re, im: roots[k].im - roots[j].im });
-  }
-  return product;
-}
-
-function evaluate(coefficients: readonly number[], x: Complex): Complex {
-  let value: Complex = { re: 0, im: 0 };
-  for (let k = coefficients.length - 1; k >= 0; k--) {
-    value = multiply(value, x);
-    value = { re: value.re + coefficients[k], im: value.im };
-  }
-  return value;
-}
-
-function polar(radius: number, angle: number): Complex {
-  return { re: radius * Math.cos(angle), im: radius * Math.sin(angle) };
-}
-
-function multiply(a: Complex, b: Complex): Complex {
-  return { re: a.re * b.re - a.im * b.im, im: a.re * b.im + a.im * b.re };
-}
-
-function divide(a: Complex, b: Complex): Complex {
-  const norm = b.re * b.re + b.im * b.im;
-  return { re: (a.re * b.re + a.im * b.im) / norm, im: (a.im * b.re - a.re * b.im) / norm };
+  return largest;
 }

@@ -22,7 +22,14 @@ export const OP_AMP_PARAMETERS = [
     required: true,
     fallback: null,
     displayUnit: 'nV/√Hz',
-    synonyms: ['en', 'input voltage noise density', 'Rauschspannung', 'Spannungsrauschen', 'bruit de tension', 'vn'],
+    synonyms: [
+      'en',
+      'input voltage noise density',
+      'Rauschspannung',
+      'Spannungsrauschen',
+      'bruit de tension',
+      'vn',
+    ],
     help: 'Input voltage noise density well above its 1/f corner.',
   },
   {
@@ -66,7 +73,15 @@ export const OP_AMP_PARAMETERS = [
     bounds: { above: 0, to: 1e13 },
     fallback: null,
     displayUnit: 'MHz',
-    synonyms: ['GBW', 'GBP', 'GBWP', 'unity gain bandwidth', 'Bandbreite', 'produit gain-bande', 'gain bandwidth'],
+    synonyms: [
+      'GBW',
+      'GBP',
+      'GBWP',
+      'unity gain bandwidth',
+      'Bandbreite',
+      'produit gain-bande',
+      'gain bandwidth',
+    ],
     help: 'Open-loop gain times frequency on the slope of 20 dB a decade.',
   },
   {

@@ -1,1 +1,11 @@
 export * from './kinds.js';
+export * from './quantities.js';
+export { PREFIXES, type Prefix } from './prefixes.js';
+export type { Unit } from './unit.js';
+export * from './parseUnit.js';
+export * from './displayUnit.js';
+export * from './parseQuantity.js';
+export * from './splitQuantity.js';
+export * from './formatQuantity.js';
+export * from './formatEditable.js';
+export * from './column.js';

@@ -1,6 +1,6 @@
 import type { OperatingConditions } from '../../conditions/index.js';
-import { polynomialRoots } from '../../numeric/index.js';
-import { INTEGRAL, type Evaluate, type StageModel } from './model.js';
+import { polynomialRoots, type Complex } from '../../numeric/index.js';
+import { INTEGRAL, quadraticQuality, type Evaluate, type StageModel } from './model.js';
 import type { Nodes } from './nodes.js';
 
 interface Circuit {
@@ -35,8 +35,7 @@ export function invertingModel({ source, stage }: OperatingConditions): StageMod
     noiseGain: (frequency, _gainBandwidth, inputCapacitance) => noiseGain(frequency, inputCapacitance),
     crossoverNoiseGain: () => 1 + gain,
     poles: (gainBandwidth, inputCapacitance) => poles(circuit, gainBandwidth, inputCapacitance),
-    mayResonate: (inputCapacitance) =>
-      inputCapacitance > 0 || source.inductance > 0 || source.capacitance > 0,
+    quality: (gainBandwidth, inputCapacitance) => quality(circuit, gainBandwidth, inputCapacitance),
     growth: (inputCapacitance) => (inputCapacitance > 0 ? 2 : 0),
     resistive: source.inductance === 0 && source.capacitance === 0,
     networkResistance: circuit.feedbackResistance,
@@ -63,8 +62,8 @@ function networkGain(
   };
 }
 
-/** Roots of S + (s/Ω)·(S·(1 + s·C_in·R_f) + R_f·P), with S = Z + R_g·P, P = 1 + sCZ, Ω = 2π·GBW, and of S. */
-function poles(circuit: Circuit, gainBandwidth: number, inputCapacitance: number) {
+/** S + (s/Ω)·(S·(1 + s·C_in·R_f) + R_f·P) and S in powers of s: S = Z + R_g·P, P = 1 + sCZ, Ω = 2π·GBW. */
+function denominators(circuit: Circuit, gainBandwidth: number, inputCapacitance: number): number[][] {
   const {
     resistance: r,
     inductance: l,
@@ -74,8 +73,6 @@ function poles(circuit: Circuit, gainBandwidth: number, inputCapacitance: number
   } = circuit;
   const divider = [1, r * c, l * c];
   const series = [r + rg, l + rg * divider[1], rg * divider[2]];
-  const sourcePoles = polynomialRoots(series);
-  if (!Number.isFinite(gainBandwidth)) return sourcePoles;
   const unity = 2 * Math.PI * gainBandwidth;
   const delay = inputCapacitance * rf;
   const closedLoop = [0, 1, 2, 3, 4].map(
@@ -83,7 +80,24 @@ function poles(circuit: Circuit, gainBandwidth: number, inputCapacitance: number
       (series[k] ?? 0) +
       ((series[k - 1] ?? 0) + delay * (series[k - 2] ?? 0) + rf * (divider[k - 1] ?? 0)) / unity,
   );
-  return [...sourcePoles, ...polynomialRoots(closedLoop)];
+  return [series, closedLoop];
+}
+
+function poles(circuit: Circuit, gainBandwidth: number, inputCapacitance: number): Complex[] {
+  return denominators(circuit, gainBandwidth, inputCapacitance).flatMap(polynomialRoots);
+}
+
+function quality(circuit: Circuit, gainBandwidth: number, inputCapacitance: number): number {
+  const { resistance, gainResistance, feedbackResistance, inductance, capacitance } = circuit;
+  if (inductance === 0 && capacitance === 0) {
+    const unity = 2 * Math.PI * gainBandwidth;
+    const gain = 1 + feedbackResistance / (resistance + gainResistance);
+    return quadraticQuality(1, gain / unity, (inputCapacitance * feedbackResistance) / unity);
+  }
+  const sharpest = Math.max(
+    ...poles(circuit, gainBandwidth, inputCapacitance).map(({ re, im }) => Math.hypot(re, im) / Math.abs(re)),
+  );
+  return sharpest === 1 ? 0 : sharpest / 2;
 }
 
 function compile(nodes: Nodes, circuit: Circuit): Evaluate {

@@ -35,12 +35,17 @@ export interface StageModel {
   crossoverNoiseGain(gainBandwidth: number, inputCapacitance: number): number;
   /** Poles of the transfers in rad/s, in the left half plane, both of each pair. */
   poles(gainBandwidth: number, inputCapacitance: number): Complex[];
-  /** Whether some amplifier of this input capacitance can have poles off the real axis. */
-  mayResonate(inputCapacitance: number): boolean;
+  /** Quality factor of the amplifier's sharpest resonance: above ½ its poles are off the real axis. */
+  quality(gainBandwidth: number, inputCapacitance: number): number;
   /** By how many powers of f the densities grow towards infinity with an ideal amplifier: 0 or 2. */
   growth(inputCapacitance: number): 0 | 2;
   /** Nothing depends on frequency with an ideal amplifier without input capacitance. */
   resistive: boolean;
   /** Ω that the feedback network puts on the output, Infinity where there is none. */
   networkResistance: number;
+}
+
+/** Quality factor of c₀ + c₁s + c₂s², √(c₀c₂)/c₁; 0 where there is no second-order term. */
+export function quadraticQuality(c0: number, c1: number, c2: number): number {
+  return c2 === 0 ? 0 : Math.sqrt(c0 * c2) / c1;
 }

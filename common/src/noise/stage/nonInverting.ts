@@ -1,6 +1,6 @@
 import type { OperatingConditions } from '../../conditions/index.js';
 import { polynomialRoots } from '../../numeric/index.js';
-import { INTEGRAL, type Evaluate, type StageModel } from './model.js';
+import { INTEGRAL, quadraticQuality, type Evaluate, type StageModel } from './model.js';
 import type { Nodes } from './nodes.js';
 
 /**
@@ -14,23 +14,25 @@ export function nonInvertingModel({ source, stage }: OperatingConditions): Stage
   const gainResistance = gain > 1 ? (stage.gainResistance ?? 0) : 0;
   const loadConductance = stage.loadResistance === undefined ? 0 : 1 / stage.loadResistance;
   const divider = 1 + source.resistance * loadConductance;
+  const denominator = (inputCapacitance: number): [number, number, number] => {
+    const capacitance = source.capacitance + inputCapacitance;
+    return [
+      divider,
+      source.resistance * capacitance + source.inductance * loadConductance,
+      source.inductance * capacitance,
+    ];
+  };
   return {
     compile: (nodes) =>
       compile(nodes, { ...source, gain, loadConductance, parallel: gainResistance * (1 - 1 / gain) }),
     noiseGain: () => gain,
     crossoverNoiseGain: () => gain,
-    poles(gainBandwidth, inputCapacitance) {
-      const capacitance = source.capacitance + inputCapacitance;
-      return [
-        ...polynomialRoots([
-          divider,
-          source.resistance * capacitance + source.inductance * loadConductance,
-          source.inductance * capacitance,
-        ]),
-        ...(Number.isFinite(gainBandwidth) ? [{ re: (-2 * Math.PI * gainBandwidth) / gain, im: 0 }] : []),
-      ];
-    },
-    mayResonate: (inputCapacitance) => source.inductance > 0 && source.capacitance + inputCapacitance > 0,
+    poles: (gainBandwidth, inputCapacitance) => [
+      ...polynomialRoots(denominator(inputCapacitance)),
+      ...(Number.isFinite(gainBandwidth) ? [{ re: (-2 * Math.PI * gainBandwidth) / gain, im: 0 }] : []),
+    ],
+    quality: (_gainBandwidth, inputCapacitance) =>
+      source.inductance === 0 ? 0 : quadraticQuality(...denominator(inputCapacitance)),
     growth: (inputCapacitance) =>
       source.inductance > 0 && loadConductance === 0 && source.capacitance + inputCapacitance === 0 ? 2 : 0,
     resistive: source.inductance === 0 && source.capacitance === 0,

@@ -1,6 +1,6 @@
 import type { OperatingConditions } from '../../conditions/index.js';
 import { polynomialRoots } from '../../numeric/index.js';
-import { INTEGRAL, type Evaluate, type StageModel } from './model.js';
+import { INTEGRAL, quadraticQuality, type Evaluate, type StageModel } from './model.js';
 import type { Nodes } from './nodes.js';
 
 interface Circuit {
@@ -30,16 +30,10 @@ export function transimpedanceModel({ source, stage }: OperatingConditions): Sta
       noiseGain(circuit, frequency, gainBandwidth, inputCapacitance),
     crossoverNoiseGain: (gainBandwidth, inputCapacitance) =>
       crossoverNoiseGain(circuit, gainBandwidth, inputCapacitance),
-    poles(gainBandwidth, inputCapacitance) {
-      const { conductance, capacitance, feedback } = totals(circuit, gainBandwidth, inputCapacitance);
-      const unity = 2 * Math.PI * gainBandwidth;
-      return polynomialRoots([
-        circuit.feedbackConductance,
-        feedback + conductance / unity,
-        (feedback + capacitance) / unity,
-      ]);
-    },
-    mayResonate: (inputCapacitance) => source.capacitance + inputCapacitance > 0,
+    poles: (gainBandwidth, inputCapacitance) =>
+      polynomialRoots(denominator(circuit, gainBandwidth, inputCapacitance)),
+    quality: (gainBandwidth, inputCapacitance) =>
+      quadraticQuality(...denominator(circuit, gainBandwidth, inputCapacitance)),
     growth: (inputCapacitance) =>
       (circuit.feedbackCapacitance === 'auto' || circuit.feedbackCapacitance === 0) &&
       source.capacitance + inputCapacitance > 0
@@ -78,6 +72,17 @@ function totals(circuit: Circuit, gainBandwidth: number, inputCapacitance: numbe
       ? flatFeedbackCapacitance(capacitance, 1 / circuit.feedbackConductance, gainBandwidth)
       : circuit.feedbackCapacitance;
   return { conductance: circuit.sourceConductance + circuit.feedbackConductance, capacitance, feedback };
+}
+
+/** Y_f + (s/Ω)·P in powers of s, with Ω = 2π·GBW. */
+function denominator(
+  circuit: Circuit,
+  gainBandwidth: number,
+  inputCapacitance: number,
+): [number, number, number] {
+  const { conductance, capacitance, feedback } = totals(circuit, gainBandwidth, inputCapacitance);
+  const unity = 2 * Math.PI * gainBandwidth;
+  return [circuit.feedbackConductance, feedback + conductance / unity, (feedback + capacitance) / unity];
 }
 
 function noiseGain(

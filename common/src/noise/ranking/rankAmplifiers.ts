@@ -1,0 +1,192 @@
+import type { OperatingConditions, PartFilter, RankingTarget } from '../../conditions/index.js';
+import { smallestPositions } from '../../numeric/index.js';
+import type { ExclusionReason } from '../cautions.js';
+import type { SourceFloor, StageFigures } from '../figures.js';
+import { stageModel } from '../stage/stageModel.js';
+import type { StageModel } from '../stage/model.js';
+import { stageAmplifier } from '../stageAmplifier.js';
+import { stageCautions } from '../stageCautions.js';
+import { figuresFrom, floorFrom } from '../stageFigures.js';
+import { amplifierAt, type AmplifierColumns } from './columns.js';
+import { isSought, prepareExclusions, searchWords } from './exclusions.js';
+import { countQuietSet, findQuietest, isInQuietSet, type Quietest } from './quietSet.js';
+import { scoreRows, type Scores } from './scores.js';
+
+/** The figures by which a ranking can be sorted; `-` in front = descending. */
+export const RANKING_SORTS = [
+  'inputNoiseRms',
+  'inputNoiseDensity',
+  'outputNoiseRms',
+  'noiseFigure',
+  'aboveFloor',
+  'closedLoopBandwidth',
+] as const;
+export type RankingSort = (typeof RANKING_SORTS)[number];
+
+/** What is to be ranked, and which part of the answer is wanted. */
+export interface RankingQuery {
+  conditions: OperatingConditions;
+  filter: PartFilter;
+  target: RankingTarget;
+  sort: RankingSort;
+  descending: boolean;
+  limit: number;
+  offset: number;
+}
+
+/** Where a part stands: which of the given libraries, and which row of it. */
+export interface PartPlace {
+  library: number;
+  row: number;
+}
+
+export interface RankedPart extends PartPlace {
+  rank: number;
+  figures: StageFigures;
+  quietSet: boolean;
+  /** null where there is no target */
+  meetsTarget: boolean | null;
+}
+
+export interface ExcludedPart extends PartPlace {
+  reason: ExclusionReason;
+}
+
+export interface Ranking {
+  /** how many parts are ranked */
+  total: number;
+  excluded: ExcludedPart[];
+  floor: SourceFloor;
+  quietSetTotal: number;
+  items: RankedPart[];
+}
+
+/**
+ * Ranks the op-amps of several libraries by a figure of the stage that each makes.
+ *
+ * @param query conditions free of `checkConditions` errors, and the page wanted
+ * @param libraries columns in SI units
+ * @returns the page's parts with all figures, the excluded parts with their reasons, the source floor and
+ *   the size of the quiet set; parts with equal figures stand in the order of the libraries
+ */
+export function rankAmplifiers(query: RankingQuery, libraries: readonly AmplifierColumns[]): Ranking {
+  const { conditions } = query;
+  const model = stageModel(conditions);
+  const { accepted, excluded } = sift(query, model, libraries);
+  const scores = libraries.map((columns, library) =>
+    scoreRows(conditions, model, columns, accepted[library]),
+  );
+  const quietest = findQuietest(scores);
+  const keys = sortKeys(query, model, libraries, scores);
+  const page = smallestPositions(keys, query.offset + query.limit).subarray(query.offset);
+  const places = placesOf(scores);
+  return {
+    total: keys.length,
+    excluded,
+    floor: floorFrom(conditions, model),
+    quietSetTotal: countQuietSet(scores, quietest),
+    items: Array.from(page, (place, index) =>
+      rankedPart(query, model, libraries, scores, quietest!, places(place), query.offset + index + 1),
+    ),
+  };
+}
+
+/** The excluded parts of the libraries, without ranking the others. */
+export function findExcluded(
+  query: Pick<RankingQuery, 'conditions' | 'filter'>,
+  libraries: readonly AmplifierColumns[],
+): ExcludedPart[] {
+  return sift(query, stageModel(query.conditions), libraries).excluded;
+}
+
+function sift(
+  { conditions, filter }: Pick<RankingQuery, 'conditions' | 'filter'>,
+  model: StageModel,
+  libraries: readonly AmplifierColumns[],
+) {
+  const exclude = prepareExclusions(conditions, filter, model);
+  const words = searchWords(filter.search);
+  const excluded: ExcludedPart[] = [];
+  const accepted = libraries.map((columns, library) => {
+    const rows = new Uint32Array(columns.count);
+    let count = 0;
+    for (let row = 0; row < columns.count; row++) {
+      if (words.length > 0 && !isSought(columns, row, words)) continue;
+      const reason = exclude(columns, row);
+      if (reason) excluded.push({ library, row, reason });
+      else rows[count++] = row;
+    }
+    return rows.subarray(0, count);
+  });
+  return { accepted, excluded };
+}
+
+interface ScoredPlace {
+  library: number;
+  position: number;
+}
+
+/** From the position in the joined keys of all libraries to the library and the position in its scores. */
+function placesOf(scores: readonly Scores[]): (joined: number) => ScoredPlace {
+  return (joined) => {
+    let library = 0;
+    let position = joined;
+    while (position >= scores[library].rows.length) position -= scores[library++].rows.length;
+    return { library, position };
+  };
+}
+
+function sortKeys(
+  query: RankingQuery,
+  model: StageModel,
+  libraries: readonly AmplifierColumns[],
+  scores: readonly Scores[],
+): Float64Array {
+  const keys = new Float64Array(scores.reduce((total, { rows }) => total + rows.length, 0));
+  const sign = query.descending ? -1 : 1;
+  let joined = 0;
+  scores.forEach((scored, library) => {
+    for (let position = 0; position < scored.rows.length; position++) {
+      const value =
+        query.sort === 'inputNoiseRms'
+          ? scored.inputNoiseRms[position]
+          : figuresAt(query.conditions, model, libraries[library], scored, position)[query.sort];
+      keys[joined++] = value === null ? NaN : sign * value;
+    }
+  });
+  return keys;
+}
+
+function figuresAt(
+  conditions: OperatingConditions,
+  model: StageModel,
+  columns: AmplifierColumns,
+  scores: Scores,
+  position: number,
+) {
+  const amplifier = amplifierAt(columns, scores.rows[position]);
+  const { evaluate } = scores.groups[scores.groupOf[position]];
+  return figuresFrom(conditions, model, stageAmplifier(conditions, amplifier), evaluate, scores.atReference);
+}
+
+function rankedPart(
+  { conditions, filter, target }: RankingQuery,
+  model: StageModel,
+  libraries: readonly AmplifierColumns[],
+  scores: readonly Scores[],
+  quietest: Quietest,
+  { library, position }: ScoredPlace,
+  rank: number,
+): RankedPart {
+  const row = scores[library].rows[position];
+  const figures = figuresAt(conditions, model, libraries[library], scores[library], position);
+  const cautions = stageCautions(conditions, model, amplifierAt(libraries[library], row), filter);
+  return {
+    library,
+    row,
+    rank,
+    figures: { ...figures, cautions },
+    quietSet: isInQuietSet(scores[library], position, quietest),
+    meetsTarget: target.inputNoiseRms === undefined ? null : figures.inputNoiseRms <= target.inputNoiseRms,
+  };
+}

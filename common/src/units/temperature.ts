@@ -1,0 +1,11 @@
+import { decimalOfNumber, decimalToNumber } from './decimal.js';
+import { CELSIUS, fromSi } from './unit.js';
+
+/** Whether a temperature is low enough, below −100 °C, to be shown in kelvin. */
+export function isCold(kelvin: number): boolean {
+  return kelvin < 173.15;
+}
+
+export function inCelsius(kelvin: number): number {
+  return decimalToNumber(fromSi(decimalOfNumber(kelvin), CELSIUS));
+}
