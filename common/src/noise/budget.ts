@@ -40,9 +40,7 @@ export function outputPowers(integrals: Float64Array, generators: Generators): C
 export function outputPower(integrals: Float64Array, generators: Generators): number {
   const { voltage2, voltageCorner, current2, currentCorner } = generators;
   return (
-    integrals[INTEGRAL.source] +
-    integrals[INTEGRAL.feedback] +
-    integrals[INTEGRAL.bias] +
+    fixedPower(integrals) +
     voltage2 * (integrals[INTEGRAL.voltageWhite] + voltageCorner * integrals[INTEGRAL.voltageFlicker]) +
     current2 *
       (integrals[INTEGRAL.currentSourceWhite] +
@@ -50,6 +48,11 @@ export function outputPower(integrals: Float64Array, generators: Generators): nu
         currentCorner *
           (integrals[INTEGRAL.currentSourceFlicker] + integrals[INTEGRAL.currentFeedbackFlicker]))
   );
+}
+
+/** The power at the output in V² that source and resistors make, whatever the amplifier's own noise. */
+export function fixedPower(integrals: Float64Array): number {
+  return integrals[INTEGRAL.source] + integrals[INTEGRAL.feedback] + integrals[INTEGRAL.bias];
 }
 
 /** Where the figures of an amplifier's four noise parameters come from. */
@@ -84,15 +87,16 @@ export function totalSpread(
   const current =
     current2 * (integrals[INTEGRAL.currentSourceWhite] + integrals[INTEGRAL.currentFeedbackWhite]) +
     currentFlicker;
-  const terms = [
-    [voltage, origins.voltageNoise],
-    [voltageFlicker / 2, origins.voltageNoiseCorner],
-    [current, origins.currentNoise],
-    [currentFlicker / 2, origins.currentNoiseCorner],
-  ] as const;
-  const side = (of: keyof Spread) =>
-    Math.hypot(...terms.map(([share, origin]) => share * ORIGIN_SPREAD[origin][of])) / power;
-  return { below: side('below'), above: side('above') };
+  const of = (share: number, origin: Origin, side: keyof Spread) =>
+    (share * ORIGIN_SPREAD[origin][side]) ** 2;
+  const spread = (side: keyof Spread) =>
+    Math.sqrt(
+      of(voltage, origins.voltageNoise, side) +
+        of(voltageFlicker / 2, origins.voltageNoiseCorner, side) +
+        of(current, origins.currentNoise, side) +
+        of(currentFlicker / 2, origins.currentNoiseCorner, side),
+    ) / power;
+  return { below: spread('below'), above: spread('above') };
 }
 
 /** The contributor with the largest power. */

@@ -18,9 +18,6 @@ export function findQuietest(libraries: readonly Scores[]): Quietest | null {
   return best && { ...best, above: best.inputNoiseRms * best.scores.spreadAt(best.position).above };
 }
 
-/** No spread reaches √(0.4² + 0.2²) = 0.447; a total of over twice the quietest one is out whatever its origins. */
-const FARTHEST = 2.001;
-
 /**
  * Whether a part belongs to the quiet set: its total can't be told from the quietest one's at one sigma,
  * T − T_best ≤ √(σ_below² + σ_above,best²), given how well the parameters of both are known.
@@ -29,9 +26,9 @@ const FARTHEST = 2.001;
  */
 export function isInQuietSet(scores: Scores, position: number, quietest: Quietest): boolean {
   const total = scores.inputNoiseRms[position];
-  if (total > FARTHEST * quietest.inputNoiseRms) return false;
   const difference = total - quietest.inputNoiseRms;
-  return difference <= Math.hypot(total * scores.spreadAt(position).below, quietest.above);
+  const isNear = (spread: number) => difference ** 2 <= (total * spread) ** 2 + quietest.above ** 2;
+  return isNear(scores.spreadLimitAt(position)) && isNear(scores.spreadAt(position).below);
 }
 
 /** How many parts belong to the quiet set. */

@@ -8,6 +8,7 @@ import { stageAmplifier } from '../stageAmplifier.js';
 import { stageCautions } from '../stageCautions.js';
 import { figuresFrom, floorFrom } from '../stageFigures.js';
 import { amplifierAt, type AmplifierColumns } from './columns.js';
+import { findContenders } from './contenders.js';
 import { isSought, prepareExclusions, searchWords } from './exclusions.js';
 import { countQuietSet, findQuietest, isInQuietSet, type Quietest } from './quietSet.js';
 import { scoreRows, type Scores } from './scores.js';
@@ -73,15 +74,19 @@ export function rankAmplifiers(query: RankingQuery, libraries: readonly Amplifie
   const { conditions } = query;
   const model = stageModel(conditions);
   const { accepted, excluded } = sift(query, model, libraries);
+  const contenders =
+    query.sort === 'inputNoiseRms' && !query.descending
+      ? findContenders(conditions, model, libraries, accepted, query.offset + query.limit)
+      : accepted;
   const scores = libraries.map((columns, library) =>
-    scoreRows(conditions, model, columns, accepted[library]),
+    scoreRows(conditions, model, columns, contenders[library]),
   );
   const quietest = findQuietest(scores);
   const keys = sortKeys(query, model, libraries, scores);
   const page = smallestPositions(keys, query.offset + query.limit).subarray(query.offset);
   const places = placesOf(scores);
   return {
-    total: keys.length,
+    total: accepted.reduce((total, rows) => total + rows.length, 0),
     excluded,
     floor: floorFrom(conditions, model),
     quietSetTotal: countQuietSet(scores, quietest),

@@ -37,6 +37,7 @@ export function invertingModel({ source, stage }: OperatingConditions): StageMod
     poles: (gainBandwidth, inputCapacitance) => poles(circuit, gainBandwidth, inputCapacitance),
     quality: (gainBandwidth, inputCapacitance) => quality(circuit, gainBandwidth, inputCapacitance),
     growth: (inputCapacitance) => (inputCapacitance > 0 ? 2 : 0),
+    canNotch: source.inductance > 0,
     resistive: source.inductance === 0 && source.capacitance === 0,
     networkResistance: circuit.feedbackResistance,
   };

@@ -39,6 +39,11 @@ export interface StageModel {
   quality(gainBandwidth: number, inputCapacitance: number): number;
   /** By how many powers of f the densities grow towards infinity with an ideal amplifier: 0 or 2. */
   growth(inputCapacitance: number): 0 | 2;
+  /**
+   * An amplifier's input capacitance can tune a notch of the noise gain into the band, so that the sums over
+   * the band may dip between amplifiers that are near neighbours.
+   */
+  canNotch: boolean;
   /** Nothing depends on frequency with an ideal amplifier without input capacitance. */
   resistive: boolean;
   /** Ω that the feedback network puts on the output, Infinity where there is none. */

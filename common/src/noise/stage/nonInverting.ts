@@ -35,6 +35,7 @@ export function nonInvertingModel({ source, stage }: OperatingConditions): Stage
       source.inductance === 0 ? 0 : quadraticQuality(...denominator(inputCapacitance)),
     growth: (inputCapacitance) =>
       source.inductance > 0 && loadConductance === 0 && source.capacitance + inputCapacitance === 0 ? 2 : 0,
+    canNotch: false,
     resistive: source.inductance === 0 && source.capacitance === 0,
     networkResistance: gainResistance > 0 ? gainResistance * gain : Infinity,
   };

@@ -39,6 +39,7 @@ export function transimpedanceModel({ source, stage }: OperatingConditions): Sta
       source.capacitance + inputCapacitance > 0
         ? 2
         : 0,
+    canNotch: false,
     resistive: source.capacitance === 0 && !isCapacitive(circuit.feedbackCapacitance),
     networkResistance: feedbackResistance,
   };

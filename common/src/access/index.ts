@@ -1,0 +1,3 @@
+export * from './actions.js';
+export * from './plans.js';
+export * from './roles.js';

@@ -1,0 +1,146 @@
+import fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+import { checkConditions, type OperatingConditions } from '../../conditions/index.js';
+import { stageModel } from '../stage/stageModel.js';
+import { emptyColumns, type AmplifierColumns } from './columns.js';
+import { findContenders } from './contenders.js';
+import { leastNoise } from './leastNoise.js';
+import { rankAmplifiers } from './rankAmplifiers.js';
+import { scoreRows } from './scores.js';
+import { findQuietest, isInQuietSet } from './quietSet.js';
+
+/** Numbers from 0 to 1 that are the same in every run. */
+function sequence(seed: number): () => number {
+  let state = seed;
+  return () => (state = (state * 1103515245 + 12345) % 2 ** 31) / 2 ** 31;
+}
+
+function library(count: number, seed: number): AmplifierColumns {
+  const random = sequence(seed);
+  const between = (from: number, to: number) => from * (to / from) ** random();
+  const columns = emptyColumns(count);
+  const { parameters, origins } = columns;
+  for (let row = 0; row < count; row++) {
+    parameters.voltageNoise[row] = between(0.8e-9, 60e-9);
+    parameters.voltageNoiseCorner[row] = between(0.1, 3000);
+    parameters.currentNoise[row] = between(1e-16, 5e-12);
+    parameters.currentNoiseCorner[row] = between(0.1, 1000);
+    if (random() > 0.05) parameters.gainBandwidth[row] = between(1e4, 2e9);
+    if (random() > 0.1) parameters.inputCapacitance[row] = between(1e-13, 1e-10);
+    origins.voltageNoise[row] = (['typical', 'maximum', 'measured', 'estimated'] as const)[row % 4];
+  }
+  return columns;
+}
+
+const between = (from: number, to: number) =>
+  fc.double({ min: Math.log(from), max: Math.log(to), noNaN: true }).map(Math.exp);
+
+const stage = fc.oneof(
+  fc.record({
+    topology: fc.constant('non-inverting' as const),
+    gain: between(1.1, 1e3),
+    gainResistance: between(1, 1e5),
+  }),
+  fc.record({
+    topology: fc.constant('inverting' as const),
+    gain: between(0.1, 1e3),
+    gainResistance: between(10, 1e6),
+  }),
+  fc.record({
+    topology: fc.constant('transimpedance' as const),
+    feedbackResistance: between(100, 1e10),
+    feedbackCapacitance: fc.oneof(fc.constant('auto' as const), fc.constant(0), between(1e-14, 1e-10)),
+  }),
+);
+
+const conditions = fc
+  .record({
+    stage,
+    resistance: between(1, 1e8),
+    inductance: fc.oneof(fc.constant(0), between(1e-6, 10)),
+    capacitance: fc.oneof(fc.constant(0), between(1e-13, 1e-7)),
+    lower: between(0.01, 1e6),
+    width: between(0.02, 1e5),
+    place: fc.double({ min: 0, max: 1, noNaN: true }),
+    lowPassOrder: fc.nat(4),
+  })
+  .map(
+    ({
+      stage: s,
+      resistance,
+      inductance,
+      capacitance,
+      lower,
+      width,
+      place,
+      lowPassOrder,
+    }): OperatingConditions => ({
+      source: { resistance, inductance: s.topology === 'transimpedance' ? 0 : inductance, capacitance },
+      ambientTemperature: 298.15,
+      band: { lower, upper: lower * (1 + width), lowPassOrder },
+      stage: s,
+      referenceFrequency: Math.min(lower * (1 + width) ** place, lower * (1 + width)),
+      bandwidthMargin: 0,
+      amplifierTemperatureModel: 'none',
+    }),
+  )
+  .filter((c) => checkConditions({ conditions: c }).length === 0);
+
+describe('leastNoise', () => {
+  const columns = library(600, 3);
+  const rows = Uint32Array.from({ length: columns.count }, (_, row) => row);
+
+  it('is never above the total, for any conditions in which no notch can be tuned', () => {
+    fc.assert(
+      fc.property(conditions, (c) => {
+        const model = stageModel(c);
+        fc.pre(!model.canNotch);
+        const { total, fixed } = leastNoise(c, model, columns, rows);
+        const { inputNoiseRms } = scoreRows(c, model, columns, rows);
+        for (const row of rows) {
+          expect(total[row]).toBeLessThan(inputNoiseRms[row]);
+          expect(fixed[row]).toBeLessThanOrEqual(total[row]);
+        }
+      }),
+      { numRuns: 60, seed: 20 },
+    );
+  });
+});
+
+describe('findContenders', () => {
+  const columns = library(5000, 5);
+  const all = Uint32Array.from({ length: columns.count }, (_, row) => row);
+  const page = {
+    filter: {},
+    target: {},
+    sort: 'inputNoiseRms',
+    descending: false,
+    limit: 50,
+    offset: 20,
+  } as const;
+
+  it('leaves out neither a part of the page nor one of the quiet set', () => {
+    let leftOut = 0;
+    fc.assert(
+      fc.property(conditions, (c) => {
+        const model = stageModel(c);
+        const exhaustive = scoreRows(c, model, columns, all);
+        const order = [...all].sort(
+          (a, b) => exhaustive.inputNoiseRms[a] - exhaustive.inputNoiseRms[b] || a - b,
+        );
+        const [contenders] = findContenders(c, model, [columns], [all], 70);
+        const kept = new Set(contenders);
+        const quietest = findQuietest([exhaustive])!;
+        for (const row of order.slice(0, 70)) expect(kept).toContain(row);
+        for (const row of all) if (isInQuietSet(exhaustive, row, quietest)) expect(kept).toContain(row);
+        leftOut += all.length - contenders.length;
+        const ranking = rankAmplifiers({ ...page, conditions: c }, [columns]);
+        fc.pre(ranking.excluded.length === 0);
+        expect(ranking.total).toBe(columns.count);
+        expect(ranking.items.map(({ row }) => row)).toEqual(order.slice(20, 70));
+      }),
+      { numRuns: 12, seed: 21 },
+    );
+    expect(leftOut).toBeGreaterThan(5000);
+  });
+});
