@@ -1,8 +1,10 @@
 import type { OperatingConditions, PartFilter } from '../conditions/index.js';
 import type { NoiseAmplifier } from './amplifierNoise.js';
+import type { FieldError } from '../parts/index.js';
 import { spotNode } from './bandNodes.js';
 import type { Contributions } from './contributors.js';
 import type { SourceFloor, StageFigures } from './figures.js';
+import { hasNoEnd } from './ranking/exclusions.js';
 import { stageModel } from './stage/stageModel.js';
 import { stageAmplifier } from './stageAmplifier.js';
 import { stageCautions } from './stageCautions.js';
@@ -38,6 +40,19 @@ export function evaluateStage(
     ...figuresFrom(conditions, model, inStage, overBand, atReference),
     cautions: stageCautions(conditions, model, amplifier, filter),
   };
+}
+
+/**
+ * What keeps an amplifier's noise in a stage from being computed, field by field: with an unknown
+ * gain–bandwidth product and a noise gain that rises with frequency, a first-order low-pass leaves the rms
+ * without bound. Empty = `evaluateStage` answers.
+ */
+export function checkAmplifier(conditions: OperatingConditions, amplifier: NoiseAmplifier): FieldError[] {
+  const { gainBandwidth, inputCapacitance } = stageAmplifier(conditions, amplifier);
+  if (!hasNoEnd(conditions, stageModel(conditions), gainBandwidth, inputCapacitance)) return [];
+  const message =
+    'gain–bandwidth product: needed here, for a first-order low-pass alone doesn’t end the noise of this stage';
+  return [{ field: 'amplifier.gainBandwidth', message }];
 }
 
 /**

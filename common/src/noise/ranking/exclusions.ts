@@ -36,7 +36,7 @@ export function prepareExclusions(
     if (model.crossoverNoiseGain(speed, capacitance) < minimumStableGain[row])
       return 'below-minimum-stable-gain';
     if (known && bandwidth / model.noiseGain(band.upper, bandwidth, capacitance) < needed) return 'too-slow';
-    if (!known && band.lowPassOrder === 1 && model.growth(capacitance) === 2) return 'noise-unbounded';
+    if (hasNoEnd(conditions, model, speed, capacitance)) return 'noise-unbounded';
     return null;
   };
 }
@@ -59,4 +59,17 @@ function filterExclusions(filter: PartFilter): Exclude {
       (parameters.supplyMinimum[row] > supply.minimum || parameters.supplyMaximum[row] < supply.maximum);
     return short ? 'supply-out-of-range' : null;
   };
+}
+
+/**
+ * Whether the noise at the output has no finite rms: with an ideal amplifier whose noise gain rises with
+ * frequency, a low-pass of first order doesn't end it.
+ */
+export function hasNoEnd(
+  { band }: OperatingConditions,
+  model: StageModel,
+  gainBandwidth: number,
+  inputCapacitance: number,
+): boolean {
+  return gainBandwidth === Infinity && band.lowPassOrder === 1 && model.growth(inputCapacitance) === 2;
 }

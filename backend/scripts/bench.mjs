@@ -1,0 +1,112 @@
+import { prepareDatabase, readAddress, serve } from './application.mjs';
+import { fillLibrary } from './bench-library.mjs';
+import { interleaved, median, quantile } from './bench-measure.mjs';
+import { loopOver, RANKINGS, SQL } from './bench-rankings.mjs';
+import { buildStale } from './builds.mjs';
+import { readCredentials } from './credentials.mjs';
+import { createDatabase, ensureMariadbInstalled, startMariadb } from './mariadb.mjs';
+import { ensurePackages, refuseOldNode } from './packages.mjs';
+import { freePort } from './ports.mjs';
+import { peakMemory } from './processes.mjs';
+import { recall } from './records.mjs';
+import { say, step } from './steps.mjs';
+import { supervise } from './supervision.mjs';
+
+const DATABASE = 'roothertz_bench';
+const PARTS = 100_000;
+const ROUNDS = 40;
+
+await supervise(async () => {
+  refuseOldNode();
+  await ensureMariadbInstalled();
+  await ensurePackages();
+  await buildStale(['common', 'backend']);
+  const server = await startMariadb({ name: 'mariadb-bench', preferredPort: 33326 });
+  await createDatabase(server, DATABASE, { fresh: true });
+  const environment = {
+    JWT_SECRET: readCredentials().jwtSecret,
+    ...process.env,
+    ...server.environment(DATABASE),
+  };
+  await prepareDatabase(environment);
+  const { createConnection } = await import('mysql2/promise');
+  const connection = await createConnection({
+    host: server.host,
+    port: server.port,
+    user: environment.DB_USER,
+    password: environment.DB_PASSWORD,
+    database: DATABASE,
+  });
+  const library = await step('Library', async (note) => {
+    note(`filling with ${PARTS} op-amps`);
+    return { ...(await fillLibrary(connection, PARTS)), outcome: 'filled' };
+  });
+  const address = readAddress({ PORT: String(await freePort(33_330)) });
+  await serve(address, environment);
+  const results = await measure(address, connection, library);
+  await connection.end();
+  report(results, peakMemory(recall(`application-${address.port}`).pid));
+  return 0;
+});
+
+async function measure({ url }, connection, { libraryId, columns }) {
+  const ask = await session(url);
+  await connection.query('SET profiling = 1');
+  return step('Measuring', async (note) => {
+    note(`${ROUNDS} rounds`);
+    const times = await interleaved(ROUNDS, {
+      resistive: () => ask(RANKINGS.resistive),
+      reactive: () => ask(RANKINGS.reactive),
+      sql: () => ownTime(connection, SQL, [libraryId]),
+      loop: () => loopOver(columns),
+    });
+    return { ...times, outcome: 'done' };
+  });
+}
+
+/** Signs in as the demo engineer; answers a function that ranks over HTTP. */
+async function session(url) {
+  const post = (path, body, headers) =>
+    fetch(url + path, {
+      method: 'POST',
+      headers: { 'Content-Type': 'application/json', Origin: url, ...headers },
+      body: JSON.stringify(body),
+    });
+  const credentials = { email: 'engineer@tarnfield.example', password: 'quiet-bench-2026' };
+  const [cookie] = (await post('/api/auth/sign-in', credentials)).headers.getSetCookie();
+  return async (ranking) => {
+    const response = await post('/api/rankings/op-amps', ranking, { Cookie: cookie.split(';')[0] });
+    const { items } = await response.json();
+    if (response.status !== 200 || items.length !== ranking.limit)
+      throw new Error(`the ranking answered ${response.status} with ${items?.length} items`);
+  };
+}
+
+/** The server's own time for a query, without the way to this process and back. */
+async function ownTime(connection, sql, values) {
+  await connection.query(sql, values);
+  const [profiles] = await connection.query('SHOW PROFILES');
+  return profiles.at(-1).Duration * 1000;
+}
+
+function report({ resistive, reactive, sql, loop }, serverPeakMiB) {
+  const line = (name, times) =>
+    say(`${name}: p50 ${median(times).toFixed(1)} ms, p95 ${quantile(times, 0.95).toFixed(1)} ms`);
+  say(`\n${PARTS} op-amps, each with a gain–bandwidth product and an input capacitance of its own:`);
+  line('a  POST /api/rankings/op-amps, resistive source', resistive);
+  line('a  POST /api/rankings/op-amps, reactive source', reactive);
+  line('b  MariaDB, resistive closed form, ORDER BY … LIMIT 50', sql);
+  line('c  bare loop over typed arrays, resistive closed form', loop);
+  say(
+    'What bounds a: the sieve over all parts and the lower bound of each part’s noise, one pass each; only the parts\n' +
+      'that can be on the page or in the quiet set are integrated over the band.\n',
+  );
+  const ratio = (over, under) => Number((median(over) / median(under)).toFixed(3));
+  const results = {
+    rankingResistiveOverSql: ratio(resistive, sql),
+    rankingReactiveOverSql: ratio(reactive, sql),
+    rankingResistiveOverLoop: ratio(resistive, loop),
+    serverPeakMiB,
+  };
+  say(JSON.stringify(results));
+}

@@ -1,0 +1,56 @@
+import { mkdirSync, rmSync, utimesSync, writeFileSync } from 'node:fs';
+import { inLocal, inRoot } from './paths.mjs';
+import { run } from './processes.mjs';
+import { isStale, leftovers } from './staleness.mjs';
+import { step, timed } from './steps.mjs';
+
+const SHARED_SOURCES = ['tsconfig.base.json', 'package-lock.json'];
+const stampOf = (name) => inLocal('built', name);
+
+/** In the order in which they need each other. Vite empties its own output. */
+const BUILDS = [
+  { name: 'common', sources: ['src', 'package.json', 'tsconfig.json', 'tsconfig.build.json'] },
+  {
+    name: 'backend',
+    sources: ['src', 'package.json', 'tsconfig.json', 'tsconfig.build.json'],
+    needs: 'common',
+  },
+  {
+    name: 'frontend',
+    sources: ['src', 'public', 'index.html', 'package.json', 'tsconfig.json', 'vite.config.ts'],
+    needs: 'common',
+    emptiesItsOutput: true,
+  },
+];
+
+const isBuildStale = ({ name, sources, needs }) =>
+  isStale({
+    stamp: stampOf(name),
+    output: inRoot(name, 'dist'),
+    sources: [
+      ...sources.map((source) => inRoot(name, source)),
+      ...SHARED_SOURCES.map((source) => inRoot(source)),
+      ...(needs ? [stampOf(needs)] : []),
+    ],
+  });
+
+/** The stamp carries the time at which the build began: what is edited meanwhile counts as newer. */
+async function build({ name, emptiesItsOutput }) {
+  const began = Date.now();
+  await run('npm', ['run', 'build', '-w', name], { cwd: inRoot() });
+  if (!emptiesItsOutput) leftovers(inRoot(name, 'dist'), began).forEach((path) => rmSync(path));
+  mkdirSync(inLocal('built'), { recursive: true });
+  writeFileSync(stampOf(name), '');
+  utimesSync(stampOf(name), began / 1000, began / 1000);
+}
+
+/** Builds those of the named packages whose sources are newer than their last build. */
+export async function buildStale(names) {
+  for (const one of BUILDS.filter(({ name }) => names.includes(name))) {
+    await step(`Build of ${one.name}`, async (note) => {
+      if (!isBuildStale(one)) return 'fresh';
+      note('stale, building');
+      return timed(() => build(one));
+    });
+  }
+}

@@ -1,0 +1,47 @@
+import { endOrphans, prepareDatabase, readAddress, refuseTakenPort, serve } from './application.mjs';
+import { buildStale } from './builds.mjs';
+import { readCredentials } from './credentials.mjs';
+import { createDatabase, ensureMariadbInstalled, startMariadb } from './mariadb.mjs';
+import { ensurePackages, refuseOldNode } from './packages.mjs';
+import { say } from './steps.mjs';
+import { expectStop, refuseWhenEnding, supervise } from './supervision.mjs';
+
+const DATABASE = 'roothertz';
+const DEMO_ROLES = ['admin', 'librarian', 'purchasing', 'engineer', 'reviewer'];
+
+await supervise(async () => {
+  refuseOldNode();
+  const address = readAddress(process.env);
+  await endOrphans();
+  await refuseTakenPort(address);
+  if (!process.env.DB_HOST) await ensureMariadbInstalled();
+  await ensurePackages();
+  const environment = { JWT_SECRET: readCredentials().jwtSecret, ...process.env, ...(await database()) };
+  await buildStale(['common', 'backend', 'frontend']);
+  await prepareDatabase(environment);
+  const { ended } = await serve(address, environment);
+  expectStop();
+  welcome(address);
+  const { code } = await ended;
+  refuseWhenEnding();
+  say(`The server ended with code ${code}.`);
+  return code || 1;
+});
+
+/** An existing server named by DB_HOST, or the project's own. */
+async function database() {
+  if (process.env.DB_HOST) {
+    say(`MariaDB: the server at ${process.env.DB_HOST}, from DB_HOST`);
+    return {};
+  }
+  const server = await startMariadb({ name: 'mariadb', preferredPort: 33306 });
+  await createDatabase(server, DATABASE);
+  return server.environment(DATABASE);
+}
+
+function welcome({ url }) {
+  say(`\nRoothertz is ready: ${url}  (Ctrl-C stops it)`);
+  if (process.env.NODE_ENV === 'production') return;
+  say('Demo accounts, all with the password quiet-bench-2026:');
+  for (const role of DEMO_ROLES) say(`  ${role}@tarnfield.example`);
+}

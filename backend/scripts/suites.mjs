@@ -1,0 +1,50 @@
+import { mkdirSync, rmSync } from 'node:fs';
+import { prepareDatabase, readAddress, serve } from './application.mjs';
+import { buildStale } from './builds.mjs';
+import { createDatabase } from './mariadb.mjs';
+import { inLocal, inRoot } from './paths.mjs';
+import { freePort } from './ports.mjs';
+import { runVisibly } from './processes.mjs';
+import { readJson } from './records.mjs';
+import { countResults } from './results.mjs';
+
+const PREFERRED_E2E_PORT = 33_320;
+
+/** Each suite answers how many of its tests passed and failed. */
+export const SUITES = {
+  common: { run: ({ environment }) => runVitest('common', [], environment) },
+  backend: { needsDatabase: true, run: runBackend },
+  frontend: { run: ({ environment }) => runVitest('frontend', [], environment) },
+  e2e: { needsDatabase: true, needsChromium: true, run: runJourneys },
+};
+
+async function runBackend({ server, environment }) {
+  await createDatabase(server, 'roothertz_test', { fresh: true });
+  const env = { ...environment, NODE_ENV: 'test', ...server.environment('roothertz_test') };
+  return runReporting('backend', (report) => ['jest', '--json', `--outputFile=${report}`], 'backend', env);
+}
+
+async function runJourneys({ server, chromium, environment }) {
+  await buildStale(['common', 'backend', 'frontend']);
+  await createDatabase(server, 'roothertz_e2e', { fresh: true });
+  const env = { ...environment, ...server.environment('roothertz_e2e') };
+  await prepareDatabase(env);
+  const address = readAddress({ PORT: String(await freePort(PREFERRED_E2E_PORT)) });
+  await serve(address, env);
+  const browser = { ...environment, E2E_BASE_URL: address.url, CHROMIUM_PATH: chromium };
+  return runVitest('frontend', ['--config', 'e2e/vitest.config.ts'], browser, 'e2e');
+}
+
+function runVitest(folder, args, env, name = folder) {
+  const reporters = ['--reporter=default', '--reporter=json'];
+  const command = (report) => ['vitest', 'run', ...args, ...reporters, `--outputFile.json=${report}`];
+  return runReporting(name, command, folder, env);
+}
+
+async function runReporting(name, command, folder, env) {
+  mkdirSync(inLocal('results'), { recursive: true });
+  const report = inLocal('results', `${name}.json`);
+  rmSync(report, { force: true });
+  const code = await runVisibly('npx', ['--no', '--', ...command(report)], { cwd: inRoot(folder), env });
+  return countResults(readJson(report), code);
+}

@@ -1,0 +1,34 @@
+import { Module } from '@nestjs/common';
+import { APP_GUARD } from '@nestjs/core';
+import { ThrottlerModule } from '@nestjs/throttler';
+import { AuthModule } from './auth/auth.module.js';
+import { JwtAuthGuard } from './auth/jwt-auth.guard.js';
+import { ConditionsModule } from './conditions/conditions.module.js';
+import { ConfigModule } from './config/config.module.js';
+import { DatabaseModule } from './database/database.module.js';
+import { HealthModule } from './health/health.module.js';
+import { PartsModule } from './parts/parts.module.js';
+import { RankingModule } from './ranking/ranking.module.js';
+import { AccessGuard } from './shared/access/access.guard.js';
+import { CallerThrottlerGuard } from './shared/access/caller-throttler.guard.js';
+
+const REQUESTS_A_MINUTE = 600;
+
+@Module({
+  imports: [
+    ConfigModule,
+    DatabaseModule,
+    ThrottlerModule.forRoot([{ ttl: 60_000, limit: REQUESTS_A_MINUTE }]),
+    AuthModule,
+    ConditionsModule,
+    HealthModule,
+    PartsModule,
+    RankingModule,
+  ],
+  providers: [
+    { provide: APP_GUARD, useClass: JwtAuthGuard },
+    { provide: APP_GUARD, useClass: CallerThrottlerGuard },
+    { provide: APP_GUARD, useClass: AccessGuard },
+  ],
+})
+export class AppModule {}

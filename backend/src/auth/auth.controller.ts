@@ -1,0 +1,55 @@
+import { Body, Controller, Get, HttpCode, Ip, Post, Res } from '@nestjs/common';
+import { ApiNoContentResponse, ApiOkResponse } from '@nestjs/swagger';
+import { Throttle } from '@nestjs/throttler';
+import type { Response } from 'express';
+import { AppConfig } from '../config/app-config.js';
+import { Access } from '../shared/access/access.decorator.js';
+import { Caller } from '../shared/access/caller.decorator.js';
+import type { Caller as SignedIn } from '../shared/access/caller.js';
+import { Public } from '../shared/access/public.decorator.js';
+import { AuthService } from './auth.service.js';
+import { SessionResponseDto, toSessionResponse } from './dto/session-response.dto.js';
+import { SignInDto } from './dto/sign-in.dto.js';
+import { clearSessionCookie, setSessionCookie } from './session-cookie.js';
+import { SessionTokenService } from './session-token.service.js';
+
+const SIGN_INS_A_MINUTE = 60;
+
+@Controller('auth')
+export class AuthController {
+  constructor(
+    private readonly auth: AuthService,
+    private readonly tokens: SessionTokenService,
+    private readonly config: AppConfig,
+  ) {}
+
+  @Public()
+  @Throttle({ default: { limit: SIGN_INS_A_MINUTE, ttl: 60_000 } })
+  @Post('sign-in')
+  @HttpCode(200)
+  @ApiOkResponse({ type: SessionResponseDto })
+  async signIn(
+    @Body() credentials: SignInDto,
+    @Ip() address: string,
+    @Res({ passthrough: true }) response: Response,
+  ): Promise<SessionResponseDto> {
+    const member = await this.auth.signIn(credentials, address);
+    setSessionCookie(response, await this.tokens.issue(member), this.config);
+    return toSessionResponse(member);
+  }
+
+  @Public()
+  @Post('sign-out')
+  @HttpCode(204)
+  @ApiNoContentResponse()
+  signOut(@Res({ passthrough: true }) response: Response): void {
+    clearSessionCookie(response, this.config);
+  }
+
+  @Access('session.own')
+  @Get('me')
+  @ApiOkResponse({ type: SessionResponseDto })
+  async getSession(@Caller() caller: SignedIn): Promise<SessionResponseDto> {
+    return toSessionResponse(await this.auth.findSession(caller));
+  }
+}

@@ -1,0 +1,139 @@
+import { PLAN_LIMITS } from '@roothertz/common/access';
+import { Injectable } from '@nestjs/common';
+import { InjectDataSource } from '@nestjs/typeorm';
+import type { DataSource, EntityManager } from 'typeorm';
+import type { Caller } from '../shared/access/caller.js';
+import { checkedRankingRequest } from '../shared/conditions/ranking-request.js';
+import { DomainError } from '../shared/errors/domain-error.js';
+import { isDuplicateEntry } from '../shared/errors/duplicate-entry.js';
+import { readId } from '../shared/ids/read-id.js';
+import type { ListQueryDto } from '../shared/list/list-query.dto.js';
+import { parseSort } from '../shared/list/sort.js';
+import { TeamsService } from '../teams/teams.service.js';
+import { searchByName, selectConditions } from './conditions-select.js';
+import {
+  type ConditionsListDto,
+  type ConditionsResponseDto,
+  toConditionsResponse,
+} from './dto/conditions-response.dto.js';
+import type { SaveConditionsDto } from './dto/save-conditions.dto.js';
+import type { UpdateConditionsDto } from './dto/update-conditions.dto.js';
+import { SavedConditions } from './entities/saved-conditions.entity.js';
+import { nameKey } from './name-key.js';
+
+const SORTS = ['name', 'updatedAt'] as const;
+
+@Injectable()
+export class ConditionsService {
+  constructor(
+    @InjectDataSource() private readonly dataSource: DataSource,
+    private readonly teams: TeamsService,
+  ) {}
+
+  async list(caller: Caller, query: ListQueryDto): Promise<ConditionsListDto> {
+    const { key, descending } = parseSort(query.sort ?? 'name', SORTS);
+    const [items, total] = await searchByName(selectConditions(this.dataSource.manager, caller), query.search)
+      .orderBy(`saved.${key}`, descending ? 'DESC' : 'ASC')
+      .addOrderBy('saved.id')
+      .limit(query.limit)
+      .offset(query.offset)
+      .getManyAndCount();
+    return { items: items.map(toConditionsResponse), total };
+  }
+
+  async find(caller: Caller, id: string): Promise<ConditionsResponseDto> {
+    return toConditionsResponse(await findSaved(this.dataSource.manager, caller, id));
+  }
+
+  save(caller: Caller, { name, ...dto }: SaveConditionsDto): Promise<ConditionsResponseDto> {
+    const request = checkedRankingRequest(dto);
+    return this.change(caller, async (manager) => {
+      await assertRoom(manager, caller);
+      const now = new Date();
+      const { identifiers } = await manager.insert(SavedConditions, {
+        teamId: caller.teamId,
+        name,
+        nameKey: nameKey(name),
+        ...request,
+        createdAt: now,
+        createdById: caller.userId,
+        updatedAt: now,
+        updatedById: caller.userId,
+      });
+      return toConditionsResponse(await findSaved(manager, caller, String(identifiers[0].id)));
+    });
+  }
+
+  update(caller: Caller, id: string, dto: UpdateConditionsDto): Promise<ConditionsResponseDto> {
+    return this.change(caller, async (manager) => {
+      const saved = await findChangeable(manager, caller, id, dto.version);
+      const { name = saved.name, version: _, ...changed } = dto;
+      await manager.update(
+        SavedConditions,
+        { id: saved.id },
+        {
+          name,
+          nameKey: nameKey(name),
+          ...checkedRankingRequest({ ...saved, ...changed }),
+          version: saved.version + 1,
+          updatedAt: new Date(),
+          updatedById: caller.userId,
+        },
+      );
+      return toConditionsResponse(await findSaved(manager, caller, id));
+    });
+  }
+
+  remove(caller: Caller, id: string, version: number): Promise<void> {
+    return this.change(caller, async (manager) => {
+      const saved = await findChangeable(manager, caller, id, version);
+      await manager.delete(SavedConditions, { id: saved.id });
+    });
+  }
+
+  private change<Result>(
+    { teamId }: Caller,
+    change: (manager: EntityManager) => Promise<Result>,
+  ): Promise<Result> {
+    return this.dataSource
+      .transaction(async (manager) => {
+        await this.teams.lockTeam(manager, teamId);
+        return change(manager);
+      })
+      .catch(refuseDuplicate);
+  }
+}
+
+async function findSaved(manager: EntityManager, caller: Caller, id: string): Promise<SavedConditions> {
+  const number = readId(id);
+  const saved = number && (await selectConditions(manager, caller).andWhere({ id: number }).getOne());
+  if (!saved) throw new DomainError('conditions.not-found', 'Your team has no such saved conditions.');
+  return saved;
+}
+
+async function findChangeable(
+  manager: EntityManager,
+  caller: Caller,
+  id: string,
+  version: number,
+): Promise<SavedConditions> {
+  const saved = await findSaved(manager, caller, id);
+  if (saved.version === version) return saved;
+  throw new DomainError(
+    'conditions.stale',
+    'Somebody has changed these conditions meanwhile: load them again.',
+  );
+}
+
+async function assertRoom(manager: EntityManager, { teamId, plan }: Caller): Promise<void> {
+  const { savedConditions: limit } = PLAN_LIMITS[plan];
+  if (limit !== null && (await manager.countBy(SavedConditions, { teamId })) >= limit)
+    throw new DomainError('plan.saved-conditions', `The team’s plan holds ${limit} saved conditions.`);
+}
+
+function refuseDuplicate(error: unknown): never {
+  if (!isDuplicateEntry(error)) throw error;
+  throw new DomainError('conditions.duplicate', 'The team has saved conditions of this name already.', {
+    errors: [{ field: 'name', message: 'name: another one was expected, for this one is taken' }],
+  });
+}

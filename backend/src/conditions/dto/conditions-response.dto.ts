@@ -1,0 +1,60 @@
+import { ApiProperty } from '@nestjs/swagger';
+import { OperatingConditionsDto } from '../../shared/conditions/operating-conditions.dto.js';
+import { PartFilterDto } from '../../shared/conditions/part-filter.dto.js';
+import { RankingTargetDto } from '../../shared/conditions/ranking-request.dto.js';
+import { listOf } from '../../shared/list/list-response.js';
+import type { SavedConditions } from '../entities/saved-conditions.entity.js';
+
+export class MemberDto {
+  @ApiProperty()
+  id: string;
+
+  @ApiProperty()
+  name: string;
+}
+
+export class ConditionsResponseDto {
+  @ApiProperty()
+  id: string;
+
+  @ApiProperty()
+  name: string;
+
+  @ApiProperty()
+  conditions: OperatingConditionsDto;
+
+  @ApiProperty()
+  filter: PartFilterDto;
+
+  @ApiProperty()
+  target: RankingTargetDto;
+
+  @ApiProperty({ type: 'integer' })
+  quantity: number;
+
+  @ApiProperty({ type: 'integer' })
+  version: number;
+
+  @ApiProperty({ type: String, format: 'date-time' })
+  updatedAt: string;
+
+  @ApiProperty({ type: MemberDto, nullable: true })
+  updatedBy: MemberDto | null;
+}
+
+export class ConditionsListDto extends listOf(ConditionsResponseDto) {}
+
+export function toConditionsResponse(saved: SavedConditions): ConditionsResponseDto {
+  const { id, name, conditions, filter, target, quantity, version, updatedAt, updatedBy } = saved;
+  return {
+    id: String(id),
+    name,
+    conditions,
+    filter,
+    target,
+    quantity,
+    version,
+    updatedAt: updatedAt.toISOString(),
+    updatedBy: updatedBy && { id: String(updatedBy.id), name: updatedBy.name },
+  };
+}

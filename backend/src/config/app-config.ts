@@ -1,0 +1,88 @@
+import 'reflect-metadata';
+import { Transform, Type } from 'class-transformer';
+import {
+  IsIn,
+  IsInt,
+  IsNotEmpty,
+  IsOptional,
+  IsString,
+  IsUrl,
+  Matches,
+  Max,
+  Min,
+  MinLength,
+  ValidateIf,
+} from 'class-validator';
+
+const HOPS_OR_NETWORKS =
+  /^(\d{1,2}|[\da-f.:/]+|loopback|linklocal|uniquelocal)(, ?([\da-f.:/]+|loopback|linklocal|uniquelocal))*$/i;
+
+/** Everything that the environment may say: each property is named as its variable. */
+export class AppConfig {
+  @IsIn(['development', 'test', 'production'])
+  NODE_ENV: 'development' | 'test' | 'production' = 'development';
+
+  @IsNotEmpty()
+  HOST = '127.0.0.1';
+
+  @Type(() => Number)
+  @Max(65535)
+  @Min(0)
+  @IsInt()
+  PORT = 3000;
+
+  /** The address that people open, such as https://noise.example.org; left out = the request's own host. */
+  @IsOptional()
+  @IsUrl({ require_tld: false, require_protocol: true, protocols: ['http', 'https'] })
+  @Transform(({ value }) => originOf(value))
+  PUBLIC_ORIGIN?: string;
+
+  /** How many proxies stand in front, or their networks; left out = none is trusted. */
+  @IsOptional()
+  @Matches(HOPS_OR_NETWORKS)
+  TRUST_PROXY?: string;
+
+  @IsNotEmpty()
+  DB_HOST = '127.0.0.1';
+
+  @Type(() => Number)
+  @Max(65535)
+  @Min(1)
+  @IsInt()
+  DB_PORT = 3306;
+
+  @IsNotEmpty()
+  DB_USER = 'roothertz';
+
+  @ValidateIf(isProduction)
+  @IsNotEmpty()
+  DB_PASSWORD = '';
+
+  @Matches(/^\w{1,64}$/)
+  DB_NAME = 'roothertz';
+
+  @ValidateIf(({ NODE_ENV, JWT_SECRET }) => NODE_ENV === 'production' || JWT_SECRET !== DEVELOPMENT_SECRET)
+  @MinLength(32)
+  @IsString()
+  JWT_SECRET: string;
+
+  /** Where the built pages are; left out = frontend/dist beside the backend. */
+  @IsOptional()
+  @IsNotEmpty()
+  FRONTEND_DIST?: string;
+
+  get isProduction(): boolean {
+    return isProduction(this);
+  }
+}
+
+/** Signs sessions on a developer's machine only: production refuses to start without a secret of its own. */
+export const DEVELOPMENT_SECRET = 'development-only';
+
+function isProduction({ NODE_ENV }: AppConfig): boolean {
+  return NODE_ENV === 'production';
+}
+
+function originOf(value: unknown): unknown {
+  return typeof value === 'string' && URL.canParse(value) ? new URL(value).origin : value;
+}

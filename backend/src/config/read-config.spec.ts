@@ -1,0 +1,64 @@
+import { readConfig } from './read-config.js';
+
+const production = {
+  NODE_ENV: 'production',
+  JWT_SECRET: 'a-secret-of-more-than-thirty-two-letters',
+  DB_PASSWORD: 'not-empty',
+};
+
+describe('readConfig', () => {
+  it('works on a developer’s machine with nothing set', () => {
+    expect(readConfig({})).toMatchObject({ HOST: '127.0.0.1', PORT: 3000, DB_NAME: 'roothertz' });
+  });
+
+  it('takes an empty variable for one that is left out', () => {
+    const config = readConfig({ PORT: '', PUBLIC_ORIGIN: '' });
+    expect([config.PORT, config.PUBLIC_ORIGIN]).toEqual([3000, undefined]);
+  });
+
+  it('reads numbers from text and cuts the public address down to its origin', () => {
+    const config = readConfig({ PORT: '8080', PUBLIC_ORIGIN: 'https://noise.example.org/' });
+    expect(config).toMatchObject({ PORT: 8080, PUBLIC_ORIGIN: 'https://noise.example.org' });
+  });
+
+  it('starts in production with a secret and a password', () => {
+    expect(readConfig(production).isProduction).toBe(true);
+  });
+
+  it.each(['JWT_SECRET', 'DB_PASSWORD'] as const)('refuses production without %s', (name) => {
+    expect(() => readConfig({ ...production, [name]: undefined })).toThrow(name);
+  });
+
+  it('refuses the development secret in production', () => {
+    expect(() => readConfig({ ...production, JWT_SECRET: 'development-only' })).toThrow('JWT_SECRET');
+  });
+
+  it.each([
+    ['PORT', '70000'],
+    ['PORT', 'http'],
+    ['DB_PORT', '0'],
+    ['DB_NAME', 'a`b'],
+    ['NODE_ENV', 'staging'],
+    ['PUBLIC_ORIGIN', 'noise.example.org'],
+    ['TRUST_PROXY', 'everyone'],
+    ['JWT_SECRET', 'short'],
+  ])('names %s and hides its value %s when it is wrong', (name, value) => {
+    const message = messageOf(() => readConfig({ [name]: value }));
+    expect(message).toContain(name);
+    expect(message).not.toContain(value);
+  });
+
+  it('names everything that is wrong at once', () => {
+    const message = messageOf(() => readConfig({ PORT: 'x', DB_PORT: 'y' }));
+    expect(message).toMatch(/PORT.*DB_PORT/);
+  });
+});
+
+function messageOf(read: () => unknown): string {
+  try {
+    read();
+    return '';
+  } catch (error) {
+    return (error as Error).message;
+  }
+}

@@ -1,0 +1,39 @@
+import { plainToInstance } from 'class-transformer';
+import { validateSync } from 'class-validator';
+import { AppConfig, DEVELOPMENT_SECRET } from './app-config.js';
+
+const NAMES = [
+  'NODE_ENV',
+  'HOST',
+  'PORT',
+  'PUBLIC_ORIGIN',
+  'TRUST_PROXY',
+  'DB_HOST',
+  'DB_PORT',
+  'DB_USER',
+  'DB_PASSWORD',
+  'DB_NAME',
+  'JWT_SECRET',
+  'FRONTEND_DIST',
+] as const satisfies readonly (keyof AppConfig)[];
+
+/**
+ * The configuration that the environment gives. An empty variable counts as left out.
+ * @throws an error that names every variable that is wrong, and never a value
+ */
+export function readConfig(environment: NodeJS.ProcessEnv = process.env): AppConfig {
+  const given = NAMES.filter((name) => environment[name]).map((name) => [name, environment[name]]);
+  const config = plainToInstance(AppConfig, Object.fromEntries(given));
+  if (!config.isProduction) config.JWT_SECRET ??= DEVELOPMENT_SECRET;
+  const wrong = validateSync(config).map(({ property, constraints }) => {
+    return `${property} (${Object.values(constraints ?? {})
+      .map(withoutValue)
+      .join(', ')})`;
+  });
+  if (wrong.length > 0) throw new Error(`The environment can’t be used: ${wrong.join('; ')}.`);
+  return config;
+}
+
+function withoutValue(message: string): string {
+  return message.replace(/^\w+ /, '');
+}

@@ -1,0 +1,16 @@
+import { readFile } from 'node:fs/promises';
+import type { Plan, Role } from '@roothertz/common/access';
+import type { RankingRequest } from '@roothertz/common/conditions';
+
+const DEMO_FILE = new URL('../../../../data/demo/tarnfield.json', import.meta.url);
+
+/** The invented team that a new installation can be tried with. */
+export interface DemoData {
+  team: { name: string; plan: Plan };
+  members: { email: string; name: string; roles: Role[] }[];
+  conditions: { name: string; ranking: Required<RankingRequest> }[];
+}
+
+export async function readDemoData(): Promise<DemoData> {
+  return JSON.parse(await readFile(DEMO_FILE, 'utf8')) as DemoData;
+}

@@ -1,0 +1,33 @@
+import type { NestExpressApplication } from '@nestjs/platform-express';
+import compression from 'compression';
+import cookieParser from 'cookie-parser';
+import { AppConfig } from '../config/app-config.js';
+import { ProblemFilter } from '../shared/errors/problem-filter.js';
+import { createValidationPipe } from '../shared/validation/validation-pipe.js';
+import { refuseDeepBodies } from './body-depth.js';
+import { correlationId } from './correlation-id.js';
+import { originCheck } from './origin-check.js';
+import { BUILT_PAGES, pageFallback, pageFiles } from './pages.js';
+import { neverStored, securityHeaders } from './security-headers.js';
+
+/** Everything around the routes, in the order in which a request meets it. The app is made without a body parser. */
+export function configureApp(app: NestExpressApplication): void {
+  const config = app.get(AppConfig);
+  const pages = config.FRONTEND_DIST ?? BUILT_PAGES;
+  app.set('trust proxy', trustedProxies(config.TRUST_PROXY));
+  app.setGlobalPrefix('api');
+  app.use(correlationId, securityHeaders(), compression());
+  app.use(pageFiles(pages), pageFallback(pages));
+  app.use('/api', neverStored);
+  app.use(originCheck(config.PUBLIC_ORIGIN), cookieParser());
+  app.useBodyParser('json', { limit: '1mb' });
+  app.use(refuseDeepBodies);
+  app.useGlobalPipes(createValidationPipe());
+  app.useGlobalFilters(new ProblemFilter());
+  app.enableShutdownHooks();
+}
+
+function trustedProxies(setting: string | undefined): string | number | false {
+  if (setting === undefined) return false;
+  return /^\d+$/.test(setting) ? Number(setting) : setting;
+}

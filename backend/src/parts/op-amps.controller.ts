@@ -1,0 +1,61 @@
+import { Body, Controller, Delete, Get, HttpCode, Param, Patch, Post, Query } from '@nestjs/common';
+import { ApiCreatedResponse, ApiNoContentResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
+import { Access } from '../shared/access/access.decorator.js';
+import type { Caller as CallerOfRequest } from '../shared/access/caller.js';
+import { Caller } from '../shared/access/caller.decorator.js';
+import { VersionQueryDto } from '../shared/list/version-query.dto.js';
+import { CreateOpAmpDto } from './dto/create-op-amp.dto.js';
+import { ListOpAmpsDto } from './dto/list-op-amps.dto.js';
+import { OpAmpListDto, OpAmpResponseDto } from './dto/op-amp-response.dto.js';
+import { UpdateOpAmpDto } from './dto/update-op-amp.dto.js';
+import { OpAmpsService } from './op-amps.service.js';
+
+@ApiTags('op-amps')
+@Controller('op-amps')
+export class OpAmpsController {
+  constructor(private readonly opAmps: OpAmpsService) {}
+
+  @Get()
+  @Access('parts.read')
+  @ApiOkResponse({ type: OpAmpListDto })
+  listOpAmps(@Caller() caller: CallerOfRequest, @Query() query: ListOpAmpsDto): Promise<OpAmpListDto> {
+    return this.opAmps.list(caller, query);
+  }
+
+  @Post()
+  @Access('parts.edit')
+  @ApiCreatedResponse({ type: OpAmpResponseDto })
+  createOpAmp(@Caller() caller: CallerOfRequest, @Body() dto: CreateOpAmpDto): Promise<OpAmpResponseDto> {
+    return this.opAmps.create(caller, dto);
+  }
+
+  @Get(':id')
+  @Access('parts.read')
+  @ApiOkResponse({ type: OpAmpResponseDto })
+  getOpAmp(@Caller() caller: CallerOfRequest, @Param('id') id: string): Promise<OpAmpResponseDto> {
+    return this.opAmps.find(caller, id);
+  }
+
+  @Patch(':id')
+  @Access('parts.edit')
+  @ApiOkResponse({ type: OpAmpResponseDto })
+  updateOpAmp(
+    @Caller() caller: CallerOfRequest,
+    @Param('id') id: string,
+    @Body() dto: UpdateOpAmpDto,
+  ): Promise<OpAmpResponseDto> {
+    return this.opAmps.update(caller, id, dto);
+  }
+
+  @Delete(':id')
+  @HttpCode(204)
+  @Access('parts.edit')
+  @ApiNoContentResponse()
+  deleteOpAmp(
+    @Caller() caller: CallerOfRequest,
+    @Param('id') id: string,
+    @Query() { version }: VersionQueryDto,
+  ): Promise<void> {
+    return this.opAmps.remove(caller, id, version);
+  }
+}

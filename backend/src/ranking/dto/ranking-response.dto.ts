@@ -1,0 +1,115 @@
+import { EXCLUSION_REASONS, type ExclusionReason } from '@roothertz/common/noise';
+import {
+  type Amplifier,
+  type AmplifierOrigins,
+  type Approval,
+  APPROVALS,
+  LIBRARIES,
+  type Library,
+  type Lifecycle,
+  LIFECYCLES,
+} from '@roothertz/common/parts';
+import { ApiProperty } from '@nestjs/swagger';
+import { AmplifierResponseDto } from '../../shared/op-amps/amplifier.dto.js';
+import { OriginsDto } from '../../shared/op-amps/origins.dto.js';
+import { SourceFloorDto, StageFiguresDto } from './stage-figures.dto.js';
+
+export class PartNameDto {
+  @ApiProperty()
+  id: string;
+
+  @ApiProperty({ enum: LIBRARIES })
+  library: Library;
+
+  @ApiProperty()
+  manufacturer: string;
+
+  @ApiProperty()
+  partNumber: string;
+
+  @ApiProperty()
+  package: string;
+
+  @ApiProperty({ enum: LIFECYCLES })
+  lifecycle: Lifecycle;
+
+  @ApiProperty({ enum: APPROVALS })
+  approval: Approval;
+}
+
+export class RankedPartDto extends PartNameDto {
+  @ApiProperty({ type: AmplifierResponseDto })
+  amplifier: Amplifier;
+
+  @ApiProperty({ type: OriginsDto })
+  origins: AmplifierOrigins;
+}
+
+export class PriceDto {
+  @ApiProperty({ description: 'Decimal number.' })
+  amount: string;
+
+  @ApiProperty({ description: 'ISO 4217' })
+  currency: string;
+
+  @ApiProperty({ type: 'integer' })
+  minimumQuantity: number;
+}
+
+export class RankedOpAmpDto extends StageFiguresDto {
+  @ApiProperty({ type: 'integer' })
+  rank: number;
+
+  @ApiProperty()
+  part: RankedPartDto;
+
+  @ApiProperty({ description: 'Its total can’t be told from the quietest one’s at one sigma.' })
+  quietSet: boolean;
+
+  @ApiProperty({ type: Boolean, nullable: true, description: 'null where there is no target.' })
+  meetsTarget: boolean | null;
+
+  @ApiProperty({ type: PriceDto, nullable: true, description: 'null where the team has no price.' })
+  unitPrice: PriceDto | null;
+}
+
+export class ExclusionCountDto {
+  @ApiProperty({ enum: EXCLUSION_REASONS })
+  reason: ExclusionReason;
+
+  @ApiProperty({ type: 'integer' })
+  count: number;
+}
+
+export class ExcludedDto {
+  @ApiProperty({ type: 'integer' })
+  total: number;
+
+  @ApiProperty({ type: [ExclusionCountDto] })
+  reasons: ExclusionCountDto[];
+}
+
+export class QuietSetDto {
+  @ApiProperty({ type: 'integer', description: 'How many parts can’t be told from the quietest one.' })
+  total: number;
+}
+
+export class RankingResponseDto {
+  @ApiProperty({ type: 'integer', description: 'How many parts are ranked.' })
+  total: number;
+
+  @ApiProperty()
+  excluded: ExcludedDto;
+
+  @ApiProperty()
+  quietSet: QuietSetDto;
+
+  @ApiProperty()
+  floor: SourceFloorDto;
+
+  @ApiProperty({ description: 'Changes whenever a part that could be ranked changes.' })
+  libraryRevision: string;
+
+  @ApiProperty({ type: [RankedOpAmpDto] })
+  items: RankedOpAmpDto[];
+}

@@ -1,0 +1,49 @@
+import type { ExcludedPart, RankedPart, Ranking } from '@roothertz/common/noise';
+import type { OpAmpRecord } from '../library/op-amp-record.js';
+import type {
+  ExcludedDto,
+  PartNameDto,
+  RankedOpAmpDto,
+  RankingResponseDto,
+} from './dto/ranking-response.dto.js';
+import type { IndexedLibrary } from './library-index.service.js';
+
+/** Ranked parts whose record is gone since they were ranked are left out. */
+export function toRankingResponse(
+  { total, excluded, quietSetTotal, floor, items }: Ranking,
+  libraries: readonly IndexedLibrary[],
+  records: ReadonlyMap<number, OpAmpRecord>,
+): RankingResponseDto {
+  return {
+    total,
+    excluded: countReasons(excluded),
+    quietSet: { total: quietSetTotal },
+    floor,
+    libraryRevision: libraries.map(({ id, revision }) => `${id}.${revision}`).join('-'),
+    items: items.flatMap((item) => {
+      const record = records.get(libraries[item.library].ids[item.row]);
+      return record === undefined ? [] : [toRankedOpAmp(item, record)];
+    }),
+  };
+}
+
+function toRankedOpAmp(
+  { rank, figures, quietSet, meetsTarget }: RankedPart,
+  record: OpAmpRecord,
+): RankedOpAmpDto {
+  const { amplifier, origins } = record;
+  const part = { ...toPartName(record), amplifier, origins };
+  return { rank, part, ...figures, quietSet, meetsTarget, unitPrice: null };
+}
+
+export function toPartName(record: Omit<PartNameDto, 'id'> & { id: number }): PartNameDto {
+  const { id, library, manufacturer, partNumber, package: packageName, lifecycle, approval } = record;
+  return { id: String(id), library, manufacturer, partNumber, package: packageName, lifecycle, approval };
+}
+
+function countReasons(excluded: readonly ExcludedPart[]): ExcludedDto {
+  const counts = new Map<ExcludedPart['reason'], number>();
+  for (const { reason } of excluded) counts.set(reason, (counts.get(reason) ?? 0) + 1);
+  const reasons = [...counts].map(([reason, count]) => ({ reason, count }));
+  return { total: excluded.length, reasons: reasons.sort((a, b) => b.count - a.count) };
+}

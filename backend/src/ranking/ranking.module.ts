@@ -1,0 +1,13 @@
+import { Module } from '@nestjs/common';
+import { LibraryModule } from '../library/library.module.js';
+import { LibraryIndex } from './library-index.service.js';
+import { NoiseController } from './noise.controller.js';
+import { RankingService } from './ranking.service.js';
+import { RankingsController } from './rankings.controller.js';
+
+@Module({
+  imports: [LibraryModule],
+  controllers: [RankingsController, NoiseController],
+  providers: [RankingService, LibraryIndex],
+})
+export class RankingModule {}

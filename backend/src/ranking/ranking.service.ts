@@ -1,0 +1,89 @@
+import {
+  checkAmplifier,
+  evaluateStage,
+  exclusionDetail,
+  type ExcludedPart,
+  findExcluded,
+  rankAmplifiers,
+  RANKING_SORTS,
+} from '@roothertz/common/noise';
+import type { PartFilter, RankingRequest } from '@roothertz/common/conditions';
+import { Injectable } from '@nestjs/common';
+import { LibraryService } from '../library/library.service.js';
+import type { Caller } from '../shared/access/caller.js';
+import { checkedConditions, checkedRankingRequest } from '../shared/conditions/ranking-request.js';
+import { DomainError } from '../shared/errors/domain-error.js';
+import { parseSort } from '../shared/list/sort.js';
+import { toAmplifier } from '../shared/op-amps/amplifier.dto.js';
+import type { EvaluateStageDto } from './dto/evaluate-stage.dto.js';
+import type { ExclusionDto, ExclusionListDto } from './dto/exclusions-response.dto.js';
+import type { RankOpAmpsDto } from './dto/rank-op-amps.dto.js';
+import type { RankingResponseDto } from './dto/ranking-response.dto.js';
+import type { StageFiguresDto } from './dto/stage-figures.dto.js';
+import { type IndexedLibrary, LibraryIndex } from './library-index.service.js';
+import { toPartName, toRankingResponse } from './ranking-response.js';
+
+@Injectable()
+export class RankingService {
+  constructor(
+    private readonly index: LibraryIndex,
+    private readonly library: LibraryService,
+  ) {}
+
+  async rank(caller: Caller, dto: RankOpAmpsDto): Promise<RankingResponseDto> {
+    const request = checkedRankingRequest(dto);
+    const { key: sort, descending } = parseSort(dto.sort, RANKING_SORTS);
+    const { limit, offset } = dto;
+    const libraries = await this.chosenLibraries(caller, request.filter);
+    const ranking = rankAmplifiers(
+      { ...request, sort, descending, limit, offset },
+      libraries.map(({ columns }) => columns),
+    );
+    const ids = ranking.items.map(({ library, row }) => libraries[library].ids[row]);
+    const records = await this.library.findOpAmps(caller, ids);
+    return toRankingResponse(ranking, libraries, new Map(records.map((record) => [record.id, record])));
+  }
+
+  async exclusions(caller: Caller, dto: RankOpAmpsDto): Promise<ExclusionListDto> {
+    const request = checkedRankingRequest(dto);
+    const libraries = await this.chosenLibraries(caller, request.filter);
+    const excluded = findExcluded(
+      request,
+      libraries.map(({ columns }) => columns),
+    );
+    const page = excluded.slice(dto.offset, dto.offset + dto.limit);
+    return { items: page.map((part) => toExclusion(part, request, libraries)), total: excluded.length };
+  }
+
+  stage(dto: EvaluateStageDto): StageFiguresDto {
+    const conditions = checkedConditions(dto.conditions);
+    const amplifier = toAmplifier(dto.amplifier);
+    const errors = checkAmplifier(conditions, amplifier);
+    if (errors.length > 0)
+      throw new DomainError('conditions.invalid', 'The noise of this stage has no end.', { errors });
+    return evaluateStage(conditions, amplifier);
+  }
+
+  private async chosenLibraries(caller: Caller, filter: PartFilter): Promise<IndexedLibrary[]> {
+    const libraries = await this.index.readableBy(caller);
+    return libraries.filter(({ library }) => filter.library?.includes(library) ?? true);
+  }
+}
+
+function toExclusion(
+  { library, row, reason }: ExcludedPart,
+  { conditions, filter }: Required<RankingRequest>,
+  libraries: readonly IndexedLibrary[],
+): ExclusionDto {
+  const { library: name, ids, manufacturers, partNumbers, columns } = libraries[library];
+  const part = toPartName({
+    id: ids[row],
+    library: name,
+    manufacturer: manufacturers[row],
+    partNumber: partNumbers[row],
+    package: columns.package[row],
+    lifecycle: columns.lifecycle[row],
+    approval: columns.approval[row],
+  });
+  return { part, reason, detail: exclusionDetail(reason, conditions, filter, columns, row) };
+}

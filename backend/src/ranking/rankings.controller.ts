@@ -1,0 +1,31 @@
+import { Body, Controller, HttpCode, Post } from '@nestjs/common';
+import { ApiOkResponse, ApiTags } from '@nestjs/swagger';
+import { Access } from '../shared/access/access.decorator.js';
+import type { Caller as CallerOfRequest } from '../shared/access/caller.js';
+import { Caller } from '../shared/access/caller.decorator.js';
+import { ExclusionListDto } from './dto/exclusions-response.dto.js';
+import { RankOpAmpsDto } from './dto/rank-op-amps.dto.js';
+import { RankingResponseDto } from './dto/ranking-response.dto.js';
+import { RankingService } from './ranking.service.js';
+
+@ApiTags('rankings')
+@Controller('rankings')
+export class RankingsController {
+  constructor(private readonly ranking: RankingService) {}
+
+  @Post('op-amps')
+  @HttpCode(200)
+  @Access('rankings.run')
+  @ApiOkResponse({ type: RankingResponseDto })
+  rankOpAmps(@Caller() caller: CallerOfRequest, @Body() dto: RankOpAmpsDto): Promise<RankingResponseDto> {
+    return this.ranking.rank(caller, dto);
+  }
+
+  @Post('op-amps/exclusions')
+  @HttpCode(200)
+  @Access('rankings.run')
+  @ApiOkResponse({ type: ExclusionListDto })
+  listExclusions(@Caller() caller: CallerOfRequest, @Body() dto: RankOpAmpsDto): Promise<ExclusionListDto> {
+    return this.ranking.exclusions(caller, dto);
+  }
+}

@@ -1,0 +1,24 @@
+import { type Role, ROLES } from '@roothertz/common/access';
+import { Column, Entity, JoinColumn, ManyToOne, PrimaryColumn, type Relation } from 'typeorm';
+import { User } from '../../users/entities/user.entity.js';
+import { Team } from './team.entity.js';
+
+@Entity('memberships')
+export class Membership {
+  @PrimaryColumn({ name: 'user_id', type: 'int', unsigned: true })
+  userId: number;
+
+  @PrimaryColumn({ name: 'team_id', type: 'int', unsigned: true })
+  teamId: number;
+
+  @ManyToOne(() => User, { onDelete: 'CASCADE' })
+  @JoinColumn({ name: 'user_id', foreignKeyConstraintName: 'memberships_user' })
+  user: Relation<User>;
+
+  @ManyToOne(() => Team, { onDelete: 'CASCADE' })
+  @JoinColumn({ name: 'team_id', foreignKeyConstraintName: 'memberships_team' })
+  team: Relation<Team>;
+
+  @Column({ type: 'set', enum: ROLES })
+  roles: Role[];
+}

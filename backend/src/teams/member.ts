@@ -1,0 +1,15 @@
+import type { Plan, Role } from '@roothertz/common/access';
+import { type Account, toAccount } from '../users/account.js';
+import type { Membership } from './entities/membership.entity.js';
+
+/** A person in a team: who it is, where, and what they may do there. */
+export interface Member {
+  account: Account;
+  team: { id: number; name: string };
+  roles: Role[];
+  plan: Plan;
+}
+
+export function toMember({ user, team, roles }: Membership): Member {
+  return { account: toAccount(user), team: { id: team.id, name: team.name }, roles, plan: team.plan };
+}

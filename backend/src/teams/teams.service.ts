@@ -1,0 +1,34 @@
+import { Injectable } from '@nestjs/common';
+import { InjectRepository } from '@nestjs/typeorm';
+import type { EntityManager, Repository } from 'typeorm';
+import { Membership } from './entities/membership.entity.js';
+import { Team } from './entities/team.entity.js';
+import { type Member, toMember } from './member.js';
+
+@Injectable()
+export class TeamsService {
+  constructor(@InjectRepository(Membership) private readonly memberships: Repository<Membership>) {}
+
+  async findMember(userId: number, teamId: number): Promise<Member | null> {
+    const membership = await this.memberships.findOne({
+      where: { userId, teamId },
+      relations: { user: true, team: true },
+    });
+    return membership && toMember(membership);
+  }
+
+  /** The member in the first of the person's teams. */
+  async findFirstMember(userId: number): Promise<Member | null> {
+    const membership = await this.memberships.findOne({
+      where: { userId },
+      order: { teamId: 'ASC' },
+      relations: { user: true, team: true },
+    });
+    return membership && toMember(membership);
+  }
+
+  /** Holds the team until the transaction ends, so that what its plan limits is counted by one at a time. */
+  async lockTeam(manager: EntityManager, teamId: number): Promise<void> {
+    await manager.findOneOrFail(Team, { where: { id: teamId }, lock: { mode: 'pessimistic_write' } });
+  }
+}

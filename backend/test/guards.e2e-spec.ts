@@ -1,0 +1,91 @@
+import { RequestMethod } from '@nestjs/common';
+import { METHOD_METADATA } from '@nestjs/common/constants.js';
+import { MetadataScanner, ModulesContainer } from '@nestjs/core';
+import { ACCESS_KEY } from '../src/shared/access/access.decorator.js';
+import { PUBLIC_KEY } from '../src/shared/access/public.decorator.js';
+import { createTeam, signInMember, startTestApp, type TestApp } from './support/index.js';
+
+interface Route {
+  name: string;
+  isPublic: boolean;
+  action?: string;
+}
+
+describe('guards', () => {
+  let app: TestApp;
+
+  beforeAll(async () => {
+    app = await startTestApp();
+  });
+  afterAll(() => app.close());
+
+  it('finds on every route who may call it', () => {
+    const routes = routesOf(app);
+    expect(routes.length).toBeGreaterThan(8);
+    expect(routes.filter(({ isPublic, action }) => isPublic === (action !== undefined))).toEqual([]);
+  });
+
+  it('opens nothing to the public but signing in and out and the health', () => {
+    const open = routesOf(app).filter(({ isPublic }) => isPublic);
+    expect(open.map(({ name }) => name).sort()).toEqual(['getHealth', 'signIn', 'signOut']);
+  });
+
+  it('asks for a session at every other address', async () => {
+    const open = ['post /api/auth/sign-in', 'post /api/auth/sign-out', 'get /api/health'];
+    const closed = addressesOf(app).filter((address) => !open.includes(address));
+    expect(closed.length).toBeGreaterThan(5);
+    const statuses = await Promise.all(
+      closed.map(async (address) => [address, await statusOf(app, address)]),
+    );
+    expect(statuses.filter(([, status]) => status !== 401)).toEqual([]);
+  });
+
+  it('refuses by role with 403 and by plan with 402', async () => {
+    const team = await createTeam(app, { plan: 'free' });
+    const reviewer = await signInMember(app, team, ['reviewer']);
+    const librarian = await signInMember(app, team, ['librarian']);
+    const byRole = await reviewer.agent.post('/api/op-amps').send({}).expect(403);
+    expect(byRole.body.code).toBe('access.role');
+    const byPlan = await librarian.agent.post('/api/op-amps').send({}).expect(402);
+    expect(byPlan.body.code).toBe('access.plan');
+  });
+});
+
+function routesOf(app: TestApp): Route[] {
+  const scanner = new MetadataScanner();
+  const controllers = [...app.nest.get(ModulesContainer).values()].flatMap(({ controllers }) => [
+    ...controllers.values(),
+  ]);
+  return controllers.flatMap(({ metatype }) => {
+    const prototype = (metatype as unknown as { prototype: Record<string, object> }).prototype;
+    return scanner
+      .getAllMethodNames(prototype)
+      .filter((name) => Reflect.hasMetadata(METHOD_METADATA, prototype[name]))
+      .map((name) => toRoute(name, prototype[name]));
+  });
+}
+
+function toRoute(name: string, handler: object): Route {
+  const isPublic = Reflect.getMetadata(PUBLIC_KEY, handler) === true;
+  return { name, isPublic, action: Reflect.getMetadata(ACCESS_KEY, handler) };
+}
+
+interface Layer {
+  route?: { path: string; methods: Record<string, boolean> };
+}
+
+/** What Express answers itself: the API’s documentation is no route of the application’s. */
+function addressesOf(app: TestApp): string[] {
+  const { stack } = app.nest.getHttpAdapter().getInstance().router as { stack: Layer[] };
+  const methods = Object.keys(RequestMethod).map((method) => method.toLowerCase());
+  return stack
+    .flatMap(({ route }) => (route ? Object.keys(route.methods).map((method) => [method, route.path]) : []))
+    .filter(([method, path]) => methods.includes(method) && !path.startsWith('/api/docs'))
+    .map((parts) => parts.join(' '));
+}
+
+async function statusOf(app: TestApp, address: string): Promise<number> {
+  const [method, path] = address.split(' ') as ['get' | 'post' | 'patch' | 'put' | 'delete', string];
+  const { status } = await app.request[method](path.replace(':id', '1'));
+  return status;
+}
