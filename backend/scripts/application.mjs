@@ -27,9 +27,7 @@ function nameOf(host) {
 export async function refuseTakenPort({ host, port }) {
   const trouble = await portTrouble(port, host);
   if (trouble === undefined) return;
-  throw new StepError(
-    `Port ${port} on ${host} ${whyTaken(port, trouble)}: set PORT to a free one, for example PORT=${port + 1}.`,
-  );
+  throw new StepError(`Port ${port} on ${host} ${whyTaken(port, trouble)}: set PORT to another one.`);
 }
 
 function whyTaken(port, trouble) {

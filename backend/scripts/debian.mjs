@@ -39,15 +39,14 @@ if [ -d /run/systemd/system ] && [ "$1" = mariadb-server ]; then systemctl disab
 
 /** Installs Debian packages as root or through sudo; `advice` says what else the user can do. */
 export async function installPackages(packages, advice, note) {
-  const byHand = `apt-get install ${packages.join(' ')}`;
-  if (!findProgram('apt-get')) {
-    throw new StepError(`Missing, and there is no apt-get here to install it. ${advice}`);
-  }
+  note('missing');
+  if (!findProgram('apt-get')) throw new StepError(`There is no apt-get here to install it. ${advice}`);
   const isRoot = process.getuid() === 0;
   if (!isRoot && !findProgram('sudo')) {
-    throw new StepError(`Missing, and neither root nor sudo to install it. As root: ${byHand}. ${advice}`);
+    const command = `apt-get install ${packages.join(' ')}`;
+    throw new StepError(`Neither root nor sudo is at hand to install it. As root: ${command}. ${advice}`);
   }
-  note(`missing, installing Debian's ${packages.join(', ')} ${isRoot ? 'as root' : 'with sudo'}`);
+  note(`installing Debian's ${packages.join(', ')} ${isRoot ? 'as root' : 'with sudo'}`);
   const script = ['sh', '-c', INSTALL, 'install', ...packages];
   const command = isRoot ? script : ['sudo', ...(process.stdin.isTTY ? [] : ['-n']), ...script];
   await run(command[0], command.slice(1), {

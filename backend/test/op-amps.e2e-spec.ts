@@ -202,7 +202,8 @@ describe('op-amps', () => {
     it('refuses to rename a part to one that is there, and to contradict what is stored', async () => {
       await createOpAmp(librarian, { partNumber: 'TAKEN-1' });
       const { id } = await createOpAmp(librarian, { amplifier: { voltageNoise: 1e-9, supplyMinimum: 9 } });
-      const patch = (body: object) => librarian.agent.patch(`/api/op-amps/${id}`).send({ version: 1, ...body });
+      const patch = (body: object) =>
+        librarian.agent.patch(`/api/op-amps/${id}`).send({ version: 1, ...body });
       expect((await patch({ partNumber: 'taken 1' }).expect(409)).body.code).toBe('part.duplicate');
       expect((await patch({ amplifier: { supplyMaximum: 5 } }).expect(422)).body.code).toBe('part.invalid');
       expect((await engineer.agent.get(`/api/op-amps/${id}`)).body.version).toBe(1);
@@ -304,7 +305,11 @@ describe('op-amps', () => {
         description: '100% tested, low_noise',
         amplifier: { voltageNoise: 3e-9, gainBandwidth: 1e6, inputType: 'jfet' },
       });
-      await createOpAmp(lister, { partNumber: 'L-2', amplifier: { voltageNoise: 1e-9 }, approval: 'restricted' });
+      await createOpAmp(lister, {
+        partNumber: 'L-2',
+        amplifier: { voltageNoise: 1e-9 },
+        approval: 'restricted',
+      });
       await createOpAmp(lister, {
         partNumber: 'L-3',
         manufacturer: 'Öre Mikro',
@@ -324,7 +329,9 @@ describe('op-amps', () => {
       const first = await lister.agent.get('/api/op-amps?library=team&limit=2').expect(200);
       const rest = await lister.agent.get('/api/op-amps?library=team&limit=2&offset=2').expect(200);
       expect([first.body.total, rest.body.total]).toEqual([3, 3]);
-      expect([...first.body.items, ...rest.body.items].map(({ partNumber }) => partNumber)).toEqual(await list(''));
+      expect([...first.body.items, ...rest.body.items].map(({ partNumber }) => partNumber)).toEqual(
+        await list(''),
+      );
     });
 
     it('finds the parts that hold every word, whatever the case, and takes no wildcards', async () => {

@@ -1,5 +1,5 @@
 import { evaluateStage, sourceFloor } from '@roothertz/common/noise';
-import type { OperatingConditions } from '@roothertz/common/conditions';
+import type { OperatingConditions, RankingRequest } from '@roothertz/common/conditions';
 import { createTeam, signInMember, startTestApp, type TestApp, type TestMember } from './support/index.js';
 
 const conditions: OperatingConditions = {
@@ -60,7 +60,7 @@ describe('rankings', () => {
   afterAll(() => app.close());
 
   const rank = (body: object) => librarian.agent.post('/api/rankings/op-amps').send(body);
-  const request = {
+  const request: RankingRequest = {
     conditions,
     filter: { lifecycle: ['active'], approval: ['approved'], supply: { minimum: 10, maximum: 30 } },
     target: { inputNoiseRms: 5e-7 },

@@ -43,9 +43,9 @@ describe('database structure', () => {
 });
 
 describe('preparing a database', () => {
-  const prepare = async (environment = {}): Promise<string[]> => {
+  const prepare = async (config = testConfig()): Promise<string[]> => {
     const lines: string[] = [];
-    await prepareDatabase(testConfig(environment), (line) => lines.push(line));
+    await prepareDatabase(config, (line) => lines.push(line));
     return lines;
   };
   const count = async (entity: typeof Team | typeof User): Promise<number> => {
@@ -71,8 +71,7 @@ describe('preparing a database', () => {
   });
 
   it('makes no demo accounts in production', async () => {
-    const secret = 'a-secret-of-more-than-thirty-two-letters';
-    await prepare({ NODE_ENV: 'production', JWT_SECRET: secret });
+    await prepare(Object.assign(testConfig(), { NODE_ENV: 'production' }));
     expect([await count(Team), await count(User)]).toEqual([0, 0]);
   });
 });
