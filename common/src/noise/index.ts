@@ -8,6 +8,7 @@ export * from './excess.js';
 export * from './figures.js';
 export * from './ranking/index.js';
 export * from './relativeSpread.js';
+export * from './resistor/index.js';
 export * from './shot.js';
 export { flatFeedbackCapacitance } from './stage/transimpedance.js';
 export * from './thermal.js';

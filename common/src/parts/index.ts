@@ -12,3 +12,5 @@ export * from './opAmpPart.js';
 export * from './opAmpColumns.js';
 export * from './opAmpRow.js';
 export * from './checkOpAmp.js';
+export * from './preferredValues.js';
+export * from './resistor.js';

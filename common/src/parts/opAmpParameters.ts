@@ -70,7 +70,7 @@ export const OP_AMP_PARAMETERS = [
     label: 'gain–bandwidth product',
     symbol: 'GBW',
     kind: 'frequency',
-    bounds: { above: 0, to: 1e13 },
+    bounds: { from: 1e-3, to: 1e13 },
     fallback: null,
     displayUnit: 'MHz',
     synonyms: [

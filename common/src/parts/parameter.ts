@@ -4,6 +4,8 @@ import type { QuantityKind } from '../units/index.js';
 export interface Bounds {
   above?: number;
   from?: number;
+  /** The least value above 0, where 0 stands for “none”. */
+  least?: number;
   to: number;
 }
 

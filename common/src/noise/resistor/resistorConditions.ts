@@ -1,0 +1,19 @@
+import type { BandConditions, PartFilter } from '../../conditions/index.js';
+
+/** The place in a circuit for which a resistor is sought. */
+export interface ResistorConditions {
+  /** Ω, the value wanted */
+  resistance: number;
+  /** how far a part's value may lie from it; 0.02 = 2 % */
+  resistanceTolerance: number;
+  /** V across the resistor, either sign */
+  dcVoltage: number;
+  /** K */
+  ambientTemperature: number;
+  band: BandConditions;
+}
+
+/** Which resistors are considered at all, and which of them are excluded with a reason. */
+export type ResistorFilter = Pick<PartFilter, 'search' | 'library' | 'lifecycle' | 'approval' | 'package'> & {
+  technology?: string[];
+};
