@@ -66,7 +66,7 @@ export class RankingService {
 
   private async chosenLibraries(caller: Caller, filter: PartFilter): Promise<IndexedLibrary[]> {
     const libraries = await this.index.readableBy(caller);
-    return libraries.filter(({ library }) => filter.library?.includes(library) ?? true);
+    return libraries.filter(({ library }) => !filter.library?.length || filter.library.includes(library));
   }
 }
 

@@ -38,9 +38,15 @@ export function outputPowers(integrals: Float64Array, generators: Generators): C
 
 /** The whole power at the output in V²: the sum of `outputPowers`, without making the budget. */
 export function outputPower(integrals: Float64Array, generators: Generators): number {
+  return integrals[INTEGRAL.source] + addedPower(integrals, generators);
+}
+
+/** The power at the output in V² of all but the source. */
+export function addedPower(integrals: Float64Array, generators: Generators): number {
   const { voltage2, voltageCorner, current2, currentCorner } = generators;
   return (
-    fixedPower(integrals) +
+    integrals[INTEGRAL.feedback] +
+    integrals[INTEGRAL.bias] +
     voltage2 * (integrals[INTEGRAL.voltageWhite] + voltageCorner * integrals[INTEGRAL.voltageFlicker]) +
     current2 *
       (integrals[INTEGRAL.currentSourceWhite] +

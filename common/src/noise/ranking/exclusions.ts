@@ -41,10 +41,11 @@ export function prepareExclusions(
   };
 }
 
-function filterExclusions(filter: PartFilter): Exclude {
-  const lifecycles = filter.lifecycle && new Set<string>(filter.lifecycle);
-  const approvals = filter.approval && new Set<string>(filter.approval);
-  const inputTypes = filter.inputType && new Set<string | null>(filter.inputType);
+/** The exclusions that only the filter makes, whatever the conditions. */
+export function filterExclusions(filter: PartFilter): Exclude {
+  const lifecycles = chosen<string>(filter.lifecycle);
+  const approvals = chosen<string>(filter.approval);
+  const inputTypes = chosen<string | null>(filter.inputType);
   const packageName = filter.package?.trim().toLowerCase();
   const { channels = 0, supply } = filter;
   return (columns, row) => {
@@ -59,6 +60,11 @@ function filterExclusions(filter: PartFilter): Exclude {
       (parameters.supplyMinimum[row] > supply.minimum || parameters.supplyMaximum[row] < supply.maximum);
     return short ? 'supply-out-of-range' : null;
   };
+}
+
+/** The words of a list that narrows; an empty list narrows nothing, as one that is left out. */
+function chosen<Word>(words: readonly Word[] | undefined): ReadonlySet<Word> | null {
+  return words?.length ? new Set(words) : null;
 }
 
 /**

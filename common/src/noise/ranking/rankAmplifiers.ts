@@ -1,6 +1,5 @@
 import type { OperatingConditions, PartFilter, RankingTarget } from '../../conditions/index.js';
 import { smallestPositions } from '../../numeric/index.js';
-import type { ExclusionReason } from '../cautions.js';
 import type { SourceFloor, StageFigures } from '../figures.js';
 import { stageModel } from '../stage/stageModel.js';
 import type { StageModel } from '../stage/model.js';
@@ -9,9 +8,9 @@ import { stageCautions } from '../stageCautions.js';
 import { figuresFrom, floorFrom } from '../stageFigures.js';
 import { amplifierAt, type AmplifierColumns } from './columns.js';
 import { findContenders } from './contenders.js';
-import { isSought, prepareExclusions, searchWords } from './exclusions.js';
 import { countQuietSet, findQuietest, isInQuietSet, type Quietest } from './quietSet.js';
 import { scoreRows, type Scores } from './scores.js';
+import { sift, type ExcludedPart, type PartPlace } from './sift.js';
 
 /** The figures by which a ranking can be sorted; `-` in front = descending. */
 export const RANKING_SORTS = [
@@ -35,22 +34,12 @@ export interface RankingQuery {
   offset: number;
 }
 
-/** Where a part stands: which of the given libraries, and which row of it. */
-export interface PartPlace {
-  library: number;
-  row: number;
-}
-
 export interface RankedPart extends PartPlace {
   rank: number;
   figures: StageFigures;
   quietSet: boolean;
   /** null where there is no target */
   meetsTarget: boolean | null;
-}
-
-export interface ExcludedPart extends PartPlace {
-  reason: ExclusionReason;
 }
 
 export interface Ranking {
@@ -94,36 +83,6 @@ export function rankAmplifiers(query: RankingQuery, libraries: readonly Amplifie
       rankedPart(query, model, libraries, scores, quietest!, places(place), query.offset + index + 1),
     ),
   };
-}
-
-/** The excluded parts of the libraries, without ranking the others. */
-export function findExcluded(
-  query: Pick<RankingQuery, 'conditions' | 'filter'>,
-  libraries: readonly AmplifierColumns[],
-): ExcludedPart[] {
-  return sift(query, stageModel(query.conditions), libraries).excluded;
-}
-
-function sift(
-  { conditions, filter }: Pick<RankingQuery, 'conditions' | 'filter'>,
-  model: StageModel,
-  libraries: readonly AmplifierColumns[],
-) {
-  const exclude = prepareExclusions(conditions, filter, model);
-  const words = searchWords(filter.search);
-  const excluded: ExcludedPart[] = [];
-  const accepted = libraries.map((columns, library) => {
-    const rows = new Uint32Array(columns.count);
-    let count = 0;
-    for (let row = 0; row < columns.count; row++) {
-      if (words.length > 0 && !isSought(columns, row, words)) continue;
-      const reason = exclude(columns, row);
-      if (reason) excluded.push({ library, row, reason });
-      else rows[count++] = row;
-    }
-    return rows.subarray(0, count);
-  });
-  return { accepted, excluded };
 }
 
 interface ScoredPlace {

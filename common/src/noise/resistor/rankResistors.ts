@@ -120,9 +120,9 @@ function exclusion(
   resistor: LibraryResistor,
 ): ResistorExclusionReason | null {
   const { lifecycle, approval, technology, powerRating, resistance } = resistor;
-  if (filter.lifecycle && !filter.lifecycle.includes(lifecycle)) return 'lifecycle';
-  if (filter.approval && !filter.approval.includes(approval)) return 'approval';
-  if (filter.technology && !filter.technology.includes(technology ?? '')) return 'technology';
+  if (filter.lifecycle?.length && !filter.lifecycle.includes(lifecycle)) return 'lifecycle';
+  if (filter.approval?.length && !filter.approval.includes(approval)) return 'approval';
+  if (filter.technology?.length && !filter.technology.includes(technology ?? '')) return 'technology';
   const packageName = filter.package?.trim().toLowerCase() ?? '';
   if (!resistor.package.toLowerCase().includes(packageName)) return 'package';
   return powerRating !== null && dcVoltage ** 2 / resistance > powerRating ? 'over-rating' : null;

@@ -1,0 +1,100 @@
+import { describe, expect, it } from 'vitest';
+import type { OperatingConditions } from '../../conditions/index.js';
+import { emptyColumns, type AmplifierColumns } from './columns.js';
+import { axisPoints, cellConditions, quietestMap, type MapQuery } from './quietestMap.js';
+import { rankAmplifiers } from './rankAmplifiers.js';
+
+function library(count: number, seed: number): AmplifierColumns {
+  let state = seed;
+  const random = () => (state = (state * 1103515245 + 12345) % 2 ** 31) / 2 ** 31;
+  const between = (from: number, to: number) => from * (to / from) ** random();
+  const columns = emptyColumns(count);
+  const { parameters } = columns;
+  for (let row = 0; row < count; row++) {
+    parameters.voltageNoise[row] = between(0.8e-9, 60e-9);
+    parameters.voltageNoiseCorner[row] = between(0.1, 3000);
+    parameters.currentNoise[row] = between(1e-16, 5e-12);
+    parameters.currentNoiseCorner[row] = between(0.1, 1000);
+    if (row % 7 > 0) parameters.gainBandwidth[row] = between(1e4, 2e9);
+    if (row % 5 > 0) parameters.inputCapacitance[row] = between(1e-12, 1e-10);
+    if (row % 3 > 0) parameters.minimumStableGain[row] = between(1, 20);
+    columns.searchText[row] = row % 11 === 0 ? 'odd' : 'plain';
+  }
+  return columns;
+}
+
+const base: OperatingConditions = {
+  source: { resistance: 600, inductance: 0, capacitance: 1e-10 },
+  ambientTemperature: 298.15,
+  band: { lower: 20, upper: 20000, lowPassOrder: 2 },
+  stage: { topology: 'non-inverting', gain: 10, gainResistance: 100 },
+  referenceFrequency: 1000,
+  bandwidthMargin: 3,
+  amplifierTemperatureModel: 'estimated',
+};
+
+const stages: [string, OperatingConditions][] = [
+  ['a non-inverting stage', base],
+  ['a non-inverting stage with a coil', { ...base, source: { ...base.source, inductance: 0.1 } }],
+  ['an inverting stage', { ...base, stage: { topology: 'inverting', gain: 5, gainResistance: 1000 } }],
+  [
+    'a transimpedance stage',
+    { ...base, stage: { topology: 'transimpedance', feedbackResistance: 1e6, feedbackCapacitance: 'auto' } },
+  ],
+];
+
+const query = (conditions: OperatingConditions): MapQuery => ({
+  conditions,
+  filter: { search: 'plain' },
+  resistance: { from: 1, to: 1e7, steps: 8 },
+  frequency: { from: 0.1, to: 1e7, steps: 9 },
+});
+
+describe('quietestMap', () => {
+  const libraries = [library(60, 1), library(80, 2)];
+
+  it.each(stages)('has in each cell the leader of a ranking at that cell, for %s', (_, conditions) => {
+    const map = quietestMap(query(conditions), libraries);
+    map.resistances.forEach((resistance, r) =>
+      map.frequencies.forEach((frequency, f) => {
+        const { items } = rankAmplifiers(
+          {
+            conditions: cellConditions(conditions, resistance, frequency),
+            filter: { search: 'plain' },
+            target: {},
+            sort: 'inputNoiseDensity',
+            descending: false,
+            limit: 1,
+            offset: 0,
+          },
+          libraries,
+        );
+        const leader = items[0] && { library: items[0].library, row: items[0].row };
+        expect(map.parts[map.winners[r][f]]).toEqual(leader);
+      }),
+    );
+  });
+
+  it('has cells without a winner where nothing is fast enough, and territories of several parts', () => {
+    const { winners, parts } = quietestMap(query(base), [library(40, 3)]);
+    expect(parts.length).toBeGreaterThan(2);
+    const slow = { ...query(base), frequency: { from: 1e12, to: 1e12, steps: 1 }, filter: {} };
+    const columns = library(10, 4);
+    columns.parameters.gainBandwidth.fill(1e6);
+    expect(quietestMap(slow, [columns]).winners.flat()).toEqual(Array(8).fill(-1));
+    expect(winners.flat().every((index) => index < parts.length)).toBe(true);
+  });
+
+  it('answers an empty library with an empty map', () => {
+    const map = quietestMap(query(base), []);
+    expect(map.parts).toEqual([]);
+    expect(map.winners.flat()).toEqual(Array(72).fill(-1));
+  });
+});
+
+describe('axisPoints', () => {
+  it('goes in equal factors from end to end', () => {
+    expect(axisPoints({ from: 1, to: 1000, steps: 4 }).map((x) => Math.round(x))).toEqual([1, 10, 100, 1000]);
+    expect(axisPoints({ from: 5, to: 9, steps: 1 })).toEqual([5]);
+  });
+});

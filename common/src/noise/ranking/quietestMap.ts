@@ -1,0 +1,159 @@
+import type { OperatingConditions, PartFilter } from '../../conditions/index.js';
+import { addedPower } from '../budget.js';
+import { INTEGRAL, INTEGRALS, type Evaluate } from '../stage/model.js';
+import { stageModel } from '../stage/stageModel.js';
+import { referenceEvaluation } from '../stageFigures.js';
+import type { AmplifierColumns } from './columns.js';
+import { filterExclusions, isSought, prepareExclusions, searchWords } from './exclusions.js';
+import { prepareGenerators } from './generators.js';
+import { preparedColumns } from './preparedColumns.js';
+import type { PartPlace } from './sift.js';
+
+/** Rounding must not lift a lower bound above the value. */
+const ALMOST = 1 - 1e-9;
+
+/** Logarithmic steps of an axis, both ends included. */
+export interface MapAxis {
+  from: number;
+  to: number;
+  steps: number;
+}
+
+export interface MapQuery {
+  /** everything but source resistance and frequency, which the axes give */
+  conditions: OperatingConditions;
+  filter: PartFilter;
+  /** Ω */
+  resistance: MapAxis;
+  /** Hz */
+  frequency: MapAxis;
+}
+
+export interface QuietestMap {
+  resistances: number[];
+  frequencies: number[];
+  /** The parts that win anywhere. */
+  parts: PartPlace[];
+  /** For each resistance a row with, for each frequency, an index into `parts`; −1 = no part is fast and stable enough. */
+  winners: number[][];
+}
+
+/** The points of an axis, each a constant factor above the one before. */
+export function axisPoints({ from, to, steps }: MapAxis): number[] {
+  if (steps === 1) return [from];
+  return Array.from({ length: steps }, (_, n) =>
+    n === steps - 1 ? to : from * (to / from) ** (n / (steps - 1)),
+  );
+}
+
+/** The conditions of one cell: its resistance, and its frequency as reference and as end of the band. */
+export function cellConditions(
+  conditions: OperatingConditions,
+  resistance: number,
+  frequency: number,
+): OperatingConditions {
+  return {
+    ...conditions,
+    source: { ...conditions.source, resistance },
+    band: { lower: frequency / 2, upper: frequency, lowPassOrder: 0 },
+    referenceFrequency: frequency,
+  };
+}
+
+/**
+ * Which part has the lowest noise density, referred to the source, for each source resistance and each
+ * frequency: in each cell the leader of a ranking by `inputNoiseDensity` at `cellConditions`.
+ *
+ * Without inductance a part's density falls with its input capacitance, and it never depends on its
+ * gain–bandwidth product; so the value at the least capacitance is a lower bound, and few parts are evaluated.
+ */
+export function quietestMap(query: MapQuery, libraries: readonly AmplifierColumns[]): QuietestMap {
+  const resistances = axisPoints(query.resistance);
+  const frequencies = axisPoints(query.frequency);
+  const candidates = findCandidates(query.filter, libraries);
+  const parts = new Map<string, { index: number; place: PartPlace }>();
+  const indexOf = (place: PartPlace | null) => {
+    if (place === null) return -1;
+    const key = `${place.library} ${place.row}`;
+    if (!parts.has(key)) parts.set(key, { index: parts.size, place });
+    return parts.get(key)!.index;
+  };
+  const winners = resistances.map((resistance) => {
+    let previous: PartPlace | null = null;
+    return frequencies.map((frequency) => {
+      const conditions = cellConditions(query.conditions, resistance, frequency);
+      previous = findWinner({ conditions, filter: query.filter }, libraries, candidates, previous);
+      return indexOf(previous);
+    });
+  });
+  return { resistances, frequencies, parts: [...parts.values()].map(({ place }) => place), winners };
+}
+
+/** The rows that are sought and that the filter allows, whatever the cell. */
+function findCandidates(filter: PartFilter, libraries: readonly AmplifierColumns[]): Uint32Array[] {
+  const exclude = filterExclusions(filter);
+  const words = searchWords(filter.search);
+  return libraries.map((columns) =>
+    Uint32Array.from({ length: columns.count }, (_, row) => row).filter(
+      (row) => isSought(columns, row, words) && exclude(columns, row) === null,
+    ),
+  );
+}
+
+interface Cell {
+  conditions: OperatingConditions;
+  filter: PartFilter;
+}
+
+function findWinner(
+  { conditions, filter }: Cell,
+  libraries: readonly AmplifierColumns[],
+  candidates: readonly Uint32Array[],
+  previous: PartPlace | null,
+): PartPlace | null {
+  const model = stageModel(conditions);
+  const evaluate = referenceEvaluation(conditions, model);
+  const exclude = prepareExclusions(conditions, filter, model);
+  const densities = libraries.map((columns) => densitiesOf(conditions, evaluate, columns));
+  let best = Infinity;
+  let winner: PartPlace | null = null;
+  const consider = (library: number, row: number) => {
+    const density2 = densities[library].at(row);
+    const place = { library, row };
+    if (density2 > best || (density2 === best && winner !== null && !isBefore(place, winner))) return;
+    if (exclude(libraries[library], row)) return;
+    best = density2;
+    winner = place;
+  };
+  if (previous) consider(previous.library, previous.row);
+  candidates.forEach((rows, library) => {
+    for (const row of rows) if (densities[library].atLeast(row) <= best) consider(library, row);
+  });
+  return winner;
+}
+
+function isBefore(a: PartPlace, b: PartPlace): boolean {
+  return a.library < b.library || (a.library === b.library && a.row < b.row);
+}
+
+/** What a row adds to the source's squared density, exactly and as a lower bound. */
+function densitiesOf(conditions: OperatingConditions, evaluate: Evaluate, columns: AmplifierColumns) {
+  const { source } = conditions;
+  const { gainBandwidth, inputCapacitance } = preparedColumns(columns);
+  const generatorsAt = prepareGenerators(conditions, columns);
+  const exact = new Float64Array(INTEGRALS);
+  const least = new Float64Array(INTEGRALS);
+  const leastCapacitance = inputCapacitance.reduce((a, b) => Math.min(a, b), Infinity);
+  if (source.inductance === 0) evaluate(Infinity, leastCapacitance, least);
+  return {
+    at(row: number): number {
+      evaluate(gainBandwidth[row], inputCapacitance[row], exact);
+      return addedPower(exact, generatorsAt(row)) / exact[INTEGRAL.source];
+    },
+    atLeast(row: number): number {
+      return source.inductance === 0
+        ? (ALMOST * addedPower(least, generatorsAt(row))) / least[INTEGRAL.source]
+        : 0;
+    },
+  };
+}
