@@ -46,15 +46,15 @@ export function groupAmplifiers(
     ...(closedForm.length > 0
       ? [{ rows: closedForm, evaluate: model.compile(closedFormNode(conditions)) }]
       : []),
-    ...[smooth, ...splitByResonance(model, columns, resonant)]
+    ...[smooth, ...groupResonant(model, columns, resonant)]
       .filter(({ rows: members }) => members.length > 0)
       .map((members) => members.toGroup(conditions)),
   ];
 }
 
+/** A row and its poles, the sharpest first. */
 interface ResonantRow {
   row: number;
-  sharpest: PoleRange;
   poles: PoleRange[];
 }
 
@@ -74,28 +74,43 @@ function placeByQuality(
   }
   const poles = model.poles(gainBandwidth, inputCapacitance).map(poleRange);
   poles.sort((a, b) => a.angle - b.angle);
-  resonant.push({ row, sharpest: poles[0], poles });
+  resonant.push({ row, poles });
 }
 
-function splitByResonance(
+function groupResonant(
   model: StageModel,
   columns: DynamicColumns,
   resonant: ResonantRow[],
 ): QuadratureRows[] {
-  resonant.sort((a, b) => a.sharpest.from - b.sharpest.from);
-  const groups: QuadratureRows[] = [];
+  return splitByResonance(resonant, 0).map((members) => {
+    const group = new QuadratureRows(model, columns);
+    for (const { row, poles } of members) group.addResonant(row, poles);
+    return group;
+  });
+}
+
+/**
+ * Groups of rows whose poles at `place` are neighbours, and within them those at each later place: a sharp
+ * pole's range is never much wider than the pole is sharp, or a panel as short would be needed all over it.
+ */
+function splitByResonance(rows: ResonantRow[], place: number): ResonantRow[][] {
+  const frequency = ({ poles }: ResonantRow) => poles[place]?.from ?? 0;
+  const angleOf = ({ poles }: ResonantRow) => Math.min(SHARP_ANGLE, poles[place]?.angle ?? SHARP_ANGLE);
+  if (rows.every((row) => angleOf(row) === SHARP_ANGLE)) return rows.length > 0 ? [rows] : [];
+  const groups: ResonantRow[][] = [];
   let start = 0;
-  let angle = Infinity;
-  for (const { row, sharpest, poles } of resonant) {
-    angle = Math.min(angle, sharpest.angle);
-    if (groups.length === 0 || Math.log(sharpest.from / start) > SPREAD * angle) {
-      groups.push(new QuadratureRows(model, columns));
-      start = sharpest.from;
-      angle = sharpest.angle;
+  let angle = SHARP_ANGLE;
+  for (const member of rows.toSorted((a, b) => frequency(a) - frequency(b))) {
+    const here = frequency(member);
+    angle = Math.min(angle, angleOf(member));
+    if (groups.length === 0 || (angle < SHARP_ANGLE && Math.log(here / start) > SPREAD * angle)) {
+      groups.push([]);
+      start = here;
+      angle = angleOf(member);
     }
-    groups[groups.length - 1].addResonant(row, poles);
+    groups[groups.length - 1].push(member);
   }
-  return groups;
+  return groups.flatMap((group) => splitByResonance(group, place + 1));
 }
 
 /** Rows that share a quadrature, with the ranges in which their poles lie. */

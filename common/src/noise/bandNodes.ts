@@ -53,8 +53,9 @@ export function quadratureNodes(
   growth: 0 | 2,
 ): Nodes {
   const { band } = conditions;
-  const features = [...poles.map(feature), ...filterFeatures(conditions)];
-  const top = band.lowPassOrder === 0 ? band.upper : tailEnd(conditions, poles, growth);
+  const finite = poles.filter(({ to }) => Number.isFinite(to));
+  const features = [...finite.map(feature), ...filterFeatures(conditions)];
+  const top = band.lowPassOrder === 0 ? band.upper : tailEnd(conditions, finite, growth);
   const panels = gradedPanels(Math.log(band.lower), Math.log(top), features, LONGEST);
   return panelNodes(conditions, panels);
 }
@@ -81,11 +82,16 @@ function filterFeatures({ band }: OperatingConditions): Feature[] {
   return [feature({ from: band.upper, to: band.upper, angle: Math.PI / (2 * band.lowPassOrder) })];
 }
 
+/** Up to the second order a resonance counts however far beyond the band it lies. */
 function tailEnd({ band }: OperatingConditions, poles: readonly PoleRange[], growth: 0 | 2): number {
   const decay = 2 * band.lowPassOrder - 1 - growth;
   const highest = Math.max(band.upper, ...poles.map(({ to }) => to));
   if (decay < 1) return highest / TAIL;
-  return Math.max(band.upper * TAIL ** (-1 / decay), Math.min(30 * highest, band.upper / TAIL));
+  const beyondPoles = 30 * highest;
+  return Math.max(
+    band.upper * TAIL ** (-1 / decay),
+    band.lowPassOrder > 2 ? Math.min(beyondPoles, band.upper / TAIL) : beyondPoles,
+  );
 }
 
 function panelNodes(conditions: OperatingConditions, panels: readonly number[]): Nodes {

@@ -6,6 +6,7 @@ export * from './contributors.js';
 export * from './evaluateStage.js';
 export * from './excess.js';
 export * from './figures.js';
+export * from './levers/index.js';
 export * from './ranking/index.js';
 export * from './relativeSpread.js';
 export * from './resistor/index.js';

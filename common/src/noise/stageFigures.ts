@@ -67,7 +67,7 @@ export function figuresFrom(
     signalGain: Math.sqrt(spot.gain2),
     closedLoopBandwidth: closedLoopBandwidth(conditions, model, amplifier),
     noiseFigure: noiseFigure(conditions, spot),
-    aboveFloor: powers.source > 0 ? 10 * Math.log10(output2 / powers.source) : null,
+    aboveFloor: powers.source > 0 ? decibels(output2, powers.source) : null,
     contributions: mapContributions(powers, (power) => Math.sqrt(power / spot.gain2)),
     dominant: dominantContributor(powers),
   };
@@ -133,7 +133,12 @@ function noiseFigure(conditions: OperatingConditions, { powers, gain2 }: SpotPow
     conditions.referenceFrequency,
   );
   if (atStandard === 0) return null;
-  return 10 * Math.log10(1 + (sum(powers) - powers.source) / (gain2 * atStandard));
+  return decibels(atStandard + (sum(powers) - powers.source) / gain2, atStandard);
+}
+
+/** The ratio of two powers in dB, also where the ratio itself would be too large for a number. */
+function decibels(power: number, reference: number): number {
+  return 10 * (Math.log10(power) - Math.log10(reference));
 }
 
 export function mapContributions(

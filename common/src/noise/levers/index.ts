@@ -1,0 +1,3 @@
+export * from './levers.js';
+export * from './parallelStage.js';
+export * from './transformer.js';

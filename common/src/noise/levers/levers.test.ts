@@ -1,0 +1,125 @@
+import { describe, expect, it } from 'vitest';
+import { amplifierWith, conditionsWith, libraryOf } from '../../../test/support/stages.js';
+import { checkConditions } from '../../conditions/index.js';
+import { evaluateStage } from '../evaluateStage.js';
+import { rankAmplifiers } from '../ranking/index.js';
+import { findLevers, type LeverKey } from './levers.js';
+import { parallelStage } from './parallelStage.js';
+import { behindTransformer, optimumSourceResistance } from './transformer.js';
+
+const amplifier = amplifierWith({ channels: 2 });
+const part = { amplifier, name: 'VR-1' };
+const quieter = { amplifier: amplifierWith({ voltageNoise: 1e-9 }), name: 'VR-2' };
+
+const stages = {
+  'a low source resistance': conditionsWith({
+    source: { resistance: 50, temperature: 300 },
+    stage: { gain: 100, gainResistance: 100 },
+    amplifierTemperatureModel: 'estimated',
+  }),
+  'a coil with a capacitance': conditionsWith({
+    source: { resistance: 200, inductance: 0.05, capacitance: 1e-9 },
+    stage: { gain: 10, gainResistance: 220 },
+    band: { lowPassOrder: 2 },
+  }),
+  'an inverting stage': conditionsWith({ stage: { topology: 'inverting', gain: 10, gainResistance: 1000 } }),
+  'a transimpedance stage': conditionsWith({
+    source: { resistance: 1e8, capacitance: 1e-11 },
+    stage: {
+      topology: 'transimpedance',
+      gain: undefined,
+      feedbackResistance: 1e6,
+      feedbackCapacitance: 'auto',
+    },
+  }),
+};
+
+const rank = (conditions: ReturnType<typeof conditionsWith>, ranked: typeof amplifier) =>
+  rankAmplifiers(
+    {
+      conditions: { ...conditions, bandwidthMargin: 0 },
+      filter: {},
+      target: {},
+      sort: 'inputNoiseRms',
+      descending: false,
+      limit: 1,
+      offset: 0,
+    },
+    [libraryOf([{ amplifier: ranked }])],
+  ).items[0].figures;
+
+describe.each(Object.entries(stages))('levers of %s', (_, conditions) => {
+  const now = evaluateStage(conditions, amplifier).inputNoiseRms;
+
+  it('tell what a ranking at the changed conditions tells', () => {
+    const levers = findLevers(conditions, part, quieter);
+    expect(levers.length).toBeGreaterThan(3);
+    for (const lever of levers) {
+      expect(checkConditions({ conditions: lever.conditions })).toEqual([]);
+      const ranked = rank(lever.conditions, lever.amplifier as typeof amplifier);
+      expect(lever.change).toBeCloseTo(20 * Math.log10(ranked.inputNoiseRms / lever.ratio / now), 6);
+    }
+  });
+
+  it('stand in the order in which they help', () => {
+    const changes = findLevers(conditions, part, quieter).map(({ change }) => change);
+    expect(changes).toEqual([...changes].sort((a, b) => a - b));
+  });
+});
+
+describe('findLevers', () => {
+  const keysOf = (conditions: ReturnType<typeof conditionsWith>) =>
+    findLevers(conditions, part).map(({ key }) => key);
+
+  it.each<[LeverKey, ReturnType<typeof conditionsWith>]>([
+    ['lower-network', conditionsWith({ stage: { gain: 100, gainResistance: 5 } })],
+    ['raise-feedback', stages['a low source resistance']],
+    ['halve-band', conditionsWith({ band: { lower: 15e3 }, referenceFrequency: 16e3 })],
+    ['cool-source', conditionsWith({ source: { resistance: 0 } })],
+    ['transformer', conditionsWith({ source: { resistance: 1e5 } })],
+    ['quieter-part', stages['a low source resistance']],
+  ])('leaves out %s where it can’t help', (key, conditions) => {
+    expect(keysOf(conditions)).not.toContain(key);
+  });
+
+  it('lowers the network to what the output is to drive', () => {
+    const conditions = conditionsWith({
+      stage: { gain: 100, gainResistance: 100, network: { minimumTotal: 2000 } },
+    });
+    const lever = findLevers(conditions, part).find(({ key }) => key === 'lower-network')!;
+    expect(lever.conditions.stage.gainResistance).toBe(20);
+    expect(lever.change).toBeLessThan(0);
+  });
+});
+
+describe('parallelStage', () => {
+  it('lets voltage noise and network fall with n and current noise into the source rise with n', () => {
+    const conditions = conditionsWith({ stage: { gain: 100, gainResistance: 100 } });
+    const fast = amplifierWith({ gainBandwidth: null, inputCapacitance: 0 });
+    const one = evaluateStage(conditions, fast).contributions;
+    const four = parallelStage({ conditions, amplifier: fast }, 4);
+    const many = evaluateStage(four.conditions, four.amplifier).contributions;
+    expect(many.source).toBeCloseTo(one.source, 15);
+    expect(many.amplifierVoltage / one.amplifierVoltage).toBeCloseTo(1 / 2, 9);
+    expect(many.feedback / one.feedback).toBeCloseTo(1 / 2, 9);
+    expect(many.amplifierCurrentFeedback / one.amplifierCurrentFeedback).toBeCloseTo(1 / 2, 9);
+    expect(many.amplifierCurrentSource / one.amplifierCurrentSource).toBeCloseTo(2, 9);
+  });
+});
+
+describe('transformer', () => {
+  it('brings the noise figure to its least, 1 + 2·e_n·i_n/(4kT₀) (Rothe & Dahlke 1956)', () => {
+    const conditions = conditionsWith({ source: { resistance: 10 } });
+    const white = amplifierWith({
+      voltageNoiseCorner: 0,
+      currentNoiseCorner: 0,
+      gainBandwidth: null,
+      inputCapacitance: 0,
+    });
+    const optimum = optimumSourceResistance(conditions, white);
+    expect(optimum).toBeCloseTo(3000, 9);
+    const matched = behindTransformer(conditions, Math.sqrt(optimum / 10));
+    const least = 10 * Math.log10(1 + (2 * 3e-9 * 1e-12) / (4 * 1.380649e-23 * 290));
+    expect(evaluateStage(matched, white).noiseFigure).toBeCloseTo(least, 6);
+  });
+});

@@ -1,0 +1,41 @@
+import type { OperatingConditions } from '../../conditions/index.js';
+import { leastCurrentNoise, type NoiseAmplifier } from '../amplifierNoise.js';
+
+/** One stage, or several alike whose inputs are joined and whose outputs are averaged. */
+export interface ParallelStage {
+  conditions: OperatingConditions;
+  amplifier: NoiseAmplifier;
+}
+
+/**
+ * The single stage that makes the noise of `count` identical channels in parallel, each with a network of
+ * its own: e_n falls with √n, i_n into the source rises with √n, the input capacitances add up, and each
+ * network's resistances count as 1/n.
+ *
+ * @param count channels, a whole number ≥ 1
+ * Source: Motchenbacher & Connelly 1993, parallel input stages.
+ */
+export function parallelStage({ conditions, amplifier }: ParallelStage, count: number): ParallelStage {
+  if (count === 1) return { conditions, amplifier };
+  const { stage } = conditions;
+  const { inputType = null, inputBiasCurrent = null, inputCapacitance = null } = amplifier;
+  const currentNoise = amplifier.currentNoise ?? leastCurrentNoise(inputType, inputBiasCurrent);
+  return {
+    amplifier: {
+      ...amplifier,
+      voltageNoise: amplifier.voltageNoise / Math.sqrt(count),
+      currentNoise: currentNoise * Math.sqrt(count),
+      inputCapacitance: inputCapacitance && inputCapacitance * count,
+    },
+    conditions: {
+      ...conditions,
+      stage: {
+        ...stage,
+        ...(stage.gainResistance !== undefined && { gainResistance: stage.gainResistance / count }),
+        ...(stage.network && {
+          network: { ...stage.network, minimumTotal: stage.network.minimumTotal / count },
+        }),
+      },
+    },
+  };
+}
