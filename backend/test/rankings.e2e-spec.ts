@@ -184,6 +184,32 @@ describe('rankings', () => {
     expect(list.body.total).toBe(0);
   });
 
+  it('draws the map of the quietest parts, cell by cell', async () => {
+    const axes = { resistance: { from: 1, to: 1e7, steps: 15 }, frequency: { from: 0.1, to: 1e6, steps: 3 } };
+    const { filter } = request;
+    const { body } = await librarian.agent
+      .post('/api/rankings/quietest-map')
+      .send({ conditions, filter, ...axes })
+      .expect(200);
+    expect(body.resistances).toHaveLength(15);
+    expect(body.winners.map((row: number[]) => row.length)).toEqual(Array(15).fill(3));
+    const winnerOf = (row: number, cell: number) => body.parts[body.winners[row][cell]]?.partNumber;
+    expect([winnerOf(0, 0), winnerOf(14, 0), winnerOf(0, 2)]).toEqual([
+      expect.stringMatching(/W-[15]/),
+      'W-3',
+      'W-4',
+    ]);
+  });
+
+  it('refuses a map whose axis runs backwards', async () => {
+    const axes = { resistance: { from: 10, to: 1, steps: 3 }, frequency: { from: 1, to: 10, steps: 3 } };
+    const { body } = await librarian.agent
+      .post('/api/rankings/quietest-map')
+      .send({ conditions, ...axes })
+      .expect(422);
+    expect(body.errors).toEqual([{ field: 'resistance.to', message: expect.any(String) }]);
+  });
+
   it.each([
     [400, 'conditions.source.resistance', { source: { resistance: -1 } }],
     [400, 'conditions.source.resistance', { source: { resistance: 1e300 } }],

@@ -1,3 +1,4 @@
+import type { PartFilter } from '@roothertz/common/conditions';
 import { Injectable } from '@nestjs/common';
 import type { LibraryColumns } from '../library/op-amp-columns.js';
 import { LibraryService, type ReadableLibrary } from '../library/library.service.js';
@@ -23,9 +24,13 @@ export class LibraryIndex {
 
   constructor(private readonly libraries: LibraryService) {}
 
-  async readableBy(caller: Caller): Promise<IndexedLibrary[]> {
+  /** The libraries that the caller reads and the filter names; a filter without names means all. */
+  async readableBy(caller: Caller, filter: Pick<PartFilter, 'library'>): Promise<IndexedLibrary[]> {
     const readable = await this.libraries.readableLibraries(caller);
-    return Promise.all(readable.map(async (library) => ({ ...library, ...(await this.columnsOf(library)) })));
+    const chosen = readable.filter(
+      ({ library }) => !filter.library?.length || filter.library.includes(library),
+    );
+    return Promise.all(chosen.map(async (library) => ({ ...library, ...(await this.columnsOf(library)) })));
   }
 
   private columnsOf({ id, revision }: ReadableLibrary): Promise<LibraryColumns> {
@@ -45,4 +50,9 @@ export class LibraryIndex {
     });
     return entry;
   }
+}
+
+/** A text that changes whenever a part of one of the libraries changes. */
+export function revisionOf(libraries: readonly ReadableLibrary[]): string {
+  return libraries.map(({ id, revision }) => `${id}.${revision}`).join('-');
 }

@@ -6,7 +6,7 @@ import type {
   RankedOpAmpDto,
   RankingResponseDto,
 } from './dto/ranking-response.dto.js';
-import type { IndexedLibrary } from './library-index.service.js';
+import { type IndexedLibrary, revisionOf } from './library-index.service.js';
 
 /** Ranked parts whose record is gone since they were ranked are left out. */
 export function toRankingResponse(
@@ -19,7 +19,7 @@ export function toRankingResponse(
     excluded: countReasons(excluded),
     quietSet: { total: quietSetTotal },
     floor,
-    libraryRevision: libraries.map(({ id, revision }) => `${id}.${revision}`).join('-'),
+    libraryRevision: revisionOf(libraries),
     items: items.flatMap((item) => {
       const record = records.get(libraries[item.library].ids[item.row]);
       return record === undefined ? [] : [toRankedOpAmp(item, record)];

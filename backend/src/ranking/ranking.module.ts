@@ -2,12 +2,13 @@ import { Module } from '@nestjs/common';
 import { LibraryModule } from '../library/library.module.js';
 import { LibraryIndex } from './library-index.service.js';
 import { NoiseController } from './noise.controller.js';
+import { QuietestMapService } from './quietest-map.service.js';
 import { RankingService } from './ranking.service.js';
 import { RankingsController } from './rankings.controller.js';
 
 @Module({
   imports: [LibraryModule],
   controllers: [RankingsController, NoiseController],
-  providers: [RankingService, LibraryIndex],
+  providers: [RankingService, QuietestMapService, LibraryIndex],
 })
 export class RankingModule {}

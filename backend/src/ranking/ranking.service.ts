@@ -7,7 +7,7 @@ import {
   rankAmplifiers,
   RANKING_SORTS,
 } from '@roothertz/common/noise';
-import type { PartFilter, RankingRequest } from '@roothertz/common/conditions';
+import type { RankingRequest } from '@roothertz/common/conditions';
 import { Injectable } from '@nestjs/common';
 import { LibraryService } from '../library/library.service.js';
 import type { Caller } from '../shared/access/caller.js';
@@ -21,7 +21,8 @@ import type { RankOpAmpsDto } from './dto/rank-op-amps.dto.js';
 import type { RankingResponseDto } from './dto/ranking-response.dto.js';
 import type { StageFiguresDto } from './dto/stage-figures.dto.js';
 import { type IndexedLibrary, LibraryIndex } from './library-index.service.js';
-import { toPartName, toRankingResponse } from './ranking-response.js';
+import { partNameAt } from './part-name-at.js';
+import { toRankingResponse } from './ranking-response.js';
 
 @Injectable()
 export class RankingService {
@@ -34,7 +35,7 @@ export class RankingService {
     const request = checkedRankingRequest(dto);
     const { key: sort, descending } = parseSort(dto.sort, RANKING_SORTS);
     const { limit, offset } = dto;
-    const libraries = await this.chosenLibraries(caller, request.filter);
+    const libraries = await this.index.readableBy(caller, request.filter);
     const ranking = rankAmplifiers(
       { ...request, sort, descending, limit, offset },
       libraries.map(({ columns }) => columns),
@@ -46,7 +47,7 @@ export class RankingService {
 
   async exclusions(caller: Caller, dto: RankOpAmpsDto): Promise<ExclusionListDto> {
     const request = checkedRankingRequest(dto);
-    const libraries = await this.chosenLibraries(caller, request.filter);
+    const libraries = await this.index.readableBy(caller, request.filter);
     const excluded = findExcluded(
       request,
       libraries.map(({ columns }) => columns),
@@ -63,11 +64,6 @@ export class RankingService {
       throw new DomainError('conditions.invalid', 'The noise of this stage has no end.', { errors });
     return evaluateStage(conditions, amplifier);
   }
-
-  private async chosenLibraries(caller: Caller, filter: PartFilter): Promise<IndexedLibrary[]> {
-    const libraries = await this.index.readableBy(caller);
-    return libraries.filter(({ library }) => !filter.library?.length || filter.library.includes(library));
-  }
 }
 
 function toExclusion(
@@ -75,15 +71,7 @@ function toExclusion(
   { conditions, filter }: Required<RankingRequest>,
   libraries: readonly IndexedLibrary[],
 ): ExclusionDto {
-  const { library: name, ids, manufacturers, partNumbers, columns } = libraries[library];
-  const part = toPartName({
-    id: ids[row],
-    library: name,
-    manufacturer: manufacturers[row],
-    partNumber: partNumbers[row],
-    package: columns.package[row],
-    lifecycle: columns.lifecycle[row],
-    approval: columns.approval[row],
-  });
+  const { columns } = libraries[library];
+  const part = partNameAt({ library, row }, libraries);
   return { part, reason, detail: exclusionDetail(reason, conditions, filter, columns, row) };
 }

@@ -4,14 +4,19 @@ import { Access } from '../shared/access/access.decorator.js';
 import type { Caller as CallerOfRequest } from '../shared/access/caller.js';
 import { Caller } from '../shared/access/caller.decorator.js';
 import { ExclusionListDto } from './dto/exclusions-response.dto.js';
+import { QuietestMapDto, QuietestMapResponseDto } from './dto/quietest-map.dto.js';
 import { RankOpAmpsDto } from './dto/rank-op-amps.dto.js';
 import { RankingResponseDto } from './dto/ranking-response.dto.js';
+import { QuietestMapService } from './quietest-map.service.js';
 import { RankingService } from './ranking.service.js';
 
 @ApiTags('rankings')
 @Controller('rankings')
 export class RankingsController {
-  constructor(private readonly ranking: RankingService) {}
+  constructor(
+    private readonly ranking: RankingService,
+    private readonly map: QuietestMapService,
+  ) {}
 
   @Post('op-amps')
   @HttpCode(200)
@@ -27,5 +32,16 @@ export class RankingsController {
   @ApiOkResponse({ type: ExclusionListDto })
   listExclusions(@Caller() caller: CallerOfRequest, @Body() dto: RankOpAmpsDto): Promise<ExclusionListDto> {
     return this.ranking.exclusions(caller, dto);
+  }
+
+  @Post('quietest-map')
+  @HttpCode(200)
+  @Access('rankings.run')
+  @ApiOkResponse({ type: QuietestMapResponseDto })
+  drawQuietestMap(
+    @Caller() caller: CallerOfRequest,
+    @Body() dto: QuietestMapDto,
+  ): Promise<QuietestMapResponseDto> {
+    return this.map.draw(caller, dto);
   }
 }

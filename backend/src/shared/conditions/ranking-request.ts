@@ -8,6 +8,7 @@ import type { FieldError } from '@roothertz/common/parts';
 import { instanceToPlain } from 'class-transformer';
 import { DomainError } from '../errors/domain-error.js';
 import type { OperatingConditionsDto } from './operating-conditions.dto.js';
+import type { PartFilterDto } from './part-filter.dto.js';
 import type { RankingRequestDto } from './ranking-request.dto.js';
 
 /** A request as the noise model takes it: plain objects, with nothing that was left out and every default. */
@@ -15,7 +16,7 @@ export function toRankingRequest(dto: RankingRequestDto): Required<RankingReques
   const { filter, target, quantity } = dto;
   return {
     conditions: toOperatingConditions(dto.conditions),
-    filter: toPlain<PartFilter>(filter),
+    filter: toPartFilter(filter),
     target: toPlain(target),
     quantity,
   };
@@ -24,6 +25,10 @@ export function toRankingRequest(dto: RankingRequestDto): Required<RankingReques
 export function toOperatingConditions(dto: OperatingConditionsDto): OperatingConditions {
   const { lower, upper } = dto.band;
   return toPlain({ ...dto, referenceFrequency: dto.referenceFrequency ?? Math.sqrt(lower * upper) });
+}
+
+export function toPartFilter(dto: PartFilterDto): PartFilter {
+  return toPlain(dto);
 }
 
 /** As {@link toRankingRequest}, refused where its values contradict each other. */
