@@ -44,6 +44,12 @@ export interface StageConditions {
   feedbackResistance?: number;
   /** F, C_f of a transimpedance stage; "auto" = maximally flat for each amplifier */
   feedbackCapacitance?: number | 'auto';
+  /** V, direct voltage at the output, which drives the network's excess noise; left out = none */
+  outputVoltage?: number;
+  /** dB, noise index of R_g; left out = no excess noise */
+  gainNoiseIndex?: number;
+  /** dB, noise index of R_f; left out = no excess noise */
+  feedbackNoiseIndex?: number;
   /** Limits of the feedback network; below `minimumTotal` (Ω) it loads the output too much. */
   network?: { minimumTotal: number };
 }

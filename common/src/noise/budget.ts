@@ -32,7 +32,7 @@ export function outputPowers(integrals: Float64Array, generators: Generators): C
       current2 * shaped(INTEGRAL.currentFeedbackWhite, INTEGRAL.currentFeedbackFlicker, currentCorner),
     feedback: integrals[INTEGRAL.feedback],
     bias: integrals[INTEGRAL.bias],
-    excess: 0,
+    excess: integrals[INTEGRAL.excess],
   };
 }
 
@@ -47,6 +47,7 @@ export function addedPower(integrals: Float64Array, generators: Generators): num
   return (
     integrals[INTEGRAL.feedback] +
     integrals[INTEGRAL.bias] +
+    integrals[INTEGRAL.excess] +
     voltage2 * (integrals[INTEGRAL.voltageWhite] + voltageCorner * integrals[INTEGRAL.voltageFlicker]) +
     current2 *
       (integrals[INTEGRAL.currentSourceWhite] +
@@ -58,7 +59,12 @@ export function addedPower(integrals: Float64Array, generators: Generators): num
 
 /** The power at the output in V² that source and resistors make, whatever the amplifier's own noise. */
 export function fixedPower(integrals: Float64Array): number {
-  return integrals[INTEGRAL.source] + integrals[INTEGRAL.feedback] + integrals[INTEGRAL.bias];
+  return (
+    integrals[INTEGRAL.source] +
+    integrals[INTEGRAL.feedback] +
+    integrals[INTEGRAL.bias] +
+    integrals[INTEGRAL.excess]
+  );
 }
 
 /** Where the figures of an amplifier's four noise parameters come from. */

@@ -1,6 +1,7 @@
 import type { OperatingConditions } from '../../conditions/index.js';
 import { polynomialRoots, type Complex } from '../../numeric/index.js';
 import { INTEGRAL, quadraticQuality, type Evaluate, type StageModel } from './model.js';
+import { networkExcess, type NetworkExcess } from './networkExcess.js';
 import type { Nodes } from './nodes.js';
 
 interface Circuit {
@@ -10,6 +11,7 @@ interface Circuit {
   gainResistance: number;
   biasResistance: number;
   feedbackResistance: number;
+  excess: NetworkExcess;
 }
 
 /**
@@ -20,11 +22,14 @@ interface Circuit {
 export function invertingModel({ source, stage }: OperatingConditions): StageModel {
   const gainResistance = stage.gainResistance ?? 0;
   const gain = stage.gain ?? 1;
+  const feedbackResistance = gain * (source.resistance + gainResistance);
+  const current = (stage.outputVoltage ?? 0) / feedbackResistance;
   const circuit: Circuit = {
     ...source,
     gainResistance,
     biasResistance: stage.biasResistance ?? 0,
-    feedbackResistance: gain * (source.resistance + gainResistance),
+    feedbackResistance,
+    excess: networkExcess(stage, current, gainResistance, feedbackResistance),
   };
   const noiseGain = (frequency: number, inputCapacitance: number) => {
     const { re, im } = networkGain(circuit, 2 * Math.PI * frequency);
@@ -102,17 +107,19 @@ function quality(circuit: Circuit, gainBandwidth: number, inputCapacitance: numb
 }
 
 function compile(nodes: Nodes, circuit: Circuit): Evaluate {
-  const { gainResistance, biasResistance, feedbackResistance } = circuit;
+  const { gainResistance, biasResistance, feedbackResistance, excess } = circuit;
   const { count, angular, frequency, white, flicker, sourcePower, ambientPower } = nodes;
   const real = new Float64Array(count);
   const imaginary = new Float64Array(count);
   const sourceWeight = new Float64Array(count);
   const gainWeight = new Float64Array(count);
+  const excessWeight = new Float64Array(count);
   for (let k = 0; k < count; k++) {
     const { re, im, ratio2, divider2 } = networkGain(circuit, angular[k]);
     real[k] = re;
     imaginary[k] = im;
     sourceWeight[k] = white[k] * sourcePower[k] * ratio2;
+    excessWeight[k] = flicker[k] * (excess.feedback + excess.gain * ratio2 * divider2);
     gainWeight[k] = white[k] * ambientPower[k] * (feedbackResistance + gainResistance * ratio2 * divider2);
   }
   return (gainBandwidth, inputCapacitance, out) => {
@@ -124,6 +131,7 @@ function compile(nodes: Nodes, circuit: Circuit): Evaluate {
     let loopFlicker = 0;
     let feedback = 0;
     let bias = 0;
+    let excessPower = 0;
     for (let k = 0; k < count; k++) {
       const re = real[k];
       const im = imaginary[k] + angular[k] * delay;
@@ -135,6 +143,7 @@ function compile(nodes: Nodes, circuit: Circuit): Evaluate {
       const w = white[k];
       source += sourceWeight[k] * loop;
       feedback += gainWeight[k] * loop;
+      excessPower += excessWeight[k] * loop;
       voltageWhite += w * voltage;
       voltageFlicker += flicker[k] * voltage;
       loopWhite += w * loop;
@@ -152,5 +161,6 @@ function compile(nodes: Nodes, circuit: Circuit): Evaluate {
     out[INTEGRAL.currentFeedbackFlicker] = feedback2 * loopFlicker;
     out[INTEGRAL.feedback] = feedback;
     out[INTEGRAL.bias] = biasResistance * bias;
+    out[INTEGRAL.excess] = excessPower;
   };
 }

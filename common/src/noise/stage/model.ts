@@ -18,9 +18,11 @@ export const INTEGRAL = {
   feedback: 7,
   /** thermal noise of load or bias resistor, V² */
   bias: 8,
+  /** excess noise of the feedback network, V² */
+  excess: 9,
 } as const;
 
-export const INTEGRALS = 9;
+export const INTEGRALS = 10;
 
 /** Sums a stage's integrals over nodes for one amplifier: `out` receives INTEGRALS numbers. */
 export type Evaluate = (gainBandwidth: number, inputCapacitance: number, out: Float64Array) => void;

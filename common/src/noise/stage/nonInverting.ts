@@ -1,6 +1,7 @@
-import type { OperatingConditions } from '../../conditions/index.js';
+import type { OperatingConditions, StageConditions } from '../../conditions/index.js';
 import { polynomialRoots } from '../../numeric/index.js';
 import { INTEGRAL, quadraticQuality, type Evaluate, type StageModel } from './model.js';
+import { networkExcess } from './networkExcess.js';
 import type { Nodes } from './nodes.js';
 
 /**
@@ -24,7 +25,13 @@ export function nonInvertingModel({ source, stage }: OperatingConditions): Stage
   };
   return {
     compile: (nodes) =>
-      compile(nodes, { ...source, gain, loadConductance, parallel: gainResistance * (1 - 1 / gain) }),
+      compile(nodes, {
+        ...source,
+        gain,
+        loadConductance,
+        parallel: gainResistance * (1 - 1 / gain),
+        excess: excessAtOutput(stage, gain, gainResistance),
+      }),
     noiseGain: () => gain,
     crossoverNoiseGain: () => gain,
     poles: (gainBandwidth, inputCapacitance) => [
@@ -49,10 +56,25 @@ interface Circuit {
   loadConductance: number;
   /** R_f ∥ R_g */
   parallel: number;
+  /** squared excess noise of the network at the output at 1 Hz, V²/Hz */
+  excess: number;
+}
+
+/** The noise of R_f counts once, that of R_g R_f/R_g times; the direct output voltage drives both. */
+function excessAtOutput(stage: StageConditions, gain: number, gainResistance: number): number {
+  if (gainResistance === 0) return 0;
+  const current = (stage.outputVoltage ?? 0) / (gainResistance * gain);
+  const { gain: ofGain, feedback } = networkExcess(
+    stage,
+    current,
+    gainResistance,
+    gainResistance * (gain - 1),
+  );
+  return feedback + ofGain * (gain - 1) ** 2;
 }
 
 function compile(nodes: Nodes, circuit: Circuit): Evaluate {
-  const { resistance, inductance, gain, loadConductance, parallel } = circuit;
+  const { resistance, inductance, gain, loadConductance, parallel, excess } = circuit;
   const { count, white, flicker, sourcePower, ambientPower } = nodes;
   const real = new Float64Array(count);
   const imaginary = new Float64Array(count);
@@ -106,5 +128,6 @@ function compile(nodes: Nodes, circuit: Circuit): Evaluate {
     out[INTEGRAL.currentFeedbackFlicker] = parallel2 * voltageFlicker;
     out[INTEGRAL.feedback] = gain2 * parallel * feedback;
     out[INTEGRAL.bias] = gain2 * loadConductance * bias;
+    out[INTEGRAL.excess] = excess * voltageFlicker;
   };
 }

@@ -1,6 +1,7 @@
 import type { OperatingConditions } from '../../conditions/index.js';
 import { polynomialRoots } from '../../numeric/index.js';
 import { INTEGRAL, quadraticQuality, type Evaluate, type StageModel } from './model.js';
+import { networkExcess } from './networkExcess.js';
 import type { Nodes } from './nodes.js';
 
 interface Circuit {
@@ -8,6 +9,8 @@ interface Circuit {
   sourceCapacitance: number;
   feedbackConductance: number;
   feedbackCapacitance: number | 'auto';
+  /** squared excess noise of R_f at 1 Hz as a current, A²/Hz */
+  excess: number;
 }
 
 /**
@@ -18,11 +21,13 @@ interface Circuit {
  */
 export function transimpedanceModel({ source, stage }: OperatingConditions): StageModel {
   const feedbackResistance = stage.feedbackResistance ?? 1;
+  const current = (stage.outputVoltage ?? 0) / feedbackResistance;
   const circuit: Circuit = {
     sourceConductance: 1 / source.resistance,
     sourceCapacitance: source.capacitance,
     feedbackConductance: 1 / feedbackResistance,
     feedbackCapacitance: stage.feedbackCapacitance ?? 0,
+    excess: networkExcess(stage, current, 0, feedbackResistance).feedback / feedbackResistance ** 2,
   };
   return {
     compile: (nodes) => compile(nodes, circuit),
@@ -145,5 +150,6 @@ function compile(nodes: Nodes, circuit: Circuit): Evaluate {
     out[INTEGRAL.currentFeedbackFlicker] = currentFlicker;
     out[INTEGRAL.feedback] = feedbackConductance * thermal;
     out[INTEGRAL.bias] = 0;
+    out[INTEGRAL.excess] = circuit.excess * currentFlicker;
   };
 }
