@@ -13,3 +13,4 @@ export * from './resistor/index.js';
 export * from './shot.js';
 export { flatFeedbackCapacitance } from './stage/transimpedance.js';
 export * from './thermal.js';
+export * from './wholeStages/index.js';

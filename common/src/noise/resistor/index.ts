@@ -1,4 +1,3 @@
 export * from './rankResistors.js';
 export * from './resistorCautions.js';
-export * from './resistorConditions.js';
 export * from './resistorNoise.js';

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { BOLTZMANN } from '../constants.js';
 import { rankResistors, type LibraryResistor, type ResistorQuery } from './rankResistors.js';
-import type { ResistorConditions } from './resistorConditions.js';
+import type { ResistorConditions } from '../../conditions/index.js';
 import { resistorNoise } from './resistorNoise.js';
 
 const conditions: ResistorConditions = {

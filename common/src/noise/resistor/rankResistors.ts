@@ -8,7 +8,7 @@ import {
   type Resistor,
 } from '../../parts/index.js';
 import { formatQuantity } from '../../units/index.js';
-import type { ResistorConditions, ResistorFilter } from './resistorConditions.js';
+import type { ResistorConditions, ResistorFilter } from '../../conditions/index.js';
 import { ohmNoise, resistorNoise, type ResistorFigures } from './resistorNoise.js';
 
 /** A resistor as the ranking takes it. */
@@ -122,7 +122,8 @@ function exclusion(
   const { lifecycle, approval, technology, powerRating, resistance } = resistor;
   if (filter.lifecycle?.length && !filter.lifecycle.includes(lifecycle)) return 'lifecycle';
   if (filter.approval?.length && !filter.approval.includes(approval)) return 'approval';
-  if (filter.technology?.length && !filter.technology.includes(technology ?? '')) return 'technology';
+  if (filter.technology?.length && (!technology || !filter.technology.includes(technology)))
+    return 'technology';
   const packageName = filter.package?.trim().toLowerCase() ?? '';
   if (!resistor.package.toLowerCase().includes(packageName)) return 'package';
   return powerRating !== null && dcVoltage ** 2 / resistance > powerRating ? 'over-rating' : null;

@@ -1,5 +1,5 @@
 import type { Resistor } from '../../parts/index.js';
-import type { ResistorConditions } from './resistorConditions.js';
+import type { ResistorConditions } from '../../conditions/index.js';
 
 /** What makes a resistor's figures less certain than they look, or its place one to think about. */
 export const RESISTOR_CAUTIONS = [

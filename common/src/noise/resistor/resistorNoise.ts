@@ -1,9 +1,8 @@
-import type { OperatingConditions } from '../../conditions/index.js';
+import type { BandConditions, ResistorConditions } from '../../conditions/index.js';
 import type { Resistor } from '../../parts/index.js';
 import { flickerNoiseBandwidth } from '../band.js';
 import { sourceFloor } from '../evaluateStage.js';
 import { excessNoiseRms } from '../excess.js';
-import type { ResistorConditions } from './resistorConditions.js';
 import { resistorCautions, type ResistorCaution } from './resistorCautions.js';
 
 /** The noise of one resistor at its place. */
@@ -27,7 +26,7 @@ export interface ResistorFigures {
 export type OhmNoise = (temperature: number) => number;
 
 /** The noise of one ohm over a band, with Planck's factor where it matters. */
-export function ohmNoise(band: OperatingConditions['band']): OhmNoise {
+export function ohmNoise(band: BandConditions): OhmNoise {
   return (temperature) =>
     sourceFloor({
       source: { resistance: 1, inductance: 0, capacitance: 0 },

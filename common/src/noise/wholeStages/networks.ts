@@ -1,0 +1,138 @@
+import type { Network, NetworkResistor, SoughtConditions } from './stageSearch.js';
+
+/** All networks that the library's resistors make, in ascending order of the gain resistance. */
+export interface Networks {
+  all: Network[];
+  /** how many pairs of library resistors they stand for, those of equal values counted each */
+  pairs: number;
+  /** the gain nearest to the wanted one within the limits, also where it misses the tolerance; null = none at all */
+  nearestGain: number | null;
+}
+
+interface Value {
+  resistance: number;
+  resistor: number;
+  noiseIndex?: number;
+  /** how many usable resistors have the value */
+  count: number;
+}
+
+/** Decimal values: a gain of 101 lies within 1 % of 100 whatever the rounding of its double. */
+const ROUNDING = 1e-12;
+
+/**
+ * The networks that give the wanted gain within its tolerance and keep the limits of their total: R_g and
+ * R_f of a non-inverting or inverting stage, R_f alone of a transimpedance stage, none of a follower. Of
+ * resistors with equal values only the one with the least excess noise counts; where a direct output voltage
+ * drives excess noise, resistors of unknown noise index don't count.
+ */
+export function findNetworks(conditions: SoughtConditions, resistors: readonly NetworkResistor[]): Networks {
+  const { stage } = conditions;
+  if (stage.topology === 'non-inverting' && stage.gain === 1)
+    return { all: [FOLLOWER], pairs: 1, nearestGain: 1 };
+  const values = distinctValues(resistors, (stage.outputVoltage ?? 0) !== 0);
+  return stage.topology === 'transimpedance' ? findSingle(conditions, values) : findPairs(conditions, values);
+}
+
+const FOLLOWER: Network = {
+  gain: 1,
+  gainResistor: null,
+  feedbackResistor: null,
+  gainResistance: 0,
+  feedbackResistance: 0,
+};
+
+function distinctValues(resistors: readonly NetworkResistor[], hasExcess: boolean): Value[] {
+  const quietest = new Map<number, Value>();
+  resistors.forEach(({ resistance, noiseIndex }, resistor) => {
+    if (hasExcess && noiseIndex === null) return;
+    const known = quietest.get(resistance);
+    const count = (known?.count ?? 0) + 1;
+    const isQuieter = known === undefined || (hasExcess && noiseIndex! < known.noiseIndex!);
+    const value = { resistance, resistor, ...(hasExcess && { noiseIndex: noiseIndex! }) };
+    quietest.set(resistance, { ...(isQuieter ? value : known), count });
+  });
+  return [...quietest.values()].sort((a, b) => a.resistance - b.resistance);
+}
+
+function findSingle({ stage }: SoughtConditions, values: readonly Value[]): Networks {
+  const wanted = stage.feedbackResistance!;
+  const networks = values
+    .filter(({ resistance }) => isWithin(resistance, stage.network))
+    .map((feedback) => ({ network: toNetwork(feedback.resistance, null, feedback), count: feedback.count }));
+  const chosen = networks.filter(
+    ({ network }) => Math.abs(network.gain / wanted - 1) <= stage.gainTolerance + ROUNDING,
+  );
+  return {
+    all: chosen.map(({ network }) => network),
+    pairs: chosen.reduce((sum, { count }) => sum + count, 0),
+    nearestGain: networks.reduce<number | null>(
+      (best, { network }) => nearer(best, network.gain, wanted),
+      null,
+    ),
+  };
+}
+
+function isWithin(
+  total: number,
+  { minimumTotal, maximumTotal }: { minimumTotal: number; maximumTotal: number },
+) {
+  return total >= minimumTotal && total <= maximumTotal;
+}
+
+function nearer(best: number | null, gain: number, wanted: number): number {
+  return best === null || Math.abs(gain - wanted) < Math.abs(best - wanted) ? gain : best;
+}
+
+function findPairs({ stage, source }: SoughtConditions, values: readonly Value[]): Networks {
+  const wanted = stage.gain!;
+  const isInverting = stage.topology === 'inverting';
+  const all: Network[] = [];
+  let pairs = 0;
+  let nearestGain: number | null = null;
+  const spread = wanted * (stage.gainTolerance + ROUNDING);
+  for (const gainValue of values) {
+    const series = isInverting ? source.resistance + gainValue.resistance : gainValue.resistance;
+    const gainWith = (feedback: number) => (isInverting ? feedback / series : 1 + feedback / series);
+    const feedbackFor = (gain: number) => (isInverting ? gain : gain - 1) * series;
+    const least = feedbackFor(wanted - spread);
+    const from = firstAtLeast(values, least);
+    for (let i = Math.max(0, from - 1); i < values.length; i++) {
+      const feedback = values[i];
+      const gain = gainWith(feedback.resistance);
+      const total = feedback.resistance + (isInverting ? 0 : gainValue.resistance);
+      if (isWithin(total, stage.network)) {
+        nearestGain = nearer(nearestGain, gain, wanted);
+        if (Math.abs(gain - wanted) <= spread) {
+          all.push(toNetwork(gain, gainValue, feedback));
+          pairs += gainValue.count * feedback.count;
+        }
+      }
+      if (gain > wanted + spread) break;
+    }
+  }
+  return { all, pairs, nearestGain };
+}
+
+function firstAtLeast(values: readonly Value[], least: number): number {
+  let low = 0;
+  let high = values.length;
+  while (low < high) {
+    const middle = (low + high) >> 1;
+    if (values[middle].resistance < least) low = middle + 1;
+    else high = middle;
+  }
+  return low;
+}
+
+function toNetwork(gain: number, gainValue: Value | null, feedback: Value): Network {
+  return {
+    gain,
+    gainResistor: gainValue?.resistor ?? null,
+    feedbackResistor: feedback.resistor,
+    gainResistance: gainValue?.resistance ?? 0,
+    feedbackResistance: feedback.resistance,
+    gainNoiseIndex: gainValue?.noiseIndex,
+    feedbackNoiseIndex: feedback.noiseIndex,
+  };
+}

@@ -1,0 +1,71 @@
+import type { OperatingConditions, PartFilter, StageConditions } from '../../conditions/index.js';
+
+/** What the network of a whole stage must keep. */
+export interface NetworkLimits {
+  /** Ω, what the output can drive */
+  minimumTotal: number;
+  /** Ω, what noise and leakage allow */
+  maximumTotal: number;
+}
+
+/** The stage that is sought: the network's resistors are what is to be found. */
+export interface SoughtStage extends Omit<
+  StageConditions,
+  'gainResistance' | 'gainNoiseIndex' | 'feedbackNoiseIndex' | 'network'
+> {
+  /** how far the gain (feedback resistance of a transimpedance stage) may lie from the wanted one; 0.01 = 1 % */
+  gainTolerance: number;
+  network: NetworkLimits;
+  /** at most so many identical channels of one package in parallel, 1 to 8 */
+  parallelMaximum: number;
+}
+
+export interface SoughtConditions extends Omit<OperatingConditions, 'stage'> {
+  stage: SoughtStage;
+}
+
+export interface StageSearch {
+  conditions: SoughtConditions;
+  filter: PartFilter;
+  limit: number;
+  offset: number;
+}
+
+/** A resistor of the library as a network's part. */
+export interface NetworkResistor {
+  /** Ω */
+  resistance: number;
+  /** dB; null = unknown */
+  noiseIndex: number | null;
+}
+
+/** Two resistors of the library, by their places in the list that was given, that give the gain. */
+export interface Network {
+  /** V/V as the two values give it; V/A in a transimpedance stage */
+  gain: number;
+  /** null in a transimpedance stage and in a follower */
+  gainResistor: number | null;
+  /** null in a follower */
+  feedbackResistor: number | null;
+  /** Ω; 0 where there is none */
+  gainResistance: number;
+  /** Ω; 0 where there is none */
+  feedbackResistance: number;
+  gainNoiseIndex?: number;
+  feedbackNoiseIndex?: number;
+}
+
+/** The operating conditions of a sought stage with one network. */
+export function withNetwork({ stage, ...rest }: SoughtConditions, network: Network): OperatingConditions {
+  const { gainTolerance: _, parallelMaximum: __, network: limits, ...wanted } = stage;
+  const { gain, gainResistance, feedbackResistance, gainNoiseIndex, feedbackNoiseIndex } = network;
+  const values =
+    stage.topology === 'transimpedance'
+      ? { feedbackResistance }
+      : { gain, ...(gain !== 1 && { gainResistance }) };
+  const { minimumTotal } = limits;
+  return {
+    ...rest,
+    stage: { ...wanted, ...values, gainNoiseIndex, feedbackNoiseIndex, network: { minimumTotal } },
+  };
+}
