@@ -1,9 +1,9 @@
 import { setTimeout as delay } from 'node:timers/promises';
 import { inRoot } from './paths.mjs';
 import { portTrouble } from './ports.mjs';
-import { commandLine, endProcess, launch, run } from './processes.mjs';
-import { forget, ownerIsAlive, recall, recallAll, remember } from './records.mjs';
-import { StepError, say, step } from './steps.mjs';
+import { endProcess, launch, run } from './processes.mjs';
+import { forget, ownerIsAlive, recall, remember } from './records.mjs';
+import { StepError, step } from './steps.mjs';
 import { whenEnding } from './supervision.mjs';
 
 const MAIN = inRoot('backend', 'dist', 'main.js');
@@ -37,23 +37,11 @@ function whyTaken(port, trouble) {
   return 'is taken by another program';
 }
 
-/** Ends the servers that killed scripts of this checkout left behind; they would hold the port. */
-export async function endOrphans() {
-  const orphans = recallAll('application-').filter((record) => !ownerIsAlive(record));
-  for (const { name, pid } of orphans) {
-    if (commandLine(pid).includes(MAIN)) {
-      await endProcess(pid);
-      say(`Server: ended process ${pid}, left by a killed script`);
-    }
-    forget(name);
-  }
-}
-
 export function prepareDatabase(environment) {
   return step('Database', async (note) => {
     note(`preparing ${environment.DB_NAME ?? 'the database'}`);
     const output = await run(process.execPath, [PREPARE], { cwd: inRoot(), env: environment });
-    return output.trim().split('\n').at(-1) || 'ready';
+    return output.trim().split('\n').join('; ') || 'ready';
   });
 }
 
@@ -62,7 +50,7 @@ export async function serve(address, environment) {
   const env = { ...environment, HOST: address.host, PORT: String(address.port) };
   const { child, ended } = launch(process.execPath, [MAIN], { cwd: inRoot(), env });
   const record = `application-${address.port}`;
-  remember(record, { pid: child.pid });
+  remember(record, { pid: child.pid, mark: MAIN });
   whenEnding(async () => {
     if (child.pid) await endProcess(child.pid);
     forget(record);

@@ -1,19 +1,8 @@
-import {
-  closeSync,
-  existsSync,
-  mkdirSync,
-  mkdtempSync,
-  openSync,
-  readFileSync,
-  renameSync,
-  rmSync,
-  symlinkSync,
-} from 'node:fs';
-import { tmpdir } from 'node:os';
-import { join } from 'node:path';
+import { closeSync, existsSync, openSync, readFileSync } from 'node:fs';
 import { setTimeout as delay } from 'node:timers/promises';
 import { readCredentials } from './credentials.mjs';
 import { findProgram, installPackages } from './debian.mjs';
+import { makeDataDirectory } from './mariadb-data.mjs';
 import { serverPlace } from './mariadb-place.mjs';
 import { freePort } from './ports.mjs';
 import { commandLine, endProcess, launch, run } from './processes.mjs';
@@ -127,35 +116,6 @@ function serverArguments({ data, socket, pidFile, user }, port, options) {
     '--local-infile=0',
     ...options,
   ];
-}
-
-/** Made beside its place and moved there when whole, so that an interrupted making leaves nothing half done. */
-async function makeDataDirectory({ data, user }, note) {
-  note('making the data directory');
-  const half = `${data}.new`;
-  rmSync(half, { recursive: true, force: true });
-  mkdirSync(half, { mode: 0o700 });
-  await throughLink(half, (link) =>
-    run(findProgram('mariadb-install-db'), [
-      '--no-defaults',
-      `--datadir=${link}`,
-      `--user=${user}`,
-      '--auth-root-authentication-method=socket',
-      '--skip-test-db',
-    ]),
-  );
-  renameSync(half, data);
-}
-
-/** mariadb-install-db can't take a path with spaces: it is given a link without any. */
-async function throughLink(directory, action) {
-  const place = mkdtempSync(join(tmpdir(), 'roothertz-'));
-  try {
-    symlinkSync(directory, join(place, 'data'));
-    await action(join(place, 'data'));
-  } finally {
-    rmSync(place, { recursive: true, force: true });
-  }
 }
 
 async function untilReady(place, mayBecomeReady) {

@@ -60,12 +60,8 @@ export function launch(command, args, options = {}) {
   return { child, ended };
 }
 
-/** Runs a command to its end with its output on the terminal; answers the exit code. */
-export async function runVisibly(command, args, options) {
-  return (await runToEnd(launch(command, args, options))).code;
-}
-
-async function runToEnd({ child, ended }, ending = { group: true }) {
+/** Waits for a launched process, and ends it when the script ends first. */
+export async function runToEnd({ child, ended }, ending = { group: true }) {
   const forget = whenEnding(() => child.pid && endProcess(child.pid, ending));
   const end = await ended;
   refuseWhenEnding();

@@ -19,10 +19,10 @@ export function recall(name) {
   return readJson(inLocal('running', `${name}.json`));
 }
 
-export function recallAll(prefix) {
+export function recallAll() {
   mkdirSync(inLocal('running'), { recursive: true });
   return readdirSync(inLocal('running'))
-    .filter((file) => file.startsWith(prefix) && file.endsWith('.json'))
+    .filter((file) => file.endsWith('.json'))
     .map((file) => file.slice(0, -'.json'.length))
     .map((name) => ({ name, ...recall(name) }));
 }
@@ -30,7 +30,10 @@ export function recallAll(prefix) {
 /** Process numbers are used again, so a number alone proves nothing: the owner must be a script of this checkout. */
 export function ownerIsAlive({ owner } = {}) {
   if (!owner || owner === process.pid) return false;
-  return commandLine(owner).includes('backend/scripts/') && workingDirectory(owner) === ROOT;
+  const command = commandLine(owner);
+  return (
+    /\b(start|test|bench)\.mjs\b/.test(command) && `${workingDirectory(owner)} ${command}`.includes(ROOT)
+  );
 }
 
 export function writePrivately(path, value) {

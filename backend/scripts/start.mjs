@@ -1,7 +1,8 @@
-import { endOrphans, prepareDatabase, readAddress, refuseTakenPort, serve } from './application.mjs';
+import { prepareDatabase, readAddress, refuseTakenPort, serve } from './application.mjs';
 import { buildStale } from './builds.mjs';
 import { readCredentials } from './credentials.mjs';
 import { createDatabase, ensureMariadbInstalled, startMariadb } from './mariadb.mjs';
+import { endOrphans } from './orphans.mjs';
 import { ensurePackages, refuseOldNode } from './packages.mjs';
 import { say } from './steps.mjs';
 import { expectStop, refuseWhenEnding, supervise } from './supervision.mjs';

@@ -4,8 +4,8 @@ import { buildStale } from './builds.mjs';
 import { createDatabase } from './mariadb.mjs';
 import { inLocal, inRoot } from './paths.mjs';
 import { freePort } from './ports.mjs';
-import { runVisibly } from './processes.mjs';
-import { readJson } from './records.mjs';
+import { launch, runToEnd } from './processes.mjs';
+import { forget, readJson, remember } from './records.mjs';
 import { countResults } from './results.mjs';
 
 const PREFERRED_E2E_PORT = 33_320;
@@ -45,6 +45,9 @@ async function runReporting(name, command, folder, env) {
   mkdirSync(inLocal('results'), { recursive: true });
   const report = inLocal('results', `${name}.json`);
   rmSync(report, { force: true });
-  const code = await runVisibly('npx', ['--no', '--', ...command(report)], { cwd: inRoot(folder), env });
+  const runner = launch('npx', ['--no', '--', ...command(report)], { cwd: inRoot(folder), env });
+  remember(`runner-${name}`, { pid: runner.child.pid, mark: report });
+  const { code } = await runToEnd(runner);
+  forget(`runner-${name}`);
   return countResults(readJson(report), code);
 }

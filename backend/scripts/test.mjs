@@ -1,8 +1,8 @@
 import { randomBytes } from 'node:crypto';
-import { endOrphans } from './application.mjs';
 import { buildStale } from './builds.mjs';
 import { ensureChromium } from './chromium.mjs';
 import { ensureMariadbInstalled, startMariadb } from './mariadb.mjs';
+import { endOrphans } from './orphans.mjs';
 import { ensurePackages, refuseOldNode } from './packages.mjs';
 import { addUp, closingLine } from './results.mjs';
 import { StepError, say } from './steps.mjs';

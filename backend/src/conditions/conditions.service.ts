@@ -64,17 +64,21 @@ export class ConditionsService {
     });
   }
 
-  update(caller: Caller, id: string, dto: UpdateConditionsDto): Promise<ConditionsResponseDto> {
+  update(
+    caller: Caller,
+    id: string,
+    { version, ...changes }: UpdateConditionsDto,
+  ): Promise<ConditionsResponseDto> {
     return this.change(caller, async (manager) => {
-      const saved = await findChangeable(manager, caller, id, dto.version);
-      const { name = saved.name, version: _, ...changed } = dto;
+      const saved = await findChangeable(manager, caller, id, version);
+      const { name = saved.name, ...request } = changes;
       await manager.update(
         SavedConditions,
         { id: saved.id },
         {
           name,
           nameKey: nameKey(name),
-          ...checkedRankingRequest({ ...saved, ...changed }),
+          ...checkedRankingRequest({ ...saved, ...request }),
           version: saved.version + 1,
           updatedAt: new Date(),
           updatedById: caller.userId,

@@ -1,6 +1,7 @@
+import { randomBytes } from 'node:crypto';
 import { plainToInstance } from 'class-transformer';
 import { validateSync } from 'class-validator';
-import { AppConfig, DEVELOPMENT_SECRET } from './app-config.js';
+import { AppConfig } from './app-config.js';
 
 const NAMES = [
   'NODE_ENV',
@@ -24,7 +25,7 @@ const NAMES = [
 export function readConfig(environment: NodeJS.ProcessEnv = process.env): AppConfig {
   const given = NAMES.filter((name) => environment[name]).map((name) => [name, environment[name]]);
   const config = plainToInstance(AppConfig, Object.fromEntries(given));
-  if (!config.isProduction) config.JWT_SECRET ??= DEVELOPMENT_SECRET;
+  if (!config.isProduction) config.JWT_SECRET ??= randomBytes(32).toString('base64url');
   const wrong = validateSync(config).map(({ property, constraints }) => {
     return `${property} (${Object.values(constraints ?? {})
       .map(withoutValue)

@@ -13,7 +13,6 @@ export const ERROR_CODES = {
   'request.unknown-path': { status: 404, title: 'Nothing at this address' },
   'part.not-found': { status: 404, title: 'Part not found' },
   'conditions.not-found': { status: 404, title: 'Conditions not found' },
-  'request.method-not-allowed': { status: 405, title: 'Method not allowed' },
   'part.stale': { status: 409, title: 'Part changed meanwhile' },
   'part.duplicate': { status: 409, title: 'Part exists already' },
   'conditions.stale': { status: 409, title: 'Conditions changed meanwhile' },

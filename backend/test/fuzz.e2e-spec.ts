@@ -1,0 +1,71 @@
+import type { OpenAPIObject } from '@nestjs/swagger';
+import fc from 'fast-check';
+import { createOpenApiDocument } from '../src/openapi/document.js';
+import { hostileValue, toRequestText } from './fuzz/hostile.js';
+import { mutated } from './fuzz/mutated.js';
+import { SAMPLES } from './fuzz/samples.js';
+import { createTeam, signInMember, startTestApp, type TestApp, type TestMember } from './support/index.js';
+import { type DocumentedOperation, operationsOf } from './support/operations.js';
+
+const BODIES_PER_OPERATION = 60;
+const IDS = ['1', '1', '1', '2', '0', '-1', 'x', '1e999', '99999999999999999999', '%00', '%27%20OR%201=1'];
+
+describe('whatever is sent', () => {
+  let app: TestApp;
+  let member: TestMember;
+  let operations: DocumentedOperation[];
+
+  beforeAll(async () => {
+    app = await startTestApp();
+    member = await signInMember(app, await createTeam(app), ['admin', 'librarian', 'engineer']);
+    const document: OpenAPIObject = createOpenApiDocument(app.nest);
+    operations = operationsOf(document).filter(({ method }) => ['post', 'put', 'patch'].includes(method));
+  });
+  afterAll(() => app.close());
+
+  it('has a sample for every operation that takes a body', () => {
+    expect(Object.keys(SAMPLES).sort()).toEqual(operations.map(nameOf).sort());
+  });
+
+  it('takes every sample as it stands but the guessed password', async () => {
+    for (const operation of operations)
+      for (const sample of SAMPLES[nameOf(operation)]) {
+        const status = await send(operation, sample, '1');
+        expect([nameOf(operation), status < 300]).toEqual([
+          nameOf(operation),
+          !/sign-in/.test(operation.path),
+        ]);
+      }
+  });
+
+  it('never makes the server fail, and is refused with problem details', async () => {
+    for (const operation of operations) await fuzz(operation);
+  }, 120_000);
+
+  async function fuzz(operation: DocumentedOperation): Promise<void> {
+    const body = fc.oneof(
+      { weight: 5, arbitrary: fc.constantFrom(...SAMPLES[nameOf(operation)]).chain(mutated) },
+      { weight: 1, arbitrary: hostileValue },
+    );
+    const property = fc.asyncProperty(body, fc.constantFrom(...IDS), async (value, id) => {
+      expect(await send(operation, value, id)).toBeLessThan(500);
+    });
+    await fc.assert(property, { numRuns: BODIES_PER_OPERATION });
+  }
+
+  async function send({ method, path }: DocumentedOperation, body: unknown, id: string): Promise<number> {
+    const { status, headers, text } = await member.agent[method](path.replace('{id}', id))
+      .set('Content-Type', 'application/json')
+      .send(toRequestText(body));
+    if (status >= 400) {
+      expect(headers['content-type']).toMatch(/^application\/problem\+json/);
+      expect(JSON.parse(text)).toMatchObject({ status, code: expect.any(String) });
+      expect(text).not.toMatch(/node_modules|\.ts:\d|SELECT |INSERT |UPDATE /);
+    }
+    return status;
+  }
+});
+
+function nameOf({ method, path }: DocumentedOperation): string {
+  return `${method} ${path}`;
+}

@@ -1,0 +1,51 @@
+const conditions = {
+  source: { resistance: 600, inductance: 0.1, capacitance: 1e-10, temperature: 298.15 },
+  ambientTemperature: 298.15,
+  band: { lower: 20, upper: 20_000, lowPassOrder: 2 },
+  stage: { topology: 'non-inverting', gain: 100, gainResistance: 10, network: { minimumTotal: 500 } },
+  referenceFrequency: 1_000,
+  bandwidthMargin: 3,
+  amplifierTemperatureModel: 'estimated',
+};
+
+const currentSource = {
+  ...conditions,
+  source: { resistance: 5e8, inductance: 0, capacitance: 5e-11, directCurrent: 1e-9 },
+  stage: { topology: 'transimpedance', feedbackResistance: 1e6, feedbackCapacitance: 'auto' },
+};
+
+const amplifier = { inputType: 'jfet', voltageNoise: 3e-9, currentNoise: 1e-15, gainBandwidth: 1e7 };
+const opAmp = { manufacturer: 'Alderney Analogue', partNumber: 'AA101', package: 'SOIC-8', amplifier };
+
+const filter = {
+  search: 'a',
+  library: ['curated', 'team'],
+  lifecycle: ['active'],
+  supply: { minimum: 5, maximum: 12 },
+};
+const request = { conditions, filter, target: { inputNoiseRms: 5e-7 }, quantity: 100 };
+const page = { sort: '-inputNoiseRms', limit: 10, offset: 0 };
+
+/** A body that each operation takes, from which the hostile ones are made. */
+export const SAMPLES: Record<string, unknown[]> = {
+  'post /api/auth/sign-in': [{ email: 'person@weir.example', password: 'a guess' }],
+  'post /api/auth/sign-out': [{}],
+  'post /api/conditions': [{ name: 'River geophone', ...request }],
+  'patch /api/conditions/{id}': [{ version: 1, name: 'Turbidity', ...request }],
+  'post /api/op-amps': [opAmp],
+  'patch /api/op-amps/{id}': [{ version: 1, partNumber: 'AA102', amplifier: { voltageNoise: 2e-9 } }],
+  'post /api/rankings/op-amps': [{ ...request, ...page }, { conditions: currentSource }],
+  'post /api/rankings/op-amps/exclusions': [{ ...request, limit: 10 }],
+  'post /api/rankings/quietest-map': [
+    {
+      conditions,
+      filter,
+      resistance: { from: 1, to: 1e6, steps: 4 },
+      frequency: { from: 1, to: 1e5, steps: 3 },
+    },
+  ],
+  'post /api/noise/stage': [
+    { conditions, amplifier },
+    { conditions: currentSource, amplifier },
+  ],
+};
