@@ -69,11 +69,11 @@ function cornerOf(members: readonly Network[], gain: number, gainResistance: num
 
 /**
  * Along the logarithms of its resistances the noise is a smooth function: over a step h it may dip below both
- * ends by some h²/8 times its curvature, for which h² leaves ample room.
+ * ends by some h²/8 times its curvature, for which h²/2 leaves room.
  */
 function dipWithin(resistanceRatio: number, gainRatio: number): number {
   const step = Math.log(resistanceRatio || 1) + Math.log(gainRatio);
-  return Number.isFinite(step) ? Math.max(0, 1 - step * step) : 0;
+  return Number.isFinite(step) ? Math.max(0, 1 - (step * step) / 2) : 0;
 }
 
 function ends(values: readonly number[]): [number, number] {

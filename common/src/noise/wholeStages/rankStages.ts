@@ -12,6 +12,7 @@ import { stageAmplifier } from '../stageAmplifier.js';
 import { Blocks, type Block } from './blocks.js';
 import { findNetworks } from './networks.js';
 import {
+  nominalNetwork,
   withNetwork,
   type Network,
   type NetworkResistor,
@@ -80,17 +81,6 @@ export function rankStages(
       .map((stage, n) => toRanked(search, stage, search.offset + n + 1)),
     evaluations: { made: found.evaluations, exhaustive: pairs * candidates.length },
   };
-}
-
-/** A network that gives just the wanted gain, for what doesn't depend on its values. */
-function nominalNetwork({ stage, source }: SoughtConditions): Network {
-  const gain = stage.topology === 'transimpedance' ? stage.feedbackResistance! : stage.gain!;
-  const { minimumTotal } = stage.network;
-  const gainResistance =
-    stage.topology === 'inverting'
-      ? Math.max(minimumTotal / gain - source.resistance, 0)
-      : minimumTotal / gain;
-  return { gain, gainResistor: null, feedbackResistor: null, gainResistance, feedbackResistance: gain };
 }
 
 function listCandidates(

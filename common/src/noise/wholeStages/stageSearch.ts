@@ -69,3 +69,12 @@ export function withNetwork({ stage, ...rest }: SoughtConditions, network: Netwo
     stage: { ...wanted, ...values, gainNoiseIndex, feedbackNoiseIndex, network: { minimumTotal } },
   };
 }
+
+/** A network that gives just the wanted gain, for what doesn't depend on its values. */
+export function nominalNetwork({ stage, source }: SoughtConditions): Network {
+  const isTransimpedance = stage.topology === 'transimpedance';
+  const gain = (isTransimpedance ? stage.feedbackResistance : stage.gain)!;
+  const least = stage.network.minimumTotal / (stage.gain ?? 1);
+  const gainResistance = stage.topology === 'inverting' ? Math.max(least - source.resistance, 0) : least;
+  return { gain, gainResistor: null, feedbackResistor: null, gainResistance, feedbackResistance: gain };
+}

@@ -1,0 +1,38 @@
+import { checkConditions, type PartFilter } from '../../conditions/index.js';
+import { boundsError, type FieldError } from '../../parts/index.js';
+import { nominalNetwork, withNetwork, type SoughtConditions } from './stageSearch.js';
+import { STAGE_SEARCH_FIELDS } from './stageSearchFields.js';
+
+/**
+ * Everything that is wrong with a search for whole stages, field by field: as `checkConditions`, and the
+ * network's limits against each other. Empty = it can be ranked.
+ */
+export function checkStageSearch(conditions: SoughtConditions, filter?: PartFilter): FieldError[] {
+  const { gainTolerance, parallelMaximum, outputVoltage = 0, network } = conditions.stage;
+  const values = {
+    'conditions.stage.gainTolerance': gainTolerance,
+    'conditions.stage.network.maximumTotal': network.maximumTotal,
+    'conditions.stage.parallelMaximum': parallelMaximum,
+    'conditions.stage.outputVoltage': outputVoltage,
+  };
+  const bounds = Object.entries(values).flatMap(([field, value]) => {
+    const message = boundsError(STAGE_SEARCH_FIELDS[field as keyof typeof values], value);
+    return message === null ? [] : [{ field, message }];
+  });
+  return [...bounds, ...checkLimits(conditions), ...checkNominal(conditions, filter)];
+}
+
+function checkLimits({ stage: { network } }: SoughtConditions): FieldError[] {
+  if (network.maximumTotal >= network.minimumTotal) return [];
+  const message = 'network, at most: not below what the output drives at least';
+  return [{ field: 'conditions.stage.network.maximumTotal', message }];
+}
+
+/** The stage at the wanted gain must be one that can be computed; its network isn't the asker's to state. */
+function checkNominal(conditions: SoughtConditions, filter?: PartFilter): FieldError[] {
+  const { outputVoltage: _, ...stage } = conditions.stage;
+  const nominal = withNetwork({ ...conditions, stage }, nominalNetwork(conditions));
+  return checkConditions({ conditions: nominal, filter }).filter(
+    ({ field }) => field !== 'conditions.stage.gainResistance',
+  );
+}

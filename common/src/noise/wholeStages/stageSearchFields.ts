@@ -1,0 +1,30 @@
+import type { QuantityField } from '../../parts/index.js';
+
+/** The numeric fields of a search for whole stages beside those of any operating conditions, by path. */
+export const STAGE_SEARCH_FIELDS = {
+  'conditions.stage.gainTolerance': {
+    label: 'gain tolerance',
+    kind: 'fraction',
+    bounds: { from: 0, to: 0.5 },
+    help: 'How far the gain of two library values may lie from the wanted one.',
+  },
+  'conditions.stage.network.maximumTotal': {
+    label: 'network, at most',
+    kind: 'resistance',
+    bounds: { from: 1e-3, to: 1e15 },
+    help: 'The largest feedback network that noise and leakage allow.',
+  },
+  'conditions.stage.parallelMaximum': {
+    label: 'channels in parallel, at most',
+    kind: 'count',
+    bounds: { from: 1, to: 8 },
+    integer: true,
+    help: 'Identical channels of one package that may work in parallel.',
+  },
+  'conditions.stage.outputVoltage': {
+    label: 'direct output voltage',
+    kind: 'voltage',
+    bounds: { from: -1e4, to: 1e4 },
+    help: 'It drives a direct current through the network, and so its excess noise.',
+  },
+} as const satisfies Record<string, QuantityField>;
