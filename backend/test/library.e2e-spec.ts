@@ -1,8 +1,11 @@
+import { OP_AMP_CATALOGUE, RESISTOR_CATALOGUE } from '@roothertz/common/parts';
+import { IsNull } from 'typeorm';
 import { createOpAmp } from './factories/op-amps.js';
 import { createTeam, signInMember, startTestApp, type TestApp, type TestMember } from './support/index.js';
-import { readOpAmpList } from '../src/database/seeds/op-amp-list.js';
+import { readPartList, readSeriesList } from '../src/database/seeds/part-list.js';
 import { seed } from '../src/database/seeds/seed.js';
 import { Library } from '../src/library/entities/library.entity.js';
+import { Part } from '../src/library/entities/part.entity.js';
 import { LibraryService } from '../src/library/library.service.js';
 
 describe('the library', () => {
@@ -30,7 +33,7 @@ describe('the library', () => {
       [own, 'demo/tarnfield-op-amps.csv'],
     ] as const;
     for (const [{ id }, path] of expected) {
-      const list = readOpAmpList(path);
+      const list = readPartList(OP_AMP_CATALOGUE, path);
       const { columns, manufacturers, partNumbers } = await libraries.loadOpAmpColumns(id);
       expect(columns.count).toBe(list.length);
       list.forEach(({ manufacturer, partNumber, amplifier, origins, lifecycle }, row) => {
@@ -42,6 +45,39 @@ describe('the library', () => {
         expect(columns.origins.currentNoise[row]).toBe(origins.currentNoise ?? 'typical');
       });
     }
+  });
+
+  it('is seeded with every resistor of the series and of the team’s list', async () => {
+    const libraryOf = (name: 'curated' | 'team', id: number) => ({ id, library: name, revision: 1 });
+    const [curated, own] = await app.dataSource.manager.find(Library, { order: { id: 'ASC' } });
+    const expected = [
+      [libraryOf('curated', curated.id), readSeriesList('curated/resistor-series.csv')],
+      [libraryOf('team', own.id), readPartList(RESISTOR_CATALOGUE, 'demo/tarnfield-resistors.csv')],
+    ] as const;
+    expect(expected[0][1].length).toBeGreaterThanOrEqual(4000);
+    for (const [library, list] of expected) {
+      const listed = await libraries.loadResistors(library);
+      expect(listed).toEqual(
+        list.map(({ description, resistor, ...part }) => ({
+          ...part,
+          ...resistor,
+          id: expect.any(Number),
+          library: library.library,
+          searchText: `${part.manufacturer} ${part.partNumber} ${description}`.toLowerCase(),
+        })),
+      );
+    }
+  });
+
+  it('gets the curated resistors that an older one lacks, under a new revision', async () => {
+    const curated = { teamId: IsNull() };
+    const { id: libraryId, revision } = await app.dataSource.manager.findOneByOrFail(Library, curated);
+    await app.dataSource.manager.delete(Part, { kind: 'resistor', libraryId });
+    const report = await app.dataSource.transaction((manager) => seed(manager, true));
+    expect(report).toBe('Seeded: curated resistors');
+    expect(await app.dataSource.manager.findOneByOrFail(Library, curated)).toMatchObject({
+      revision: revision + 1,
+    });
   });
 
   it('is not seeded again where it is filled', async () => {

@@ -2,13 +2,11 @@ import { createOpAmp, opAmpBody } from './factories/op-amps.js';
 import { createTeam, signInMember, startTestApp, type TestApp, type TestMember } from './support/index.js';
 import { seedCuratedLibrary } from '../src/database/seeds/library-seed.js';
 import { Part } from '../src/library/entities/part.entity.js';
-import { LibraryService } from '../src/library/library.service.js';
 
 describe('op-amps', () => {
   let app: TestApp;
   let librarian: TestMember;
   let engineer: TestMember;
-  let stranger: TestMember;
 
   beforeAll(async () => {
     app = await startTestApp();
@@ -16,19 +14,10 @@ describe('op-amps', () => {
     const team = await createTeam(app);
     librarian = await signInMember(app, team, ['librarian']);
     engineer = await signInMember(app, team, ['engineer']);
-    stranger = await signInMember(app, await createTeam(app), ['admin']);
   });
   afterAll(() => app.close());
 
   const partCount = () => app.dataSource.manager.count(Part);
-  const revision = async () => {
-    const readable = await app.nest.get(LibraryService).readableLibraries(librarian.caller);
-    return readable.find(({ library }) => library === 'team')?.revision;
-  };
-  const curatedId = async () => {
-    const { body } = await engineer.agent.get('/api/op-amps?library=curated&limit=1').expect(200);
-    return body.items[0].id as string;
-  };
 
   describe('creating', () => {
     it('keeps every parameter and origin that is sent', async () => {
@@ -94,30 +83,6 @@ describe('op-amps', () => {
       expect(body.origins).toEqual({ voltageNoise: 'measured' });
     });
 
-    it('stores SQL and HTML as the text they are', async () => {
-      const text = `'; DROP TABLE parts; -- <img src=x onerror="alert(1)"> % _ \\ 😀`;
-      const { id } = await createOpAmp(librarian, { description: text, manufacturer: text });
-      const { body } = await engineer.agent.get(`/api/op-amps/${id}`).expect(200);
-      expect(body).toMatchObject({ description: text, manufacturer: text });
-    });
-
-    it('refuses a part that differs in spelling only, and stores nothing', async () => {
-      await createOpAmp(librarian, { manufacturer: 'Acme Corp', partNumber: 'AC-77' });
-      const [before, revisionBefore] = [await partCount(), await revision()];
-      const { body } = await librarian.agent
-        .post('/api/op-amps')
-        .send(opAmpBody({ manufacturer: 'ACME  corp.', partNumber: 'ac 77' }))
-        .expect(409);
-      expect(body).toMatchObject({ code: 'part.duplicate', errors: [{ field: 'partNumber' }] });
-      expect([await partCount(), await revision()]).toEqual([before, revisionBefore]);
-    });
-
-    it('lets two teams have the same part', async () => {
-      const same = { manufacturer: 'Shared Maker', partNumber: 'SM-1' };
-      await createOpAmp(librarian, same);
-      await createOpAmp(stranger, same);
-    });
-
     it.each([
       ['manufacturer', { manufacturer: '' }],
       ['manufacturer', { manufacturer: 'two\nlines' }],
@@ -177,35 +142,11 @@ describe('op-amps', () => {
       expect((await engineer.agent.get(`/api/op-amps/${id}`)).body).toEqual(body);
     });
 
-    it('refuses a change that is based on an older version, and changes nothing', async () => {
-      const { id } = await createOpAmp(librarian);
-      await librarian.agent.patch(`/api/op-amps/${id}`).send({ version: 1, package: 'DIP-8' }).expect(200);
-      const revisionBefore = await revision();
-      const { body } = await librarian.agent
-        .patch(`/api/op-amps/${id}`)
-        .send({ version: 1, package: 'SOT-23' })
-        .expect(409);
-      expect(body.code).toBe('part.stale');
-      const { body: kept } = await engineer.agent.get(`/api/op-amps/${id}`).expect(200);
-      expect(kept).toMatchObject({ package: 'DIP-8', version: 2 });
-      expect(await revision()).toBe(revisionBefore);
-    });
-
-    it('lets one of several changes at once through', async () => {
-      const { id } = await createOpAmp(librarian);
-      const change = (name: string) =>
-        librarian.agent.patch(`/api/op-amps/${id}`).send({ version: 1, package: name });
-      const answers = await Promise.all(['A', 'B', 'C', 'D'].map((name) => change(name)));
-      expect(answers.map(({ status }) => status).sort()).toEqual([200, 409, 409, 409]);
-    });
-
-    it('refuses to rename a part to one that is there, and to contradict what is stored', async () => {
-      await createOpAmp(librarian, { partNumber: 'TAKEN-1' });
+    it('refuses a change that contradicts what is stored', async () => {
       const { id } = await createOpAmp(librarian, { amplifier: { voltageNoise: 1e-9, supplyMinimum: 9 } });
-      const patch = (body: object) =>
-        librarian.agent.patch(`/api/op-amps/${id}`).send({ version: 1, ...body });
-      expect((await patch({ partNumber: 'taken 1' }).expect(409)).body.code).toBe('part.duplicate');
-      expect((await patch({ amplifier: { supplyMaximum: 5 } }).expect(422)).body.code).toBe('part.invalid');
+      const change = { version: 1, amplifier: { supplyMaximum: 5 } };
+      const { body } = await librarian.agent.patch(`/api/op-amps/${id}`).send(change).expect(422);
+      expect(body.code).toBe('part.invalid');
       expect((await engineer.agent.get(`/api/op-amps/${id}`)).body.version).toBe(1);
     });
 
@@ -221,74 +162,6 @@ describe('op-amps', () => {
       const { body } = await librarian.agent.patch(`/api/op-amps/${id}`).send(change).expect(400);
       expect(body.errors).toEqual([expect.objectContaining({ field })]);
     });
-
-    it('removes a part at its version only', async () => {
-      const { id } = await createOpAmp(librarian);
-      expect((await librarian.agent.delete(`/api/op-amps/${id}?version=7`).expect(409)).body.code).toBe(
-        'part.stale',
-      );
-      await librarian.agent.delete(`/api/op-amps/${id}`).expect(400);
-      await librarian.agent.delete(`/api/op-amps/${id}?version=1`).expect(204);
-      await librarian.agent.get(`/api/op-amps/${id}`).expect(404);
-      await librarian.agent.delete(`/api/op-amps/${id}?version=1`).expect(404);
-    });
-
-    it('bumps the library’s revision once for each write and never for reading', async () => {
-      const start = (await revision())!;
-      const { id } = await createOpAmp(librarian);
-      await librarian.agent.patch(`/api/op-amps/${id}`).send({ version: 1, package: 'DIP-8' }).expect(200);
-      await engineer.agent.get('/api/op-amps').expect(200);
-      expect(await revision()).toBe(start + 2);
-      await librarian.agent.delete(`/api/op-amps/${id}?version=2`).expect(204);
-      expect(await revision()).toBe(start + 3);
-    });
-  });
-
-  describe('access', () => {
-    it('keeps another team’s parts out of reach', async () => {
-      const { id } = await createOpAmp(librarian, { partNumber: 'SECRET-1' });
-      await stranger.agent.get(`/api/op-amps/${id}`).expect(404);
-      await stranger.agent.patch(`/api/op-amps/${id}`).send({ version: 1, package: 'X' }).expect(404);
-      await stranger.agent.delete(`/api/op-amps/${id}?version=1`).expect(404);
-      const { body } = await stranger.agent.get('/api/op-amps?search=SECRET-1').expect(200);
-      expect(body).toEqual({ items: [], total: 0 });
-      await engineer.agent.get(`/api/op-amps/${id}`).expect(200);
-    });
-
-    it('leaves curated parts as they are', async () => {
-      const id = await curatedId();
-      const patch = { version: 1, package: 'X' };
-      const answer = await librarian.agent.patch(`/api/op-amps/${id}`).send(patch).expect(403);
-      expect(answer.body.code).toBe('part.curated');
-      await librarian.agent.delete(`/api/op-amps/${id}?version=1`).expect(403);
-    });
-
-    it('lets every member read, and librarians and admins alone write', async () => {
-      const { id } = await createOpAmp(librarian);
-      for (const role of ['purchasing', 'engineer', 'reviewer'] as const) {
-        const { agent } = await signInMember(app, { id: librarian.caller.teamId, plan: 'team' }, [role]);
-        await agent.get(`/api/op-amps/${id}`).expect(200);
-        await agent.post('/api/op-amps').send(opAmpBody()).expect(403);
-        await agent.patch(`/api/op-amps/${id}`).send({ version: 1 }).expect(403);
-        await agent.delete(`/api/op-amps/${id}?version=1`).expect(403);
-      }
-      await app.request.get('/api/op-amps').expect(401);
-    });
-
-    it('offers an own library with the team’s plan only', async () => {
-      const team = await createTeam(app, { plan: 'free' });
-      const admin = await signInMember(app, team, ['admin']);
-      const { body } = await admin.agent.post('/api/op-amps').send(opAmpBody()).expect(402);
-      expect(body.code).toBe('access.plan');
-      expect((await admin.agent.get('/api/op-amps?limit=1').expect(200)).body.total).toBeGreaterThan(180);
-    });
-
-    it.each(['0', '-1', '1e3', 'abc', '99999999999', '4294967295', '1%20or%201=1'])(
-      'finds nothing at the id %s',
-      async (id) => {
-        expect((await engineer.agent.get(`/api/op-amps/${id}`).expect(404)).body.code).toBe('part.not-found');
-      },
-    );
   });
 
   describe('listing', () => {

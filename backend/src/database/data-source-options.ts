@@ -24,6 +24,6 @@ export function dataSourceOptions(config: AppConfig): DataSourceOptions {
     synchronize: false,
     poolSize: CONNECTIONS,
     connectTimeout: CONNECT_TIMEOUT_MS,
-    extra: { queueLimit: WAITING_REQUESTS, enableKeepAlive: true },
+    extra: { queueLimit: WAITING_REQUESTS },
   };
 }

@@ -1,12 +1,15 @@
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
-import { type Library as LibraryName } from '@roothertz/common/parts';
+import type { Library as LibraryName, OpAmpPart } from '@roothertz/common/parts';
 import { type DataSource, IsNull } from 'typeorm';
 import type { Caller } from '../shared/access/caller.js';
 import { Library } from './entities/library.entity.js';
-import { type LibraryColumns, readLibraryColumns } from './op-amp-columns.js';
-import { type OpAmpRecord, toOpAmpRecord } from './op-amp-record.js';
-import { selectOpAmps } from './op-amp-select.js';
+import { type ListedResistor, toListedResistors } from './listed-resistors.js';
+import { readListedRows } from './listed-rows.js';
+import { type LibraryColumns, toLibraryColumns } from './op-amp-columns.js';
+import { type OpAmpRecord, toPartRecord } from './part-record.js';
+import { selectParts } from './part-select.js';
+import { OP_AMPS, RESISTORS } from './part-tables.js';
 
 export interface ReadableLibrary {
   id: number;
@@ -42,15 +45,22 @@ export class LibraryService {
   /** The op-amps that the caller may read among the given ids, in the order of the ids. */
   async findOpAmps(caller: Caller, ids: readonly number[]): Promise<OpAmpRecord[]> {
     if (ids.length === 0) return [];
-    const found = await selectOpAmps(this.dataSource.manager, caller)
+    const found = await selectParts(this.dataSource.manager, OP_AMPS, caller)
       .andWhere('part.id IN (:...ids)', { ids })
       .getMany();
-    const records = new Map(found.map((opAmp) => [opAmp.partId, toOpAmpRecord(opAmp)]));
+    const records = new Map(
+      found.map((row) => [row.partId, toPartRecord<OpAmpPart>(OP_AMPS.catalogue, row)]),
+    );
     return ids.flatMap((id) => records.get(id) ?? []);
   }
 
   /** The op-amps of a library that {@link readableLibraries} named, as columns; to be cached by its revision. */
-  loadOpAmpColumns(libraryId: number): Promise<LibraryColumns> {
-    return readLibraryColumns(this.dataSource, libraryId);
+  async loadOpAmpColumns(libraryId: number): Promise<LibraryColumns> {
+    return toLibraryColumns(await readListedRows(this.dataSource, OP_AMPS, libraryId));
+  }
+
+  /** The resistors of a library that {@link readableLibraries} named; to be cached by its revision. */
+  async loadResistors({ id, library }: ReadableLibrary): Promise<ListedResistor[]> {
+    return toListedResistors(await readListedRows(this.dataSource, RESISTORS, id), library);
   }
 }

@@ -1,54 +1,54 @@
 import type { PartFilter } from '@roothertz/common/conditions';
 import { Injectable } from '@nestjs/common';
-import type { LibraryColumns } from '../library/op-amp-columns.js';
 import { LibraryService, type ReadableLibrary } from '../library/library.service.js';
+import type { ListedResistor } from '../library/listed-resistors.js';
+import type { LibraryColumns } from '../library/op-amp-columns.js';
 import type { Caller } from '../shared/access/caller.js';
+import { RevisionCache } from './revision-cache.js';
 
-/** A library as the ranking takes it, at the revision that the database has. */
+/** A library's op-amps as the ranking takes them, at the revision that the database has. */
 export interface IndexedLibrary extends ReadableLibrary, LibraryColumns {}
 
-interface Entry {
-  revision: number;
-  columns: Promise<LibraryColumns>;
+/** A library's resistors as the ranking takes them, at the revision that the database has. */
+export interface ResistorLibrary extends ReadableLibrary {
+  resistors: ListedResistor[];
 }
 
-const MOST_LIBRARIES = 50;
+type LibraryChoice = Pick<PartFilter, 'library'>;
 
 /**
- * Keeps the libraries' columns in memory, each at its latest revision. The revision is read from the database
- * at each asking, so that several API processes stay right; the library that was asked for longest ago goes first.
+ * Keeps the libraries' parts in memory. Their revisions are read from the database at each asking, so that
+ * several API processes stay right.
  */
 @Injectable()
 export class LibraryIndex {
-  private readonly entries = new Map<number, Entry>();
+  private readonly opAmps: RevisionCache<LibraryColumns>;
+  private readonly resistors: RevisionCache<ListedResistor[]>;
 
-  constructor(private readonly libraries: LibraryService) {}
+  constructor(private readonly libraries: LibraryService) {
+    this.opAmps = new RevisionCache(({ id }) => libraries.loadOpAmpColumns(id));
+    this.resistors = new RevisionCache((library) => libraries.loadResistors(library));
+  }
 
-  /** The libraries that the caller reads and the filter names; a filter without names means all. */
-  async readableBy(caller: Caller, filter: Pick<PartFilter, 'library'>): Promise<IndexedLibrary[]> {
-    const readable = await this.libraries.readableLibraries(caller);
-    const chosen = readable.filter(
-      ({ library }) => !filter.library?.length || filter.library.includes(library),
+  /** The op-amps of the libraries that the caller reads and the filter names; without names, of all. */
+  async opAmpsReadableBy(caller: Caller, filter: LibraryChoice): Promise<IndexedLibrary[]> {
+    const chosen = await this.chosenLibraries(caller, filter);
+    return Promise.all(
+      chosen.map(async (library) => ({ ...library, ...(await this.opAmps.contentOf(library)) })),
     );
-    return Promise.all(chosen.map(async (library) => ({ ...library, ...(await this.columnsOf(library)) })));
   }
 
-  private columnsOf({ id, revision }: ReadableLibrary): Promise<LibraryColumns> {
-    const known = this.entries.get(id);
-    const entry = known?.revision === revision ? known : this.load(id, revision);
-    this.entries.delete(id);
-    this.entries.set(id, entry);
-    const [oldest] = this.entries.keys();
-    if (this.entries.size > MOST_LIBRARIES) this.entries.delete(oldest);
-    return entry.columns;
+  /** The resistors of the libraries that the caller reads and the filter names; without names, of all. */
+  async resistorsReadableBy(caller: Caller, filter: LibraryChoice): Promise<ResistorLibrary[]> {
+    const chosen = await this.chosenLibraries(caller, filter);
+    return Promise.all(
+      chosen.map(async (library) => ({ ...library, resistors: await this.resistors.contentOf(library) })),
+    );
   }
 
-  private load(id: number, revision: number): Entry {
-    const entry = { revision, columns: this.libraries.loadOpAmpColumns(id) };
-    entry.columns.catch(() => {
-      if (this.entries.get(id) === entry) this.entries.delete(id);
-    });
-    return entry;
+  private async chosenLibraries(caller: Caller, filter: LibraryChoice): Promise<ReadableLibrary[]> {
+    const readable = await this.libraries.readableLibraries(caller);
+    return readable.filter(({ library }) => !filter.library?.length || filter.library.includes(library));
   }
 }
 

@@ -3,8 +3,11 @@ import { cellConditions, quietestMap } from '@roothertz/common/noise';
 import type { FieldError } from '@roothertz/common/parts';
 import { Injectable } from '@nestjs/common';
 import type { Caller } from '../shared/access/caller.js';
-import { toOperatingConditions, toPartFilter } from '../shared/conditions/ranking-request.js';
-import { DomainError } from '../shared/errors/domain-error.js';
+import {
+  refuseConditions,
+  toOperatingConditions,
+  toPartFilter,
+} from '../shared/conditions/ranking-request.js';
 import type { QuietestMapDto, QuietestMapResponseDto } from './dto/quietest-map.dto.js';
 import { LibraryIndex, revisionOf } from './library-index.service.js';
 import { partNameAt } from './part-name-at.js';
@@ -17,8 +20,8 @@ export class QuietestMapService {
     const { resistance, frequency } = dto;
     const conditions = toOperatingConditions(dto.conditions);
     const filter = toPartFilter(dto.filter);
-    refuse([...checkAxes(dto), ...checkCells(conditions, dto)]);
-    const libraries = await this.index.readableBy(caller, filter);
+    refuseConditions([...checkAxes(dto), ...checkCells(conditions, dto)]);
+    const libraries = await this.index.opAmpsReadableBy(caller, filter);
     const map = quietestMap(
       { conditions, filter, resistance, frequency },
       libraries.map(({ columns }) => columns),
@@ -40,8 +43,4 @@ function checkCells(
   { resistance, frequency }: QuietestMapDto,
 ): FieldError[] {
   return checkConditions({ conditions: cellConditions(conditions, resistance.from, frequency.from) });
-}
-
-function refuse(errors: FieldError[]): void {
-  if (errors.length > 0) throw new DomainError('conditions.invalid', 'This map can’t be drawn.', { errors });
 }

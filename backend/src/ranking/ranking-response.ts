@@ -1,11 +1,6 @@
-import type { ExcludedPart, RankedPart, Ranking } from '@roothertz/common/noise';
-import type { OpAmpRecord } from '../library/op-amp-record.js';
-import type {
-  ExcludedDto,
-  PartNameDto,
-  RankedOpAmpDto,
-  RankingResponseDto,
-} from './dto/ranking-response.dto.js';
+import type { RankedPart, Ranking } from '@roothertz/common/noise';
+import type { OpAmpRecord } from '../library/part-record.js';
+import type { PartNameDto, RankedOpAmpDto, RankingResponseDto } from './dto/ranking-response.dto.js';
 import { type IndexedLibrary, revisionOf } from './library-index.service.js';
 
 /** Ranked parts whose record is gone since they were ranked are left out. */
@@ -41,8 +36,12 @@ export function toPartName(record: Omit<PartNameDto, 'id'> & { id: number }): Pa
   return { id: String(id), library, manufacturer, partNumber, package: packageName, lifecycle, approval };
 }
 
-function countReasons(excluded: readonly ExcludedPart[]): ExcludedDto {
-  const counts = new Map<ExcludedPart['reason'], number>();
+/** How many parts are excluded for each reason, the most frequent one first. */
+export function countReasons<Reason>(excluded: readonly { reason: Reason }[]): {
+  total: number;
+  reasons: { reason: Reason; count: number }[];
+} {
+  const counts = new Map<Reason, number>();
   for (const { reason } of excluded) counts.set(reason, (counts.get(reason) ?? 0) + 1);
   const reasons = [...counts].map(([reason, count]) => ({ reason, count }));
   return { total: excluded.length, reasons: reasons.sort((a, b) => b.count - a.count) };

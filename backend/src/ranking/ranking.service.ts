@@ -8,13 +8,14 @@ import {
   RANKING_SORTS,
 } from '@roothertz/common/noise';
 import type { RankingRequest } from '@roothertz/common/conditions';
+import { type Amplifier, OP_AMP_PARAMETERS } from '@roothertz/common/parts';
 import { Injectable } from '@nestjs/common';
 import { LibraryService } from '../library/library.service.js';
 import type { Caller } from '../shared/access/caller.js';
 import { checkedConditions, checkedRankingRequest } from '../shared/conditions/ranking-request.js';
 import { DomainError } from '../shared/errors/domain-error.js';
 import { parseSort } from '../shared/list/sort.js';
-import { toAmplifier } from '../shared/op-amps/amplifier.dto.js';
+import { withFallbacks } from '../shared/parts/parameter-properties.js';
 import type { EvaluateStageDto } from './dto/evaluate-stage.dto.js';
 import type { ExclusionDto, ExclusionListDto } from './dto/exclusions-response.dto.js';
 import type { RankOpAmpsDto } from './dto/rank-op-amps.dto.js';
@@ -35,7 +36,7 @@ export class RankingService {
     const request = checkedRankingRequest(dto);
     const { key: sort, descending } = parseSort(dto.sort, RANKING_SORTS);
     const { limit, offset } = dto;
-    const libraries = await this.index.readableBy(caller, request.filter);
+    const libraries = await this.index.opAmpsReadableBy(caller, request.filter);
     const ranking = rankAmplifiers(
       { ...request, sort, descending, limit, offset },
       libraries.map(({ columns }) => columns),
@@ -47,7 +48,7 @@ export class RankingService {
 
   async exclusions(caller: Caller, dto: RankOpAmpsDto): Promise<ExclusionListDto> {
     const request = checkedRankingRequest(dto);
-    const libraries = await this.index.readableBy(caller, request.filter);
+    const libraries = await this.index.opAmpsReadableBy(caller, request.filter);
     const excluded = findExcluded(
       request,
       libraries.map(({ columns }) => columns),
@@ -58,7 +59,7 @@ export class RankingService {
 
   stage(dto: EvaluateStageDto): StageFiguresDto {
     const conditions = checkedConditions(dto.conditions);
-    const amplifier = toAmplifier(dto.amplifier);
+    const amplifier = withFallbacks<Amplifier>(OP_AMP_PARAMETERS, dto.amplifier);
     const errors = checkAmplifier(conditions, amplifier);
     if (errors.length > 0)
       throw new DomainError('conditions.invalid', 'The noise of this stage has no end.', { errors });

@@ -6,9 +6,15 @@ import { Caller } from '../shared/access/caller.decorator.js';
 import { ExclusionListDto } from './dto/exclusions-response.dto.js';
 import { QuietestMapDto, QuietestMapResponseDto } from './dto/quietest-map.dto.js';
 import { RankOpAmpsDto } from './dto/rank-op-amps.dto.js';
+import { RankStagesDto } from './dto/rank-stages.dto.js';
+import { RankResistorsDto } from './dto/rank-resistors.dto.js';
 import { RankingResponseDto } from './dto/ranking-response.dto.js';
+import { StageRankingDto } from './dto/stage-ranking.dto.js';
+import { ResistorExclusionListDto, ResistorRankingDto } from './dto/resistor-ranking.dto.js';
 import { QuietestMapService } from './quietest-map.service.js';
 import { RankingService } from './ranking.service.js';
+import { ResistorRankingService } from './resistor-ranking.service.js';
+import { StageRankingService } from './stage-ranking.service.js';
 
 @ApiTags('rankings')
 @Controller('rankings')
@@ -16,6 +22,8 @@ export class RankingsController {
   constructor(
     private readonly ranking: RankingService,
     private readonly map: QuietestMapService,
+    private readonly resistors: ResistorRankingService,
+    private readonly stages: StageRankingService,
   ) {}
 
   @Post('op-amps')
@@ -43,5 +51,35 @@ export class RankingsController {
     @Body() dto: QuietestMapDto,
   ): Promise<QuietestMapResponseDto> {
     return this.map.draw(caller, dto);
+  }
+
+  @Post('resistors')
+  @HttpCode(200)
+  @Access('rankings.run')
+  @ApiOkResponse({ type: ResistorRankingDto })
+  rankResistors(
+    @Caller() caller: CallerOfRequest,
+    @Body() dto: RankResistorsDto,
+  ): Promise<ResistorRankingDto> {
+    return this.resistors.rank(caller, dto);
+  }
+
+  @Post('resistors/exclusions')
+  @HttpCode(200)
+  @Access('rankings.run')
+  @ApiOkResponse({ type: ResistorExclusionListDto })
+  listResistorExclusions(
+    @Caller() caller: CallerOfRequest,
+    @Body() dto: RankResistorsDto,
+  ): Promise<ResistorExclusionListDto> {
+    return this.resistors.exclusions(caller, dto);
+  }
+
+  @Post('stages')
+  @HttpCode(200)
+  @Access('rankings.run')
+  @ApiOkResponse({ type: StageRankingDto })
+  rankStages(@Caller() caller: CallerOfRequest, @Body() dto: RankStagesDto): Promise<StageRankingDto> {
+    return this.stages.rank(caller, dto);
   }
 }

@@ -17,6 +17,23 @@ const currentSource = {
 const amplifier = { inputType: 'jfet', voltageNoise: 3e-9, currentNoise: 1e-15, gainBandwidth: 1e7 };
 const opAmp = { manufacturer: 'Alderney Analogue', partNumber: 'AA101', package: 'SOIC-8', amplifier };
 
+const resistor = {
+  manufacturer: 'Alderney Analogue',
+  partNumber: 'AR101',
+  resistor: {
+    technology: 'thin-film',
+    resistance: 1000,
+    powerRating: 0.1,
+    noiseIndex: -30,
+    temperatureRise: 50,
+  },
+};
+const place = {
+  conditions: { resistance: 1000, resistanceTolerance: 0.5, dcVoltage: 5, band: { lower: 0.1, upper: 1000 } },
+  filter: { search: 'a', library: ['team'], technology: ['thin-film'], package: '' },
+  quantity: 10,
+};
+
 const filter = {
   search: 'a',
   library: ['curated', 'team'],
@@ -34,8 +51,23 @@ export const SAMPLES: Record<string, unknown[]> = {
   'patch /api/conditions/{id}': [{ version: 1, name: 'Turbidity', ...request }],
   'post /api/op-amps': [opAmp],
   'patch /api/op-amps/{id}': [{ version: 1, partNumber: 'AA102', amplifier: { voltageNoise: 2e-9 } }],
+  'post /api/resistors': [resistor],
+  'patch /api/resistors/{id}': [{ version: 1, partNumber: 'AR102', resistor: { noiseIndex: -20 } }],
+  'post /api/rankings/resistors': [{ ...place, sort: '-totalRms', limit: 10 }],
+  'post /api/rankings/resistors/exclusions': [{ ...place, limit: 10 }],
   'post /api/rankings/op-amps': [{ ...request, ...page }, { conditions: currentSource }],
   'post /api/rankings/op-amps/exclusions': [{ ...request, limit: 10 }],
+  'post /api/rankings/stages': [
+    {
+      conditions: {
+        ...conditions,
+        stage: { topology: 'inverting', gain: 10, gainTolerance: 0.01, outputVoltage: 5 },
+      },
+      filter,
+      resistorFilter: { technology: ['thin-film'] },
+      limit: 5,
+    },
+  ],
   'post /api/rankings/quietest-map': [
     {
       conditions,

@@ -5,7 +5,7 @@ const actions = Object.keys(ACTIONS) as Action[];
 const allowedRoles = (action: Action): Role[] => ROLES.filter((role) => mayDo([role], action));
 
 describe('mayDo', () => {
-  it.each(['session.own', 'parts.read', 'rankings.run', 'conditions.read'] as const)(
+  it.each(['session.own', 'parts.read', 'rankings.run', 'conditions.read', 'prices.read'] as const)(
     'allows %s to every member, whatever the roles',
     (action) => {
       expect(allowedRoles(action)).toEqual([...ROLES]);
@@ -15,6 +15,11 @@ describe('mayDo', () => {
 
   it('keeps the parts to admin and librarian', () => {
     expect(allowedRoles('parts.edit')).toEqual(['admin', 'librarian']);
+  });
+
+  it('keeps the prices to admin and purchasing, and the audit trail to the admin', () => {
+    expect(allowedRoles('prices.edit')).toEqual(['admin', 'purchasing']);
+    expect(allowedRoles('audit.read')).toEqual(['admin']);
   });
 
   it('lets admin, librarian and engineer save conditions', () => {
@@ -33,7 +38,7 @@ describe('planIncludes', () => {
     expect(actions.filter((action) => !planIncludes('team', action))).toEqual([]);
   });
 
-  it('leaves a library of one’s own out of the free plan', () => {
-    expect(actions.filter((action) => !planIncludes('free', action))).toEqual(['parts.edit']);
+  it('leaves a library of one’s own and prices out of the free plan', () => {
+    expect(actions.filter((action) => !planIncludes('free', action))).toEqual(['parts.edit', 'prices.edit']);
   });
 });

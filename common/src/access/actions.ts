@@ -5,7 +5,7 @@ interface ActionRule {
   /** Who may do it, by role. */
   roles: readonly Role[] | 'every member';
   /** What the team's plan must include. */
-  needs?: 'ownLibrary';
+  needs?: 'ownLibrary' | 'prices';
 }
 
 /** Every action that a route or a button stands for: who may do it and what the plan must include. */
@@ -16,6 +16,9 @@ export const ACTIONS = {
   'rankings.run': { roles: 'every member' },
   'conditions.read': { roles: 'every member' },
   'conditions.save': { roles: ['admin', 'librarian', 'engineer'] },
+  'prices.read': { roles: 'every member' },
+  'prices.edit': { roles: ['admin', 'purchasing'], needs: 'prices' },
+  'audit.read': { roles: ['admin'] },
 } as const satisfies Record<string, ActionRule>;
 
 export type Action = keyof typeof ACTIONS;

@@ -1,4 +1,5 @@
-import { boundsError, type FieldError } from '../parts/index.js';
+import type { FieldError } from '../parts/index.js';
+import { checkBandLimits, checkFields } from './checkFields.js';
 import { CONDITION_FIELDS, type ConditionFieldPath } from './conditionFields.js';
 import type { RankingRequest, StageConditions, Topology } from './conditions.js';
 
@@ -23,19 +24,12 @@ export function checkConditions(request: RankingRequest): FieldError[] {
     : [...checkStage(request), ...checkBand(request), ...checkSupply(request)];
 }
 
-function checkBounds(request: RankingRequest): FieldError[] {
-  return (Object.keys(CONDITION_FIELDS) as ConditionFieldPath[]).flatMap((field) => {
-    const value = valueAt(request, field);
-    if (value === undefined || value === 'auto') return [];
-    const message = boundsError(CONDITION_FIELDS[field], value);
-    return message === null ? [] : [{ field, message }];
-  });
-}
+const AUTOMATIC = 'conditions.stage.feedbackCapacitance' satisfies ConditionFieldPath;
 
-function valueAt(request: RankingRequest, path: string): unknown {
-  return path
-    .split('.')
-    .reduce<unknown>((value, key) => (value as Record<string, unknown> | undefined)?.[key], request);
+/** “auto” isn't a number, but the one word that stands for a number. */
+function checkBounds(request: RankingRequest): FieldError[] {
+  const isAutomatic = request.conditions.stage.feedbackCapacitance === 'auto';
+  return checkFields(CONDITION_FIELDS, request).filter(({ field }) => !isAutomatic || field !== AUTOMATIC);
 }
 
 function checkStage({ conditions }: RankingRequest): FieldError[] {
@@ -95,13 +89,8 @@ function article(topology: Topology): string {
 }
 
 function checkBand({ conditions: { band, referenceFrequency } }: RankingRequest): FieldError[] {
-  if (band.upper <= band.lower)
-    return [
-      {
-        field: 'conditions.band.upper',
-        message: 'upper band limit: a frequency above the lower limit was expected',
-      },
-    ];
+  const limits = checkBandLimits(band);
+  if (limits.length > 0) return limits;
   if (referenceFrequency < band.lower || referenceFrequency > band.upper)
     return [
       {

@@ -9,21 +9,21 @@ export const CONDITION_FIELDS = {
     label: 'source resistance',
     symbol: 'R_s',
     kind: 'resistance',
-    bounds: { from: 0, to: 1e13 },
+    bounds: { from: 0, least: 1e-9, to: 1e13 },
     help: 'Resistance in series with the source’s voltage, or across its current in a transimpedance stage.',
   },
   'conditions.source.inductance': {
     label: 'source inductance',
     symbol: 'L_s',
     kind: 'inductance',
-    bounds: { from: 0, to: 1e5 },
+    bounds: { from: 0, least: 1e-15, to: 1e5 },
     help: 'Inductance in series with the source resistance, as of a coil; 0 = none.',
   },
   'conditions.source.capacitance': {
     label: 'source capacitance',
     symbol: 'C_s',
     kind: 'capacitance',
-    bounds: { from: 0, to: 1 },
+    bounds: { from: 0, least: 1e-18, to: 1 },
     help: 'Capacitance across the source, with that of its cable; 0 = none.',
   },
   'conditions.source.temperature': {
@@ -37,7 +37,7 @@ export const CONDITION_FIELDS = {
     label: 'direct current of the detector',
     symbol: 'I_d',
     kind: 'current',
-    bounds: { from: 0, to: 10 },
+    bounds: { from: 0, least: 1e-21, to: 10 },
     help: 'Photocurrent and dark current; its shot noise belongs to the source.',
   },
   'conditions.ambientTemperature': {
@@ -76,7 +76,7 @@ export const CONDITION_FIELDS = {
     label: 'gain resistance',
     symbol: 'R_g',
     kind: 'resistance',
-    bounds: { from: 0, to: 1e12 },
+    bounds: { from: 0, least: 1e-6, to: 1e12 },
     help: 'From the − input to ground, or to the source in an inverting stage.',
   },
   'conditions.stage.loadResistance': {
@@ -90,7 +90,7 @@ export const CONDITION_FIELDS = {
     label: 'bias resistance',
     symbol: 'R_b',
     kind: 'resistance',
-    bounds: { from: 0, to: 1e12 },
+    bounds: { from: 0, least: 1e-6, to: 1e12 },
     help: 'From the + input to ground in an inverting stage; 0 = none.',
   },
   'conditions.stage.feedbackResistance': {
@@ -104,7 +104,7 @@ export const CONDITION_FIELDS = {
     label: 'feedback capacitance',
     symbol: 'C_f',
     kind: 'capacitance',
-    bounds: { from: 0, to: 1 },
+    bounds: { from: 0, least: 1e-18, to: 1 },
     help: 'Across the feedback resistor; “auto” = maximally flat for each amplifier.',
   },
   'conditions.stage.network.minimumTotal': {

@@ -49,7 +49,8 @@ function split(from: number, to: number, features: readonly Feature[], boundarie
 function distance(x: number, features: readonly Feature[]): number {
   let nearest = Infinity;
   for (const { from, to, width } of features) {
-    nearest = Math.min(nearest, Math.hypot(Math.max(0, from - x, x - to), width));
+    const here = Math.hypot(Math.max(0, from - x, x - to), width);
+    if (here < nearest) nearest = here;
   }
   return nearest;
 }

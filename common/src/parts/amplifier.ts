@@ -1,5 +1,6 @@
 import type { OpAmpParameterKey } from './opAmpParameters.js';
-import type { InputType, Origin } from './vocabulary.js';
+import type { Origins, PartFields } from './part.js';
+import type { InputType } from './vocabulary.js';
 
 /**
  * An op-amp's parameters in SI units, as API, database and noise model use them; `null` = unknown.
@@ -10,5 +11,10 @@ export type Amplifier = { inputType: InputType | null; channels: number; voltage
   number | null
 >;
 
-/** Where each known figure comes from; a parameter that isn't listed is a data sheet's typical value. */
-export type AmplifierOrigins = Partial<Record<OpAmpParameterKey, Origin>>;
+export type AmplifierOrigins = Origins<OpAmpParameterKey>;
+
+/** An op-amp as a library keeps it. */
+export interface OpAmpPart extends PartFields {
+  amplifier: Amplifier;
+  origins: AmplifierOrigins;
+}

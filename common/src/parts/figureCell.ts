@@ -1,7 +1,6 @@
 import { parseQuantity } from '../units/index.js';
 import { boundsError } from './bounds.js';
-import { canBeUnknown } from './opAmpPart.js';
-import type { ParameterDefinition } from './parameter.js';
+import { canBeUnknown, type ParameterDefinition } from './parameter.js';
 import type { Reading } from './reading.js';
 
 /**

@@ -34,3 +34,8 @@ export interface ParameterDefinition<Key extends string = string> extends Quanti
   /** Other names that lists give this column; compared without case, accents and punctuation. */
   synonyms: readonly string[];
 }
+
+/** Whether a part can be kept without the parameter: not what is required, and not a count. */
+export function canBeUnknown(parameter: ParameterDefinition): boolean {
+  return !parameter.required && parameter.kind !== 'count';
+}

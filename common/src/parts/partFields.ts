@@ -1,3 +1,4 @@
+import { TECHNOLOGIES } from './technology.js';
 import { APPROVALS, INPUT_TYPES, LIFECYCLES } from './vocabulary.js';
 
 /** A field of text, or a choice of words, that a part has beside its numeric parameters. */
@@ -9,6 +10,12 @@ export interface TextField {
   options?: readonly string[];
   fallback: string | null;
   synonyms: readonly string[];
+}
+
+/** A choice of words that may be unknown. */
+export interface ChoiceField extends TextField {
+  options: readonly string[];
+  fallback: null;
 }
 
 /** What every part has, whatever its kind. */
@@ -71,4 +78,14 @@ export const INPUT_TYPE_FIELD = {
   options: INPUT_TYPES,
   fallback: null,
   synonyms: ['input', 'technology', 'Eingang', 'Technologie', 'entrée'],
-} as const satisfies TextField;
+} as const satisfies ChoiceField;
+
+/** The choice of words in a resistor's parameters. */
+export const TECHNOLOGY_FIELD = {
+  key: 'technology',
+  label: 'technology',
+  maxLength: 20,
+  options: TECHNOLOGIES,
+  fallback: null,
+  synonyms: ['resistor technology', 'construction', 'element', 'Technologie', 'Bauart', 'fabrication'],
+} as const satisfies ChoiceField;

@@ -1,38 +1,20 @@
-/** How a resistor is made; it decides how much excess noise it has. */
-export const TECHNOLOGIES = [
-  'metal-foil',
-  'thin-film',
-  'metal-film',
-  'wirewound',
-  'thick-film',
-  'carbon-film',
-  'carbon-composition',
-] as const;
-export type Technology = (typeof TECHNOLOGIES)[number];
+import type { Origins, PartFields } from './part.js';
+import type { ResistorParameterKey } from './resistorParameters.js';
+import type { Technology } from './technology.js';
 
-export const TECHNOLOGY_LABELS: Record<Technology, string> = {
-  'metal-foil': 'metal foil',
-  'thin-film': 'thin film',
-  'metal-film': 'metal film',
-  wirewound: 'wirewound',
-  'thick-film': 'thick film',
-  'carbon-film': 'carbon film',
-  'carbon-composition': 'carbon composition',
-};
+/**
+ * A resistor's parameters in SI units, as API, database and noise model use them; `null` = unknown.
+ * Only the resistance is always known.
+ */
+export type Resistor = { technology: Technology | null; resistance: number } & Record<
+  Exclude<ResistorParameterKey, 'resistance'>,
+  number | null
+>;
 
-/** A resistor's parameters in SI units, as API, database and noise model use them; `null` = unknown. */
-export interface Resistor {
-  /** Ω */
-  resistance: number;
-  /** 0.01 = 1 % */
-  tolerance: number | null;
-  /** 1/K */
-  temperatureCoefficient: number | null;
-  /** W */
-  powerRating: number | null;
-  technology: Technology | null;
-  /** dB; 0 dB = 1 µV rms per volt in one decade */
-  noiseIndex: number | null;
-  /** K above ambient at the rated power */
-  temperatureRise: number | null;
+export type ResistorOrigins = Origins<ResistorParameterKey>;
+
+/** A resistor as a library keeps it. */
+export interface ResistorPart extends PartFields {
+  resistor: Resistor;
+  origins: ResistorOrigins;
 }

@@ -21,14 +21,16 @@ describe('a column of values', () => {
     expect(formatInPrefix(NaN, 'voltage', 'n')).toBe('–');
   });
 
-  it('writes temperatures in °C and fractions in percent', () => {
+  it('writes temperatures in °C, fractions in percent and temperature coefficients in ppm/K', () => {
     expect(formatInPrefix(77, 'temperature', '')).toBe('\u2212196');
     expect(formatInPrefix(0.01, 'fraction', '')).toBe('1.00');
+    expect(formatInPrefix(-2e-4, 'temperatureCoefficient', '')).toBe('\u2212200');
   });
 
   it('names the unit for its heading', () => {
     expect(unitInPrefix('voltageNoiseDensity', 'n')).toBe('nV/√Hz');
     expect(unitInPrefix('temperature', '')).toBe('°C');
     expect(unitInPrefix('fraction', '')).toBe('%');
+    expect(unitInPrefix('temperatureCoefficient', '')).toBe('ppm/K');
   });
 });

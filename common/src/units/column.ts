@@ -1,7 +1,7 @@
 import type { QuantityKind } from './kinds.js';
 import { plainNumber } from './plainNumber.js';
 import { PREFIXES, prefixFor, type Prefix } from './prefixes.js';
-import { QUANTITIES } from './quantities.js';
+import { PER_MILLION, QUANTITIES } from './quantities.js';
 import { scientific } from './scientific.js';
 import { splitQuantity } from './splitQuantity.js';
 import { inCelsius } from './temperature.js';
@@ -21,7 +21,8 @@ export function commonPrefix(values: readonly number[], kind: QuantityKind): Pre
 
 /**
  * The number alone of a value in a column whose heading is `unitInPrefix(kind, prefix)`. Temperatures are in °C
- * throughout, fractions in percent, decibels with two decimals.
+ * throughout, fractions in percent,
+ * temperature coefficients in ppm/K, decibels with two decimals.
  * @param value in SI units
  * @param digits significant digits; digits before the mark are never rounded away
  * @returns `–` where the value isn't finite
@@ -38,5 +39,6 @@ export function formatInPrefix(value: number, kind: QuantityKind, prefix: Prefix
 export function unitInPrefix(kind: QuantityKind, prefix: Prefix): string {
   const { style, unit } = QUANTITIES[kind];
   if (style === 'temperature') return '°C';
+  if (style === 'perMillion') return PER_MILLION;
   return style === 'percent' ? '%' : prefix + unit;
 }

@@ -4,7 +4,7 @@ import { fromDisplayUnit, toDisplayUnit } from './displayUnit.js';
 import type { QuantityKind } from './kinds.js';
 import { parseUnit } from './parseUnit.js';
 
-const UNITS = ['nV/√Hz', 'pA/√Hz', 'MHz', 'pF', 'nA', 'mA', 'V', 'kΩ', '%', 'dB', 'K', ''];
+const UNITS = ['nV/√Hz', 'pA/√Hz', 'MHz', 'pF', 'nA', 'mA', 'V', 'kΩ', '%', 'dB', 'K', 'ppm/K', ''];
 
 describe('parseUnit', () => {
   it.each<[string, QuantityKind | null, number, number]>([
@@ -17,6 +17,10 @@ describe('parseUnit', () => {
     ['mA', 'current', 1e-3, 0],
     ['V', 'voltage', 1, 0],
     ['%', 'fraction', 0.01, 0],
+    ['ppm', 'fraction', 1e-6, 0],
+    ['ppm/K', 'temperatureCoefficient', 1e-6, 0],
+    ['ppm/°C', 'temperatureCoefficient', 1e-6, 0],
+    ['1/K', 'temperatureCoefficient', 1, 0],
     ['°C', 'temperature', 1, 273.15],
     ['K', 'temperature', 1, 0],
     ['F', 'capacitance', 1, 0],
@@ -27,6 +31,15 @@ describe('parseUnit', () => {
 
   it('takes F for degrees Fahrenheit where a temperature is expected', () =>
     expect(parseUnit('F', 'temperature')).toMatchObject({ kind: 'temperature', scale: 'fahrenheit' }));
+
+  it('takes K and °C for steps of temperature where a difference is expected', () => {
+    for (const unit of ['K', '°C'])
+      expect(parseUnit(unit, 'temperatureDifference')).toMatchObject({
+        kind: 'temperatureDifference',
+        factor: 1,
+        offset: 0,
+      });
+  });
 
   it.each(['mhz', 'furlong', 'nV/Hz', 'Pa', 'k', 'constructor', '__proto__'])('refuses “%s”', (text) =>
     expect(parseUnit(text)).toBeNull(),
@@ -41,6 +54,7 @@ describe('a display unit', () => {
     [4e-3, 'mA', 4],
     [36, 'V', 36],
     [2, '', 2],
+    [5e-5, 'ppm/K', 50],
     [233.15, '°C', -40],
     [293.15, '°F', 68],
   ])('shows %d in “%s” as %d, and back, without binary dust', (si, unit, shown) => {

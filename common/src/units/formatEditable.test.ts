@@ -19,6 +19,8 @@ describe('formatEditable', () => {
     [298.15, 'temperature', '25 °C'],
     [77, 'temperature', '77 K'],
     [0.01, 'fraction', '1 %'],
+    [5e-5, 'temperatureCoefficient', '50 ppm/K'],
+    [80, 'temperatureDifference', '80 K'],
     [1.5, 'decibel', '1.5 dB'],
     [12345, 'count', '12345'],
     [NaN, 'voltage', ''],

@@ -1,7 +1,7 @@
 import type { QuantityKind } from './kinds.js';
 import { shortestNumber } from './plainNumber.js';
 import { PREFIXES, prefixFor } from './prefixes.js';
-import { QUANTITIES } from './quantities.js';
+import { PER_MILLION, QUANTITIES } from './quantities.js';
 import { scientific, trimZeros, writeExponent } from './scientific.js';
 import { inCelsius, isCold } from './temperature.js';
 
@@ -18,9 +18,11 @@ export function formatEditable(value: number, kind: QuantityKind): string {
     case 'prefixed':
       return prefixed(value, unit);
     case 'plain':
-      return shortestNumber(value);
+      return `${shortestNumber(value)} ${unit}`.trim();
     case 'percent':
       return `${shortestNumber(value, -2)} %`;
+    case 'perMillion':
+      return `${shortestNumber(value, -6)} ${PER_MILLION}`;
     case 'decibel':
       return `${shortestNumber(value)} dB`;
     case 'temperature':

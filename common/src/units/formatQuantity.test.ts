@@ -33,6 +33,8 @@ describe('formatQuantity', () => {
     [273.15, 'temperature', '0 °C'],
     [0.01, 'fraction', '1.00 %'],
     [0.41, 'fraction', '41.0 %'],
+    [5e-5, 'temperatureCoefficient', '50.0 ppm/K'],
+    [80, 'temperatureDifference', '80 K'],
     [1.4717, 'decibel', '1.47 dB'],
     [-0.001, 'decibel', '0.00 dB'],
     [100, 'gain', '100'],

@@ -6,7 +6,8 @@ import { splitQuantity, type FormatOptions } from './splitQuantity.js';
  * (U+2009), the true minus (U+2212): `4.70 kΩ`, `67.8 nV`, `3.30 nV/√Hz`.
  *
  * Rounding carries to the next prefix (999.96 Ω is `1.00 kΩ`); beyond y…Y the exponent is written (`1.00e30 Ω`).
- * Temperatures in °C, below −100 °C in K; fractions in percent; decibels with two decimals; gain and count without
+ * Temperatures in °C, below −100 °C in K; fractions in percent; temperature
+ * coefficients in ppm/K; decibels with two decimals; gain and count without
  * prefix, thousands grouped from five digits on. Temperature, gain and count never end in decimal zeros.
  * @param value in SI units
  * @returns `–` where the value isn't finite

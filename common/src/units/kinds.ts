@@ -5,6 +5,8 @@ export type QuantityKind =
   | 'inductance'
   | 'frequency'
   | 'temperature'
+  | 'temperatureDifference'
+  | 'temperatureCoefficient'
   | 'voltage'
   | 'current'
   | 'voltageNoiseDensity'

@@ -1,7 +1,10 @@
 import type { QuantityKind } from './kinds.js';
 
-/** How a kind's values are written: with an SI prefix, as they stand, in °C or K, in percent, or in decibels. */
-export type QuantityStyle = 'prefixed' | 'plain' | 'temperature' | 'percent' | 'decibel';
+/** How a kind's values are written: with an SI prefix, as they stand, in °C or K, in percent, in ppm/K, or in decibels. */
+export type QuantityStyle = 'prefixed' | 'plain' | 'temperature' | 'percent' | 'perMillion' | 'decibel';
+
+/** The unit in which a temperature coefficient is written. */
+export const PER_MILLION = 'ppm/K';
 
 /** What parsing, formatting and their messages know of a kind of quantity. */
 export interface Quantity {
@@ -21,7 +24,7 @@ export interface Quantity {
 }
 
 /**
- * The fourteen kinds of quantity: SI unit, words and examples.
+ * The sixteen kinds of quantity: SI unit, words and examples.
  * Code letters of resistance and capacitance follow IEC 60062 (R K M G T and p n µ m F); the others are common
  * practice, no source (`3V3`, `2k5`).
  */
@@ -68,6 +71,22 @@ export const QUANTITIES: Record<QuantityKind, Quantity> = {
     example: '25 °C',
     alternative: '77 K (a number alone is in °C)',
     style: 'temperature',
+    codeLetters: '',
+  },
+  temperatureDifference: {
+    unit: 'K',
+    label: 'temperature difference',
+    noun: 'a temperature difference',
+    example: '80 K',
+    style: 'plain',
+    codeLetters: '',
+  },
+  temperatureCoefficient: {
+    unit: '1/K',
+    label: 'temperature coefficient',
+    noun: 'a temperature coefficient',
+    example: '50 ppm/K',
+    style: 'perMillion',
     codeLetters: '',
   },
   voltage: {

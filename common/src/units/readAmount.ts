@@ -6,7 +6,7 @@ export interface Amount {
   unitText: string;
 }
 
-const NUMBER = /^([+-]?) ?((?:\d|[.,]\d)(?:[\d.,'’]| (?=\d))*)(?:e([+-]?\d+))?/i;
+const NUMBER = /^([+-]?) ?((?:\d|[.,]\d)(?:[\d.,'’]| (?=\d(?!\/)))*)(?:e([+-]?\d+))?/i;
 
 /**
  * Reads the number that normalised text begins with; null where there is none or its marks contradict each other.

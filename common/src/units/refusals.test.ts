@@ -13,6 +13,11 @@ describe('parseQuantity refuses', () => {
       'resistance',
       '“4x7” is not a resistance: a number with a unit was expected, such as 4.7 kΩ or 4k7',
     ],
+    [
+      '50 ppm',
+      'temperatureCoefficient',
+      '“50 ppm” is a fraction; a temperature coefficient was expected, such as 50 ppm/K',
+    ],
     ['5 V', 'resistance', '“5 V” is a voltage; a resistance was expected, such as 4.7 kΩ'],
     [
       '3.3 nV',
@@ -47,6 +52,7 @@ describe('parseQuantity refuses', () => {
 
   it.each<[string, QuantityKind]>([
     ['10k', 'temperature'],
+    ['10k', 'temperatureDifference'],
     ['10k', 'count'],
     ['10m', 'fraction'],
     ['10m', 'decibel'],

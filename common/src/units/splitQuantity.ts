@@ -1,7 +1,7 @@
 import type { QuantityKind } from './kinds.js';
 import { plainNumber } from './plainNumber.js';
 import { PREFIXES, prefixFor } from './prefixes.js';
-import { QUANTITIES } from './quantities.js';
+import { PER_MILLION, QUANTITIES } from './quantities.js';
 import { scientific, trimZeros, writeExponent, writeFixed, writePlain } from './scientific.js';
 import { inCelsius, isCold } from './temperature.js';
 
@@ -38,6 +38,8 @@ function written(value: number, kind: QuantityKind, digits: number): QuantityTex
       return { number: trimZeros(plainNumber(value, digits)), unit };
     case 'percent':
       return { number: plainNumber(value, digits, -2), unit: '%' };
+    case 'perMillion':
+      return { number: plainNumber(value, digits, -6), unit: PER_MILLION };
     case 'decibel':
       return { number: writeFixed(value, digits - 1), unit };
     case 'temperature':

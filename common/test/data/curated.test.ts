@@ -4,14 +4,15 @@ import {
   INPUT_TYPES,
   LIFECYCLES,
   normalisePartKey,
+  OP_AMP_CATALOGUE,
   type Amplifier,
   type InputType,
   type OpAmpPart,
 } from '../../src/parts/index.js';
-import { readParts, readRows } from './readCsv.js';
+import { readOpAmps, readRows } from './readCsv.js';
 
 const PATH = 'curated/op-amps.csv';
-const parts = readParts(PATH);
+const parts = readOpAmps(PATH);
 const ofType = (type: InputType) => parts.filter(({ amplifier }) => amplifier.inputType === type);
 const partNumbers = (which: (part: OpAmpPart) => boolean) =>
   parts.filter(which).map(({ partNumber }) => partNumber);
@@ -20,7 +21,7 @@ const overShotNoise = ({ currentNoise, inputBiasCurrent }: Amplifier) =>
 
 describe('the curated library', () => {
   it('reads without an error in any row', () => {
-    expect(readRows(PATH).filter(({ ok }) => !ok)).toEqual([]);
+    expect(readRows(OP_AMP_CATALOGUE, PATH).filter(({ ok }) => !ok)).toEqual([]);
   });
 
   it('has at least 180 op-amps of eight makers, with every input type, lifecycle and 1 to 4 channels', () => {

@@ -2,10 +2,10 @@ import { describe, expect, it } from 'vitest';
 import { rankAmplifiers, type Ranking } from '../../src/noise/index.js';
 import type { Amplifier } from '../../src/parts/index.js';
 import { libraryColumns } from './libraryColumns.js';
-import { readParts } from './readCsv.js';
+import { readOpAmps } from './readCsv.js';
 import { tarnfield } from './tarnfield.js';
 
-const parts = [readParts('curated/op-amps.csv'), readParts('demo/tarnfield-op-amps.csv')];
+const parts = [readOpAmps('curated/op-amps.csv'), readOpAmps('demo/tarnfield-op-amps.csv')];
 const libraries = parts.map(libraryColumns);
 
 function rank(name: string): Ranking {

@@ -6,7 +6,7 @@ const PANELS_PER_DECADE = 60;
 /** Beyond the −3 dB frequency, where a first-order low-pass leaves 1e-7 of white noise. */
 const TAIL_DECADES = 7;
 const TOLERANCE = 1e-4;
-const DEEPEST = 40;
+const DEEPEST = 20;
 
 type Powers = readonly number[];
 
@@ -73,7 +73,9 @@ function addPanel(
   const fine = (k: number) =>
     simpson((end - start) / 4, atStart, atLeft, atMiddle, k) +
     simpson((end - start) / 4, atMiddle, atRight, atEnd, k);
-  const settled = sum.every((_, k) => Math.abs(fine(k) - coarse(k)) <= TOLERANCE * fine(k));
+  const settled = sum.every(
+    (_, k) => Math.abs(fine(k) - coarse(k)) <= TOLERANCE * Math.max(fine(k), sum[k] / 1000),
+  );
   if (settled || depth === DEEPEST) sum.forEach((_, k) => (sum[k] += fine(k)));
   else {
     addPanel(integrand, start, middle, atStart, atLeft, atMiddle, sum, depth + 1);

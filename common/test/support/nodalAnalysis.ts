@@ -1,5 +1,10 @@
 import type { OperatingConditions } from '../../src/conditions/index.js';
-import { CONTRIBUTORS, shotPowerDensity, thermalPowerDensity, type Contributor } from '../../src/noise/index.js';
+import {
+  CONTRIBUTORS,
+  shotPowerDensity,
+  thermalPowerDensity,
+  type Contributor,
+} from '../../src/noise/index.js';
 import { solveTransposed, type ComplexMatrix } from './complexMatrix.js';
 
 /** An amplifier with nothing unknown but, perhaps, its gain–bandwidth product. */

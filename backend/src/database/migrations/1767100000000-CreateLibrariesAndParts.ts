@@ -1,7 +1,7 @@
 import type { MigrationInterface, QueryRunner } from 'typeorm';
 
 const TABLES = [
-  `CREATE TABLE libraries (
+  `CREATE TABLE IF NOT EXISTS libraries (
     id INT UNSIGNED NOT NULL AUTO_INCREMENT,
     team_id INT UNSIGNED NULL,
     revision INT UNSIGNED NOT NULL DEFAULT 1,
@@ -9,7 +9,7 @@ const TABLES = [
     PRIMARY KEY (id),
     CONSTRAINT libraries_team_key FOREIGN KEY (team_id) REFERENCES teams (id) ON DELETE CASCADE ON UPDATE NO ACTION
   ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_unicode_ci`,
-  `CREATE TABLE parts (
+  `CREATE TABLE IF NOT EXISTS parts (
     id INT UNSIGNED NOT NULL AUTO_INCREMENT,
     library_id INT UNSIGNED NOT NULL,
     kind VARCHAR(20) NOT NULL,
@@ -30,7 +30,7 @@ const TABLES = [
     CONSTRAINT parts_library FOREIGN KEY (library_id) REFERENCES libraries (id) ON DELETE CASCADE ON UPDATE NO ACTION,
     CONSTRAINT parts_updated_by FOREIGN KEY (updated_by) REFERENCES users (id) ON DELETE SET NULL ON UPDATE NO ACTION
   ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_unicode_ci`,
-  `CREATE TABLE op_amps (
+  `CREATE TABLE IF NOT EXISTS op_amps (
     part_id INT UNSIGNED NOT NULL,
     input_type VARCHAR(20) NULL,
     channels DOUBLE NOT NULL,

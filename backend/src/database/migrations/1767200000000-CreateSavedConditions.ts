@@ -4,7 +4,7 @@ export class CreateSavedConditions1767200000000 implements MigrationInterface {
   name = 'CreateSavedConditions1767200000000';
 
   async up(runner: QueryRunner): Promise<void> {
-    await runner.query(`CREATE TABLE saved_conditions (
+    await runner.query(`CREATE TABLE IF NOT EXISTS saved_conditions (
       id INT UNSIGNED NOT NULL AUTO_INCREMENT,
       team_id INT UNSIGNED NOT NULL,
       name VARCHAR(120) NOT NULL,

@@ -1,10 +1,12 @@
 import { CreateTeamsAndMembers1767000000000 } from './1767000000000-CreateTeamsAndMembers.js';
 import { CreateLibrariesAndParts1767100000000 } from './1767100000000-CreateLibrariesAndParts.js';
 import { CreateSavedConditions1767200000000 } from './1767200000000-CreateSavedConditions.js';
+import { CreateResistors1767300000000 } from './1767300000000-CreateResistors.js';
 
 /** All migrations; they run in the order of the time in their names. */
 export const MIGRATIONS = [
   CreateTeamsAndMembers1767000000000,
   CreateLibrariesAndParts1767100000000,
   CreateSavedConditions1767200000000,
+  CreateResistors1767300000000,
 ];

@@ -1,5 +1,4 @@
-import { type EntityManager, IsNull } from 'typeorm';
-import { Library } from '../../library/entities/library.entity.js';
+import type { EntityManager } from 'typeorm';
 import { Team } from '../../teams/entities/team.entity.js';
 import { seedConditions } from './conditions-seed.js';
 import { readDemoData } from './demo-data.js';
@@ -8,11 +7,7 @@ import { seedTeam } from './seed-team.js';
 
 /** Fills what is empty and says in one line what it did; the demo team is for trying out, not for production. */
 export async function seed(manager: EntityManager, withDemo: boolean): Promise<string> {
-  const done: string[] = [];
-  if (!(await manager.existsBy(Library, { teamId: IsNull() }))) {
-    await seedCuratedLibrary(manager);
-    done.push('curated library');
-  }
+  const done = await seedCuratedLibrary(manager);
   if (withDemo && !(await manager.exists(Team))) {
     const demo = await readDemoData();
     const team = await seedTeam(manager, demo);

@@ -1,24 +1,9 @@
-import {
-  type Amplifier,
-  type AmplifierOrigins,
-  canBeUnknown,
-  OP_AMP_PARAMETERS,
-  type OpAmpParameterKey,
-} from '@roothertz/common/parts';
+import { type Amplifier, type AmplifierOrigins, OP_AMP_CATALOGUE } from '@roothertz/common/parts';
 import { Column, Entity, JoinColumn, OneToOne, PrimaryColumn, type Relation } from 'typeorm';
+import { parameterColumns } from './parameter-columns.js';
 import { Part } from './part.entity.js';
 
-/** A column for each parameter of the catalogue, in SI units. */
-class AmplifierColumns {}
-Column({ name: 'input_type', type: 'varchar', length: 20, nullable: true })(
-  AmplifierColumns.prototype,
-  'inputType',
-);
-for (const parameter of OP_AMP_PARAMETERS)
-  Column({ name: parameterColumn(parameter.key), type: 'double', nullable: canBeUnknown(parameter) })(
-    AmplifierColumns.prototype,
-    parameter.key,
-  );
+const AmplifierColumns = parameterColumns(OP_AMP_CATALOGUE);
 
 @Entity('op_amps')
 export class OpAmp {
@@ -34,9 +19,4 @@ export class OpAmp {
 
   @Column({ type: 'json' })
   origins: AmplifierOrigins;
-}
-
-/** The database's name of a parameter's column: `voltageNoise` → `voltage_noise`. */
-export function parameterColumn(key: OpAmpParameterKey): string {
-  return key.replace(/[A-Z]/g, (letter) => `_${letter.toLowerCase()}`);
 }

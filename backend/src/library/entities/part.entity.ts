@@ -1,9 +1,7 @@
-import type { Approval, Lifecycle } from '@roothertz/common/parts';
+import type { Approval, Lifecycle, PartKind } from '@roothertz/common/parts';
 import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryGeneratedColumn, type Relation } from 'typeorm';
 import { User } from '../../users/entities/user.entity.js';
 import { Library } from './library.entity.js';
-
-export type PartKind = 'op-amp';
 
 @Entity('parts')
 @Index('parts_key', ['libraryId', 'normalisedKey'], { unique: true })

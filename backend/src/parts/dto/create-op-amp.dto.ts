@@ -1,32 +1,11 @@
-import { type Approval, APPROVALS, type Lifecycle, LIFECYCLES } from '@roothertz/common/parts';
-import { AmplifierDto } from '../../shared/op-amps/amplifier.dto.js';
-import { OriginsDto } from '../../shared/op-amps/origins.dto.js';
+import { AmplifierDto, AmplifierOriginsDto } from '../../shared/parts/amplifier.dto.js';
 import { Nested } from '../../shared/validation/nested.decorator.js';
-import { Option } from '../../shared/validation/option.decorator.js';
-import { PartText } from '../part-text.decorator.js';
+import { CreatePartDto } from './create-part.dto.js';
 
-export class CreateOpAmpDto {
-  @PartText('manufacturer')
-  manufacturer: string;
-
-  @PartText('partNumber')
-  partNumber: string;
-
-  @PartText('description', { optional: true })
-  description: string = '';
-
-  @PartText('package', { optional: true })
-  package: string = '';
-
-  @Option(LIFECYCLES, { optional: true })
-  lifecycle: Lifecycle = 'active';
-
-  @Option(APPROVALS, { optional: true })
-  approval: Approval = 'approved';
-
+export class CreateOpAmpDto extends CreatePartDto {
   @Nested(() => AmplifierDto)
   amplifier: AmplifierDto;
 
-  @Nested(() => OriginsDto, { optional: true })
-  origins: OriginsDto = new OriginsDto();
+  @Nested(() => AmplifierOriginsDto, { optional: true })
+  origins: AmplifierOriginsDto = new AmplifierOriginsDto();
 }

@@ -1,28 +1,8 @@
-import {
-  type Approval,
-  APPROVALS,
-  INPUT_TYPES,
-  type InputType,
-  LIBRARIES,
-  type Library,
-  type Lifecycle,
-  LIFECYCLES,
-} from '@roothertz/common/parts';
-import { ListQueryDto } from '../../shared/list/list-query.dto.js';
+import { INPUT_TYPES, type InputType } from '@roothertz/common/parts';
 import { Options } from '../../shared/validation/option.decorator.js';
+import { IN_QUERY, ListPartsDto } from './list-parts.dto.js';
 
-const IN_QUERY = { optional: true, inQuery: true };
-
-export class ListOpAmpsDto extends ListQueryDto {
-  @Options(LIBRARIES, IN_QUERY)
-  library?: Library[];
-
-  @Options(LIFECYCLES, IN_QUERY)
-  lifecycle?: Lifecycle[];
-
-  @Options(APPROVALS, IN_QUERY)
-  approval?: Approval[];
-
+export class ListOpAmpsDto extends ListPartsDto {
   @Options(INPUT_TYPES, IN_QUERY)
   inputType?: InputType[];
 }

@@ -1,5 +1,5 @@
 import { OperatingConditionsDto } from '../../shared/conditions/operating-conditions.dto.js';
-import { AmplifierDto } from '../../shared/op-amps/amplifier.dto.js';
+import { AmplifierDto } from '../../shared/parts/amplifier.dto.js';
 import { Nested } from '../../shared/validation/nested.decorator.js';
 
 export class EvaluateStageDto {

@@ -10,8 +10,7 @@ import {
   LIFECYCLES,
 } from '@roothertz/common/parts';
 import { ApiProperty } from '@nestjs/swagger';
-import { AmplifierResponseDto } from '../../shared/op-amps/amplifier.dto.js';
-import { OriginsDto } from '../../shared/op-amps/origins.dto.js';
+import { AmplifierOriginsDto, AmplifierResponseDto } from '../../shared/parts/amplifier.dto.js';
 import { SourceFloorDto, StageFiguresDto } from './stage-figures.dto.js';
 
 export class PartNameDto {
@@ -41,7 +40,7 @@ export class RankedPartDto extends PartNameDto {
   @ApiProperty({ type: AmplifierResponseDto })
   amplifier: Amplifier;
 
-  @ApiProperty({ type: OriginsDto })
+  @ApiProperty({ type: AmplifierOriginsDto })
   origins: AmplifierOrigins;
 }
 

@@ -1,6 +1,8 @@
 export * from './columns.js';
+export type { CheapestPart } from './cheapest.js';
 export * from './exclusionDetail.js';
 export {
+  PRICED_RANKING_SORTS,
   rankAmplifiers,
   RANKING_SORTS,
   type RankedPart,

@@ -67,6 +67,51 @@ describe('rankAmplifiers', () => {
     ]);
   });
 
+  describe('with prices', () => {
+    const parts = [
+      [{ voltageNoise: 1e-9 }, { voltageNoise: 1.01e-9 }, { voltageNoise: 9e-9 }],
+      [{ voltageNoise: 1.02e-9 }, { voltageNoise: 1.01e-9 }],
+    ];
+    const prices = [Float64Array.of(8, NaN, 0.5), Float64Array.of(2, 2)];
+
+    it('sorts by price, with parts that have none last, upwards and downwards', () => {
+      const sorted = (descending: boolean) => places(rank(parts, { sort: 'unitPrice', descending, prices }));
+      const [first, second, third, without] = [
+        [0, 2],
+        [1, 0],
+        [1, 1],
+        [0, 0],
+      ];
+      expect(sorted(false)).toEqual([first, second, third, without, [0, 1]]);
+      expect(sorted(true)).toEqual([without, second, third, first, [0, 1]]);
+    });
+
+    it('names the cheapest part of the quiet set and how far it lies above the quietest', () => {
+      const { cheapest, items } = rank(parts, { prices });
+      expect(cheapest).toMatchObject({ library: 1, row: 1 });
+      const total = items.find(({ library, row }) => library === 1 && row === 1)!.figures.inputNoiseRms;
+      const inDecibels = 20 * Math.log10(total / items[0].figures.inputNoiseRms);
+      expect(cheapest!.aboveQuietest).toBeCloseTo(inDecibels, 12);
+      expect(inDecibels).toBeGreaterThan(0);
+    });
+
+    it('names none where no part of the quiet set has a price', () => {
+      expect(rank(parts).cheapest).toBeNull();
+      const onlyLoud = [Float64Array.of(NaN, NaN, 0.5), Float64Array.of(NaN, NaN)];
+      expect(rank(parts, { prices: onlyLoud }).cheapest).toBeNull();
+    });
+
+    it('leaves the order alone where nothing has a price', () => {
+      expect(places(rank(parts, { sort: 'unitPrice' }))).toEqual([
+        [0, 0],
+        [0, 1],
+        [0, 2],
+        [1, 0],
+        [1, 1],
+      ]);
+    });
+  });
+
   it('says which parts meet the target', () => {
     const libraries = [[{ voltageNoise: 1e-9 }, { voltageNoise: 20e-9 }]];
     const meets = (target: RankingQuery['target']) =>

@@ -8,6 +8,7 @@ import { stageCautions } from '../stageCautions.js';
 import { figuresFrom, floorFrom } from '../stageFigures.js';
 import { amplifierAt, type AmplifierColumns } from './columns.js';
 import { findContenders } from './contenders.js';
+import { findCheapest, type CheapestPart } from './cheapest.js';
 import { countQuietSet, findQuietest, isInQuietSet, type Quietest } from './quietSet.js';
 import { scoreRows, type Scores } from './scores.js';
 import { sift, type ExcludedPart, type PartPlace } from './sift.js';
@@ -21,7 +22,10 @@ export const RANKING_SORTS = [
   'aboveFloor',
   'closedLoopBandwidth',
 ] as const;
-export type RankingSort = (typeof RANKING_SORTS)[number];
+
+/** What a ranking of parts with prices can be sorted by. */
+export const PRICED_RANKING_SORTS = [...RANKING_SORTS, 'unitPrice'] as const;
+export type RankingSort = (typeof PRICED_RANKING_SORTS)[number];
 
 /** What is to be ranked, and which part of the answer is wanted. */
 export interface RankingQuery {
@@ -32,6 +36,8 @@ export interface RankingQuery {
   descending: boolean;
   limit: number;
   offset: number;
+  /** what each row of each library costs, in one currency; NaN = without a price */
+  prices?: readonly Float64Array[];
 }
 
 export interface RankedPart extends PartPlace {
@@ -48,6 +54,8 @@ export interface Ranking {
   excluded: ExcludedPart[];
   floor: SourceFloor;
   quietSetTotal: number;
+  /** the cheapest part of the quiet set; null where none of it has a price */
+  cheapest: CheapestPart | null;
   items: RankedPart[];
 }
 
@@ -79,6 +87,7 @@ export function rankAmplifiers(query: RankingQuery, libraries: readonly Amplifie
     excluded,
     floor: floorFrom(conditions, model),
     quietSetTotal: countQuietSet(scores, quietest),
+    cheapest: findCheapest(scores, quietest, query.prices),
     items: Array.from(page, (place, index) =>
       rankedPart(query, model, libraries, scores, quietest!, places(place), query.offset + index + 1),
     ),
@@ -110,15 +119,24 @@ function sortKeys(
   const sign = query.descending ? -1 : 1;
   let joined = 0;
   scores.forEach((scored, library) => {
-    for (let position = 0; position < scored.rows.length; position++) {
-      const value =
-        query.sort === 'inputNoiseRms'
-          ? scored.inputNoiseRms[position]
-          : figuresAt(query.conditions, model, libraries[library], scored, position)[query.sort];
-      keys[joined++] = value === null ? NaN : sign * value;
-    }
+    const valueAt = sortValue(query, model, libraries[library], scored, query.prices?.[library]);
+    for (let position = 0; position < scored.rows.length; position++)
+      keys[joined++] = sign * (valueAt(position) ?? NaN);
   });
   return keys;
+}
+
+/** The value that a position of a library's scores is sorted by; null or NaN where there is none. */
+function sortValue(
+  { sort, conditions }: RankingQuery,
+  model: StageModel,
+  columns: AmplifierColumns,
+  scores: Scores,
+  prices: Float64Array | undefined,
+): (position: number) => number | null {
+  if (sort === 'inputNoiseRms') return (position) => scores.inputNoiseRms[position];
+  if (sort === 'unitPrice') return (position) => prices?.[scores.rows[position]] ?? null;
+  return (position) => figuresAt(conditions, model, columns, scores, position)[sort];
 }
 
 function figuresAt(

@@ -119,14 +119,23 @@ function exclusion(
   filter: ResistorFilter,
   resistor: LibraryResistor,
 ): ResistorExclusionReason | null {
-  const { lifecycle, approval, technology, powerRating, resistance } = resistor;
+  const { powerRating, resistance } = resistor;
+  const filtered = resistorFilterExclusion(filter, resistor);
+  if (filtered) return filtered;
+  return powerRating !== null && dcVoltage ** 2 / resistance > powerRating ? 'over-rating' : null;
+}
+
+/** Why the filter alone leaves a resistor out, or null where it may be used. */
+export function resistorFilterExclusion(
+  filter: ResistorFilter,
+  { lifecycle, approval, technology, package: name }: LibraryResistor,
+): ResistorExclusionReason | null {
   if (filter.lifecycle?.length && !filter.lifecycle.includes(lifecycle)) return 'lifecycle';
   if (filter.approval?.length && !filter.approval.includes(approval)) return 'approval';
   if (filter.technology?.length && (!technology || !filter.technology.includes(technology)))
     return 'technology';
   const packageName = filter.package?.trim().toLowerCase() ?? '';
-  if (!resistor.package.toLowerCase().includes(packageName)) return 'package';
-  return powerRating !== null && dcVoltage ** 2 / resistance > powerRating ? 'over-rating' : null;
+  return name.toLowerCase().includes(packageName) ? null : 'package';
 }
 
 function detailOf(

@@ -30,7 +30,7 @@ function checkLimits({ stage: { network } }: SoughtConditions): FieldError[] {
 
 /** The stage at the wanted gain must be one that can be computed; its network isn't the asker's to state. */
 function checkNominal(conditions: SoughtConditions, filter?: PartFilter): FieldError[] {
-  const { outputVoltage: _, ...stage } = conditions.stage;
+  const stage = { ...conditions.stage, outputVoltage: undefined };
   const nominal = withNetwork({ ...conditions, stage }, nominalNetwork(conditions));
   return checkConditions({ conditions: nominal, filter }).filter(
     ({ field }) => field !== 'conditions.stage.gainResistance',

@@ -57,17 +57,24 @@ export interface Network {
 
 /** The operating conditions of a sought stage with one network. */
 export function withNetwork({ stage, ...rest }: SoughtConditions, network: Network): OperatingConditions {
-  const { gainTolerance: _, parallelMaximum: __, network: limits, ...wanted } = stage;
+  const { topology, loadResistance, biasResistance, feedbackCapacitance, outputVoltage } = stage;
   const { gain, gainResistance, feedbackResistance, gainNoiseIndex, feedbackNoiseIndex } = network;
-  const values =
-    stage.topology === 'transimpedance'
-      ? { feedbackResistance }
-      : { gain, ...(gain !== 1 && { gainResistance }) };
-  const { minimumTotal } = limits;
+  const pair = { gain, ...(gain !== 1 && { gainResistance }) };
   return {
     ...rest,
-    stage: { ...wanted, ...values, gainNoiseIndex, feedbackNoiseIndex, network: { minimumTotal } },
+    stage: {
+      topology,
+      ...(topology === 'transimpedance' ? { feedbackResistance, feedbackCapacitance } : pair),
+      ...stated({ loadResistance, biasResistance, outputVoltage, gainNoiseIndex, feedbackNoiseIndex }),
+      network: { minimumTotal: stage.network.minimumTotal },
+    },
   };
+}
+
+function stated<Fields extends object>(fields: Fields): Partial<Fields> {
+  return Object.fromEntries(
+    Object.entries(fields).filter(([, value]) => value !== undefined),
+  ) as Partial<Fields>;
 }
 
 /** A network that gives just the wanted gain, for what doesn't depend on its values. */

@@ -5,7 +5,7 @@ export const STAGE_SEARCH_FIELDS = {
   'conditions.stage.gainTolerance': {
     label: 'gain tolerance',
     kind: 'fraction',
-    bounds: { from: 0, to: 0.5 },
+    bounds: { from: 0, to: 0.2 },
     help: 'How far the gain of two library values may lie from the wanted one.',
   },
   'conditions.stage.network.maximumTotal': {

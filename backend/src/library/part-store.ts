@@ -1,0 +1,110 @@
+import type { LibraryPart } from '@roothertz/common/parts';
+import type { DataSource, EntityManager } from 'typeorm';
+import type { Caller } from '../shared/access/caller.js';
+import { DomainError } from '../shared/errors/domain-error.js';
+import { isDuplicateEntry } from '../shared/errors/duplicate-entry.js';
+import type { List } from '../shared/list/list-response.js';
+import { Library } from './entities/library.entity.js';
+import { Part } from './entities/part.entity.js';
+import type { LibraryService } from './library.service.js';
+import { type PartRecord, toPartRecord } from './part-record.js';
+import { insertParts, updatePart } from './part-rows.js';
+import { filterParts, type PartQuery, selectParts, sortParts } from './part-select.js';
+import type { PartTable } from './part-tables.js';
+
+/** Keeps the parts of a kind: each change bumps its library's revision in the same transaction. */
+export class PartStore<Kind extends LibraryPart> {
+  constructor(
+    readonly table: PartTable<Kind>,
+    private readonly dataSource: DataSource,
+    private readonly libraries: LibraryService,
+  ) {}
+
+  async list(caller: Caller, query: PartQuery): Promise<List<PartRecord<Kind>>> {
+    const { catalogue } = this.table;
+    const select = filterParts(selectParts(this.dataSource.manager, this.table, caller), catalogue, query);
+    const [rows, total] = await sortParts(select, catalogue, query.sort)
+      .limit(query.limit)
+      .offset(query.offset)
+      .getManyAndCount();
+    return { items: rows.map((row) => toPartRecord<Kind>(catalogue, row)), total };
+  }
+
+  find(caller: Caller, id: number | null): Promise<PartRecord<Kind>> {
+    return this.findReadable(this.dataSource.manager, caller, id);
+  }
+
+  insert(caller: Caller, part: Kind): Promise<PartRecord<Kind>> {
+    return this.changeLibrary(caller, async (manager, libraryId) => {
+      const [id] = await insertParts(manager, this.table, libraryId, [part], caller.userId);
+      return this.findReadable(manager, caller, id);
+    });
+  }
+
+  update(
+    caller: Caller,
+    id: number | null,
+    version: number,
+    change: (current: PartRecord<Kind>) => Kind,
+  ): Promise<PartRecord<Kind>> {
+    return this.changeLibrary(caller, async (manager) => {
+      const current = await this.findChangeable(manager, caller, id, version);
+      await updatePart(manager, this.table, current, change(current), caller.userId);
+      return this.findReadable(manager, caller, id);
+    });
+  }
+
+  async remove(caller: Caller, id: number | null, version: number): Promise<void> {
+    await this.changeLibrary(caller, async (manager) => {
+      const current = await this.findChangeable(manager, caller, id, version);
+      await manager.delete(Part, { id: current.id });
+    });
+  }
+
+  /** The bump comes first: its lock on the library lets one writer after the other see what is there. */
+  private async changeLibrary<Result>(
+    caller: Caller,
+    change: (manager: EntityManager, libraryId: number) => Promise<Result>,
+  ): Promise<Result> {
+    const libraryId = await this.libraries.editableLibrary(caller);
+    return this.dataSource
+      .transaction(async (manager) => {
+        await manager.increment(Library, { id: libraryId }, 'revision', 1);
+        return change(manager, libraryId);
+      })
+      .catch(refuseDuplicate);
+  }
+
+  private async findReadable(
+    manager: EntityManager,
+    caller: Caller,
+    id: number | null,
+  ): Promise<PartRecord<Kind>> {
+    const select = selectParts(manager, this.table, caller);
+    const row = id === null ? null : await select.andWhere({ partId: id }).getOne();
+    if (row === null) throw new DomainError('part.not-found', 'There is no such part in your libraries.');
+    return toPartRecord<Kind>(this.table.catalogue, row);
+  }
+
+  private async findChangeable(
+    manager: EntityManager,
+    caller: Caller,
+    id: number | null,
+    version: number,
+  ): Promise<PartRecord<Kind>> {
+    const current = await this.findReadable(manager, caller, id);
+    if (current.library === 'curated')
+      throw new DomainError('part.curated', 'Curated parts are shared by all teams and can’t be changed.');
+    if (current.version !== version)
+      throw new DomainError('part.stale', 'Somebody has changed this part meanwhile: load it again.');
+    return current;
+  }
+}
+
+function refuseDuplicate(error: unknown): never {
+  if (!isDuplicateEntry(error)) throw error;
+  const message = 'part number: the library has this part of this manufacturer already';
+  throw new DomainError('part.duplicate', 'The library has this part already.', {
+    errors: [{ field: 'partNumber', message }],
+  });
+}

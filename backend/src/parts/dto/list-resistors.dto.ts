@@ -1,0 +1,27 @@
+import {
+  type QuantityField,
+  RESISTOR_PARAMETERS,
+  TECHNOLOGIES,
+  type Technology,
+} from '@roothertz/common/parts';
+import { Type } from 'class-transformer';
+import { Options } from '../../shared/validation/option.decorator.js';
+import { Quantity } from '../../shared/validation/quantity.decorator.js';
+import { IN_QUERY, ListPartsDto } from './list-parts.dto.js';
+
+const RESISTANCE: QuantityField = RESISTOR_PARAMETERS[0];
+const FROM = { ...RESISTANCE, label: 'resistance from', help: 'The least value that the list holds.' };
+const TO = { ...RESISTANCE, label: 'resistance to', help: 'The greatest value that the list holds.' };
+
+export class ListResistorsDto extends ListPartsDto {
+  @Options(TECHNOLOGIES, IN_QUERY)
+  technology?: Technology[];
+
+  @Type(() => Number)
+  @Quantity(FROM, { optional: true })
+  resistanceFrom?: number;
+
+  @Type(() => Number)
+  @Quantity(TO, { optional: true })
+  resistanceTo?: number;
+}

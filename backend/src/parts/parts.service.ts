@@ -1,0 +1,56 @@
+import type { Library, LibraryPart, PartFields } from '@roothertz/common/parts';
+import type { PartRecord } from '../library/part-record.js';
+import { type PartQuery, partSorts } from '../library/part-select.js';
+import type { PartStore } from '../library/part-store.js';
+import type { Caller } from '../shared/access/caller.js';
+import { readId } from '../shared/ids/read-id.js';
+import type { List } from '../shared/list/list-response.js';
+import { parseSort } from '../shared/list/sort.js';
+import type { ListPartsDto } from './dto/list-parts.dto.js';
+import type { UpdatePartDto } from './dto/update-part.dto.js';
+import { changedPart, newPart } from './part-draft.js';
+
+type Answer<Kind extends LibraryPart> = Kind & {
+  id: string;
+  library: Library;
+  version: number;
+  updatedAt: string;
+};
+
+/** What the API does with parts of a kind. */
+export class PartsService<Kind extends LibraryPart> {
+  constructor(private readonly store: PartStore<Kind>) {}
+
+  async find(caller: Caller, id: string): Promise<Answer<Kind>> {
+    return toAnswer(await this.store.find(caller, readId(id)));
+  }
+
+  async create(caller: Caller, dto: PartFields & Pick<Kind, 'origins'>): Promise<Answer<Kind>> {
+    return toAnswer(await this.store.insert(caller, newPart(this.store.table.catalogue, dto)));
+  }
+
+  async update(caller: Caller, id: string, { version, ...change }: UpdatePartDto): Promise<Answer<Kind>> {
+    const record = await this.store.update(caller, readId(id), version, (current) =>
+      changedPart(this.store.table.catalogue, current as Kind, change),
+    );
+    return toAnswer(record);
+  }
+
+  remove(caller: Caller, id: string, version: number): Promise<void> {
+    return this.store.remove(caller, readId(id), version);
+  }
+
+  protected async listParts(
+    caller: Caller,
+    query: ListPartsDto,
+    narrowed: Pick<PartQuery, 'choice' | 'range'>,
+  ): Promise<List<Answer<Kind>>> {
+    const sort = parseSort(query.sort ?? 'manufacturer', partSorts(this.store.table.catalogue));
+    const { items, total } = await this.store.list(caller, { ...query, ...narrowed, sort });
+    return { items: items.map((record) => toAnswer(record)), total };
+  }
+}
+
+function toAnswer<Kind extends LibraryPart>(record: PartRecord<Kind>): Answer<Kind> {
+  return { ...record, id: String(record.id), updatedAt: record.updatedAt.toISOString() };
+}

@@ -1,0 +1,67 @@
+import { Body, Controller, Delete, Get, HttpCode, Param, Patch, Post, Query } from '@nestjs/common';
+import { ApiCreatedResponse, ApiNoContentResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
+import { Access } from '../shared/access/access.decorator.js';
+import type { Caller as CallerOfRequest } from '../shared/access/caller.js';
+import { Caller } from '../shared/access/caller.decorator.js';
+import { VersionQueryDto } from '../shared/list/version-query.dto.js';
+import { CreateResistorDto } from './dto/create-resistor.dto.js';
+import { ListResistorsDto } from './dto/list-resistors.dto.js';
+import { ResistorListDto, ResistorResponseDto } from './dto/resistor-response.dto.js';
+import { UpdateResistorDto } from './dto/update-resistor.dto.js';
+import { ResistorsService } from './resistors.service.js';
+
+@ApiTags('resistors')
+@Controller('resistors')
+export class ResistorsController {
+  constructor(private readonly resistors: ResistorsService) {}
+
+  @Get()
+  @Access('parts.read')
+  @ApiOkResponse({ type: ResistorListDto })
+  listResistors(
+    @Caller() caller: CallerOfRequest,
+    @Query() query: ListResistorsDto,
+  ): Promise<ResistorListDto> {
+    return this.resistors.list(caller, query);
+  }
+
+  @Post()
+  @Access('parts.edit')
+  @ApiCreatedResponse({ type: ResistorResponseDto })
+  createResistor(
+    @Caller() caller: CallerOfRequest,
+    @Body() dto: CreateResistorDto,
+  ): Promise<ResistorResponseDto> {
+    return this.resistors.create(caller, dto);
+  }
+
+  @Get(':id')
+  @Access('parts.read')
+  @ApiOkResponse({ type: ResistorResponseDto })
+  getResistor(@Caller() caller: CallerOfRequest, @Param('id') id: string): Promise<ResistorResponseDto> {
+    return this.resistors.find(caller, id);
+  }
+
+  @Patch(':id')
+  @Access('parts.edit')
+  @ApiOkResponse({ type: ResistorResponseDto })
+  updateResistor(
+    @Caller() caller: CallerOfRequest,
+    @Param('id') id: string,
+    @Body() dto: UpdateResistorDto,
+  ): Promise<ResistorResponseDto> {
+    return this.resistors.update(caller, id, dto);
+  }
+
+  @Delete(':id')
+  @HttpCode(204)
+  @Access('parts.edit')
+  @ApiNoContentResponse()
+  deleteResistor(
+    @Caller() caller: CallerOfRequest,
+    @Param('id') id: string,
+    @Query() { version }: VersionQueryDto,
+  ): Promise<void> {
+    return this.resistors.remove(caller, id, version);
+  }
+}

@@ -1,0 +1,55 @@
+import { CONDITION_FIELDS } from '@roothertz/common/conditions';
+import { STAGE_SEARCH_FIELDS, type SoughtStage } from '@roothertz/common/noise';
+import { OmitType } from '@nestjs/swagger';
+import { OperatingConditionsDto } from '../../shared/conditions/operating-conditions.dto.js';
+import { PartFilterDto } from '../../shared/conditions/part-filter.dto.js';
+import { ResistorFilterDto } from '../../shared/conditions/resistor-ranking-request.dto.js';
+import { StageDto } from '../../shared/conditions/stage.dto.js';
+import { Nested } from '../../shared/validation/nested.decorator.js';
+import { Quantity } from '../../shared/validation/quantity.decorator.js';
+import { PageLimit, PageOffset } from '../page.decorators.js';
+
+export class NetworkLimitsDto {
+  @Quantity(CONDITION_FIELDS['conditions.stage.network.minimumTotal'], { optional: true })
+  minimumTotal: number = 500;
+
+  @Quantity(STAGE_SEARCH_FIELDS['conditions.stage.network.maximumTotal'], { optional: true })
+  maximumTotal: number = 100_000;
+}
+
+/** A stage whose network is to be found in the library. */
+export class SoughtStageDto extends OmitType(StageDto, ['gainResistance', 'network']) implements SoughtStage {
+  @Quantity(STAGE_SEARCH_FIELDS['conditions.stage.gainTolerance'], { optional: true })
+  gainTolerance: number = 0.01;
+
+  @Nested(() => NetworkLimitsDto, { optional: true })
+  network: NetworkLimitsDto = new NetworkLimitsDto();
+
+  @Quantity(STAGE_SEARCH_FIELDS['conditions.stage.parallelMaximum'], { optional: true })
+  parallelMaximum: number = 1;
+
+  @Quantity(STAGE_SEARCH_FIELDS['conditions.stage.outputVoltage'], { optional: true })
+  outputVoltage: number = 0;
+}
+
+export class SoughtConditionsDto extends OmitType(OperatingConditionsDto, ['stage']) {
+  @Nested(() => SoughtStageDto)
+  stage: SoughtStageDto;
+}
+
+export class RankStagesDto {
+  @Nested(() => SoughtConditionsDto)
+  conditions: SoughtConditionsDto;
+
+  @Nested(() => PartFilterDto, { optional: true })
+  filter: PartFilterDto = new PartFilterDto();
+
+  @Nested(() => ResistorFilterDto, { optional: true })
+  resistorFilter: ResistorFilterDto = new ResistorFilterDto();
+
+  @PageLimit()
+  limit: number = 50;
+
+  @PageOffset()
+  offset: number = 0;
+}

@@ -1,0 +1,13 @@
+import type { PartCatalogue } from './partCatalogue.js';
+import { TECHNOLOGY_FIELD } from './partFields.js';
+import type { ResistorPart } from './resistor.js';
+import { RESISTOR_PARAMETERS } from './resistorParameters.js';
+
+/** No two of a resistor's figures can contradict each other. */
+export const RESISTOR_CATALOGUE: PartCatalogue<ResistorPart> = {
+  kind: 'resistor',
+  group: 'resistor',
+  choice: TECHNOLOGY_FIELD,
+  parameters: RESISTOR_PARAMETERS,
+  check: () => [],
+};

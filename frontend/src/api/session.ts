@@ -1,0 +1,39 @@
+import { queryOptions, type QueryClient } from '@tanstack/react-query';
+import { answer, client } from './client';
+import { ApiProblem } from './problem';
+import type { components } from './schema';
+
+export type Session = components['schemas']['SessionResponseDto'];
+export type Credentials = components['schemas']['SignInDto'];
+
+export const SESSION_KEY = ['session'] as const;
+
+/** The signed-in member, or null where nobody is. */
+export const sessionQuery = queryOptions({
+  queryKey: SESSION_KEY,
+  queryFn: readSession,
+  staleTime: 5 * 60_000,
+});
+
+async function readSession(): Promise<Session | null> {
+  try {
+    return await answer(client.GET('/api/auth/me'));
+  } catch (error) {
+    if (error instanceof ApiProblem && error.status === 401) return null;
+    throw error;
+  }
+}
+
+export function signIn(credentials: Credentials): Promise<Session> {
+  return answer(client.POST('/api/auth/sign-in', { body: credentials }));
+}
+
+export async function signOut(): Promise<void> {
+  await answer(client.POST('/api/auth/sign-out'));
+}
+
+/** Makes a session, or its end, known to the page and forgets what was loaded before it. */
+export function takeSession(queryClient: QueryClient, session: Session | null): void {
+  queryClient.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== SESSION_KEY[0] });
+  queryClient.setQueryData(SESSION_KEY, session);
+}

@@ -1,0 +1,59 @@
+import type { CurvesPlot } from './curve';
+import type { ChartHandle } from './EChart';
+import { plotCsv } from './plotCsv';
+
+export const PLOT_FORMATS = ['PNG', 'SVG', 'CSV'] as const;
+export type PlotFormat = (typeof PLOT_FORMATS)[number];
+
+/** Pixels of the picture for one of the page. */
+const SHARPNESS = 2;
+
+/** Saves a chart as a file: its drawing on the page's colour, or its figures. */
+export async function savePlot(
+  plot: CurvesPlot,
+  chart: ChartHandle,
+  as: PlotFormat,
+  paper: string,
+): Promise<void> {
+  const blob = as === 'CSV' ? csvBlob(plot) : await drawingBlob(chart, as, paper);
+  if (blob) download(blob, `${plot.title.toLowerCase().replace(/[^a-z0-9]+/g, '-')}.${as.toLowerCase()}`);
+}
+
+function csvBlob(plot: CurvesPlot): Blob {
+  return new Blob([plotCsv(plot)], { type: 'text/csv;charset=utf-8' });
+}
+
+async function drawingBlob(chart: ChartHandle, as: 'PNG' | 'SVG', paper: string): Promise<Blob | null> {
+  const drawing = chart.svg();
+  if (!drawing) return null;
+  const text = drawing.text.replace(
+    /^<svg[^>]*>/,
+    (tag) => `${tag}<rect width="100%" height="100%" fill="${paper}"/>`,
+  );
+  const svg = new Blob([text], { type: 'image/svg+xml' });
+  return as === 'SVG' ? svg : rasterise(svg, drawing.width, drawing.height);
+}
+
+async function rasterise(svg: Blob, width: number, height: number): Promise<Blob | null> {
+  const url = URL.createObjectURL(svg);
+  try {
+    const image = new Image(width, height);
+    image.src = url;
+    await image.decode();
+    const canvas = document.createElement('canvas');
+    canvas.width = width * SHARPNESS;
+    canvas.height = height * SHARPNESS;
+    canvas.getContext('2d')!.drawImage(image, 0, 0, canvas.width, canvas.height);
+    return await new Promise((resolve) => canvas.toBlob(resolve, 'image/png'));
+  } finally {
+    URL.revokeObjectURL(url);
+  }
+}
+
+function download(blob: Blob, name: string): void {
+  const link = document.createElement('a');
+  link.href = URL.createObjectURL(blob);
+  link.download = name;
+  link.click();
+  setTimeout(() => URL.revokeObjectURL(link.href), 10_000);
+}

@@ -1,0 +1,8 @@
+import type { OperatingConditions } from '@roothertz/common/conditions';
+
+/** R_f in Ω as it follows from the gain; null where the stage has none or its values are missing. */
+export function feedbackResistanceOf({ stage, source }: OperatingConditions): number | null {
+  const { topology, gain, gainResistance } = stage;
+  if (topology === 'transimpedance' || gain === undefined || gainResistance === undefined) return null;
+  return topology === 'inverting' ? gain * (source.resistance + gainResistance) : gainResistance * (gain - 1);
+}

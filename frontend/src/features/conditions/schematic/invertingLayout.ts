@@ -1,0 +1,60 @@
+import type { SchematicLayout } from './layout';
+
+export const INVERTING_LAYOUT: SchematicLayout = {
+  height: 236,
+  wires:
+    'M20 188V162M20 138V100H28M64 100H78M108 100H139M169 100H226' +
+    'M188 100V44H232M262 44H296V118M284 118H302M226 136H204V154M204 184V194',
+  branches: [{ field: 'conditions.source.capacitance', path: 'M124 100V122M124 127V142' }],
+  amplifier: { x: 226, y: 118 },
+  elements: [
+    { symbol: 'voltageSource', x: 20, y: 150 },
+    { symbol: 'ground', x: 20, y: 188 },
+    { symbol: 'coil', x: 46, y: 100, inLine: true, field: 'conditions.source.inductance' },
+    { symbol: 'resistor', x: 93, y: 100, inLine: true, field: 'conditions.source.resistance' },
+    { symbol: 'node', x: 124, y: 100, field: 'conditions.source.capacitance' },
+    { symbol: 'capacitor', x: 124, y: 124.5, vertical: true, field: 'conditions.source.capacitance' },
+    { symbol: 'ground', x: 124, y: 142, field: 'conditions.source.capacitance' },
+    { symbol: 'resistor', x: 154, y: 100, inLine: true, field: 'conditions.stage.gainResistance' },
+    { symbol: 'node', x: 188, y: 100 },
+    { symbol: 'resistor', x: 247, y: 44 },
+    {
+      symbol: 'resistor',
+      x: 204,
+      y: 169,
+      vertical: true,
+      inLine: true,
+      field: 'conditions.stage.biasResistance',
+    },
+    { symbol: 'ground', x: 204, y: 194 },
+    { symbol: 'minusInput', x: 235, y: 100 },
+    { symbol: 'plusInput', x: 235, y: 136 },
+    { symbol: 'node', x: 296, y: 118 },
+    { symbol: 'terminal', x: 304, y: 118 },
+  ],
+  values: [
+    { field: 'conditions.source.inductance', x: 42, y: 66 },
+    { field: 'conditions.source.resistance', x: 94, y: 66 },
+    { field: 'conditions.source.capacitance', x: 124, y: 164 },
+    { field: 'conditions.stage.gainResistance', x: 154, y: 66 },
+    {
+      field: 'conditions.source.temperature',
+      x: 2,
+      y: 218,
+      align: 'left',
+      before: 'source at',
+      emptyText: 'ambient',
+    },
+    { field: 'conditions.stage.biasResistance', x: 186, y: 176, align: 'right', emptyText: 'none' },
+    { field: 'conditions.stage.gain', x: 252, y: 66, before: 'gain' },
+  ],
+  discs: [
+    { contributor: 'source', x: 93, y: 100, label: { x: 88, y: 138, anchor: 'middle' } },
+    { contributor: 'feedback', x: 154, y: 100, label: { x: 157, y: 138, anchor: 'middle' } },
+    { contributor: 'amplifierCurrentFeedback', x: 206, y: 100, label: { x: 210, y: 76, anchor: 'middle' } },
+    { contributor: 'amplifierVoltage', x: 226, y: 136, label: { x: 240, y: 170, anchor: 'start' } },
+    { contributor: 'amplifierCurrentSource', x: 204, y: 136, label: { x: 196, y: 152, anchor: 'end' } },
+    { contributor: 'bias', x: 204, y: 169, label: { x: 226, y: 188, anchor: 'start' } },
+  ],
+  feedbackResistance: { x: 247, y: 26 },
+};

@@ -1,0 +1,12 @@
+import type { StageKind } from '../stageKind';
+import { INVERTING_LAYOUT } from './invertingLayout';
+import type { SchematicLayout } from './layout';
+import { FOLLOWER_LAYOUT, NON_INVERTING_LAYOUT } from './nonInvertingLayout';
+import { TRANSIMPEDANCE_LAYOUT } from './transimpedanceLayout';
+
+export const LAYOUTS: Record<StageKind, SchematicLayout> = {
+  'non-inverting': NON_INVERTING_LAYOUT,
+  follower: FOLLOWER_LAYOUT,
+  inverting: INVERTING_LAYOUT,
+  transimpedance: TRANSIMPEDANCE_LAYOUT,
+};

@@ -1,0 +1,71 @@
+import { checkConditions, type RankingRequest } from '@roothertz/common/conditions';
+import type { FieldError } from '@roothertz/common/parts';
+import { useCallback, useMemo, useRef } from 'react';
+import { useSearchParams } from 'react-router-dom';
+import { readAddress } from './address/readAddress';
+import { writeAddress } from './address/writeAddress';
+import { exampleRequest } from './exampleRequest';
+import { valueAt, withValue } from './requestPath';
+
+const NAMED_KEY = 'named';
+const PART_KEY = 'part';
+
+/** Fields whose text is taken while it is typed: one step back for all of it. */
+const TYPED_FIELDS: readonly string[] = ['filter.search', 'filter.package'];
+
+/** The conditions of the page's address, and how to change it. */
+export function useConditionsAddress() {
+  const [params, setParams] = useSearchParams();
+  const lastTyped = useRef<{ path: string; value: unknown } | null>(null);
+  const content = useMemo(() => readAddress(params), [params]);
+  const request = useMemo(() => content?.request ?? exampleRequest('non-inverting'), [content]);
+  const problems = useMemo(() => problemsOf(request, content?.errors ?? []), [request, content]);
+  const namedId = params.get(NAMED_KEY);
+  const partId = params.get(PART_KEY);
+
+  const show = useCallback(
+    (next: RankingRequest, named: string | null, replace = false) =>
+      setParams((current) => addressOf(next, { [NAMED_KEY]: named, [PART_KEY]: current.get(PART_KEY) }), {
+        replace,
+        preventScrollReset: true,
+      }),
+    [setParams],
+  );
+  const change = useCallback(
+    (path: string, value: unknown) => {
+      const goesOn = lastTyped.current?.path === path && lastTyped.current.value === valueAt(request, path);
+      lastTyped.current = TYPED_FIELDS.includes(path) ? { path, value: value || undefined } : null;
+      show(withValue(request, path, value), namedId, goesOn);
+    },
+    [request, namedId, show],
+  );
+  const replace = useCallback((next: RankingRequest) => show(next, namedId), [namedId, show]);
+  const selectPart = useCallback(
+    (id: string) =>
+      setParams(
+        (current) => {
+          current.set(PART_KEY, id);
+          return current;
+        },
+        { replace: true, preventScrollReset: true },
+      ),
+    [setParams],
+  );
+  return { isBlank: content === null, request, problems, namedId, partId, change, replace, show, selectPart };
+}
+
+function addressOf(request: RankingRequest, ids: Record<string, string | null>): URLSearchParams {
+  const params = writeAddress(request);
+  for (const [key, id] of Object.entries(ids)) if (id !== null) params.set(key, id);
+  return params;
+}
+
+/** What stands in the way of ranking; what the address said wrong comes on top, but a default stands in for it. */
+function problemsOf(request: RankingRequest, addressErrors: readonly FieldError[]) {
+  const blocking = checkConditions(request);
+  return { blocking, messages: messagesOf([...blocking, ...addressErrors]) };
+}
+
+function messagesOf(errors: readonly FieldError[]): ReadonlyMap<string, string> {
+  return new Map(errors.map(({ field, message }) => [field, message]));
+}

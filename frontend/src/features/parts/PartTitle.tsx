@@ -1,0 +1,23 @@
+import type { OpAmp } from '../../api/opAmps';
+import { optionLabel } from './optionLabels';
+import styles from './PartTitle.module.css';
+
+/** What a part is called, whose it is and how it stands. */
+export function PartTitle({ part }: { part: OpAmp }) {
+  const facts = [
+    part.amplifier.inputType && `${optionLabel('inputType', part.amplifier.inputType)} input`,
+    part.package,
+    optionLabel('lifecycle', part.lifecycle),
+    optionLabel('approval', part.approval),
+    part.library === 'curated' ? 'curated library, read-only' : 'your own library',
+  ];
+  return (
+    <div className={styles.title}>
+      <h1>
+        {part.partNumber} <span className={styles.maker}>{part.manufacturer}</span>
+      </h1>
+      <p className={styles.facts}>{facts.filter(Boolean).join(' · ')}</p>
+      {part.description !== '' && <p className={styles.description}>{part.description}</p>}
+    </div>
+  );
+}

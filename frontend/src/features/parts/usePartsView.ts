@@ -1,0 +1,27 @@
+import { useCallback, useMemo } from 'react';
+import { useSearchParams } from 'react-router-dom';
+import { readPartsView } from './partsView';
+
+export type ChangeView = (changes: Record<string, string | readonly string[] | undefined>) => void;
+
+/** What the list shows, kept in the page's address. */
+export function usePartsView() {
+  const [address, setAddress] = useSearchParams();
+  const view = useMemo(() => readPartsView(address), [address]);
+  const change = useCallback<ChangeView>(
+    (changes) =>
+      setAddress(
+        (before) => {
+          const next = new URLSearchParams(before);
+          for (const [key, value] of Object.entries(changes)) {
+            if (value === undefined || value.length === 0) next.delete(key);
+            else next.set(key, typeof value === 'string' ? value : value.join(','));
+          }
+          return next;
+        },
+        { replace: true },
+      ),
+    [setAddress],
+  );
+  return { view, change };
+}

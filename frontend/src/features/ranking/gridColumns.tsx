@@ -1,0 +1,49 @@
+import type { ColDef, ICellRendererParams } from 'ag-grid-community';
+import { BudgetBar } from './BudgetBar';
+import type { GridRow } from './gridRows';
+import { NoiseCell } from './NoiseCell';
+import { PartCell } from './PartCell';
+import { PlaceCell } from './PlaceCell';
+
+type Cell<Value> = ICellRendererParams<GridRow, Value>;
+
+const FIGURE: ColDef<GridRow> = { cellStyle: { textAlign: 'right' }, headerClass: 'ag-right-aligned-header' };
+
+/** The ranking's columns; the noise column's heading carries the one unit of all its figures. */
+export function gridColumns(unit: string): ColDef<GridRow>[] {
+  return [
+    {
+      colId: 'place',
+      field: 'place',
+      headerName: '',
+      width: 36,
+      cellStyle: { paddingLeft: 0, paddingRight: 6 },
+      cellRenderer: ({ value }: Cell<GridRow['place']>) => value && <PlaceCell {...value} />,
+    },
+    {
+      colId: 'part',
+      field: 'part',
+      headerName: 'Part',
+      flex: 1,
+      minWidth: 130,
+      cellRenderer: ({ value }: Cell<GridRow['part']>) => value && <PartCell {...value} />,
+    },
+    {
+      ...FIGURE,
+      colId: 'noise',
+      field: 'noise',
+      headerName: `noise, ${unit} rms`,
+      width: 100,
+      cellRenderer: ({ value }: Cell<GridRow['noise']>) => value && <NoiseCell {...value} />,
+    },
+    { ...FIGURE, colId: 'aboveFloor', field: 'aboveFloor', headerName: 'above floor', width: 82 },
+    {
+      colId: 'budget',
+      field: 'budget',
+      headerName: 'budget, power',
+      width: 138,
+      cellStyle: { paddingLeft: 6, paddingRight: 4 },
+      cellRenderer: ({ value }: Cell<GridRow['budget']>) => value && <BudgetBar {...value} />,
+    },
+  ];
+}

@@ -1,0 +1,83 @@
+import type { Caution } from '@roothertz/common/noise';
+import { CONTRIBUTORS, type Contributions } from '@roothertz/common/noise';
+import { sourceTemperature } from './sourceTemperature';
+import type { RankingRequest } from '@roothertz/common/conditions';
+import { formatQuantity } from '@roothertz/common/units';
+import type { Ranking, RankingItem } from '../../api/ranking';
+import { barOf, barScale, type Bar } from './barScale';
+import { cautionsOfPart } from './cautionsOf';
+import { commonUnit, inUnit, noiseKind } from './noiseUnit';
+
+/** Where a row stands in the bracket around the quiet set. */
+export type Bracket = 'only' | 'first' | 'middle' | 'last' | null;
+
+export interface GridRow {
+  id: string;
+  place: { rank: number | null; bracket: Bracket };
+  part: { name: string; maker: string; cautions: Caution[]; approval: string | null };
+  noise: { text: string; meetsTarget: boolean | null };
+  aboveFloor: string;
+  budget: { bar: Bar; contributions: Contributions };
+}
+
+export interface GridRows {
+  /** The unit of the noise column. */
+  unit: string;
+  floor: GridRow;
+  rows: GridRow[];
+}
+
+export const FLOOR_ID = 'floor';
+
+/** The grid's rows: the source floor on top, all figures in one unit, all bars in one scale. */
+export function gridRows(
+  { floor }: Pick<Ranking, 'floor'>,
+  items: readonly RankingItem[],
+  request: RankingRequest,
+): GridRows {
+  const quietest = items[0]?.inputNoiseRms ?? floor.inputNoiseRms;
+  const unit = commonUnit(floor.inputNoiseRms || quietest, noiseKind(request.conditions.stage.topology));
+  const scale = barScale(floor.inputNoiseRms, quietest);
+  const rows = items.map((item, index) => rowOf(item, bracketOf(items, index), unit, scale));
+  return { unit, floor: floorRow(floor.inputNoiseRms, request, unit, scale), rows };
+}
+
+function rowOf(item: RankingItem, bracket: Bracket, unit: string, scale: number): GridRow {
+  const { part, rank, contributions, aboveFloor, meetsTarget } = item;
+  return {
+    id: part.id,
+    place: { rank, bracket },
+    part: {
+      name: part.partNumber,
+      maker: part.manufacturer,
+      cautions: cautionsOfPart(item.cautions),
+      approval: part.approval === 'approved' ? null : part.approval,
+    },
+    noise: { text: inUnit(item.inputNoiseRms, unit), meetsTarget },
+    aboveFloor: aboveFloor === null ? '–' : formatQuantity(aboveFloor, 'decibel'),
+    budget: { bar: barOf(contributions, scale), contributions },
+  };
+}
+
+function floorRow(rms: number, { conditions }: RankingRequest, unit: string, scale: number): GridRow {
+  const nothing = Object.fromEntries(CONTRIBUTORS.map((contributor) => [contributor, 0])) as Contributions;
+  const contributions = { ...nothing, source: rms };
+  const resistance = formatQuantity(conditions.source.resistance, 'resistance', { trim: true });
+  const temperature = formatQuantity(sourceTemperature(conditions), 'temperature');
+  return {
+    id: FLOOR_ID,
+    place: { rank: null, bracket: null },
+    part: { name: '', maker: `source floor, ${resistance} at ${temperature}`, cautions: [], approval: null },
+    noise: { text: inUnit(rms, unit), meetsTarget: null },
+    aboveFloor: rms > 0 ? formatQuantity(0, 'decibel') : '–',
+    budget: { bar: barOf(contributions, scale), contributions },
+  };
+}
+
+function bracketOf(items: readonly RankingItem[], index: number): Bracket {
+  if (!items[index].quietSet) return null;
+  const begins = !items[index - 1]?.quietSet;
+  const ends = !items[index + 1]?.quietSet;
+  if (begins) return ends ? 'only' : 'first';
+  return ends ? 'last' : 'middle';
+}

@@ -1,0 +1,34 @@
+import { PLAN_LIMITS, ROLE_LABELS } from '@roothertz/common/access';
+import { Facts } from '../../components/Facts';
+import { useMember } from '../../components/useMember';
+import { SignOutButton } from '../../features/session/SignOutButton';
+import { ThemeChooser } from '../../features/session/ThemeChooser';
+import styles from './AccountPage.module.css';
+
+export function AccountPage() {
+  const { user, team, roles, plan } = useMember();
+  return (
+    <div className={styles.page}>
+      <title>Account · Roothertz</title>
+      <h1>{user.name}</h1>
+      <Facts
+        label="Account"
+        entries={[
+          { term: 'E-mail', value: user.email },
+          { term: 'Team', value: team.name },
+          { term: 'Roles', value: roles.map((role) => ROLE_LABELS[role]).join(', ') },
+          { term: 'Plan', value: planText(plan) },
+        ]}
+      />
+      <section className={styles.section}>
+        <h2>Theme in this browser</h2>
+        <ThemeChooser />
+      </section>
+      <SignOutButton />
+    </div>
+  );
+}
+
+function planText(plan: keyof typeof PLAN_LIMITS): string {
+  return PLAN_LIMITS[plan].ownLibrary ? 'Team, with a library of your own' : 'Free, the curated library only';
+}

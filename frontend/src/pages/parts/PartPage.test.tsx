@@ -1,0 +1,89 @@
+import { screen, within } from '@testing-library/react';
+import userEvent from '@testing-library/user-event';
+import { describe, expect, it } from 'vitest';
+import type { OpAmp } from '../../api/opAmps';
+import { opAmp, sessionOf } from '../../test/factories';
+import { fakeServer, json, problem } from '../../test/fakeServer';
+import { renderApp } from '../../test/renderApp';
+
+function open(role: Parameters<typeof sessionOf>[0], part: OpAmp, plan?: 'free' | 'team') {
+  const asked = fakeServer({
+    'GET /api/auth/me': () => json(sessionOf(role, plan)),
+    [`GET /api/op-amps/${part.id}`]: () => json(part),
+  });
+  renderApp(`/parts/${part.id}`);
+  return asked;
+}
+
+function entry(list: HTMLElement, term: string): HTMLElement {
+  return within(list).getByText(term).closest('div')!;
+}
+
+describe('a part’s page', () => {
+  it('shows each figure with where it comes from', async () => {
+    open('engineer', opAmp());
+    const parameters = await screen.findByLabelText('Parameters');
+    expect(entry(parameters, 'voltage noise e_n')).toHaveTextContent('1.1 nV/√Hzmeasured');
+    expect(entry(parameters, 'current noise i_n')).toHaveTextContent('1.7 pA/√Hzdata sheet, typical');
+  });
+
+  it('derives the source resistance at which the amplifier adds least', async () => {
+    open('engineer', opAmp());
+    const derived = await screen.findByLabelText('Derived figures');
+    expect(entry(derived, 'optimum source resistance')).toHaveTextContent(/647\sΩ/);
+    expect(entry(derived, 'equivalent noise resistance')).toHaveTextContent(/73\.5\sΩ/);
+  });
+
+  it('shows an unknown figure as unknown and says what that means', async () => {
+    const part = opAmp();
+    open('engineer', { ...part, amplifier: { ...part.amplifier, currentNoise: null } });
+    const parameters = await screen.findByLabelText('Parameters');
+    expect(entry(parameters, 'current noise i_n')).toHaveTextContent(/unknown$/);
+    expect(screen.getByLabelText('Cautions')).toHaveTextContent('The current noise is unknown');
+  });
+
+  it('lets a librarian edit and delete a part of the own library', async () => {
+    open('librarian', opAmp());
+    expect(await screen.findByRole('link', { name: 'Edit' })).toHaveAttribute('href', '/parts/41/edit');
+    expect(screen.getByRole('button', { name: 'Delete' })).toBeInTheDocument();
+  });
+
+  it.each([
+    ['an engineer', 'engineer', opAmp(), 'team'],
+    ['a librarian, where the part is curated', 'librarian', opAmp({ library: 'curated' }), 'team'],
+    ['a librarian, where the plan has no own library', 'librarian', opAmp(), 'free'],
+  ] as const)('offers neither to %s', async (_who, role, part, plan) => {
+    open(role, part, plan);
+    await screen.findByLabelText('Parameters');
+    expect(screen.queryByRole('link', { name: 'Edit' })).not.toBeInTheDocument();
+    expect(screen.queryByRole('button', { name: 'Delete' })).not.toBeInTheDocument();
+  });
+
+  it('shows no form to who may not edit', async () => {
+    fakeServer({ 'GET /api/auth/me': () => json(sessionOf('engineer')) });
+    renderApp('/parts/new');
+    expect(await screen.findByRole('heading', { name: 'This can’t be changed here' })).toBeInTheDocument();
+  });
+
+  it('says so where there is no such part', async () => {
+    fakeServer({
+      'GET /api/auth/me': () => json(sessionOf('engineer')),
+      'GET /api/op-amps/99': () => problem(404, 'part.not-found'),
+    });
+    renderApp('/parts/99');
+    expect(await screen.findByRole('heading', { name: 'There is no such part' })).toBeInTheDocument();
+  });
+
+  it('says why a part can’t be deleted', async () => {
+    const part = opAmp();
+    fakeServer({
+      'GET /api/auth/me': () => json(sessionOf('librarian')),
+      'GET /api/op-amps/41': () => json(part),
+      'DELETE /api/op-amps/41': () =>
+        problem(409, 'part.stale', { detail: 'Somebody changed it meanwhile.' }),
+    });
+    renderApp('/parts/41');
+    await userEvent.click(await screen.findByRole('button', { name: 'Delete' }));
+    expect(await screen.findByRole('alert')).toHaveTextContent('Somebody changed it meanwhile.');
+  });
+});

@@ -1,0 +1,15 @@
+import type { Action } from '@roothertz/common/access';
+
+interface NavigationEntry {
+  to: string;
+  label: string;
+  action: Action;
+}
+
+/** The pages of the rail, each with the action that a member must be allowed to see it. */
+export const NAVIGATION: readonly NavigationEntry[] = [
+  { to: '/rank', label: 'Rank', action: 'rankings.run' },
+  { to: '/parts', label: 'Parts', action: 'parts.read' },
+];
+
+export const START_PAGE = '/rank';
