@@ -116,6 +116,16 @@ describe('rankResistors', () => {
     expect(order('tolerance', true)).toEqual([1, 2, 0]);
   });
 
+  it('puts parts of unknown noise index last where a direct voltage makes excess noise', () => {
+    const parts = [make({ noiseIndex: null }), make({ noiseIndex: 20 })];
+    const order = (dcVoltage: number) =>
+      rankResistors({ ...query, conditions: { ...conditions, dcVoltage } }, parts).items.map(
+        ({ index }) => index,
+      );
+    expect(order(2.5)).toEqual([1, 0]);
+    expect(order(0)).toEqual([0, 1]);
+  });
+
   it('finds by words and gives pages', () => {
     const parts = [make({ searchText: 'a b' }), make({ searchText: 'b c' }), make({ searchText: 'c' })];
     const asked = { ...query, filter: { search: 'B' }, limit: 1, offset: 1 };

@@ -73,7 +73,8 @@ export interface ResistorRanking {
 /**
  * Ranks the resistors within the tolerance window of the wanted value by their noise at the place. Parts
  * outside the window, or that don't hold every word of the search, aren't considered at all; parts that
- * would dissipate more than their rating are excluded.
+ * would dissipate more than their rating are excluded. Where a direct voltage makes excess noise, parts of
+ * unknown noise index come last: their total is only known to be no less than the thermal noise.
  *
  * @returns the page wanted, equal figures in the order of the list
  */
@@ -173,6 +174,7 @@ function sortKey(
   { resistance, tolerance }: LibraryResistor,
   figures: ResistorFigures,
 ): number {
-  const value = { ...figures, resistance, tolerance: tolerance ?? NaN }[sort];
+  const isBound = figures.excessRms === null && (sort === 'totalRms' || sort === 'aboveThermal');
+  const value = isBound ? NaN : { ...figures, resistance, tolerance: tolerance ?? NaN }[sort];
   return descending ? -value : value;
 }
