@@ -1,16 +1,18 @@
 import { prepareDatabase, readAddress, serve } from './application.mjs';
 import { fillLibrary } from './bench-library.mjs';
+import { compareStages } from './bench-stages.mjs';
 import { interleaved, median, quantile } from './bench-measure.mjs';
 import { loopOver, RANKINGS, SQL } from './bench-rankings.mjs';
 import { buildStale } from './builds.mjs';
 import { readCredentials } from './credentials.mjs';
 import { createDatabase, ensureMariadbInstalled, startMariadb } from './mariadb.mjs';
 import { ensurePackages, refuseOldNode } from './packages.mjs';
+import { endOrphans } from './orphans.mjs';
 import { freePort } from './ports.mjs';
 import { peakMemory } from './processes.mjs';
 import { recall } from './records.mjs';
 import { say, step } from './steps.mjs';
-import { supervise } from './supervision.mjs';
+import { closeAll, supervise } from './supervision.mjs';
 
 const DATABASE = 'roothertz_bench';
 const PARTS = 100_000;
@@ -21,7 +23,8 @@ await supervise(async () => {
   await ensureMariadbInstalled();
   await ensurePackages();
   await buildStale(['common', 'backend']);
-  const server = await startMariadb({ name: 'mariadb-bench', preferredPort: 33326 });
+  await endOrphans();
+  const server = await startMariadb({ name: 'mariadb-bench', preferredPort: 33326, exclusive: true });
   await createDatabase(server, DATABASE, { fresh: true });
   const environment = {
     JWT_SECRET: readCredentials().jwtSecret,
@@ -45,7 +48,10 @@ await supervise(async () => {
   await serve(address, environment);
   const results = await measure(address, connection, library);
   await connection.end();
-  report(results, peakMemory(recall(`application-${address.port}`).pid));
+  const rankings = reportRankings(results, peakMemory(recall(`application-${address.port}`).pid));
+  const stages = reportStages(await compareInStep(library.columns));
+  await closeAll();
+  say(JSON.stringify({ ...rankings, ...stages }));
   return 0;
 });
 
@@ -89,7 +95,14 @@ async function ownTime(connection, sql, values) {
   return profiles.at(-1).Duration * 1000;
 }
 
-function report({ resistive, reactive, sql, loop }, serverPeakMiB) {
+function compareInStep(columns) {
+  return step('Whole stages', async (note) => {
+    note('pruned and exhaustive');
+    return { ...(await compareStages(columns)), outcome: 'done' };
+  });
+}
+
+function reportRankings({ resistive, reactive, sql, loop }, serverPeakMiB) {
   const line = (name, times) =>
     say(`${name}: p50 ${median(times).toFixed(1)} ms, p95 ${quantile(times, 0.95).toFixed(1)} ms`);
   say(`\n${PARTS} op-amps, each with a gain–bandwidth product and an input capacitance of its own:`);
@@ -101,12 +114,25 @@ function report({ resistive, reactive, sql, loop }, serverPeakMiB) {
     'What bounds a: the sieve over all parts and the lower bound of each part’s noise, one pass each; only the parts\n' +
       'that can be on the page or in the quiet set are integrated over the band.\n',
   );
-  const ratio = (over, under) => Number((median(over) / median(under)).toFixed(3));
-  const results = {
+  const ratio = (over, under) => rounded(median(over) / median(under));
+  return {
     rankingResistiveOverSql: ratio(resistive, sql),
     rankingReactiveOverSql: ratio(reactive, sql),
     rankingResistiveOverLoop: ratio(resistive, loop),
     serverPeakMiB,
   };
-  say(JSON.stringify(results));
+}
+
+function reportStages({ evaluations, exhaustiveEvaluations, time, exhaustiveTime }) {
+  say('\n300 op-amps × 4000 resistors, whole stages:');
+  say(`pruned: ${evaluations} stages evaluated in ${time.toFixed(0)} ms`);
+  say(`exhaustive: ${exhaustiveEvaluations} stages evaluated in ${exhaustiveTime.toFixed(0)} ms\n`);
+  return {
+    stagesEvaluationsOverExhaustive: rounded(evaluations / exhaustiveEvaluations),
+    stagesTimeOverExhaustive: rounded(time / exhaustiveTime),
+  };
+}
+
+function rounded(ratio) {
+  return Number(ratio.toPrecision(3));
 }

@@ -71,7 +71,53 @@ describe('a resonance is integrated within 0.1 %', () => {
         amplifier,
       );
     });
+
+    // As measured between both legs, with half the capacitance of two inputs in series.
+    it.each(shapes)('of an instrumentation stage on a coil with Q %i, order %i', (quality, lowPassOrder) => {
+      expectExact(
+        conditionsWith({
+          source: coil(quality, 5000, amplifier.inputCapacitance / 2),
+          stage: { topology: 'instrumentation', gain: 20, gainResistance: 100 },
+          band: { lowPassOrder },
+        }),
+        amplifier,
+      );
+    });
+
+    it.each(shapes)('of a difference stage on a coil with Q %i, order %i', (quality, lowPassOrder) => {
+      expectExact(
+        conditionsWith({
+          source: coil(quality, 5000, 0),
+          stage: { topology: 'difference', gain: 20, gainResistance: 50e3 },
+          band: { lowPassOrder },
+        }),
+        amplifier,
+      );
+    });
   });
+
+  // Q of a loop with the noise gain G + jωC_in·R is √(2π·GBW·C_in·R)/G.
+  it.each(shapes)(
+    'of both loops of an instrumentation stage with Q %i, order %i',
+    (quality, lowPassOrder) => {
+      const loop = quality ** 2 / (2 * Math.PI * REAL.gainBandwidth! * REAL.inputCapacitance);
+      const natural = REAL.gainBandwidth! / quality;
+      expectExact(
+        conditionsWith({
+          source: { resistance: 1000 },
+          stage: {
+            topology: 'instrumentation',
+            gain: 2,
+            gainResistance: 8 * loop,
+            differenceResistance: 4.5 * loop,
+          },
+          band: { lower: natural / 1000, upper: natural * 3, lowPassOrder },
+          referenceFrequency: natural / 100,
+        }),
+        REAL,
+      );
+    },
+  );
 
   const ringing = (quality: number): { conditions: OperatingConditions; amplifier: KnownAmplifier } => {
     const feedbackResistance = 1e6;
@@ -141,6 +187,15 @@ describe('parts that are ranked together', () => {
       conditionsWith({
         source: coil(1000, 15e3, 0),
         stage: { gain: 10, gainResistance: 100 },
+        bandwidthMargin: 0,
+      }),
+    ],
+    [
+      'an instrumentation stage with three resonances',
+      conditionsWith({
+        source: coil(200, 20e3, 0),
+        stage: { topology: 'instrumentation', gain: 3, gainResistance: 1e6, differenceResistance: 3e5 },
+        band: { upper: 1e6, lowPassOrder: 2 },
         bandwidthMargin: 0,
       }),
     ],

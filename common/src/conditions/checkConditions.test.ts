@@ -32,6 +32,20 @@ describe('checkConditions', () => {
     ],
     ['an inverting stage', requestWith({ stage: { ...INVERTING, biasResistance: 0 } })],
     ['a transimpedance stage', requestWith({ stage: { ...TRANSIMPEDANCE, feedbackCapacitance: 'auto' } })],
+    ['a difference stage', requestWith({ stage: { topology: 'difference', gain: 1, gainResistance: 0 } })],
+    ['two followers before a difference', requestWith({ stage: { topology: 'instrumentation' } })],
+    [
+      'an instrumentation stage',
+      requestWith({
+        stage: {
+          topology: 'instrumentation',
+          gain: 100,
+          gainResistance: 100,
+          loadResistance: 1e6,
+          differenceResistance: 1000,
+        },
+      }),
+    ],
     ['a source without resistance', requestWith({ source: { resistance: 0 } })],
     [
       'a coil without resistance, with a load',
@@ -59,6 +73,41 @@ describe('checkConditions', () => {
       requestWith({ stage: { topology: 'inverting', gain: 10 } }),
       'stage.gainResistance',
       'an inverting stage needs this value',
+    ],
+    [
+      'a difference stage with a bias resistance',
+      requestWith({
+        stage: { topology: 'difference', gain: 10, gainResistance: 1000, biasResistance: 1000 },
+      }),
+      'stage.biasResistance',
+      'a difference stage doesn’t have this: leave it out',
+    ],
+    [
+      'a difference stage without any resistance before its inputs',
+      requestWith({
+        source: { resistance: 0 },
+        stage: { topology: 'difference', gain: 10, gainResistance: 0 },
+      }),
+      'stage.gainResistance',
+      'gain resistance and source resistance can’t both be 0 Ω',
+    ],
+    [
+      'an instrumentation stage that loses',
+      requestWith({ stage: { topology: 'instrumentation', gain: 0.5 } }),
+      'stage.gain',
+      'gain: an instrumentation stage has a gain of 1 or more',
+    ],
+    [
+      'an instrumentation stage that amplifies without a gain resistance',
+      requestWith({ stage: { topology: 'instrumentation', gain: 2 } }),
+      'stage.gainResistance',
+      'gain resistance: a value above 0 Ω is needed where the gain is above 1',
+    ],
+    [
+      'a difference resistance in a non-inverting stage',
+      requestWith({ stage: { differenceResistance: 1000 } }),
+      'stage.differenceResistance',
+      'a non-inverting stage doesn’t have this: leave it out',
     ],
     [
       'a transimpedance stage without a feedback resistance',

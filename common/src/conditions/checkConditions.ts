@@ -8,6 +8,11 @@ export const STAGE_FIELDS = {
   'non-inverting': { required: ['gain'], optional: ['gainResistance', 'loadResistance', 'network'] },
   inverting: { required: ['gain', 'gainResistance'], optional: ['biasResistance', 'network'] },
   transimpedance: { required: ['feedbackResistance'], optional: ['feedbackCapacitance', 'network'] },
+  difference: { required: ['gain', 'gainResistance'], optional: ['network'] },
+  instrumentation: {
+    required: ['gain'],
+    optional: ['gainResistance', 'loadResistance', 'differenceResistance', 'network'],
+  },
 } as const satisfies Record<
   Topology,
   { required: readonly (keyof StageConditions)[]; optional: readonly (keyof StageConditions)[] }
@@ -46,11 +51,12 @@ function checkStage({ conditions }: RankingRequest): FieldError[] {
     if (value !== undefined && !allowed.includes(key))
       add(`stage.${key}`, `${article(stage.topology)} stage doesn’t have this: leave it out`);
   }
-  if (stage.topology === 'non-inverting') {
-    checkNonInverting(stage, add);
+  if (stage.topology === 'non-inverting' || stage.topology === 'instrumentation') {
+    checkFollowing(stage, add);
     checkLosses(source, stage, add);
   }
-  if (stage.topology === 'inverting' && source.resistance + (stage.gainResistance ?? 0) <= 0)
+  const hasSeries = stage.topology === 'inverting' || stage.topology === 'difference';
+  if (hasSeries && source.resistance + (stage.gainResistance ?? 0) <= 0)
     add('stage.gainResistance', 'gain resistance and source resistance can’t both be 0 Ω');
   if (stage.topology === 'transimpedance') checkCurrentSource(source, add);
   else if (source.directCurrent)
@@ -60,9 +66,10 @@ function checkStage({ conditions }: RankingRequest): FieldError[] {
 
 type AddError = (field: string, message: string) => void;
 
-function checkNonInverting(stage: StageConditions, add: AddError): void {
+/** Amplifiers that follow the source with their + inputs. */
+function checkFollowing(stage: StageConditions, add: AddError): void {
   if (stage.gain === undefined) return;
-  if (stage.gain < 1) add('stage.gain', 'gain: a non-inverting stage has a gain of 1 or more');
+  if (stage.gain < 1) add('stage.gain', `gain: ${article(stage.topology)} stage has a gain of 1 or more`);
   if (stage.gain > 1 && !stage.gainResistance)
     add('stage.gainResistance', 'gain resistance: a value above 0 Ω is needed where the gain is above 1');
 }
@@ -85,7 +92,7 @@ function checkCurrentSource(source: RankingRequest['conditions']['source'], add:
 }
 
 function article(topology: Topology): string {
-  return topology === 'inverting' ? 'an inverting' : `a ${topology}`;
+  return topology.startsWith('in') ? `an ${topology}` : `a ${topology}`;
 }
 
 function checkBand({ conditions: { band, referenceFrequency } }: RankingRequest): FieldError[] {

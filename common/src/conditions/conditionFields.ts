@@ -77,7 +77,7 @@ export const CONDITION_FIELDS = {
     symbol: 'R_g',
     kind: 'resistance',
     bounds: { from: 0, least: 1e-6, to: 1e12 },
-    help: 'From the − input to ground, or to the source in an inverting stage.',
+    help: 'From the − input to ground, to the source in an inverting and in each leg of a difference stage, or between the − inputs of an instrumentation stage.',
   },
   'conditions.stage.loadResistance': {
     label: 'load resistance',
@@ -85,6 +85,13 @@ export const CONDITION_FIELDS = {
     kind: 'resistance',
     bounds: { from: 1e-3, to: 1e15 },
     help: 'From the + input to ground: damping, termination or bias return; left out = none.',
+  },
+  'conditions.stage.differenceResistance': {
+    label: 'difference resistance',
+    symbol: 'R_d',
+    kind: 'resistance',
+    bounds: { from: 1e-3, to: 1e12 },
+    help: 'Each of the four equal resistors behind the input pair of an instrumentation stage; left out = 10 kΩ.',
   },
   'conditions.stage.biasResistance': {
     label: 'bias resistance',

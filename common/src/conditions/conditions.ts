@@ -1,13 +1,22 @@
 import type { Approval, InputType, Library, Lifecycle } from '../parts/index.js';
 
-export const TOPOLOGIES = ['non-inverting', 'inverting', 'transimpedance'] as const;
+export const TOPOLOGIES = [
+  'non-inverting',
+  'inverting',
+  'transimpedance',
+  'difference',
+  'instrumentation',
+] as const;
 export type Topology = (typeof TOPOLOGIES)[number];
 
 /** How an amplifier's figures, given at 25 °C, are carried to the ambient temperature. */
 export const AMPLIFIER_TEMPERATURE_MODELS = ['estimated', 'none'] as const;
 export type AmplifierTemperatureModel = (typeof AMPLIFIER_TEMPERATURE_MODELS)[number];
 
-/** The signal source: (R + jωL) ∥ 1/jωC, or in a transimpedance stage a current source ∥ R ∥ C. */
+/**
+ * The signal source: (R + jωL) ∥ 1/jωC, or in a transimpedance stage a current source ∥ R ∥ C. A difference or
+ * instrumentation stage takes it as two equal legs about ground, each half of the EMF behind R/2 + jωL/2 with 2C.
+ */
 export interface SourceConditions {
   /** Ω */
   resistance: number;
@@ -34,10 +43,12 @@ export interface StageConditions {
   topology: Topology;
   /** V/V, magnitude; not in a transimpedance stage */
   gain?: number;
-  /** Ω, R_g; left out at gain 1 = follower without a network */
+  /** Ω, R_g, in each leg of a difference stage; left out at gain 1 = followers without a network */
   gainResistance?: number;
-  /** Ω, from the + input to ground; left out = none */
+  /** Ω, from each + input of the source to ground; left out = none */
   loadResistance?: number;
+  /** Ω, each of the four resistors behind the input pair of an instrumentation stage; left out = 10 kΩ */
+  differenceResistance?: number;
   /** Ω, from the + input to ground in an inverting stage; 0 = none */
   biasResistance?: number;
   /** Ω, R_f of a transimpedance stage */
@@ -53,6 +64,9 @@ export interface StageConditions {
   /** Limits of the feedback network; below `minimumTotal` (Ω) it loads the output too much. */
   network?: { minimumTotal: number };
 }
+
+/** Ω, of the four resistors of an instrumentation stage where nothing else is stated (common practice, no source). */
+export const USUAL_DIFFERENCE_RESISTANCE = 10e3;
 
 /** Everything that the noise of a stage depends on besides the amplifier. */
 export interface OperatingConditions {

@@ -8,6 +8,7 @@ export const CAUTIONS = [
   'feedback-network-loads-output',
   'stability-unknown',
   'supply-unknown',
+  'several-packages',
 ] as const;
 export type Caution = (typeof CAUTIONS)[number];
 
@@ -21,6 +22,7 @@ export const CAUTION_LABELS: Record<Caution, string> = {
   'feedback-network-loads-output': 'network loads the output',
   'stability-unknown': 'stability unknown',
   'supply-unknown': 'supply unknown',
+  'several-packages': 'takes several packages',
 };
 
 /** One sentence that says what the caution means for the figure. */
@@ -35,6 +37,8 @@ export const CAUTION_DETAILS: Record<Caution, string> = {
   'feedback-network-loads-output': 'The feedback network is less than what the output is to drive.',
   'stability-unknown': 'The minimum stable gain is unknown: check it against the stage’s noise gain.',
   'supply-unknown': 'The supply range is unknown: check it against the supply of the stage.',
+  'several-packages':
+    'An instrumentation stage takes three channels of the same op-amp: more than one package of this part.',
 };
 
 /** Why a part is left out of a ranking; the first that applies is stated. */

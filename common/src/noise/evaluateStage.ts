@@ -42,6 +42,15 @@ export function evaluateStage(
   };
 }
 
+/** The `inputNoiseRms` of `evaluateStage` alone, for searches that compare many stages. */
+export function stageNoise(conditions: OperatingConditions, amplifier: NoiseAmplifier): number {
+  const model = stageModel(conditions);
+  const inStage = stageAmplifier(conditions, amplifier);
+  const overBand = bandEvaluation(conditions, model, inStage);
+  const atReference = referenceEvaluation(conditions, model);
+  return figuresFrom(conditions, model, inStage, overBand, atReference).inputNoiseRms;
+}
+
 /**
  * What keeps an amplifier's noise in a stage from being computed, field by field: with an unknown
  * gain–bandwidth product and a noise gain that rises with frequency, a first-order low-pass leaves the rms

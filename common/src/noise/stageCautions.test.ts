@@ -58,6 +58,25 @@ describe('the cautions of a stage', () => {
     expect(cautions).toEqual([]);
   });
 
+  it('name the packages of an instrumentation stage where one doesn’t hold three channels', () => {
+    const stage = { topology: 'instrumentation' as const, gain: 20, gainResistance: 1000 };
+    const conditions = conditionsWith({ ...AT_25, stage });
+    expect(cautionsOf({ channels: 2 }, conditions)).toEqual(['several-packages']);
+    expect(cautionsOf({ channels: 4 }, conditions)).toEqual([]);
+    expect(cautionsOf({ channels: 4, minimumStableGain: null }, conditions)).toEqual(['stability-unknown']);
+  });
+
+  it('name a network of an instrumentation stage that loads an output, before or behind the pair', () => {
+    const stage = (gainResistance: number, differenceResistance: number) =>
+      conditionsWith({
+        ...AT_25,
+        stage: { topology: 'instrumentation', gain: 20, gainResistance, differenceResistance },
+      });
+    expect(cautionsOf({ channels: 4 }, stage(51, 500))).toEqual([]);
+    expect(cautionsOf({ channels: 4 }, stage(49, 500))).toEqual(['feedback-network-loads-output']);
+    expect(cautionsOf({ channels: 4 }, stage(51, 499))).toEqual(['feedback-network-loads-output']);
+  });
+
   it.each(CAUTIONS)('have words for %s', (caution) => {
     expect(CAUTION_LABELS[caution].length).toBeLessThan(30);
     expect(CAUTION_DETAILS[caution]).toMatch(/^[A-Z].+\.$/);

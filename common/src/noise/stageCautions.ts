@@ -9,6 +9,9 @@ export const LEAST_NETWORK = 500;
 /** Minimum stable gains lie up to about here: a stage above it is stable with nearly any op-amp. */
 const SAFE_NOISE_GAIN = 10;
 
+/** Op-amps of one type in an instrumentation stage. */
+const INSTRUMENTATION_CHANNELS = 3;
+
 /** What makes the figures of this amplifier in this stage less certain than they look. */
 export function stageCautions(
   conditions: OperatingConditions,
@@ -33,6 +36,8 @@ export function stageCautions(
     'stability-unknown': amplifier.minimumStableGain === null && noiseGain < SAFE_NOISE_GAIN,
     'supply-unknown':
       filter.supply !== undefined && (unknown(amplifier.supplyMinimum) || unknown(amplifier.supplyMaximum)),
+    'several-packages':
+      stage.topology === 'instrumentation' && (amplifier.channels ?? 1) < INSTRUMENTATION_CHANNELS,
   };
   return (Object.keys(applies) as Caution[]).filter((caution) => applies[caution]);
 }

@@ -26,7 +26,8 @@ export function readPartHeadings(catalogue: ListedFields, headings: readonly str
   return columns;
 }
 
-function headingReader({ choice, parameters }: ListedFields): (heading: string) => PartColumn | null {
+/** Reads one heading after the other as {@link readPartHeadings} does; null = it means nothing. */
+export function headingReader({ choice, parameters }: ListedFields): (heading: string) => PartColumn | null {
   const texts = wordsOf([...PART_FIELDS, choice]);
   const figures = wordsOf(parameters);
   const origins = new Map(

@@ -1,9 +1,9 @@
 import type { FieldError } from './fieldError.js';
-import { type LibraryPart, originsOfKnown } from './part.js';
-import type { ListedFields, PartCatalogue } from './partCatalogue.js';
+import type { LibraryPart } from './part.js';
+import type { PartCatalogue } from './partCatalogue.js';
 import { readMissingColumn, readPartCell } from './partCell.js';
 import { type PartColumn, type PartColumns, readPartHeadings } from './partColumns.js';
-import { PART_FIELDS } from './partFields.js';
+import { expectedColumns, partOfValues, pathOfColumn } from './partValues.js';
 import type { Reading } from './reading.js';
 
 /** A row of a parts list, heading → cell. */
@@ -33,39 +33,13 @@ export function readPartRow<Part extends LibraryPart>(
     else if (values.has(field)) errors.push({ field, message: 'two columns hold this value: keep one' });
     else values.set(field, reading.value);
   };
-  const path = (column: PartColumn) => pathOf(catalogue, column);
+  const path = (column: PartColumn) => pathOfColumn(catalogue, column);
   for (const [heading, column] of columns)
     keep(path(column), readPartCell(catalogue, column, row[heading] ?? ''));
   const present = new Set([...columns.values()].map(path));
   for (const column of expectedColumns(catalogue))
     if (!present.has(path(column))) keep(path(column), readMissingColumn(catalogue, column));
-  return errors.length > 0 ? { ok: false, errors } : checked(catalogue, toPart(catalogue, values));
-}
-
-/** What a part must have or falls back to, whether the list has a column for it or not. */
-function expectedColumns({ choice, parameters }: ListedFields): PartColumn[] {
-  return [
-    ...[...PART_FIELDS, choice].map(({ key }): PartColumn => ({ holds: 'text', key })),
-    ...parameters.map(({ key }): PartColumn => ({ holds: 'figure', key, unit: '' })),
-  ];
-}
-
-function pathOf({ group, choice }: ListedFields, { holds, key }: PartColumn): string {
-  if (holds === 'origin') return `origins.${key}`;
-  return holds === 'figure' || key === choice.key ? `${group}.${key}` : key;
-}
-
-function toPart<Part>({ group }: ListedFields, values: ReadonlyMap<string, unknown>): Part {
-  const part: Record<string, unknown> = {};
-  const parameters: Record<string, unknown> = {};
-  const origins: Record<string, string> = {};
-  for (const [path, value] of values) {
-    const [place, key] = path.split('.');
-    if (place === group) parameters[key] = value;
-    else if (place !== 'origins') part[place] = value;
-    else if (value !== null) origins[key] = value as string;
-  }
-  return { ...part, [group]: parameters, origins: originsOfKnown(parameters, origins as object) } as Part;
+  return errors.length > 0 ? { ok: false, errors } : checked(catalogue, partOfValues(catalogue, values));
 }
 
 function checked<Part extends LibraryPart>({ check }: PartCatalogue<Part>, part: Part): PartRowReading<Part> {

@@ -35,6 +35,11 @@ describe('a series of resistors', () => {
     ]);
   });
 
+  it('has a noise index of 0 dB, not −0 dB, where it passes through zero', () => {
+    const [first] = parts({ 'noise index [dB]': '-0.01', 'highest noise index [dB]': '1' });
+    expect(first.resistor.noiseIndex).toBe(0);
+  });
+
   it('shares all else', () => {
     const [first, ...rest] = parts();
     expect(first).toMatchObject({ manufacturer: 'Vireo', package: '0603', lifecycle: 'active' });

@@ -53,5 +53,6 @@ function noiseIndexAt({ lowest, highest }: ResistorSeries, resistance: number): 
   if (from.noiseIndex === null || to.noiseIndex === null) return null;
   const decades = Math.log(to.resistance / from.resistance);
   const place = decades > 0 ? Math.log(resistance / from.resistance) / decades : 0;
-  return Math.round((from.noiseIndex + place * (to.noiseIndex - from.noiseIndex)) * 10) / 10;
+  // Rounding may give −0.
+  return Math.round((from.noiseIndex + place * (to.noiseIndex - from.noiseIndex)) * 10) / 10 + 0;
 }

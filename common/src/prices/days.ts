@@ -11,9 +11,9 @@ export function addDays(day: string, days: number): string {
   return dayOf(new Date(Date.parse(day) + days * MILLISECONDS_A_DAY));
 }
 
-/** Whether a text is a day of the calendar from 2000 on, written as `2026-12-01`. */
+/** Whether a text is a day of the years 2000 to 2199, written as `2026-12-01`. */
 export function isDay(text: unknown): text is string {
-  if (typeof text !== 'string' || !DAY.test(text) || text < '2000') return false;
+  if (typeof text !== 'string' || !DAY.test(text) || text < '2000' || text >= '2200') return false;
   const moment = new Date(`${text}T00:00:00Z`);
   return !Number.isNaN(moment.getTime()) && dayOf(moment) === text;
 }

@@ -8,4 +8,5 @@ export * from './parseQuantity.js';
 export * from './splitQuantity.js';
 export * from './formatQuantity.js';
 export * from './formatEditable.js';
+export { shortestNumber } from './plainNumber.js';
 export * from './column.js';

@@ -38,6 +38,18 @@ const stages: fc.Arbitrary<StageConditions> = fc.oneof(
     biasResistance: maybe(at('stage.biasResistance')),
   }),
   fc.record({
+    topology: fc.constant('difference' as const),
+    gain: at('stage.gain'),
+    gainResistance: at('stage.gainResistance'),
+  }),
+  fc.record({
+    topology: fc.constant('instrumentation' as const),
+    gain: at('stage.gain').map((gain) => Math.max(1, gain)),
+    gainResistance: at('stage.gainResistance'),
+    loadResistance: maybe(at('stage.loadResistance')),
+    differenceResistance: maybe(at('stage.differenceResistance')),
+  }),
+  fc.record({
     topology: fc.constant('transimpedance' as const),
     feedbackResistance: at('stage.feedbackResistance'),
     feedbackCapacitance: maybe(fc.oneof(fc.constant('auto' as const), at('stage.feedbackCapacitance'))),

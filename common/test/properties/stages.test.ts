@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import type { OperatingConditions } from '../../src/conditions/index.js';
+import { USUAL_DIFFERENCE_RESISTANCE, type OperatingConditions } from '../../src/conditions/index.js';
 import { CONTRIBUTORS, densitySpectrum, evaluateStage, sourceFloor } from '../../src/noise/index.js';
 import {
   amplifiers,
@@ -229,6 +229,9 @@ describe('the scaling laws', () => {
               ...(stage.gainResistance && { gainResistance: stage.gainResistance * k }),
               ...(stage.loadResistance && { loadResistance: stage.loadResistance * k }),
               ...(stage.biasResistance && { biasResistance: stage.biasResistance * k }),
+              ...(stage.topology === 'instrumentation' && {
+                differenceResistance: (stage.differenceResistance ?? USUAL_DIFFERENCE_RESISTANCE) * k,
+              }),
             },
           };
           const figures = evaluateStage(cold, known);

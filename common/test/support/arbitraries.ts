@@ -36,6 +36,18 @@ export const voltageStages: fc.Arbitrary<StageConditions> = fc.oneof(
     gainResistance: decades(1, 1e5),
     biasResistance: orZero(decades(1, 1e5)),
   }),
+  fc.record({
+    topology: fc.constant('difference' as const),
+    gain: decades(0.1, 1e3),
+    gainResistance: decades(1, 1e5),
+  }),
+  fc.record({
+    topology: fc.constant('instrumentation' as const),
+    gain: decades(1, 1e3),
+    gainResistance: decades(1, 1e4),
+    loadResistance: orNone(decades(1e3, 1e7)),
+    differenceResistance: orNone(decades(1e3, 1e5)),
+  }),
 );
 
 export const transimpedanceStages: fc.Arbitrary<StageConditions> = fc.record({

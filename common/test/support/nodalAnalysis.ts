@@ -29,7 +29,12 @@ interface Branch {
 interface Circuit {
   branches: Branch[];
   capacitors: { from: number; to: number; capacitance: number }[];
-  signal: 'emf of the first branch' | 'current into the − input';
+  signal:
+    'emf of the first branch' | 'half an emf on each of the first two branches' | 'current into the − input';
+  /** the one amplifier between + input, − input and output where left out */
+  amplifiers?: { plus: number; minus: number; out: number }[];
+  /** inputs whose current noise counts as that of the feedback network; the − input where left out */
+  feedbackInputs?: number[];
 }
 
 const GROUND = 0;
@@ -37,7 +42,8 @@ const PLUS = 1;
 const MINUS = 2;
 const OUT = 3;
 const SOURCE = 4;
-const NODES = 4;
+const OTHER_SOURCE = 5;
+const SINGLE = { plus: PLUS, minus: MINUS, out: OUT };
 
 function nonInverting({ source, stage, ...rest }: OperatingConditions, inputCapacitance: number): Circuit {
   const ambient = { temperature: rest.ambientTemperature };
@@ -111,12 +117,97 @@ function transimpedance({ source, stage, ...rest }: OperatingConditions, inputCa
   };
 }
 
+function difference({ source, stage, ...rest }: OperatingConditions, inputCapacitance: number): Circuit {
+  const temperature = rest.ambientTemperature;
+  const { gain = 1, gainResistance = 0 } = stage;
+  const half = { ...source, resistance: source.resistance / 2, inductance: source.inductance / 2 };
+  const feedback = (from: number, to: number, resistance: number): Branch => ({
+    from,
+    to,
+    resistance,
+    temperature,
+    contributor: 'feedback',
+  });
+  const feedbackResistance = gain * (half.resistance + gainResistance);
+  return {
+    branches: [
+      sourceBranch(half, SOURCE, temperature),
+      sourceBranch(half, OTHER_SOURCE, temperature),
+      feedback(SOURCE, MINUS, gainResistance),
+      feedback(OTHER_SOURCE, PLUS, gainResistance),
+      feedback(OUT, MINUS, feedbackResistance),
+      feedback(PLUS, GROUND, feedbackResistance),
+    ],
+    capacitors: [
+      { from: SOURCE, to: GROUND, capacitance: 2 * source.capacitance },
+      { from: OTHER_SOURCE, to: GROUND, capacitance: 2 * source.capacitance },
+      { from: MINUS, to: GROUND, capacitance: inputCapacitance },
+      { from: PLUS, to: GROUND, capacitance: inputCapacitance },
+    ],
+    signal: 'half an emf on each of the first two branches',
+  };
+}
+
+/** The input amplifiers of an instrumentation stage, before the third op-amp. */
+const PAIR = [
+  { plus: 4, minus: 5, out: 6, joins: MINUS },
+  { plus: 7, minus: 8, out: 9, joins: PLUS },
+];
+
+function instrumentation({ source, stage, ...rest }: OperatingConditions, inputCapacitance: number): Circuit {
+  const temperature = rest.ambientTemperature;
+  const { gain = 1, gainResistance = 0, loadResistance, differenceResistance = 10e3 } = stage;
+  const half = { ...source, resistance: source.resistance / 2, inductance: source.inductance / 2 };
+  const branch = (from: number, to: number, resistance: number, contributor: Contributor): Branch => ({
+    from,
+    to,
+    resistance,
+    temperature,
+    contributor,
+  });
+  const [one, other] = PAIR;
+  return {
+    branches: [
+      ...PAIR.map(({ plus }) => sourceBranch(half, plus, temperature)),
+      ...(loadResistance === undefined
+        ? []
+        : PAIR.map(({ plus }) => branch(plus, GROUND, loadResistance, 'bias'))),
+      ...PAIR.map(({ out, minus }) => branch(out, minus, (gainResistance * (gain - 1)) / 2, 'feedback')),
+      ...(gain > 1 ? [branch(one.minus, other.minus, gainResistance, 'feedback')] : []),
+      ...PAIR.map(({ out, joins }) => branch(out, joins, differenceResistance, 'feedback')),
+      branch(OUT, MINUS, differenceResistance, 'feedback'),
+      branch(PLUS, GROUND, differenceResistance, 'feedback'),
+    ],
+    capacitors: [
+      ...PAIR.map(({ plus }) => ({
+        from: plus,
+        to: GROUND,
+        capacitance: 2 * source.capacitance + inputCapacitance,
+      })),
+      ...[one.minus, other.minus, MINUS, PLUS].map((from) => ({
+        from,
+        to: GROUND,
+        capacitance: inputCapacitance,
+      })),
+    ],
+    signal: 'half an emf on each of the first two branches',
+    amplifiers: [...PAIR, SINGLE],
+    feedbackInputs: [one.minus, other.minus, MINUS, PLUS],
+  };
+}
+
 function sourceBranch(source: OperatingConditions['source'], to: number, ambient: number): Branch {
   const { resistance, inductance, temperature = ambient } = source;
   return { from: GROUND, to, resistance, inductance, temperature, contributor: 'source' };
 }
 
-const CIRCUITS = { 'non-inverting': nonInverting, inverting, transimpedance };
+const CIRCUITS = {
+  'non-inverting': nonInverting,
+  inverting,
+  transimpedance,
+  difference,
+  instrumentation,
+};
 
 /** Output noise by contributor in V²/Hz at one frequency, and the signal's power gain there. */
 export interface NodalSpot {
@@ -139,21 +230,34 @@ export function nodalAnalysis(conditions: OperatingConditions, amplifier: KnownA
     powers.source += shotPowerDensity(conditions.source.directCurrent ?? 0) * transfer.ofCurrent(MINUS);
     const { voltageNoise, voltageNoiseCorner, currentNoise, currentNoiseCorner } = amplifier;
     const current2 = currentNoise ** 2 * (1 + currentNoiseCorner / frequency);
+    const { amplifiers = [SINGLE], feedbackInputs = [MINUS] } = circuit;
+    const inputs = amplifiers.flatMap(({ plus, minus }) => [plus, minus]);
     powers.amplifierVoltage =
-      voltageNoise ** 2 * (1 + voltageNoiseCorner / frequency) * transfer.ofAmplifier();
-    powers.amplifierCurrentSource = current2 * transfer.ofCurrent(PLUS);
-    powers.amplifierCurrentFeedback = current2 * transfer.ofCurrent(MINUS);
-    const gain2 =
-      circuit.signal === 'current into the − input' ? transfer.ofCurrent(MINUS) : transfer.ofBranch(0);
-    return { powers, gain2 };
+      voltageNoise ** 2 *
+      (1 + voltageNoiseCorner / frequency) *
+      sum(amplifiers.map((_, k) => transfer.ofAmplifier(k)));
+    for (const input of inputs) {
+      const contributor = feedbackInputs.includes(input)
+        ? 'amplifierCurrentFeedback'
+        : 'amplifierCurrentSource';
+      powers[contributor] += current2 * transfer.ofCurrent(input);
+    }
+    return { powers, gain2: signalGain2(circuit, transfer) };
   };
 }
 
+function signalGain2({ signal }: Circuit, transfer: ReturnType<typeof transfersToOutput>): number {
+  if (signal === 'current into the − input') return transfer.ofCurrent(MINUS);
+  return signal === 'emf of the first branch' ? transfer.ofBranch(0) : transfer.ofDifference(0, 1) / 4;
+}
+
+const sum = (values: number[]) => values.reduce((total, value) => total + value, 0);
+
 /** Rows: currents into each node, one voltage law a branch, the amplifier's law. */
 function transfersToOutput(circuit: Circuit, amplifier: KnownAmplifier, frequency: number) {
-  const { branches, capacitors } = circuit;
-  const nodes = branches.some(({ to }) => to === SOURCE) ? NODES : NODES - 1;
-  const size = nodes + branches.length + 1;
+  const { branches, capacitors, amplifiers = [SINGLE] } = circuit;
+  const nodes = Math.max(OUT, ...branches.flatMap(({ from, to }) => [from, to]));
+  const size = nodes + branches.length + amplifiers.length;
   const matrix: ComplexMatrix = { size, re: new Float64Array(size ** 2), im: new Float64Array(size ** 2) };
   const angular = 2 * Math.PI * frequency;
   const add = (row: number, column: number, re: number, im = 0) => {
@@ -183,16 +287,20 @@ function transfersToOutput(circuit: Circuit, amplifier: KnownAmplifier, frequenc
     }
     add(row, row, -resistance, -angular * inductance);
   });
-  const law = size - 1;
-  add(node(OUT), law, 1);
-  add(law, node(PLUS), 1);
-  add(law, node(MINUS), -1);
-  if (amplifier.gainBandwidth !== null) add(law, node(OUT), 0, -frequency / amplifier.gainBandwidth);
+  const law = (k: number) => nodes + branches.length + k;
+  amplifiers.forEach(({ plus, minus, out }, k) => {
+    add(node(out), law(k), 1);
+    add(law(k), node(plus), 1);
+    add(law(k), node(minus), -1);
+    if (amplifier.gainBandwidth !== null) add(law(k), node(out), 0, -frequency / amplifier.gainBandwidth);
+  });
   const { re, im } = solveTransposed(matrix, node(OUT));
   const square = (row: number) => re[row] ** 2 + im[row] ** 2;
   return {
     ofBranch: (k: number) => square(nodes + k),
+    ofDifference: (a: number, b: number) =>
+      (re[nodes + a] - re[nodes + b]) ** 2 + (im[nodes + a] - im[nodes + b]) ** 2,
     ofCurrent: (index: number) => square(node(index)),
-    ofAmplifier: () => square(law),
+    ofAmplifier: (k: number) => square(law(k)),
   };
 }

@@ -23,6 +23,13 @@ const stages = {
     band: { lowPassOrder: 2 },
   }),
   'an inverting stage': conditionsWith({ stage: { topology: 'inverting', gain: 10, gainResistance: 1000 } }),
+  'a difference stage': conditionsWith({
+    stage: { topology: 'difference', gain: 10, gainResistance: 1000 },
+  }),
+  'an instrumentation stage': conditionsWith({
+    source: { resistance: 300 },
+    stage: { topology: 'instrumentation', gain: 10, gainResistance: 1000 },
+  }),
   'a transimpedance stage': conditionsWith({
     source: { resistance: 1e8, capacitance: 1e-11 },
     stage: {
@@ -78,6 +85,13 @@ describe('findLevers', () => {
     ['cool-source', conditionsWith({ source: { resistance: 0 } })],
     ['transformer', conditionsWith({ source: { resistance: 1e5 } })],
     ['quieter-part', stages['a low source resistance']],
+    ['parallel', stages['a difference stage']],
+    ['parallel', stages['an instrumentation stage']],
+    ['transformer', stages['a difference stage']],
+    [
+      'lower-network',
+      conditionsWith({ stage: { topology: 'instrumentation', gain: 1, differenceResistance: 500 } }),
+    ],
   ])('leaves out %s where it can’t help', (key, conditions) => {
     expect(keysOf(conditions)).not.toContain(key);
   });
@@ -88,6 +102,27 @@ describe('findLevers', () => {
     });
     const lever = findLevers(conditions, part).find(({ key }) => key === 'lower-network')!;
     expect(lever.conditions.stage.gainResistance).toBe(20);
+    expect(lever.change).toBeLessThan(0);
+  });
+});
+
+describe('the network of a stage with two inputs', () => {
+  const lowered = (key: keyof typeof stages) =>
+    findLevers(stages[key], part).find((lever) => lever.key === 'lower-network')!;
+
+  it('is lowered in both legs of a difference stage until its R_f is what the output is to drive', () => {
+    const lever = lowered('a difference stage');
+    // 500 Ω = 10·(R_g + 1000 Ω/2) leaves nothing for R_g.
+    expect(lever.conditions.stage.gainResistance).toBe(0);
+    expect(lever.label).toBe('Lower the gain resistance to 0 Ω');
+  });
+
+  it('is lowered around the input pair and behind it, in an instrumentation stage', () => {
+    const lever = lowered('an instrumentation stage');
+    expect(lever.conditions.stage).toMatchObject({ gainResistance: 100, differenceResistance: 500 });
+    expect(lever.label.replaceAll('\u2009', ' ')).toBe(
+      'Lower the gain resistance to 100 Ω, the difference resistances to 500 Ω',
+    );
     expect(lever.change).toBeLessThan(0);
   });
 });
@@ -121,5 +156,20 @@ describe('transformer', () => {
     const matched = behindTransformer(conditions, Math.sqrt(optimum / 10));
     const least = 10 * Math.log10(1 + (2 * 3e-9 * 1e-12) / (4 * 1.380649e-23 * 290));
     expect(evaluateStage(matched, white).noiseFigure).toBeCloseTo(least, 6);
+  });
+
+  it('has its optimum at 2·e_n/i_n before the two inputs of an instrumentation stage', () => {
+    const at = (resistance: number) =>
+      conditionsWith({
+        source: { resistance },
+        // So much gain that source and input pair alone count.
+        stage: { topology: 'instrumentation', gain: 1e5, gainResistance: 1e-4, differenceResistance: 1 },
+      });
+    const white = amplifierWith({ voltageNoiseCorner: 0, currentNoiseCorner: 0, gainBandwidth: null });
+    const optimum = optimumSourceResistance(at(10), white);
+    expect(optimum).toBeCloseTo(6000, 9);
+    const figure = (resistance: number) => evaluateStage(at(resistance), white).noiseFigure!;
+    expect(figure(optimum)).toBeLessThan(figure(optimum * 1.2));
+    expect(figure(optimum)).toBeLessThan(figure(optimum / 1.2));
   });
 });

@@ -1,7 +1,13 @@
-import type { OperatingConditions, StageConditions } from '../../conditions/index.js';
+import {
+  USUAL_DIFFERENCE_RESISTANCE,
+  type OperatingConditions,
+  type StageConditions,
+  type Topology,
+} from '../../conditions/index.js';
 import { formatQuantity, type QuantityKind } from '../../units/index.js';
 import type { NoiseAmplifier } from '../amplifierNoise.js';
 import { evaluateStage } from '../evaluateStage.js';
+import { leastGainResistance } from '../leastGainResistance.js';
 import { sourceTemperature } from '../sourceNoise.js';
 import { LEAST_NETWORK } from '../stageCautions.js';
 import { parallelStage } from './parallelStage.js';
@@ -125,25 +131,40 @@ function halveBand(conditions: OperatingConditions, amplifier: NoiseAmplifier): 
 function lowerNetwork(conditions: OperatingConditions, amplifier: NoiseAmplifier): Proposal | null {
   const { stage, source } = conditions;
   const total = stage.network?.minimumTotal ?? LEAST_NETWORK;
-  const gainResistance = leastGainResistance(stage, source.resistance, total);
-  if (gainResistance === null || gainResistance >= (stage.gainResistance ?? 0)) return null;
+  const lower = lowerResistances(stage, source.resistance, total);
+  if (Object.keys(lower).length === 0) return null;
   return {
     key: 'lower-network',
-    label: `Lower the gain resistance to ${show(gainResistance, 'resistance')}`,
+    label: `Lower the ${resistancesText(lower)}`,
     sentence: `The feedback network’s noise falls with it; ${show(total, 'resistance')} is what the output is to drive.`,
-    conditions: { ...conditions, stage: { ...stage, gainResistance } },
+    conditions: { ...conditions, stage: { ...stage, ...lower } },
     amplifier,
   };
 }
 
-/** Ω, the R_g with which the output sees just `total`. */
-function leastGainResistance(
-  { topology, gain = 1 }: StageConditions,
+type NetworkResistances = Pick<StageConditions, 'gainResistance' | 'differenceResistance'>;
+
+/** Those of the network's resistances that can be lowered until the outputs see just `total`. */
+function lowerResistances(
+  stage: StageConditions,
   sourceResistance: number,
   total: number,
-): number | null {
-  if (topology === 'non-inverting') return gain > 1 ? total / gain : null;
-  return topology === 'inverting' ? Math.max(0, total / gain - sourceResistance) : null;
+): NetworkResistances {
+  const gainResistance = leastGainResistance(stage, sourceResistance, total);
+  const { topology, differenceResistance = USUAL_DIFFERENCE_RESISTANCE } = stage;
+  return {
+    ...(gainResistance !== null && gainResistance < (stage.gainResistance ?? 0) && { gainResistance }),
+    ...(topology === 'instrumentation' && total < differenceResistance && { differenceResistance: total }),
+  };
+}
+
+function resistancesText({ gainResistance, differenceResistance }: NetworkResistances): string {
+  const parts = [
+    gainResistance !== undefined && `gain resistance to ${show(gainResistance, 'resistance')}`,
+    differenceResistance !== undefined &&
+      `difference resistances to ${show(differenceResistance, 'resistance')}`,
+  ];
+  return parts.filter((part) => part !== false).join(', the ');
 }
 
 const FEEDBACK_FACTOR = 10;
@@ -173,11 +194,14 @@ function inParallel(conditions: OperatingConditions, amplifier: NoiseAmplifier):
   };
 }
 
+/** Stages that the source's resistance doesn't set the gain of. */
+const TRANSFORMABLE: readonly Topology[] = ['non-inverting', 'instrumentation'];
+
 function stepUp(conditions: OperatingConditions, amplifier: NoiseAmplifier): Proposal | null {
   const { source, stage } = conditions;
   const optimum = optimumSourceResistance(conditions, amplifier);
   const ratio = Math.sqrt(optimum / source.resistance);
-  if (stage.topology !== 'non-inverting' || !Number.isFinite(ratio) || ratio <= 1) return null;
+  if (!TRANSFORMABLE.includes(stage.topology) || !Number.isFinite(ratio) || ratio <= 1) return null;
   return {
     key: 'transformer',
     label: `Step-up transformer 1:${ratio.toPrecision(2)} (ideal)`,

@@ -3,17 +3,22 @@ import type { NoiseAmplifier } from '../amplifierNoise.js';
 import { stageAmplifier } from '../stageAmplifier.js';
 
 /**
- * Source resistance in Ω at which an amplifier's noise figure is least, e_n/i_n at the reference frequency.
- * Infinity where the current noise is zero.
+ * Source resistance in Ω at which an amplifier's noise figure is least, e_n/i_n at the reference frequency; in an
+ * instrumentation stage, whose two inputs make √2·e_n and i_n/√2 of the source, 2·e_n/i_n. Infinity where the
+ * current noise is zero.
  *
  * Source: Rothe & Dahlke 1956.
  */
 export function optimumSourceResistance(conditions: OperatingConditions, amplifier: NoiseAmplifier): number {
   const { voltage2, voltageCorner, current2, currentCorner } = stageAmplifier(conditions, amplifier);
-  const { referenceFrequency } = conditions;
-  return Math.sqrt(
-    (voltage2 * (1 + voltageCorner / referenceFrequency)) /
-      (current2 * (1 + currentCorner / referenceFrequency)),
+  const { referenceFrequency, stage } = conditions;
+  const inputs = stage.topology === 'instrumentation' ? 2 : 1;
+  return (
+    inputs *
+    Math.sqrt(
+      (voltage2 * (1 + voltageCorner / referenceFrequency)) /
+        (current2 * (1 + currentCorner / referenceFrequency)),
+    )
   );
 }
 

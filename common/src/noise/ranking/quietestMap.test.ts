@@ -37,6 +37,14 @@ const stages: [string, OperatingConditions][] = [
   ['a non-inverting stage', base],
   ['a non-inverting stage with a coil', { ...base, source: { ...base.source, inductance: 0.1 } }],
   ['an inverting stage', { ...base, stage: { topology: 'inverting', gain: 5, gainResistance: 1000 } }],
+  ['a difference stage', { ...base, stage: { topology: 'difference', gain: 5, gainResistance: 1000 } }],
+  [
+    'an instrumentation stage of high impedance',
+    {
+      ...base,
+      stage: { topology: 'instrumentation', gain: 3, gainResistance: 1e6, differenceResistance: 1e5 },
+    },
+  ],
   [
     'a transimpedance stage',
     { ...base, stage: { topology: 'transimpedance', feedbackResistance: 1e6, feedbackCapacitance: 'auto' } },

@@ -1,6 +1,6 @@
 import type { OperatingConditions, PartFilter } from '../../conditions/index.js';
 import { addedPower } from '../budget.js';
-import { INTEGRAL, INTEGRALS, type Evaluate } from '../stage/model.js';
+import { INTEGRAL, INTEGRALS, type Evaluate, type StageModel } from '../stage/model.js';
 import { stageModel } from '../stage/stageModel.js';
 import { referenceEvaluation } from '../stageFigures.js';
 import type { AmplifierColumns } from './columns.js';
@@ -64,8 +64,8 @@ export function cellConditions(
  * Which part has the lowest noise density, referred to the source, for each source resistance and each
  * frequency: in each cell the leader of a ranking by `inputNoiseDensity` at `cellConditions`.
  *
- * Without inductance a part's density falls with its input capacitance, and it never depends on its
- * gain–bandwidth product; so the value at the least capacitance is a lower bound, and few parts are evaluated.
+ * Where a part's density never falls with its input capacitance and doesn't depend on its gain–bandwidth
+ * product, the value at the least capacitance is a lower bound, and few parts are evaluated.
  */
 export function quietestMap(query: MapQuery, libraries: readonly AmplifierColumns[]): QuietestMap {
   const resistances = axisPoints(query.resistance);
@@ -114,7 +114,7 @@ function findWinner(
   const model = stageModel(conditions);
   const evaluate = referenceEvaluation(conditions, model);
   const exclude = prepareExclusions(conditions, filter, model);
-  const densities = libraries.map((columns) => densitiesOf(conditions, evaluate, columns));
+  const densities = libraries.map((columns) => densitiesOf(conditions, model, evaluate, columns));
   let best = Infinity;
   let winner: PartPlace | null = null;
   const consider = (library: number, row: number) => {
@@ -137,23 +137,26 @@ function isBefore(a: PartPlace, b: PartPlace): boolean {
 }
 
 /** What a row adds to the source's squared density, exactly and as a lower bound. */
-function densitiesOf(conditions: OperatingConditions, evaluate: Evaluate, columns: AmplifierColumns) {
-  const { source } = conditions;
+function densitiesOf(
+  conditions: OperatingConditions,
+  model: StageModel,
+  evaluate: Evaluate,
+  columns: AmplifierColumns,
+) {
+  const isBounded = model.spotRises && conditions.source.inductance === 0;
   const { gainBandwidth, inputCapacitance } = preparedColumns(columns);
   const generatorsAt = prepareGenerators(conditions, columns);
   const exact = new Float64Array(INTEGRALS);
   const least = new Float64Array(INTEGRALS);
   const leastCapacitance = inputCapacitance.reduce((a, b) => Math.min(a, b), Infinity);
-  if (source.inductance === 0) evaluate(Infinity, leastCapacitance, least);
+  if (isBounded) evaluate(Infinity, leastCapacitance, least);
   return {
     at(row: number): number {
       evaluate(gainBandwidth[row], inputCapacitance[row], exact);
       return addedPower(exact, generatorsAt(row)) / exact[INTEGRAL.source];
     },
     atLeast(row: number): number {
-      return source.inductance === 0
-        ? (ALMOST * addedPower(least, generatorsAt(row))) / least[INTEGRAL.source]
-        : 0;
+      return isBounded ? (ALMOST * addedPower(least, generatorsAt(row))) / least[INTEGRAL.source] : 0;
     },
   };
 }

@@ -38,7 +38,14 @@ export const RESISTOR_EXCLUSION_LABELS: Record<ResistorExclusionReason, string> 
 };
 
 /** The figures by which a ranking of resistors can be sorted; `-` in front = descending. */
-export const RESISTOR_SORTS = ['totalRms', 'aboveThermal', 'dissipation', 'resistance', 'tolerance'] as const;
+export const RESISTOR_SORTS = [
+  'totalRms',
+  'aboveThermal',
+  'dissipation',
+  'resistance',
+  'tolerance',
+  'unitPrice',
+] as const;
 export type ResistorSort = (typeof RESISTOR_SORTS)[number];
 
 export interface ResistorQuery {
@@ -48,6 +55,8 @@ export interface ResistorQuery {
   descending: boolean;
   limit: number;
   offset: number;
+  /** what each resistor costs, in one currency; NaN = without a price */
+  prices?: Float64Array;
 }
 
 /** A resistor of the ranking, by its place in the list that was given. */
@@ -88,7 +97,7 @@ export function rankResistors(query: ResistorQuery, resistors: readonly LibraryR
     return reason === null;
   });
   const figures = figuresOf(conditions, resistors, accepted);
-  const keys = Float64Array.from(accepted, (index, n) => sortKey(query, resistors[index], figures[n]));
+  const keys = Float64Array.from(accepted, (index, n) => sortKey(query, resistors, index, figures[n]));
   const page = smallestPositions(keys, query.offset + query.limit).subarray(query.offset);
   return {
     total: accepted.length,
@@ -170,11 +179,14 @@ function figuresOf(
 }
 
 function sortKey(
-  { sort, descending }: ResistorQuery,
-  { resistance, tolerance }: LibraryResistor,
+  { sort, descending, prices }: ResistorQuery,
+  resistors: readonly LibraryResistor[],
+  index: number,
   figures: ResistorFigures,
 ): number {
+  const { resistance, tolerance } = resistors[index];
+  const unitPrice = prices?.[index] ?? NaN;
   const isBound = figures.excessRms === null && (sort === 'totalRms' || sort === 'aboveThermal');
-  const value = isBound ? NaN : { ...figures, resistance, tolerance: tolerance ?? NaN }[sort];
+  const value = isBound ? NaN : { ...figures, resistance, tolerance: tolerance ?? NaN, unitPrice }[sort];
   return descending ? -value : value;
 }

@@ -46,6 +46,11 @@ export interface StageModel {
    * the band may dip between amplifiers that are near neighbours.
    */
   canNotch: boolean;
+  /**
+   * Without inductance a spot density, referred to the source, depends on no gain–bandwidth product and never
+   * falls with the input capacitance.
+   */
+  spotRises: boolean;
   /** Nothing depends on frequency with an ideal amplifier without input capacitance. */
   resistive: boolean;
   /** Ω that the feedback network puts on the output, Infinity where there is none. */

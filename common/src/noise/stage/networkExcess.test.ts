@@ -35,6 +35,42 @@ describe('excess noise of the feedback network', () => {
     expect(contributions.excess).toBeCloseTo(excessNoiseRms(0, 0.3, 0.1, 1000), 15);
   });
 
+  it('is that of all four resistors at their own currents, in a difference stage', () => {
+    const source = { resistance: 1000 };
+    const stage = {
+      topology: 'difference' as const,
+      gain: 10,
+      gainResistance: 500,
+      outputVoltage: 4.4,
+      gainNoiseIndex: 0,
+      feedbackNoiseIndex: -20,
+    };
+    const conditions = conditionsWith({ source, stage, band, referenceFrequency: 100 });
+    const { contributions } = evaluateStage(conditions, fast);
+    // 0.44 V at the source lifts both inputs to 0.22 V·10/11 = 0.2 V: R_f of 10 kΩ carry 20 µA and 420 µA.
+    const of = (current: number) =>
+      Math.hypot(
+        excessNoiseRms(0, current * 500, 0.1, 1000) * 10,
+        excessNoiseRms(-20, current * 1e4, 0.1, 1000),
+      );
+    expect(contributions.excess).toBeCloseTo(Math.hypot(of(20e-6), of(420e-6)) / 10, 15);
+  });
+
+  it('is that of R_g and both R_f around the input pair, in an instrumentation stage', () => {
+    const stage = {
+      topology: 'instrumentation' as const,
+      gain: 11,
+      gainResistance: 1000,
+      outputVoltage: 5.5,
+      gainNoiseIndex: -10,
+      feedbackNoiseIndex: 0,
+    };
+    const { contributions } = evaluateStage(conditionsWith({ stage, band, referenceFrequency: 100 }), fast);
+    const ofFeedback = excessNoiseRms(0, 2.5, 0.1, 1000) / 11;
+    const ofGain = (excessNoiseRms(-10, 0.5, 0.1, 1000) * 10) / 11;
+    expect(contributions.excess).toBeCloseTo(Math.hypot(ofFeedback, ofFeedback, ofGain), 15);
+  });
+
   it('is a current of V·10^(NI/20)·1e-6/R_f in a transimpedance stage', () => {
     const source = { resistance: 1e9 };
     const stage = {

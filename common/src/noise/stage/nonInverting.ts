@@ -1,5 +1,6 @@
 import type { OperatingConditions, StageConditions } from '../../conditions/index.js';
 import { polynomialRoots } from '../../numeric/index.js';
+import { dividerGrowth, dividerNodes, dividerPowers, type InputCircuit } from './divider.js';
 import { INTEGRAL, quadraticQuality, type Evaluate, type StageModel } from './model.js';
 import { networkExcess } from './networkExcess.js';
 import type { Nodes } from './nodes.js';
@@ -13,47 +14,36 @@ import type { Nodes } from './nodes.js';
 export function nonInvertingModel({ source, stage }: OperatingConditions): StageModel {
   const gain = stage.gain ?? 1;
   const gainResistance = gain > 1 ? (stage.gainResistance ?? 0) : 0;
-  const loadConductance = stage.loadResistance === undefined ? 0 : 1 / stage.loadResistance;
-  const divider = 1 + source.resistance * loadConductance;
-  const denominator = (inputCapacitance: number): [number, number, number] => {
-    const capacitance = source.capacitance + inputCapacitance;
-    return [
-      divider,
-      source.resistance * capacitance + source.inductance * loadConductance,
-      source.inductance * capacitance,
-    ];
+  const input: InputCircuit = {
+    ...source,
+    loadConductance: stage.loadResistance === undefined ? 0 : 1 / stage.loadResistance,
   };
   return {
     compile: (nodes) =>
       compile(nodes, {
-        ...source,
+        ...input,
         gain,
-        loadConductance,
         parallel: gainResistance * (1 - 1 / gain),
         excess: excessAtOutput(stage, gain, gainResistance),
       }),
     noiseGain: () => gain,
     crossoverNoiseGain: () => gain,
     poles: (gainBandwidth, inputCapacitance) => [
-      ...polynomialRoots(denominator(inputCapacitance)),
+      ...polynomialRoots(dividerPowers(input, inputCapacitance)),
       ...(Number.isFinite(gainBandwidth) ? [{ re: (-2 * Math.PI * gainBandwidth) / gain, im: 0 }] : []),
     ],
     quality: (_gainBandwidth, inputCapacitance) =>
-      source.inductance === 0 ? 0 : quadraticQuality(...denominator(inputCapacitance)),
-    growth: (inputCapacitance) =>
-      source.inductance > 0 && loadConductance === 0 && source.capacitance + inputCapacitance === 0 ? 2 : 0,
+      source.inductance === 0 ? 0 : quadraticQuality(...dividerPowers(input, inputCapacitance)),
+    growth: (inputCapacitance) => dividerGrowth(input, inputCapacitance),
     canNotch: false,
+    spotRises: true,
     resistive: source.inductance === 0 && source.capacitance === 0,
     networkResistance: gainResistance > 0 ? gainResistance * gain : Infinity,
   };
 }
 
-interface Circuit {
-  resistance: number;
-  inductance: number;
-  capacitance: number;
+interface Circuit extends InputCircuit {
   gain: number;
-  loadConductance: number;
   /** R_f ∥ R_g */
   parallel: number;
   /** squared excess noise of the network at the output at 1 Hz, V²/Hz */
@@ -74,23 +64,10 @@ function excessAtOutput(stage: StageConditions, gain: number, gainResistance: nu
 }
 
 function compile(nodes: Nodes, circuit: Circuit): Evaluate {
-  const { resistance, inductance, gain, loadConductance, parallel, excess } = circuit;
+  const { gain, loadConductance, parallel, excess } = circuit;
   const { count, white, flicker, sourcePower, ambientPower } = nodes;
-  const real = new Float64Array(count);
-  const imaginary = new Float64Array(count);
-  const realPerFarad = new Float64Array(count);
-  const imaginaryPerFarad = new Float64Array(count);
-  const impedance2 = new Float64Array(count);
-  const frequency2 = new Float64Array(count);
-  for (let k = 0; k < count; k++) {
-    const w = nodes.angular[k];
-    realPerFarad[k] = -w * w * inductance;
-    imaginaryPerFarad[k] = w * resistance;
-    real[k] = 1 + resistance * loadConductance + realPerFarad[k] * circuit.capacitance;
-    imaginary[k] = w * inductance * loadConductance + imaginaryPerFarad[k] * circuit.capacitance;
-    impedance2[k] = resistance * resistance + w * w * inductance * inductance;
-    frequency2[k] = nodes.frequency[k] ** 2;
-  }
+  const { real, imaginary, realPerFarad, imaginaryPerFarad, impedance2 } = dividerNodes(nodes, circuit);
+  const frequency2 = nodes.frequency.map((frequency) => frequency ** 2);
   return (gainBandwidth, inputCapacitance, out) => {
     const slowness = (gain / gainBandwidth) ** 2;
     let voltageWhite = 0;

@@ -30,6 +30,9 @@ describe('checkStageSearch', () => {
       { source: { resistance: 0, inductance: 0, capacitance: 0 } },
     ),
     sought({ topology: 'transimpedance', gain: undefined, feedbackResistance: 1e6 }),
+    sought({ topology: 'difference', gain: 0.5 }),
+    sought({ topology: 'instrumentation', gain: 1, differenceResistance: 1000 }),
+    sought({ parallelMaximum: 8 }),
   ])('takes a search that can be met: %#', (conditions) => {
     expect(checkStageSearch(conditions)).toEqual([]);
   });
@@ -38,6 +41,10 @@ describe('checkStageSearch', () => {
     ['conditions.stage.gainTolerance', sought({ gainTolerance: 0.9 })],
     ['conditions.stage.parallelMaximum', sought({ parallelMaximum: 9 })],
     ['conditions.stage.parallelMaximum', sought({ parallelMaximum: 1.5 })],
+    ['conditions.stage.parallelMaximum', sought({ topology: 'inverting', parallelMaximum: 2 })],
+    ['conditions.stage.parallelMaximum', sought({ topology: 'instrumentation', parallelMaximum: 2 })],
+    ['conditions.stage.differenceResistance', sought({ differenceResistance: 1000 })],
+    ['conditions.stage.gain', sought({ topology: 'instrumentation', gain: 0.5 })],
     ['conditions.stage.network.maximumTotal', sought({ network: { minimumTotal: 500, maximumTotal: 400 } })],
     ['conditions.stage.network.maximumTotal', sought({ network: { minimumTotal: 500, maximumTotal: NaN } })],
     ['conditions.stage.outputVoltage', sought({ outputVoltage: Infinity })],

@@ -19,13 +19,25 @@ export function checkStageSearch(conditions: SoughtConditions, filter?: PartFilt
     const message = boundsError(STAGE_SEARCH_FIELDS[field as keyof typeof values], value);
     return message === null ? [] : [{ field, message }];
   });
-  return [...bounds, ...checkLimits(conditions), ...checkNominal(conditions, filter)];
+  return [
+    ...bounds,
+    ...checkLimits(conditions),
+    ...checkParallel(conditions),
+    ...checkNominal(conditions, filter),
+  ];
 }
 
 function checkLimits({ stage: { network } }: SoughtConditions): FieldError[] {
   if (network.maximumTotal >= network.minimumTotal) return [];
   const message = 'network, at most: not below what the output drives at least';
   return [{ field: 'conditions.stage.network.maximumTotal', message }];
+}
+
+/** Elsewhere the source sees the networks of joined channels, and the gain isn't that of one. */
+function checkParallel({ stage: { topology, parallelMaximum } }: SoughtConditions): FieldError[] {
+  if (topology === 'non-inverting' || parallelMaximum === 1) return [];
+  const message = 'channels in parallel, at most: only non-inverting stages are joined, set it to 1';
+  return [{ field: 'conditions.stage.parallelMaximum', message }];
 }
 
 /** The stage at the wanted gain must be one that can be computed; its network isn't the asker's to state. */

@@ -1,4 +1,4 @@
-import type { Network, NetworkResistor, SoughtConditions } from './stageSearch.js';
+import { isFollower, type Network, type NetworkResistor, type SoughtConditions } from './stageSearch.js';
 
 /** All networks that the library's resistors make, in ascending order of the gain resistance. */
 export interface Networks {
@@ -22,14 +22,13 @@ const ROUNDING = 1e-12;
 
 /**
  * The networks that give the wanted gain within its tolerance and keep the limits of their total: R_g and
- * R_f of a non-inverting or inverting stage, R_f alone of a transimpedance stage, none of a follower. Of
+ * R_f of a stage on a voltage source, R_f alone of a transimpedance stage, none of a follower. Of
  * resistors with equal values only the one with the least excess noise counts; where a direct output voltage
  * drives excess noise, resistors of unknown noise index don't count.
  */
 export function findNetworks(conditions: SoughtConditions, resistors: readonly NetworkResistor[]): Networks {
   const { stage } = conditions;
-  if (stage.topology === 'non-inverting' && stage.gain === 1)
-    return { all: [FOLLOWER], pairs: 1, nearestGain: 1 };
+  if (isFollower(stage)) return { all: [FOLLOWER], pairs: 1, nearestGain: 1 };
   const values = distinctValues(resistors, (stage.outputVoltage ?? 0) !== 0);
   return stage.topology === 'transimpedance' ? findSingle(conditions, values) : findPairs(conditions, values);
 }
@@ -84,23 +83,21 @@ function nearer(best: number | null, gain: number, wanted: number): number {
   return best === null || Math.abs(gain - wanted) < Math.abs(best - wanted) ? gain : best;
 }
 
-function findPairs({ stage, source }: SoughtConditions, values: readonly Value[]): Networks {
+function findPairs(conditions: SoughtConditions, values: readonly Value[]): Networks {
+  const { stage } = conditions;
   const wanted = stage.gain!;
-  const isInverting = stage.topology === 'inverting';
+  const { least, times, series, share } = gainLaw(conditions);
   const all: Network[] = [];
   let pairs = 0;
   let nearestGain: number | null = null;
   const spread = wanted * (stage.gainTolerance + ROUNDING);
   for (const gainValue of values) {
-    const series = isInverting ? source.resistance + gainValue.resistance : gainValue.resistance;
-    const gainWith = (feedback: number) => (isInverting ? feedback / series : 1 + feedback / series);
-    const feedbackFor = (gain: number) => (isInverting ? gain : gain - 1) * series;
-    const least = feedbackFor(wanted - spread);
-    const from = firstAtLeast(values, least);
+    const perGain = (series + gainValue.resistance) / times;
+    const from = firstAtLeast(values, (wanted - spread - least) * perGain);
     for (let i = Math.max(0, from - 1); i < values.length; i++) {
       const feedback = values[i];
-      const gain = gainWith(feedback.resistance);
-      const total = feedback.resistance + (isInverting ? 0 : gainValue.resistance);
+      const gain = least + feedback.resistance / perGain;
+      const total = feedback.resistance + share * gainValue.resistance;
       if (isWithin(total, stage.network)) {
         nearestGain = nearer(nearestGain, gain, wanted);
         if (Math.abs(gain - wanted) <= spread) {
@@ -112,6 +109,28 @@ function findPairs({ stage, source }: SoughtConditions, values: readonly Value[]
     }
   }
   return { all, pairs, nearestGain };
+}
+
+/** Gain least + times·R_f/(series + R_g), and R_f + share·R_g that an output sees. */
+interface GainLaw {
+  least: 0 | 1;
+  times: 1 | 2;
+  /** Ω, of the source */
+  series: number;
+  share: number;
+}
+
+function gainLaw({ stage, source }: SoughtConditions): GainLaw {
+  switch (stage.topology) {
+    case 'inverting':
+      return { least: 0, times: 1, series: source.resistance, share: 0 };
+    case 'difference':
+      return { least: 0, times: 1, series: source.resistance / 2, share: 0 };
+    case 'instrumentation':
+      return { least: 1, times: 2, series: 0, share: 1 / 2 };
+    default:
+      return { least: 1, times: 1, series: 0, share: 1 };
+  }
 }
 
 function firstAtLeast(values: readonly Value[], least: number): number {

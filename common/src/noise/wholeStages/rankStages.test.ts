@@ -87,6 +87,13 @@ describe('rankStages', () => {
       sought({ gain: 50 }, { source: { resistance: 300, inductance: 0.05, capacitance: 5e-9 } }),
     ],
     ['an inverting stage', sought({ topology: 'inverting', gain: 10 })],
+    ['an inverting stage of gain 1', sought({ topology: 'inverting', gain: 1 })],
+    ['a difference stage', sought({ topology: 'difference', gain: 10, outputVoltage: 2 })],
+    ['a difference stage of gain 1', sought({ topology: 'difference', gain: 1 })],
+    [
+      'an instrumentation stage',
+      sought({ topology: 'instrumentation', gain: 20, differenceResistance: 2000, outputVoltage: 2 }),
+    ],
     [
       'an inverting stage with a reactive source',
       sought(
@@ -155,6 +162,24 @@ describe('rankStages', () => {
     const conditions = sought({ gain: 1 });
     const { items } = rankStages({ conditions, filter: {}, limit: 1, offset: 0 }, [library], []);
     expect(items[0].network).toMatchObject({ gain: 1, gainResistor: null, feedbackResistor: null });
+  });
+
+  it('finds pairs that give the gain with the source in series, or doubled around a pair of inputs', () => {
+    const two = [
+      { resistance: 900, noiseIndex: null },
+      { resistance: 5000, noiseIndex: null },
+    ];
+    const gainOf = (stage: Partial<SoughtStage>) => findNetworks(sought(stage), two).all[0]?.gain;
+    // The source has 200 Ω.
+    expect(gainOf({ topology: 'difference', gain: 5 })).toBe(5);
+    expect(gainOf({ topology: 'instrumentation', gain: 12, gainTolerance: 0.02 })).toBeCloseTo(1 + 1e4 / 900);
+  });
+
+  it('ranks the followers of an instrumentation stage without a network', () => {
+    const conditions = sought({ topology: 'instrumentation', gain: 1 });
+    const { items } = rankStages({ conditions, filter: {}, limit: 1, offset: 0 }, [library], []);
+    expect(items[0].network).toMatchObject({ gain: 1, gainResistor: null, feedbackResistor: null });
+    expect(items[0].figures.signalGain).toBeCloseTo(1, 3);
   });
 
   it('takes no resistor of unknown noise index where a direct voltage drives excess noise', () => {

@@ -1,14 +1,12 @@
 import { PriorityQueue } from '../../numeric/index.js';
 import type { Amplifier } from '../../parts/index.js';
 import type { OperatingConditions } from '../../conditions/index.js';
-import { evaluateStage, sourceFloor } from '../evaluateStage.js';
+import { evaluateStage, sourceFloor, stageNoise } from '../evaluateStage.js';
 import type { SourceFloor, StageFigures } from '../figures.js';
 import { parallelStage } from '../levers/parallelStage.js';
 import { amplifierAt, type AmplifierColumns } from '../ranking/columns.js';
 import { sift, type ExcludedPart, type PartPlace } from '../ranking/sift.js';
 import { stageModel } from '../stage/stageModel.js';
-import { bandEvaluation, figuresFrom, referenceEvaluation } from '../stageFigures.js';
-import { stageAmplifier } from '../stageAmplifier.js';
 import { Blocks, type Block } from './blocks.js';
 import { findNetworks } from './networks.js';
 import {
@@ -144,11 +142,7 @@ function stageOf(
 
 function totalNoise(sought: SoughtConditions, candidate: Candidate, network: Network): number {
   const { conditions, amplifier } = stageOf(sought, candidate, network);
-  const model = stageModel(conditions);
-  const inStage = stageAmplifier(conditions, amplifier);
-  const overBand = bandEvaluation(conditions, model, inStage);
-  return figuresFrom(conditions, model, inStage, overBand, referenceEvaluation(conditions, model))
-    .inputNoiseRms;
+  return stageNoise(conditions, amplifier);
 }
 
 function toRanked(

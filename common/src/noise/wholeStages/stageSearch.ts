@@ -1,3 +1,4 @@
+import { leastGainResistance } from '../leastGainResistance.js';
 import type { OperatingConditions, PartFilter, StageConditions } from '../../conditions/index.js';
 
 /** What the network of a whole stage must keep. */
@@ -57,15 +58,17 @@ export interface Network {
 
 /** The operating conditions of a sought stage with one network. */
 export function withNetwork({ stage, ...rest }: SoughtConditions, network: Network): OperatingConditions {
-  const { topology, loadResistance, biasResistance, feedbackCapacitance, outputVoltage } = stage;
+  const { topology, loadResistance, biasResistance, differenceResistance } = stage;
+  const { feedbackCapacitance, outputVoltage } = stage;
   const { gain, gainResistance, feedbackResistance, gainNoiseIndex, feedbackNoiseIndex } = network;
-  const pair = { gain, ...(gain !== 1 && { gainResistance }) };
+  const pair = { gain, ...(!isFollower(stage) && { gainResistance }) };
   return {
     ...rest,
     stage: {
       topology,
       ...(topology === 'transimpedance' ? { feedbackResistance, feedbackCapacitance } : pair),
-      ...stated({ loadResistance, biasResistance, outputVoltage, gainNoiseIndex, feedbackNoiseIndex }),
+      ...stated({ loadResistance, biasResistance, differenceResistance, outputVoltage }),
+      ...stated({ gainNoiseIndex, feedbackNoiseIndex }),
       network: { minimumTotal: stage.network.minimumTotal },
     },
   };
@@ -77,11 +80,15 @@ function stated<Fields extends object>(fields: Fields): Partial<Fields> {
   ) as Partial<Fields>;
 }
 
+/** Whether the stage has a gain of 1 without a network. */
+export function isFollower({ topology, gain }: Pick<SoughtStage, 'topology' | 'gain'>): boolean {
+  return gain === 1 && (topology === 'non-inverting' || topology === 'instrumentation');
+}
+
 /** A network that gives just the wanted gain, for what doesn't depend on its values. */
 export function nominalNetwork({ stage, source }: SoughtConditions): Network {
   const isTransimpedance = stage.topology === 'transimpedance';
   const gain = (isTransimpedance ? stage.feedbackResistance : stage.gain)!;
-  const least = stage.network.minimumTotal / (stage.gain ?? 1);
-  const gainResistance = stage.topology === 'inverting' ? Math.max(least - source.resistance, 0) : least;
+  const gainResistance = leastGainResistance(stage, source.resistance, stage.network.minimumTotal) ?? 0;
   return { gain, gainResistor: null, feedbackResistor: null, gainResistance, feedbackResistance: gain };
 }

@@ -1,0 +1,79 @@
+import {
+  expectedColumns,
+  type LibraryPart,
+  type PartCatalogue,
+  type PartColumn,
+  partOfValues,
+  pathOfColumn,
+  readMissingColumn,
+  readPartCell,
+  valuesOfPart,
+} from '../parts/index.js';
+import { doubtsOf } from './doubts.js';
+import type { ImportRowReader, ImportRowReading } from './importRow.js';
+import type { FieldChange, PartValue, RowError, RowVerdict } from './rowVerdict.js';
+
+/** What is there already of the part that a row describes. */
+export interface KnownParts<Part> {
+  /** The team's own part of the same key. */
+  existing: Part | null;
+  /** The curated library's part of the same key. */
+  curated: Part | null;
+}
+
+/**
+ * Makes the judge of a list's rows. A new part takes defaults for what its row doesn't state; of an existing
+ * part, what the row doesn't state stays as it is: an empty cell never takes away what the library knows.
+ */
+export function rowJudge<Part extends LibraryPart>(
+  catalogue: PartCatalogue<Part>,
+  reader: ImportRowReader,
+): (reading: Extract<ImportRowReading, { ok: true }>, known: KnownParts<Part>) => RowVerdict<Part> {
+  const expected = expectedColumns(catalogue).map((column): [string, PartColumn] => [
+    pathOfColumn(catalogue, column),
+    column,
+  ]);
+  const withDefaults = (reading: Extract<ImportRowReading, { ok: true }>) => {
+    const values = new Map(reading.stated);
+    const errors: RowError[] = [];
+    for (const [path, column] of expected) {
+      if (values.has(path)) continue;
+      const read = reader.has(path)
+        ? readPartCell(catalogue, column, '')
+        : readMissingColumn(catalogue, column);
+      if (read.ok) values.set(path, read.value);
+      else errors.push(reader.errorAt(path, read.message, reading.cells));
+    }
+    return { values, errors };
+  };
+  return (reading, { existing, curated }) => {
+    const current = existing && valuesOfPart(catalogue, existing);
+    const { values, errors } =
+      current === null
+        ? withDefaults(reading)
+        : { values: new Map([...current, ...reading.stated]), errors: [] };
+    if (errors.length > 0) return { state: 'refused', errors };
+    const part = partOfValues<Part>(catalogue, values);
+    const faults = catalogue.check(part);
+    if (faults.length > 0)
+      return {
+        state: 'refused',
+        errors: faults.map(({ field, message }) => reader.errorAt(field, message, reading.cells)),
+      };
+    const doubts = doubtsOf(catalogue, part, [existing, curated]);
+    const changes = current && changesBetween(current, valuesOfPart(catalogue, part));
+    if (changes?.length === 0) return { state: 'unchanged', part, doubts };
+    const state = changes === null ? 'new' : 'changed';
+    return { state: doubts.length > 0 ? 'doubtful' : state, part, changes: changes ?? [], doubts };
+  };
+}
+
+function changesBetween(
+  current: ReadonlyMap<string, PartValue>,
+  next: ReadonlyMap<string, PartValue>,
+): FieldChange[] {
+  const paths = new Set([...current.keys(), ...next.keys()]);
+  return [...paths]
+    .map((field) => ({ field, old: current.get(field) ?? null, new: next.get(field) ?? null }))
+    .filter((change) => change.old !== change.new);
+}
