@@ -6,7 +6,19 @@ import reactHooks from 'eslint-plugin-react-hooks';
 import globals from 'globals';
 import tseslint from 'typescript-eslint';
 
-const BACKEND_FEATURES = ['auth', 'users', 'teams', 'parts', 'library', 'ranking', 'conditions', 'health'];
+const BACKEND_FEATURES = [
+  'auth',
+  'users',
+  'teams',
+  'parts',
+  'library',
+  'ranking',
+  'conditions',
+  'health',
+  'prices',
+  'audit',
+  'imports',
+];
 const FRONTEND_FEATURES = ['session', 'parts', 'ranking', 'conditions'];
 
 /** A feature may use another's service, never its repositories' entities or its DTOs. */

@@ -12,11 +12,15 @@ const PREFERRED_E2E_PORT = 33_320;
 
 /** Each suite answers how many of its tests passed and failed. */
 export const SUITES = {
-  common: { run: ({ environment }) => runVitest('common', [], environment) },
+  common: { needsNgspice: true, run: runCommon },
   backend: { needsDatabase: true, run: runBackend },
   frontend: { run: ({ environment }) => runVitest('frontend', [], environment) },
   e2e: { needsDatabase: true, needsChromium: true, run: runJourneys },
 };
+
+function runCommon({ ngspice, environment }) {
+  return runVitest('common', [], { ...environment, NGSPICE_PATH: ngspice });
+}
 
 async function runBackend({ server, environment }) {
   await createDatabase(server, 'roothertz_test', { fresh: true });

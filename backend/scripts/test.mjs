@@ -2,6 +2,7 @@ import { randomBytes } from 'node:crypto';
 import { buildStale } from './builds.mjs';
 import { ensureChromium } from './chromium.mjs';
 import { ensureMariadbInstalled, startMariadb } from './mariadb.mjs';
+import { ensureNgspice } from './ngspice.mjs';
 import { endOrphans } from './orphans.mjs';
 import { ensurePackages, refuseOldNode } from './packages.mjs';
 import { addUp, closingLine } from './results.mjs';
@@ -45,10 +46,11 @@ async function setUp(wanted) {
   const needsDatabase = wanted.some((suite) => suite.needsDatabase);
   if (needsDatabase) await ensureMariadbInstalled();
   const chromium = wanted.some((suite) => suite.needsChromium) ? await ensureChromium() : undefined;
+  const ngspice = wanted.some((suite) => suite.needsNgspice) ? await ensureNgspice() : undefined;
   await ensurePackages();
   await buildStale(['common']);
   const server = needsDatabase ? await startTestServer() : undefined;
-  return { server, chromium, environment: testEnvironment() };
+  return { server, chromium, ngspice, environment: testEnvironment() };
 }
 
 function startTestServer() {

@@ -1,13 +1,16 @@
 import { Module } from '@nestjs/common';
 import { APP_GUARD } from '@nestjs/core';
 import { ThrottlerModule } from '@nestjs/throttler';
+import { AuditModule } from './audit/audit.module.js';
 import { AuthModule } from './auth/auth.module.js';
 import { JwtAuthGuard } from './auth/jwt-auth.guard.js';
 import { ConditionsModule } from './conditions/conditions.module.js';
 import { ConfigModule } from './config/config.module.js';
 import { DatabaseModule } from './database/database.module.js';
 import { HealthModule } from './health/health.module.js';
+import { ImportsModule } from './imports/imports.module.js';
 import { PartsModule } from './parts/parts.module.js';
+import { PricesModule } from './prices/prices.module.js';
 import { RankingModule } from './ranking/ranking.module.js';
 import { AccessGuard } from './shared/access/access.guard.js';
 import { CallerThrottlerGuard } from './shared/access/caller-throttler.guard.js';
@@ -19,10 +22,13 @@ const REQUESTS_A_MINUTE = 600;
     ConfigModule,
     DatabaseModule,
     ThrottlerModule.forRoot([{ ttl: 60_000, limit: REQUESTS_A_MINUTE }]),
+    AuditModule,
     AuthModule,
     ConditionsModule,
     HealthModule,
+    ImportsModule,
     PartsModule,
+    PricesModule,
     RankingModule,
   ],
   providers: [

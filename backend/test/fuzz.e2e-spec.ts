@@ -1,6 +1,8 @@
 import type { OpenAPIObject } from '@nestjs/swagger';
 import fc from 'fast-check';
 import { createOpenApiDocument } from '../src/openapi/document.js';
+import { createSupplier } from './factories/offers.js';
+import { createOpAmp } from './factories/op-amps.js';
 import { hostileValue, toRequestText } from './fuzz/hostile.js';
 import { mutated } from './fuzz/mutated.js';
 import { SAMPLES } from './fuzz/samples.js';
@@ -8,16 +10,34 @@ import { createTeam, signInMember, startTestApp, type TestApp, type TestMember }
 import { type DocumentedOperation, operationsOf } from './support/operations.js';
 
 const BODIES_PER_OPERATION = 60;
-const IDS = ['1', '1', '1', '2', '0', '-1', 'x', '1e999', '99999999999999999999', '%00', '%27%20OR%201=1'];
+/** Stands for the id of what the operation's sample made. */
+const OWN = 'own';
+const IDS = [
+  OWN,
+  OWN,
+  OWN,
+  '1',
+  '2',
+  '0',
+  '-1',
+  'x',
+  '1e999',
+  '99999999999999999999',
+  '%00',
+  '%27%20OR%201=1',
+];
 
 describe('whatever is sent', () => {
   let app: TestApp;
   let member: TestMember;
   let operations: DocumentedOperation[];
+  const made = new Map<string, string>();
 
   beforeAll(async () => {
     app = await startTestApp();
     member = await signInMember(app, await createTeam(app), ['admin', 'librarian', 'engineer']);
+    await createOpAmp(member);
+    await createSupplier(member);
     const document: OpenAPIObject = createOpenApiDocument(app.nest);
     operations = operationsOf(document).filter(({ method }) => ['post', 'put', 'patch'].includes(method));
   });
@@ -30,7 +50,7 @@ describe('whatever is sent', () => {
   it('takes every sample as it stands but the guessed password', async () => {
     for (const operation of operations)
       for (const sample of SAMPLES[nameOf(operation)]) {
-        const status = await send(operation, sample, '1');
+        const status = await send(operation, sample, OWN);
         expect([nameOf(operation), status < 300]).toEqual([
           nameOf(operation),
           !/sign-in/.test(operation.path),
@@ -54,7 +74,9 @@ describe('whatever is sent', () => {
   }
 
   async function send({ method, path }: DocumentedOperation, body: unknown, id: string): Promise<number> {
-    const { status, headers, text } = await member.agent[method](path.replace('{id}', id))
+    const own = made.get(path.replace('/{id}', '')) ?? '1';
+    const place = path.replace('{id}', id === OWN ? own : id);
+    const { status, headers, text } = await member.agent[method](place)
       .set('Content-Type', 'application/json')
       .send(toRequestText(body));
     if (status >= 400) {
@@ -62,6 +84,7 @@ describe('whatever is sent', () => {
       expect(JSON.parse(text)).toMatchObject({ status, code: expect.any(String) });
       expect(text).not.toMatch(/node_modules|\.ts:\d|SELECT |INSERT |UPDATE /);
     }
+    if (status === 201) made.set(path, (JSON.parse(text) as { id: string }).id);
     return status;
   }
 });

@@ -19,7 +19,7 @@ import {
 import type { SaveConditionsDto } from './dto/save-conditions.dto.js';
 import type { UpdateConditionsDto } from './dto/update-conditions.dto.js';
 import { SavedConditions } from './entities/saved-conditions.entity.js';
-import { nameKey } from './name-key.js';
+import { nameKey } from '../shared/text/name-key.js';
 
 const SORTS = ['name', 'updatedAt'] as const;
 

@@ -71,6 +71,11 @@ export class AppConfig {
   @IsNotEmpty()
   FRONTEND_DIST?: string;
 
+  /** Where uploaded lists stand until they are applied; left out = a folder among the machine's temporary files. */
+  @IsOptional()
+  @IsNotEmpty()
+  IMPORT_DIR?: string;
+
   get isProduction(): boolean {
     return isProduction(this);
   }

@@ -16,6 +16,7 @@ const NAMES = [
   'DB_NAME',
   'JWT_SECRET',
   'FRONTEND_DIST',
+  'IMPORT_DIR',
 ] as const satisfies readonly (keyof AppConfig)[];
 
 /**

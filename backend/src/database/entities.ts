@@ -1,11 +1,38 @@
+import { AuditEntry } from '../audit/entities/audit-entry.entity.js';
 import { SavedConditions } from '../conditions/entities/saved-conditions.entity.js';
+import { Import } from '../imports/entities/import.entity.js';
+import { ImportProgress } from '../imports/entities/import-progress.entity.js';
+import { ImportRow } from '../imports/entities/import-row.entity.js';
 import { Library } from '../library/entities/library.entity.js';
 import { OpAmp } from '../library/entities/op-amp.entity.js';
 import { Part } from '../library/entities/part.entity.js';
 import { Resistor } from '../library/entities/resistor.entity.js';
+import { ExchangeRate } from '../prices/entities/exchange-rate.entity.js';
+import { Offer } from '../prices/entities/offer.entity.js';
+import { OfferBreak } from '../prices/entities/offer-break.entity.js';
+import { PriceSettings } from '../prices/entities/price-settings.entity.js';
+import { Supplier } from '../prices/entities/supplier.entity.js';
 import { Membership } from '../teams/entities/membership.entity.js';
 import { Team } from '../teams/entities/team.entity.js';
 import { User } from '../users/entities/user.entity.js';
 
 /** The entities of all features. */
-export const ENTITIES = [Team, User, Membership, Library, Part, OpAmp, Resistor, SavedConditions];
+export const ENTITIES = [
+  Team,
+  User,
+  Membership,
+  Library,
+  Part,
+  OpAmp,
+  Resistor,
+  SavedConditions,
+  AuditEntry,
+  PriceSettings,
+  ExchangeRate,
+  Supplier,
+  Offer,
+  OfferBreak,
+  Import,
+  ImportProgress,
+  ImportRow,
+];

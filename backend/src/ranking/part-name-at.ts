@@ -1,7 +1,6 @@
 import type { PartPlace } from '@roothertz/common/noise';
 import type { PartNameDto } from './dto/ranking-response.dto.js';
 import type { IndexedLibrary } from './library-index.service.js';
-import { toPartName } from './ranking-response.js';
 
 /** The name of the part at a place, from the libraries' columns. */
 export function partNameAt({ library, row }: PartPlace, libraries: readonly IndexedLibrary[]): PartNameDto {
@@ -15,4 +14,9 @@ export function partNameAt({ library, row }: PartPlace, libraries: readonly Inde
     lifecycle: columns.lifecycle[row],
     approval: columns.approval[row],
   });
+}
+
+export function toPartName(record: Omit<PartNameDto, 'id'> & { id: number }): PartNameDto {
+  const { id, library, manufacturer, partNumber, package: packageName, lifecycle, approval } = record;
+  return { id: String(id), library, manufacturer, partNumber, package: packageName, lifecycle, approval };
 }

@@ -1,23 +1,28 @@
-import type { RankedPart, Ranking } from '@roothertz/common/noise';
+import type { CheapestPart, RankedPart, Ranking } from '@roothertz/common/noise';
 import type { OpAmpRecord } from '../library/part-record.js';
-import type { PartNameDto, RankedOpAmpDto, RankingResponseDto } from './dto/ranking-response.dto.js';
+import type { QuantityPrices } from '../prices/price-book.js';
+import type { CheapestDto, RankedOpAmpDto, RankingResponseDto } from './dto/ranking-response.dto.js';
 import { type IndexedLibrary, revisionOf } from './library-index.service.js';
+import { partNameAt, toPartName } from './part-name-at.js';
+import { toPrice } from './price-response.js';
 
 /** Ranked parts whose record is gone since they were ranked are left out. */
 export function toRankingResponse(
-  { total, excluded, quietSetTotal, floor, items }: Ranking,
+  { total, excluded, quietSetTotal, cheapest, floor, items }: Ranking,
   libraries: readonly IndexedLibrary[],
   records: ReadonlyMap<number, OpAmpRecord>,
+  prices: QuantityPrices,
 ): RankingResponseDto {
   return {
     total,
     excluded: countReasons(excluded),
     quietSet: { total: quietSetTotal },
+    cheapest: cheapest && toCheapest(cheapest, libraries, prices),
     floor,
     libraryRevision: revisionOf(libraries),
     items: items.flatMap((item) => {
       const record = records.get(libraries[item.library].ids[item.row]);
-      return record === undefined ? [] : [toRankedOpAmp(item, record)];
+      return record === undefined ? [] : [toRankedOpAmp(item, record, prices)];
     }),
   };
 }
@@ -25,15 +30,20 @@ export function toRankingResponse(
 function toRankedOpAmp(
   { rank, figures, quietSet, meetsTarget }: RankedPart,
   record: OpAmpRecord,
+  prices: QuantityPrices,
 ): RankedOpAmpDto {
   const { amplifier, origins } = record;
   const part = { ...toPartName(record), amplifier, origins };
-  return { rank, part, ...figures, quietSet, meetsTarget, unitPrice: null };
+  return { rank, part, ...figures, quietSet, meetsTarget, unitPrice: toPrice(prices, record.id) };
 }
 
-export function toPartName(record: Omit<PartNameDto, 'id'> & { id: number }): PartNameDto {
-  const { id, library, manufacturer, partNumber, package: packageName, lifecycle, approval } = record;
-  return { id: String(id), library, manufacturer, partNumber, package: packageName, lifecycle, approval };
+function toCheapest(
+  { aboveQuietest, ...place }: CheapestPart,
+  libraries: readonly IndexedLibrary[],
+  prices: QuantityPrices,
+): CheapestDto {
+  const part = partNameAt(place, libraries);
+  return { part, unitPrice: toPrice(prices, Number(part.id))!, aboveQuietest };
 }
 
 /** How many parts are excluded for each reason, the most frequent one first. */

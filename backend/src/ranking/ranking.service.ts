@@ -4,8 +4,8 @@ import {
   exclusionDetail,
   type ExcludedPart,
   findExcluded,
+  PRICED_RANKING_SORTS,
   rankAmplifiers,
-  RANKING_SORTS,
 } from '@roothertz/common/noise';
 import type { RankingRequest } from '@roothertz/common/conditions';
 import { type Amplifier, OP_AMP_PARAMETERS } from '@roothertz/common/parts';
@@ -23,6 +23,7 @@ import type { RankingResponseDto } from './dto/ranking-response.dto.js';
 import type { StageFiguresDto } from './dto/stage-figures.dto.js';
 import { type IndexedLibrary, LibraryIndex } from './library-index.service.js';
 import { partNameAt } from './part-name-at.js';
+import { PriceIndex } from './price-index.service.js';
 import { toRankingResponse } from './ranking-response.js';
 
 @Injectable()
@@ -30,20 +31,24 @@ export class RankingService {
   constructor(
     private readonly index: LibraryIndex,
     private readonly library: LibraryService,
+    private readonly prices: PriceIndex,
   ) {}
 
   async rank(caller: Caller, dto: RankOpAmpsDto): Promise<RankingResponseDto> {
     const request = checkedRankingRequest(dto);
-    const { key: sort, descending } = parseSort(dto.sort, RANKING_SORTS);
+    const { key: sort, descending } = parseSort(dto.sort, PRICED_RANKING_SORTS);
     const { limit, offset } = dto;
     const libraries = await this.index.opAmpsReadableBy(caller, request.filter);
+    const prices = await this.prices.at(caller, request.quantity);
+    const totals = libraries.map(({ ids }) => prices.totals(ids));
     const ranking = rankAmplifiers(
-      { ...request, sort, descending, limit, offset },
+      { ...request, sort, descending, limit, offset, prices: totals },
       libraries.map(({ columns }) => columns),
     );
     const ids = ranking.items.map(({ library, row }) => libraries[library].ids[row]);
     const records = await this.library.findOpAmps(caller, ids);
-    return toRankingResponse(ranking, libraries, new Map(records.map((record) => [record.id, record])));
+    const byId = new Map(records.map((record) => [record.id, record]));
+    return toRankingResponse(ranking, libraries, byId, prices);
   }
 
   async exclusions(caller: Caller, dto: RankOpAmpsDto): Promise<ExclusionListDto> {

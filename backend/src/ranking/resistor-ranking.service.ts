@@ -7,6 +7,7 @@ import {
 import { type Resistor, RESISTOR_CATALOGUE } from '@roothertz/common/parts';
 import { Injectable } from '@nestjs/common';
 import type { ListedResistor } from '../library/listed-resistors.js';
+import type { QuantityPrices } from '../prices/price-book.js';
 import type { Caller } from '../shared/access/caller.js';
 import { checkedResistorRequest } from '../shared/conditions/ranking-request.js';
 import { parseSort } from '../shared/list/sort.js';
@@ -17,27 +18,34 @@ import type {
   ResistorRankingDto,
 } from './dto/resistor-ranking.dto.js';
 import { LibraryIndex, type ResistorLibrary, revisionOf } from './library-index.service.js';
-import { countReasons, toPartName } from './ranking-response.js';
+import { PriceIndex } from './price-index.service.js';
+import { toPrice } from './price-response.js';
+import { toPartName } from './part-name-at.js';
+import { countReasons } from './ranking-response.js';
 
 interface Ranked extends ResistorRanking {
   libraries: ResistorLibrary[];
   /** All resistors that the ranking was made of; its indices are places in it. */
   resistors: ListedResistor[];
+  prices: QuantityPrices;
 }
 
 const PARAMETERS = [RESISTOR_CATALOGUE.choice, ...RESISTOR_CATALOGUE.parameters].map(({ key }) => key);
 
 @Injectable()
 export class ResistorRankingService {
-  constructor(private readonly index: LibraryIndex) {}
+  constructor(
+    private readonly index: LibraryIndex,
+    private readonly prices: PriceIndex,
+  ) {}
 
   async rank(caller: Caller, dto: RankResistorsDto): Promise<ResistorRankingDto> {
-    const { total, excluded, items, libraries, resistors } = await this.ranked(caller, dto);
+    const { total, excluded, items, libraries, resistors, prices } = await this.ranked(caller, dto);
     return {
       total,
       excluded: countReasons(excluded),
       libraryRevision: revisionOf(libraries),
-      items: items.map((item) => toRankedResistor(item, resistors[item.index])),
+      items: items.map((item) => toRankedResistor(item, resistors[item.index], prices)),
     };
   }
 
@@ -60,13 +68,19 @@ export class ResistorRankingService {
     const { limit, offset } = dto;
     const libraries = await this.index.resistorsReadableBy(caller, filter);
     const resistors = libraries.flatMap((library) => library.resistors);
-    const query = { conditions, filter, sort, descending, limit, offset };
-    return { ...rankResistors(query, resistors), libraries, resistors };
+    const prices = await this.prices.at(caller, dto.quantity);
+    const totals = prices.totals(resistors.map(({ id }) => id));
+    const query = { conditions, filter, sort, descending, limit, offset, prices: totals };
+    return { ...rankResistors(query, resistors), libraries, resistors, prices };
   }
 }
 
-function toRankedResistor({ rank, figures }: RankedResistor, listed: ListedResistor): RankedResistorDto {
+function toRankedResistor(
+  { rank, figures }: RankedResistor,
+  listed: ListedResistor,
+  prices: QuantityPrices,
+): RankedResistorDto {
   const resistor = Object.fromEntries(PARAMETERS.map((key) => [key, listed[key as keyof Resistor]]));
   const part = { ...toPartName(listed), resistor: resistor as unknown as Resistor, origins: listed.origins };
-  return { rank, part, ...figures, unitPrice: null };
+  return { rank, part, ...figures, unitPrice: toPrice(prices, listed.id) };
 }

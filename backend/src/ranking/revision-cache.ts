@@ -1,33 +1,39 @@
 import type { ReadableLibrary } from '../library/library.service.js';
 
+/** What changes its revision with each change of its content. */
+interface Revised {
+  id: number;
+  revision: number;
+}
+
 interface Entry<Content> {
   revision: number;
   content: Promise<Content>;
 }
 
-const MOST_LIBRARIES = 50;
+const MOST_ENTRIES = 50;
 
-/** Keeps what was loaded of each library at its latest revision; the one asked for longest ago goes first. */
-export class RevisionCache<Content> {
+/** Keeps what was loaded of each library or team at its latest revision; the one asked for longest ago goes first. */
+export class RevisionCache<Content, Source extends Revised = ReadableLibrary> {
   private readonly entries = new Map<number, Entry<Content>>();
 
-  constructor(private readonly load: (library: ReadableLibrary) => Promise<Content>) {}
+  constructor(private readonly load: (source: Source) => Promise<Content>) {}
 
-  contentOf(library: ReadableLibrary): Promise<Content> {
-    const { id, revision } = library;
+  contentOf(source: Source): Promise<Content> {
+    const { id, revision } = source;
     const known = this.entries.get(id);
-    const entry = known?.revision === revision ? known : this.newEntry(library);
+    const entry = known?.revision === revision ? known : this.newEntry(source);
     this.entries.delete(id);
     this.entries.set(id, entry);
     const [oldest] = this.entries.keys();
-    if (this.entries.size > MOST_LIBRARIES) this.entries.delete(oldest);
+    if (this.entries.size > MOST_ENTRIES) this.entries.delete(oldest);
     return entry.content;
   }
 
-  private newEntry(library: ReadableLibrary): Entry<Content> {
-    const entry = { revision: library.revision, content: this.load(library) };
+  private newEntry(source: Source): Entry<Content> {
+    const entry = { revision: source.revision, content: this.load(source) };
     entry.content.catch(() => {
-      if (this.entries.get(library.id) === entry) this.entries.delete(library.id);
+      if (this.entries.get(source.id) === entry) this.entries.delete(source.id);
     });
     return entry;
   }

@@ -21,7 +21,8 @@ import type {
   StageRankingDto,
 } from './dto/stage-ranking.dto.js';
 import { type IndexedLibrary, LibraryIndex, revisionOf } from './library-index.service.js';
-import { countReasons, toPartName } from './ranking-response.js';
+import { toPartName } from './part-name-at.js';
+import { countReasons } from './ranking-response.js';
 
 @Injectable()
 export class StageRankingService {

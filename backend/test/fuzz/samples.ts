@@ -14,6 +14,19 @@ const currentSource = {
   stage: { topology: 'transimpedance', feedbackResistance: 1e6, feedbackCapacitance: 'auto' },
 };
 
+const difference = { ...conditions, stage: { topology: 'difference', gain: 10, gainResistance: 1000 } };
+
+const instrumentation = {
+  ...conditions,
+  stage: {
+    topology: 'instrumentation',
+    gain: 20,
+    gainResistance: 1000,
+    loadResistance: 1e6,
+    differenceResistance: 5000,
+  },
+};
+
 const amplifier = { inputType: 'jfet', voltageNoise: 3e-9, currentNoise: 1e-15, gainBandwidth: 1e7 };
 const opAmp = { manufacturer: 'Alderney Analogue', partNumber: 'AA101', package: 'SOIC-8', amplifier };
 
@@ -43,6 +56,22 @@ const filter = {
 const request = { conditions, filter, target: { inputNoiseRms: 5e-7 }, quantity: 100 };
 const page = { sort: '-inputNoiseRms', limit: 10, offset: 0 };
 
+const offered = {
+  partId: '1',
+  supplierId: '1',
+  currency: 'EUR',
+  breaks: [
+    { minimumQuantity: 1, unitPrice: '4.20' },
+    { minimumQuantity: 100, unitPrice: '3.1' },
+  ],
+  minimumOrderQuantity: 10,
+  orderMultiple: 5,
+  leadTimeDays: 42,
+  stock: null,
+  validFrom: '2026-01-01',
+  validUntil: '2199-12-31',
+};
+
 /** A body that each operation takes, from which the hostile ones are made. */
 export const SAMPLES: Record<string, unknown[]> = {
   'post /api/auth/sign-in': [{ email: 'person@weir.example', password: 'a guess' }],
@@ -55,7 +84,12 @@ export const SAMPLES: Record<string, unknown[]> = {
   'patch /api/resistors/{id}': [{ version: 1, partNumber: 'AR102', resistor: { noiseIndex: -20 } }],
   'post /api/rankings/resistors': [{ ...place, sort: '-totalRms', limit: 10 }],
   'post /api/rankings/resistors/exclusions': [{ ...place, limit: 10 }],
-  'post /api/rankings/op-amps': [{ ...request, ...page }, { conditions: currentSource }],
+  'post /api/rankings/op-amps': [
+    { ...request, ...page },
+    { conditions: currentSource },
+    { conditions: difference },
+    { conditions: instrumentation },
+  ],
   'post /api/rankings/op-amps/exclusions': [{ ...request, limit: 10 }],
   'post /api/rankings/stages': [
     {
@@ -76,8 +110,17 @@ export const SAMPLES: Record<string, unknown[]> = {
       frequency: { from: 1, to: 1e5, steps: 3 },
     },
   ],
+  'post /api/suppliers': [{ name: 'Brook & Weir' }],
+  'put /api/prices': [{ rows: [{ ...offered, supplierNumber: 'BW-1' }] }],
+  'put /api/prices/rates': [{ dated: '2026-03-01', rates: [{ currency: 'USD', rate: '0.9' }] }],
+  'put /api/prices/settings': [{ currency: 'EUR', staleAfterDays: 60 }],
+  'post /api/offers': [{ ...offered, supplierNumber: 'BW-2' }],
+  'post /api/offers/confirm': [{ ids: ['1'] }],
+  'patch /api/offers/{id}': [{ version: 1, currency: 'USD', breaks: offered.breaks, stock: 5 }],
   'post /api/noise/stage': [
     { conditions, amplifier },
     { conditions: currentSource, amplifier },
+    { conditions: difference, amplifier },
+    { conditions: instrumentation, amplifier },
   ],
 };

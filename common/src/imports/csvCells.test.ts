@@ -1,10 +1,10 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { harmlessCell, originalCell } from './csvCells.js';
+import { harmlessCell, harmlessUnknownCell, originalCell } from './csvCells.js';
 import { ungrouped } from './decimalMark.js';
 
 describe('harmlessCell', () => {
-  it.each(['=1+1', '+cmd', '-cmd|x', '−A1', '@SUM(A1)', '\tx', '\rx', "'=1"])(
+  it.each(['=1+1', '+cmd', '-cmd|x', '−A1', '@SUM(A1)', '\tx', '\rx', "'=1", '+3', '-41.5'])(
     'makes %j harmless and comes back as it was',
     (text) => {
       expect(harmlessCell(text)).toBe(`'${text}`);
@@ -12,9 +12,13 @@ describe('harmlessCell', () => {
     },
   );
 
-  it.each(['-41.5', '+3', '−0,5', "'quoted'", 'plain', ''])('leaves %j alone', (text) => {
+  it.each(["'quoted'", 'plain', ''])('leaves %j alone', (text) => {
     expect(harmlessCell(text)).toBe(text);
     expect(originalCell(text)).toBe(text);
+  });
+
+  it('leaves a signed number alone where the cell may hold a figure', () => {
+    expect(['-41.5', '−0,5', '+3', '-3+A1'].map(harmlessUnknownCell)).toEqual(['-41.5', '−0,5', '+3', "'-3+A1"]);
   });
 
   it('gives every text back', () => {

@@ -3,15 +3,8 @@ import { OperatingConditionsDto } from '../../shared/conditions/operating-condit
 import { PartFilterDto } from '../../shared/conditions/part-filter.dto.js';
 import { RankingTargetDto } from '../../shared/conditions/ranking-request.dto.js';
 import { listOf } from '../../shared/list/list-response.js';
+import { MemberDto, toMemberDto } from '../../shared/members/member.dto.js';
 import type { SavedConditions } from '../entities/saved-conditions.entity.js';
-
-export class MemberDto {
-  @ApiProperty()
-  id: string;
-
-  @ApiProperty()
-  name: string;
-}
 
 export class ConditionsResponseDto {
   @ApiProperty()
@@ -55,6 +48,6 @@ export function toConditionsResponse(saved: SavedConditions): ConditionsResponse
     quantity,
     version,
     updatedAt: updatedAt.toISOString(),
-    updatedBy: updatedBy && { id: String(updatedBy.id), name: updatedBy.name },
+    updatedBy: toMemberDto(updatedBy),
   };
 }

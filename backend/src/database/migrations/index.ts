@@ -2,6 +2,9 @@ import { CreateTeamsAndMembers1767000000000 } from './1767000000000-CreateTeamsA
 import { CreateLibrariesAndParts1767100000000 } from './1767100000000-CreateLibrariesAndParts.js';
 import { CreateSavedConditions1767200000000 } from './1767200000000-CreateSavedConditions.js';
 import { CreateResistors1767300000000 } from './1767300000000-CreateResistors.js';
+import { CreateAuditEntries1796083100000 } from './1796083100000-CreateAuditEntries.js';
+import { CreatePrices1796083200000 } from './1796083200000-CreatePrices.js';
+import { CreateImports1796083300000 } from './1796083300000-CreateImports.js';
 
 /** All migrations; they run in the order of the time in their names. */
 export const MIGRATIONS = [
@@ -9,4 +12,7 @@ export const MIGRATIONS = [
   CreateLibrariesAndParts1767100000000,
   CreateSavedConditions1767200000000,
   CreateResistors1767300000000,
+  CreateAuditEntries1796083100000,
+  CreatePrices1796083200000,
+  CreateImports1796083300000,
 ];

@@ -1,7 +1,7 @@
 import { checkConditions } from '@roothertz/common/conditions';
 import type { EntityManager } from 'typeorm';
 import { SavedConditions } from '../../conditions/entities/saved-conditions.entity.js';
-import { nameKey } from '../../conditions/name-key.js';
+import { nameKey } from '../../shared/text/name-key.js';
 import type { DemoData } from './demo-data.js';
 import type { SeededTeam } from './seed-team.js';
 

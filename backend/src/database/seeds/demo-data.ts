@@ -9,6 +9,7 @@ export interface DemoData {
   team: { name: string; plan: Plan };
   members: { email: string; name: string; roles: Role[] }[];
   conditions: { name: string; ranking: Required<RankingRequest> }[];
+  prices: { currency: string; staleAfterDays: number; rates: { currency: string; rate: string }[] };
 }
 
 export async function readDemoData(): Promise<DemoData> {

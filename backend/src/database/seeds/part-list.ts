@@ -13,7 +13,8 @@ import { readFileSync } from 'node:fs';
 
 const DATA = new URL('../../../../data/', import.meta.url);
 
-interface ListedRow {
+/** A row of a list, heading → cell, and the line on which it ends. */
+export interface ListedRow {
   record: Record<string, string>;
   info: { lines: number };
 }
@@ -32,7 +33,7 @@ export function readSeriesList(path: string): ResistorPart[] {
   );
 }
 
-function readRows(path: string): ListedRow[] {
+export function readRows(path: string): ListedRow[] {
   return parse(readFileSync(new URL(path, DATA)), {
     bom: true,
     columns: true,

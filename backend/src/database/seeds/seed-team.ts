@@ -11,6 +11,8 @@ export interface SeededTeam {
   teamId: number;
   /** The first member. */
   userId: number;
+  /** The first member who keeps the prices. */
+  buyerId: number;
 }
 
 /** Makes the demo team with an account for each of its members. */
@@ -23,5 +25,6 @@ export async function seedTeam(manager: EntityManager, { team, members }: DemoDa
     await manager.insert(Membership, { userId, teamId, roles });
     userIds.push(userId);
   }
-  return { teamId, userId: userIds[0] };
+  const buyer = members.findIndex(({ roles }) => roles.includes('purchasing'));
+  return { teamId, userId: userIds[0], buyerId: userIds[buyer] };
 }

@@ -1,4 +1,4 @@
-import { RANKING_SORTS } from '@roothertz/common/noise';
+import { PRICED_RANKING_SORTS } from '@roothertz/common/noise';
 import { RankingRequestDto } from '../../shared/conditions/ranking-request.dto.js';
 import { Text } from '../../shared/validation/text.decorator.js';
 import { PageLimit, PageOffset } from '../page.decorators.js';
@@ -9,7 +9,7 @@ export class RankOpAmpsDto extends RankingRequestDto {
     label: 'sort',
     maxLength: 60,
     optional: true,
-    description: `One of ${RANKING_SORTS.join(', ')}; a leading minus = descending.`,
+    description: `One of ${PRICED_RANKING_SORTS.join(', ')}; a leading minus = descending.`,
   })
   sort: string = 'inputNoiseRms';
 

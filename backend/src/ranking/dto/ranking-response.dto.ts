@@ -11,6 +11,7 @@ import {
 } from '@roothertz/common/parts';
 import { ApiProperty } from '@nestjs/swagger';
 import { AmplifierOriginsDto, AmplifierResponseDto } from '../../shared/parts/amplifier.dto.js';
+import { PriceDto } from './price.dto.js';
 import { SourceFloorDto, StageFiguresDto } from './stage-figures.dto.js';
 
 export class PartNameDto {
@@ -42,17 +43,6 @@ export class RankedPartDto extends PartNameDto {
 
   @ApiProperty({ type: AmplifierOriginsDto })
   origins: AmplifierOrigins;
-}
-
-export class PriceDto {
-  @ApiProperty({ description: 'Decimal number.' })
-  amount: string;
-
-  @ApiProperty({ description: 'ISO 4217' })
-  currency: string;
-
-  @ApiProperty({ type: 'integer' })
-  minimumQuantity: number;
 }
 
 export class RankedOpAmpDto extends StageFiguresDto {
@@ -93,6 +83,17 @@ export class QuietSetDto {
   total: number;
 }
 
+export class CheapestDto {
+  @ApiProperty()
+  part: PartNameDto;
+
+  @ApiProperty()
+  unitPrice: PriceDto;
+
+  @ApiProperty({ description: 'In dB, its total over the quietest part’s.' })
+  aboveQuietest: number;
+}
+
 export class RankingResponseDto {
   @ApiProperty({ type: 'integer', description: 'How many parts are ranked.' })
   total: number;
@@ -102,6 +103,13 @@ export class RankingResponseDto {
 
   @ApiProperty()
   quietSet: QuietSetDto;
+
+  @ApiProperty({
+    type: CheapestDto,
+    nullable: true,
+    description: 'The cheapest part of the quiet set; null where none of it has a price.',
+  })
+  cheapest: CheapestDto | null;
 
   @ApiProperty()
   floor: SourceFloorDto;

@@ -9,7 +9,8 @@ import type { Resistor, ResistorOrigins } from '@roothertz/common/parts';
 import { ApiProperty } from '@nestjs/swagger';
 import { listOf } from '../../shared/list/list-response.js';
 import { ResistorOriginsDto, ResistorParametersDto } from '../../shared/parts/resistor.dto.js';
-import { PartNameDto, PriceDto } from './ranking-response.dto.js';
+import { PriceDto } from './price.dto.js';
+import { PartNameDto } from './ranking-response.dto.js';
 
 export class RankedResistorPartDto extends PartNameDto {
   @ApiProperty({ type: ResistorParametersDto })

@@ -27,6 +27,9 @@ export class StageDto implements StageConditions {
   @Quantity(CONDITION_FIELDS['conditions.stage.loadResistance'], { optional: true })
   loadResistance?: number;
 
+  @Quantity(CONDITION_FIELDS['conditions.stage.differenceResistance'], { optional: true })
+  differenceResistance?: number;
+
   @Quantity(CONDITION_FIELDS['conditions.stage.biasResistance'], { optional: true })
   biasResistance?: number;
 

@@ -10,9 +10,15 @@ const REWORDED: Record<string, string> = {
 /** One line for each field that class-validator refuses, by its whole path. */
 export function toFieldErrors(errors: readonly ValidationError[], parent = ''): FieldError[] {
   return errors.flatMap(({ property, constraints, children }) => {
-    const field = parent === '' ? (property ?? '') : `${parent}.${property}`;
+    const field = pathOf(parent, property ?? '');
     const [constraint] = Object.entries(constraints ?? {});
     const own = constraint ? [{ field, message: REWORDED[constraint[0]] ?? constraint[1] }] : [];
     return [...own, ...toFieldErrors(children ?? [], field)];
   });
+}
+
+/** `conditions.band`, and `rows[3]` for an item of a list. */
+function pathOf(parent: string, property: string): string {
+  if (parent === '') return property;
+  return /^\d+$/.test(property) ? `${parent}[${property}]` : `${parent}.${property}`;
 }

@@ -114,7 +114,7 @@ describe('the network of a stage with two inputs', () => {
     const lever = lowered('a difference stage');
     // 500 Ω = 10·(R_g + 1000 Ω/2) leaves nothing for R_g.
     expect(lever.conditions.stage.gainResistance).toBe(0);
-    expect(lever.label).toBe('Lower the gain resistance to 0 Ω');
+    expect(lever.label.replaceAll('\u2009', ' ')).toBe('Lower the gain resistance to 0 Ω');
   });
 
   it('is lowered around the input pair and behind it, in an instrumentation stage', () => {

@@ -126,6 +126,17 @@ describe('rankResistors', () => {
     expect(order(0)).toEqual([0, 1]);
   });
 
+  it('sorts by price, those without one last', () => {
+    const parts = [make({}), make({}), make({})];
+    const order = (descending: boolean, prices?: Float64Array) =>
+      rankResistors({ ...query, sort: 'unitPrice', descending, prices }, parts).items.map(
+        ({ index }) => index,
+      );
+    expect(order(false, Float64Array.of(NaN, 0.9, 0.01))).toEqual([2, 1, 0]);
+    expect(order(true, Float64Array.of(NaN, 0.9, 0.01))).toEqual([1, 2, 0]);
+    expect(order(false)).toEqual([0, 1, 2]);
+  });
+
   it('finds by words and gives pages', () => {
     const parts = [make({ searchText: 'a b' }), make({ searchText: 'b c' }), make({ searchText: 'c' })];
     const asked = { ...query, filter: { search: 'B' }, limit: 1, offset: 1 };

@@ -92,7 +92,7 @@ describe('rankStages', () => {
     ['a difference stage of gain 1', sought({ topology: 'difference', gain: 1 })],
     [
       'an instrumentation stage',
-      sought({ topology: 'instrumentation', gain: 20, differenceResistance: 2000, outputVoltage: 2 }),
+      sought({ topology: 'instrumentation', gain: 21, differenceResistance: 2000, outputVoltage: 2 }),
     ],
     [
       'an inverting stage with a reactive source',

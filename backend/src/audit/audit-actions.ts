@@ -1,0 +1,15 @@
+/** What the trail records. */
+export const AUDIT_ACTIONS = [
+  'offer.opened',
+  'offer.changed',
+  'offer.confirmed',
+  'offer.closed',
+  'supplier.added',
+  'rates.changed',
+  'price-settings.changed',
+] as const;
+export type AuditAction = (typeof AUDIT_ACTIONS)[number];
+
+/** The kinds of object that it records. */
+export const AUDIT_OBJECTS = ['offer', 'supplier', 'rate', 'price-settings'] as const;
+export type AuditObject = (typeof AUDIT_OBJECTS)[number];

@@ -1,0 +1,51 @@
+import { ApiProperty } from '@nestjs/swagger';
+import { listOf } from '../../shared/list/list-response.js';
+import { MemberDto, toMemberDto } from '../../shared/members/member.dto.js';
+import { AUDIT_ACTIONS, AUDIT_OBJECTS } from '../audit-actions.js';
+import type { AuditEntry } from '../entities/audit-entry.entity.js';
+
+export class AuditObjectDto {
+  @ApiProperty({ enum: AUDIT_OBJECTS })
+  kind: string;
+
+  @ApiProperty()
+  id: string;
+}
+
+export class AuditEntryResponseDto {
+  @ApiProperty()
+  id: string;
+
+  @ApiProperty({ type: String, format: 'date-time' })
+  at: string;
+
+  @ApiProperty({ type: MemberDto, nullable: true, description: 'null where the account is gone.' })
+  by: MemberDto | null;
+
+  @ApiProperty({ enum: AUDIT_ACTIONS })
+  action: string;
+
+  @ApiProperty()
+  object: AuditObjectDto;
+
+  @ApiProperty({ type: Object, nullable: true, description: 'What stood before; null = nothing.' })
+  from: object | null;
+
+  @ApiProperty({ type: Object, nullable: true, description: 'What stands since; null = nothing.' })
+  to: object | null;
+}
+
+export class AuditListDto extends listOf(AuditEntryResponseDto) {}
+
+export function toAuditEntryResponse(entry: AuditEntry): AuditEntryResponseDto {
+  const { id, at, user, action, objectKind, objectId, from, to } = entry;
+  return {
+    id: String(id),
+    at: at.toISOString(),
+    by: toMemberDto(user),
+    action,
+    object: { kind: objectKind, id: objectId },
+    from,
+    to,
+  };
+}

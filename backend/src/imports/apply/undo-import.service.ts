@@ -1,0 +1,121 @@
+import { Injectable } from '@nestjs/common';
+import type { QueryRunner } from 'typeorm';
+import { replacePartsInBulk } from '../../library/bulk-parts.js';
+import { LibraryService } from '../../library/library.service.js';
+import type { Caller } from '../../shared/access/caller.js';
+import { Import } from '../entities/import.entity.js';
+import { type ImportJob, ImportJobs } from '../import-jobs.service.js';
+import { tableOf } from '../part-kinds.js';
+import { acceptedRows } from '../row-counts.js';
+import { acceptedPortion, type AcceptedRow, keysOf } from './accepted-rows.js';
+import { type CurrentPart, currentParts } from './current-parts.js';
+import { changeLibraryAlone } from './library-lock.js';
+
+/** A row of an applied import with the part that it wrote, where nobody has touched it since. */
+interface Untouched {
+  row: AcceptedRow;
+  part: CurrentPart;
+}
+
+/** Brings back what stood in the library before an import; parts that were edited since stay and are marked. */
+@Injectable()
+export class UndoImport {
+  constructor(
+    private readonly jobs: ImportJobs,
+    private readonly libraries: LibraryService,
+  ) {}
+
+  async start(caller: Caller, entity: Import): Promise<void> {
+    const libraryId = await this.libraries.editableLibrary(caller);
+    const total = entity.counts === null ? 0 : acceptedRows(entity.counts);
+    await this.jobs.start(entity.id, { from: ['applied'], to: 'undoing', total }, (job) =>
+      this.undo(job, caller, entity, libraryId),
+    );
+  }
+
+  private undo(job: ImportJob, caller: Caller, entity: Import, libraryId: number): Promise<void> {
+    const stamp = { at: new Date(), userId: caller.userId };
+    return changeLibraryAlone(job, libraryId, 'undoing', async () => {
+      let [done, last, kept] = [0, 0, 0];
+      for (;;) {
+        const rows = await acceptedPortion(job.runner, entity.id, last);
+        if (rows.length === 0) break;
+        const untouched = await untouchedRows(job.runner, libraryId, entity, rows);
+        await takeBack(job.runner, untouched);
+        await replacePartsInBulk(
+          job.runner,
+          tableOf(entity.kind),
+          libraryId,
+          untouched.flatMap(({ row, part }) => restored(row, part)),
+          stamp,
+        );
+        kept += await markKept(job.runner, entity.id, rows, untouched);
+        last = rows.at(-1)!.position;
+        done += rows.length;
+        await job.progress(done);
+      }
+      await job.runner.manager.update(
+        Import,
+        { id: entity.id },
+        { state: 'undone', undoneAt: stamp.at, undoneById: stamp.userId, keptCount: kept },
+      );
+    });
+  }
+}
+
+/** A part that is as the import wrote it carries the import's moment and the version after the checked one. */
+async function untouchedRows(
+  runner: QueryRunner,
+  libraryId: number,
+  { appliedAt }: Import,
+  rows: readonly AcceptedRow[],
+): Promise<Untouched[]> {
+  const current = await currentParts(runner, libraryId, keysOf(rows));
+  const inUse = await partsWithOffers(
+    runner,
+    rows.flatMap(({ partId, normalisedKey }) =>
+      partId === null ? (current.get(normalisedKey)?.id ?? []) : [],
+    ),
+  );
+  return rows.flatMap((row) => {
+    const part = current.get(row.normalisedKey);
+    const asWritten =
+      part?.updatedAt.getTime() === appliedAt?.getTime() && part?.version === (row.baseVersion ?? 0) + 1;
+    return part !== undefined && asWritten && !inUse.has(part.id) ? [{ row, part }] : [];
+  });
+}
+
+/** An offer on a new part would go with it. */
+async function partsWithOffers(runner: QueryRunner, ids: readonly number[]): Promise<Set<number>> {
+  if (ids.length === 0) return new Set();
+  const rows: { id: number }[] = await runner.query(
+    'SELECT DISTINCT part_id AS id FROM offers WHERE part_id IN (?)',
+    [ids],
+  );
+  return new Set(rows.map(({ id }) => id));
+}
+
+async function takeBack(runner: QueryRunner, untouched: readonly Untouched[]): Promise<void> {
+  const ids = untouched.flatMap(({ row, part }) => (row.partId === null ? [part.id] : []));
+  if (ids.length > 0) await runner.query('DELETE FROM parts WHERE id IN (?)', [ids]);
+}
+
+function restored({ beforeImage, normalisedKey }: AcceptedRow, { id, version }: CurrentPart) {
+  return beforeImage === null ? [] : [{ id, version: version + 1, normalisedKey, part: beforeImage }];
+}
+
+async function markKept(
+  runner: QueryRunner,
+  importId: number,
+  rows: readonly AcceptedRow[],
+  untouched: readonly Untouched[],
+): Promise<number> {
+  const undone = new Set(untouched.map(({ row }) => row.position));
+  const kept = rows.filter(({ position }) => !undone.has(position)).map(({ position }) => position);
+  if (kept.length > 0)
+    await runner.query('UPDATE import_rows SET kept = 1 WHERE import_id = ? AND position IN (?)', [
+      importId,
+      kept,
+    ]);
+  return kept.length;
+}

@@ -1,0 +1,94 @@
+import type { LibraryPart } from '@roothertz/common/parts';
+import { Injectable } from '@nestjs/common';
+import type { QueryRunner } from 'typeorm';
+import { findPartsByKeys, type FoundPart } from '../../library/bulk-parts.js';
+import { LibraryService, type ReadableLibrary } from '../../library/library.service.js';
+import type { PartTable } from '../../library/part-tables.js';
+import type { Caller } from '../../shared/access/caller.js';
+import { Import } from '../entities/import.entity.js';
+import { ImportRow } from '../entities/import-row.entity.js';
+import { readRecords } from '../file/csv-records.js';
+import { ImportFiles } from '../import-files.service.js';
+import { type ImportJob, ImportJobs } from '../import-jobs.service.js';
+import { MAPPABLE_STATES } from '../import-states.js';
+import { tableOf } from '../part-kinds.js';
+import { noRows } from '../row-counts.js';
+import { type CheckedRow, type ReadRow, RowChecker } from './row-checker.js';
+import { writeVerdicts } from './row-writer.js';
+
+/** Rows that are read, looked up and written together. */
+const PORTION = 1000;
+
+/** Gives every row of an import its verdict, all in one transaction. */
+@Injectable()
+export class CheckImport {
+  constructor(
+    private readonly files: ImportFiles,
+    private readonly jobs: ImportJobs,
+    private readonly libraries: LibraryService,
+  ) {}
+
+  async start(caller: Caller, entity: Import): Promise<{ done: Promise<void> }> {
+    const ownLibraryId = await this.libraries.editableLibrary(caller);
+    const libraries = await this.libraries.readableLibraries(caller);
+    const beginning = { from: MAPPABLE_STATES, to: 'checking' as const, total: entity.rowCount };
+    return this.jobs.start(entity.id, beginning, (job) => this.check(job, entity, libraries, ownLibraryId));
+  }
+
+  private async check(
+    job: ImportJob,
+    entity: Import,
+    libraries: readonly ReadableLibrary[],
+    ownLibraryId: number,
+  ): Promise<void> {
+    const { runner } = job;
+    const table = tableOf(entity.kind);
+    const checker = new RowChecker(table.catalogue, entity, ownLibraryId);
+    const counts = noRows();
+    let position = 0;
+    await runner.startTransaction();
+    try {
+      await runner.manager.delete(ImportRow, { importId: entity.id });
+      for await (const rows of this.readRows(entity, checker)) {
+        const checked = await checkRows(runner, table, checker, libraries, rows);
+        await writeVerdicts(runner, entity.id, position + 1, checked, counts);
+        position += rows.length;
+        await job.progress(position);
+      }
+      const checkedRevision = libraries.find(({ id }) => id === ownLibraryId)?.revision ?? null;
+      await runner.manager.update(
+        Import,
+        { id: entity.id },
+        { state: 'checked', counts, checkedRevision, rowCount: position },
+      );
+      await runner.commitTransaction();
+    } catch (error) {
+      await runner.rollbackTransaction().catch(() => undefined);
+      throw error;
+    }
+  }
+
+  private async *readRows({ storedName, dialect }: Import, checker: RowChecker): AsyncGenerator<ReadRow[]> {
+    let isHeader = true;
+    for await (const records of readRecords(this.files.pathOf(storedName!), dialect, PORTION)) {
+      const rows = isHeader ? records.slice(1) : records;
+      isHeader = false;
+      if (rows.length > 0) yield rows.map((record) => checker.read(record));
+    }
+  }
+}
+
+async function checkRows(
+  runner: QueryRunner,
+  table: PartTable<LibraryPart>,
+  checker: RowChecker,
+  libraries: readonly ReadableLibrary[],
+  rows: readonly ReadRow[],
+): Promise<CheckedRow[]> {
+  const keys = [...new Set(rows.flatMap(({ key }) => (key === null ? [] : [key])))];
+  const ids = libraries.map(({ id }) => id);
+  const found = new Map<string, FoundPart<LibraryPart>[]>();
+  for (const part of await findPartsByKeys(runner, table, ids, keys))
+    found.set(part.normalisedKey, [...(found.get(part.normalisedKey) ?? []), part]);
+  return rows.map((row) => checker.check(row, found.get(row.key ?? '') ?? []));
+}

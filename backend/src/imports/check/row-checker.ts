@@ -1,0 +1,109 @@
+import {
+  type FieldChange,
+  type ImportRowReader,
+  importRowReader,
+  type RowError,
+  rowJudge,
+  type RowVerdict,
+} from '@roothertz/common/imports';
+import { type LibraryPart, normalisePartKey, type PartCatalogue } from '@roothertz/common/parts';
+import type { FoundPart } from '../../library/bulk-parts.js';
+import type { Import } from '../entities/import.entity.js';
+import type { CsvRecord } from '../file/csv-records.js';
+
+type Reading = ReturnType<ImportRowReader['read']>;
+
+/** A row whose cells are read, before anything is known of the libraries. */
+export interface ReadRow {
+  record: CsvRecord;
+  reading: Reading;
+  key: string | null;
+}
+
+/** A row with its verdict; what stands in the library of its part. */
+export interface CheckedRow {
+  record: CsvRecord;
+  key: string | null;
+  verdict: RowVerdict<LibraryPart>;
+  existing: FoundPart<LibraryPart> | null;
+}
+
+interface Seen {
+  line: number;
+  stated: string;
+}
+
+/** Checks the rows of one list, which it remembers by their keys. */
+export class RowChecker {
+  private readonly reader: ImportRowReader;
+  private readonly judge: ReturnType<typeof rowJudge<LibraryPart>>;
+  private readonly seen = new Map<string, Seen>();
+
+  constructor(
+    catalogue: PartCatalogue<LibraryPart>,
+    { mapping, dialect }: Pick<Import, 'mapping' | 'dialect'>,
+    private readonly ownLibraryId: number,
+  ) {
+    this.reader = importRowReader(catalogue, mapping ?? [], dialect.decimalMark);
+    this.judge = rowJudge(catalogue, this.reader);
+  }
+
+  read(record: CsvRecord): ReadRow {
+    const reading = this.reader.read(record.cells);
+    return { record, reading, key: reading.ok ? keyOf(reading) : null };
+  }
+
+  check({ record, reading, key }: ReadRow, found: readonly FoundPart<LibraryPart>[]): CheckedRow {
+    if (!reading.ok) return refused(record, key, reading.errors);
+    const existing = found.find(({ libraryId }) => libraryId === this.ownLibraryId) ?? null;
+    const curated = found.find(({ libraryId }) => libraryId !== this.ownLibraryId)?.part ?? null;
+    if (existing !== null && existing.part === null)
+      return this.refuseAt(record, reading, key, 'the library has a part of another kind by this name');
+    const before = key === null ? undefined : this.seen.get(key);
+    const stated = JSON.stringify([...reading.stated]);
+    if (before !== undefined) return this.checkAgain(record, reading, key!, before, stated, existing);
+    const verdict = this.judge(reading, { existing: existing?.part ?? null, curated });
+    if (key !== null && verdict.state !== 'refused') this.seen.set(key, { line: record.line, stated });
+    return { record, key, verdict, existing };
+  }
+
+  /** The part stands in the file before. */
+  private checkAgain(
+    record: CsvRecord,
+    reading: Extract<Reading, { ok: true }>,
+    key: string,
+    { line, stated: before }: Seen,
+    stated: string,
+    existing: FoundPart<LibraryPart> | null,
+  ): CheckedRow {
+    if (stated !== before)
+      return this.refuseAt(record, reading, key, `stands on line ${line} too, with other values`);
+    const part = Object.fromEntries(reading.stated) as unknown as LibraryPart;
+    const doubts = [{ code: 'repeated' as const, field: null, message: `the same as line ${line}` }];
+    return { record, key, verdict: { state: 'unchanged', part, doubts }, existing };
+  }
+
+  private refuseAt(
+    record: CsvRecord,
+    { cells }: Extract<Reading, { ok: true }>,
+    key: string | null,
+    why: string,
+  ): CheckedRow {
+    const error = this.reader.errorAt('partNumber', why, cells);
+    return refused(record, key, [{ ...error, expected: 'each part once' }]);
+  }
+}
+
+/** The changes that are shown of a row; all of a new part's values are new. */
+export function changesOf(verdict: RowVerdict<LibraryPart>): FieldChange[] | null {
+  return 'changes' in verdict && verdict.changes.length > 0 ? verdict.changes : null;
+}
+
+function refused(record: CsvRecord, key: string | null, errors: RowError[]): CheckedRow {
+  return { record, key, verdict: { state: 'refused', errors }, existing: null };
+}
+
+function keyOf({ stated }: Extract<Reading, { ok: true }>): string | null {
+  const [manufacturer, partNumber] = [stated.get('manufacturer'), stated.get('partNumber')];
+  return manufacturer && partNumber ? normalisePartKey(String(manufacturer), String(partNumber)) : null;
+}

@@ -1,0 +1,112 @@
+import {
+  type Doubt,
+  DOUBT_CODES,
+  type DoubtCode,
+  type FieldChange,
+  type PartValue,
+  ROW_STATES,
+  type RowState,
+} from '@roothertz/common/imports';
+import { ApiProperty } from '@nestjs/swagger';
+import { ListQueryDto } from '../../shared/list/list-query.dto.js';
+import { listOf } from '../../shared/list/list-response.js';
+import { Option } from '../../shared/validation/option.decorator.js';
+import type { ImportRow } from '../entities/import-row.entity.js';
+import type { ImportColumn } from '../file/import-columns.js';
+
+/** The verdicts, and the rows that an undoing left as they are. */
+export const ROW_LISTS = [...ROW_STATES, 'kept'] as const;
+
+export class ListImportRowsDto extends ListQueryDto {
+  @Option(ROW_LISTS, { optional: true })
+  state?: (typeof ROW_LISTS)[number];
+}
+
+const VALUE = { oneOf: [{ type: 'string' }, { type: 'number' }], nullable: true };
+
+class FieldChangeDto implements FieldChange {
+  @ApiProperty({ description: 'Path of the field, such as amplifier.voltageNoise.' })
+  field: string;
+
+  @ApiProperty({ ...VALUE, description: 'In SI units; null = unknown.' })
+  old: PartValue;
+
+  @ApiProperty({ ...VALUE, description: 'In SI units; null = unknown.' })
+  new: PartValue;
+}
+
+class DoubtDto implements Doubt {
+  @ApiProperty({ enum: DOUBT_CODES })
+  code: DoubtCode;
+
+  @ApiProperty({ type: String, nullable: true })
+  field: string | null;
+
+  @ApiProperty()
+  message: string;
+}
+
+class RowErrorDto {
+  @ApiProperty({
+    type: String,
+    nullable: true,
+    description: 'The column’s heading; null = the list has none.',
+  })
+  column: string | null;
+
+  @ApiProperty()
+  value: string;
+
+  @ApiProperty()
+  why: string;
+
+  @ApiProperty()
+  expected: string;
+}
+
+export class ImportRowDto {
+  @ApiProperty({ type: 'integer', description: 'The line of the file on which the row begins.' })
+  line: number;
+
+  @ApiProperty({ enum: ROW_STATES })
+  state: RowState;
+
+  @ApiProperty()
+  manufacturer: string;
+
+  @ApiProperty()
+  partNumber: string;
+
+  @ApiProperty({ type: [FieldChangeDto] })
+  changes: FieldChangeDto[];
+
+  @ApiProperty({ type: [DoubtDto] })
+  doubts: DoubtDto[];
+
+  @ApiProperty({ type: [RowErrorDto] })
+  errors: RowErrorDto[];
+
+  @ApiProperty({ description: 'An undoing left the part, for it was edited since.' })
+  kept: boolean;
+}
+
+export class ImportRowListDto extends listOf(ImportRowDto) {}
+
+export function toImportRow(row: ImportRow, columns: readonly ImportColumn[]): ImportRowDto {
+  const { line, state, manufacturer, partNumber, changes, doubts, errors, kept } = row;
+  return {
+    line,
+    state,
+    manufacturer,
+    partNumber,
+    changes: changes ?? [],
+    doubts: doubts ?? [],
+    errors: (errors ?? []).map(({ column, value, why, expected }) => ({
+      column: column === null ? null : (columns[column]?.heading ?? null),
+      value,
+      why,
+      expected,
+    })),
+    kept: kept === 1,
+  };
+}

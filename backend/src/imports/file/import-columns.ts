@@ -1,0 +1,123 @@
+import { createHash } from 'node:crypto';
+import {
+  type ColumnMapping,
+  columnProposer,
+  proposeField,
+  type ProposedColumn,
+  readHeading,
+} from '@roothertz/common/imports';
+import { type ListedFields, normaliseWord, PART_FIELDS } from '@roothertz/common/parts';
+import Fuse from 'fuse.js';
+import { shortened } from '../../shared/text/shortened.js';
+import type { DetectedDialect } from './detect-dialect.js';
+
+/** What a column is proposed to become. */
+export interface ColumnProposal extends ColumnMapping {
+  /** From 0 to 1; 1 = its heading is a name that the catalogue knows. */
+  confidence: number;
+  /** The file names no unit: the catalogue's is assumed. */
+  unitAssumed: boolean;
+}
+
+/** A column of an uploaded list. */
+export interface ImportColumn {
+  column: number;
+  heading: string;
+  /** The first cells under the heading. */
+  samples: string[];
+  proposed: ColumnProposal | null;
+}
+
+export const MOST_COLUMNS = 1000;
+const SAMPLES = 5;
+const LONGEST_TEXT = 200;
+const LEAST_CONFIDENCE = 0.7;
+const SHORTEST_WORD = 4;
+const MOST_SPOTS = 2;
+
+/** The columns of a list with what each is proposed to become. */
+export function importColumns(catalogue: ListedFields, { header, sample }: DetectedDialect): ImportColumn[] {
+  const proposals = withoutRivals(proposalsFor(catalogue, header.cells));
+  return header.cells.map((heading, column) => ({
+    column,
+    heading: shown(heading),
+    samples: samplesOf(sample.map(({ cells }) => cells[column] ?? '')),
+    proposed: proposals[column],
+  }));
+}
+
+/** The same for lists of the same headings, however their case and punctuation. */
+export function headerKey(headings: readonly string[]): string {
+  const words = headings.map((heading) => normaliseWord(heading) || heading.trim());
+  return createHash('sha256').update(JSON.stringify(words)).digest('hex');
+}
+
+function shown(text: string): string {
+  return shortened(text.trim(), LONGEST_TEXT);
+}
+
+function samplesOf(cells: readonly string[]): string[] {
+  return cells
+    .filter((cell) => cell.trim() !== '')
+    .slice(0, SAMPLES)
+    .map(shown);
+}
+
+function proposalsFor(catalogue: ListedFields, headings: readonly string[]): (ColumnProposal | null)[] {
+  const propose = columnProposer(catalogue);
+  const guess = fieldGuesser(catalogue);
+  return headings.map((heading, column) => {
+    if (heading.length > LONGEST_TEXT) return null;
+    const exact = propose(heading);
+    if (exact !== null) return toProposal(exact, column, 1);
+    const guessed = guess(heading);
+    return guessed && toProposal(proposeField(catalogue, guessed.field, heading), column, guessed.confidence);
+  });
+}
+
+function toProposal(proposed: ProposedColumn, column: number, confidence: number): ColumnProposal {
+  return { column, ...proposed, confidence };
+}
+
+/** Finds the field whose names a heading resembles. */
+function fieldGuesser({ choice, parameters }: ListedFields) {
+  const names = [...PART_FIELDS, choice, ...parameters].flatMap(({ key, label, synonyms }) =>
+    [label, ...synonyms].map((name) => ({ field: key as string, word: normaliseWord(name) })),
+  );
+  const known = names.filter(({ word }) => word.length >= SHORTEST_WORD);
+  const fuse = new Fuse(known, { keys: ['word'], includeScore: true, threshold: 1 - LEAST_CONFIDENCE });
+  return (heading: string): { field: string; confidence: number } | null => {
+    const word = normaliseWord(readHeading(heading).name);
+    if (word.length < SHORTEST_WORD) return null;
+    const [best] = fuse.search(word, { limit: 1 });
+    const confidence = Math.round((1 - (best?.score ?? 1)) * 100) / 100;
+    return confidence < LEAST_CONFIDENCE ? null : { field: best.item.field, confidence };
+  };
+}
+
+/** Of several columns for one value the surest stays, the first of equals; of several spots the outermost two. */
+function withoutRivals(proposals: (ColumnProposal | null)[]): (ColumnProposal | null)[] {
+  const kept = new Set<ColumnProposal>();
+  const groups = new Map<string, ColumnProposal[]>();
+  for (const proposal of proposals) {
+    if (proposal === null) continue;
+    const name = `${proposal.field} ${proposal.form}`;
+    groups.set(name, [...(groups.get(name) ?? []), proposal]);
+  }
+  for (const rivals of groups.values())
+    for (const proposal of rivals[0].form === 'spot' ? outermost(rivals) : [surest(rivals)])
+      kept.add(proposal);
+  return proposals.map((proposal) => (proposal !== null && kept.has(proposal) ? proposal : null));
+}
+
+function surest(rivals: readonly ColumnProposal[]): ColumnProposal {
+  return [...rivals].sort((one, other) => other.confidence - one.confidence)[0];
+}
+
+function outermost(spots: readonly ColumnProposal[]): ColumnProposal[] {
+  const once = spots.filter(
+    ({ frequency }, index) => spots.findIndex((spot) => spot.frequency === frequency) === index,
+  );
+  const sorted = [...once].sort((one, other) => one.frequency! - other.frequency!);
+  return sorted.length <= MOST_SPOTS ? sorted : [sorted[0], sorted.at(-1)!];
+}

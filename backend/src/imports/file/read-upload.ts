@@ -1,0 +1,60 @@
+import type { ListedFields } from '@roothertz/common/parts';
+import { DomainError } from '../../shared/errors/domain-error.js';
+import type { Import } from '../entities/import.entity.js';
+import { readRecords } from './csv-records.js';
+import { detectDialect } from './detect-dialect.js';
+import type { Dialect, DialectChoice } from './dialect.js';
+import { headerKey, importColumns, MOST_COLUMNS } from './import-columns.js';
+import { inspectFile } from './text-encoding.js';
+
+const MOST_ROWS = 500_000;
+const PORTION = 5000;
+/** So many of a list's characters may be controls; a file with more is no text. */
+const CONTROL_SHARE = 0.1;
+
+/** What an import keeps of its file. */
+export type ReadUpload = Pick<
+  Import,
+  'fileSize' | 'sha256' | 'headerKey' | 'dialect' | 'columns' | 'rowCount'
+>;
+
+/** Reads an uploaded list through once: how it is written, its columns, how many rows it has. */
+export async function readUpload(
+  catalogue: ListedFields,
+  path: string,
+  choice?: DialectChoice,
+): Promise<ReadUpload> {
+  const facts = await inspectFile(path);
+  const detected = detectDialect(catalogue, facts, choice);
+  if (detected === null || isNoText(detected.header.cells.join('')))
+    throw new DomainError('import.unreadable', 'No row can be read: is the file a text with a delimiter?');
+  const { dialect, header } = detected;
+  if (header.cells.length > MOST_COLUMNS)
+    throw new DomainError('import.unreadable', `The list has more than ${MOST_COLUMNS} columns.`);
+  const rowCount = await countRows(path, dialect);
+  if (rowCount === 0)
+    throw new DomainError('import.unreadable', `There is no row below the headings of line ${header.line}.`);
+  return {
+    fileSize: facts.size,
+    sha256: facts.sha256,
+    headerKey: headerKey(header.cells),
+    dialect,
+    columns: importColumns(catalogue, detected),
+    rowCount,
+  };
+}
+
+function isNoText(text: string): boolean {
+  const controls = text.match(/[\p{Cc}\uFFFD]/gu)?.length ?? 0;
+  return controls > text.length * CONTROL_SHARE;
+}
+
+async function countRows(path: string, dialect: Dialect): Promise<number> {
+  let count = -1;
+  for await (const records of readRecords(path, dialect, PORTION)) {
+    count += records.length;
+    if (count > MOST_ROWS)
+      throw new DomainError('import.too-large', 'The list has more than 500 000 rows: split it.');
+  }
+  return Math.max(0, count);
+}

@@ -1,0 +1,25 @@
+import type { Library, PartKind } from '@roothertz/common/parts';
+import type { EntityManager, SelectQueryBuilder } from 'typeorm';
+import type { Caller } from '../shared/access/caller.js';
+import { Part } from './entities/part.entity.js';
+
+/** What a part of any kind is called. */
+export interface PartName {
+  id: number;
+  library: Library;
+  kind: PartKind;
+  manufacturer: string;
+  partNumber: string;
+}
+
+/** The parts of all kinds that a caller may read, as `part` with its `library`. */
+export function selectReadableParts(manager: EntityManager, { teamId }: Caller): SelectQueryBuilder<Part> {
+  return manager
+    .createQueryBuilder(Part, 'part')
+    .innerJoinAndSelect('part.library', 'library')
+    .where('(library.teamId IS NULL OR library.teamId = :teamId)', { teamId });
+}
+
+export function toPartName({ id, library, kind, manufacturer, partNumber }: Part): PartName {
+  return { id, library: library.teamId === null ? 'curated' : 'team', kind, manufacturer, partNumber };
+}

@@ -1,0 +1,53 @@
+import {
+  dayOf,
+  type ExchangeRates,
+  type Offer as OfferOfSupplier,
+  offerStates,
+  priceAt,
+  type PriceAtQuantity,
+} from '@roothertz/common/prices';
+import { currentRates, type DatedRate, toExchangeRates } from './dated-rates.js';
+import type { Offer } from './entities/offer.entity.js';
+import { termsOf } from './offer-terms.js';
+
+/** All that a team's prices are worked out from, at a revision. */
+export interface PriceBook {
+  currency: string;
+  staleAfterDays: number;
+  rates: DatedRate[];
+  /** by the part's id */
+  offers: ReadonlyMap<number, OfferOfSupplier[]>;
+}
+
+/** What parts cost at a quantity, today. */
+export class QuantityPrices {
+  private readonly today = dayOf(new Date());
+  private readonly rates: ExchangeRates;
+
+  constructor(
+    readonly book: PriceBook,
+    private readonly quantity: number,
+  ) {
+    this.rates = toExchangeRates(currentRates(book.rates, this.today));
+  }
+
+  /** What each part costs in all; NaN where no offer counts. */
+  totals(partIds: ArrayLike<number>): Float64Array {
+    return Float64Array.from(partIds, (id) => Number(this.of(id)?.total ?? NaN));
+  }
+
+  /** Null where no offer for the part counts. */
+  of(partId: number): PriceAtQuantity | null {
+    const offers = this.book.offers.get(partId);
+    return offers ? priceAt(offers, this.quantity, this.rates, this.book.currency, this.today) : null;
+  }
+
+  isStale(offer: OfferOfSupplier): boolean {
+    return offerStates(offer, this.book.staleAfterDays, this.today).includes('stale');
+  }
+}
+
+export function toPricedOffer(offer: Offer): OfferOfSupplier {
+  const confirmedAt = offer.confirmedAt.toISOString();
+  return { supplier: offer.supplier.name, ...termsOf(offer), confirmedAt };
+}

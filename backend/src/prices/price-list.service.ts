@@ -1,0 +1,58 @@
+import { Injectable } from '@nestjs/common';
+import { InjectDataSource } from '@nestjs/typeorm';
+import type { DataSource } from 'typeorm';
+import { selectReadableParts, toPartName } from '../library/readable-parts.js';
+import type { Caller } from '../shared/access/caller.js';
+import { parseSort } from '../shared/list/sort.js';
+import type { ListPricesDto, PriceListDto } from './dto/list-prices.dto.js';
+import { toOfferedPart, toOfferResponse } from './offer-response.js';
+import { findOffers } from './offer-select.js';
+import { filterPrices, PRICE_SORTS, selectPrices, sortPrices } from './price-select.js';
+import { PriceSettingsService } from './price-settings.service.js';
+
+interface Row {
+  partId: number;
+  offerId: number | null;
+}
+
+/** The rows of the grid: parts with each of their offers, or without. */
+@Injectable()
+export class PriceListService {
+  constructor(
+    @InjectDataSource() private readonly dataSource: DataSource,
+    private readonly settings: PriceSettingsService,
+  ) {}
+
+  async list(caller: Caller, query: ListPricesDto): Promise<PriceListDto> {
+    const { manager } = this.dataSource;
+    const sort = parseSort(query.sort ?? 'manufacturer', PRICE_SORTS);
+    const view = await this.settings.view(caller);
+    const select = filterPrices(selectPrices(manager, caller), query, view);
+    const counted = await select.clone().select('COUNT(*)', 'total').getRawOne<{ total: string }>();
+    const rows = await sortPrices(select.select('part.id', 'partId').addSelect('offer.id', 'offerId'), sort)
+      .limit(query.limit)
+      .offset(query.offset)
+      .getRawMany<Row>();
+    const parts = await this.findParts(caller, rows);
+    const offers = await findOffers(
+      manager,
+      caller,
+      rows.flatMap(({ offerId }) => offerId ?? []),
+    );
+    const items = rows.flatMap(({ partId, offerId }) => {
+      const part = parts.get(partId);
+      const offer = offers.get(offerId ?? 0);
+      return part ? [{ part: toOfferedPart(part), offer: offer ? toOfferResponse(offer, view) : null }] : [];
+    });
+    return { items, total: Number(counted?.total) };
+  }
+
+  private async findParts(caller: Caller, rows: readonly Row[]) {
+    const ids = rows.map(({ partId }) => partId);
+    if (ids.length === 0) return new Map();
+    const parts = await selectReadableParts(this.dataSource.manager, caller)
+      .andWhere('part.id IN (:...ids)', { ids })
+      .getMany();
+    return new Map(parts.map((part) => [part.id, toPartName(part)]));
+  }
+}

@@ -1,0 +1,33 @@
+import { Module } from '@nestjs/common';
+import { AuditModule } from '../audit/audit.module.js';
+import { OfferSaver } from './offer-saver.service.js';
+import { OffersController } from './offers.controller.js';
+import { OffersService } from './offers.service.js';
+import { PartOffersController } from './part-offers.controller.js';
+import { PartOffersService } from './part-offers.service.js';
+import { PriceBookService } from './price-book.service.js';
+import { PriceChanges } from './price-changes.service.js';
+import { PriceListService } from './price-list.service.js';
+import { PriceSettingsService } from './price-settings.service.js';
+import { PricesController } from './prices.controller.js';
+import { RatesService } from './rates.service.js';
+import { SuppliersController } from './suppliers.controller.js';
+import { SuppliersService } from './suppliers.service.js';
+
+@Module({
+  imports: [AuditModule],
+  controllers: [SuppliersController, PricesController, OffersController, PartOffersController],
+  providers: [
+    OfferSaver,
+    OffersService,
+    PartOffersService,
+    PriceBookService,
+    PriceChanges,
+    PriceListService,
+    PriceSettingsService,
+    RatesService,
+    SuppliersService,
+  ],
+  exports: [PriceBookService],
+})
+export class PricesModule {}

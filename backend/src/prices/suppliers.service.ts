@@ -1,0 +1,64 @@
+import { Injectable } from '@nestjs/common';
+import { InjectDataSource } from '@nestjs/typeorm';
+import type { DataSource } from 'typeorm';
+import { AuditService } from '../audit/audit.service.js';
+import type { Caller } from '../shared/access/caller.js';
+import { DomainError } from '../shared/errors/domain-error.js';
+import { isDuplicateEntry } from '../shared/errors/duplicate-entry.js';
+import { likePattern } from '../shared/list/like-pattern.js';
+import type { ListQueryDto } from '../shared/list/list-query.dto.js';
+import { parseSort } from '../shared/list/sort.js';
+import { nameKey } from '../shared/text/name-key.js';
+import {
+  type CreateSupplierDto,
+  type SupplierListDto,
+  type SupplierResponseDto,
+  toSupplierResponse,
+} from './dto/supplier.dto.js';
+import { Supplier } from './entities/supplier.entity.js';
+
+const SORTS = ['name'] as const;
+
+@Injectable()
+export class SuppliersService {
+  constructor(
+    @InjectDataSource() private readonly dataSource: DataSource,
+    private readonly audit: AuditService,
+  ) {}
+
+  async list({ teamId }: Caller, query: ListQueryDto): Promise<SupplierListDto> {
+    const { descending } = parseSort(query.sort ?? 'name', SORTS);
+    const [items, total] = await this.dataSource.manager
+      .createQueryBuilder(Supplier, 'supplier')
+      .where('supplier.teamId = :teamId', { teamId })
+      .andWhere(`supplier.name LIKE :name ESCAPE '!'`, { name: likePattern(query.search ?? '') })
+      .orderBy('supplier.name', descending ? 'DESC' : 'ASC')
+      .addOrderBy('supplier.id')
+      .limit(query.limit)
+      .offset(query.offset)
+      .getManyAndCount();
+    return { items: items.map(toSupplierResponse), total };
+  }
+
+  create(caller: Caller, { name }: CreateSupplierDto): Promise<SupplierResponseDto> {
+    return this.dataSource
+      .transaction(async (manager) => {
+        const row = { teamId: caller.teamId, name, nameKey: nameKey(name), createdAt: new Date() };
+        const { identifiers } = await manager.insert(Supplier, row);
+        const id = identifiers[0].id as number;
+        const object = { kind: 'supplier', id } as const;
+        await this.audit.record(manager, caller, [
+          { action: 'supplier.added', object, from: null, to: { name } },
+        ]);
+        return toSupplierResponse({ id, name });
+      })
+      .catch(refuseDuplicate);
+  }
+}
+
+function refuseDuplicate(error: unknown): never {
+  if (!isDuplicateEntry(error)) throw error;
+  throw new DomainError('supplier.duplicate', 'The team has a supplier of this name already.', {
+    errors: [{ field: 'name', message: 'name: another one was expected, for this one is taken' }],
+  });
+}

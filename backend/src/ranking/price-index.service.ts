@@ -1,0 +1,20 @@
+import { Injectable } from '@nestjs/common';
+import { type PriceBook, QuantityPrices } from '../prices/price-book.js';
+import { PriceBookService, type PricedTeam } from '../prices/price-book.service.js';
+import type { Caller } from '../shared/access/caller.js';
+import { RevisionCache } from './revision-cache.js';
+
+/** Keeps the teams' prices in memory, each at the revision that the database has. */
+@Injectable()
+export class PriceIndex {
+  private readonly cache: RevisionCache<PriceBook, PricedTeam>;
+
+  constructor(private readonly books: PriceBookService) {
+    this.cache = new RevisionCache((team) => books.load(team));
+  }
+
+  /** What the parts cost the caller's team today. */
+  async at(caller: Caller, quantity: number): Promise<QuantityPrices> {
+    return new QuantityPrices(await this.cache.contentOf(await this.books.teamOf(caller)), quantity);
+  }
+}
