@@ -1,5 +1,6 @@
 import { createBrowserRouter, Navigate, type RouteObject } from 'react-router-dom';
 import { PageSkeleton } from './components/PageSkeleton';
+import { partsRoutes } from './pages/parts/partsRoutes';
 import { ErrorPage } from './shell/ErrorPage';
 import { START_PAGE } from './shell/navigation';
 import { NotFoundPage } from './shell/NotFoundPage';
@@ -11,26 +12,7 @@ const pages: RouteObject[] = [
     path: 'rank',
     lazy: async () => ({ Component: (await import('./pages/rank/RankPage')).RankPage }),
   },
-  {
-    path: 'rank',
-    lazy: async () => ({ Component: (await import('./pages/rank/RankPage')).RankPage }),
-  },
-  {
-    path: 'parts',
-    lazy: async () => ({ Component: (await import('./pages/parts/PartsPage')).PartsPage }),
-  },
-  {
-    path: 'parts/new',
-    lazy: async () => ({ Component: (await import('./pages/parts/NewPartPage')).NewPartPage }),
-  },
-  {
-    path: 'parts/:id',
-    lazy: async () => ({ Component: (await import('./pages/parts/PartPage')).PartPage }),
-  },
-  {
-    path: 'parts/:id/edit',
-    lazy: async () => ({ Component: (await import('./pages/parts/EditPartPage')).EditPartPage }),
-  },
+  ...partsRoutes,
   {
     path: 'account',
     lazy: async () => ({ Component: (await import('./pages/account/AccountPage')).AccountPage }),

@@ -22,7 +22,7 @@ export const CAUTION_LABELS: Record<Caution, string> = {
   'feedback-network-loads-output': 'network loads the output',
   'stability-unknown': 'stability unknown',
   'supply-unknown': 'supply unknown',
-  'several-packages': 'takes several packages',
+  'several-packages': 'several packages',
 };
 
 /** One sentence that says what the caution means for the figure. */

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { fakeServer, json, problem } from '../test/fakeServer';
-import { createOpAmp, deleteOpAmp } from './opAmps';
+import { OP_AMPS_API } from './opAmps';
 import { ApiProblem } from './problem';
 import { createQueryClient } from './queryClient';
 import { SESSION_KEY, sessionQuery, signIn } from './session';
@@ -21,7 +21,7 @@ describe('the API client', () => {
     fakeServer({
       'POST /api/op-amps': () => problem(422, 'part.invalid', { detail: 'Not a part.', errors }),
     });
-    const error = await failure(createOpAmp(opAmp()));
+    const error = await failure(OP_AMPS_API.create(opAmp()));
     expect(error).toBeInstanceOf(ApiProblem);
     expect(error).toMatchObject({ status: 422, code: 'part.invalid', detail: 'Not a part.', errors });
   });
@@ -46,7 +46,7 @@ describe('the API client', () => {
 
   it('carries the version of a part that is deleted', async () => {
     const asked = fakeServer({ 'DELETE /api/op-amps/41': () => new Response(null, { status: 204 }) });
-    await deleteOpAmp('41', 3);
+    await OP_AMPS_API.remove('41', 3);
     expect(asked[0].url.search).toBe('?version=3');
   });
 

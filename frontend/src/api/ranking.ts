@@ -1,51 +1,41 @@
-import { infiniteQueryOptions, keepPreviousData } from '@tanstack/react-query';
 import type { RankingRequest } from '@roothertz/common/conditions';
 import { answer, client } from './client';
+import { pagesQuery } from './pages';
 import type { components } from './schema';
 
 export type Ranking = components['schemas']['RankingResponseDto'];
 export type RankingItem = Ranking['items'][number];
 export type Exclusions = components['schemas']['ExclusionListDto'];
-export type ExcludedPart = Exclusions['items'][number];
+export type PartName = components['schemas']['PartNameDto'];
 
-const RANKINGS_KEY = ['rankings'] as const;
-const PAGE = 100;
+export const RANKINGS_KEY = ['rankings'] as const;
+export const PAGE = 100;
 
 /** A page of a ranking together with what was asked, so that figures and conditions never come apart. */
 export interface RankingPage extends Ranking {
   request: RankingRequest;
 }
 
-/** The ranking, quietest first, in pages; the one before it stays until the next is there. */
+/** A part that a ranking leaves out, with the reason. */
+export interface ExcludedPart<Reason extends string = string> {
+  part: PartName;
+  reason: Reason;
+  detail: string;
+}
+
+/** The ranking, quietest first, in pages. */
 export function rankingQuery(request: RankingRequest) {
-  return infiniteQueryOptions({
-    queryKey: [...RANKINGS_KEY, 'op-amps', request],
-    queryFn: async ({ pageParam, signal }): Promise<RankingPage> => {
-      const body = { ...request, sort: 'inputNoiseRms' as const, limit: PAGE, offset: pageParam };
-      const page = await answer(client.POST('/api/rankings/op-amps', { body, signal }));
-      return { ...page, request };
-    },
-    initialPageParam: 0,
-    getNextPageParam: (last, pages) => nextOffset(last.total, pages),
-    placeholderData: keepPreviousData,
+  return pagesQuery([...RANKINGS_KEY, 'op-amps', request], async (offset, signal): Promise<RankingPage> => {
+    const body = { ...request, sort: 'inputNoiseRms' as const, limit: PAGE, offset };
+    const page = await answer(client.POST('/api/rankings/op-amps', { body, signal }));
+    return { ...page, request };
   });
 }
 
 /** The parts that a ranking leaves out, each with its reason, in pages. */
 export function exclusionsQuery(request: RankingRequest) {
-  return infiniteQueryOptions({
-    queryKey: [...RANKINGS_KEY, 'exclusions', request],
-    queryFn: ({ pageParam, signal }) => {
-      const body = { ...request, limit: PAGE, offset: pageParam };
-      return answer(client.POST('/api/rankings/op-amps/exclusions', { body, signal }));
-    },
-    initialPageParam: 0,
-    getNextPageParam: (last, pages) => nextOffset(last.total, pages),
-    placeholderData: keepPreviousData,
+  return pagesQuery([...RANKINGS_KEY, 'exclusions', request], (offset, signal) => {
+    const body = { ...request, limit: PAGE, offset };
+    return answer(client.POST('/api/rankings/op-amps/exclusions', { body, signal }));
   });
-}
-
-function nextOffset(total: number, pages: readonly { items: readonly unknown[] }[]): number | undefined {
-  const loaded = pages.reduce((sum, { items }) => sum + items.length, 0);
-  return pages.at(-1)?.items.length && loaded < total ? loaded : undefined;
 }

@@ -4,6 +4,22 @@
  */
 
 export interface paths {
+    "/api/audit": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["listAuditEntries"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/auth/me": {
         parameters: {
             query?: never;
@@ -100,6 +116,134 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/imports": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["listImports"];
+        put?: never;
+        post: operations["uploadImport"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/imports/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["getImport"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/imports/{id}/apply": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["applyImport"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/imports/{id}/cancel": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["cancelImport"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/imports/{id}/mapping": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put: operations["mapImport"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/imports/{id}/refused.csv": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["getRefusedRows"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/imports/{id}/rows": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["listImportRows"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/imports/{id}/undo": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["undoImport"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/noise/stage": {
         parameters: {
             query?: never;
@@ -116,6 +260,70 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/offers": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["createOffer"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/offers/confirm": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["confirmOffers"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/offers/history": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["getPriceHistory"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/offers/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete: operations["closeOffer"];
+        options?: never;
+        head?: never;
+        patch: operations["updateOffer"];
+        trace?: never;
+    };
     "/api/op-amps": {
         parameters: {
             query?: never;
@@ -126,6 +334,22 @@ export interface paths {
         get: operations["listOpAmps"];
         put?: never;
         post: operations["createOpAmp"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/op-amps.csv": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["exportOpAmps"];
+        put?: never;
+        post?: never;
         delete?: never;
         options?: never;
         head?: never;
@@ -146,6 +370,70 @@ export interface paths {
         options?: never;
         head?: never;
         patch: operations["updateOpAmp"];
+        trace?: never;
+    };
+    "/api/parts/{id}/offers": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["listPartOffers"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/prices": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["listPrices"];
+        put: operations["savePrices"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/prices/rates": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["getRates"];
+        put: operations["saveRates"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/prices/settings": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["getPriceSettings"];
+        put: operations["savePriceSettings"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
         trace?: never;
     };
     "/api/rankings/op-amps": {
@@ -190,6 +478,118 @@ export interface paths {
         get?: never;
         put?: never;
         post: operations["drawQuietestMap"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/rankings/resistors": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["rankResistors"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/rankings/resistors/exclusions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["listResistorExclusions"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/rankings/stages": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["rankStages"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/resistors": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["listResistors"];
+        put?: never;
+        post: operations["createResistor"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/resistors.csv": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["exportResistors"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/resistors/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["getResistor"];
+        put?: never;
+        post?: never;
+        delete: operations["deleteResistor"];
+        options?: never;
+        head?: never;
+        patch: operations["updateResistor"];
+        trace?: never;
+    };
+    "/api/suppliers": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["listSuppliers"];
+        put?: never;
+        post: operations["createSupplier"];
         delete?: never;
         options?: never;
         head?: never;
@@ -256,6 +656,58 @@ export interface components {
             /** @description Frequency at which the 1/f part of the voltage noise equals its white part; 0 = no 1/f noise. In Hz. */
             voltageNoiseCorner?: number | null;
         };
+        AmplifierOriginsChangeDto: {
+            /** @enum {string|null} */
+            channels?: "typical" | "maximum" | "measured" | "estimated" | null;
+            /** @enum {string|null} */
+            currentNoise?: "typical" | "maximum" | "measured" | "estimated" | null;
+            /** @enum {string|null} */
+            currentNoiseCorner?: "typical" | "maximum" | "measured" | "estimated" | null;
+            /** @enum {string|null} */
+            gainBandwidth?: "typical" | "maximum" | "measured" | "estimated" | null;
+            /** @enum {string|null} */
+            inputBiasCurrent?: "typical" | "maximum" | "measured" | "estimated" | null;
+            /** @enum {string|null} */
+            inputCapacitance?: "typical" | "maximum" | "measured" | "estimated" | null;
+            /** @enum {string|null} */
+            minimumStableGain?: "typical" | "maximum" | "measured" | "estimated" | null;
+            /** @enum {string|null} */
+            supplyCurrent?: "typical" | "maximum" | "measured" | "estimated" | null;
+            /** @enum {string|null} */
+            supplyMaximum?: "typical" | "maximum" | "measured" | "estimated" | null;
+            /** @enum {string|null} */
+            supplyMinimum?: "typical" | "maximum" | "measured" | "estimated" | null;
+            /** @enum {string|null} */
+            voltageNoise?: "typical" | "maximum" | "measured" | "estimated" | null;
+            /** @enum {string|null} */
+            voltageNoiseCorner?: "typical" | "maximum" | "measured" | "estimated" | null;
+        };
+        AmplifierOriginsDto: {
+            /** @enum {string} */
+            channels?: "typical" | "maximum" | "measured" | "estimated";
+            /** @enum {string} */
+            currentNoise?: "typical" | "maximum" | "measured" | "estimated";
+            /** @enum {string} */
+            currentNoiseCorner?: "typical" | "maximum" | "measured" | "estimated";
+            /** @enum {string} */
+            gainBandwidth?: "typical" | "maximum" | "measured" | "estimated";
+            /** @enum {string} */
+            inputBiasCurrent?: "typical" | "maximum" | "measured" | "estimated";
+            /** @enum {string} */
+            inputCapacitance?: "typical" | "maximum" | "measured" | "estimated";
+            /** @enum {string} */
+            minimumStableGain?: "typical" | "maximum" | "measured" | "estimated";
+            /** @enum {string} */
+            supplyCurrent?: "typical" | "maximum" | "measured" | "estimated";
+            /** @enum {string} */
+            supplyMaximum?: "typical" | "maximum" | "measured" | "estimated";
+            /** @enum {string} */
+            supplyMinimum?: "typical" | "maximum" | "measured" | "estimated";
+            /** @enum {string} */
+            voltageNoise?: "typical" | "maximum" | "measured" | "estimated";
+            /** @enum {string} */
+            voltageNoiseCorner?: "typical" | "maximum" | "measured" | "estimated";
+        };
         AmplifierResponseDto: {
             /** @description Amplifiers in one package. */
             channels: number;
@@ -284,6 +736,30 @@ export interface components {
             /** @description Frequency at which the 1/f part of the voltage noise equals its white part; 0 = no 1/f noise. In Hz. */
             voltageNoiseCorner: number | null;
         };
+        AuditEntryResponseDto: {
+            /** @enum {string} */
+            action: "offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed";
+            /** Format: date-time */
+            at: string;
+            /** @description null where the account is gone. */
+            by: components["schemas"]["MemberDto"] | null;
+            /** @description What stood before; null = nothing. */
+            from: Record<string, never> | null;
+            id: string;
+            object: components["schemas"]["AuditObjectDto"];
+            /** @description What stands since; null = nothing. */
+            to: Record<string, never> | null;
+        };
+        AuditListDto: {
+            items: components["schemas"]["AuditEntryResponseDto"][];
+            /** @description How many there are in all, whatever the page holds. */
+            total: number;
+        };
+        AuditObjectDto: {
+            id: string;
+            /** @enum {string} */
+            kind: "offer" | "supplier" | "rate" | "price-settings";
+        };
         BandDto: {
             /** @description 0 = brick wall; 1 to 10 = Butterworth low-pass of that order. */
             lowPassOrder?: number;
@@ -291,6 +767,53 @@ export interface components {
             lower: number;
             /** @description Where the band ends; the −3 dB frequency of a low-pass. In Hz. */
             upper: number;
+        };
+        BreakResponseDto: {
+            minimumQuantity: number;
+            /** @description Decimal number with four decimals. */
+            unitPrice: string;
+        };
+        CheaperOrderDto: {
+            orderQuantity: number;
+            total: string;
+        };
+        CheapestDto: {
+            /** @description In dB, its total over the quietest part’s. */
+            aboveQuietest: number;
+            part: components["schemas"]["PartNameDto"];
+            unitPrice: components["schemas"]["PriceDto"];
+        };
+        ColumnMappingDto: {
+            /** @description The column’s place, from 0. */
+            column: number;
+            /** @description Key of a field or parameter. */
+            field: string;
+            /** @enum {string} */
+            form?: "value" | "origin" | "spot" | "peak-to-peak";
+            /** @description At which the noise density is stated. In Hz. */
+            frequency?: number | null;
+            /** @enum {string|null} */
+            origin?: "typical" | "maximum" | "measured" | "estimated" | null;
+            /** @description Of figures whose cells state none. */
+            unit?: string | null;
+        };
+        ColumnProposalDto: {
+            /** @description The column’s place, from 0. */
+            column: number;
+            /** @description From 0 to 1; 1 = the heading is a name that the catalogue knows. */
+            confidence: number;
+            /** @description Key of a field or parameter. */
+            field: string;
+            /** @enum {string} */
+            form?: "value" | "origin" | "spot" | "peak-to-peak";
+            /** @description At which the noise density is stated. In Hz. */
+            frequency?: number | null;
+            /** @enum {string|null} */
+            origin?: "typical" | "maximum" | "measured" | "estimated" | null;
+            /** @description Of figures whose cells state none. */
+            unit?: string | null;
+            /** @description The file names no unit. */
+            unitAssumed: boolean;
         };
         ConditionsListDto: {
             items: components["schemas"]["ConditionsResponseDto"][];
@@ -309,6 +832,9 @@ export interface components {
             updatedBy: components["schemas"]["MemberDto"] | null;
             version: number;
         };
+        ConfirmOffersDto: {
+            ids: string[];
+        };
         ContributionsDto: {
             amplifierCurrentFeedback: number;
             amplifierCurrentSource: number;
@@ -318,6 +844,26 @@ export interface components {
             feedback: number;
             source: number;
         };
+        CreateOfferDto: {
+            breaks: components["schemas"]["PriceBreakDto"][];
+            /** @description ISO 4217 */
+            currency: string;
+            /** @description Days from order to delivery. */
+            leadTimeDays?: number | null;
+            /** @description Pieces that an order must have at least. */
+            minimumOrderQuantity?: number;
+            /** @description Only whole multiples of this many pieces are sold, such as a reel. */
+            orderMultiple?: number;
+            partId: string;
+            /** @description Pieces that the supplier has. */
+            stock?: number | null;
+            supplierId: string;
+            supplierNumber?: string;
+            /** Format: date */
+            validFrom?: string;
+            /** Format: date */
+            validUntil?: string | null;
+        };
         CreateOpAmpDto: {
             amplifier: components["schemas"]["AmplifierDto"];
             /** @enum {string} */
@@ -326,18 +872,71 @@ export interface components {
             /** @enum {string} */
             lifecycle?: "active" | "not-recommended" | "last-time-buy" | "obsolete";
             manufacturer: string;
-            origins?: components["schemas"]["OriginsDto"];
+            origins?: components["schemas"]["AmplifierOriginsDto"];
             package?: string;
             partNumber: string;
         };
+        CreateResistorDto: {
+            /** @enum {string} */
+            approval?: "approved" | "restricted" | "not-approved";
+            description?: string;
+            /** @enum {string} */
+            lifecycle?: "active" | "not-recommended" | "last-time-buy" | "obsolete";
+            manufacturer: string;
+            origins?: components["schemas"]["ResistorOriginsDto"];
+            package?: string;
+            partNumber: string;
+            resistor: components["schemas"]["ResistorDto"];
+        };
+        CreateSupplierDto: {
+            name: string;
+        };
+        DatedRateDto: {
+            /** @description ISO 4217 */
+            currency: string;
+            /**
+             * Format: date
+             * @description From when on it holds.
+             */
+            dated: string;
+            /** @description Decimal number: a unit of the currency in the team’s currency. */
+            rate: string;
+        };
+        DialectDto: {
+            byteOrderMark: boolean;
+            /** @enum {string} */
+            decimalMark: "point" | "comma";
+            /** @enum {string} */
+            delimiter: "comma" | "semicolon" | "tab" | "pipe";
+            /** @enum {string} */
+            encoding: "utf-8" | "utf-16le" | "utf-16be" | "windows-1252";
+            /** @description The line on which the headings stand, from 1. */
+            headerLine: number;
+        };
+        DoubtDto: {
+            /** @enum {string} */
+            code: "below-shot-noise" | "implausibly-quiet" | "factor-of-1000" | "repeated";
+            field: string | null;
+            message: string;
+        };
         /** @enum {string} */
-        ErrorCode: "request.invalid" | "session.missing" | "session.wrong-credentials" | "access.plan" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "part.stale" | "part.duplicate" | "conditions.stale" | "conditions.duplicate" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "request.too-many" | "server.failed" | "database.unavailable";
+        ErrorCode: "request.invalid" | "session.missing" | "session.wrong-credentials" | "access.plan" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "import.not-found" | "part.stale" | "part.duplicate" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "import.state" | "import.outdated" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "database.unavailable";
         EvaluateStageDto: {
             amplifier: components["schemas"]["AmplifierDto"];
             conditions: components["schemas"]["OperatingConditionsDto"];
         };
+        EvaluationsDto: {
+            /** @description Stages that there are. */
+            exhaustive: number;
+            /** @description Stages whose noise was computed. */
+            made: number;
+        };
         ExcludedDto: {
             reasons: components["schemas"]["ExclusionCountDto"][];
+            total: number;
+        };
+        ExcludedResistorsDto: {
+            reasons: components["schemas"]["ResistorExclusionCountDto"][];
             total: number;
         };
         ExclusionCountDto: {
@@ -357,6 +956,14 @@ export interface components {
             /** @description How many there are in all, whatever the page holds. */
             total: number;
         };
+        FieldChangeDto: {
+            /** @description Path of the field, such as amplifier.voltageNoise. */
+            field: string;
+            /** @description In SI units; null = unknown. */
+            new: (string | number) | null;
+            /** @description In SI units; null = unknown. */
+            old: (string | number) | null;
+        };
         FrequencyAxisDto: {
             /** @description Where gain, density and noise figure are stated; inside the band. In Hz. */
             from: number;
@@ -369,6 +976,118 @@ export interface components {
             /** @enum {string} */
             status: "ok";
         };
+        ImportColumnDto: {
+            column: number;
+            heading: string;
+            proposed: components["schemas"]["ColumnProposalDto"] | null;
+            /** @description The first cells under the heading. */
+            samples: string[];
+        };
+        ImportListDto: {
+            items: components["schemas"]["ImportSummaryDto"][];
+            /** @description How many there are in all, whatever the page holds. */
+            total: number;
+        };
+        ImportProgressDto: {
+            done: number;
+            /** @description Null = too early to tell. */
+            rowsPerSecond: number | null;
+            secondsLeft: number | null;
+            total: number;
+        };
+        ImportResponseDto: {
+            /** Format: date-time */
+            appliedAt: string | null;
+            appliedBy: components["schemas"]["MemberDto"] | null;
+            columns: components["schemas"]["ImportColumnDto"][];
+            /** @description Null = the rows aren’t checked. */
+            counts: components["schemas"]["RowCountsDto"] | null;
+            /** Format: date-time */
+            createdAt: string;
+            createdBy: components["schemas"]["MemberDto"] | null;
+            dialect: components["schemas"]["DialectDto"];
+            /** @description Why the last work ended without a result. */
+            failure: string | null;
+            fileName: string;
+            /** @description Bytes */
+            fileSize: number;
+            id: string;
+            /** @description Rows that an undoing left, for they were edited since. */
+            keptCount: number;
+            /** @enum {string} */
+            kind: "op-amps" | "resistors";
+            /** @description Null = not said yet. */
+            mapping: components["schemas"]["ColumnMappingDto"][] | null;
+            /** @description Null = nobody is at work on it. */
+            progress: components["schemas"]["ImportProgressDto"] | null;
+            /** @description What the team said of a list with the same headings the last time. */
+            rememberedMapping: components["schemas"]["ColumnMappingDto"][] | null;
+            rowCount: number;
+            /** @description The very same file was uploaded before. */
+            sameFile: components["schemas"]["SameFileDto"] | null;
+            /** @enum {string} */
+            state: "uploaded" | "checking" | "checked" | "waiting" | "applying" | "applied" | "undoing" | "undone" | "cancelled" | "interrupted" | "outdated" | "failed";
+            /** Format: date-time */
+            undoneAt: string | null;
+            undoneBy: components["schemas"]["MemberDto"] | null;
+        };
+        ImportRowDto: {
+            changes: components["schemas"]["FieldChangeDto"][];
+            doubts: components["schemas"]["DoubtDto"][];
+            errors: components["schemas"]["RowErrorDto"][];
+            /** @description An undoing left the part, for it was edited since. */
+            kept: boolean;
+            /** @description The line of the file on which the row begins. */
+            line: number;
+            manufacturer: string;
+            partNumber: string;
+            /** @enum {string} */
+            state: "new" | "changed" | "unchanged" | "doubtful" | "refused";
+        };
+        ImportRowListDto: {
+            items: components["schemas"]["ImportRowDto"][];
+            /** @description How many there are in all, whatever the page holds. */
+            total: number;
+        };
+        ImportSummaryDto: {
+            /** Format: date-time */
+            appliedAt: string | null;
+            appliedBy: components["schemas"]["MemberDto"] | null;
+            /** @description Null = the rows aren’t checked. */
+            counts: components["schemas"]["RowCountsDto"] | null;
+            /** Format: date-time */
+            createdAt: string;
+            createdBy: components["schemas"]["MemberDto"] | null;
+            /** @description Why the last work ended without a result. */
+            failure: string | null;
+            fileName: string;
+            /** @description Bytes */
+            fileSize: number;
+            id: string;
+            /** @description Rows that an undoing left, for they were edited since. */
+            keptCount: number;
+            /** @enum {string} */
+            kind: "op-amps" | "resistors";
+            /** @description Null = nobody is at work on it. */
+            progress: components["schemas"]["ImportProgressDto"] | null;
+            rowCount: number;
+            /** @enum {string} */
+            state: "uploaded" | "checking" | "checked" | "waiting" | "applying" | "applied" | "undoing" | "undone" | "cancelled" | "interrupted" | "outdated" | "failed";
+            /** Format: date-time */
+            undoneAt: string | null;
+            undoneBy: components["schemas"]["MemberDto"] | null;
+        };
+        MapImportDto: {
+            columns?: components["schemas"]["ColumnMappingDto"][];
+            /** @enum {string} */
+            decimalMark?: "point" | "comma";
+            /** @enum {string} */
+            delimiter?: "comma" | "semicolon" | "tab" | "pipe";
+            /** @enum {string} */
+            encoding?: "utf-8" | "utf-16le" | "utf-16be" | "windows-1252";
+            /** @description The line on which the headings stand, from 1. */
+            headerLine?: number;
+        };
         MemberDto: {
             id: string;
             name: string;
@@ -376,6 +1095,79 @@ export interface components {
         NetworkDto: {
             /** @description The least feedback network that the output can drive; a lower one is marked. In Ω. */
             minimumTotal: number;
+        };
+        NetworkLimitsDto: {
+            /** @description The largest feedback network that noise and leakage allow. In Ω. */
+            maximumTotal?: number;
+            /** @description The least feedback network that the output can drive; a lower one is marked. In Ω. */
+            minimumTotal?: number;
+        };
+        NetworkPartDto: {
+            /** @enum {string} */
+            approval: "approved" | "restricted" | "not-approved";
+            id: string;
+            /** @enum {string} */
+            library: "curated" | "team";
+            /** @enum {string} */
+            lifecycle: "active" | "not-recommended" | "last-time-buy" | "obsolete";
+            manufacturer: string;
+            package: string;
+            partNumber: string;
+            /** @description In Ω. */
+            resistance: number;
+        };
+        OfferListDto: {
+            items: components["schemas"]["OfferResponseDto"][];
+            /** @description How many there are in all, whatever the page holds. */
+            total: number;
+        };
+        OfferResponseDto: {
+            /** @description In ascending order of quantity. */
+            breaks: components["schemas"]["BreakResponseDto"][];
+            /**
+             * Format: date-time
+             * @description When other terms took their place, or none; null = they stand.
+             */
+            closedAt: string | null;
+            /** Format: date-time */
+            confirmedAt: string;
+            confirmedBy: components["schemas"]["MemberDto"] | null;
+            /** @description ISO 4217 */
+            currency: string;
+            id: string;
+            /** @description null = unknown */
+            leadTimeDays: number | null;
+            minimumOrderQuantity: number;
+            /**
+             * Format: date-time
+             * @description Since when these terms stand.
+             */
+            openedAt: string;
+            orderMultiple: number;
+            part: components["schemas"]["OfferedPartDto"];
+            /** @description What calls for a look at it. */
+            states: ("stale" | "expiring" | "expired")[];
+            /** @description null = unknown */
+            stock: number | null;
+            supplier: components["schemas"]["SupplierResponseDto"];
+            supplierNumber: string;
+            /** Format: date */
+            validFrom: string;
+            /**
+             * Format: date
+             * @description null = until further notice
+             */
+            validUntil: string | null;
+            version: number;
+        };
+        OfferedPartDto: {
+            id: string;
+            /** @enum {string} */
+            kind: "op-amp" | "resistor";
+            /** @enum {string} */
+            library: "curated" | "team";
+            manufacturer: string;
+            partNumber: string;
         };
         OpAmpListDto: {
             items: components["schemas"]["OpAmpResponseDto"][];
@@ -393,7 +1185,7 @@ export interface components {
             /** @enum {string} */
             lifecycle: "active" | "not-recommended" | "last-time-buy" | "obsolete";
             manufacturer: string;
-            origins: components["schemas"]["OriginsDto"];
+            origins: components["schemas"]["AmplifierOriginsDto"];
             package: string;
             partNumber: string;
             /** Format: date-time */
@@ -412,58 +1204,6 @@ export interface components {
             referenceFrequency?: number;
             source: components["schemas"]["SourceDto"];
             stage: components["schemas"]["StageDto"];
-        };
-        OriginsChangeDto: {
-            /** @enum {string|null} */
-            channels?: "typical" | "maximum" | "measured" | "estimated" | null;
-            /** @enum {string|null} */
-            currentNoise?: "typical" | "maximum" | "measured" | "estimated" | null;
-            /** @enum {string|null} */
-            currentNoiseCorner?: "typical" | "maximum" | "measured" | "estimated" | null;
-            /** @enum {string|null} */
-            gainBandwidth?: "typical" | "maximum" | "measured" | "estimated" | null;
-            /** @enum {string|null} */
-            inputBiasCurrent?: "typical" | "maximum" | "measured" | "estimated" | null;
-            /** @enum {string|null} */
-            inputCapacitance?: "typical" | "maximum" | "measured" | "estimated" | null;
-            /** @enum {string|null} */
-            minimumStableGain?: "typical" | "maximum" | "measured" | "estimated" | null;
-            /** @enum {string|null} */
-            supplyCurrent?: "typical" | "maximum" | "measured" | "estimated" | null;
-            /** @enum {string|null} */
-            supplyMaximum?: "typical" | "maximum" | "measured" | "estimated" | null;
-            /** @enum {string|null} */
-            supplyMinimum?: "typical" | "maximum" | "measured" | "estimated" | null;
-            /** @enum {string|null} */
-            voltageNoise?: "typical" | "maximum" | "measured" | "estimated" | null;
-            /** @enum {string|null} */
-            voltageNoiseCorner?: "typical" | "maximum" | "measured" | "estimated" | null;
-        };
-        OriginsDto: {
-            /** @enum {string} */
-            channels?: "typical" | "maximum" | "measured" | "estimated";
-            /** @enum {string} */
-            currentNoise?: "typical" | "maximum" | "measured" | "estimated";
-            /** @enum {string} */
-            currentNoiseCorner?: "typical" | "maximum" | "measured" | "estimated";
-            /** @enum {string} */
-            gainBandwidth?: "typical" | "maximum" | "measured" | "estimated";
-            /** @enum {string} */
-            inputBiasCurrent?: "typical" | "maximum" | "measured" | "estimated";
-            /** @enum {string} */
-            inputCapacitance?: "typical" | "maximum" | "measured" | "estimated";
-            /** @enum {string} */
-            minimumStableGain?: "typical" | "maximum" | "measured" | "estimated";
-            /** @enum {string} */
-            supplyCurrent?: "typical" | "maximum" | "measured" | "estimated";
-            /** @enum {string} */
-            supplyMaximum?: "typical" | "maximum" | "measured" | "estimated";
-            /** @enum {string} */
-            supplyMinimum?: "typical" | "maximum" | "measured" | "estimated";
-            /** @enum {string} */
-            voltageNoise?: "typical" | "maximum" | "measured" | "estimated";
-            /** @enum {string} */
-            voltageNoiseCorner?: "typical" | "maximum" | "measured" | "estimated";
         };
         PartFilterDto: {
             approval?: ("approved" | "restricted" | "not-approved")[];
@@ -488,12 +1228,97 @@ export interface components {
             package: string;
             partNumber: string;
         };
+        PartOffersDto: {
+            /** @description The offers that stand. */
+            current: components["schemas"]["OfferResponseDto"][];
+            /** @description The closed ones, the latest first. */
+            history: components["schemas"]["OfferResponseDto"][];
+        };
+        PriceBreakDto: {
+            /** @description Pieces from which on the unit price holds. */
+            minimumQuantity: number;
+            /** @description Decimal number above 0 with a full stop, up to four decimals. */
+            unitPrice: string;
+        };
         PriceDto: {
-            /** @description Decimal number. */
+            /** @description Decimal number: the total over the pieces that are needed, so that it holds what MOQ and order multiple add. */
             amount: string;
+            /** @description More pieces that cost less in all. */
+            cheaperOrder: components["schemas"]["CheaperOrderDto"] | null;
+            /** @description The team’s currency (ISO 4217). */
+            currency: string;
+            /** @description Nobody has confirmed it for longer than the team allows. */
+            isStale: boolean;
+            /** @description null = unknown */
+            leadTimeDays: number | null;
+            /** @description From how many pieces on the price break holds. */
+            minimumQuantity: number;
+            /** @description Pieces that have to be bought. */
+            orderQuantity: number;
+            /** @description null = unknown */
+            stock: number | null;
+            supplier: string;
+            /** @description Decimal number: what these pieces cost. */
+            total: string;
+        };
+        PriceHistoryDto: {
+            /** @description The team’s currency (ISO 4217). */
+            currency: string;
+            /** @description Each price from when to when, the earliest first. */
+            items: components["schemas"]["PriceStepDto"][];
+            quantity: number;
+        };
+        PriceListDto: {
+            items: components["schemas"]["PriceRowResponseDto"][];
+            /** @description How many there are in all, whatever the page holds. */
+            total: number;
+        };
+        PriceRowDto: {
+            breaks?: components["schemas"]["PriceBreakDto"][];
+            /** @description ISO 4217 */
+            currency?: string;
+            id?: string;
+            /** @description Days from order to delivery. */
+            leadTimeDays?: number | null;
+            /** @description Pieces that an order must have at least. */
+            minimumOrderQuantity?: number;
+            /** @description Only whole multiples of this many pieces are sold, such as a reel. */
+            orderMultiple?: number;
+            partId?: string;
+            /** @description Pieces that the supplier has. */
+            stock?: number | null;
+            supplierId?: string;
+            supplierNumber?: string;
+            /** Format: date */
+            validFrom?: string;
+            /** Format: date */
+            validUntil?: string | null;
+            /** @description The version that was last read. */
+            version?: number;
+        };
+        PriceRowResponseDto: {
+            /** @description null where the part has no offer. */
+            offer: components["schemas"]["OfferResponseDto"] | null;
+            part: components["schemas"]["OfferedPartDto"];
+        };
+        PriceSettingsDto: {
             /** @description ISO 4217 */
             currency: string;
-            minimumQuantity: number;
+            /** @description Days after the last confirmation from which on a price counts as stale. */
+            staleAfterDays: number;
+        };
+        PriceStepDto: {
+            /** Format: date-time */
+            from: string;
+            offerId: string;
+            supplier: components["schemas"]["SupplierResponseDto"];
+            /** @description In the team’s currency at the rates of today; null where its currency has no rate. */
+            unitPrice: string | null;
+            /**
+             * Format: date-time
+             * @description null = until now
+             */
+            until: string | null;
         };
         Problem: {
             code: components["schemas"]["ErrorCode"];
@@ -545,14 +1370,43 @@ export interface components {
             offset?: number;
             /** @description Pieces to buy. */
             quantity?: number;
-            /** @description One of inputNoiseRms, inputNoiseDensity, outputNoiseRms, noiseFigure, aboveFloor, closedLoopBandwidth; a leading minus = descending. */
+            /** @description One of inputNoiseRms, inputNoiseDensity, outputNoiseRms, noiseFigure, aboveFloor, closedLoopBandwidth, unitPrice; a leading minus = descending. */
             sort?: string;
             target?: components["schemas"]["RankingTargetDto"];
+        };
+        RankResistorsDto: {
+            conditions: components["schemas"]["ResistorConditionsDto"];
+            filter?: components["schemas"]["ResistorFilterDto"];
+            /** @description How many items the answer holds at most. */
+            limit?: number;
+            /** @description How many items come before the first one of the answer. */
+            offset?: number;
+            /** @description Pieces to buy. */
+            quantity?: number;
+            /** @description One of totalRms, aboveThermal, dissipation, resistance, tolerance, unitPrice; a leading minus = descending. */
+            sort?: string;
+        };
+        RankStagesDto: {
+            conditions: components["schemas"]["SoughtConditionsDto"];
+            filter?: components["schemas"]["PartFilterDto"];
+            /** @description How many items the answer holds at most. */
+            limit?: number;
+            /** @description How many items come before the first one of the answer. */
+            offset?: number;
+            resistorFilter?: components["schemas"]["ResistorFilterDto"];
+        };
+        RankedNetworkDto: {
+            /** @description null in a follower. */
+            feedbackResistor: components["schemas"]["NetworkPartDto"] | null;
+            /** @description As the two values give it; V/V, or V/A in a transimpedance stage. */
+            gain: number;
+            /** @description null where the stage has none. */
+            gainResistor: components["schemas"]["NetworkPartDto"] | null;
         };
         RankedOpAmpDto: {
             /** @description dB, over the band; null where the source makes no noise. */
             aboveFloor: number | null;
-            cautions: ("current-noise-unknown" | "corner-unknown" | "bandwidth-unknown" | "capacitance-unknown" | "estimated-at-temperature" | "feedback-network-loads-output" | "stability-unknown" | "supply-unknown")[];
+            cautions: ("current-noise-unknown" | "corner-unknown" | "bandwidth-unknown" | "capacitance-unknown" | "estimated-at-temperature" | "feedback-network-loads-output" | "stability-unknown" | "supply-unknown" | "several-packages")[];
             /** @description Hz; null where the GBW is unknown. */
             closedLoopBandwidth: number | null;
             contributions: components["schemas"]["ContributionsDto"];
@@ -587,11 +1441,71 @@ export interface components {
             /** @enum {string} */
             lifecycle: "active" | "not-recommended" | "last-time-buy" | "obsolete";
             manufacturer: string;
-            origins: components["schemas"]["OriginsDto"];
+            origins: components["schemas"]["AmplifierOriginsDto"];
             package: string;
             partNumber: string;
         };
+        RankedResistorDto: {
+            /** @description The total above the thermal noise, in dB. */
+            aboveThermal: number;
+            cautions: ("noise-index-unknown" | "rating-unknown" | "near-rating" | "self-heating-unknown")[];
+            /** @description In W. */
+            dissipation: number;
+            /** @description In V over the band; null where the noise index is unknown. */
+            excessRms: number | null;
+            part: components["schemas"]["RankedResistorPartDto"];
+            rank: number;
+            /** @description Of the resistor itself, in K. */
+            temperature: number;
+            /** @description In V over the band, at the resistor’s own temperature. */
+            thermalRms: number;
+            /** @description In V over the band; without the excess noise where that is unknown. */
+            totalRms: number;
+            /** @description null where the team has no price. */
+            unitPrice: components["schemas"]["PriceDto"] | null;
+        };
+        RankedResistorPartDto: {
+            /** @enum {string} */
+            approval: "approved" | "restricted" | "not-approved";
+            id: string;
+            /** @enum {string} */
+            library: "curated" | "team";
+            /** @enum {string} */
+            lifecycle: "active" | "not-recommended" | "last-time-buy" | "obsolete";
+            manufacturer: string;
+            origins: components["schemas"]["ResistorOriginsDto"];
+            package: string;
+            partNumber: string;
+            resistor: components["schemas"]["ResistorParametersDto"];
+        };
+        RankedStageDto: {
+            /** @description dB, over the band; null where the source makes no noise. */
+            aboveFloor: number | null;
+            cautions: ("current-noise-unknown" | "corner-unknown" | "bandwidth-unknown" | "capacitance-unknown" | "estimated-at-temperature" | "feedback-network-loads-output" | "stability-unknown" | "supply-unknown" | "several-packages")[];
+            /** @description Identical channels of the package in parallel. */
+            channelsInParallel: number;
+            /** @description Hz; null where the GBW is unknown. */
+            closedLoopBandwidth: number | null;
+            contributions: components["schemas"]["ContributionsDto"];
+            /** @enum {string} */
+            dominant: "source" | "amplifierVoltage" | "amplifierCurrentSource" | "amplifierCurrentFeedback" | "feedback" | "bias" | "excess";
+            /** @description V/√Hz (A/√Hz in a transimpedance stage), at the reference frequency. */
+            inputNoiseDensity: number;
+            /** @description V (A in a transimpedance stage), over the band. */
+            inputNoiseRms: number;
+            network: components["schemas"]["RankedNetworkDto"];
+            /** @description dB, at the reference frequency; null where the source makes no noise. */
+            noiseFigure: number | null;
+            /** @description V, over the band. */
+            outputNoiseRms: number;
+            part: components["schemas"]["RankedPartDto"];
+            rank: number;
+            /** @description V/V (V/A in a transimpedance stage), at the reference frequency. */
+            signalGain: number;
+        };
         RankingResponseDto: {
+            /** @description The cheapest part of the quiet set; null where none of it has a price. */
+            cheapest: components["schemas"]["CheapestDto"] | null;
             excluded: components["schemas"]["ExcludedDto"];
             floor: components["schemas"]["SourceFloorDto"];
             items: components["schemas"]["RankedOpAmpDto"][];
@@ -605,6 +1519,20 @@ export interface components {
             /** @description Total noise referred to the source that must not be passed. In V. */
             inputNoiseRms?: number;
         };
+        RateDto: {
+            /** @description ISO 4217 */
+            currency: string;
+            /** @description A unit of the currency in the team’s currency, up to eight decimals. */
+            rate: string;
+        };
+        RatesResponseDto: {
+            /** @description The team’s currency (ISO 4217). */
+            currency: string;
+            /** @description The rates that hold today. */
+            items: components["schemas"]["DatedRateDto"][];
+            /** @description Currencies of offers that don’t count for want of a rate. */
+            missing: string[];
+        };
         ResistanceAxisDto: {
             /** @description Resistance in series with the source’s voltage, or across its current in a transimpedance stage. In Ω. */
             from: number;
@@ -613,6 +1541,171 @@ export interface components {
             /** @description Resistance in series with the source’s voltage, or across its current in a transimpedance stage. In Ω. */
             to: number;
         };
+        ResistorChangeDto: {
+            /** @description Excess noise under a direct voltage: 0 dB = 1 µV rms per volt in one decade of frequency. In dB. */
+            noiseIndex?: number | null;
+            /** @description Continuous dissipation that the part stands at the data sheet’s temperature. In W. */
+            powerRating?: number | null;
+            /** @description Nominal value. In Ω. */
+            resistance?: number;
+            /** @enum {string|null} */
+            technology?: "metal-foil" | "thin-film" | "metal-film" | "wirewound" | "thick-film" | "carbon-film" | "carbon-composition" | null;
+            /** @description Relative change of the value per kelvin; where only ± is stated, its magnitude. In 1/K. */
+            temperatureCoefficient?: number | null;
+            /** @description How much warmer than its surroundings the part is at its power rating. In K. */
+            temperatureRise?: number | null;
+            /** @description How far a new part may lie from its nominal value. */
+            tolerance?: number | null;
+        };
+        ResistorConditionsDto: {
+            /** @description Temperature around the resistor. In K. */
+            ambientTemperature?: number;
+            band: components["schemas"]["BandDto"];
+            /** @description Direct voltage across the resistor: it makes excess noise and heat; 0 = none. In V. */
+            dcVoltage?: number;
+            /** @description The value that the place asks for. In Ω. */
+            resistance: number;
+            /** @description How far a part’s nominal value may lie from the value asked for. */
+            resistanceTolerance?: number;
+        };
+        ResistorDto: {
+            /** @description Excess noise under a direct voltage: 0 dB = 1 µV rms per volt in one decade of frequency. In dB. */
+            noiseIndex?: number | null;
+            /** @description Continuous dissipation that the part stands at the data sheet’s temperature. In W. */
+            powerRating?: number | null;
+            /** @description Nominal value. In Ω. */
+            resistance: number;
+            /** @enum {string|null} */
+            technology?: "metal-foil" | "thin-film" | "metal-film" | "wirewound" | "thick-film" | "carbon-film" | "carbon-composition" | null;
+            /** @description Relative change of the value per kelvin; where only ± is stated, its magnitude. In 1/K. */
+            temperatureCoefficient?: number | null;
+            /** @description How much warmer than its surroundings the part is at its power rating. In K. */
+            temperatureRise?: number | null;
+            /** @description How far a new part may lie from its nominal value. */
+            tolerance?: number | null;
+        };
+        ResistorExclusionCountDto: {
+            count: number;
+            /** @enum {string} */
+            reason: "lifecycle" | "approval" | "technology" | "package" | "over-rating";
+        };
+        ResistorExclusionDto: {
+            /** @description The reason in plain words, with its figures. */
+            detail: string;
+            part: components["schemas"]["PartNameDto"];
+            /** @enum {string} */
+            reason: "lifecycle" | "approval" | "technology" | "package" | "over-rating";
+        };
+        ResistorExclusionListDto: {
+            items: components["schemas"]["ResistorExclusionDto"][];
+            /** @description How many there are in all, whatever the page holds. */
+            total: number;
+        };
+        ResistorFilterDto: {
+            approval?: ("approved" | "restricted" | "not-approved")[];
+            library?: ("curated" | "team")[];
+            lifecycle?: ("active" | "not-recommended" | "last-time-buy" | "obsolete")[];
+            package?: string;
+            search?: string;
+            technology?: ("metal-foil" | "thin-film" | "metal-film" | "wirewound" | "thick-film" | "carbon-film" | "carbon-composition")[];
+        };
+        ResistorListDto: {
+            items: components["schemas"]["ResistorResponseDto"][];
+            /** @description How many there are in all, whatever the page holds. */
+            total: number;
+        };
+        ResistorOriginsChangeDto: {
+            /** @enum {string|null} */
+            noiseIndex?: "typical" | "maximum" | "measured" | "estimated" | null;
+            /** @enum {string|null} */
+            powerRating?: "typical" | "maximum" | "measured" | "estimated" | null;
+            /** @enum {string|null} */
+            resistance?: "typical" | "maximum" | "measured" | "estimated" | null;
+            /** @enum {string|null} */
+            temperatureCoefficient?: "typical" | "maximum" | "measured" | "estimated" | null;
+            /** @enum {string|null} */
+            temperatureRise?: "typical" | "maximum" | "measured" | "estimated" | null;
+            /** @enum {string|null} */
+            tolerance?: "typical" | "maximum" | "measured" | "estimated" | null;
+        };
+        ResistorOriginsDto: {
+            /** @enum {string} */
+            noiseIndex?: "typical" | "maximum" | "measured" | "estimated";
+            /** @enum {string} */
+            powerRating?: "typical" | "maximum" | "measured" | "estimated";
+            /** @enum {string} */
+            resistance?: "typical" | "maximum" | "measured" | "estimated";
+            /** @enum {string} */
+            temperatureCoefficient?: "typical" | "maximum" | "measured" | "estimated";
+            /** @enum {string} */
+            temperatureRise?: "typical" | "maximum" | "measured" | "estimated";
+            /** @enum {string} */
+            tolerance?: "typical" | "maximum" | "measured" | "estimated";
+        };
+        ResistorParametersDto: {
+            /** @description Excess noise under a direct voltage: 0 dB = 1 µV rms per volt in one decade of frequency. In dB. */
+            noiseIndex: number | null;
+            /** @description Continuous dissipation that the part stands at the data sheet’s temperature. In W. */
+            powerRating: number | null;
+            /** @description Nominal value. In Ω. */
+            resistance: number;
+            /** @enum {string|null} */
+            technology: "metal-foil" | "thin-film" | "metal-film" | "wirewound" | "thick-film" | "carbon-film" | "carbon-composition" | null;
+            /** @description Relative change of the value per kelvin; where only ± is stated, its magnitude. In 1/K. */
+            temperatureCoefficient: number | null;
+            /** @description How much warmer than its surroundings the part is at its power rating. In K. */
+            temperatureRise: number | null;
+            /** @description How far a new part may lie from its nominal value. */
+            tolerance: number | null;
+        };
+        ResistorRankingDto: {
+            excluded: components["schemas"]["ExcludedResistorsDto"];
+            items: components["schemas"]["RankedResistorDto"][];
+            /** @description Changes whenever a part that could be ranked changes. */
+            libraryRevision: string;
+            /** @description How many resistors are ranked. */
+            total: number;
+        };
+        ResistorResponseDto: {
+            /** @enum {string} */
+            approval: "approved" | "restricted" | "not-approved";
+            description: string;
+            id: string;
+            /** @enum {string} */
+            library: "curated" | "team";
+            /** @enum {string} */
+            lifecycle: "active" | "not-recommended" | "last-time-buy" | "obsolete";
+            manufacturer: string;
+            origins: components["schemas"]["ResistorOriginsDto"];
+            package: string;
+            partNumber: string;
+            resistor: components["schemas"]["ResistorParametersDto"];
+            /** Format: date-time */
+            updatedAt: string;
+            version: number;
+        };
+        RowCountsDto: {
+            changed: number;
+            /** @description Accepted, with a caution. */
+            doubtful: number;
+            new: number;
+            refused: number;
+            unchanged: number;
+        };
+        RowErrorDto: {
+            /** @description The column’s heading; null = the list has none. */
+            column: string | null;
+            expected: string;
+            value: string;
+            why: string;
+        };
+        SameFileDto: {
+            /** Format: date-time */
+            createdAt: string;
+            id: string;
+            /** @enum {string} */
+            state: "uploaded" | "checking" | "checked" | "waiting" | "applying" | "applied" | "undoing" | "undone" | "cancelled" | "interrupted" | "outdated" | "failed";
+        };
         SaveConditionsDto: {
             conditions: components["schemas"]["OperatingConditionsDto"];
             filter?: components["schemas"]["PartFilterDto"];
@@ -620,6 +1713,14 @@ export interface components {
             /** @description Pieces to buy. */
             quantity?: number;
             target?: components["schemas"]["RankingTargetDto"];
+        };
+        SavePricesDto: {
+            rows: components["schemas"]["PriceRowDto"][];
+        };
+        SaveRatesDto: {
+            /** Format: date */
+            dated?: string;
+            rates: components["schemas"]["RateDto"][];
         };
         SessionResponseDto: {
             /** @enum {string} */
@@ -640,6 +1741,42 @@ export interface components {
         SignInDto: {
             email: string;
             password: string;
+        };
+        SoughtConditionsDto: {
+            /** @description Temperature of amplifier and resistors. In K. */
+            ambientTemperature?: number;
+            /** @enum {string} */
+            amplifierTemperatureModel?: "estimated" | "none";
+            band: components["schemas"]["BandDto"];
+            /** @description Closed-loop bandwidth over the upper band limit that a part needs; 0 excludes none. */
+            bandwidthMargin?: number;
+            /** @description Where gain, density and noise figure are stated; inside the band. In Hz. */
+            referenceFrequency?: number;
+            source: components["schemas"]["SourceDto"];
+            stage: components["schemas"]["SoughtStageDto"];
+        };
+        SoughtStageDto: {
+            /** @description From the + input to ground in an inverting stage; 0 = none. In Ω. */
+            biasResistance?: number;
+            /** @description Each of the four equal resistors behind the input pair of an instrumentation stage; left out = 10 kΩ. In Ω. */
+            differenceResistance?: number;
+            /** @description Across the feedback resistor; “auto” = maximally flat for each amplifier. In F. */
+            feedbackCapacitance?: number | "auto";
+            /** @description Gain of a transimpedance stage in V/A. In Ω. */
+            feedbackResistance?: number;
+            /** @description Magnitude of the signal gain. */
+            gain?: number;
+            /** @description How far the gain of two library values may lie from the wanted one. */
+            gainTolerance?: number;
+            /** @description From the + input to ground: damping, termination or bias return; left out = none. In Ω. */
+            loadResistance?: number;
+            network?: components["schemas"]["NetworkLimitsDto"];
+            /** @description It drives a direct current through the network, and so its excess noise. In V. */
+            outputVoltage?: number;
+            /** @description Identical channels of one package that may work in parallel. */
+            parallelMaximum?: number;
+            /** @enum {string} */
+            topology: "non-inverting" | "inverting" | "transimpedance" | "difference" | "instrumentation";
         };
         SourceDto: {
             /** @description Capacitance across the source, with that of its cable; 0 = none. In F. */
@@ -662,24 +1799,26 @@ export interface components {
         StageDto: {
             /** @description From the + input to ground in an inverting stage; 0 = none. In Ω. */
             biasResistance?: number;
+            /** @description Each of the four equal resistors behind the input pair of an instrumentation stage; left out = 10 kΩ. In Ω. */
+            differenceResistance?: number;
             /** @description Across the feedback resistor; “auto” = maximally flat for each amplifier. In F. */
             feedbackCapacitance?: number | "auto";
             /** @description Gain of a transimpedance stage in V/A. In Ω. */
             feedbackResistance?: number;
             /** @description Magnitude of the signal gain. */
             gain?: number;
-            /** @description From the − input to ground, or to the source in an inverting stage. In Ω. */
+            /** @description From the − input to ground, to the source in an inverting and in each leg of a difference stage, or between the − inputs of an instrumentation stage. In Ω. */
             gainResistance?: number;
             /** @description From the + input to ground: damping, termination or bias return; left out = none. In Ω. */
             loadResistance?: number;
             network?: components["schemas"]["NetworkDto"];
             /** @enum {string} */
-            topology: "non-inverting" | "inverting" | "transimpedance";
+            topology: "non-inverting" | "inverting" | "transimpedance" | "difference" | "instrumentation";
         };
         StageFiguresDto: {
             /** @description dB, over the band; null where the source makes no noise. */
             aboveFloor: number | null;
-            cautions: ("current-noise-unknown" | "corner-unknown" | "bandwidth-unknown" | "capacitance-unknown" | "estimated-at-temperature" | "feedback-network-loads-output" | "stability-unknown" | "supply-unknown")[];
+            cautions: ("current-noise-unknown" | "corner-unknown" | "bandwidth-unknown" | "capacitance-unknown" | "estimated-at-temperature" | "feedback-network-loads-output" | "stability-unknown" | "supply-unknown" | "several-packages")[];
             /** @description Hz; null where the GBW is unknown. */
             closedLoopBandwidth: number | null;
             contributions: components["schemas"]["ContributionsDto"];
@@ -695,6 +1834,29 @@ export interface components {
             outputNoiseRms: number;
             /** @description V/V (V/A in a transimpedance stage), at the reference frequency. */
             signalGain: number;
+        };
+        StageRankingDto: {
+            evaluations: components["schemas"]["EvaluationsDto"];
+            excluded: components["schemas"]["ExcludedDto"];
+            floor: components["schemas"]["SourceFloorDto"];
+            items: components["schemas"]["RankedStageDto"][];
+            /** @description Changes whenever a part that could be ranked changes. */
+            libraryRevision: string;
+            /** @description The nearest gain that the library can give within the network’s limits; null = none. */
+            nearestGain: number | null;
+            /** @description How many pairs of resistors give the gain. */
+            pairs: number;
+            /** @description How many op-amps are ranked, each with its quietest network. */
+            total: number;
+        };
+        SupplierListDto: {
+            items: components["schemas"]["SupplierResponseDto"][];
+            /** @description How many there are in all, whatever the page holds. */
+            total: number;
+        };
+        SupplierResponseDto: {
+            id: string;
+            name: string;
         };
         SupplyDto: {
             /** @description Highest total supply voltage, rail to rail. In V. */
@@ -712,6 +1874,26 @@ export interface components {
             /** @description The version that was last read. */
             version: number;
         };
+        UpdateOfferDto: {
+            breaks?: components["schemas"]["PriceBreakDto"][];
+            /** @description ISO 4217 */
+            currency?: string;
+            /** @description Days from order to delivery. */
+            leadTimeDays?: number | null;
+            /** @description Pieces that an order must have at least. */
+            minimumOrderQuantity?: number;
+            /** @description Only whole multiples of this many pieces are sold, such as a reel. */
+            orderMultiple?: number;
+            /** @description Pieces that the supplier has. */
+            stock?: number | null;
+            supplierNumber?: string;
+            /** Format: date */
+            validFrom?: string;
+            /** Format: date */
+            validUntil?: string | null;
+            /** @description The version that was last read. */
+            version: number;
+        };
         UpdateOpAmpDto: {
             amplifier?: components["schemas"]["AmplifierChangeDto"];
             /** @enum {string} */
@@ -720,11 +1902,34 @@ export interface components {
             /** @enum {string} */
             lifecycle?: "active" | "not-recommended" | "last-time-buy" | "obsolete";
             manufacturer?: string;
-            origins?: components["schemas"]["OriginsChangeDto"];
+            origins?: components["schemas"]["AmplifierOriginsChangeDto"];
             package?: string;
             partNumber?: string;
             /** @description The version that was last read. */
             version: number;
+        };
+        UpdateResistorDto: {
+            /** @enum {string} */
+            approval?: "approved" | "restricted" | "not-approved";
+            description?: string;
+            /** @enum {string} */
+            lifecycle?: "active" | "not-recommended" | "last-time-buy" | "obsolete";
+            manufacturer?: string;
+            origins?: components["schemas"]["ResistorOriginsChangeDto"];
+            package?: string;
+            partNumber?: string;
+            resistor?: components["schemas"]["ResistorChangeDto"];
+            /** @description The version that was last read. */
+            version: number;
+        };
+        UploadFormDto: {
+            /**
+             * Format: binary
+             * @description The list, up to 100 MB and 500 000 rows.
+             */
+            file: string;
+            /** @enum {string} */
+            kind: "op-amps" | "resistors";
         };
     };
     responses: never;
@@ -735,6 +1940,43 @@ export interface components {
 }
 export type $defs = Record<string, never>;
 export interface operations {
+    listAuditEntries: {
+        parameters: {
+            query?: {
+                limit?: number;
+                offset?: number;
+                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed")[];
+                objectKind?: "offer" | "supplier" | "rate" | "price-settings";
+                objectId?: string;
+                userId?: string;
+                from?: string;
+                to?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["AuditListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
     getSession: {
         parameters: {
             query?: never;
@@ -1010,6 +2252,293 @@ export interface operations {
             };
         };
     };
+    listImports: {
+        parameters: {
+            query?: {
+                limit?: number;
+                offset?: number;
+                /** @description A leading minus = descending. */
+                sort?: string;
+                search?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ImportListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    uploadImport: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "multipart/form-data": components["schemas"]["UploadFormDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ImportResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    getImport: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ImportResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    applyImport: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            202: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ImportResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    cancelImport: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            202: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ImportResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    mapImport: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["MapImportDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ImportResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    getRefusedRows: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "text/csv": string;
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    listImportRows: {
+        parameters: {
+            query?: {
+                limit?: number;
+                offset?: number;
+                /** @description A leading minus = descending. */
+                sort?: string;
+                search?: string;
+                state?: "new" | "changed" | "unchanged" | "doubtful" | "refused" | "kept";
+            };
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ImportRowListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    undoImport: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            202: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ImportResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
     evaluateStageNoise: {
         parameters: {
             query?: never;
@@ -1029,6 +2558,167 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["StageFiguresDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    createOffer: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateOfferDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OfferResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    confirmOffers: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ConfirmOffersDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OfferListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    getPriceHistory: {
+        parameters: {
+            query: {
+                partId: string;
+                /** @description Pieces to buy. */
+                quantity?: number;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PriceHistoryDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    closeOffer: {
+        parameters: {
+            query: {
+                /** @description The version that was last read. */
+                version: number;
+            };
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    updateOffer: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["UpdateOfferDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OfferResponseDto"];
                 };
             };
             /** @description Problem details (RFC 9457) */
@@ -1099,6 +2789,37 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["OpAmpResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    exportOpAmps: {
+        parameters: {
+            query?: {
+                delimiter?: "comma" | "semicolon" | "tab" | "pipe";
+                decimalMark?: "point" | "comma";
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "text/csv": string;
                 };
             };
             /** @description Problem details (RFC 9457) */
@@ -1207,6 +2928,228 @@ export interface operations {
             };
         };
     };
+    listPartOffers: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PartOffersDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    listPrices: {
+        parameters: {
+            query?: {
+                limit?: number;
+                offset?: number;
+                /** @description A leading minus = descending. */
+                sort?: string;
+                search?: string;
+                state?: ("stale" | "expiring" | "expired" | "missing")[];
+                library?: ("curated" | "team")[];
+                kind?: ("op-amp" | "resistor")[];
+                partId?: string;
+                supplierId?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PriceListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    savePrices: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SavePricesDto"];
+            };
+        };
+        responses: {
+            /** @description The offers as they stand now, in the order of the rows. */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OfferListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    getRates: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RatesResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    saveRates: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SaveRatesDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RatesResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    getPriceSettings: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PriceSettingsDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    savePriceSettings: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PriceSettingsDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PriceSettingsDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
     rankOpAmps: {
         parameters: {
             query?: never;
@@ -1290,6 +3233,368 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["QuietestMapResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    rankResistors: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["RankResistorsDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ResistorRankingDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    listResistorExclusions: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["RankResistorsDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ResistorExclusionListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    rankStages: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["RankStagesDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StageRankingDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    listResistors: {
+        parameters: {
+            query?: {
+                limit?: number;
+                offset?: number;
+                /** @description A leading minus = descending. */
+                sort?: string;
+                search?: string;
+                library?: ("curated" | "team")[];
+                lifecycle?: ("active" | "not-recommended" | "last-time-buy" | "obsolete")[];
+                approval?: ("approved" | "restricted" | "not-approved")[];
+                technology?: ("metal-foil" | "thin-film" | "metal-film" | "wirewound" | "thick-film" | "carbon-film" | "carbon-composition")[];
+                /** @description The least value that the list holds. In Ω. */
+                resistanceFrom?: number;
+                /** @description The greatest value that the list holds. In Ω. */
+                resistanceTo?: number;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ResistorListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    createResistor: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateResistorDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ResistorResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    exportResistors: {
+        parameters: {
+            query?: {
+                delimiter?: "comma" | "semicolon" | "tab" | "pipe";
+                decimalMark?: "point" | "comma";
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "text/csv": string;
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    getResistor: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ResistorResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    deleteResistor: {
+        parameters: {
+            query: {
+                /** @description The version that was last read. */
+                version: number;
+            };
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    updateResistor: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["UpdateResistorDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ResistorResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    listSuppliers: {
+        parameters: {
+            query?: {
+                limit?: number;
+                offset?: number;
+                /** @description A leading minus = descending. */
+                sort?: string;
+                search?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SupplierListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    createSupplier: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateSupplierDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SupplierResponseDto"];
                 };
             };
             /** @description Problem details (RFC 9457) */

@@ -1,5 +1,6 @@
 import type { Role } from '@roothertz/common/access';
 import type { OpAmp } from '../api/opAmps';
+import type { StoredResistor } from '../api/resistors';
 import type { Session } from '../api/session';
 
 export function sessionOf(role: Role, plan: Session['plan'] = 'team'): Session {
@@ -38,6 +39,32 @@ export function opAmp(changes: Partial<OpAmp> = {}): OpAmp {
     },
     origins: { voltageNoise: 'measured' },
     version: 3,
+    updatedAt: '2026-01-05T10:00:00.000Z',
+    ...changes,
+  };
+}
+
+export function resistor(changes: Partial<StoredResistor> = {}): StoredResistor {
+  return {
+    id: '61',
+    library: 'team',
+    manufacturer: 'Tarn Micro',
+    partNumber: 'TR-08-4K70',
+    description: '',
+    package: '0805',
+    lifecycle: 'active',
+    approval: 'approved',
+    resistor: {
+      technology: 'thick-film',
+      resistance: 4700,
+      tolerance: 0.01,
+      temperatureCoefficient: 1e-4,
+      powerRating: 0.125,
+      noiseIndex: -10,
+      temperatureRise: 60,
+    },
+    origins: { noiseIndex: 'measured' },
+    version: 2,
     updatedAt: '2026-01-05T10:00:00.000Z',
     ...changes,
   };

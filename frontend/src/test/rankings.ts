@@ -36,6 +36,7 @@ export function rankingOf(
     quietSet: { total: 1 },
     floor: sourceFloor(request.conditions),
     libraryRevision: '1.1',
+    cheapest: null,
     items,
     ...more,
   };

@@ -1,16 +1,17 @@
 import type { ListedFields } from '@roothertz/common/parts';
+import iconv from 'iconv-lite';
 import { DomainError } from '../../shared/errors/domain-error.js';
 import type { Import } from '../entities/import.entity.js';
 import { readRecords } from './csv-records.js';
 import { detectDialect } from './detect-dialect.js';
-import type { Dialect, DialectChoice } from './dialect.js';
+import type { Dialect, DialectChoice, Encoding } from './dialect.js';
 import { headerKey, importColumns, MOST_COLUMNS } from './import-columns.js';
 import { inspectFile } from './text-encoding.js';
 
 const MOST_ROWS = 500_000;
 const PORTION = 5000;
 /** So many of a list's characters may be controls; a file with more is no text. */
-const CONTROL_SHARE = 0.1;
+const CONTROL_SHARE = 0.05;
 
 /** What an import keeps of its file. */
 export type ReadUpload = Pick<
@@ -26,7 +27,7 @@ export async function readUpload(
 ): Promise<ReadUpload> {
   const facts = await inspectFile(path);
   const detected = detectDialect(catalogue, facts, choice);
-  if (detected === null || isNoText(detected.header.cells.join('')))
+  if (detected === null || isNoText(facts.head, detected.dialect.encoding))
     throw new DomainError('import.unreadable', 'No row can be read: is the file a text with a delimiter?');
   const { dialect, header } = detected;
   if (header.cells.length > MOST_COLUMNS)
@@ -44,8 +45,9 @@ export async function readUpload(
   };
 }
 
-function isNoText(text: string): boolean {
-  const controls = text.match(/[\p{Cc}\uFFFD]/gu)?.length ?? 0;
+function isNoText(head: Buffer, encoding: Encoding): boolean {
+  const text = iconv.decode(head, encoding);
+  const controls = text.match(/(?![\t\r\n])[\p{Cc}\uFFFD]/gu)?.length ?? 0;
   return controls > text.length * CONTROL_SHARE;
 }
 

@@ -83,6 +83,17 @@ describe('quietestMap', () => {
     );
   });
 
+  it('gives cells to the first of two parts that only rounding tells apart', () => {
+    const twins = library(2, 5);
+    for (const column of Object.values(twins.parameters))
+      if (column instanceof Float64Array) column[1] = column[0];
+    twins.parameters.gainBandwidth.set([35e6, 170e6]);
+    const conditions = { ...base, bandwidthMargin: 0, source: { ...base.source, inductance: 0.1 } };
+    const { parts, winners } = quietestMap({ ...query(conditions), filter: {} }, [twins]);
+    expect(parts).toEqual([{ library: 0, row: 0 }]);
+    expect(new Set(winners.flat())).toEqual(new Set([0]));
+  });
+
   it('has cells without a winner where nothing is fast enough, and territories of several parts', () => {
     const { winners, parts } = quietestMap(query(base), [library(40, 3)]);
     expect(parts.length).toBeGreaterThan(2);

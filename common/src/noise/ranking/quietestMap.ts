@@ -12,6 +12,9 @@ import type { PartPlace } from './sift.js';
 /** Rounding must not lift a lower bound above the value. */
 const ALMOST = 1 - 1e-9;
 
+/** Parts that differ only in what doesn't count here differ by no more: the first of them wins everywhere. */
+const ROUNDING = 1e-12;
+
 /** Logarithmic steps of an axis, both ends included. */
 export interface MapAxis {
   from: number;
@@ -120,7 +123,8 @@ function findWinner(
   const consider = (library: number, row: number) => {
     const density2 = densities[library].at(row);
     const place = { library, row };
-    if (density2 > best || (density2 === best && winner !== null && !isBefore(place, winner))) return;
+    if (density2 > best * (1 + ROUNDING)) return;
+    if (density2 >= best * (1 - ROUNDING) && winner !== null && !isBefore(place, winner)) return;
     if (exclude(libraries[library], row)) return;
     best = density2;
     winner = place;

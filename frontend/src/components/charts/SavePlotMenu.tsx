@@ -1,12 +1,11 @@
 import { Button, Dropdown } from 'antd';
 import type { RefObject } from 'react';
 import { useTokens } from '../useTokens';
-import type { CurvesPlot } from './curve';
 import type { ChartHandle } from './EChart';
-import { PLOT_FORMATS, savePlot, type PlotFormat } from './savePlot';
+import { PLOT_FORMATS, savePlot, type PlotFormat, type SavedPlot } from './savePlot';
 
 interface SavePlotMenuProps {
-  plot: CurvesPlot;
+  plot: SavedPlot;
   chart: RefObject<ChartHandle | null>;
 }
 

@@ -11,10 +11,17 @@ export function plotCsv({ x, y, curves }: CurvesPlot): string {
     ...curves.map(({ name }) => heading(name, QUANTITIES[y.kind].unit)),
   ];
   const rows = xs.map((value) => [value, ...values.map((of) => of.get(value) ?? '')]);
-  return [header.map(cell), ...rows].map((row) => `${row.join(',')}\r\n`).join('');
+  return csvText(header, rows);
 }
 
-function heading(name: string, unit: string): string {
+/** Headings and rows as CSV (RFC 4180). */
+export function csvText(header: readonly string[], rows: readonly (readonly (string | number)[])[]): string {
+  const texts = rows.map((row) => row.map((value) => (typeof value === 'string' ? cell(value) : value)));
+  return [header.map(cell), ...texts].map((row) => `${row.join(',')}\r\n`).join('');
+}
+
+/** A column's heading with its unit. */
+export function heading(name: string, unit: string): string {
   return unit === '' ? name : `${name} (${unit})`;
 }
 

@@ -1,6 +1,12 @@
-import type { CurvesPlot } from './curve';
 import type { ChartHandle } from './EChart';
-import { plotCsv } from './plotCsv';
+
+/** What can be saved of a chart beside its drawing. */
+export interface SavedPlot {
+  /** For the file's name. */
+  title: string;
+  /** Its figures as CSV. */
+  csv: () => string;
+}
 
 export const PLOT_FORMATS = ['PNG', 'SVG', 'CSV'] as const;
 export type PlotFormat = (typeof PLOT_FORMATS)[number];
@@ -10,7 +16,7 @@ const SHARPNESS = 2;
 
 /** Saves a chart as a file: its drawing on the page's colour, or its figures. */
 export async function savePlot(
-  plot: CurvesPlot,
+  plot: SavedPlot,
   chart: ChartHandle,
   as: PlotFormat,
   paper: string,
@@ -19,8 +25,8 @@ export async function savePlot(
   if (blob) download(blob, `${plot.title.toLowerCase().replace(/[^a-z0-9]+/g, '-')}.${as.toLowerCase()}`);
 }
 
-function csvBlob(plot: CurvesPlot): Blob {
-  return new Blob([plotCsv(plot)], { type: 'text/csv;charset=utf-8' });
+function csvBlob(plot: SavedPlot): Blob {
+  return new Blob([plot.csv()], { type: 'text/csv;charset=utf-8' });
 }
 
 async function drawingBlob(chart: ChartHandle, as: 'PNG' | 'SVG', paper: string): Promise<Blob | null> {

@@ -27,7 +27,20 @@ describe('changing the stage', () => {
       gain: 50,
       gainResistance: 10,
     });
+    expect(withStageKind(both, 'instrumentation').conditions.stage).toEqual({
+      topology: 'instrumentation',
+      gain: 50,
+      gainResistance: 10,
+      loadResistance: 1e6,
+    });
     expect(withStageKind(both, 'follower').conditions.stage).toMatchObject({ loadResistance: 1e6 });
+  });
+});
+
+describe('an instrumentation stage', () => {
+  it('amplifies where it comes from a follower', () => {
+    const { stage } = withStageKind(exampleRequest('follower'), 'instrumentation').conditions;
+    expect(stage.gain).toBe(100);
   });
 });
 
@@ -35,6 +48,8 @@ describe('the feedback resistance', () => {
   it('follows from the gain', () => {
     expect(feedbackResistanceOf(exampleRequest('non-inverting').conditions)).toBe(990);
     expect(feedbackResistanceOf(exampleRequest('inverting').conditions)).toBe(20_000);
+    expect(feedbackResistanceOf(exampleRequest('difference').conditions)).toBe(15_000);
+    expect(feedbackResistanceOf(exampleRequest('instrumentation').conditions)).toBe(4950);
     expect(feedbackResistanceOf(exampleRequest('follower').conditions)).toBeNull();
     expect(feedbackResistanceOf(exampleRequest('transimpedance').conditions)).toBeNull();
   });

@@ -1,7 +1,14 @@
 import { STAGE_FIELDS, type RankingRequest, type StageConditions } from '@roothertz/common/conditions';
 
 /** The stages that the schematic draws: the topologies, and the follower, which is a special case of one. */
-export const STAGE_KINDS = ['non-inverting', 'follower', 'inverting', 'transimpedance'] as const;
+export const STAGE_KINDS = [
+  'non-inverting',
+  'follower',
+  'inverting',
+  'transimpedance',
+  'difference',
+  'instrumentation',
+] as const;
 export type StageKind = (typeof STAGE_KINDS)[number];
 
 export const STAGE_KIND_LABELS: Record<StageKind, string> = {
@@ -9,6 +16,8 @@ export const STAGE_KIND_LABELS: Record<StageKind, string> = {
   follower: 'Follower',
   inverting: 'Inverting',
   transimpedance: 'Transimpedance',
+  difference: 'Difference',
+  instrumentation: 'Instrumentation',
 };
 
 /** What a stage starts with where the one before it had no such value. */
@@ -17,6 +26,8 @@ export const STAGE_DEFAULTS: Record<StageKind, StageConditions> = {
   follower: { topology: 'non-inverting', gain: 1 },
   inverting: { topology: 'inverting', gain: 10, gainResistance: 1000 },
   transimpedance: { topology: 'transimpedance', feedbackResistance: 1e6, feedbackCapacitance: 'auto' },
+  difference: { topology: 'difference', gain: 10, gainResistance: 1000 },
+  instrumentation: { topology: 'instrumentation', gain: 100, gainResistance: 100 },
 };
 
 export function stageKindOf({ topology, gain, gainResistance }: StageConditions): StageKind {
@@ -35,7 +46,8 @@ export function withStageKind(request: RankingRequest, kind: StageKind): Ranking
   const { conditions } = request;
   const kept = Object.entries(conditions.stage).filter(([field]) => hasStageField(kind, field));
   const stage = { ...STAGE_DEFAULTS[kind], ...Object.fromEntries(kept), ...fixedBy(kind) } as StageConditions;
-  if (kind === 'non-inverting' && stage.gain! <= 1) stage.gain = STAGE_DEFAULTS[kind].gain;
+  const mustAmplify = kind === 'non-inverting' || kind === 'instrumentation';
+  if (mustAmplify && stage.gain! <= 1) stage.gain = STAGE_DEFAULTS[kind].gain;
   return { ...request, conditions: { ...conditions, stage, source: sourceFor(request, kind) } };
 }
 

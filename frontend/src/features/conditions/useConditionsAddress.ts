@@ -6,6 +6,7 @@ import { readAddress } from './address/readAddress';
 import { writeAddress } from './address/writeAddress';
 import { exampleRequest } from './exampleRequest';
 import { valueAt, withValue } from './requestPath';
+import { SEARCH_KEYS } from './search/searchKeys';
 
 const NAMED_KEY = 'named';
 const PART_KEY = 'part';
@@ -25,10 +26,7 @@ export function useConditionsAddress() {
 
   const show = useCallback(
     (next: RankingRequest, named: string | null, replace = false) =>
-      setParams((current) => addressOf(next, { [NAMED_KEY]: named, [PART_KEY]: current.get(PART_KEY) }), {
-        replace,
-        preventScrollReset: true,
-      }),
+      setParams((current) => addressOf(next, named, current), { replace, preventScrollReset: true }),
     [setParams],
   );
   const change = useCallback(
@@ -54,9 +52,16 @@ export function useConditionsAddress() {
   return { isBlank: content === null, request, problems, namedId, partId, change, replace, show, selectPart };
 }
 
-function addressOf(request: RankingRequest, ids: Record<string, string | null>): URLSearchParams {
+/** Keys of what doesn't belong to the conditions: they stay when the conditions change. */
+const KEPT_KEYS: readonly string[] = [...SEARCH_KEYS, PART_KEY];
+
+function addressOf(request: RankingRequest, named: string | null, before: URLSearchParams): URLSearchParams {
   const params = writeAddress(request);
-  for (const [key, id] of Object.entries(ids)) if (id !== null) params.set(key, id);
+  if (named !== null) params.set(NAMED_KEY, named);
+  for (const key of KEPT_KEYS) {
+    const text = before.get(key);
+    if (text !== null) params.set(key, text);
+  }
   return params;
 }
 

@@ -1,5 +1,10 @@
-import { CONDITION_FIELDS, type RankingRequest } from '@roothertz/common/conditions';
-import type { FieldError } from '@roothertz/common/parts';
+import {
+  CONDITION_FIELDS,
+  RESISTOR_CONDITION_FIELDS,
+  type RankingRequest,
+} from '@roothertz/common/conditions';
+import { STAGE_SEARCH_FIELDS } from '@roothertz/common/noise';
+import type { FieldError, QuantityField } from '@roothertz/common/parts';
 import { useCallback, useMemo, useState } from 'react';
 import type { ConditionsForm } from './ConditionsContext';
 
@@ -39,6 +44,12 @@ function entryOf({ field, message }: FieldError): [string, string] {
   return [field, message];
 }
 
+const FIELDS: Record<string, QuantityField> = {
+  ...RESISTOR_CONDITION_FIELDS,
+  ...STAGE_SEARCH_FIELDS,
+  ...CONDITION_FIELDS,
+};
+
 function labelOf(field: string): string {
-  return CONDITION_FIELDS[field as keyof typeof CONDITION_FIELDS]?.label ?? field;
+  return FIELDS[field]?.label ?? field;
 }

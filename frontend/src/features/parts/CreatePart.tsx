@@ -1,25 +1,27 @@
 import { useMemo, useState } from 'react';
 import { Link, useNavigate } from 'react-router-dom';
 import { LeaveQuestion } from './LeaveQuestion';
+import type { KindOfPart } from './kindOfPart';
 import { emptyDraft } from './partDraft';
 import { PartForm } from './PartForm';
 import { refusalOf } from './refusal';
 import { useCreatePart } from './useCreatePart';
 import { useLeaveGuard } from './useLeaveGuard';
 
-export function CreatePart() {
+export function CreatePart({ kind }: { kind: KindOfPart }) {
   const navigate = useNavigate();
-  const [initial] = useState(emptyDraft);
+  const [initial] = useState(() => emptyDraft(kind.catalogue));
   const { blocker, markDirty, release } = useLeaveGuard();
-  const { mutate, isPending, error } = useCreatePart((id) => {
+  const { mutate, isPending, error } = useCreatePart(kind, (id) => {
     release();
-    void navigate(`/parts/${id}`, { replace: true });
+    void navigate(`${kind.path}/${id}`, { replace: true });
   });
   const refusal = useMemo(() => refusalOf(error), [error]);
   return (
     <>
       <LeaveQuestion blocker={blocker} />
       <PartForm
+        kind={kind}
         initial={initial}
         saveLabel="Add to your library"
         isSaving={isPending}
@@ -27,7 +29,7 @@ export function CreatePart() {
         onSave={mutate}
         onChange={markDirty}
       >
-        <Link to="/parts">Don’t add</Link>
+        <Link to={kind.path}>Don’t add</Link>
       </PartForm>
     </>
   );

@@ -1,6 +1,7 @@
 import { useMemo } from 'react';
 import { Link, useNavigate } from 'react-router-dom';
-import type { OpAmp } from '../../api/opAmps';
+import type { StoredPart } from '../../api/parts';
+import type { KindOfPart } from './kindOfPart';
 import { LeaveQuestion } from './LeaveQuestion';
 import { draftOf } from './partDraft';
 import { PartForm } from './PartForm';
@@ -9,12 +10,13 @@ import { StaleEdit } from './StaleEdit';
 import { useEditPart } from './useEditPart';
 import { useLeaveGuard } from './useLeaveGuard';
 
-export function EditPart({ part }: { part: OpAmp }) {
+export function EditPart({ kind, part }: { kind: KindOfPart; part: StoredPart }) {
   const navigate = useNavigate();
+  const address = `${kind.path}/${part.id}`;
   const { blocker, markDirty, release } = useLeaveGuard();
-  const { edit, stale, isSaving, error, save, resolve } = useEditPart(part, () => {
+  const { edit, stale, isSaving, error, save, resolve } = useEditPart(kind, part, () => {
     release();
-    void navigate(`/parts/${part.id}`, { replace: true });
+    void navigate(address, { replace: true });
   });
   const refusal = useMemo(() => refusalOf(error), [error]);
   return (
@@ -24,12 +26,13 @@ export function EditPart({ part }: { part: OpAmp }) {
         <StaleEdit
           conflicts={stale.conflicts}
           mine={stale.mine}
-          theirs={draftOf(stale.theirs)}
+          theirs={draftOf(kind.catalogue, stale.theirs)}
           onResolve={resolve}
         />
       ) : (
         <PartForm
           key={edit.base.version}
+          kind={kind}
           initial={edit.draft}
           saveLabel="Save"
           isSaving={isSaving}
@@ -37,7 +40,7 @@ export function EditPart({ part }: { part: OpAmp }) {
           onSave={save}
           onChange={markDirty}
         >
-          <Link to={`/parts/${part.id}`}>Don’t save</Link>
+          <Link to={address}>Don’t save</Link>
         </PartForm>
       )}
     </>

@@ -1,12 +1,17 @@
-import type { ParameterDefinition } from '@roothertz/common/parts';
 import styles from './PartsGrid.module.css';
 
-/** A figure's heading: its symbol, or its name where it has none, over the unit of the whole column. */
-export function FigureHeader({ parameter }: { parameter: ParameterDefinition }) {
+interface FigureHeaderProps {
+  name: string;
+  help: string;
+  unit: string;
+}
+
+/** A figure's heading over the unit of the whole column. */
+export function FigureHeader({ name, help, unit }: FigureHeaderProps) {
   return (
-    <span className={styles.figureHeader} title={parameter.label}>
-      <span>{parameter.symbol ?? parameter.label}</span>
-      <span className={styles.unit}>{parameter.displayUnit}</span>
+    <span className={styles.figureHeader} title={help}>
+      <span>{name}</span>
+      <span className={styles.unit}>{unit}</span>
     </span>
   );
 }

@@ -1,15 +1,17 @@
 import { Button } from 'antd';
 import { Link } from 'react-router-dom';
 import { useMayDo } from '../../components/useMember';
+import type { KindOfPart } from './kindOfPart';
 
 interface NoPartsProps {
+  kind: KindOfPart;
   /** A search or a filter hides parts. */
   isNarrowed: boolean;
   onShowAll: () => void;
 }
 
 /** What to do where the list is empty. */
-export function NoParts({ isNarrowed, onShowAll }: NoPartsProps) {
+export function NoParts({ kind, isNarrowed, onShowAll }: NoPartsProps) {
   const mayEdit = useMayDo('parts.edit');
   if (isNarrowed) {
     return (
@@ -25,9 +27,9 @@ export function NoParts({ isNarrowed, onShowAll }: NoPartsProps) {
   if (mayEdit) {
     return (
       <p>
-        There are no parts yet. <Link to="/parts/new">Add the first op-amp</Link>.
+        There are no {kind.noun}s yet. <Link to={`${kind.path}/new`}>Add the first {kind.noun}</Link>.
       </p>
     );
   }
-  return <p>There are no parts yet. A librarian or an admin of your team can add them.</p>;
+  return <p>There are no {kind.noun}s yet. A librarian or an admin of your team can add them.</p>;
 }

@@ -1,25 +1,24 @@
-import { canBeUnknown, type OP_AMP_PARAMETERS } from '@roothertz/common/parts';
+import { canBeUnknown, type ParameterDefinition, type ParameterGroup } from '@roothertz/common/parts';
 import { Form, Select } from 'antd';
 import { QuantityInput } from '../../components/QuantityInput';
 import { ORIGIN_OPTIONS } from './optionLabels';
 import styles from './PartForm.module.css';
 
-export type OpAmpParameter = (typeof OP_AMP_PARAMETERS)[number];
-
 interface ParameterItemProps {
-  parameter: OpAmpParameter;
+  group: ParameterGroup;
+  parameter: ParameterDefinition;
   onInvalid: (key: string, message: string | null) => void;
 }
 
 /** A parameter's figure and where it comes from. */
-export function ParameterItem({ parameter, onInvalid }: ParameterItemProps) {
+export function ParameterItem({ group, parameter, onInvalid }: ParameterItemProps) {
   const { key, label, help } = parameter;
   const isUnknowable = canBeUnknown(parameter);
   const rules = isUnknowable ? [] : [{ required: true, message: `${label}: a value is needed` }];
   return (
     <div className={styles.parameter}>
       <Form.Item
-        name={['amplifier', key]}
+        name={[group, key]}
         label={parameterLabel(parameter)}
         tooltip={help}
         required={!isUnknowable}
@@ -47,12 +46,12 @@ export function ParameterItem({ parameter, onInvalid }: ParameterItemProps) {
 }
 
 /** A count is what it is: nobody measures or estimates it. */
-export function hasOrigin(parameter: OpAmpParameter): boolean {
+export function hasOrigin(parameter: ParameterDefinition): boolean {
   return parameter.kind !== 'count';
 }
 
-export function parameterLabel(parameter: OpAmpParameter): string {
-  return 'symbol' in parameter ? `${parameter.label} ${parameter.symbol}` : parameter.label;
+export function parameterLabel({ label, symbol }: ParameterDefinition): string {
+  return symbol === undefined ? label : `${label} ${symbol}`;
 }
 
 type FormQuantityProps = Omit<React.ComponentProps<typeof QuantityInput>, 'value' | 'onCommit' | 'label'> &

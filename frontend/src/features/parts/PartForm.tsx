@@ -1,6 +1,7 @@
-import { type FieldError, INPUT_TYPE_FIELD, OP_AMP_PARAMETERS, PART_FIELDS } from '@roothertz/common/parts';
+import { type FieldError, PART_FIELDS } from '@roothertz/common/parts';
 import { Alert, Button, Form } from 'antd';
 import { useEffect, type ReactNode } from 'react';
+import type { KindOfPart } from './kindOfPart';
 import { ParameterItem } from './ParameterItem';
 import type { PartDraft } from './partDraft';
 import styles from './PartForm.module.css';
@@ -8,6 +9,7 @@ import { PartTextItem } from './PartTextItem';
 import { usePartForm } from './usePartForm';
 
 interface PartFormProps {
+  kind: KindOfPart;
   initial: PartDraft;
   saveLabel: string;
   isSaving: boolean;
@@ -19,8 +21,9 @@ interface PartFormProps {
   children?: ReactNode;
 }
 
-/** The form of an op-amp, made from the catalogues: a new parameter appears here by itself. */
+/** The form of a part, made from the catalogues: a new parameter appears here by itself. */
 export function PartForm({
+  kind,
   initial,
   saveLabel,
   isSaving,
@@ -29,7 +32,8 @@ export function PartForm({
   onChange,
   children,
 }: PartFormProps) {
-  const { form, rest, onInvalid, onFinish, onFinishFailed, showErrors } = usePartForm(onSave);
+  const { form, rest, onInvalid, onFinish, onFinishFailed, showErrors } = usePartForm(kind, onSave);
+  const { group, choice, parameters } = kind.catalogue;
   useEffect(() => {
     if (refusal) showErrors(refusal.errors, refusal.detail);
   }, [refusal, showErrors]);
@@ -42,20 +46,20 @@ export function PartForm({
       onFinishFailed={onFinishFailed}
       onValuesChange={onChange}
       className={styles.form}
-      aria-label="Op-amp"
+      aria-label={kind.title}
     >
       <section>
         <h2 className={styles.heading}>Part</h2>
         {PART_FIELDS.map((field) => (
           <PartTextItem key={field.key} field={field} name={[field.key]} />
         ))}
-        <PartTextItem field={INPUT_TYPE_FIELD} name={['amplifier', INPUT_TYPE_FIELD.key]} />
+        <PartTextItem field={choice} name={[group, choice.key]} />
       </section>
       <section>
-        <h2 className={styles.heading}>Parameters of one amplifier</h2>
+        <h2 className={styles.heading}>{kind.parametersTitle}</h2>
         <div className={styles.parameters}>
-          {OP_AMP_PARAMETERS.map((parameter) => (
-            <ParameterItem key={parameter.key} parameter={parameter} onInvalid={onInvalid} />
+          {parameters.map((parameter) => (
+            <ParameterItem key={parameter.key} group={group} parameter={parameter} onInvalid={onInvalid} />
           ))}
         </div>
       </section>

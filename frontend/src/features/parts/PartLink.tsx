@@ -1,12 +1,12 @@
 import type { ICellRendererParams } from 'ag-grid-community';
 import { Link } from 'react-router-dom';
-import type { OpAmp } from '../../api/opAmps';
+import type { StoredPart } from '../../api/parts';
 import styles from './PartsGrid.module.css';
 
-export function PartLink({ data }: ICellRendererParams<OpAmp>) {
+export function PartLink({ data, path }: ICellRendererParams<StoredPart> & { path: string }) {
   if (!data) return null;
   return (
-    <Link to={`/parts/${data.id}`} tabIndex={-1} className={styles.part} title={data.partNumber}>
+    <Link to={`${path}/${data.id}`} tabIndex={-1} className={styles.part} title={data.partNumber}>
       {data.partNumber}
     </Link>
   );

@@ -1,11 +1,13 @@
-import type { OpAmp } from '../../api/opAmps';
+import type { StoredPart } from '../../api/parts';
+import type { KindOfPart } from './kindOfPart';
 import { optionLabel } from './optionLabels';
+import { figuresOf } from './partDraft';
 import styles from './PartTitle.module.css';
 
 /** What a part is called, whose it is and how it stands. */
-export function PartTitle({ part }: { part: OpAmp }) {
+export function PartTitle({ kind, part }: { kind: KindOfPart; part: StoredPart }) {
   const facts = [
-    part.amplifier.inputType && `${optionLabel('inputType', part.amplifier.inputType)} input`,
+    ...kind.summary(figuresOf(kind.catalogue, part)),
     part.package,
     optionLabel('lifecycle', part.lifecycle),
     optionLabel('approval', part.approval),

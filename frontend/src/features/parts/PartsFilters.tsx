@@ -1,16 +1,19 @@
 import { Input, Select } from 'antd';
+import type { KindOfPart } from './kindOfPart';
 import { optionLabel } from './optionLabels';
-import { PARTS_FILTERS, type PartsView } from './partsView';
+import { filtersOf, type PartsView } from './partsView';
 import styles from './PartsFilters.module.css';
 import type { ChangeView } from './usePartsView';
+import { ValueWindow } from './ValueWindow';
 
 interface PartsFiltersProps {
+  kind: KindOfPart;
   view: PartsView;
   change: ChangeView;
 }
 
 /** The search box and the choices that narrow the list. */
-export function PartsFilters({ view, change }: PartsFiltersProps) {
+export function PartsFilters({ kind, view, change }: PartsFiltersProps) {
   return (
     <div role="search" aria-label="Parts" className={styles.filters}>
       <Input
@@ -22,7 +25,8 @@ export function PartsFilters({ view, change }: PartsFiltersProps) {
         value={view.search}
         onChange={(event) => change({ search: event.target.value })}
       />
-      {PARTS_FILTERS.map(({ key, label, options }) => (
+      {kind.narrowedBy && <ValueWindow field={kind.narrowedBy} view={view} change={change} />}
+      {filtersOf(kind).map(({ key, label, options }) => (
         <Select<string[]>
           key={key}
           mode="multiple"

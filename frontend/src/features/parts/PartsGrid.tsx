@@ -3,19 +3,21 @@ import type { CellKeyDownEvent, ColDef, RowClickedEvent, SortChangedEvent } from
 import { AgGridReact } from 'ag-grid-react';
 import { useCallback, useMemo } from 'react';
 import { useNavigate } from 'react-router-dom';
-import type { OpAmp } from '../../api/opAmps';
+import type { StoredPart } from '../../api/parts';
 import { gridTheme } from '../../components/gridTheme';
-import { PARTS_COLUMNS } from './partsColumns';
+import type { KindOfPart } from './kindOfPart';
+import { partsColumns } from './partsColumns';
 import styles from './PartsGrid.module.css';
 
 interface PartsGridProps {
-  parts: readonly OpAmp[];
+  kind: KindOfPart;
+  parts: readonly StoredPart[];
   /** A column, with a minus in front for descending order. */
   sort?: string;
   onSort: (sort: string | undefined) => void;
 }
 
-const DEFAULTS: ColDef<OpAmp> = {
+const DEFAULTS: ColDef<StoredPart> = {
   sortable: true,
   resizable: true,
   suppressMovable: true,
@@ -23,11 +25,11 @@ const DEFAULTS: ColDef<OpAmp> = {
 };
 
 /** The parts as rows; Enter or a click opens one. */
-export function PartsGrid({ parts, sort, onSort }: PartsGridProps) {
-  const open = useOpenPart();
-  const columns = useMemo(() => PARTS_COLUMNS.map((column) => withSort(column, sort)), [sort]);
+export function PartsGrid({ kind, parts, sort, onSort }: PartsGridProps) {
+  const open = useOpenPart(kind.path);
+  const columns = useMemo(() => partsColumns(kind).map((column) => withSort(column, sort)), [kind, sort]);
   const tellSort = useCallback(
-    ({ api, source }: SortChangedEvent<OpAmp>) => {
+    ({ api, source }: SortChangedEvent<StoredPart>) => {
       if (source !== 'uiColumnSorted') return;
       const sorted = api.getColumnState().find((column) => column.sort);
       onSort(sorted && `${sorted.sort === 'desc' ? '-' : ''}${sorted.colId}`);
@@ -35,10 +37,10 @@ export function PartsGrid({ parts, sort, onSort }: PartsGridProps) {
     [onSort],
   );
   return (
-    <section aria-label="Op-amps" className={styles.grid}>
-      <AgGridReact<OpAmp>
+    <section aria-label={`${kind.title}s`} className={styles.grid}>
+      <AgGridReact<StoredPart>
         theme={gridTheme}
-        rowData={parts as OpAmp[]}
+        rowData={parts as StoredPart[]}
         columnDefs={columns}
         defaultColDef={DEFAULTS}
         getRowId={({ data }) => data.id}
@@ -50,23 +52,26 @@ export function PartsGrid({ parts, sort, onSort }: PartsGridProps) {
   );
 }
 
-function useOpenPart() {
+function useOpenPart(path: string) {
   const navigate = useNavigate();
   return useMemo(() => {
-    const open = (part: OpAmp | undefined) => part && void navigate(`/parts/${part.id}`);
+    const open = (part: StoredPart | undefined) => part && void navigate(`${path}/${part.id}`);
     return {
-      onCellKeyDown: ({ data, event }: CellKeyDownEvent<OpAmp> | { data?: OpAmp; event?: Event | null }) => {
+      onCellKeyDown: ({
+        data,
+        event,
+      }: CellKeyDownEvent<StoredPart> | { data?: StoredPart; event?: Event | null }) => {
         if (event instanceof KeyboardEvent && event.key === 'Enter') open(data);
       },
-      onRowClicked: ({ data, event }: RowClickedEvent<OpAmp>) => {
+      onRowClicked: ({ data, event }: RowClickedEvent<StoredPart>) => {
         const onLink = event?.target instanceof Element && event.target.closest('a') !== null;
         if (!onLink) open(data);
       },
     };
-  }, [navigate]);
+  }, [navigate, path]);
 }
 
-function withSort(column: ColDef<OpAmp>, sort = ''): ColDef<OpAmp> {
+function withSort(column: ColDef<StoredPart>, sort = ''): ColDef<StoredPart> {
   const descending = sort.startsWith('-');
   const isSorted = column.colId === sort.replace(/^-/, '');
   return { ...column, sort: isSorted ? (descending ? 'desc' : 'asc') : null };

@@ -1,5 +1,6 @@
+import type { ListedFields } from '@roothertz/common/parts';
 import type { PartDraft } from './partDraft';
-import { PART_VALUES, withValueOf, type PartValue } from './partValues';
+import { partValues, withValueOf, type PartValue } from './partValues';
 
 /** A value that somebody else changed while it was edited here. */
 export interface Conflict extends PartValue {
@@ -13,14 +14,20 @@ export interface Conflict extends PartValue {
 export type Choice = 'mine' | 'theirs';
 
 /** What changed meanwhile, value by value, between what the edit began with and what is stored now. */
-export function findConflicts(base: PartDraft, mine: PartDraft, theirs: PartDraft): Conflict[] {
-  return PART_VALUES.map((value) => ({
+export function findConflicts(
+  fields: ListedFields,
+  base: PartDraft,
+  mine: PartDraft,
+  theirs: PartDraft,
+): Conflict[] {
+  const compared = partValues(fields).map((value) => ({
     ...value,
     before: value.textOf(base),
     mine: value.textOf(mine),
     theirs: value.textOf(theirs),
     isMineToo: value.textOf(mine) !== value.textOf(base),
-  })).filter(({ before, mine: own, theirs: other }) => other !== before && other !== own);
+  }));
+  return compared.filter(({ before, mine: own, theirs: other }) => other !== before && other !== own);
 }
 
 /** My draft with theirs wherever that was chosen; what only they changed is theirs unless chosen otherwise. */

@@ -4,12 +4,14 @@ import {
   LIFECYCLE_LABELS,
   ORIGIN_LABELS,
   ORIGINS,
+  TECHNOLOGY_LABELS,
 } from '@roothertz/common/parts';
 
 const OPTION_LABELS: Readonly<Record<string, Readonly<Record<string, string>>>> = {
   lifecycle: LIFECYCLE_LABELS,
   approval: APPROVAL_LABELS,
   inputType: INPUT_TYPE_LABELS,
+  technology: TECHNOLOGY_LABELS,
   library: { curated: 'curated', team: 'your own' },
 };
 

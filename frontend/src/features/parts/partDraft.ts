@@ -1,47 +1,56 @@
 import {
-  type Amplifier,
-  type AmplifierOrigins,
   canBeUnknown,
-  OP_AMP_PARAMETERS,
-  type OpAmpPart,
+  type LibraryPart,
+  type ListedFields,
   originsOfKnown,
+  type Origins,
+  type ParameterGroup,
   PART_FIELDS,
   type PartFieldKey,
 } from '@roothertz/common/parts';
+import type { Figures } from '../../api/parts';
 
 /** A part while it is written: what is required may still be missing. */
-export type PartDraft = Record<PartFieldKey, string> & {
-  amplifier: { [Key in keyof Amplifier]: Amplifier[Key] | null };
-  origins: AmplifierOrigins;
-};
+export type PartDraft = Record<PartFieldKey, string> &
+  Partial<Record<ParameterGroup, Figures>> & { origins: Origins };
 
 /** A new part with every default; a figure that may be unknown is so until somebody states it. */
-export function emptyDraft(): PartDraft {
+export function emptyDraft({ group, choice, parameters }: ListedFields): PartDraft {
   const texts = PART_FIELDS.map(({ key, fallback }) => [key, fallback ?? '']);
-  const figures = OP_AMP_PARAMETERS.map((parameter) => [
+  const figures = parameters.map((parameter) => [
     parameter.key,
     canBeUnknown(parameter) ? null : parameter.fallback,
   ]);
   return {
     ...Object.fromEntries(texts),
-    amplifier: { inputType: null, ...Object.fromEntries(figures) },
+    [group]: { [choice.key]: null, ...Object.fromEntries(figures) },
     origins: {},
   } as PartDraft;
 }
 
 /** What can be changed of a part, without what the server keeps of it. */
-export function draftOf(part: OpAmpPart): PartDraft {
+export function draftOf(fields: ListedFields, part: LibraryPart & PartDraft): PartDraft {
   const texts = PART_FIELDS.map(({ key }) => [key, part[key]]);
   return {
     ...Object.fromEntries(texts),
-    amplifier: { ...part.amplifier },
+    [fields.group]: { ...figuresOf(fields, part) },
     origins: { ...part.origins },
   } as PartDraft;
 }
 
 /** The part that a complete draft stands for; the form has checked that nothing required is missing. */
-export function partOf(draft: PartDraft): OpAmpPart {
-  const part = draft as OpAmpPart;
-  const stated = Object.entries(part.origins).filter(([, origin]) => origin !== undefined);
-  return { ...part, origins: originsOfKnown(part.amplifier, Object.fromEntries(stated)) };
+export function partOf<Part extends LibraryPart>(fields: ListedFields, draft: PartDraft): Part {
+  const stated = Object.entries(draft.origins).filter(([, origin]) => origin !== undefined);
+  const origins = originsOfKnown(figuresOf(fields, draft), Object.fromEntries(stated));
+  return { ...draft, origins } as LibraryPart as Part;
+}
+
+/** A part holds the figures of its own kind. */
+export function figuresOf({ group }: ListedFields, part: Partial<Record<ParameterGroup, Figures>>): Figures {
+  return part[group]!;
+}
+
+/** The figure of a parameter; null = unknown. */
+export function figureOf(figures: Figures, key: string): number | null {
+  return figures[key] as number | null;
 }

@@ -1,13 +1,7 @@
-import {
-  INPUT_TYPE_FIELD,
-  OP_AMP_PARAMETERS,
-  ORIGIN_LABELS,
-  PART_FIELDS,
-  type Origin,
-} from '@roothertz/common/parts';
+import { type ListedFields, ORIGIN_LABELS, type Origin, PART_FIELDS } from '@roothertz/common/parts';
 import { formatEditable } from '@roothertz/common/units';
 import { optionLabel } from './optionLabels';
-import type { PartDraft } from './partDraft';
+import { figureOf, figuresOf, type PartDraft } from './partDraft';
 
 /** One value of a part: where it stands and how a member reads it. */
 export interface PartValue {
@@ -16,49 +10,50 @@ export interface PartValue {
   textOf: (part: PartDraft) => string;
 }
 
-/** Every value of an op-amp, from the catalogues. */
-export const PART_VALUES: readonly PartValue[] = [
-  ...PART_FIELDS.map(({ key, label }) => ({
-    path: [key],
-    label,
-    textOf: (part: PartDraft) => optionLabel(key, part[key]) || 'none',
-  })),
-  {
-    path: ['amplifier', 'inputType'],
-    label: INPUT_TYPE_FIELD.label,
-    textOf: ({ amplifier: { inputType } }) =>
-      inputType === null ? 'unknown' : optionLabel('inputType', inputType),
-  },
-  ...OP_AMP_PARAMETERS.flatMap(({ key, label, kind }) => [
-    {
-      path: ['amplifier', key],
+/** Every value of a part, from the catalogues. */
+export function partValues(fields: ListedFields): PartValue[] {
+  const { group, choice, parameters } = fields;
+  return [
+    ...PART_FIELDS.map(({ key, label }) => ({
+      path: [key],
       label,
-      textOf: ({ amplifier }: PartDraft) => {
-        const value = amplifier[key];
-        return value === null ? 'unknown' : formatEditable(value, kind);
+      textOf: (part: PartDraft) => optionLabel(key, part[key]) || 'none',
+    })),
+    {
+      path: [group, choice.key],
+      label: choice.label,
+      textOf: (part) => {
+        const option = figuresOf(fields, part)[choice.key];
+        return option === null ? 'unknown' : optionLabel(choice.key, String(option));
       },
     },
-    {
-      path: ['origins', key],
-      label: `${label}, origin`,
-      textOf: ({ origins }: PartDraft) => ORIGIN_LABELS[originOf(origins[key])],
-    },
-  ]),
-];
+    ...parameters.flatMap(({ key, label, kind }) => [
+      {
+        path: [group, key],
+        label,
+        textOf: (part: PartDraft) => {
+          const value = figureOf(figuresOf(fields, part), key);
+          return value === null ? 'unknown' : formatEditable(value, kind);
+        },
+      },
+      {
+        path: ['origins', key],
+        label: `${label}, origin`,
+        textOf: ({ origins }: PartDraft) => ORIGIN_LABELS[originOf(origins[key])],
+      },
+    ]),
+  ];
+}
 
 /** A parameter without a stated origin is a data sheet's typical value. */
 export function originOf(stated: Origin | undefined): Origin {
   return stated ?? 'typical';
 }
 
-export function valueAt(part: PartDraft, path: readonly string[]): unknown {
-  return path.reduce<unknown>((value, key) => (value as Record<string, unknown>)[key], part);
-}
-
 /** The draft with one value taken from another. */
 export function withValueOf(draft: PartDraft, [key, inner]: readonly string[], from: PartDraft): PartDraft {
   const group = key as keyof PartDraft;
   if (inner === undefined) return { ...draft, [group]: from[group] };
-  const value = valueAt(from, [key, inner]);
+  const value = (from[group] as Record<string, unknown>)[inner];
   return { ...draft, [group]: { ...(draft[group] as object), [inner]: value } };
 }

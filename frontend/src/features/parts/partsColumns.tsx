@@ -1,62 +1,94 @@
-import { OP_AMP_PARAMETERS, type ParameterDefinition } from '@roothertz/common/parts';
-import { formatInPrefix, parseUnit, PREFIXES, type Prefix } from '@roothertz/common/units';
+import type { ListedFields, ParameterDefinition } from '@roothertz/common/parts';
+import {
+  formatInPrefix,
+  formatQuantity,
+  parseUnit,
+  PREFIXES,
+  type Prefix,
+  type QuantityKind,
+} from '@roothertz/common/units';
 import type { ColDef, ICellRendererParams } from 'ag-grid-community';
-import type { OpAmp } from '../../api/opAmps';
+import type { StoredPart } from '../../api/parts';
 import { Unknown } from '../../components/Figure';
 import { FigureHeader } from './FigureHeader';
+import type { KindOfPart } from './kindOfPart';
 import { optionLabel } from './optionLabels';
+import { figureOf, figuresOf } from './partDraft';
 import { PartLink } from './PartLink';
 
-type Column = ColDef<OpAmp>;
+type Column = ColDef<StoredPart>;
+
+/** Kinds whose values lie too many decades apart for one unit: each value brings its own. */
+const WITH_OWN_UNIT: readonly QuantityKind[] = ['resistance'];
 
 /** The list's columns: what names the part, its figures in catalogue order, and its standing. */
-export const PARTS_COLUMNS: Column[] = [
-  {
-    colId: 'partNumber',
-    field: 'partNumber',
-    headerName: 'Part',
-    width: 112,
-    pinned: 'left',
-    cellRenderer: PartLink,
-  },
-  { colId: 'manufacturer', field: 'manufacturer', headerName: 'Maker', width: 126 },
-  { ...wordColumn('inputType', 'Input', 88), valueGetter: ({ data }) => data?.amplifier.inputType },
-  ...OP_AMP_PARAMETERS.map(figureColumn),
-  { colId: 'package', field: 'package', headerName: 'Package', width: 96 },
-  wordColumn('approval', 'Approval', 108),
-  wordColumn('lifecycle', 'Lifecycle', 124),
-  wordColumn('library', 'Library', 92),
-];
+export function partsColumns({ path, choice, columnWidths, catalogue }: KindOfPart): Column[] {
+  return [
+    {
+      colId: 'partNumber',
+      field: 'partNumber',
+      headerName: 'Part',
+      width: columnWidths.part,
+      pinned: 'left',
+      cellRenderer: PartLink,
+      cellRendererParams: { path },
+    },
+    { colId: 'manufacturer', field: 'manufacturer', headerName: 'Maker', width: 106 },
+    wordColumn(
+      choice.key,
+      choice.label,
+      columnWidths.choice,
+      (part) => figuresOf(catalogue, part)[choice.key],
+    ),
+    ...catalogue.parameters.map((parameter) => figureColumn(catalogue, parameter)),
+    { colId: 'package', field: 'package', headerName: 'Package', width: 104 },
+    wordColumn('approval', 'Approval', 104, ({ approval }) => approval),
+    wordColumn('lifecycle', 'Lifecycle', 100, ({ lifecycle }) => lifecycle),
+    wordColumn('library', 'Library', 92, ({ library }) => library),
+  ];
+}
 
 function wordColumn(
-  key: 'inputType' | 'approval' | 'lifecycle' | 'library',
+  key: string,
   headerName: string,
   width: number,
+  wordOf: (part: StoredPart) => unknown,
 ): Column {
   return {
     colId: key,
     headerName,
     width,
-    field: key === 'inputType' ? undefined : key,
+    valueGetter: ({ data }) => data && wordOf(data),
     cellRenderer: ({ value }: ICellRendererParams) =>
       value ? optionLabel(key, value as string) : <Unknown />,
   };
 }
 
-function figureColumn(parameter: ParameterDefinition<(typeof OP_AMP_PARAMETERS)[number]['key']>): Column {
-  const { key, kind, displayUnit } = parameter;
-  const prefix = prefixOf(displayUnit);
+function figureColumn(fields: ListedFields, parameter: ParameterDefinition): Column {
+  const { key, symbol, label, displayUnit } = parameter;
+  const hasOwnUnit = WITH_OWN_UNIT.includes(parameter.kind);
+  const textOf = hasOwnUnit ? textWithUnit(parameter) : textInColumn(parameter);
+  const header = { name: symbol ?? label, help: label, unit: hasOwnUnit ? '' : displayUnit };
   return {
     colId: key,
-    headerName: parameter.symbol ?? parameter.label,
-    width: parameter.symbol ? 78 : 92,
-    valueGetter: ({ data }) => data?.amplifier[key],
+    headerName: header.name,
+    width: symbol && !hasOwnUnit ? 78 : 86,
+    valueGetter: ({ data }) => data && figureOf(figuresOf(fields, data), key),
     comparator: unknownLast,
-    cellRenderer: ({ value }: ICellRendererParams<OpAmp, number | null>) =>
-      value == null ? <Unknown /> : formatInPrefix(value, kind, prefix),
+    cellRenderer: ({ value }: ICellRendererParams<StoredPart, number | null>) =>
+      value == null ? <Unknown /> : textOf(value),
     type: 'rightAligned',
-    headerComponentParams: { innerHeaderComponent: FigureHeader, innerHeaderComponentParams: { parameter } },
+    headerComponentParams: { innerHeaderComponent: FigureHeader, innerHeaderComponentParams: header },
   };
+}
+
+function textWithUnit({ kind }: ParameterDefinition): (value: number) => string {
+  return (value) => formatQuantity(value, kind);
+}
+
+function textInColumn({ kind, displayUnit }: ParameterDefinition): (value: number) => string {
+  const prefix = prefixOf(displayUnit);
+  return (value) => formatInPrefix(value, kind, prefix);
 }
 
 function prefixOf(displayUnit: string): Prefix {

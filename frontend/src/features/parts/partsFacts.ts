@@ -1,16 +1,26 @@
+import type { KindOfPart } from './kindOfPart';
+import { figuresOf } from './partDraft';
 import type { PartsList } from './usePartsList';
 
 /** The list in one line: how many parts, whose, and how many of them lack the figure that ranking needs most. */
-export function partsFacts({ parts, total, isComplete }: PartsList, searched: boolean): string {
+export function partsFacts(
+  { catalogue, mostMissed: { key, label } }: KindOfPart,
+  { parts, total, isComplete }: PartsList,
+  searched: boolean,
+): string {
   if (searched) return `${count(parts.length, 'part')} found among ${count(total, 'part')}`;
   if (!isComplete)
-    return `${count(total, 'part')}, of which the first ${parts.length} are shown: search for the others`;
+    return `${count(total, 'part')}, of which the first ${grouped(parts.length)} are shown: search or narrow for the others`;
   const curated = parts.filter(({ library }) => library === 'curated').length;
-  const unknown = parts.filter(({ amplifier }) => amplifier.currentNoise === null).length;
+  const unknown = parts.filter((part) => figuresOf(catalogue, part)[key] === null).length;
   const whose = `${count(parts.length, 'part')}: ${curated} curated, ${parts.length - curated} of your own`;
-  return unknown === 0 ? whose : `${whose}; ${unknown} without current noise`;
+  return unknown === 0 ? whose : `${whose}; ${unknown} without ${label}`;
 }
 
 function count(number: number, noun: string): string {
-  return `${new Intl.NumberFormat('en-GB').format(number).replaceAll(',', '\u2009')} ${noun}${number === 1 ? '' : 's'}`;
+  return `${grouped(number)} ${noun}${number === 1 ? '' : 's'}`;
+}
+
+function grouped(number: number): string {
+  return new Intl.NumberFormat('en-GB').format(number).replaceAll(',', '\u2009');
 }

@@ -1,14 +1,16 @@
 import { describe, expect, it } from 'vitest';
-import { opAmp } from '../../test/factories';
+import { opAmp, resistor } from '../../test/factories';
+import { OP_AMPS } from './opAmps';
 import { partsFacts } from './partsFacts';
 import { isNarrowed, readPartsView } from './partsView';
+import { RESISTORS } from './resistors';
 
 describe('what the address says of the list', () => {
   it('is read with its filters and its order', () => {
     const address = new URLSearchParams(
       'search=vr&library=team&lifecycle=active,obsolete&sort=-currentNoise',
     );
-    expect(readPartsView(address)).toEqual({
+    expect(readPartsView(OP_AMPS, address)).toEqual({
       search: 'vr',
       library: ['team'],
       lifecycle: ['active', 'obsolete'],
@@ -18,8 +20,31 @@ describe('what the address says of the list', () => {
 
   it('leaves out words that mean nothing', () => {
     const address = new URLSearchParams('library=stolen&approval=&sort=password');
-    expect(readPartsView(address)).toEqual({ search: '' });
-    expect(isNarrowed(readPartsView(address))).toBe(false);
+    expect(readPartsView(OP_AMPS, address)).toEqual({ search: '' });
+    expect(isNarrowed(OP_AMPS, readPartsView(OP_AMPS, address))).toBe(false);
+  });
+
+  it('is read by the kind of part that the list holds', () => {
+    const address = new URLSearchParams(
+      'inputType=jfet&technology=thin-film,wood&resistanceFrom=4700&resistanceTo=10000&sort=noiseIndex',
+    );
+    expect(readPartsView(OP_AMPS, address)).toEqual({ search: '', inputType: ['jfet'] });
+    expect(readPartsView(RESISTORS, address)).toEqual({
+      search: '',
+      technology: ['thin-film'],
+      resistanceFrom: 4700,
+      resistanceTo: 10_000,
+      sort: 'noiseIndex',
+    });
+  });
+
+  it.each(['', 'much', '-5', '0', 'Infinity'])('opens the window of values at “%s”', (value) => {
+    const view = readPartsView(RESISTORS, new URLSearchParams({ resistanceFrom: value }));
+    expect(view).toEqual({ search: '' });
+  });
+
+  it('counts as narrowed by a window that is open at one end', () => {
+    expect(isNarrowed(RESISTORS, { search: '', resistanceTo: 100 })).toBe(true);
   });
 });
 
@@ -29,17 +54,29 @@ describe('the facts of the list', () => {
   const list = { isPending: false, error: null, retry: () => undefined };
 
   it('count the libraries and the gaps', () => {
-    const facts = partsFacts({ ...list, parts: [curated, unknown], total: 2, isComplete: true }, false);
-    expect(facts).toBe('2 parts: 1 curated, 1 of your own; 1 without current noise');
+    const shown = { ...list, parts: [curated, unknown], total: 2, isComplete: true };
+    expect(partsFacts(OP_AMPS, shown, false)).toBe(
+      '2 parts: 1 curated, 1 of your own; 1 without current noise',
+    );
+  });
+
+  it('name the gap that matters for the kind of part', () => {
+    const silent = resistor({ resistor: { ...resistor().resistor, noiseIndex: null } });
+    const shown = { ...list, parts: [silent], total: 1, isComplete: true };
+    expect(partsFacts(RESISTORS, shown, false)).toBe(
+      '1 part: 0 curated, 1 of your own; 1 without noise index',
+    );
   });
 
   it('say that the list goes on', () => {
-    const facts = partsFacts({ ...list, parts: [curated], total: 100_243, isComplete: false }, false);
-    expect(facts).toBe('100\u2009243 parts, of which the first 1 are shown: search for the others');
+    const shown = { ...list, parts: [curated], total: 100_243, isComplete: false };
+    expect(partsFacts(OP_AMPS, shown, false)).toBe(
+      '100\u2009243 parts, of which the first 1 are shown: search or narrow for the others',
+    );
   });
 
   it('say how many were found', () => {
-    const facts = partsFacts({ ...list, parts: [curated], total: 283, isComplete: true }, true);
-    expect(facts).toBe('1 part found among 283 parts');
+    const shown = { ...list, parts: [curated], total: 283, isComplete: true };
+    expect(partsFacts(OP_AMPS, shown, true)).toBe('1 part found among 283 parts');
   });
 });

@@ -1,37 +1,67 @@
-import { APPROVALS, INPUT_TYPES, LIBRARIES, LIFECYCLES, OP_AMP_PARAMETERS } from '@roothertz/common/parts';
-import type { OpAmpListQuery } from '../../api/opAmps';
-
-/** What the list can be narrowed by, each with its key in the address. */
-export const PARTS_FILTERS = [
-  { key: 'library', label: 'Library', options: LIBRARIES },
-  { key: 'inputType', label: 'Input', options: INPUT_TYPES },
-  { key: 'lifecycle', label: 'Lifecycle', options: LIFECYCLES },
-  { key: 'approval', label: 'Approval', options: APPROVALS },
-] as const;
-
-export type PartsFilterKey = (typeof PARTS_FILTERS)[number]['key'];
+import { APPROVALS, boundsError, LIBRARIES, LIFECYCLES } from '@roothertz/common/parts';
+import type { PartListQuery } from '../../api/parts';
+import type { KindOfPart } from './kindOfPart';
 
 /** What the list shows, as the page's address holds it. */
-export type PartsView = Pick<OpAmpListQuery, PartsFilterKey | 'sort'> & { search: string };
+export type PartsView = Omit<PartListQuery, 'limit' | 'offset'> & { search: string };
 
-const SORTS = new Set<string>([
-  ...['partNumber', 'manufacturer', 'inputType', 'package', 'approval', 'lifecycle', 'library'],
-  ...OP_AMP_PARAMETERS.map(({ key }) => key),
-]);
+/** A choice that the list can be narrowed by, with its key in the address. */
+export interface PartsFilter {
+  key: 'library' | 'inputType' | 'technology' | 'lifecycle' | 'approval';
+  label: string;
+  options: readonly string[];
+}
 
-export function readPartsView(address: URLSearchParams): PartsView {
-  const sort = address.get('sort');
-  const filters = PARTS_FILTERS.flatMap(({ key, options }) => {
-    const chosen = options.filter((option) => (address.get(key) ?? '').split(',').includes(option));
-    return chosen.length === 0 ? [] : [[key, chosen] as const];
-  });
+/** The ends of the window of values that the list can be narrowed by. */
+export const WINDOW_ENDS = ['resistanceFrom', 'resistanceTo'] as const;
+
+const SORTED_WORDS = ['partNumber', 'manufacturer', 'package', 'approval', 'lifecycle', 'library'];
+
+export function filtersOf({ choice, catalogue }: KindOfPart): PartsFilter[] {
+  return [
+    { key: 'library', label: 'Library', options: LIBRARIES },
+    { ...choice, options: catalogue.choice.options },
+    { key: 'lifecycle', label: 'Lifecycle', options: LIFECYCLES },
+    { key: 'approval', label: 'Approval', options: APPROVALS },
+  ];
+}
+
+export function readPartsView(kind: KindOfPart, address: URLSearchParams): PartsView {
   return {
     search: address.get('search') ?? '',
-    ...(sort !== null && SORTS.has(sort.replace(/^-/, '')) && { sort }),
-    ...(Object.fromEntries(filters) as Pick<PartsView, PartsFilterKey>),
+    ...readSort(kind, address),
+    ...readChoices(kind, address),
+    ...readWindow(kind, address),
   };
 }
 
-export function isNarrowed(view: PartsView): boolean {
-  return view.search.trim() !== '' || PARTS_FILTERS.some(({ key }) => view[key] !== undefined);
+function readSort({ catalogue }: KindOfPart, address: URLSearchParams): Pick<PartsView, 'sort'> {
+  const sort = address.get('sort') ?? '';
+  const figures = catalogue.parameters.map(({ key }) => key);
+  const sorted = [...SORTED_WORDS, catalogue.choice.key, ...figures];
+  return sorted.includes(sort.replace(/^-/, '')) ? { sort } : {};
+}
+
+function readChoices(kind: KindOfPart, address: URLSearchParams): Pick<PartsView, PartsFilter['key']> {
+  const choices = filtersOf(kind).flatMap(({ key, options }) => {
+    const words = (address.get(key) ?? '').split(',');
+    const chosen = options.filter((option) => words.includes(option));
+    return chosen.length === 0 ? [] : [[key, chosen] as const];
+  });
+  return Object.fromEntries(choices);
+}
+
+function readWindow({ narrowedBy }: KindOfPart, address: URLSearchParams): PartsView | object {
+  if (narrowedBy === null) return {};
+  const ends = WINDOW_ENDS.map((key) => [key, Number(address.get(key) ?? NaN)] as const);
+  return Object.fromEntries(ends.filter(([, value]) => boundsError(narrowedBy, value) === null));
+}
+
+export function isNarrowed(kind: KindOfPart, view: PartsView): boolean {
+  return view.search.trim() !== '' || narrowingKeys(kind).some((key) => view[key] !== undefined);
+}
+
+/** Everything in the address that hides parts, beside the search. */
+export function narrowingKeys(kind: KindOfPart): (keyof PartsView)[] {
+  return [...filtersOf(kind).map(({ key }) => key), ...WINDOW_ENDS];
 }

@@ -1,7 +1,7 @@
 import Fuse, { type IFuseOptions } from 'fuse.js';
-import type { OpAmp } from '../../api/opAmps';
+import type { StoredPart } from '../../api/parts';
 
-const OPTIONS: IFuseOptions<OpAmp> = {
+const OPTIONS: IFuseOptions<StoredPart> = {
   keys: [
     { name: 'partNumber', weight: 3 },
     { name: 'manufacturer', weight: 2 },
@@ -14,7 +14,7 @@ const OPTIONS: IFuseOptions<OpAmp> = {
 };
 
 /** Searches loaded parts by number, maker and description, forgiving slips, best match first. */
-export function createPartsSearch(parts: readonly OpAmp[]): (text: string) => readonly OpAmp[] {
+export function createPartsSearch(parts: readonly StoredPart[]): (text: string) => readonly StoredPart[] {
   const fuse = new Fuse(parts, OPTIONS);
   return (text) => {
     const words = text.trim();
@@ -23,7 +23,10 @@ export function createPartsSearch(parts: readonly OpAmp[]): (text: string) => re
 }
 
 /** The parts that were found in the page, then those that only the server found. */
-export function joinFound(inPage: readonly OpAmp[], onServer: readonly OpAmp[]): readonly OpAmp[] {
+export function joinFound(
+  inPage: readonly StoredPart[],
+  onServer: readonly StoredPart[],
+): readonly StoredPart[] {
   const known = new Set(inPage.map(({ id }) => id));
   return [...inPage, ...onServer.filter(({ id }) => !known.has(id))];
 }

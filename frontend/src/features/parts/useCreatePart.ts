@@ -1,14 +1,14 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
-import { createOpAmp, opAmpKeys } from '../../api/opAmps';
-import { partOf, type PartDraft } from './partDraft';
+import { partKey } from '../../api/parts';
+import type { KindOfPart } from './kindOfPart';
 
 /** Adding a part to the team's own library. */
-export function useCreatePart(onCreated: (id: string) => void) {
+export function useCreatePart({ create, reader }: KindOfPart, onCreated: (id: string) => void) {
   const queryClient = useQueryClient();
   return useMutation({
-    mutationFn: (draft: PartDraft) => createOpAmp(partOf(draft)),
+    mutationFn: create,
     onSuccess: (part) => {
-      queryClient.setQueryData(opAmpKeys.one(part.id), part);
+      queryClient.setQueryData(partKey(reader, part.id), part);
       void queryClient.invalidateQueries();
       onCreated(part.id);
     },

@@ -1,31 +1,32 @@
 import { hashKey, useMutation, useQueryClient } from '@tanstack/react-query';
 import { App, Button } from 'antd';
 import { useNavigate } from 'react-router-dom';
-import { createOpAmp, deleteOpAmp, opAmpKeys, type OpAmp } from '../../api/opAmps';
+import { partKey, type StoredPart } from '../../api/parts';
 import { detailOf } from '../../api/problem';
-import { draftOf, partOf } from './partDraft';
+import type { KindOfPart } from './kindOfPart';
+import { draftOf } from './partDraft';
 
 const SECONDS_TO_UNDO = 12;
 
 /** Deletes a part at once and offers to bring it back. */
-export function useDeletePart(part: OpAmp) {
+export function useDeletePart({ catalogue, reader, create, path }: KindOfPart, part: StoredPart) {
   const queryClient = useQueryClient();
   const navigate = useNavigate();
   const { notification } = App.useApp();
   const undo = async () => {
     notification.destroy(part.id);
     try {
-      const restored = await createOpAmp(partOf(draftOf(part)));
+      const restored = await create(draftOf(catalogue, part));
       await queryClient.invalidateQueries();
-      await navigate(`/parts/${restored.id}`);
+      await navigate(`${path}/${restored.id}`);
     } catch (error) {
       notification.error({ title: `${part.partNumber} can’t be brought back`, description: detailOf(error) });
     }
   };
   return useMutation({
-    mutationFn: () => deleteOpAmp(part.id, part.version),
+    mutationFn: () => reader.remove(part.id, part.version),
     onSuccess: async () => {
-      await navigate('/parts');
+      await navigate(path);
       notification.open({
         key: part.id,
         title: `${part.partNumber} is deleted`,
@@ -33,7 +34,7 @@ export function useDeletePart(part: OpAmp) {
         placement: 'bottomRight',
         actions: <Button onClick={() => void undo()}>Undo</Button>,
       });
-      const gone = hashKey(opAmpKeys.one(part.id));
+      const gone = hashKey(partKey(reader, part.id));
       await queryClient.invalidateQueries({ predicate: ({ queryHash }) => queryHash !== gone });
     },
   });

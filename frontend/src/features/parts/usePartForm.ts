@@ -1,10 +1,11 @@
-import { checkOpAmp, type FieldError } from '@roothertz/common/parts';
+import type { FieldError } from '@roothertz/common/parts';
 import { Form, type FormInstance } from 'antd';
 import { useCallback, useRef, useState } from 'react';
-import { partOf, type PartDraft } from './partDraft';
+import type { KindOfPart } from './kindOfPart';
+import type { PartDraft } from './partDraft';
 
 /** The state of a part's form: what can't be read, what the server refused, and when it can be saved. */
-export function usePartForm(onSave: (draft: PartDraft) => void) {
+export function usePartForm({ catalogue: { group }, check }: KindOfPart, onSave: (draft: PartDraft) => void) {
   const [form] = Form.useForm<PartDraft>();
   const [rest, setRest] = useState<readonly string[]>([]);
   const unreadable = useRef(new Set<string>());
@@ -22,9 +23,9 @@ export function usePartForm(onSave: (draft: PartDraft) => void) {
   );
   const onFinish = () => {
     const [first] = unreadable.current;
-    if (first !== undefined) return focusField(form, ['amplifier', first]);
+    if (first !== undefined) return focusField(form, [group, first]);
     const draft = form.getFieldsValue(true) as PartDraft;
-    const errors = checkOpAmp(partOf(draft));
+    const errors = check(draft);
     showErrors(errors);
     if (errors.length === 0) onSave(draft);
   };

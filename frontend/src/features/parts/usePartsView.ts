@@ -1,13 +1,14 @@
 import { useCallback, useMemo } from 'react';
 import { useSearchParams } from 'react-router-dom';
+import type { KindOfPart } from './kindOfPart';
 import { readPartsView } from './partsView';
 
 export type ChangeView = (changes: Record<string, string | readonly string[] | undefined>) => void;
 
 /** What the list shows, kept in the page's address. */
-export function usePartsView() {
+export function usePartsView(kind: KindOfPart) {
   const [address, setAddress] = useSearchParams();
-  const view = useMemo(() => readPartsView(address), [address]);
+  const view = useMemo(() => readPartsView(kind, address), [kind, address]);
   const change = useCallback<ChangeView>(
     (changes) =>
       setAddress(

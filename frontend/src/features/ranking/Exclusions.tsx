@@ -1,22 +1,31 @@
-import type { RankingRequest } from '@roothertz/common/conditions';
-import { EXCLUSION_LABELS } from '@roothertz/common/noise';
 import { useInfiniteQuery } from '@tanstack/react-query';
 import { Button, Skeleton } from 'antd';
 import { useState } from 'react';
 import { Link } from 'react-router-dom';
 import { detailOf } from '../../api/problem';
-import { exclusionsQuery, type ExcludedPart, type Ranking } from '../../api/ranking';
+import type { PagesQuery } from '../../api/pages';
+import type { ExcludedPart } from '../../api/ranking';
 import { FieldMessage } from '../../components/FieldMessage';
 import styles from './Exclusions.module.css';
-import { leftOutText, reasonsText } from './exclusionWords';
+import { leftOutText, reasonsText, type Excluded } from './exclusionWords';
 
-interface ExclusionsProps {
-  request: RankingRequest;
-  excluded: Ranking['excluded'];
+interface ExcludedPage<Reason extends string> {
+  items: ExcludedPart<Reason>[];
+  total: number;
+}
+
+interface ExclusionsProps<Reason extends string> {
+  /** Asks for the parts that are left out. */
+  query: PagesQuery<ExcludedPage<Reason>>;
+  excluded: Excluded<Reason>;
+  /** The reasons in a few words. */
+  labels: Record<Reason, string>;
+  /** Where the parts' pages stand. */
+  path: string;
 }
 
 /** How many parts are left out and why; folds out to the parts themselves. */
-export function Exclusions({ request, excluded }: ExclusionsProps) {
+export function Exclusions<Reason extends string>({ excluded, ...parts }: ExclusionsProps<Reason>) {
   const [open, setOpen] = useState(false);
   if (excluded.total === 0) return <p className={styles.summary}>No part is left out.</p>;
   return (
@@ -32,17 +41,19 @@ export function Exclusions({ request, excluded }: ExclusionsProps) {
         >
           {leftOutText(excluded)}
         </button>
-        : {reasonsText(excluded)}
+        : {reasonsText(excluded, parts.labels)}
       </p>
-      {open && <ExcludedParts request={request} />}
+      {open && <ExcludedParts {...parts} />}
     </>
   );
 }
 
-function ExcludedParts({ request }: { request: RankingRequest }) {
-  const { data, error, hasNextPage, isFetchingNextPage, fetchNextPage } = useInfiniteQuery(
-    exclusionsQuery(request),
-  );
+function ExcludedParts<Reason extends string>({
+  query,
+  labels,
+  path,
+}: Omit<ExclusionsProps<Reason>, 'excluded'>) {
+  const { data, error, hasNextPage, isFetchingNextPage, fetchNextPage } = useInfiniteQuery(query);
   if (error) return <FieldMessage>{detailOf(error)}</FieldMessage>;
   if (!data) return <Skeleton title={false} paragraph={{ rows: 4 }} />;
   const parts = data.pages.flatMap(({ items }) => items);
@@ -51,7 +62,12 @@ function ExcludedParts({ request }: { request: RankingRequest }) {
       <table>
         <tbody>
           {parts.map((excluded) => (
-            <ExcludedRow key={excluded.part.id} excluded={excluded} />
+            <ExcludedRow
+              key={excluded.part.id}
+              excluded={excluded}
+              label={labels[excluded.reason]}
+              path={path}
+            />
           ))}
         </tbody>
       </table>
@@ -64,15 +80,21 @@ function ExcludedParts({ request }: { request: RankingRequest }) {
   );
 }
 
-function ExcludedRow({ excluded: { part, reason, detail } }: { excluded: ExcludedPart }) {
+interface ExcludedRowProps {
+  excluded: ExcludedPart;
+  label: string;
+  path: string;
+}
+
+function ExcludedRow({ excluded: { part, detail }, label, path }: ExcludedRowProps) {
   return (
     <tr>
       <th scope="row">
-        <Link to={`/parts/${part.id}`}>{part.partNumber}</Link>{' '}
+        <Link to={`${path}/${part.id}`}>{part.partNumber}</Link>{' '}
         <span className={styles.maker}>{part.manufacturer}</span>
       </th>
       <td>
-        <span className="visually-hidden">{EXCLUSION_LABELS[reason]}: </span>
+        <span className="visually-hidden">{label}: </span>
         {detail}
       </td>
     </tr>

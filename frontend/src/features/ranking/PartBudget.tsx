@@ -1,5 +1,4 @@
 import type { RankingRequest } from '@roothertz/common/conditions';
-import { CAUTION_DETAILS, CAUTION_LABELS } from '@roothertz/common/noise';
 import { useMemo } from 'react';
 import { Link } from 'react-router-dom';
 import { BudgetTable } from './BudgetTable';
@@ -26,15 +25,6 @@ export function PartBudget({ selected, request }: { selected: SelectedPart; requ
         kind={noiseKind(request.conditions.stage.topology)}
       />
       <p className={styles.explanation}>{explanation}</p>
-      {figures.cautions.length > 0 && (
-        <ul className={styles.cautions}>
-          {figures.cautions.map((caution) => (
-            <li key={caution}>
-              <span className={styles.caution}>△ {CAUTION_LABELS[caution]}.</span> {CAUTION_DETAILS[caution]}
-            </li>
-          ))}
-        </ul>
-      )}
     </section>
   );
 }

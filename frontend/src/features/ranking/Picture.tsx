@@ -4,58 +4,78 @@ import { useMemo, useRef, useState } from 'react';
 import type { CurvesPlot } from '../../components/charts/curve';
 import { CurvesChart } from '../../components/charts/CurvesChart';
 import type { ChartHandle } from '../../components/charts/EChart';
+import { plotCsv } from '../../components/charts/plotCsv';
 import { SavePlotMenu } from '../../components/charts/SavePlotMenu';
 import { frequencyPlot } from './frequencyPlot';
+import { QuietestMapView } from './map/QuietestMapView';
 import styles from './Picture.module.css';
 import { resistancePlot } from './resistancePlot';
 import type { SelectedPart } from './useSelectedPart';
 
-const VIEWS = [
+const TABS = [
   { key: 'resistance', label: 'Resistance' },
   { key: 'frequency', label: 'Frequency' },
+  { key: 'map', label: 'Quietest map' },
 ] as const;
-type View = (typeof VIEWS)[number]['key'];
+type Tab = (typeof TABS)[number]['key'];
 
-const LARGE = 248;
-const SMALL = 206;
+const LARGE = 214;
+const SMALL = 152;
 
-/** The selected part over the floor: the chosen view large, the other one below it. */
-export function Picture({ selected, request }: { selected: SelectedPart; request: RankingRequest }) {
-  const [view, setView] = useState<View>('resistance');
+interface PictureProps {
+  selected: SelectedPart;
+  request: RankingRequest;
+  /** Moves the conditions to a place of the map. */
+  onMove: (request: RankingRequest) => void;
+}
+
+/** The selected part over the floor: the chosen curves large, the others below; or the quietest map. */
+export function Picture({ selected, request, onMove }: PictureProps) {
+  const [tab, setTab] = useState<Tab>('resistance');
   const plots = useMemo(() => plotsOf(selected, request), [selected, request]);
-  const other = view === 'resistance' ? plots.frequency : plots.resistance;
-  const items = VIEWS.map((tab) => ({
-    ...tab,
-    children: view === tab.key && <Plot plot={plots[tab.key]} height={LARGE} />,
-  }));
+  const contents = {
+    resistance: () => <Plots large={plots.resistance} small={plots.frequency} />,
+    frequency: () => <Plots large={plots.frequency} small={plots.resistance} />,
+    map: () => <QuietestMapView request={request} selectedId={selected.part.id} onMove={onMove} />,
+  };
   return (
     <section aria-label="Picture" className={styles.picture} id="picture">
       <Tabs
         size="small"
-        activeKey={view}
-        onChange={(key) => setView(key as View)}
-        items={items}
+        activeKey={tab}
+        onChange={(key) => setTab(key as Tab)}
+        items={TABS.map((item) => ({ ...item, children: item.key === tab && contents[item.key]() }))}
         tabBarStyle={{ marginBottom: 4 }}
+        tabBarGutter={24}
       />
-      <Plot plot={other} height={SMALL} />
     </section>
   );
 }
 
-function plotsOf({ part, compared }: SelectedPart, { conditions }: RankingRequest): Record<View, CurvesPlot> {
+function plotsOf({ part, compared }: SelectedPart, { conditions }: RankingRequest) {
   return {
     resistance: resistancePlot(conditions, part, compared),
     frequency: frequencyPlot(conditions, part, compared),
   };
 }
 
+function Plots({ large, small }: { large: CurvesPlot; small: CurvesPlot }) {
+  return (
+    <>
+      <Plot plot={large} height={LARGE} />
+      <Plot plot={small} height={SMALL} />
+    </>
+  );
+}
+
 function Plot({ plot, height }: { plot: CurvesPlot; height: number }) {
   const chart = useRef<ChartHandle>(null);
+  const saved = useMemo(() => ({ title: plot.title, csv: () => plotCsv(plot) }), [plot]);
   return (
     <div className={styles.plot}>
       <div className={styles.plotTitle}>
         <h2>{plot.title}</h2>
-        <SavePlotMenu plot={plot} chart={chart} />
+        <SavePlotMenu plot={saved} chart={chart} />
       </div>
       <CurvesChart ref={chart} plot={plot} height={height} />
     </div>

@@ -27,9 +27,24 @@ describe('the sentence on the dominant contributor', () => {
     );
   });
 
+  it('names the difference resistors of an instrumentation stage where they are the louder ones', () => {
+    const stage = { topology: 'instrumentation', gain: 2, gainResistance: 100 } as const;
+    expect(explained({ stage, source: silent })).toMatch(
+      /^The feedback network makes \d\d % of the noise: 1 kΩ instead of 10 kΩ would bring it to \d\d %\.$/,
+    );
+    const loud = { ...stage, gain: 100, gainResistance: 10e3, differenceResistance: 20e3 };
+    expect(explained({ stage: loud, source: silent })).toContain(': 1 kΩ instead of 10 kΩ');
+  });
+
   it('asks for a lower e_n or a lower i_n', () => {
     expect(explained({ source: silent })).toMatch(/voltage noise .* lower e_n/);
     expect(explained({ source: { ...silent, resistance: 1e6 } })).toMatch(/current noise .* JFET or CMOS/);
+  });
+
+  it('asks a difference stage for a lower network where the current noise of its + input prevails', () => {
+    const stage = { topology: 'difference', gain: 10, gainResistance: 1e6 } as const;
+    const part = { ...amplifier, currentNoise: 1e-11 };
+    expect(explained({ stage, source: silent }, part)).toMatch(/current noise .* lower network/);
   });
 
   it('names 1/f noise where it prevails in the band', () => {

@@ -1,4 +1,8 @@
-import type { OperatingConditions, StageConditions } from '@roothertz/common/conditions';
+import {
+  USUAL_DIFFERENCE_RESISTANCE,
+  type OperatingConditions,
+  type StageConditions,
+} from '@roothertz/common/conditions';
 import { evaluateStage, type Contributor, type StageFigures } from '@roothertz/common/noise';
 import type { Amplifier } from '@roothertz/common/parts';
 import { formatQuantity } from '@roothertz/common/units';
@@ -25,8 +29,10 @@ const SENTENCES: Record<Contributor, (explained: Explained) => string> = {
     `The source itself makes ${share} of the noise: no amplifier takes that away, a cooler source or a narrower band does.`,
   amplifierVoltage: ({ share, conditions, amplifier }) =>
     `The amplifier’s voltage noise makes ${share} of the noise${flickerNote(conditions, amplifier)}: a part with a lower e_n would help.`,
-  amplifierCurrentSource: ({ share }) =>
-    `The amplifier’s current noise in the source’s impedance makes ${share} of the noise: a part with a lower i_n would help, such as one with a JFET or CMOS input.`,
+  amplifierCurrentSource: ({ share, conditions }) =>
+    conditions.stage.topology === 'difference'
+      ? `The amplifier’s current noise at the + input makes ${share} of the noise: a lower network or a part with a lower i_n would help.`
+      : `The amplifier’s current noise in the source’s impedance makes ${share} of the noise: a part with a lower i_n would help, such as one with a JFET or CMOS input.`,
   amplifierCurrentFeedback: ({ share }) =>
     `The amplifier’s current noise in the feedback network makes ${share} of the noise: a lower network or a part with a lower i_n would help.`,
   feedback: ({ share, conditions, amplifier }) =>
@@ -47,7 +53,17 @@ function networkAdvice(conditions: OperatingConditions, amplifier: Amplifier): s
   const { topology, gainResistance = 0, feedbackResistance = 0 } = conditions.stage;
   if (topology === 'transimpedance')
     return advice(conditions, amplifier, 'feedbackResistance', feedbackResistance, feedbackResistance * 10);
+  const difference = louderDifference(conditions.stage);
+  if (difference !== null)
+    return advice(conditions, amplifier, 'differenceResistance', difference, difference / 10);
   return advice(conditions, amplifier, 'gainResistance', gainResistance, gainResistance / 10);
+}
+
+/** The difference resistance in Ω where those four make more noise than the network of the input pair. */
+function louderDifference({ topology, gain = 1, gainResistance = 0, ...stage }: StageConditions) {
+  const { differenceResistance = USUAL_DIFFERENCE_RESISTANCE } = stage;
+  const isLouder = 4 * differenceResistance > gainResistance * gain * (gain - 1);
+  return topology === 'instrumentation' && isLouder ? differenceResistance : null;
 }
 
 function advice(

@@ -1,15 +1,15 @@
-import { INPUT_TYPE_FIELD, OP_AMP_PARAMETERS, PART_FIELDS } from '@roothertz/common/parts';
+import { OP_AMP_CATALOGUE, PART_FIELDS, RESISTOR_CATALOGUE } from '@roothertz/common/parts';
 import { screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { describe, expect, it } from 'vitest';
-import { opAmp, sessionOf } from '../../test/factories';
+import { opAmp, resistor, sessionOf } from '../../test/factories';
 import { fakeServer, json, problem } from '../../test/fakeServer';
 import { renderApp } from '../../test/renderApp';
 
 const LIBRARIAN = { 'GET /api/auth/me': () => json(sessionOf('librarian')) };
 
 function field(label: string): HTMLElement {
-  return screen.getByLabelText(new RegExp(`^${label}( [A-Za-z]+_?[A-Za-z]*)?$`));
+  return screen.getByLabelText(new RegExp(`^${label}( [A-Za-zΔ]+_?[A-Za-z]*)?$`));
 }
 
 async function fill(label: string, text: string) {
@@ -22,15 +22,51 @@ async function save(name: string) {
   await userEvent.click(screen.getByRole('button', { name }));
 }
 
-describe('the form of a new op-amp', () => {
-  it('has a field for every entry of the catalogues', async () => {
+describe('the form of a new part', () => {
+  it.each([
+    ['Op-amp', '/parts/new', OP_AMP_CATALOGUE],
+    ['Resistor', '/parts/resistors/new', RESISTOR_CATALOGUE],
+  ] as const)('has a field for every entry of the catalogues: %s', async (name, address, catalogue) => {
     fakeServer(LIBRARIAN);
-    renderApp('/parts/new');
-    await screen.findByRole('form', { name: 'Op-amp' });
-    for (const { label } of [...PART_FIELDS, INPUT_TYPE_FIELD, ...OP_AMP_PARAMETERS])
+    renderApp(address);
+    await screen.findByRole('form', { name });
+    for (const { label } of [...PART_FIELDS, catalogue.choice, ...catalogue.parameters])
       expect(field(label)).toBeInTheDocument();
   });
+});
 
+describe('the form of a new resistor', () => {
+  it('sends SI values, and null for what is unknown', async () => {
+    const asked = fakeServer({
+      ...LIBRARIAN,
+      'POST /api/resistors': () => json(resistor(), 201),
+      'GET /api/resistors/61': () => json(resistor()),
+    });
+    const router = renderApp('/parts/resistors/new');
+    await screen.findByRole('form', { name: 'Resistor' });
+    await fill('manufacturer', 'Tarn Micro');
+    await fill('part number', 'TR-08-4K70');
+    await fill('resistance', '4k7');
+    await fill('tolerance', '0.1');
+    await fill('temperature coefficient', '25 ppm/K');
+    await save('Add to your library');
+    await screen.findByRole('heading', { name: /TR-08-4K70/ });
+    expect(router.state.location.pathname).toBe('/parts/resistors/61');
+    expect(asked.find(({ route }) => route === 'POST /api/resistors')?.body).toMatchObject({
+      partNumber: 'TR-08-4K70',
+      resistor: {
+        technology: null,
+        resistance: 4700,
+        tolerance: 0.1,
+        temperatureCoefficient: 25e-6,
+        noiseIndex: null,
+      },
+      origins: {},
+    });
+  });
+});
+
+describe('the form of a new op-amp', () => {
   it('sends SI values, and null for what is unknown', async () => {
     const asked = fakeServer({
       ...LIBRARIAN,

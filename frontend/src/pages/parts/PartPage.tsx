@@ -1,35 +1,43 @@
+import type { ReactNode } from 'react';
 import { Link, useParams } from 'react-router-dom';
+import type { StoredPart } from '../../api/parts';
+import type { KindOfPart } from '../../features/parts/kindOfPart';
 import { LoadedPart } from '../../features/parts/LoadedPart';
 import { PartActions } from '../../features/parts/PartActions';
-import { PartDensity } from '../../features/parts/PartDensity';
-import { PartDerived } from '../../features/parts/PartDerived';
 import { PartParameters } from '../../features/parts/PartParameters';
 import { PartTitle } from '../../features/parts/PartTitle';
 import styles from './PartPage.module.css';
 
-export function PartPage() {
+interface PartPageProps<Stored extends StoredPart> {
+  kind: KindOfPart<Stored>;
+  density: (part: Stored) => ReactNode;
+  derived: (part: Stored) => ReactNode;
+}
+
+/** A part with its parameters, and what its kind makes of them. */
+export function PartPage<Stored extends StoredPart>({ kind, density, derived }: PartPageProps<Stored>) {
   const { id = '' } = useParams();
   return (
-    <LoadedPart id={id}>
+    <LoadedPart kind={kind} id={id}>
       {(part) => (
         <div className={styles.page}>
           <title>{`${part.partNumber} · Roothertz`}</title>
-          <Link to="/parts" className={styles.back}>
-            Parts
+          <Link to={kind.path} className={styles.back}>
+            {kind.title}s
           </Link>
           <div className={styles.head}>
-            <PartTitle part={part} />
-            <PartActions part={part} />
+            <PartTitle kind={kind} part={part} />
+            <PartActions kind={kind} part={part} />
           </div>
           <section className={styles.parameters}>
-            <h2 className={styles.heading}>Parameters of one amplifier</h2>
-            <PartParameters part={part} />
+            <h2 className={styles.heading}>{kind.parametersTitle}</h2>
+            <PartParameters fields={kind.catalogue} part={part} />
           </section>
           <section className={styles.picture}>
             <h2 className={styles.heading}>Noise density over frequency</h2>
-            <PartDensity part={part} />
+            {density(part)}
             <h2 className={styles.heading}>What follows</h2>
-            <PartDerived amplifier={part.amplifier} />
+            {derived(part)}
           </section>
           <p className={styles.caution}>
             Figures are estimates from typical data: verify on the bench and against the data sheet’s limits.

@@ -2,31 +2,34 @@ import { Button, Skeleton } from 'antd';
 import { Link } from 'react-router-dom';
 import { detailOf } from '../../api/problem';
 import { useMayDo } from '../../components/useMember';
+import type { KindOfPart } from '../../features/parts/kindOfPart';
+import { KindTabs } from '../../features/parts/KindTabs';
 import { NoParts } from '../../features/parts/NoParts';
 import { partsFacts } from '../../features/parts/partsFacts';
 import { PartsFilters } from '../../features/parts/PartsFilters';
 import { PartsGrid } from '../../features/parts/PartsGrid';
-import { isNarrowed, PARTS_FILTERS } from '../../features/parts/partsView';
+import { isNarrowed, narrowingKeys } from '../../features/parts/partsView';
 import { usePartsList } from '../../features/parts/usePartsList';
 import { usePartsView } from '../../features/parts/usePartsView';
 import styles from './PartsPage.module.css';
 
-export function PartsPage() {
-  const { view, change } = usePartsView();
-  const list = usePartsList(view);
+export function PartsPage({ kind }: { kind: KindOfPart }) {
+  const { view, change } = usePartsView(kind);
+  const list = usePartsList(kind.reader, view);
   const showAll = () =>
-    change({ search: undefined, ...Object.fromEntries(PARTS_FILTERS.map(({ key }) => [key, undefined])) });
+    change(Object.fromEntries(['search', ...narrowingKeys(kind)].map((key) => [key, undefined])));
   return (
     <div className={styles.page}>
-      <title>Parts · Roothertz</title>
+      <title>{`${kind.title}s · Roothertz`}</title>
       <div className={styles.head}>
         <h1>Parts</h1>
+        <KindTabs />
         <p className={styles.facts} role="status">
-          {!list.isPending && !list.error && partsFacts(list, view.search.trim() !== '')}
+          {!list.isPending && !list.error && partsFacts(kind, list, view.search.trim() !== '')}
         </p>
-        <NewPartLink />
+        <NewPartLink kind={kind} />
       </div>
-      <PartsFilters view={view} change={change} />
+      <PartsFilters kind={kind} view={view} change={change} />
       {list.error ? (
         <p role="alert">
           {detailOf(list.error)} <Button onClick={list.retry}>Try again</Button>
@@ -34,19 +37,19 @@ export function PartsPage() {
       ) : list.isPending ? (
         <Skeleton title={false} paragraph={{ rows: 12, width: '100%' }} />
       ) : list.parts.length === 0 ? (
-        <NoParts isNarrowed={isNarrowed(view)} onShowAll={showAll} />
+        <NoParts kind={kind} isNarrowed={isNarrowed(kind, view)} onShowAll={showAll} />
       ) : (
-        <PartsGrid parts={list.parts} sort={view.sort} onSort={(sort) => change({ sort })} />
+        <PartsGrid kind={kind} parts={list.parts} sort={view.sort} onSort={(sort) => change({ sort })} />
       )}
     </div>
   );
 }
 
-function NewPartLink() {
+function NewPartLink({ kind: { path, noun } }: { kind: KindOfPart }) {
   if (!useMayDo('parts.edit')) return null;
   return (
-    <Link to="/parts/new" className={styles.new}>
-      New op-amp
+    <Link to={`${path}/new`} className={styles.new}>
+      New {noun}
     </Link>
   );
 }

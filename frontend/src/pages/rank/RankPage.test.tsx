@@ -2,7 +2,7 @@ import type { Role } from '@roothertz/common/access';
 import type { RankingRequest } from '@roothertz/common/conditions';
 import { screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
-import { describe, expect, it, vi } from 'vitest';
+import { describe, expect, it } from 'vitest';
 import { exampleRequest } from '../../features/conditions/exampleRequest';
 import { withValue } from '../../features/conditions/requestPath';
 import { exampleRanking } from '../../test/exampleRanking';

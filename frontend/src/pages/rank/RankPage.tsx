@@ -2,53 +2,67 @@ import { ApiProblem, detailOf } from '../../api/problem';
 import { ContributorPatterns } from '../../components/charts/ContributorPatterns';
 import { sharesOf } from '../../components/charts/shares';
 import { useMayDo } from '../../components/useMember';
+import { ConditionsContext } from '../../features/conditions/ConditionsContext';
 import { ConditionsPanel } from '../../features/conditions/ConditionsPanel';
 import { NamedConditionsBar } from '../../features/conditions/NamedConditionsBar';
+import { useSearchAddress } from '../../features/conditions/search/useSearchAddress';
 import { useConditionsAddress } from '../../features/conditions/useConditionsAddress';
 import { useFormState } from '../../features/conditions/useFormState';
 import { useStartingConditions } from '../../features/conditions/useStartingConditions';
-import { useRanking } from '../../features/ranking/useRanking';
-import { useSelectedPart } from '../../features/ranking/useSelectedPart';
+import { AnswerColumn } from './AnswerColumn';
 import { BriefAnswer } from './BriefAnswer';
 import styles from './RankPage.module.css';
 import { PictureColumn } from './PictureColumn';
-import { RankingColumn } from './RankingColumn';
+import { Results } from './Results';
 import { Shortcuts } from './Shortcuts';
+import { useLookedAt } from './useLookedAt';
+import { useRanked } from './useRanked';
 
 /** The product's main page: the conditions, the ranking at them, and the picture of the selected part. */
 export function RankPage() {
   const address = useConditionsAddress();
-  const { isBlank, request, namedId, partId, show, selectPart } = address;
+  const { isBlank, request, namedId, partId, show, replace, selectPart } = address;
+  const search = useSearchAddress();
   useStartingConditions(isBlank, show);
-  const isRankable = !isBlank && address.problems.blocking.length === 0;
-  const { ranking, error, isStale, loadMore } = useRanking(request, isRankable);
-  const { form, blockedBy } = useFormState(address, refusedFields(error));
-  const selected = useSelectedPart(ranking, partId);
-  const note = noteOf(blockedBy, error, ranking !== undefined);
+  const ranked = useRanked(address, search);
+  const { error, words, problems } = ranked;
+  const { form, blockedBy } = useFormState({ ...address, problems }, refusedFields(error));
+  const lookedAt = useLookedAt(ranked, search.view, partId, request);
+  const note = noteOf(blockedBy, error, words !== undefined);
   const maySave = useMayDo('conditions.save');
   return (
     <div className={styles.page}>
       <ContributorPatterns />
-      <BriefAnswer ranking={ranking} />
+      <BriefAnswer words={words} />
       <section aria-label="Operating conditions" className={styles.conditions}>
         <NamedConditionsBar namedId={namedId} request={request} maySave={maySave} show={show} />
         {!isBlank && (
           <ConditionsPanel
             key={namedId}
             form={form}
-            shares={selected && sharesOf(selected.figures.contributions)}
+            shares={lookedAt && sharesOf(lookedAt.selected.figures.contributions)}
           />
         )}
       </section>
-      <RankingColumn
-        ranking={ranking}
-        isStale={isStale || blockedBy !== null}
-        note={note}
-        selectedId={selected?.part.id ?? null}
-        onSelect={selectPart}
-        onNearEnd={loadMore}
-      />
-      <PictureColumn ranking={ranking} selected={selected} isAwaited={!ranking && note === null} />
+      <ConditionsContext value={form}>
+        <AnswerColumn view={search.view} onView={search.show} words={words} note={note}>
+          <Results
+            ranked={ranked}
+            search={search}
+            isBlocked={blockedBy !== null}
+            selectedId={lookedAt?.selected.part.id ?? null}
+            onSelect={selectPart}
+          />
+        </AnswerColumn>
+      </ConditionsContext>
+      {search.view !== 'resistors' && (
+        <PictureColumn
+          lookedAt={lookedAt}
+          isAwaited={!words && note === null}
+          onChange={replace}
+          onSelect={selectPart}
+        />
+      )}
       <Shortcuts />
     </div>
   );

@@ -17,7 +17,7 @@ export const SHORTCUTS: readonly Shortcut[] = [
   {
     keys: 'g r',
     label: 'Ranking, at the selected part',
-    target: '#ranking .ag-row-selected [role="gridcell"]',
+    target: '#ranking',
   },
   { keys: 'g e', label: 'Parts left out', target: '#exclusions' },
   { keys: 'g p', label: 'Picture', target: '#picture [role="tab"][aria-selected="true"]' },

@@ -92,6 +92,11 @@ describe('address', () => {
     });
   });
 
+  it('holds both networks of an instrumentation stage', () => {
+    const { stage } = read('stage=instrumentation&gain=20&rg=220&rd=2k2')!.request.conditions;
+    expect(stage).toMatchObject({ gain: 20, gainResistance: 220, differenceResistance: 2200 });
+  });
+
   it('holds nothing where it names no stage', () => {
     expect(read('')).toBeNull();
     expect(read('rs=4k7')).toBeNull();
@@ -113,6 +118,7 @@ describe('address', () => {
 
   it('names an unknown stage and leaves out what belongs to another stage', () => {
     expect(read('stage=cascode')).toMatchObject({ errors: [{ field: 'conditions.stage.topology' }] });
+    expect(read('stage=difference&rl=1M&rd=1k')?.request).toEqual(exampleRequest('difference'));
     expect(read('stage=follower&gain=7&rf=1M')?.request).toEqual(exampleRequest('follower'));
   });
 });

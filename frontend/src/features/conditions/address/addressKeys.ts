@@ -12,6 +12,7 @@ export const QUANTITY_KEYS = {
   rg: 'conditions.stage.gainResistance',
   rl: 'conditions.stage.loadResistance',
   rb: 'conditions.stage.biasResistance',
+  rd: 'conditions.stage.differenceResistance',
   rf: 'conditions.stage.feedbackResistance',
   cf: 'conditions.stage.feedbackCapacitance',
   net: 'conditions.stage.network.minimumTotal',

@@ -30,7 +30,9 @@ export function Schematic({ shares }: { shares: Contributions | null }) {
       {layout.values.map((place) => (
         <SchematicValue key={place.field} place={place} />
       ))}
-      {layout.feedbackResistance && <FeedbackResistance {...layout.feedbackResistance} />}
+      {layout.feedbackResistances?.map((place) => (
+        <FeedbackResistance key={place.y} {...place} />
+      ))}
     </div>
   );
 }

@@ -1,5 +1,5 @@
 import type { ConditionFieldPath } from '@roothertz/common/conditions';
-import { SCHEMATIC_WIDTH, type ElementPlace, type SchematicLayout } from './layout';
+import { SCHEMATIC_WIDTH, type AmplifierPlace, type ElementPlace, type SchematicLayout } from './layout';
 import { SYMBOLS } from './symbols';
 
 const PALE = 0.28;
@@ -14,7 +14,7 @@ interface SchematicDrawingProps {
 
 /** The wires and the symbols of a stage; the discs lie between them and the values. */
 export function SchematicDrawing({ layout, title, isAbsent, children }: SchematicDrawingProps) {
-  const { height, wires, branches, amplifier, elements } = layout;
+  const { height, wires, branches, amplifiers, elements } = layout;
   return (
     <svg
       role="img"
@@ -26,7 +26,9 @@ export function SchematicDrawing({ layout, title, isAbsent, children }: Schemati
       {children}
       <g stroke="var(--ink)" color="var(--ink)" strokeWidth={1.4} fill="none" strokeLinejoin="round">
         <path d={wires} />
-        <path d={`M${amplifier.x} ${amplifier.y - 38}v76l58-38z`} />
+        {amplifiers.map((place) => (
+          <path key={`${place.x} ${place.y}`} d={triangle(place)} />
+        ))}
         {branches.map(({ field, path }) => (
           <path key={field} d={path} opacity={isAbsent(field) ? PALE : 1} />
         ))}
@@ -40,6 +42,10 @@ export function SchematicDrawing({ layout, title, isAbsent, children }: Schemati
       </g>
     </svg>
   );
+}
+
+function triangle({ x, y, small }: AmplifierPlace): string {
+  return small ? `M${x} ${y - 23}v46l36-23z` : `M${x} ${y - 38}v76l58-38z`;
 }
 
 function ElementSymbol({ element, absent }: { element: ElementPlace; absent: boolean }) {

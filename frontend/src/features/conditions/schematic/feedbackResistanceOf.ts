@@ -4,5 +4,14 @@ import type { OperatingConditions } from '@roothertz/common/conditions';
 export function feedbackResistanceOf({ stage, source }: OperatingConditions): number | null {
   const { topology, gain, gainResistance } = stage;
   if (topology === 'transimpedance' || gain === undefined || gainResistance === undefined) return null;
-  return topology === 'inverting' ? gain * (source.resistance + gainResistance) : gainResistance * (gain - 1);
+  switch (topology) {
+    case 'inverting':
+      return gain * (source.resistance + gainResistance);
+    case 'difference':
+      return gain * (source.resistance / 2 + gainResistance);
+    case 'instrumentation':
+      return (gainResistance * (gain - 1)) / 2;
+    default:
+      return gainResistance * (gain - 1);
+  }
 }

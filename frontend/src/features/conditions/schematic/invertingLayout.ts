@@ -6,7 +6,7 @@ export const INVERTING_LAYOUT: SchematicLayout = {
     'M20 188V162M20 138V100H28M64 100H78M108 100H139M169 100H226' +
     'M188 100V44H232M262 44H296V118M284 118H302M226 136H204V154M204 184V194',
   branches: [{ field: 'conditions.source.capacitance', path: 'M124 100V122M124 127V142' }],
-  amplifier: { x: 226, y: 118 },
+  amplifiers: [{ x: 226, y: 118 }],
   elements: [
     { symbol: 'voltageSource', x: 20, y: 150 },
     { symbol: 'ground', x: 20, y: 188 },
@@ -56,5 +56,5 @@ export const INVERTING_LAYOUT: SchematicLayout = {
     { contributor: 'amplifierCurrentSource', x: 204, y: 136, label: { x: 196, y: 152, anchor: 'end' } },
     { contributor: 'bias', x: 204, y: 169, label: { x: 226, y: 188, anchor: 'start' } },
   ],
-  feedbackResistance: { x: 247, y: 26 },
+  feedbackResistances: [{ x: 247, y: 26 }],
 };

@@ -50,19 +50,25 @@ export interface DiscPlace {
   label: { x: number; y: number; anchor: Anchor };
 }
 
+/** The left edge and the middle of an amplifier's triangle; a small one has its inputs 12 px off the middle, not 18. */
+export interface AmplifierPlace {
+  x: number;
+  y: number;
+  small?: boolean;
+}
+
 /** The drawing of one kind of stage, in CSS pixels. */
 export interface SchematicLayout {
   height: number;
   /** The path of the wires that are always there. */
   wires: string;
   branches: readonly Branch[];
-  /** The left edge and the middle of the amplifier's triangle. */
-  amplifier: { x: number; y: number };
+  amplifiers: readonly AmplifierPlace[];
   elements: readonly ElementPlace[];
   values: readonly ValuePlace[];
   discs: readonly DiscPlace[];
-  /** Where the feedback resistance stands that follows from the gain. */
-  feedbackResistance?: { x: number; y: number };
+  /** Where the feedback resistance stands that follows from the gain, once or for each of two alike. */
+  feedbackResistances?: readonly { x: number; y: number }[];
 }
 
 export const SCHEMATIC_WIDTH = 308;

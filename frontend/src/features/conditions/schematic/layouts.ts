@@ -1,4 +1,6 @@
 import type { StageKind } from '../stageKind';
+import { DIFFERENCE_LAYOUT } from './differenceLayout';
+import { INSTRUMENTATION_LAYOUT } from './instrumentationLayout';
 import { INVERTING_LAYOUT } from './invertingLayout';
 import type { SchematicLayout } from './layout';
 import { FOLLOWER_LAYOUT, NON_INVERTING_LAYOUT } from './nonInvertingLayout';
@@ -9,4 +11,6 @@ export const LAYOUTS: Record<StageKind, SchematicLayout> = {
   follower: FOLLOWER_LAYOUT,
   inverting: INVERTING_LAYOUT,
   transimpedance: TRANSIMPEDANCE_LAYOUT,
+  difference: DIFFERENCE_LAYOUT,
+  instrumentation: INSTRUMENTATION_LAYOUT,
 };

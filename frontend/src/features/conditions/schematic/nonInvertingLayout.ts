@@ -50,7 +50,7 @@ export const FOLLOWER_LAYOUT: SchematicLayout = {
   height: 200,
   wires: `${WIRES}V140H296V84`,
   branches: BRANCHES,
-  amplifier: { x: 226, y: 84 },
+  amplifiers: [{ x: 226, y: 84 }],
   elements: ELEMENTS,
   values: VALUES,
   discs: DISCS,
@@ -60,7 +60,7 @@ export const NON_INVERTING_LAYOUT: SchematicLayout = {
   height: 254,
   wires: `${WIRES}V194M212 172H240M270 172H296V84M212 224V234`,
   branches: BRANCHES,
-  amplifier: { x: 226, y: 84 },
+  amplifiers: [{ x: 226, y: 84 }],
   elements: [
     ...ELEMENTS,
     { symbol: 'node', x: 212, y: 172 },
@@ -78,5 +78,5 @@ export const NON_INVERTING_LAYOUT: SchematicLayout = {
     { contributor: 'amplifierCurrentFeedback', x: 212, y: 102, label: { x: 206, y: 166, anchor: 'end' } },
     { contributor: 'feedback', x: 212, y: 209, label: { x: 236, y: 224, anchor: 'start' } },
   ],
-  feedbackResistance: { x: 255, y: 156 },
+  feedbackResistances: [{ x: 255, y: 156 }],
 };

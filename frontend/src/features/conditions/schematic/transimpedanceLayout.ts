@@ -9,7 +9,7 @@ export const TRANSIMPEDANCE_LAYOUT: SchematicLayout = {
     { field: 'conditions.source.capacitance', path: 'M130 112V159M130 164V200' },
     { field: 'conditions.stage.feedbackCapacitance', path: 'M215 36H244.5M249.5 36H279' },
   ],
-  amplifier: { x: 226, y: 130 },
+  amplifiers: [{ x: 226, y: 130 }],
   elements: [
     { symbol: 'currentSource', x: 24, y: 162 },
     { symbol: 'ground', x: 24, y: 200 },

@@ -1,7 +1,7 @@
 import { leastCurrentNoise } from '@roothertz/common/noise';
 import type { Amplifier } from '@roothertz/common/parts';
-import type { CurvePoint, CurvesPlot } from '../../components/charts/curve';
-import { logSteps } from '../../components/charts/logRange';
+import type { CurvePoint, CurvesPlot } from '../../../components/charts/curve';
+import { logSteps } from '../../../components/charts/logRange';
 
 const FROM = 0.1;
 const TO = 1e5;

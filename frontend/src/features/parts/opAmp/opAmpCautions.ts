@@ -12,8 +12,8 @@ const MISSING: readonly [OpAmpParameterKey, Caution][] = [
   ['supplyMaximum', 'supply-unknown'],
 ];
 
-/** What the part's unknown figures mean for a ranking, in words. */
-export function partCautions(amplifier: Amplifier): string[] {
+/** What the op-amp's unknown figures mean for a ranking, in words. */
+export function opAmpCautions(amplifier: Amplifier): string[] {
   const cautions = MISSING.filter(([key]) => amplifier[key] === null).map(([, caution]) => caution);
   return [...new Set(cautions)].map((caution) => CAUTION_DETAILS[caution]);
 }

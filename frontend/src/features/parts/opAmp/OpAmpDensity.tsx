@@ -1,13 +1,13 @@
 import { useMemo } from 'react';
-import type { OpAmp } from '../../api/opAmps';
-import type { CurvesPlot } from '../../components/charts/curve';
-import { CurvesChart } from '../../components/charts/CurvesChart';
+import type { OpAmp } from '../../../api/opAmps';
+import type { CurvesPlot } from '../../../components/charts/curve';
+import { CurvesChart } from '../../../components/charts/CurvesChart';
 import { currentPlot, voltagePlot } from './densityPlots';
 
 const HEIGHT = 190;
 
-/** How the two noise generators of a part go over frequency. */
-export function PartDensity({ part: { partNumber, amplifier } }: { part: OpAmp }) {
+/** How the two noise generators of an op-amp go over frequency. */
+export function OpAmpDensity({ part: { partNumber, amplifier } }: { part: OpAmp }) {
   const voltage = useMemo(() => voltagePlot(partNumber, amplifier), [partNumber, amplifier]);
   const current = useMemo(() => currentPlot(partNumber, amplifier), [partNumber, amplifier]);
   return (

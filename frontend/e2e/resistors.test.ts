@@ -1,0 +1,151 @@
+import type { Browser, Page } from 'playwright-core';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { launchBrowser, PHONE, visit } from './support/browser';
+import { screenshot } from './support/screenshot';
+import { signIn } from './support/session';
+
+const LIST = '/parts/resistors';
+
+let browser: Browser;
+beforeAll(async () => {
+  browser = await launchBrowser();
+});
+afterAll(() => browser.close());
+
+function uniqueNumber(): string {
+  return `E2E-R-${Date.now().toString(36)}-${Math.random().toString(36).slice(2, 6)}`;
+}
+
+function rows(page: Page) {
+  return page.getByRole('region', { name: 'Resistors' }).locator('a');
+}
+
+async function fill(page: Page, label: string, text: string): Promise<void> {
+  await page.getByLabel(label, { exact: true }).fill(text);
+}
+
+async function createResistor(page: Page, partNumber: string): Promise<string> {
+  await page.goto(`${LIST}/new`);
+  await fill(page, 'manufacturer', 'Harbour Test Works');
+  await fill(page, 'part number', partNumber);
+  await fill(page, 'resistance R', '4k7');
+  await fill(page, 'power rating P_r', '125 mW');
+  await page.getByRole('button', { name: 'Add to your library' }).click();
+  await page.getByRole('heading', { level: 1, name: partNumber }).waitFor();
+  return page.url();
+}
+
+async function removeResistor(page: Page, address: string): Promise<void> {
+  await page.goto(address);
+  await page.getByRole('button', { name: 'Delete' }).click();
+  await page.getByText('is deleted').waitFor();
+}
+
+describe('the resistors', () => {
+  it('stand beside the op-amps and are searched on the server where not all are loaded', async () => {
+    const { page, problems, close } = await visit(browser);
+    await signIn(page, 'engineer', '/parts');
+    await page.getByRole('link', { name: 'Resistors' }).click();
+    await rows(page).first().waitFor();
+    await page.getByText(/\d parts, of which the first 1.000 are shown/).waitFor();
+    await screenshot(page, 'resistors');
+    await page.getByLabel('Search parts').fill('VCC-1-36K0');
+    await page.getByText(/found among \d.\d+ parts/).waitFor();
+    expect(await rows(page).first().textContent()).toBe('VCC-1-36K0');
+    await rows(page).first().click();
+    await page.getByText(/^36 kΩ ±10 % · carbon composition/).waitFor();
+    expect(new URL(page.url()).pathname).toMatch(/^\/parts\/resistors\/\d+$/);
+    expect(problems).toEqual([]);
+    await close();
+  });
+
+  it('are narrowed by technology and by values typed as one writes them', async () => {
+    const { page, problems, close } = await visit(browser);
+    await signIn(page, 'engineer', `${LIST}?technology=thick-film&library=curated&sort=-noiseIndex`);
+    await fill(page, 'resistance from', '4k7');
+    await page.keyboard.press('Enter');
+    await fill(page, 'resistance to', '0.0047 MΩ');
+    await page.keyboard.press('Enter');
+    await page.getByText(/^\d+ parts: \d+ curated, 0 of your own/).waitFor();
+    const values = await page.locator('[col-id=resistance][role=gridcell]').allTextContents();
+    expect(new Set(values)).toEqual(new Set(['4.70\u2009kΩ']));
+    const indices = await page.locator('[col-id=noiseIndex][role=gridcell]').allTextContents();
+    const figures = indices.map((text) => Number(text.replace('−', '-')));
+    expect(figures).toEqual([...figures].sort((one, other) => other - one));
+    await page.reload();
+    expect(await page.getByLabel('resistance to').inputValue()).toBe('4.7 kΩ');
+    await fill(page, 'resistance to', '100');
+    await page.keyboard.press('Enter');
+    await page.getByText('no value lies between these').waitFor();
+    await page.getByRole('button', { name: 'show all parts' }).click();
+    await page.getByText(/of which the first/).waitFor();
+    expect(problems).toEqual([]);
+    await close();
+  });
+
+  it('are created, edited, deleted and brought back by a librarian', async () => {
+    const { page, problems, close } = await visit(browser);
+    await signIn(page, 'librarian', LIST);
+    const partNumber = uniqueNumber();
+    await createResistor(page, partNumber);
+    await page.getByText('The noise index is unknown').waitFor();
+    await page.getByRole('link', { name: 'Edit' }).click();
+    await fill(page, 'noise index NI', '-10');
+    await screenshot(page, 'resistor-edit');
+    await page.getByRole('button', { name: 'Save' }).click();
+    await page.getByText('316\u2009nV/V').waitFor();
+    await fill(page, 'direct voltage', '10');
+    await page.keyboard.press('Enter');
+    await page.getByRole('img', { name: /excess at 10.V/ }).waitFor();
+    await screenshot(page, 'resistor');
+    await page.getByRole('button', { name: 'Delete' }).click();
+    await page.getByText(`${partNumber} is deleted`).waitFor();
+    expect(new URL(page.url()).pathname).toBe(LIST);
+    await page.getByRole('button', { name: 'Undo' }).click();
+    await page.getByRole('heading', { level: 1, name: partNumber }).waitFor();
+    await page.getByText('316\u2009nV/V').waitFor();
+    await removeResistor(page, page.url());
+    expect(problems).toEqual([]);
+    await close();
+  });
+
+  it('show what a second librarian changed meanwhile, value by value', async () => {
+    const { page, problems, close } = await visit(browser, { expected: [409] });
+    await signIn(page, 'librarian', LIST);
+    const address = await createResistor(page, uniqueNumber());
+    const other = await visit(browser);
+    await signIn(other.page, 'admin', new URL(address).pathname);
+    await page.getByRole('link', { name: 'Edit' }).click();
+    await page.getByRole('button', { name: 'Save' }).waitFor();
+    await other.page.getByRole('link', { name: 'Edit' }).click();
+    await fill(other.page, 'tolerance', '0.1 %');
+    await other.page.getByRole('button', { name: 'Save' }).click();
+    await other.page.getByLabel('Parameters').getByText('0.1 %').waitFor();
+    await fill(page, 'tolerance', '1 %');
+    await page.getByRole('button', { name: 'Save' }).click();
+    await page.getByRole('alertdialog').waitFor();
+    await page.getByRole('radio', { name: 'Take theirs: 0.1 %' }).check();
+    await page.getByRole('button', { name: 'Save with these values' }).click();
+    await page.getByLabel('Parameters').getByText('0.1 %').waitFor();
+    await removeResistor(page, address);
+    expect([...problems, ...other.problems]).toEqual([]);
+    await other.close();
+    await close();
+  });
+
+  it('fit a narrow screen', async () => {
+    const { page, problems, close } = await visit(browser, { viewport: PHONE });
+    await signIn(page, 'librarian', `${LIST}?technology=metal-foil`);
+    await rows(page).first().waitFor();
+    const first = (await rows(page).first().getAttribute('href'))!;
+    for (const path of [LIST, first, `${LIST}/new`]) {
+      await page.goto(path);
+      await page.getByRole('heading', { level: 1 }).waitFor();
+      expect(await page.evaluate(() => document.documentElement.scrollWidth)).toBeLessThanOrEqual(
+        PHONE.width,
+      );
+    }
+    expect(problems).toEqual([]);
+    await close();
+  });
+});

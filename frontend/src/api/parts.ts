@@ -1,0 +1,73 @@
+import { keepPreviousData, queryOptions } from '@tanstack/react-query';
+import type {
+  Approval,
+  InputType,
+  Library,
+  LibraryPart,
+  Lifecycle,
+  ParameterGroup,
+  Technology,
+} from '@roothertz/common/parts';
+
+/** The figures of a part and the choice of words among them, by their key. */
+export type Figures = Readonly<Record<string, number | string | null>>;
+
+/** A part of any kind as the server keeps it; its figures stand under the group of its kind. */
+export interface StoredPart extends LibraryPart, Partial<Record<ParameterGroup, Figures>> {
+  id: string;
+  library: Library;
+  version: number;
+  updatedAt: string;
+}
+
+/** What a list of parts is narrowed and sorted by; each kind takes its own share of it. */
+export interface PartListQuery {
+  search?: string;
+  library?: Library[];
+  inputType?: InputType[];
+  technology?: Technology[];
+  lifecycle?: Lifecycle[];
+  approval?: Approval[];
+  resistanceFrom?: number;
+  resistanceTo?: number;
+  sort?: string;
+  limit?: number;
+  offset?: number;
+}
+
+/** The calls that read and delete parts of a kind. */
+export interface PartsReader<Stored extends StoredPart = StoredPart> {
+  /** As the server calls them: `op-amps`. */
+  name: string;
+  list: (query: PartListQuery, signal: AbortSignal) => Promise<{ items: Stored[]; total: number }>;
+  find: (id: string, signal: AbortSignal) => Promise<Stored>;
+  remove: (id: string, version: number) => Promise<void>;
+}
+
+/** All calls for parts of a kind. */
+export interface PartsApi<Part extends LibraryPart, Stored extends StoredPart> extends PartsReader<Stored> {
+  create: (part: Part) => Promise<Stored>;
+  update: (id: string, version: number, part: Part) => Promise<Stored>;
+}
+
+/** The most that the server gives in one page. */
+export const LONGEST_PAGE = 1000;
+
+export function partKey({ name }: PartsReader, id: string) {
+  return [name, 'one', id] as const;
+}
+
+export function partQuery<Stored extends StoredPart>(reader: PartsReader<Stored>, id: string) {
+  return queryOptions({
+    queryKey: partKey(reader, id),
+    queryFn: ({ signal }) => reader.find(id, signal),
+  });
+}
+
+export function partsQuery<Stored extends StoredPart>(reader: PartsReader<Stored>, query: PartListQuery) {
+  return queryOptions({
+    queryKey: [reader.name, 'list', query],
+    queryFn: ({ signal }) => reader.list(query, signal),
+    placeholderData: keepPreviousData,
+  });
+}

@@ -1,0 +1,57 @@
+import type { ResistorCaution } from '@roothertz/common/noise';
+import { TECHNOLOGY_LABELS } from '@roothertz/common/parts';
+import { formatQuantity } from '@roothertz/common/units';
+import type { ResistorItem } from '../../../api/resistorRanking';
+import { commonUnit, inUnit } from '../noiseUnit';
+import type { ShownResistors } from './useResistors';
+
+export interface ResistorRow {
+  id: string;
+  place: number;
+  part: { id: string; name: string; maker: string; cautions: ResistorCaution[] };
+  technology: string;
+  value: string;
+  thermal: string;
+  excess: string;
+  total: string;
+  aboveThermal: string;
+  dissipation: string;
+}
+
+/** The rows of the resistors, all noise in one unit. */
+export function resistorRows({ items }: Pick<ShownResistors, 'items'>): {
+  unit: string;
+  rows: ResistorRow[];
+} {
+  const unit = commonUnit(items[0]?.thermalRms ?? 1, 'voltage');
+  return { unit, rows: items.map((item) => rowOf(item, unit)) };
+}
+
+function rowOf(item: ResistorItem, unit: string): ResistorRow {
+  const { part, rank, excessRms, aboveThermal, cautions } = item;
+  const { technology } = part.resistor;
+  return {
+    id: part.id,
+    place: rank,
+    part: { id: part.id, name: part.partNumber, maker: part.manufacturer, cautions },
+    technology: technology === null ? 'unknown' : TECHNOLOGY_LABELS[technology],
+    value: valueText(part.resistor),
+    thermal: inUnit(item.thermalRms, unit),
+    excess: excessRms === null ? 'unknown' : inUnit(excessRms, unit),
+    total: excessRms === null ? `≥\u2009${inUnit(item.totalRms, unit)}` : inUnit(item.totalRms, unit),
+    aboveThermal: excessRms === null ? '–' : formatQuantity(aboveThermal, 'decibel'),
+    dissipation: dissipationText(item),
+  };
+}
+
+function valueText({ resistance, tolerance }: ResistorItem['part']['resistor']): string {
+  const value = formatQuantity(resistance, 'resistance', { trim: true, digits: 4 });
+  return tolerance === null ? value : `${value} ±${formatQuantity(tolerance, 'fraction', { trim: true })}`;
+}
+
+/** "4.05 mW of 300 mW" */
+function dissipationText({ dissipation, part: { resistor } }: ResistorItem): string {
+  const made = formatQuantity(dissipation, 'power');
+  if (resistor.powerRating === null) return `${made}, rating unknown`;
+  return `${made} of ${formatQuantity(resistor.powerRating, 'power', { trim: true })}`;
+}

@@ -1,0 +1,111 @@
+import { screen, waitFor, within } from '@testing-library/react';
+import userEvent from '@testing-library/user-event';
+import { describe, expect, it } from 'vitest';
+import { opAmp, resistor, sessionOf } from '../../test/factories';
+import { fakeServer, json, problem } from '../../test/fakeServer';
+import { renderApp } from '../../test/renderApp';
+
+const SESSION = { 'GET /api/auth/me': () => json(sessionOf('librarian')) };
+const OTHER = resistor({ id: '62', partNumber: 'TR-08-9K10' });
+
+function listed(items: unknown[], total = items.length) {
+  return () => json({ items, total });
+}
+
+describe('the lists of parts', () => {
+  it('stand under a tab for each kind', async () => {
+    const asked = fakeServer({
+      ...SESSION,
+      'GET /api/op-amps': listed([opAmp()]),
+      'GET /api/resistors': listed([resistor(), OTHER]),
+    });
+    const router = renderApp('/parts');
+    expect(await screen.findByText('1 part: 0 curated, 1 of your own')).toBeInTheDocument();
+    const tabs = screen.getByRole('navigation', { name: 'Kinds of part' });
+    expect(within(tabs).getByRole('link', { name: 'Op-amps' })).toHaveAttribute('aria-current', 'page');
+    await userEvent.click(within(tabs).getByRole('link', { name: 'Resistors' }));
+    expect(await screen.findByText('2 parts: 0 curated, 2 of your own')).toBeInTheDocument();
+    expect(router.state.location.pathname).toBe('/parts/resistors');
+    expect(screen.getByRole('link', { name: 'New resistor' })).toHaveAttribute(
+      'href',
+      '/parts/resistors/new',
+    );
+    expect(asked.map(({ route }) => route)).toEqual([
+      'GET /api/auth/me',
+      'GET /api/op-amps',
+      'GET /api/resistors',
+    ]);
+  });
+
+  it('ask the server for the filters of their kind', async () => {
+    const asked = fakeServer({ ...SESSION, 'GET /api/resistors': listed([resistor()]) });
+    renderApp(
+      '/parts/resistors?technology=thick-film,wirewound&resistanceFrom=1000&inputType=jfet&sort=-noiseIndex',
+    );
+    await screen.findByText(/^1 part:/);
+    const { searchParams } = asked.at(-1)!.url;
+    expect(searchParams.getAll('technology')).toEqual(['wirewound', 'thick-film']);
+    searchParams.delete('technology');
+    expect(Object.fromEntries(searchParams)).toEqual({
+      resistanceFrom: '1000',
+      sort: '-noiseIndex',
+      limit: '1000',
+    });
+  });
+
+  it('are narrowed by values typed as one writes them, kept in the address', async () => {
+    const asked = fakeServer({ ...SESSION, 'GET /api/resistors': listed([resistor()]) });
+    const router = renderApp('/parts/resistors');
+    await userEvent.type(await screen.findByLabelText('resistance from'), '4k7{Enter}');
+    await userEvent.type(screen.getByLabelText('resistance to'), '0.01 MΩ{Enter}');
+    await waitFor(() => expect(router.state.location.search).toBe('?resistanceFrom=4700&resistanceTo=10000'));
+    await waitFor(() => expect(asked.at(-1)!.url.searchParams.get('resistanceTo')).toBe('10000'));
+  });
+
+  it('say that a window from much to little holds nothing', async () => {
+    fakeServer({ ...SESSION, 'GET /api/resistors': listed([]) });
+    renderApp('/parts/resistors?resistanceFrom=5000&resistanceTo=100');
+    expect(await screen.findByText('no value lies between these')).toBeInTheDocument();
+    await userEvent.click(await screen.findByRole('button', { name: 'show all parts' }));
+    expect(screen.queryByText('no value lies between these')).not.toBeInTheDocument();
+  });
+
+  it('search what isn’t loaded on the server', async () => {
+    const asked = fakeServer({
+      ...SESSION,
+      'GET /api/resistors': (_body, url) =>
+        url.searchParams.has('search')
+          ? json({ items: [OTHER], total: 1 })
+          : json({ items: [resistor()], total: 7000 }),
+    });
+    renderApp('/parts/resistors');
+    expect(await screen.findByText(/of which the first 1 are shown/)).toBeInTheDocument();
+    await userEvent.click(screen.getByLabelText('Search parts'));
+    await userEvent.paste('9k10');
+    expect(await screen.findByText(/^1 part found among 7\s000 parts/)).toBeInTheDocument();
+    expect(asked.at(-1)!.url.searchParams.get('search')).toBe('9k10');
+  });
+
+  it('say nothing is found only when the server has said so', async () => {
+    fakeServer({
+      ...SESSION,
+      'GET /api/resistors': (_body, url) =>
+        json({ items: url.searchParams.has('search') ? [] : [resistor()], total: 7000 }),
+    });
+    renderApp('/parts/resistors');
+    await screen.findByText(/of which the first 1 are shown/);
+    await userEvent.click(screen.getByLabelText('Search parts'));
+    await userEvent.paste('zzzz');
+    expect(screen.queryByText(/No part matches/)).not.toBeInTheDocument();
+    expect(await screen.findByText(/No part matches/)).toBeInTheDocument();
+  });
+
+  it('say what the server refuses', async () => {
+    fakeServer({
+      ...SESSION,
+      'GET /api/resistors': () => problem(400, 'request.invalid', { detail: 'limit: too many' }),
+    });
+    renderApp('/parts/resistors');
+    expect(await screen.findByRole('alert')).toHaveTextContent('limit: too many');
+  });
+});
