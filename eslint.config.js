@@ -51,7 +51,7 @@ export default tseslint.config(
       ],
     },
     rules: {
-      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_' }],
+      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', ignoreRestSiblings: true }],
       'import-x/no-cycle': 'error',
       'import-x/no-default-export': 'error',
       'import-x/no-restricted-paths': [

@@ -54,7 +54,9 @@ describe('currencyError', () => {
 describe('isDay', () => {
   it('takes days of the calendar and nothing else', () => {
     expect(['2028-02-29', '2026-12-31'].every(isDay)).toBe(true);
-    expect(['2026-02-29', '2026-13-01', '1999-12-31', '2200-01-01', '2026-1-1', 20261201, null].some(isDay)).toBe(false);
+    expect(
+      ['2026-02-29', '2026-13-01', '1999-12-31', '2200-01-01', '2026-1-1', 20261201, null].some(isDay),
+    ).toBe(false);
   });
 });
 
