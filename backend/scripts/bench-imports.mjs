@@ -125,7 +125,7 @@ async function reached(ask, place, state) {
     const answer = await ask('GET', place);
     if (answer.state === state) return answer;
     if (answer.progress === null) throw new Error(`the import is ${answer.state}: ${answer.failure}`);
-    await delay(50);
+    await delay(200);
   }
 }
 

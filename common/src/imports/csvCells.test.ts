@@ -18,7 +18,12 @@ describe('harmlessCell', () => {
   });
 
   it('leaves a signed number alone where the cell may hold a figure', () => {
-    expect(['-41.5', '−0,5', '+3', '-3+A1'].map(harmlessUnknownCell)).toEqual(['-41.5', '−0,5', '+3', "'-3+A1"]);
+    expect(['-41.5', '−0,5', '+3', '-3+A1'].map(harmlessUnknownCell)).toEqual([
+      '-41.5',
+      '−0,5',
+      '+3',
+      "'-3+A1",
+    ]);
   });
 
   it('gives every text back', () => {

@@ -2,9 +2,9 @@ import {
   expectedColumns,
   type LibraryPart,
   type PartCatalogue,
-  type PartColumn,
   partOfValues,
   pathOfColumn,
+  type Reading,
   readMissingColumn,
   readPartCell,
   valuesOfPart,
@@ -29,20 +29,20 @@ export function rowJudge<Part extends LibraryPart>(
   catalogue: PartCatalogue<Part>,
   reader: ImportRowReader,
 ): (reading: Extract<ImportRowReading, { ok: true }>, known: KnownParts<Part>) => RowVerdict<Part> {
-  const expected = expectedColumns(catalogue).map((column): [string, PartColumn] => [
-    pathOfColumn(catalogue, column),
-    column,
-  ]);
+  const defaults = expectedColumns(catalogue).map((column): [string, Reading<PartValue>] => {
+    const path = pathOfColumn(catalogue, column);
+    return [
+      path,
+      reader.has(path) ? readPartCell(catalogue, column, '') : readMissingColumn(catalogue, column),
+    ];
+  });
   const withDefaults = (reading: Extract<ImportRowReading, { ok: true }>) => {
     const values = new Map(reading.stated);
     const errors: RowError[] = [];
-    for (const [path, column] of expected) {
+    for (const [path, fallback] of defaults) {
       if (values.has(path)) continue;
-      const read = reader.has(path)
-        ? readPartCell(catalogue, column, '')
-        : readMissingColumn(catalogue, column);
-      if (read.ok) values.set(path, read.value);
-      else errors.push(reader.errorAt(path, read.message, reading.cells));
+      if (fallback.ok) values.set(path, fallback.value);
+      else errors.push(reader.errorAt(path, fallback.message, reading.cells));
     }
     return { values, errors };
   };

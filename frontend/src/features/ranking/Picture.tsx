@@ -19,8 +19,8 @@ const TABS = [
 ] as const;
 type Tab = (typeof TABS)[number]['key'];
 
-const LARGE = 214;
-const SMALL = 152;
+const LARGE = 204;
+const SMALL = 162;
 
 interface PictureProps {
   selected: SelectedPart;

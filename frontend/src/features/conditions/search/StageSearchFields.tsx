@@ -17,8 +17,8 @@ export function StageSearchFields({ form }: { form: StageSearchForm }) {
       {stageKindOf(stage) !== 'follower' && (
         <span className={styles.label}>
           {stage.topology === 'transimpedance'
-            ? 'R_f is sought near the schematic’s.'
-            : 'R_g and R_f are sought: the schematic’s don’t count here.'}
+            ? 'The feedback resistor is sought near the schematic’s value.'
+            : 'Both resistors are sought: the schematic’s don’t count here.'}
         </span>
       )}
     </div>

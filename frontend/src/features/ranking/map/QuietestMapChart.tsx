@@ -5,7 +5,7 @@ import { useTokens } from '../../../components/useTokens';
 import { MapDrawing } from './MapDrawing';
 import { MAP_HEIGHT, MAP_WIDTH, mapGeometry } from './mapGeometry';
 import { MapMarks } from './MapMarks';
-import { cellText } from './mapWords';
+import { cellText, presentText } from './mapWords';
 import styles from './QuietestMap.module.css';
 import { useMapCursor } from './useMapCursor';
 
@@ -42,7 +42,7 @@ export function QuietestMapChart({ map, selectedId, present, onMove, ref }: Quie
         </MapDrawing>
       </div>
       <p className={styles.cell} aria-live="polite">
-        {cursor ? cellText(map, cursor) : `Present conditions: ${cellText(map, presentCell)}`}
+        {cursor ? cellText(map, cursor) : presentText(map, presentCell, present)}
       </p>
     </>
   );

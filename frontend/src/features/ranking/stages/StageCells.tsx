@@ -35,14 +35,29 @@ export function NetworkCell({ parts }: { parts: StageRow['network'] }) {
   );
 }
 
+export function NetworkHeading({ hasGainResistor }: { hasGainResistor: boolean }) {
+  return (
+    <span>
+      {hasGainResistor && (
+        <>
+          R<sub>g</sub>,{' '}
+        </>
+      )}
+      R<sub>f</sub>
+    </span>
+  );
+}
+
+/** The gain over the number of channels in parallel, where there is more than one. */
 export function GainCell({ text, channelsInParallel }: StageRow['gain']) {
   return (
     <span className={styles.two}>
       {text && <span>{text}</span>}
       {channelsInParallel > 1 && (
-        <span className={styles.second}>
+        <span className={styles.second} title={`${channelsInParallel} channels in parallel`}>
           {channelsInParallel}
-          {'\u2009'}× parallel
+          <span aria-hidden="true">{'\u2009'}∥</span>
+          <span className="visually-hidden"> channels in parallel</span>
         </span>
       )}
     </span>

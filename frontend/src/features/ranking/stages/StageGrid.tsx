@@ -19,7 +19,8 @@ const TWO_LINES = 42;
 /** The whole stages as rows under the source floor. */
 export function StageGrid({ stages, ...state }: StageGridProps) {
   const { unit, floor, rows } = useMemo(() => stageRows(stages), [stages]);
-  const columns = useMemo(() => stageColumns(unit), [unit]);
+  const { topology } = stages.request.conditions.stage;
+  const columns = useMemo(() => stageColumns(unit, topology), [unit, topology]);
   const floorRows = useMemo(() => [floor], [floor]);
   return (
     <>

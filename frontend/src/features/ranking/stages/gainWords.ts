@@ -7,10 +7,14 @@ export function wantedGain({ topology, gain, feedbackResistance }: SoughtStage):
 }
 
 /** "a gain of 100", "1 GΩ" */
-export function gainText({ topology }: Pick<SoughtStage, 'topology'>, gain: number): string {
-  return topology === 'transimpedance'
-    ? formatQuantity(gain, 'resistance', { trim: true, digits: 6 })
-    : `a gain of ${formatQuantity(gain, 'gain', { digits: 6 })}`;
+export function gainText(stage: Pick<SoughtStage, 'topology'>, gain: number): string {
+  const figure = gainFigure(stage, gain);
+  return stage.topology === 'transimpedance' ? figure : `a gain of ${figure}`;
+}
+
+export function gainFigure({ topology }: Pick<SoughtStage, 'topology'>, gain: number): string {
+  const kind = topology === 'transimpedance' ? 'resistance' : 'gain';
+  return formatQuantity(gain, kind, { trim: true, digits: 6 });
 }
 
 const WIDEST = STAGE_SEARCH_FIELDS['conditions.stage.gainTolerance'].bounds.to;

@@ -5,7 +5,7 @@ import type { Piece } from '../answer';
 import type { AnswerWords } from '../AnswerBlock';
 import { emptyAdvice } from '../exclusionWords';
 import { rmsText } from '../noiseUnit';
-import { gainText, nearestGainAdvice, wantedGain } from './gainWords';
+import { gainFigure, gainText, nearestGainAdvice, wantedGain } from './gainWords';
 import type { ShownStages } from './useStages';
 
 /** Which whole stage is quietest, or why there is none and what to change. */
@@ -63,13 +63,16 @@ function followingSentences(
 }
 
 function gainSentence(gain: number, stage: SoughtStage): string {
-  const wanted = wantedGain(stage);
-  const off = gain / wanted - 1;
-  const text = gainText(stage, gain);
-  if (Math.abs(off) < 5e-6) return `It has just ${text}.`;
+  const off = gain / wantedGain(stage) - 1;
+  const subject = stage.topology === 'transimpedance' ? 'R_f' : 'The gain';
+  if (Math.abs(off) < EXACT) return `${subject} is just as wanted.`;
   const side = off > 0 ? 'above' : 'below';
-  return `It has ${text}, ${formatQuantity(Math.abs(off), 'fraction', { digits: 2 })} ${side} the wanted one.`;
+  const far = formatQuantity(Math.abs(off), 'fraction', { digits: 2 });
+  return `${subject} is ${gainFigure(stage, gain)}, ${far} ${side} the wanted one.`;
 }
+
+/** What rounding leaves of a gain that two decimal values give exactly. */
+const EXACT = 1e-9;
 
 function networkNoun({ topology }: Pick<SoughtStage, 'topology'>): string {
   return topology === 'transimpedance' ? 'resistor' : 'resistor pair';

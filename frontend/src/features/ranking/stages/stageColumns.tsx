@@ -1,6 +1,7 @@
+import type { Topology } from '@roothertz/common/conditions';
 import type { ColDef, ICellRendererParams } from 'ag-grid-community';
 import { BudgetBar } from '../BudgetBar';
-import { GainCell, NetworkCell, StageNoiseCell, StagePartCell } from './StageCells';
+import { GainCell, NetworkCell, NetworkHeading, StageNoiseCell, StagePartCell } from './StageCells';
 import type { StageRow } from './stageRows';
 
 type Cell<Value> = ICellRendererParams<StageRow, Value>;
@@ -8,7 +9,8 @@ type Cell<Value> = ICellRendererParams<StageRow, Value>;
 const RIGHT: ColDef<StageRow> = { cellStyle: { textAlign: 'right' }, headerClass: 'ag-right-aligned-header' };
 
 /** The columns of whole stages; the noise column's heading carries the one unit of its figures. */
-export function stageColumns(unit: string): ColDef<StageRow>[] {
+export function stageColumns(unit: string, topology: Topology): ColDef<StageRow>[] {
+  const isTransimpedance = topology === 'transimpedance';
   return [
     {
       colId: 'place',
@@ -26,15 +28,19 @@ export function stageColumns(unit: string): ColDef<StageRow>[] {
       cellRenderer: ({ value }: Cell<StageRow['part']>) => value && <StagePartCell {...value} />,
     },
     {
+      ...RIGHT,
+      colId: 'noise',
+      field: 'noise',
+      headerName: `noise, ${unit} rms`,
+      width: 98,
+      cellRenderer: ({ value }: Cell<StageRow['noise']>) => value && <StageNoiseCell {...value} />,
+    },
+    {
       colId: 'network',
       field: 'network',
-      headerName: 'R_g, R_f',
-      width: 152,
-      headerComponent: () => (
-        <span>
-          R<sub>g</sub>, R<sub>f</sub>
-        </span>
-      ),
+      headerName: isTransimpedance ? 'R_f' : 'R_g, R_f',
+      width: 146,
+      headerComponent: () => <NetworkHeading hasGainResistor={!isTransimpedance} />,
       cellRenderer: ({ value }: Cell<StageRow['network']>) => value && <NetworkCell parts={value} />,
     },
     {
@@ -42,23 +48,16 @@ export function stageColumns(unit: string): ColDef<StageRow>[] {
       colId: 'gain',
       field: 'gain',
       headerName: 'gain',
-      width: 76,
+      width: 50,
+      hide: isTransimpedance,
       cellRenderer: ({ value }: Cell<StageRow['gain']>) => value && <GainCell {...value} />,
-    },
-    {
-      ...RIGHT,
-      colId: 'noise',
-      field: 'noise',
-      headerName: `noise, ${unit} rms`,
-      width: 100,
-      cellRenderer: ({ value }: Cell<StageRow['noise']>) => value && <StageNoiseCell {...value} />,
     },
     {
       colId: 'budget',
       field: 'budget',
       headerName: 'budget, power',
-      width: 136,
-      cellStyle: { display: 'flex', alignItems: 'center', paddingLeft: 6, paddingRight: 2 },
+      width: 134,
+      cellStyle: { display: 'flex', alignItems: 'center', paddingLeft: 4, paddingRight: 2 },
       cellRenderer: ({ value }: Cell<StageRow['budget']>) => value && <BudgetBar {...value} />,
     },
   ];
