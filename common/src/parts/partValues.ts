@@ -23,12 +23,21 @@ export function partOfValues<Part>({ group }: ListedFields, values: ReadonlyMap<
   const parameters: Record<string, unknown> = {};
   const origins: Record<string, string> = {};
   for (const [path, value] of values) {
-    const [place, key] = path.split('.');
+    const [place, key] = pieces(path);
     if (place === group) parameters[key] = value;
     else if (place !== 'origins') part[place] = value;
     else if (value !== null) origins[key] = value as string;
   }
   return { ...part, [group]: parameters, origins: originsOfKnown(parameters, origins as object) } as Part;
+}
+
+const PIECES = new Map<string, readonly string[]>();
+
+/** A catalogue has few paths, and a long list reads them in each row. */
+function pieces(path: string): readonly string[] {
+  const known = PIECES.get(path) ?? path.split('.');
+  PIECES.set(path, known);
+  return known;
 }
 
 /** The values of a part by their paths: the inverse of {@link partOfValues}. */
@@ -49,6 +58,6 @@ export function valuesOfPart<Part extends LibraryPart>(
 }
 
 function valueAt(part: object, path: string): string | number | null {
-  return path.split('.').reduce((place: unknown, key) => (place as Record<string, unknown>)[key], part) as
+  return pieces(path).reduce((place: unknown, key) => (place as Record<string, unknown>)[key], part) as
     string | number | null;
 }

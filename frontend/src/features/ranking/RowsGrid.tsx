@@ -59,7 +59,6 @@ export function RowsGrid<Row extends SelectableRow>({
         getRowId={({ data }) => data.id}
         getRowStyle={({ node }) => (node.rowPinned ? PINNED_STYLE : undefined)}
         ensureDomOrder
-        alwaysShowVerticalScroll
         rowHeight={rowHeight}
         headerHeight={headerHeight}
         onBodyScrollEnd={({ api }: BodyScrollEndEvent) => {

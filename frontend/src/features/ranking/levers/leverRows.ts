@@ -1,6 +1,5 @@
 import type { RankingRequest } from '@roothertz/common/conditions';
 import { findLevers, type Lever, type LeverKey } from '@roothertz/common/noise';
-import { formatQuantity } from '@roothertz/common/units';
 import type { PlottedPart } from '../comparedPart';
 
 /** What a click on a lever does. */
@@ -76,5 +75,5 @@ export function changeText(change: number): string {
 
 /** "−1.2 dB", what a perfect amplifier would change. */
 export function atBestText(leftToGain: number): string {
-  return Number.isFinite(leftToGain) ? changeText(-leftToGain) : formatQuantity(NaN, 'decibel');
+  return Number.isFinite(leftToGain) ? changeText(-leftToGain) : '–';
 }

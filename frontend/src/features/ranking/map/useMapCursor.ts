@@ -36,7 +36,10 @@ export function useMapCursor(
     if (step === undefined && event.key !== 'Enter') return;
     event.preventDefault();
     if (step) setCursor(moved(cursor ?? present, step));
-    else if (cursor) onTake(cursor);
+    else if (cursor) {
+      onTake(cursor);
+      setCursor(null);
+    }
   };
   return {
     cursor,

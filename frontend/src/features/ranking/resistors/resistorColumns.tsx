@@ -39,6 +39,6 @@ export function resistorColumns(unit: string): ColDef<ResistorRow>[] {
     { ...RIGHT, field: 'excess', headerName: `excess, ${unit}`, width: 84 },
     { ...RIGHT, field: 'value', headerName: 'value', width: 118 },
     { field: 'technology', headerName: 'Technology', width: 116 },
-    { ...RIGHT, field: 'dissipation', headerName: 'dissipation, rating', width: 140 },
+    { field: 'dissipation', headerName: 'Dissipation of rating', width: 150 },
   ];
 }

@@ -53,13 +53,17 @@ function followingSentences(
   { total, pairs }: Pick<ShownStages['first'], 'total' | 'pairs'>,
   stage: SoughtStage,
 ): string {
-  const parts = total === 1 ? '1 op-amp is ranked' : `${total} op-amps are ranked`;
-  if (isFollower(stage)) return `${parts}, as followers without a network.`;
-  const choice =
-    pairs === 1
-      ? `with the only ${networkNoun(stage)}`
-      : `each with the quietest of ${grouped(pairs)} ${networkNoun(stage)}s`;
-  return `${gainSentence(network.gain, stage)} ${parts}, ${choice} that give it.`;
+  const parts = total === 1 ? '1 op-amp is ranked,' : `${total} op-amps are ranked,`;
+  if (isFollower(stage)) return `${parts} as ${total === 1 ? 'a follower' : 'followers'} without a network.`;
+  const each = total === 1 ? '' : ' each';
+  return `${gainSentence(network.gain, stage)} ${parts}${each} with ${choiceText(pairs, stage)}.`;
+}
+
+function choiceText(pairs: number, stage: SoughtStage): string {
+  const noun = networkNoun(stage);
+  return pairs === 1
+    ? `the only ${noun} that gives it`
+    : `the quietest of ${grouped(pairs)} ${noun}s that give it`;
 }
 
 function gainSentence(gain: number, stage: SoughtStage): string {

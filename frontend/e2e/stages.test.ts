@@ -1,0 +1,111 @@
+import type { Browser, Page } from 'playwright-core';
+import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
+import { DESKTOP, launchBrowser, PHONE, visit, type Visit } from './support/browser';
+import { screenshot } from './support/screenshot';
+import { signIn } from './support/session';
+
+let browser: Browser;
+let open: Visit;
+let page: Page;
+
+beforeAll(async () => {
+  browser = await launchBrowser();
+});
+
+afterAll(async () => {
+  await browser.close();
+});
+
+afterEach(async () => {
+  const { problems, close } = open;
+  await close();
+  expect(problems).toEqual([]);
+});
+
+const answer = () => page.locator('#answer h1');
+const says = (text: RegExp | string) => answer().filter({ hasText: text }).waitFor();
+const field = (label: string) => page.getByLabel(label, { exact: true });
+const rows = (label: string) =>
+  page.getByRole('region', { name: label, exact: true }).locator('[row-id]:not([row-id="floor"])');
+
+async function start(path: string, options: Parameters<typeof visit>[1] = {}) {
+  open = await visit(browser, options);
+  page = open.page;
+  await signIn(page, 'engineer', path);
+  await answer().waitFor();
+}
+
+async function commit(label: string, text: string) {
+  await field(label).fill(text);
+  await field(label).press('Enter');
+}
+
+describe('whole stages', () => {
+  it('are found, selected and searched otherwise, and the address keeps it all', async () => {
+    await start('/rank');
+    await page.getByText('Whole stages', { exact: true }).click();
+    await says(/^Quietest is .+ with [\d.]+\sΩ and [\d.]+\s.?Ω: .+ rms/);
+    await rows('Whole stages').first().waitFor();
+    await screenshot(page, 'stages');
+    expect(await page.evaluate(() => document.documentElement.scrollHeight)).toBe(DESKTOP.height);
+    const budget = () => page.getByRole('region', { name: /^Noise budget of/ }).getAttribute('aria-label');
+    const ofLeader = await budget();
+    await rows('Whole stages').nth(3).click();
+    await expect.poll(budget).not.toBe(ofLeader);
+    const chosen = await budget();
+    const before = await answer().textContent();
+    await commit('output drives at least', '20k');
+    await expect.poll(() => answer().textContent()).not.toBe(before);
+    const after = await answer().textContent();
+    await page.reload();
+    await expect.poll(() => answer().textContent()).toBe(after);
+    await expect.poll(budget).toBe(chosen);
+  });
+
+  it('say which gain is nearest where no pair gives the wanted one, and what is then enough', async () => {
+    await start('/rank?stage=non-inverting&gain=123.456&view=stages&gtol=0');
+    await says('No resistor pair gives a gain of 123.456.');
+    const advice = (await page.locator('#answer').textContent())!;
+    const enough = /widen the tolerance to ([\d.]+)\s%/.exec(advice)![1];
+    await screenshot(page, 'stages-no-gain');
+    await commit('gain tolerance', `${enough} %`);
+    await page
+      .getByText(/^Quietest is /)
+      .first()
+      .waitFor();
+    await page.goBack();
+    await says('No resistor pair gives a gain of 123.456.');
+  });
+
+  it('have no network in a follower and one resistor in a transimpedance stage', async () => {
+    await start('/rank?stage=follower&view=stages');
+    expect(await page.locator('#answer').textContent()).toContain('without a network');
+    await page.goto('/rank?stage=transimpedance&view=stages&nmax=10M');
+    await says(/^Quietest is .+ with 1\sMΩ: /);
+  });
+});
+
+describe('resistors', () => {
+  it('are ranked for the schematic’s place, and those over their rating are left out', async () => {
+    await start('/rank?stage=non-inverting&rg=100&view=resistors&vr=2');
+    await page.getByRole('button', { name: /^as R\s?g$/ }).click();
+    await page.waitForURL(/[?&]r=100(&|$)/);
+    await rows('Resistors').first().waitFor();
+    await page.getByText(/resistors lie within 2\s% of 100\sΩ/).waitFor();
+    await screenshot(page, 'resistors');
+    await commit('direct voltage', '10 V');
+    await page.getByRole('button', { name: /left out$/ }).click();
+    await page
+      .getByText(/would dissipate 1(\.\d+)?\sW/)
+      .first()
+      .waitFor();
+    await page.getByRole('link').filter({ hasText: /-100R/ }).first().click();
+    await page.waitForURL(/\/parts\/resistors\/\d+$/);
+  });
+
+  it('fit a phone', async () => {
+    await start('/rank?stage=non-inverting&view=resistors&vr=2', { viewport: PHONE });
+    await rows('Resistors').first().waitFor();
+    expect(await page.evaluate(() => document.documentElement.scrollWidth)).toBe(PHONE.width);
+  });
+});

@@ -1,0 +1,90 @@
+import { describe, expect, it } from 'vitest';
+import type { StageRanking, StageRequest } from '../../../api/stages';
+import { EXAMPLE } from '../../../test/exampleRanking';
+import { rankedStage, stageRankingOf } from '../../../test/stages';
+import { plainText } from '../answer';
+import { stageAnswer } from './stageAnswer';
+import { stageRows } from './stageRows';
+
+const { gainResistance: _sought, ...stage } = EXAMPLE.conditions.stage;
+const REQUEST: StageRequest = {
+  conditions: {
+    ...EXAMPLE.conditions,
+    stage: {
+      ...stage,
+      gainTolerance: 0.01,
+      network: { minimumTotal: 500, maximumTotal: 100e3 },
+      parallelMaximum: 1,
+    },
+  },
+  filter: {},
+};
+const leader = rankedStage(REQUEST, 1, 'VR-1108');
+
+function shown(more: Partial<StageRanking> = {}, items = [leader], request = REQUEST) {
+  return { request, first: { ...stageRankingOf(request, items, more), request }, items };
+}
+
+const plain = (text: string) => text.replaceAll('\u2009', ' ');
+const lead = (...given: Parameters<typeof shown>) => plain(plainText(stageAnswer(shown(...given)).lead));
+const following = (...given: Parameters<typeof shown>) => plain(stageAnswer(shown(...given)).following);
+
+describe('the answer of whole stages', () => {
+  it('names the op-amp, its network and its noise', () => {
+    expect(lead()).toMatch(
+      /^Quietest is VR-1108 with 5 Ω and 500 Ω: [\d.]+ nV rms, [\d.]+ dB above what the source itself makes\.$/,
+    );
+    expect(following()).toBe(
+      'The gain is 101, 1.0 % above the wanted one. 1 op-amp is ranked, with the quietest of 1234 resistor pairs that give it.',
+    );
+  });
+
+  it('tells of channels in parallel', () => {
+    expect(lead({}, [{ ...leader, channelsInParallel: 4 }])).toContain('500 Ω, 4 channels in parallel: ');
+  });
+
+  it('says which gain is nearest where no pair gives it, and the tolerance that takes it', () => {
+    expect(lead({ pairs: 0, nearestGain: 103.21 }, [])).toBe('No resistor pair gives a gain of 100.');
+    expect(following({ pairs: 0, nearestGain: 103.21 }, [])).toMatch(
+      /nearest .* is a gain of 103\.21, 3\.2 % off: widen the tolerance to 4 %/,
+    );
+  });
+
+  it('offers no tolerance beyond what a tolerance can be', () => {
+    const advice = following({ pairs: 0, nearestGain: 12 }, []);
+    expect(advice).toMatch(/a gain of 12, 88 % off: raise “network at most”/);
+    expect(advice).not.toContain('tolerance');
+  });
+
+  it('says what to change where the library has no resistor within the limits', () => {
+    expect(following({ pairs: 0, nearestGain: null }, [])).toMatch(/hold no resistors .* add resistors\.$/);
+  });
+
+  it('says what to change where every op-amp is left out', () => {
+    const excluded = { total: 3, reasons: [{ reason: 'too-slow' as const, count: 3 }] };
+    expect(lead({ excluded, total: 0 }, [])).toBe('No stage is ranked.');
+    expect(following({ excluded, total: 0 }, [])).toMatch(/^All 3 parts are left out\./);
+  });
+
+  it('speaks of one resistor in a transimpedance stage', () => {
+    const { gain: _gain, ...rest } = REQUEST.conditions.stage;
+    const sought = { ...rest, topology: 'transimpedance' as const, feedbackResistance: 1e9 };
+    const request = { ...REQUEST, conditions: { ...REQUEST.conditions, stage: sought } };
+    expect(lead({ pairs: 0, nearestGain: null }, [], request)).toBe('No resistor gives 1 GΩ.');
+  });
+});
+
+describe('the rows of whole stages', () => {
+  it('stand under the source floor in one unit', () => {
+    const { unit, floor, rows } = stageRows(shown());
+    expect(unit).toBe('nV');
+    expect(floor.noise.aboveFloor).toBe('0.00\u2009dB');
+    expect(
+      rows[0].network.map(({ symbol, value, partNumber }) => [symbol, plain(value), partNumber]),
+    ).toEqual([
+      ['R_g', '5 Ω', 'TN-5R00'],
+      ['R_f', '500 Ω', 'TN-500R'],
+    ]);
+    expect(rows[0].gain).toEqual({ text: '101', channelsInParallel: 1 });
+  });
+});
