@@ -16,11 +16,11 @@ interface RankingGridProps {
 
 /** The ranking as rows under the source floor. */
 export function RankingGrid({ ranking, ...state }: RankingGridProps) {
-  const { unit, floor, rows } = useMemo(
+  const { unit, priceHeading, floor, rows } = useMemo(
     () => gridRows(ranking.first, ranking.items, ranking.request),
     [ranking],
   );
-  const columns = useMemo(() => gridColumns(unit), [unit]);
+  const columns = useMemo(() => gridColumns(unit, priceHeading), [unit, priceHeading]);
   const floorRows = useMemo(() => [floor], [floor]);
   return (
     <>

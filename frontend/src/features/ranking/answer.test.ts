@@ -34,6 +34,17 @@ function follow(request: RankingRequest, more: Parameters<typeof rankingOf>[2] =
 }
 
 describe('the answer', () => {
+  it('names the cheapest of those that can’t be told apart, and its price', () => {
+    const unitPrice = { amount: '1.85', currency: 'EUR' };
+    const cheapest = { part: { partNumber: 'HT-2013' }, unitPrice, aboveQuietest: 0.2 } as NonNullable<
+      ReturnType<typeof rankingOf>['cheapest']
+    >;
+    expect(follow(REQUEST, { cheapest, quietSet: { total: 4 }, total: 9 })).toMatch(
+      /^3 parts can’t be told apart from it\. The cheapest of them is HT-2013 at €1\.85\./,
+    );
+    expect(follow(REQUEST, { cheapest, quietSet: { total: 1 }, total: 9 })).toMatch(/It costs €1\.85\./);
+  });
+
   it('names the quietest part, its noise and its distance from the floor', () => {
     const pieces = leadSentence(leader, REQUEST);
     expect(plain(plainText(pieces))).toBe(

@@ -4,6 +4,7 @@ import { formatQuantity } from '@roothertz/common/units';
 import type { Ranking, RankingItem } from '../../api/ranking';
 import { percentText, sharesOf } from '../../components/charts/shares';
 import { noiseKind, rmsText } from './noiseUnit';
+import { priceText } from './priceWords';
 
 /** A piece of a sentence; figures that matter are strong. */
 export interface Piece {
@@ -23,13 +24,14 @@ export function leadSentence(leader: RankingItem, { conditions }: RankingRequest
 
 /** What the leader's lead is worth: how many stand beside it, what is left to gain, what meets the target. */
 export function followingSentences(
-  ranking: Pick<Ranking, 'total' | 'quietSet' | 'floor'>,
+  ranking: Pick<Ranking, 'total' | 'quietSet' | 'floor' | 'cheapest'>,
   items: readonly RankingItem[],
   request: RankingRequest,
 ): string {
   const [leader] = items;
   const sentences = [
     quietSetSentence(ranking),
+    cheapestSentence(ranking),
     gainSentence(leader),
     targetSentence(ranking, items, request),
   ];
@@ -43,6 +45,14 @@ function quietSetSentence({ quietSet, total }: Pick<Ranking, 'quietSet' | 'total
   return others === 1
     ? '1 part can’t be told apart from it.'
     : `${others} parts can’t be told apart from it.`;
+}
+
+function cheapestSentence({ quietSet, cheapest }: Pick<Ranking, 'quietSet' | 'cheapest'>): string {
+  if (cheapest === null) return '';
+  const price = priceText(cheapest.unitPrice);
+  return quietSet.total > 1
+    ? `The cheapest of them is ${cheapest.part.partNumber} at ${price}.`
+    : `It costs ${price}.`;
 }
 
 function gainSentence({ contributions }: RankingItem): string {

@@ -9,8 +9,8 @@ type Cell<Value> = ICellRendererParams<GridRow, Value>;
 
 const FIGURE: ColDef<GridRow> = { cellStyle: { textAlign: 'right' }, headerClass: 'ag-right-aligned-header' };
 
-/** The ranking's columns; the noise column's heading carries the one unit of all its figures. */
-export function gridColumns(unit: string): ColDef<GridRow>[] {
+/** The ranking's columns; headings carry the one unit of all noise figures, and the currency of all prices. */
+export function gridColumns(unit: string, priceHeading: string | null): ColDef<GridRow>[] {
   return [
     {
       colId: 'place',
@@ -41,9 +41,12 @@ export function gridColumns(unit: string): ColDef<GridRow>[] {
       colId: 'budget',
       field: 'budget',
       headerName: 'budget, power',
-      width: 138,
+      width: 114,
       cellStyle: { paddingLeft: 6, paddingRight: 4 },
       cellRenderer: ({ value }: Cell<GridRow['budget']>) => value && <BudgetBar {...value} />,
     },
+    ...(priceHeading === null
+      ? []
+      : [{ ...FIGURE, colId: 'price', field: 'price' as const, headerName: priceHeading, width: 70 }]),
   ];
 }

@@ -18,7 +18,7 @@ describe('the ranking’s rows', () => {
 
   it('state all noise in the unit of the floor, which the heading carries', () => {
     expect(unit).toBe('nV');
-    expect(gridColumns(unit).map(({ headerName }) => headerName)).toContain('noise, nV rms');
+    expect(gridColumns(unit, null).map(({ headerName }) => headerName)).toContain('noise, nV rms');
     expect(floor.noise.text).toBe('574');
     expect(Number(rows[2].noise.text.replace(/\s/g, ''))).toBeGreaterThan(10_000);
   });
@@ -31,6 +31,16 @@ describe('the ranking’s rows', () => {
       '100',
       '0',
     ]);
+  });
+
+  it('state prices in the currency and for the quantity of the heading, only where there are any', () => {
+    const unitPrice = { amount: '3.6', currency: 'EUR' } as NonNullable<(typeof items)[0]['unitPrice']>;
+    const priced = [{ ...items[0], unitPrice }, items[1]];
+    const grid = gridRows(rankingOf(request, priced), priced, { ...request, quantity: 250 });
+    expect(grid.priceHeading).toBe('€ at 250');
+    expect(grid.rows.map(({ price }) => price)).toEqual(['3.60', 'no price']);
+    expect(gridColumns('nV', grid.priceHeading).at(-1)).toMatchObject({ headerName: '€ at 250' });
+    expect(gridRows(rankingOf(request, items), items, request).priceHeading).toBeNull();
   });
 
   it('bracket the quiet set', () => {

@@ -7,6 +7,7 @@ import type { Ranking, RankingItem } from '../../api/ranking';
 import { barOf, barScale, type Bar } from './barScale';
 import { cautionsOfPart } from './cautionsOf';
 import { commonUnit, inUnit, noiseKind } from './noiseUnit';
+import { amountText, priceHeading } from './priceWords';
 
 /** Where a row stands in the bracket around the quiet set. */
 export type Bracket = 'only' | 'first' | 'middle' | 'last' | null;
@@ -18,11 +19,14 @@ export interface GridRow {
   noise: { text: string; meetsTarget: boolean | null };
   aboveFloor: string;
   budget: { bar: Bar; contributions: Contributions };
+  price: string;
 }
 
 export interface GridRows {
   /** The unit of the noise column. */
   unit: string;
+  /** The heading of the price column; null where there is none. */
+  priceHeading: string | null;
   floor: GridRow;
   rows: GridRow[];
 }
@@ -39,7 +43,12 @@ export function gridRows(
   const unit = commonUnit(floor.inputNoiseRms || quietest, noiseKind(request.conditions.stage.topology));
   const scale = barScale(floor.inputNoiseRms, quietest);
   const rows = items.map((item, index) => rowOf(item, bracketOf(items, index), unit, scale));
-  return { unit, floor: floorRow(floor.inputNoiseRms, request, unit, scale), rows };
+  return {
+    unit,
+    priceHeading: priceHeading(items, request.quantity ?? 1),
+    floor: floorRow(floor.inputNoiseRms, request, unit, scale),
+    rows,
+  };
 }
 
 function rowOf(item: RankingItem, bracket: Bracket, unit: string, scale: number): GridRow {
@@ -56,6 +65,7 @@ function rowOf(item: RankingItem, bracket: Bracket, unit: string, scale: number)
     noise: { text: inUnit(item.inputNoiseRms, unit), meetsTarget },
     aboveFloor: aboveFloor === null ? '–' : formatQuantity(aboveFloor, 'decibel'),
     budget: { bar: barOf(contributions, scale), contributions },
+    price: item.unitPrice ? amountText(item.unitPrice) : 'no price',
   };
 }
 
@@ -71,6 +81,7 @@ function floorRow(rms: number, { conditions }: RankingRequest, unit: string, sca
     noise: { text: inUnit(rms, unit), meetsTarget: null },
     aboveFloor: rms > 0 ? formatQuantity(0, 'decibel') : '–',
     budget: { bar: barOf(contributions, scale), contributions },
+    price: '',
   };
 }
 
