@@ -19,7 +19,7 @@ const BACKEND_FEATURES = [
   'audit',
   'imports',
 ];
-const FRONTEND_FEATURES = ['session', 'parts', 'ranking', 'conditions'];
+const FRONTEND_FEATURES = ['session', 'parts', 'ranking', 'conditions', 'imports', 'prices'];
 
 /** A feature may use another's service, never its repositories' entities or its DTOs. */
 const backendZones = BACKEND_FEATURES.flatMap((feature) =>

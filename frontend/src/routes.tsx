@@ -14,6 +14,14 @@ const pages: RouteObject[] = [
   },
   ...partsRoutes,
   {
+    path: 'imports',
+    lazy: async () => ({ Component: (await import('./pages/imports/ImportsPage')).ImportsPage }),
+  },
+  {
+    path: 'imports/:id',
+    lazy: async () => ({ Component: (await import('./pages/imports/ImportPage')).ImportPage }),
+  },
+  {
     path: 'account',
     lazy: async () => ({ Component: (await import('./pages/account/AccountPage')).AccountPage }),
   },

@@ -10,6 +10,7 @@ interface NavigationEntry {
 export const NAVIGATION: readonly NavigationEntry[] = [
   { to: '/rank', label: 'Rank', action: 'rankings.run' },
   { to: '/parts', label: 'Parts', action: 'parts.read' },
+  { to: '/imports', label: 'Import', action: 'parts.edit' },
 ];
 
 export const START_PAGE = '/rank';

@@ -1,7 +1,7 @@
 import { canBeUnknown, type ParameterDefinition, type ParameterGroup } from '@roothertz/common/parts';
 import { Form, Select } from 'antd';
 import { QuantityInput } from '../../components/QuantityInput';
-import { ORIGIN_OPTIONS } from './optionLabels';
+import { ORIGIN_OPTIONS } from '../../components/optionLabels';
 import styles from './PartForm.module.css';
 
 interface ParameterItemProps {

@@ -1,6 +1,6 @@
 import { type TextField, readText } from '@roothertz/common/parts';
 import { Form, Input, Select } from 'antd';
-import { selectOptions } from './optionLabels';
+import { selectOptions } from '../../components/optionLabels';
 
 const LONGEST_LINE = 200;
 

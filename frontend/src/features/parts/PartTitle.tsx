@@ -1,6 +1,6 @@
 import type { StoredPart } from '../../api/parts';
 import type { KindOfPart } from './kindOfPart';
-import { optionLabel } from './optionLabels';
+import { optionLabel } from '../../components/optionLabels';
 import { figuresOf } from './partDraft';
 import styles from './PartTitle.module.css';
 

@@ -1,6 +1,6 @@
 import { Input, Select } from 'antd';
 import type { KindOfPart } from './kindOfPart';
-import { optionLabel } from './optionLabels';
+import { optionLabel } from '../../components/optionLabels';
 import { filtersOf, type PartsView } from './partsView';
 import styles from './PartsFilters.module.css';
 import type { ChangeView } from './usePartsView';

@@ -1,7 +1,7 @@
 import { INPUT_TYPE_FIELD, OP_AMP_CATALOGUE } from '@roothertz/common/parts';
 import { OP_AMPS_API } from '../../api/opAmps';
 import { kindOfPart } from './kindOfPart';
-import { optionLabel } from './optionLabels';
+import { optionLabel } from '../../components/optionLabels';
 
 export const OP_AMPS = kindOfPart(OP_AMP_CATALOGUE, OP_AMPS_API, {
   path: '/parts',

@@ -1,6 +1,6 @@
 import { type ListedFields, ORIGIN_LABELS, type Origin, PART_FIELDS } from '@roothertz/common/parts';
 import { formatEditable } from '@roothertz/common/units';
-import { optionLabel } from './optionLabels';
+import { optionLabel } from '../../components/optionLabels';
 import { figureOf, figuresOf, type PartDraft } from './partDraft';
 
 /** One value of a part: where it stands and how a member reads it. */

@@ -12,7 +12,7 @@ import type { StoredPart } from '../../api/parts';
 import { Unknown } from '../../components/Figure';
 import { FigureHeader } from './FigureHeader';
 import type { KindOfPart } from './kindOfPart';
-import { optionLabel } from './optionLabels';
+import { optionLabel } from '../../components/optionLabels';
 import { figureOf, figuresOf } from './partDraft';
 import { PartLink } from './PartLink';
 

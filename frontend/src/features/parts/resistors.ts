@@ -3,7 +3,7 @@ import { formatEditable } from '@roothertz/common/units';
 import type { Figures } from '../../api/parts';
 import { RESISTORS_API } from '../../api/resistors';
 import { kindOfPart } from './kindOfPart';
-import { optionLabel } from './optionLabels';
+import { optionLabel } from '../../components/optionLabels';
 import { figureOf } from './partDraft';
 
 export const RESISTORS = kindOfPart(RESISTOR_CATALOGUE, RESISTORS_API, {

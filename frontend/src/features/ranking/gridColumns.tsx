@@ -9,6 +9,8 @@ type Cell<Value> = ICellRendererParams<GridRow, Value>;
 
 const FIGURE: ColDef<GridRow> = { cellStyle: { textAlign: 'right' }, headerClass: 'ag-right-aligned-header' };
 
+const SCROLLBAR = 18;
+
 /** The ranking's columns; headings carry the one unit of all noise figures, and the currency of all prices. */
 export function gridColumns(unit: string, priceHeading: string | null): ColDef<GridRow>[] {
   return [
@@ -33,20 +35,24 @@ export function gridColumns(unit: string, priceHeading: string | null): ColDef<G
       colId: 'noise',
       field: 'noise',
       headerName: `noise, ${unit} rms`,
-      width: 100,
+      width: 94,
       cellRenderer: ({ value }: Cell<GridRow['noise']>) => value && <NoiseCell {...value} />,
     },
-    { ...FIGURE, colId: 'aboveFloor', field: 'aboveFloor', headerName: 'above floor', width: 82 },
+    { ...FIGURE, colId: 'aboveFloor', field: 'aboveFloor', headerName: 'above floor', width: 78 },
     {
       colId: 'budget',
       field: 'budget',
       headerName: 'budget, power',
-      width: 114,
+      width: 112,
       cellStyle: { paddingLeft: 6, paddingRight: 4 },
       cellRenderer: ({ value }: Cell<GridRow['budget']>) => value && <BudgetBar {...value} />,
     },
-    ...(priceHeading === null
-      ? []
-      : [{ ...FIGURE, colId: 'price', field: 'price' as const, headerName: priceHeading, width: 70 }]),
+    ...(priceHeading === null ? [] : [priceColumn(priceHeading)]),
   ];
+}
+
+/** The last column: it leaves room for the scrollbar, which the grid doesn't count when it fits the columns. */
+function priceColumn(headerName: string): ColDef<GridRow> {
+  const cellStyle = { textAlign: 'right', paddingLeft: 0, paddingRight: SCROLLBAR };
+  return { ...FIGURE, colId: 'price', field: 'price', headerName, width: 80, cellStyle };
 }

@@ -2,16 +2,23 @@ import type { RankingItem } from '../../api/ranking';
 
 type Price = NonNullable<RankingItem['unitPrice']>;
 
-/** The price alone, for a column whose heading names the currency: at least two decimals, all that it has up to four. */
+/** The price alone, for a column whose heading names the currency. */
 export function amountText({ amount }: Pick<Price, 'amount'>): string {
-  return new Intl.NumberFormat('en-GB', { minimumFractionDigits: 2, maximumFractionDigits: 4 }).format(
+  const maximumFractionDigits = decimalsOf(amount);
+  return new Intl.NumberFormat('en-GB', { minimumFractionDigits: 2, maximumFractionDigits }).format(
     Number(amount),
   );
 }
 
+/** Below one unit of the currency, fractions of a hundredth matter. */
+function decimalsOf(amount: string): number {
+  return Number(amount) < 1 ? 4 : 2;
+}
+
 /** The price with its currency, such as "€1.85". */
 export function priceText({ amount, currency }: Pick<Price, 'amount' | 'currency'>): string {
-  return new Intl.NumberFormat('en-GB', { style: 'currency', currency, maximumFractionDigits: 4 }).format(
+  const maximumFractionDigits = decimalsOf(amount);
+  return new Intl.NumberFormat('en-GB', { style: 'currency', currency, maximumFractionDigits }).format(
     Number(amount),
   );
 }

@@ -1,0 +1,28 @@
+import { type Dialect, type ImportKind, libraryAddress } from '../../api/imports';
+import { KINDS } from './kinds';
+import styles from './ExportLinks.module.css';
+
+const MARKS: readonly [Dialect['decimalMark'], string][] = [
+  ['point', 'decimal point'],
+  ['comma', 'decimal comma'],
+];
+
+/** The team's own library as lists that come in again unchanged. */
+export function ExportLinks() {
+  return (
+    <section className={styles.exports} aria-label="Export your library">
+      <h2>Export your library as CSV</h2>
+      {Object.entries(KINDS).map(([kind, { title }]) => (
+        <p key={kind}>
+          {title}:{' '}
+          {MARKS.map(([mark, words]) => (
+            <a key={mark} href={libraryAddress(kind as ImportKind, mark)} download>
+              with {words}
+              <span className="visually-hidden">, {title.toLowerCase()}</span>
+            </a>
+          ))}
+        </p>
+      ))}
+    </section>
+  );
+}

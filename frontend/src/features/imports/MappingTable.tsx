@@ -1,0 +1,61 @@
+import { Button } from 'antd';
+import { useMemo, useState } from 'react';
+import type { Import } from '../../api/imports';
+import { FieldMessage } from '../../components/FieldMessage';
+import { fieldChoices } from './fieldChoices';
+import { count } from './importWords';
+import { KINDS } from './kinds';
+import { faultsByColumn, withColumn } from './mappingDraft';
+import { MappingRow } from './MappingRow';
+import styles from './MappingTable.module.css';
+import type { ImportMapping } from './useMapping';
+
+interface MappingTableProps {
+  imported: Import;
+  mapping: ImportMapping;
+  canChange: boolean;
+}
+
+const MOST_AT_FIRST = 60;
+
+/** What each column of the file is, with the first cells under its heading. */
+export function MappingTable({ imported, mapping, canChange }: MappingTableProps) {
+  const { kind, columns } = imported;
+  const { catalogue } = KINDS[kind];
+  const [isWhole, setWhole] = useState(false);
+  const choices = useMemo(() => fieldChoices(catalogue), [catalogue]);
+  const faults = faultsByColumn(mapping.mapping, mapping.errors);
+  const fault = faults.get(null);
+  const shown = isWhole ? columns : columns.slice(0, MOST_AT_FIRST);
+  return (
+    <section className={styles.mapping} aria-label="What each column is">
+      <h2>What each column is</h2>
+      {fault !== undefined && <FieldMessage>{fault}</FieldMessage>}
+      <table className={styles.table}>
+        <thead>
+          <tr>
+            <th scope="col">column in the file</th>
+            <th scope="col">becomes</th>
+            <th scope="col">unit</th>
+          </tr>
+        </thead>
+        <tbody>
+          {shown.map((column) => (
+            <MappingRow
+              key={column.column}
+              {...{ catalogue, column, choices, canChange }}
+              mapping={mapping.mapping}
+              fault={faults.get(column.column)}
+              onChange={(next) => mapping.change(withColumn(mapping.mapping, column.column, next))}
+            />
+          ))}
+        </tbody>
+      </table>
+      {shown.length < columns.length && (
+        <Button type="link" onClick={() => setWhole(true)}>
+          Show all {count(columns.length)} columns
+        </Button>
+      )}
+    </section>
+  );
+}

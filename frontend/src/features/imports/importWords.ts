@@ -1,0 +1,66 @@
+import { formatQuantity } from '@roothertz/common/units';
+import type { Import, ImportState, RowCounts } from '../../api/imports';
+
+const STATE_WORDS: Readonly<Record<ImportState, string>> = {
+  uploaded: 'not checked yet',
+  checking: 'being checked',
+  checked: 'checked, not applied',
+  waiting: 'waiting for another import',
+  applying: 'being applied',
+  applied: 'applied',
+  undoing: 'being undone',
+  undone: 'undone',
+  cancelled: 'cancelled',
+  interrupted: 'interrupted, run again',
+  outdated: 'out of date, check again',
+  failed: 'failed',
+};
+
+const MAPPABLE: readonly ImportState[] = [
+  'uploaded',
+  'checked',
+  'cancelled',
+  'interrupted',
+  'outdated',
+  'failed',
+];
+
+export function stateWords(state: ImportState): string {
+  return STATE_WORDS[state];
+}
+
+/** Columns and dialect can be changed. */
+export function isMappable({ state }: Pick<Import, 'state'>): boolean {
+  return MAPPABLE.includes(state);
+}
+
+/** The rows are checked, and can be written. */
+export function isApplicable({ state, counts }: Pick<Import, 'state' | 'counts'>): boolean {
+  return counts !== null && MAPPABLE.includes(state) && state !== 'uploaded' && state !== 'outdated';
+}
+
+/** How many rows the import writes. */
+export function acceptedRows(counts: RowCounts): number {
+  return counts.new + counts.changed + counts.doubtful;
+}
+
+export function count(number: number): string {
+  return formatQuantity(number, 'count');
+}
+
+export function rows(number: number): string {
+  return `${count(number)} ${number === 1 ? 'row' : 'rows'}`;
+}
+
+const MOMENT = new Intl.DateTimeFormat('en-GB', { dateStyle: 'medium', timeStyle: 'short' });
+
+export function moment(time: string): string {
+  return MOMENT.format(new Date(time));
+}
+
+/** How long the work still takes, roughly. */
+export function timeLeft(seconds: number): string {
+  if (seconds < 1) return 'nearly done';
+  if (seconds < 90) return `about ${Math.ceil(seconds)} s left`;
+  return `about ${Math.round(seconds / 60)} min left`;
+}
