@@ -1,5 +1,6 @@
 import { prepareDatabase, readAddress, serve } from './application.mjs';
 import { fillLibrary } from './bench-library.mjs';
+import { compareImport } from './bench-imports.mjs';
 import { compareStages } from './bench-stages.mjs';
 import { interleaved, median, quantile } from './bench-measure.mjs';
 import { loopOver, RANKINGS, SQL } from './bench-rankings.mjs';
@@ -8,6 +9,7 @@ import { readCredentials } from './credentials.mjs';
 import { createDatabase, ensureMariadbInstalled, startMariadb } from './mariadb.mjs';
 import { ensurePackages, refuseOldNode } from './packages.mjs';
 import { endOrphans } from './orphans.mjs';
+import { inLocal } from './paths.mjs';
 import { freePort } from './ports.mjs';
 import { peakMemory } from './processes.mjs';
 import { recall } from './records.mjs';
@@ -24,7 +26,12 @@ await supervise(async () => {
   await ensurePackages();
   await buildStale(['common', 'backend']);
   await endOrphans();
-  const server = await startMariadb({ name: 'mariadb-bench', preferredPort: 33326, exclusive: true });
+  const server = await startMariadb({
+    name: 'mariadb-bench',
+    preferredPort: 33326,
+    exclusive: true,
+    options: ['--local-infile=1'],
+  });
   await createDatabase(server, DATABASE, { fresh: true });
   const environment = {
     JWT_SECRET: readCredentials().jwtSecret,
@@ -47,11 +54,13 @@ await supervise(async () => {
   const address = readAddress({ PORT: String(await freePort(33_330)) });
   await serve(address, environment);
   const results = await measure(address, connection, library);
+  const imports = await importInStep(connection, environment);
   await connection.end();
   const rankings = reportRankings(results, peakMemory(recall(`application-${address.port}`).pid));
   const stages = reportStages(await compareInStep(library.columns));
+  const imported = reportImports(imports);
   await closeAll();
-  say(JSON.stringify({ ...rankings, ...stages }));
+  say(JSON.stringify({ ...rankings, ...stages, ...imported }));
   return 0;
 });
 
@@ -67,6 +76,19 @@ async function measure({ url }, connection, { libraryId, columns }) {
       loop: () => loopOver(columns),
     });
     return { ...times, outcome: 'done' };
+  });
+}
+
+/** Another server imports, so that its memory is its own. */
+async function importInStep(connection, environment) {
+  const address = readAddress({ PORT: String(await freePort(33_340)) });
+  await serve(address, { ...environment, IMPORT_DIR: inLocal('bench-imports') });
+  const account = { email: 'librarian@tarnfield.example', password: 'quiet-bench-2026' };
+  return step('Importing', async (note) => {
+    note('a list of resistors, and the same rows with LOAD DATA');
+    const times = await compareImport(connection, address.url, account);
+    const peakMiB = peakMemory(recall(`application-${address.port}`).pid);
+    return { ...times, peakMiB, outcome: 'done' };
   });
 }
 
@@ -121,6 +143,12 @@ function reportRankings({ resistive, reactive, sql, loop }, serverPeakMiB) {
     rankingResistiveOverLoop: ratio(resistive, loop),
     serverPeakMiB,
   };
+}
+
+function reportImports({ rows, imported, loaded, peakMiB }) {
+  say(`${rows} resistors from the upload over the check to the last row applied: ${imported.toFixed(0)} ms;`);
+  say(`LOAD DATA LOCAL INFILE of the same rows into equal tables: ${loaded.toFixed(0)} ms.\n`);
+  return { importOverLoadData: Number((imported / loaded).toFixed(3)), importServerPeakMiB: peakMiB };
 }
 
 function reportStages({ evaluations, exhaustiveEvaluations, time, exhaustiveTime }) {

@@ -84,12 +84,16 @@ describe('hostile lists', () => {
     ['a quotation mark that is left open', `${HEAD}${GOOD}Vireo,"OPEN,100,\n${GOOD}`, 422],
     ['1 001 columns', `${'a,'.repeat(1000)}b\n${'1,'.repeat(1000)}2\n`, 422],
     ['more than 500 000 rows', `${HEAD}${'a,b,1,\n'.repeat(500_001)}`, 413],
-  ])('are refused for %s, and nothing of them is kept', async (_, list, status) => {
-    const { body } = await sendList(librarian, 'resistors', list).expect(status);
-    expect(body.detail).toMatch(/\w/);
-    expect(await app.dataSource.getRepository(Import).countBy({ teamId: librarian.caller.teamId })).toBe(0);
-    expect(await keptFiles()).toEqual([]);
-  }, 120_000);
+  ])(
+    'are refused for %s, and nothing of them is kept',
+    async (_, list, status) => {
+      const { body } = await sendList(librarian, 'resistors', list).expect(status);
+      expect(body.detail).toMatch(/\w/);
+      expect(await app.dataSource.getRepository(Import).countBy({ teamId: librarian.caller.teamId })).toBe(0);
+      expect(await keptFiles()).toEqual([]);
+    },
+    120_000,
+  );
 
   const keptFiles = async () => {
     const known = (await app.dataSource.getRepository(Import).find()).map(({ storedName }) => storedName);

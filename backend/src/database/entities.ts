@@ -1,8 +1,8 @@
 import { AuditEntry } from '../audit/entities/audit-entry.entity.js';
 import { SavedConditions } from '../conditions/entities/saved-conditions.entity.js';
 import { Import } from '../imports/entities/import.entity.js';
+import { ImportPortion } from '../imports/entities/import-portion.entity.js';
 import { ImportProgress } from '../imports/entities/import-progress.entity.js';
-import { ImportRow } from '../imports/entities/import-row.entity.js';
 import { Library } from '../library/entities/library.entity.js';
 import { OpAmp } from '../library/entities/op-amp.entity.js';
 import { Part } from '../library/entities/part.entity.js';
@@ -33,6 +33,6 @@ export const ENTITIES = [
   Offer,
   OfferBreak,
   Import,
+  ImportPortion,
   ImportProgress,
-  ImportRow,
 ];

@@ -30,6 +30,7 @@ interface Beginning {
 }
 
 const MOST_AT_ONCE = 3;
+const NOTED_EVERY_MS = 200;
 const LOCK = `CONCAT(LEFT(DATABASE(), 40), ' import ', ?)`;
 /** What an import is again when its work ended without a result. */
 const ENDED: Partial<Record<ImportState, ImportState>> = { checking: 'uploaded', undoing: 'applied' };
@@ -76,7 +77,7 @@ export class ImportJobs implements OnApplicationBootstrap, BeforeApplicationShut
     if (this.running.has(importId)) throw notNow();
     const runner = this.dataSource.createQueryRunner();
     const begun = this.begin(importId, runner, beginning);
-    const job = { importId, runner, progress: (done: number) => this.note(importId, done) };
+    const job = { importId, runner, progress: this.noter(importId) };
     const done = begun.then(() => this.run(job, work)).finally(() => this.running.delete(importId));
     this.running.set(
       importId,
@@ -142,12 +143,16 @@ export class ImportJobs implements OnApplicationBootstrap, BeforeApplicationShut
     await this.dataSource.manager.update(Import, { id, state }, { state: ENDED[state] ?? ending, failure });
   }
 
-  private async note(importId: number, done: number): Promise<void> {
-    if (this.stopping) throw new ImportInterrupted();
-    const progress = this.dataSource.getRepository(ImportProgress);
-    await progress.update({ importId }, { done });
-    const { cancelRequested } = await progress.findOneByOrFail({ importId });
-    if (cancelRequested) throw new ImportCancelled();
+  private noter(importId: number): ImportJob['progress'] {
+    let noted = 0;
+    return async (done) => {
+      if (this.stopping) throw new ImportInterrupted();
+      if (Date.now() - noted < NOTED_EVERY_MS) return;
+      noted = Date.now();
+      const uncancelled = { importId, cancelRequested: 0 };
+      const { affected } = await this.dataSource.manager.update(ImportProgress, uncancelled, { done });
+      if (affected === 0) throw new ImportCancelled();
+    };
   }
 
   private async release(importId: number, runner: QueryRunner): Promise<void> {

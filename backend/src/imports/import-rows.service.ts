@@ -1,16 +1,17 @@
 import { harmlessUnknownCell } from '@roothertz/common/imports';
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
-import { type DataSource, type FindOptionsWhere, MoreThan } from 'typeorm';
+import { type DataSource, In } from 'typeorm';
 import type { Caller } from '../shared/access/caller.js';
 import { parseSort } from '../shared/list/sort.js';
 import { type ImportRowListDto, type ListImportRowsDto, toImportRow } from './dto/import-rows.dto.js';
 import type { Import } from './entities/import.entity.js';
-import { ImportRow } from './entities/import-row.entity.js';
+import { ImportPortion } from './entities/import-portion.entity.js';
 import { csvLine, encoderOf, inEncoding, type WrittenList } from './file/csv-lines.js';
 import { findImport } from './import-select.js';
+import { type CountedPortion, pageOf } from './row-page.js';
+import { standsIn, type StoredRow } from './stored-row.js';
 
-const PORTION = 1000;
 const REASONS = ['line of the file', 'why refused', 'what was needed'];
 
 /** The rows of an import with their verdicts. */
@@ -21,17 +22,14 @@ export class ImportRowsService {
   async list(caller: Caller, id: string, query: ListImportRowsDto): Promise<ImportRowListDto> {
     const { descending } = parseSort(query.sort ?? 'line', ['line']);
     const { id: importId, columns } = await findImport(this.dataSource.manager, caller, id);
-    const { state, limit, offset } = query;
-    const where: FindOptionsWhere<ImportRow> = { importId };
-    if (state === 'kept') where.kept = 1;
-    else if (state !== undefined) where.state = state;
-    const [rows, total] = await this.dataSource.getRepository(ImportRow).findAndCount({
-      where,
-      order: { position: descending ? 'DESC' : 'ASC' },
-      take: limit,
-      skip: offset,
-    });
-    return { items: rows.map((row) => toImportRow(row, columns)), total };
+    const counted = await this.portionsOf(importId);
+    const page = pageOf(descending ? counted.reverse() : counted, query);
+    const portions = await this.dataSource
+      .getRepository(ImportPortion)
+      .find({ where: { importId, portion: In(page.portions) }, order: { portion: 'ASC' } });
+    const rows = portions.flatMap((portion) => portion.rows).filter((row) => standsIn(row, query.state));
+    const shown = (descending ? rows.reverse() : rows).slice(page.skipped, page.skipped + query.limit);
+    return { items: shown.map((row) => toImportRow(row, columns)), total: page.total };
   }
 
   /** The refused rows as they stood in the file, in its dialect, with the reasons behind them. */
@@ -44,40 +42,46 @@ export class ImportRowsService {
     const encode = encoderOf(dialect);
     const headings = columns.map(({ heading }) => heading);
     yield encode.first(csvLine([...headings, ...REASONS], dialect.delimiter));
-    for (let last = 0; ;) {
-      const rows = await this.dataSource.getRepository(ImportRow).find({
-        where: { importId, state: 'refused', position: MoreThan(last) },
-        order: { position: 'ASC' },
-        take: PORTION,
-      });
-      if (rows.length === 0) return;
-      const lines = rows.map((row) =>
-        csvLine(
-          [...paddedCells(row, columns.length), ...reasonsOf(row, columns, dialect)],
-          dialect.delimiter,
-        ),
-      );
+    const portions = (await this.portionsOf(importId)).filter(({ counts }) => counts.refused > 0);
+    for (const { portion } of portions) {
+      const { rows } = await this.dataSource
+        .getRepository(ImportPortion)
+        .findOneByOrFail({ importId, portion });
+      const lines = rows
+        .filter((row) => standsIn(row, 'refused'))
+        .map((row) =>
+          csvLine(
+            [...paddedCells(row, columns.length), ...reasonsOf(row, columns, dialect)],
+            dialect.delimiter,
+          ),
+        );
       yield encode.next(lines.join(''));
-      last = rows.at(-1)!.position;
     }
+  }
+
+  private portionsOf(importId: number): Promise<CountedPortion[]> {
+    return this.dataSource.getRepository(ImportPortion).find({
+      select: { importId: true, portion: true, counts: true },
+      where: { importId },
+      order: { portion: 'ASC' },
+    });
   }
 }
 
 /** As many cells as the list has columns, so that the reasons stand under their headings. */
-function paddedCells({ cells }: ImportRow, width: number): string[] {
+function paddedCells({ cells }: StoredRow, width: number): string[] {
   return Array.from({ length: width }, (_, index) => harmlessUnknownCell(cells?.[index] ?? ''));
 }
 
 function reasonsOf(
-  { line, errors }: ImportRow,
+  { line, errors = [] }: StoredRow,
   columns: Import['columns'],
   { encoding }: Import['dialect'],
 ): string[] {
-  const all = errors ?? [];
-  const why = all.map((error) => {
+  const why = errors.map((error) => {
     const heading = error.column === null ? undefined : columns[error.column]?.heading;
     return heading ? `${heading}: ${error.why}` : error.why;
   });
-  const expected = new Set(all.map((error) => error.expected).filter((text) => text !== ''));
+  const expected = new Set(errors.map((error) => error.expected).filter((text) => text !== ''));
   return [String(line), why.join('; '), [...expected].join('; ')].map((text) => inEncoding(text, encoding));
 }

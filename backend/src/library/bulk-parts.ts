@@ -4,14 +4,17 @@ import type { QueryRunner } from 'typeorm';
 import { columnName } from './entities/parameter-columns.js';
 import type { PartTable } from './part-tables.js';
 
+/** The texts, origins, choice and figures of a part in the order of its tables. */
+export type PartCells = (string | number | null)[];
+
 /** A part that is to be written, with what makes it the same part however its name is written. */
-export interface KeyedPart<Kind extends LibraryPart> {
+export interface KeyedPart {
   normalisedKey: string;
-  part: Kind;
+  cells: PartCells;
 }
 
 /** A part that is to be written over the one of this id, as its next version. */
-export interface ReplacingPart<Kind extends LibraryPart> extends KeyedPart<Kind> {
+export interface ReplacingPart extends KeyedPart {
   id: number;
   version: number;
 }
@@ -33,6 +36,7 @@ export interface Stamp {
 }
 
 const FIRST_VERSION = 1;
+const MOST_KEYS = 150_000;
 const TEXTS = ['manufacturer', 'part_number', 'description', 'package', 'lifecycle', 'approval'];
 const CHANGED = [...TEXTS, 'normalised_key', 'version', 'updated_at', 'updated_by'];
 
@@ -59,33 +63,39 @@ export async function findPartsByKeys<Kind extends LibraryPart>(
   return rows.map((row) => toFoundPart(table, row));
 }
 
+/**
+ * The keys of all parts of the libraries, so that only those among them need be looked up; null where they are too
+ * many to be kept.
+ */
+export async function knownKeys(
+  runner: QueryRunner,
+  libraryIds: readonly number[],
+): Promise<ReadonlySet<string> | null> {
+  const rows: { normalisedKey: string }[] = await runner.query(
+    `SELECT normalised_key AS normalisedKey FROM parts WHERE library_id IN (?) LIMIT ${MOST_KEYS + 1}`,
+    [libraryIds],
+  );
+  return rows.length > MOST_KEYS ? null : new Set(rows.map(({ normalisedKey }) => normalisedKey));
+}
+
 /** Writes new parts of a kind into a library; to be called in the transaction that bumped its revision. */
 export async function insertPartsInBulk<Kind extends LibraryPart>(
   runner: QueryRunner,
   table: PartTable<Kind>,
   libraryId: number,
-  parts: readonly KeyedPart<Kind>[],
-  { at, userId }: Stamp,
+  parts: readonly KeyedPart[],
+  stamp: Stamp,
 ): Promise<void> {
   if (parts.length === 0) return;
-  const rows = parts.map(({ part, normalisedKey }) => [
-    libraryId,
-    table.catalogue.kind,
-    ...textsOf(part),
-    normalisedKey,
-    FIRST_VERSION,
-    at,
-    userId,
-    at,
-  ]);
+  const rows = parts.map((part) => partRow(table, libraryId, part, FIRST_VERSION, stamp));
   const { insertId } = (await runner.query(
-    `INSERT INTO parts (library_id, kind, ${CHANGED.join(', ')}, created_at) VALUES ?`,
+    `INSERT INTO parts (library_id, kind, created_at, ${CHANGED.join(', ')}) VALUES ?`,
     [rows],
   )) as { insertId: number };
   await writeParameters(
     runner,
     table,
-    parts.map(({ part }, index) => ({ id: insertId + index, part })),
+    parts.map(({ cells }, index) => ({ id: insertId + index, cells })),
   );
 }
 
@@ -94,39 +104,48 @@ export async function replacePartsInBulk<Kind extends LibraryPart>(
   runner: QueryRunner,
   table: PartTable<Kind>,
   libraryId: number,
-  parts: readonly ReplacingPart<Kind>[],
-  { at, userId }: Stamp,
+  parts: readonly ReplacingPart[],
+  stamp: Stamp,
 ): Promise<void> {
   if (parts.length === 0) return;
-  const rows = parts.map(({ id, part, normalisedKey, version }) => [
-    id,
-    libraryId,
-    table.catalogue.kind,
-    ...textsOf(part),
-    normalisedKey,
-    version,
-    at,
-    userId,
-    at,
-  ]);
+  const rows = parts.map((part) => [part.id, ...partRow(table, libraryId, part, part.version, stamp)]);
   await runner.query(
-    `INSERT INTO parts (id, library_id, kind, ${CHANGED.join(', ')}, created_at) VALUES ?
+    `INSERT INTO parts (id, library_id, kind, created_at, ${CHANGED.join(', ')}) VALUES ?
      ON DUPLICATE KEY UPDATE ${CHANGED.map((name) => `${name} = VALUES(${name})`).join(', ')}`,
     [rows],
   );
   await writeParameters(runner, table, parts);
 }
 
+/** A part as its cells. */
+export function toCells<Kind extends LibraryPart>(table: PartTable<Kind>, part: Kind): PartCells {
+  const { manufacturer, partNumber, description, package: packageName, lifecycle, approval, origins } = part;
+  const texts = [manufacturer, partNumber, description, packageName, lifecycle, approval];
+  const { group } = table.catalogue;
+  const parameters = (part as unknown as Record<string, Record<string, string | number | null>>)[group];
+  return [...texts, JSON.stringify(origins), ...parameterKeys(table).map((key) => parameters[key])];
+}
+
+function partRow<Kind extends LibraryPart>(
+  { catalogue }: PartTable<Kind>,
+  libraryId: number,
+  { normalisedKey, cells }: KeyedPart,
+  version: number,
+  { at, userId }: Stamp,
+): unknown[] {
+  return [libraryId, catalogue.kind, at, ...cells.slice(0, TEXTS.length), normalisedKey, version, at, userId];
+}
+
 async function writeParameters<Kind extends LibraryPart>(
   runner: QueryRunner,
   table: PartTable<Kind>,
-  parts: readonly { id: number; part: Kind }[],
+  parts: readonly { id: number; cells: PartCells }[],
 ): Promise<void> {
-  const names = [...parameterNames(table), 'origins'];
+  const names = ['origins', ...parameterNames(table)];
   await runner.query(
     `INSERT INTO ${table.name} (part_id, ${names.join(', ')}) VALUES ?
      ON DUPLICATE KEY UPDATE ${names.map((name) => `${name} = VALUES(${name})`).join(', ')}`,
-    [parts.map(({ id, part }) => [id, ...parametersOf(table, part), JSON.stringify(part.origins)])],
+    [parts.map(({ id, cells }) => [id, ...cells.slice(TEXTS.length)])],
   );
 }
 
@@ -138,28 +157,13 @@ function parameterNames<Kind extends LibraryPart>(table: PartTable<Kind>): strin
   return parameterKeys(table).map(columnName);
 }
 
-function parametersOf<Kind extends LibraryPart>(table: PartTable<Kind>, part: Kind): unknown[] {
-  const parameters = (part as unknown as Record<string, Record<string, unknown>>)[table.catalogue.group];
-  return parameterKeys(table).map((key) => parameters[key]);
-}
-
-function textsOf({
-  manufacturer,
-  partNumber,
-  description,
-  package: packageName,
-  lifecycle,
-  approval,
-}: LibraryPart) {
-  return [manufacturer, partNumber, description, packageName, lifecycle, approval];
-}
-
 function toFoundPart<Kind extends LibraryPart>(table: PartTable<Kind>, row: unknown[]): FoundPart<Kind> {
   const [id, libraryId, kind, version, normalisedKey] = row as [number, number, PartKind, number, string];
   const ofKind = kind === table.catalogue.kind;
   return { id, libraryId, kind, version, normalisedKey, part: ofKind ? toPart(table, row.slice(5)) : null };
 }
 
+/** The part that the cells hold: the inverse of {@link toCells}. */
 function toPart<Kind extends LibraryPart>(table: PartTable<Kind>, cells: unknown[]): Kind {
   const [manufacturer, partNumber, description, packageName, lifecycle, approval, origins, ...figures] =
     cells;

@@ -78,6 +78,27 @@ export const SAMPLES: Record<string, unknown[]> = {
   'post /api/auth/sign-out': [{}],
   'post /api/conditions': [{ name: 'River geophone', ...request }],
   'patch /api/conditions/{id}': [{ version: 1, name: 'Turbidity', ...request }],
+  'put /api/imports/{id}/mapping': [
+    {
+      decimalMark: 'point',
+      columns: [
+        { column: 0, field: 'manufacturer' },
+        { column: 1, field: 'partNumber', form: 'value', unit: null },
+        {
+          column: 2,
+          field: 'voltageNoise',
+          form: 'spot',
+          unit: 'nV/√Hz',
+          frequency: 1000,
+          origin: 'maximum',
+        },
+      ],
+    },
+    { encoding: 'utf-8', delimiter: 'comma', headerLine: 1 },
+  ],
+  'post /api/imports/{id}/apply': [{}],
+  'post /api/imports/{id}/cancel': [{}],
+  'post /api/imports/{id}/undo': [{}],
   'post /api/op-amps': [opAmp],
   'patch /api/op-amps/{id}': [{ version: 1, partNumber: 'AA102', amplifier: { voltageNoise: 2e-9 } }],
   'post /api/resistors': [resistor],

@@ -42,26 +42,13 @@ const TABLES = [
     PRIMARY KEY (import_id),
     CONSTRAINT import_progress_import FOREIGN KEY (import_id) REFERENCES imports (id) ON DELETE CASCADE ON UPDATE NO ACTION
   ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_unicode_ci`,
-  `CREATE TABLE IF NOT EXISTS import_rows (
+  `CREATE TABLE IF NOT EXISTS import_portions (
     import_id INT UNSIGNED NOT NULL,
-    position INT UNSIGNED NOT NULL,
-    line INT UNSIGNED NOT NULL,
-    state VARCHAR(10) COLLATE utf8mb4_bin NOT NULL,
-    manufacturer VARCHAR(120) NOT NULL,
-    part_number VARCHAR(120) NOT NULL,
-    normalised_key VARCHAR(730) COLLATE utf8mb4_bin NULL,
-    part_id INT UNSIGNED NULL,
-    base_version INT UNSIGNED NULL,
-    content JSON NULL,
-    before_image JSON NULL,
-    changes JSON NULL,
-    doubts JSON NULL,
-    errors JSON NULL,
-    cells JSON NULL,
-    kept TINYINT NOT NULL DEFAULT 0,
-    INDEX import_rows_state (import_id, state),
-    PRIMARY KEY (import_id, position),
-    CONSTRAINT import_rows_import FOREIGN KEY (import_id) REFERENCES imports (id) ON DELETE CASCADE ON UPDATE NO ACTION
+    place INT UNSIGNED NOT NULL,
+    counts JSON NOT NULL,
+    verdicts JSON NOT NULL,
+    PRIMARY KEY (import_id, place),
+    CONSTRAINT import_portions_import FOREIGN KEY (import_id) REFERENCES imports (id) ON DELETE CASCADE ON UPDATE NO ACTION
   ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_unicode_ci`,
 ];
 
@@ -73,7 +60,7 @@ export class CreateImports1796083300000 implements MigrationInterface {
   }
 
   async down(runner: QueryRunner): Promise<void> {
-    for (const table of ['import_rows', 'import_progress', 'imports'])
+    for (const table of ['import_portions', 'import_progress', 'imports'])
       await runner.query(`DROP TABLE ${table}`);
   }
 }

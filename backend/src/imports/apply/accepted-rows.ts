@@ -1,48 +1,46 @@
-import type { LibraryPart } from '@roothertz/common/parts';
-import type { QueryRunner } from 'typeorm';
-import type { ImportRow } from '../entities/import-row.entity.js';
+import { type DataSource, MoreThan } from 'typeorm';
+import type { PartCells } from '../../library/bulk-parts.js';
+import { ImportPortion } from '../entities/import-portion.entity.js';
+import type { StoredRow } from '../stored-row.js';
 
 /** A row that an import writes. */
-export type AcceptedRow = Pick<ImportRow, 'position' | 'line' | 'partNumber' | 'partId' | 'baseVersion'> & {
-  normalisedKey: string;
-  content: LibraryPart;
-  beforeImage: LibraryPart | null;
-};
+export type AcceptedRow = StoredRow & { normalisedKey: string; content: PartCells };
 
-const PORTION = 2000;
+/** A portion of an import's rows, and those among them that it writes. */
+export interface AcceptedPortion {
+  portion: ImportPortion;
+  accepted: AcceptedRow[];
+}
 
-/** The next rows behind a position that an import writes. */
-export async function acceptedPortion(
-  runner: QueryRunner,
+/** The portions of an import's rows; the next one is read by another connection meanwhile. */
+export async function* acceptedPortions(
+  dataSource: DataSource,
   importId: number,
-  after: number,
-): Promise<AcceptedRow[]> {
-  const rows: Record<string, string | number | null>[] = await runner.query(
-    `SELECT position, line, part_number, normalised_key, part_id, base_version, content, before_image
-     FROM import_rows WHERE import_id = ? AND position > ? AND state IN ('new', 'changed', 'doubtful')
-     ORDER BY position LIMIT ${PORTION}`,
-    [importId, after],
-  );
-  return rows.map(toAcceptedRow);
+): AsyncGenerator<AcceptedPortion> {
+  let portion = await portionAfter(dataSource, importId, 0);
+  while (portion !== null) {
+    const next = portionAfter(dataSource, importId, portion.portion);
+    next.catch(() => undefined);
+    yield { portion, accepted: portion.rows.filter(isAccepted) };
+    portion = await next;
+  }
 }
 
 export function keysOf(rows: readonly AcceptedRow[]): string[] {
   return rows.map(({ normalisedKey }) => normalisedKey);
 }
 
-function toAcceptedRow(row: Record<string, string | number | null>): AcceptedRow {
-  return {
-    position: row.position as number,
-    line: row.line as number,
-    partNumber: row.part_number as string,
-    normalisedKey: row.normalised_key as string,
-    partId: row.part_id as number | null,
-    baseVersion: row.base_version as number | null,
-    content: parsed(row.content)!,
-    beforeImage: parsed(row.before_image),
-  };
+function portionAfter(
+  dataSource: DataSource,
+  importId: number,
+  after: number,
+): Promise<ImportPortion | null> {
+  return dataSource.getRepository(ImportPortion).findOne({
+    where: { importId, portion: MoreThan(after) },
+    order: { portion: 'ASC' },
+  });
 }
 
-function parsed(json: unknown): LibraryPart | null {
-  return (typeof json === 'string' ? JSON.parse(json) : json) as LibraryPart | null;
+function isAccepted(row: StoredRow): row is AcceptedRow {
+  return row.content !== undefined;
 }

@@ -1,7 +1,7 @@
 import { Injectable } from '@nestjs/common';
-import type { LibraryPart } from '@roothertz/common/parts';
-import type { QueryRunner } from 'typeorm';
-import { insertPartsInBulk, replacePartsInBulk } from '../../library/bulk-parts.js';
+import { InjectDataSource } from '@nestjs/typeorm';
+import type { DataSource, QueryRunner } from 'typeorm';
+import { insertPartsInBulk, type KeyedPart, replacePartsInBulk } from '../../library/bulk-parts.js';
 import { LibraryService } from '../../library/library.service.js';
 import type { Caller } from '../../shared/access/caller.js';
 import { DomainError } from '../../shared/errors/domain-error.js';
@@ -11,7 +11,7 @@ import { type ImportJob, ImportJobs } from '../import-jobs.service.js';
 import { APPLICABLE_STATES } from '../import-states.js';
 import { tableOf } from '../part-kinds.js';
 import { acceptedRows } from '../row-counts.js';
-import { acceptedPortion, type AcceptedRow, keysOf } from './accepted-rows.js';
+import { acceptedPortions, type AcceptedRow, keysOf } from './accepted-rows.js';
 import { changeLibraryAlone } from './library-lock.js';
 import { currentParts } from './current-parts.js';
 
@@ -19,6 +19,7 @@ import { currentParts } from './current-parts.js';
 @Injectable()
 export class ApplyImport {
   constructor(
+    @InjectDataSource() private readonly dataSource: DataSource,
     private readonly files: ImportFiles,
     private readonly jobs: ImportJobs,
     private readonly libraries: LibraryService,
@@ -38,13 +39,10 @@ export class ApplyImport {
     const stamp = { at: new Date(), userId: caller.userId };
     await changeLibraryAlone(job, libraryId, 'applying', async (revisionBefore) => {
       const asChecked = revisionBefore === entity.checkedRevision;
-      let [done, last] = [0, 0];
-      for (;;) {
-        const rows = await acceptedPortion(job.runner, entity.id, last);
-        if (rows.length === 0) break;
-        if (!asChecked) await refuseEdited(job.runner, libraryId, rows);
+      let done = 0;
+      for await (const { accepted: rows } of acceptedPortions(this.dataSource, entity.id)) {
+        if (!asChecked && rows.length > 0) await refuseEdited(job.runner, libraryId, rows);
         await writeRows(job.runner, entity, libraryId, rows, stamp);
-        last = rows.at(-1)!.position;
         done += rows.length;
         await job.progress(done);
       }
@@ -66,16 +64,16 @@ async function writeRows(
   stamp: { at: Date; userId: number },
 ): Promise<void> {
   const table = tableOf(kind);
-  const added = rows.filter(({ partId }) => partId === null);
+  const added = rows.filter(({ partId }) => partId === undefined);
   await insertPartsInBulk(runner, table, libraryId, added.map(toKeyed), stamp);
   const changed = rows.flatMap((row) =>
-    row.partId === null ? [] : [{ ...toKeyed(row), id: row.partId, version: row.baseVersion! + 1 }],
+    row.partId === undefined ? [] : [{ ...toKeyed(row), id: row.partId, version: row.baseVersion! + 1 }],
   );
   await replacePartsInBulk(runner, table, libraryId, changed, stamp);
 }
 
-function toKeyed({ normalisedKey, content }: AcceptedRow): { normalisedKey: string; part: LibraryPart } {
-  return { normalisedKey, part: content };
+function toKeyed({ normalisedKey, content }: AcceptedRow): KeyedPart {
+  return { normalisedKey, cells: content };
 }
 
 /** What the verdicts were given on must still be so: new parts aren't there, changed ones have their version. */
@@ -87,7 +85,7 @@ async function refuseEdited(
   const current = await currentParts(runner, libraryId, keysOf(rows));
   const edited = rows.find(({ normalisedKey, partId, baseVersion }) => {
     const part = current.get(normalisedKey);
-    return partId === null ? part !== undefined : part?.id !== partId || part.version !== baseVersion;
+    return partId === undefined ? part !== undefined : part?.id !== partId || part.version !== baseVersion;
   });
   if (edited === undefined) return;
   const { line, partNumber } = edited;

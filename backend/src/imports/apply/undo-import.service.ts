@@ -1,13 +1,15 @@
 import { Injectable } from '@nestjs/common';
-import type { QueryRunner } from 'typeorm';
+import { InjectDataSource } from '@nestjs/typeorm';
+import type { DataSource, QueryRunner } from 'typeorm';
 import { replacePartsInBulk } from '../../library/bulk-parts.js';
 import { LibraryService } from '../../library/library.service.js';
 import type { Caller } from '../../shared/access/caller.js';
 import { Import } from '../entities/import.entity.js';
+import { ImportPortion } from '../entities/import-portion.entity.js';
 import { type ImportJob, ImportJobs } from '../import-jobs.service.js';
 import { tableOf } from '../part-kinds.js';
 import { acceptedRows } from '../row-counts.js';
-import { acceptedPortion, type AcceptedRow, keysOf } from './accepted-rows.js';
+import { acceptedPortions, type AcceptedRow, keysOf } from './accepted-rows.js';
 import { type CurrentPart, currentParts } from './current-parts.js';
 import { changeLibraryAlone } from './library-lock.js';
 
@@ -21,6 +23,7 @@ interface Untouched {
 @Injectable()
 export class UndoImport {
   constructor(
+    @InjectDataSource() private readonly dataSource: DataSource,
     private readonly jobs: ImportJobs,
     private readonly libraries: LibraryService,
   ) {}
@@ -36,10 +39,9 @@ export class UndoImport {
   private undo(job: ImportJob, caller: Caller, entity: Import, libraryId: number): Promise<void> {
     const stamp = { at: new Date(), userId: caller.userId };
     return changeLibraryAlone(job, libraryId, 'undoing', async () => {
-      let [done, last, kept] = [0, 0, 0];
-      for (;;) {
-        const rows = await acceptedPortion(job.runner, entity.id, last);
-        if (rows.length === 0) break;
+      let [done, kept] = [0, 0];
+      for await (const { portion, accepted: rows } of acceptedPortions(this.dataSource, entity.id)) {
+        if (rows.length === 0) continue;
         const untouched = await untouchedRows(job.runner, libraryId, entity, rows);
         await takeBack(job.runner, untouched);
         await replacePartsInBulk(
@@ -49,8 +51,7 @@ export class UndoImport {
           untouched.flatMap(({ row, part }) => restored(row, part)),
           stamp,
         );
-        kept += await markKept(job.runner, entity.id, rows, untouched);
-        last = rows.at(-1)!.position;
+        kept += await markKept(job.runner, portion, rows, untouched);
         done += rows.length;
         await job.progress(done);
       }
@@ -74,7 +75,7 @@ async function untouchedRows(
   const inUse = await partsWithOffers(
     runner,
     rows.flatMap(({ partId, normalisedKey }) =>
-      partId === null ? (current.get(normalisedKey)?.id ?? []) : [],
+      partId === undefined ? (current.get(normalisedKey)?.id ?? []) : [],
     ),
   );
   return rows.flatMap((row) => {
@@ -96,26 +97,28 @@ async function partsWithOffers(runner: QueryRunner, ids: readonly number[]): Pro
 }
 
 async function takeBack(runner: QueryRunner, untouched: readonly Untouched[]): Promise<void> {
-  const ids = untouched.flatMap(({ row, part }) => (row.partId === null ? [part.id] : []));
+  const ids = untouched.flatMap(({ row, part }) => (row.partId === undefined ? [part.id] : []));
   if (ids.length > 0) await runner.query('DELETE FROM parts WHERE id IN (?)', [ids]);
 }
 
-function restored({ beforeImage, normalisedKey }: AcceptedRow, { id, version }: CurrentPart) {
-  return beforeImage === null ? [] : [{ id, version: version + 1, normalisedKey, part: beforeImage }];
+function restored({ before, normalisedKey }: AcceptedRow, { id, version }: CurrentPart) {
+  return before === undefined ? [] : [{ id, version: version + 1, normalisedKey, cells: before }];
 }
 
 async function markKept(
   runner: QueryRunner,
-  importId: number,
+  { importId, portion, counts, rows: all }: ImportPortion,
   rows: readonly AcceptedRow[],
   untouched: readonly Untouched[],
 ): Promise<number> {
-  const undone = new Set(untouched.map(({ row }) => row.position));
-  const kept = rows.filter(({ position }) => !undone.has(position)).map(({ position }) => position);
+  const undone = new Set(untouched.map(({ row }) => row));
+  const kept = rows.filter((row) => !undone.has(row));
+  for (const row of kept) row.kept = true;
   if (kept.length > 0)
-    await runner.query('UPDATE import_rows SET kept = 1 WHERE import_id = ? AND position IN (?)', [
-      importId,
-      kept,
-    ]);
+    await runner.manager.update(
+      ImportPortion,
+      { importId, portion },
+      { counts: { ...counts, kept: kept.length }, rows: all as object[] },
+    );
   return kept.length;
 }

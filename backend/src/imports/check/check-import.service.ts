@@ -1,12 +1,12 @@
 import type { LibraryPart } from '@roothertz/common/parts';
 import { Injectable } from '@nestjs/common';
 import type { QueryRunner } from 'typeorm';
-import { findPartsByKeys, type FoundPart } from '../../library/bulk-parts.js';
+import { findPartsByKeys, type FoundPart, knownKeys } from '../../library/bulk-parts.js';
 import { LibraryService, type ReadableLibrary } from '../../library/library.service.js';
 import type { PartTable } from '../../library/part-tables.js';
 import type { Caller } from '../../shared/access/caller.js';
 import { Import } from '../entities/import.entity.js';
-import { ImportRow } from '../entities/import-row.entity.js';
+import { ImportPortion } from '../entities/import-portion.entity.js';
 import { readRecords } from '../file/csv-records.js';
 import { ImportFiles } from '../import-files.service.js';
 import { type ImportJob, ImportJobs } from '../import-jobs.service.js';
@@ -17,7 +17,7 @@ import { type CheckedRow, type ReadRow, RowChecker } from './row-checker.js';
 import { writeVerdicts } from './row-writer.js';
 
 /** Rows that are read, looked up and written together. */
-const PORTION = 1000;
+const PORTION = 500;
 
 /** Gives every row of an import its verdict, all in one transaction. */
 @Injectable()
@@ -45,16 +45,24 @@ export class CheckImport {
     const table = tableOf(entity.kind);
     const checker = new RowChecker(table.catalogue, entity, ownLibraryId);
     const counts = noRows();
-    let position = 0;
+    let [position, portion] = [0, 1];
+    let writing = Promise.resolve();
     await runner.startTransaction();
     try {
-      await runner.manager.delete(ImportRow, { importId: entity.id });
+      await runner.manager.delete(ImportPortion, { importId: entity.id });
+      const known = await knownKeys(
+        runner,
+        libraries.map(({ id }) => id),
+      );
       for await (const rows of this.readRows(entity, checker)) {
-        const checked = await checkRows(runner, table, checker, libraries, rows);
-        await writeVerdicts(runner, entity.id, position + 1, checked, counts);
+        const checked = await checkRows(runner, table, checker, libraries, known, rows);
+        await writing;
+        writing = writeVerdicts(runner, table, { importId: entity.id, portion }, checked, counts);
+        portion += 1;
         position += rows.length;
         await job.progress(position);
       }
+      await writing;
       const checkedRevision = libraries.find(({ id }) => id === ownLibraryId)?.revision ?? null;
       await runner.manager.update(
         Import,
@@ -63,6 +71,7 @@ export class CheckImport {
       );
       await runner.commitTransaction();
     } catch (error) {
+      await writing.catch(() => undefined);
       await runner.rollbackTransaction().catch(() => undefined);
       throw error;
     }
@@ -83,9 +92,11 @@ async function checkRows(
   table: PartTable<LibraryPart>,
   checker: RowChecker,
   libraries: readonly ReadableLibrary[],
+  known: ReadonlySet<string> | null,
   rows: readonly ReadRow[],
 ): Promise<CheckedRow[]> {
-  const keys = [...new Set(rows.flatMap(({ key }) => (key === null ? [] : [key])))];
+  const named = rows.flatMap(({ key }) => (key === null ? [] : [key]));
+  const keys = [...new Set(named)].filter((key) => known?.has(key) ?? true);
   const ids = libraries.map(({ id }) => id);
   const found = new Map<string, FoundPart<LibraryPart>[]>();
   for (const part of await findPartsByKeys(runner, table, ids, keys))

@@ -1,5 +1,5 @@
+import { hash } from 'node:crypto';
 import {
-  type FieldChange,
   type ImportRowReader,
   importRowReader,
   type RowError,
@@ -30,7 +30,8 @@ export interface CheckedRow {
 
 interface Seen {
   line: number;
-  stated: string;
+  /** Of its cells as they stand in the file. */
+  written: string;
 }
 
 /** Checks the rows of one list, which it remembers by their keys. */
@@ -60,10 +61,10 @@ export class RowChecker {
     if (existing !== null && existing.part === null)
       return this.refuseAt(record, reading, key, 'the library has a part of another kind by this name');
     const before = key === null ? undefined : this.seen.get(key);
-    const stated = JSON.stringify([...reading.stated]);
-    if (before !== undefined) return this.checkAgain(record, reading, key!, before, stated, existing);
+    const written = hash('md5', record.cells.join('\u0000'), 'base64');
+    if (before !== undefined) return this.checkAgain(record, reading, key!, before, written, existing);
     const verdict = this.judge(reading, { existing: existing?.part ?? null, curated });
-    if (key !== null && verdict.state !== 'refused') this.seen.set(key, { line: record.line, stated });
+    if (key !== null && verdict.state !== 'refused') this.seen.set(key, { line: record.line, written });
     return { record, key, verdict, existing };
   }
 
@@ -72,11 +73,11 @@ export class RowChecker {
     record: CsvRecord,
     reading: Extract<Reading, { ok: true }>,
     key: string,
-    { line, stated: before }: Seen,
-    stated: string,
+    { line, written: before }: Seen,
+    written: string,
     existing: FoundPart<LibraryPart> | null,
   ): CheckedRow {
-    if (stated !== before)
+    if (written !== before)
       return this.refuseAt(record, reading, key, `stands on line ${line} too, with other values`);
     const part = Object.fromEntries(reading.stated) as unknown as LibraryPart;
     const doubts = [{ code: 'repeated' as const, field: null, message: `the same as line ${line}` }];
@@ -92,11 +93,6 @@ export class RowChecker {
     const error = this.reader.errorAt('partNumber', why, cells);
     return refused(record, key, [{ ...error, expected: 'each part once' }]);
   }
-}
-
-/** The changes that are shown of a row; all of a new part's values are new. */
-export function changesOf(verdict: RowVerdict<LibraryPart>): FieldChange[] | null {
-  return 'changes' in verdict && verdict.changes.length > 0 ? verdict.changes : null;
 }
 
 function refused(record: CsvRecord, key: string | null, errors: RowError[]): CheckedRow {

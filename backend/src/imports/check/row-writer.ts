@@ -1,76 +1,49 @@
+import type { LibraryPart } from '@roothertz/common/parts';
+import type { PoolConnection } from 'mysql2';
 import type { QueryRunner } from 'typeorm';
+import { toCells } from '../../library/bulk-parts.js';
+import type { PartTable } from '../../library/part-tables.js';
 import { shortened } from '../../shared/text/shortened.js';
-import type { RowCounts } from '../row-counts.js';
-import { changesOf, type CheckedRow } from './row-checker.js';
+import { noRows, type RowCounts } from '../row-counts.js';
+import type { StoredRow } from '../stored-row.js';
+import type { CheckedRow } from './row-checker.js';
 
 const LONGEST_CELL = 2000;
-const NAMES = [
-  'import_id',
-  'position',
-  'line',
-  'state',
-  'manufacturer',
-  'part_number',
-  'normalised_key',
-  'part_id',
-  'base_version',
-  'content',
-  'before_image',
-  'changes',
-  'doubts',
-  'errors',
-  'cells',
-];
+const SQL = 'INSERT INTO import_portions (import_id, place, counts, verdicts) VALUES (?, ?, ?, ?)';
 
-/** Stores the verdicts of a portion of rows, of which the first has this position, and counts them. */
+/** Stores the verdicts of a portion of rows and adds them to the counts. */
 export async function writeVerdicts(
   runner: QueryRunner,
-  importId: number,
-  first: number,
+  table: PartTable<LibraryPart>,
+  place: { importId: number; portion: number },
   rows: readonly CheckedRow[],
   counts: RowCounts,
 ): Promise<void> {
-  const values = rows.map((row, index) => [importId, first + index, ...verdictValues(row)]);
-  for (const { verdict } of rows) counts[verdict.state] += 1;
-  await runner.query(`INSERT INTO import_rows (${NAMES.join(', ')}) VALUES ?`, [values]);
+  const own = noRows();
+  for (const { verdict } of rows) {
+    own[verdict.state] += 1;
+    counts[verdict.state] += 1;
+  }
+  const stored = JSON.stringify(rows.map((row) => toStored(table, row)));
+  const connection = (await runner.connect()) as PoolConnection;
+  const values = [place.importId, place.portion, JSON.stringify({ ...own, kept: 0 }), stored];
+  await connection.promise().execute(SQL, values);
 }
 
-function verdictValues(row: CheckedRow): unknown[] {
-  const { record, verdict, key, existing } = row;
-  const head = [record.line, verdict.state];
-  if (verdict.state === 'refused')
-    return [
-      ...head,
-      '',
-      '',
-      null,
-      null,
-      null,
-      null,
-      null,
-      null,
-      null,
-      json(verdict.errors.map((error) => ({ ...error, value: shortened(error.value, LONGEST_CELL) }))),
-      json(record.cells),
-    ];
-  const { manufacturer, partNumber } = verdict.part;
-  const written = verdict.state !== 'unchanged';
-  return [
-    ...head,
-    manufacturer,
-    partNumber,
-    key,
-    existing?.id ?? null,
-    existing?.version ?? null,
-    written ? json(verdict.part) : null,
-    written && existing ? json(existing.part) : null,
-    json(changesOf(verdict)),
-    json(verdict.doubts.length > 0 ? verdict.doubts : null),
-    null,
-    null,
-  ];
-}
-
-function json(value: unknown): string | null {
-  return value === null ? null : JSON.stringify(value);
+function toStored(table: PartTable<LibraryPart>, { record, verdict, key, existing }: CheckedRow): StoredRow {
+  const { line } = record;
+  if (verdict.state === 'refused') {
+    const errors = verdict.errors.map((error) => ({ ...error, value: shortened(error.value, LONGEST_CELL) }));
+    return { line, state: verdict.state, manufacturer: '', partNumber: '', errors, cells: record.cells };
+  }
+  const { part, doubts, state } = verdict;
+  const { manufacturer, partNumber } = part;
+  const row: StoredRow = { line, state, manufacturer, partNumber };
+  if (doubts.length > 0) row.doubts = doubts;
+  if (state === 'unchanged') return row;
+  row.normalisedKey = key!;
+  row.content = toCells(table, part);
+  if (!existing?.part) return row;
+  const { id: partId, version: baseVersion } = existing;
+  return { ...row, partId, baseVersion, before: toCells(table, existing.part), changes: verdict.changes };
 }

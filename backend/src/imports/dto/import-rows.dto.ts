@@ -11,15 +11,12 @@ import { ApiProperty } from '@nestjs/swagger';
 import { ListQueryDto } from '../../shared/list/list-query.dto.js';
 import { listOf } from '../../shared/list/list-response.js';
 import { Option } from '../../shared/validation/option.decorator.js';
-import type { ImportRow } from '../entities/import-row.entity.js';
 import type { ImportColumn } from '../file/import-columns.js';
-
-/** The verdicts, and the rows that an undoing left as they are. */
-export const ROW_LISTS = [...ROW_STATES, 'kept'] as const;
+import { ROW_LISTS, type RowList, type StoredRow } from '../stored-row.js';
 
 export class ListImportRowsDto extends ListQueryDto {
   @Option(ROW_LISTS, { optional: true })
-  state?: (typeof ROW_LISTS)[number];
+  state?: RowList;
 }
 
 const VALUE = { oneOf: [{ type: 'string' }, { type: 'number' }], nullable: true };
@@ -92,7 +89,7 @@ export class ImportRowDto {
 
 export class ImportRowListDto extends listOf(ImportRowDto) {}
 
-export function toImportRow(row: ImportRow, columns: readonly ImportColumn[]): ImportRowDto {
+export function toImportRow(row: StoredRow, columns: readonly ImportColumn[]): ImportRowDto {
   const { line, state, manufacturer, partNumber, changes, doubts, errors, kept } = row;
   return {
     line,
@@ -107,6 +104,6 @@ export function toImportRow(row: ImportRow, columns: readonly ImportColumn[]): I
       why,
       expected,
     })),
-    kept: kept === 1,
+    kept: kept ?? false,
   };
 }

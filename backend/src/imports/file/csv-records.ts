@@ -17,7 +17,10 @@ export interface ParsedRecord {
   info: { lines: number };
 }
 
-const LONGEST_RECORD = 500_000;
+const LONGEST_RECORD = 300_000;
+/** In characters, so that a portion of long rows goes to the database in one piece. */
+const LARGEST_PORTION = 300_000;
+const COUNTED_AT_ONCE = 5000;
 const LINE_BREAK = /\r\n|\n|\r/g;
 
 /** How csv-parse is to read a list: as it comes, with rows of any length and quotes within cells. */
@@ -40,22 +43,42 @@ export async function* readRecords(
   dialect: Dialect,
   portion: number,
 ): AsyncGenerator<CsvRecord[]> {
-  const parser = parse(parserOptions(dialect.delimiter));
-  pipeline(createReadStream(path), iconv.decodeStream(dialect.encoding), parser, () => {});
   let records: CsvRecord[] = [];
+  let size = 0;
+  for await (const parsed of parsedFile<ParsedRecord>(path, dialect, true)) {
+    const record = toRecord(parsed);
+    if (record.line < dialect.headerLine) continue;
+    records.push(record);
+    for (const cell of record.cells) size += cell.length;
+    if (records.length < portion && size < LARGEST_PORTION) continue;
+    yield records;
+    records = [];
+    size = 0;
+  }
+  if (records.length > 0) yield records;
+}
+
+/** Counts the rows of a file, those above the headings among them. */
+export async function* countRecords(path: string, dialect: Dialect): AsyncGenerator<number> {
+  const rows = parsedFile<string[]>(path, dialect, false);
+  let count = 0;
+  while (!(await rows.next()).done) {
+    count += 1;
+    if (count < COUNTED_AT_ONCE) continue;
+    yield count;
+    count = 0;
+  }
+  yield count;
+}
+
+async function* parsedFile<Parsed>(path: string, dialect: Dialect, info: boolean): AsyncGenerator<Parsed> {
+  const parser = parse({ ...parserOptions(dialect.delimiter), info });
+  pipeline(createReadStream(path), iconv.decodeStream(dialect.encoding), parser, () => {});
   try {
-    for await (const parsed of parser as AsyncIterable<ParsedRecord>) {
-      const record = toRecord(parsed);
-      if (record.line < dialect.headerLine) continue;
-      records.push(record);
-      if (records.length < portion) continue;
-      yield records;
-      records = [];
-    }
+    yield* parser as AsyncIterable<Parsed>;
   } catch (error) {
     throw toUnreadable(error);
   }
-  if (records.length > 0) yield records;
 }
 
 /** A quoted cell may go over several lines: the row begins before them. */

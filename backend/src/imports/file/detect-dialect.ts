@@ -17,6 +17,8 @@ export interface DetectedDialect {
   dialect: Dialect;
   header: CsvRecord;
   sample: CsvRecord[];
+  /** How many rows stand above the headings. */
+  recordsBefore: number;
 }
 
 /** Detects how a list is written; null where not one row can be read. */
@@ -35,20 +37,19 @@ export function detectDialect(
     .filter((candidate) => candidate !== null)
     .sort((one, other) => other.known - one.known || other.evenness - one.evenness);
   if (best === undefined) return null;
-  const { delimiter, header, sample } = best;
+  const { delimiter, header, sample, recordsBefore } = best;
   const decimalMark = choice.decimalMark ?? decimalMarkOf(sample);
   const { byteOrderMark } = facts;
   return {
     dialect: { encoding, byteOrderMark, delimiter, decimalMark, headerLine: header.line },
     header,
     sample,
+    recordsBefore,
   };
 }
 
-interface Candidate {
+interface Candidate extends Omit<DetectedDialect, 'dialect'> {
   delimiter: Delimiter;
-  header: CsvRecord;
-  sample: CsvRecord[];
   /** How many headings mean something. */
   known: number;
   /** How many columns the rows have, less where they differ in it. */
@@ -68,8 +69,10 @@ function readAs(
       ? findHeader(records.slice(0, HEADER_WITHIN), knownIn)
       : records.find(({ line }) => line >= headerLine);
   if (header === undefined) return null;
-  const sample = records.slice(records.indexOf(header) + 1);
-  return { delimiter, header, sample, known: knownIn(header), evenness: evennessOf([header, ...sample]) };
+  const recordsBefore = records.indexOf(header);
+  const sample = records.slice(recordsBefore + 1);
+  const evenness = evennessOf([header, ...sample]);
+  return { delimiter, header, sample, recordsBefore, known: knownIn(header), evenness };
 }
 
 /** The first of the rows whose cells mean most; where none means anything, the first of the usual width. */

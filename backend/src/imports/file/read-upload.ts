@@ -2,14 +2,13 @@ import type { ListedFields } from '@roothertz/common/parts';
 import iconv from 'iconv-lite';
 import { DomainError } from '../../shared/errors/domain-error.js';
 import type { Import } from '../entities/import.entity.js';
-import { readRecords } from './csv-records.js';
+import { countRecords } from './csv-records.js';
 import { detectDialect } from './detect-dialect.js';
 import type { Dialect, DialectChoice, Encoding } from './dialect.js';
 import { headerKey, importColumns, MOST_COLUMNS } from './import-columns.js';
 import { inspectFile } from './text-encoding.js';
 
 const MOST_ROWS = 500_000;
-const PORTION = 5000;
 /** So many of a list's characters may be controls; a file with more is no text. */
 const CONTROL_SHARE = 0.05;
 
@@ -29,10 +28,10 @@ export async function readUpload(
   const detected = detectDialect(catalogue, facts, choice);
   if (detected === null || isNoText(facts.head, detected.dialect.encoding))
     throw new DomainError('import.unreadable', 'No row can be read: is the file a text with a delimiter?');
-  const { dialect, header } = detected;
+  const { dialect, header, recordsBefore } = detected;
   if (header.cells.length > MOST_COLUMNS)
     throw new DomainError('import.unreadable', `The list has more than ${MOST_COLUMNS} columns.`);
-  const rowCount = await countRows(path, dialect);
+  const rowCount = await countRows(path, dialect, recordsBefore);
   if (rowCount === 0)
     throw new DomainError('import.unreadable', `There is no row below the headings of line ${header.line}.`);
   return {
@@ -51,10 +50,10 @@ function isNoText(head: Buffer, encoding: Encoding): boolean {
   return controls > text.length * CONTROL_SHARE;
 }
 
-async function countRows(path: string, dialect: Dialect): Promise<number> {
-  let count = -1;
-  for await (const records of readRecords(path, dialect, PORTION)) {
-    count += records.length;
+async function countRows(path: string, dialect: Dialect, recordsBefore: number): Promise<number> {
+  let count = -recordsBefore - 1;
+  for await (const more of countRecords(path, dialect)) {
+    count += more;
     if (count > MOST_ROWS)
       throw new DomainError('import.too-large', 'The list has more than 500 000 rows: split it.');
   }
