@@ -67,8 +67,9 @@ describe('the resistors', () => {
     await fill(page, 'resistance to', '0.0047 MΩ');
     await page.keyboard.press('Enter');
     await page.getByText(/^\d+ parts: \d+ curated, 0 of your own/).waitFor();
-    const values = await page.locator('[col-id=resistance][role=gridcell]').allTextContents();
-    expect(new Set(values)).toEqual(new Set(['4.70\u2009kΩ']));
+    const values = async () =>
+      new Set(await page.locator('[col-id=resistance][role=gridcell]').allTextContents());
+    await expect.poll(values, { timeout: 15_000 }).toEqual(new Set(['4.70\u2009kΩ']));
     const indices = await page.locator('[col-id=noiseIndex][role=gridcell]').allTextContents();
     const figures = indices.map((text) => Number(text.replace('−', '-')));
     expect(figures).toEqual([...figures].sort((one, other) => other - one));
