@@ -22,7 +22,9 @@ function runCommon({ ngspice, environment }) {
   return runVitest('common', [], { ...environment, NGSPICE_PATH: ngspice });
 }
 
+/** One of its tests kills a server of the built application. */
 async function runBackend({ server, environment }) {
+  await buildStale(['common', 'backend']);
   await createDatabase(server, 'roothertz_test', { fresh: true });
   const env = { ...environment, NODE_ENV: 'test', ...server.environment('roothertz_test') };
   return runReporting('backend', (report) => ['jest', '--json', `--outputFile=${report}`], 'backend', env);

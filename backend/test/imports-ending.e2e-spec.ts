@@ -1,5 +1,6 @@
 import { type ChildProcess, spawn } from 'node:child_process';
 import { once } from 'node:events';
+import { rm } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import supertest from 'supertest';
@@ -33,7 +34,10 @@ describe('an import whose server ends', () => {
     await createResistor(librarian, { manufacturer: 'Vireo', partNumber: 'M-0' });
   });
   afterEach(() => void server?.kill('SIGKILL'));
-  afterAll(() => app.close());
+  afterAll(async () => {
+    await app.close();
+    await rm(SHARED.IMPORT_DIR, { recursive: true });
+  });
 
   const libraryOf = async () => {
     const [library] = await app.dataSource.query(

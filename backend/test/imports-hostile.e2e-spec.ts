@@ -1,12 +1,12 @@
 import iconv from 'iconv-lite';
-import { readdir } from 'node:fs/promises';
+import { readdir, rm } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { checkedList, ended, proposedMapping, rowsOf, sendList, uploadList } from './factories/imports.js';
 import { createTeam, signInMember, startTestApp, type TestApp, type TestMember } from './support/index.js';
 import { Import } from '../src/imports/entities/import.entity.js';
 
-const DIRECTORY = join(tmpdir(), `roothertz-imports-test-${process.pid}`);
+const DIRECTORY = join(tmpdir(), `roothertz-imports-hostile-${process.pid}`);
 const HEADINGS = ['Hersteller', 'Bestellnummer', 'Widerstand [kΩ]', 'Beschreibung'];
 const ROW = ['Müller & Söhne', 'R-1', '4,7', '±0,1 %'];
 
@@ -46,7 +46,10 @@ describe('hostile lists', () => {
   beforeEach(async () => {
     librarian = await signInMember(app, await createTeam(app), ['librarian']);
   });
-  afterAll(() => app.close());
+  afterAll(async () => {
+    await app.close();
+    await rm(DIRECTORY, { recursive: true });
+  });
 
   it.each(COMBINATIONS)('are read in %s (mark: %s) with %s', async (encoding, mark, delimiter, character) => {
     const quoted = (cells: string[]) =>

@@ -1,3 +1,6 @@
+import { rm } from 'node:fs/promises';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import {
   applyList,
   checkedList,
@@ -13,6 +16,7 @@ import { createTeam, signInMember, startTestApp, type TestApp, type TestMember }
 import { Part } from '../src/library/entities/part.entity.js';
 import { ImportPortion } from '../src/imports/entities/import-portion.entity.js';
 
+const DIRECTORY = join(tmpdir(), `roothertz-imports-test-${process.pid}`);
 const GERMAN = [
   'Bauteilliste Einkauf;;;;;;;',
   '',
@@ -32,14 +36,17 @@ describe('imports', () => {
   let engineer: TestMember;
 
   beforeAll(async () => {
-    app = await startTestApp();
+    app = await startTestApp({ IMPORT_DIR: DIRECTORY });
   });
   beforeEach(async () => {
     const team = await createTeam(app);
     librarian = await signInMember(app, team, ['librarian']);
     engineer = await signInMember(app, team, ['engineer']);
   });
-  afterAll(() => app.close());
+  afterAll(async () => {
+    await app.close();
+    await rm(DIRECTORY, { recursive: true });
+  });
 
   const opAmps = async (member = librarian) =>
     (await member.agent.get('/api/op-amps?library=team&limit=1000').expect(200)).body.items;

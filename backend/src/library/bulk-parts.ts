@@ -37,6 +37,7 @@ export interface Stamp {
 
 const FIRST_VERSION = 1;
 const MOST_KEYS = 150_000;
+const KEYS_AT_ONCE = 5000;
 const TEXTS = ['manufacturer', 'part_number', 'description', 'package', 'lifecycle', 'approval'];
 const CHANGED = [...TEXTS, 'normalised_key', 'version', 'updated_at', 'updated_by'];
 
@@ -71,11 +72,19 @@ export async function knownKeys(
   runner: QueryRunner,
   libraryIds: readonly number[],
 ): Promise<ReadonlySet<string> | null> {
-  const rows: { normalisedKey: string }[] = await runner.query(
-    `SELECT normalised_key AS normalisedKey FROM parts WHERE library_id IN (?) LIMIT ${MOST_KEYS + 1}`,
-    [libraryIds],
-  );
-  return rows.length > MOST_KEYS ? null : new Set(rows.map(({ normalisedKey }) => normalisedKey));
+  const keys = new Set<string>();
+  for (const libraryId of libraryIds)
+    for (let last: string | undefined = ''; last !== undefined;) {
+      const rows: { key: string }[] = await runner.query(
+        `SELECT normalised_key AS \`key\` FROM parts WHERE library_id = ? AND normalised_key > ?
+         ORDER BY normalised_key LIMIT ${KEYS_AT_ONCE}`,
+        [libraryId, last],
+      );
+      for (const { key } of rows) keys.add(key);
+      if (keys.size > MOST_KEYS) return null;
+      last = rows.at(-1)?.key;
+    }
+  return keys;
 }
 
 /** Writes new parts of a kind into a library; to be called in the transaction that bumped its revision. */

@@ -1,7 +1,12 @@
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
 import type { DataSource, QueryRunner } from 'typeorm';
-import { insertPartsInBulk, type KeyedPart, replacePartsInBulk } from '../../library/bulk-parts.js';
+import {
+  insertPartsInBulk,
+  type KeyedPart,
+  replacePartsInBulk,
+  type Stamp,
+} from '../../library/bulk-parts.js';
 import { LibraryService } from '../../library/library.service.js';
 import type { Caller } from '../../shared/access/caller.js';
 import { DomainError } from '../../shared/errors/domain-error.js';
@@ -39,13 +44,7 @@ export class ApplyImport {
     const stamp = { at: new Date(), userId: caller.userId };
     await changeLibraryAlone(job, libraryId, 'applying', async (revisionBefore) => {
       const asChecked = revisionBefore === entity.checkedRevision;
-      let done = 0;
-      for await (const { accepted: rows } of acceptedPortions(this.dataSource, entity.id)) {
-        if (!asChecked && rows.length > 0) await refuseEdited(job.runner, libraryId, rows);
-        await writeRows(job.runner, entity, libraryId, rows, stamp);
-        done += rows.length;
-        await job.progress(done);
-      }
+      await this.writePortions(job, entity, libraryId, { stamp, asChecked });
       await job.runner.manager.update(
         Import,
         { id: entity.id },
@@ -54,6 +53,31 @@ export class ApplyImport {
     });
     if (entity.storedName !== null) await this.files.remove(entity.storedName);
   }
+
+  /** While the database writes one portion, the next is made ready. */
+  private async writePortions(
+    job: ImportJob,
+    entity: Import,
+    libraryId: number,
+    { stamp, asChecked }: { stamp: Stamp; asChecked: boolean },
+  ): Promise<void> {
+    let writing = Promise.resolve();
+    let done = 0;
+    try {
+      for await (const { accepted } of acceptedPortions(this.dataSource, entity.id)) {
+        if (!asChecked && accepted.length > 0) await refuseEdited(job.runner, libraryId, accepted);
+        const before = writing;
+        writing = writeRows(job.runner, entity, libraryId, accepted, stamp);
+        writing.catch(() => undefined);
+        await before;
+        done += accepted.length;
+        await job.progress(done);
+      }
+      await writing;
+    } finally {
+      await writing.catch(() => undefined);
+    }
+  }
 }
 
 async function writeRows(
@@ -61,7 +85,7 @@ async function writeRows(
   { kind }: Import,
   libraryId: number,
   rows: readonly AcceptedRow[],
-  stamp: { at: Date; userId: number },
+  stamp: Stamp,
 ): Promise<void> {
   const table = tableOf(kind);
   const added = rows.filter(({ partId }) => partId === undefined);

@@ -58,6 +58,7 @@ export class CheckImport {
         const checked = await checkRows(runner, table, checker, libraries, known, rows);
         await writing;
         writing = writeVerdicts(runner, table, { importId: entity.id, portion }, checked, counts);
+        writing.catch(() => undefined);
         portion += 1;
         position += rows.length;
         await job.progress(position);
