@@ -1,4 +1,4 @@
-import { useCallback, useMemo } from 'react';
+import { useCallback, useEffect, useMemo, useRef } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import type { KindOfPart } from './kindOfPart';
 import { readPartsView } from './partsView';
@@ -9,19 +9,21 @@ export type ChangeView = (changes: Record<string, string | readonly string[] | u
 export function usePartsView(kind: KindOfPart) {
   const [address, setAddress] = useSearchParams();
   const view = useMemo(() => readPartsView(kind, address), [kind, address]);
+  /** The latest address asked for: a second change may come before the page has taken the first. */
+  const latest = useRef(address);
+  useEffect(() => {
+    latest.current = address;
+  }, [address]);
   const change = useCallback<ChangeView>(
-    (changes) =>
-      setAddress(
-        (before) => {
-          const next = new URLSearchParams(before);
-          for (const [key, value] of Object.entries(changes)) {
-            if (value === undefined || value.length === 0) next.delete(key);
-            else next.set(key, typeof value === 'string' ? value : value.join(','));
-          }
-          return next;
-        },
-        { replace: true },
-      ),
+    (changes) => {
+      const next = new URLSearchParams(latest.current);
+      for (const [key, value] of Object.entries(changes)) {
+        if (value === undefined || value.length === 0) next.delete(key);
+        else next.set(key, typeof value === 'string' ? value : value.join(','));
+      }
+      latest.current = next;
+      setAddress(next, { replace: true });
+    },
     [setAddress],
   );
   return { view, change };
