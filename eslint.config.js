@@ -18,6 +18,8 @@ const BACKEND_FEATURES = [
   'prices',
   'audit',
   'imports',
+  'plans',
+  'billing',
 ];
 const FRONTEND_FEATURES = ['session', 'parts', 'ranking', 'conditions', 'imports', 'prices'];
 

@@ -38,6 +38,8 @@ describe('session', () => {
       team: { id: String(team.id), name: 'Weir & Sons' },
       roles: ['librarian', 'engineer'],
       plan: 'team',
+      standing: 'active',
+      standingUntil: null,
     });
     const me = await agent.get('/api/auth/me').expect(200);
     expect(me.body).toEqual(answer.body);

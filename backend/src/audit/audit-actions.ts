@@ -7,9 +7,11 @@ export const AUDIT_ACTIONS = [
   'supplier.added',
   'rates.changed',
   'price-settings.changed',
+  'plan.trial-started',
+  'plan.changed',
 ] as const;
 export type AuditAction = (typeof AUDIT_ACTIONS)[number];
 
 /** The kinds of object that it records. */
-export const AUDIT_OBJECTS = ['offer', 'supplier', 'rate', 'price-settings'] as const;
+export const AUDIT_OBJECTS = ['offer', 'supplier', 'rate', 'price-settings', 'plan'] as const;
 export type AuditObject = (typeof AUDIT_OBJECTS)[number];

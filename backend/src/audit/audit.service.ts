@@ -16,6 +16,12 @@ export interface Recorded {
   to: object | null;
 }
 
+/** Whose act it was; null = nobody's of the team: the payment service told it. */
+export interface Actor {
+  teamId: number;
+  userId: number | null;
+}
+
 const CHUNK = 500;
 
 /** The trail of who changed what: entries are only ever added, in the transaction of the change itself. */
@@ -23,7 +29,7 @@ const CHUNK = 500;
 export class AuditService {
   constructor(@InjectDataSource() private readonly dataSource: DataSource) {}
 
-  async record(manager: EntityManager, { teamId, userId }: Caller, done: readonly Recorded[]): Promise<void> {
+  async record(manager: EntityManager, { teamId, userId }: Actor, done: readonly Recorded[]): Promise<void> {
     const at = new Date();
     const rows = done.map(({ action, object: { kind, id }, from, to }) => ({
       teamId,

@@ -24,6 +24,7 @@ export class JwtStrategy extends PassportStrategy(Strategy) {
   async validate({ sub, team, key }: SessionClaims): Promise<Caller | null> {
     const member = await this.teams.findMember(Number(sub), team);
     if (member === null || fingerprint(member.account.passwordHash) !== key) return null;
-    return { userId: member.account.id, teamId: team, roles: member.roles, plan: member.plan };
+    const { account, roles, plan, standing } = member;
+    return { userId: account.id, teamId: team, roles, plan, standing };
   }
 }

@@ -7,6 +7,7 @@ import { Library } from '../library/entities/library.entity.js';
 import { OpAmp } from '../library/entities/op-amp.entity.js';
 import { Part } from '../library/entities/part.entity.js';
 import { Resistor } from '../library/entities/resistor.entity.js';
+import { Subscription } from '../plans/entities/subscription.entity.js';
 import { ExchangeRate } from '../prices/entities/exchange-rate.entity.js';
 import { Offer } from '../prices/entities/offer.entity.js';
 import { OfferBreak } from '../prices/entities/offer-break.entity.js';
@@ -21,6 +22,7 @@ export const ENTITIES = [
   Team,
   User,
   Membership,
+  Subscription,
   Library,
   Part,
   OpAmp,

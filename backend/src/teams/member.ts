@@ -1,15 +1,14 @@
-import type { Plan, Role } from '@roothertz/common/access';
+import type { PlanState, Role } from '@roothertz/common/access';
 import { type Account, toAccount } from '../users/account.js';
 import type { Membership } from './entities/membership.entity.js';
 
 /** A person in a team: who it is, where, and what they may do there. */
-export interface Member {
+export interface Member extends Pick<PlanState, 'plan' | 'standing' | 'until'> {
   account: Account;
   team: { id: number; name: string };
   roles: Role[];
-  plan: Plan;
 }
 
-export function toMember({ user, team, roles }: Membership): Member {
-  return { account: toAccount(user), team: { id: team.id, name: team.name }, roles, plan: team.plan };
+export function toMember({ user, team, roles }: Membership, { plan, standing, until }: PlanState): Member {
+  return { account: toAccount(user), team: { id: team.id, name: team.name }, roles, plan, standing, until };
 }

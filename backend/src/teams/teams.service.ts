@@ -1,20 +1,24 @@
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
 import type { EntityManager, Repository } from 'typeorm';
+import { PlansService } from '../plans/plans.service.js';
 import { Membership } from './entities/membership.entity.js';
 import { Team } from './entities/team.entity.js';
 import { type Member, toMember } from './member.js';
 
 @Injectable()
 export class TeamsService {
-  constructor(@InjectRepository(Membership) private readonly memberships: Repository<Membership>) {}
+  constructor(
+    @InjectRepository(Membership) private readonly memberships: Repository<Membership>,
+    private readonly plans: PlansService,
+  ) {}
 
   async findMember(userId: number, teamId: number): Promise<Member | null> {
     const membership = await this.memberships.findOne({
       where: { userId, teamId },
       relations: { user: true, team: true },
     });
-    return membership && toMember(membership);
+    return membership && this.toMember(membership);
   }
 
   /** The member in the first of the person's teams. */
@@ -24,11 +28,15 @@ export class TeamsService {
       order: { teamId: 'ASC' },
       relations: { user: true, team: true },
     });
-    return membership && toMember(membership);
+    return membership && this.toMember(membership);
   }
 
   /** Holds the team until the transaction ends, so that what its plan limits is counted by one at a time. */
   async lockTeam(manager: EntityManager, teamId: number): Promise<void> {
     await manager.findOneOrFail(Team, { where: { id: teamId }, lock: { mode: 'pessimistic_write' } });
+  }
+
+  private async toMember(membership: Membership): Promise<Member> {
+    return toMember(membership, await this.plans.stateOf(membership.teamId));
   }
 }

@@ -4,6 +4,7 @@ import supertest from 'supertest';
 import { SESSION_COOKIE } from '../../src/auth/session-cookie.js';
 import { SessionTokenService } from '../../src/auth/session-token.service.js';
 import type { Caller } from '../../src/shared/access/caller.js';
+import { Subscription } from '../../src/plans/entities/subscription.entity.js';
 import { Membership } from '../../src/teams/entities/membership.entity.js';
 import { Team } from '../../src/teams/entities/team.entity.js';
 import { TeamsService } from '../../src/teams/teams.service.js';
@@ -30,7 +31,9 @@ export interface TestMember {
 }
 
 export async function createTeam(app: TestApp, { plan = 'team' as Plan } = {}): Promise<TestTeam> {
-  const { id } = await app.dataSource.getRepository(Team).save({ name: 'Weir & Sons', plan });
+  const { id } = await app.dataSource.getRepository(Team).save({ name: 'Weir & Sons' });
+  if (plan === 'team')
+    await app.dataSource.getRepository(Subscription).insert({ teamId: id, status: 'active', seats: 20 });
   return { id, plan };
 }
 
@@ -44,7 +47,12 @@ export async function signInMember(app: TestApp, team: TestTeam, roles: Role[]):
   await app.dataSource.getRepository(Membership).insert({ userId, teamId: team.id, roles });
   const cookie = await sessionCookie(app, userId, team.id);
   const agent = supertest.agent(await app.nest.getUrl()).set('Cookie', cookie);
-  return { email, caller: { userId, teamId: team.id, roles, plan: team.plan }, agent, cookie };
+  return {
+    email,
+    caller: { userId, teamId: team.id, roles, plan: team.plan, standing: 'active' },
+    agent,
+    cookie,
+  };
 }
 
 async function sessionCookie(app: TestApp, userId: number, teamId: number): Promise<string> {

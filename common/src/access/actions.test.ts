@@ -1,5 +1,16 @@
 import { describe, expect, it } from 'vitest';
-import { type Action, ACTIONS, mayDo, planIncludes, type Role, ROLES } from './index.js';
+import {
+  type Action,
+  ACTIONS,
+  isWrite,
+  mayDo,
+  planIncludes,
+  refusalOf,
+  type Role,
+  ROLES,
+  type Standing,
+  STANDINGS,
+} from './index.js';
 
 const actions = Object.keys(ACTIONS) as Action[];
 const allowedRoles = (action: Action): Role[] => ROLES.filter((role) => mayDo([role], action));
@@ -40,5 +51,39 @@ describe('planIncludes', () => {
 
   it('leaves a library of one’s own and prices out of the free plan', () => {
     expect(actions.filter((action) => !planIncludes('free', action))).toEqual(['parts.edit', 'prices.edit']);
+  });
+});
+
+describe('refusalOf', () => {
+  const refusal = (
+    standing: Standing,
+    action: Action,
+    roles: Role[] = ['admin'],
+    plan: 'free' | 'team' = 'team',
+  ) => refusalOf({ roles, plan, standing }, action);
+
+  it('names the role before the plan, and the plan before its standing', () => {
+    expect(refusal('unpaid', 'prices.edit', ['reviewer'], 'free')).toBe('role');
+    expect(refusal('unpaid', 'prices.edit', ['admin'], 'free')).toBe('plan');
+    expect(refusal('unpaid', 'prices.edit')).toBe('read-only');
+    expect(refusal('active', 'prices.edit')).toBe(null);
+  });
+
+  it('lets a team read, rank and manage its plan in every standing', () => {
+    const reads = actions.filter((action) => !isWrite(action));
+    expect(reads).toEqual(
+      expect.arrayContaining(['parts.read', 'prices.read', 'billing.manage', 'rankings.run']),
+    );
+    for (const standing of STANDINGS)
+      expect(reads.filter((action) => refusal(standing, action) !== null)).toEqual([]);
+  });
+
+  it('stops every change once the plan is unpaid or cancelled, and none before', () => {
+    const writes = actions.filter(isWrite);
+    expect(writes).toEqual(expect.arrayContaining(['parts.edit', 'conditions.save', 'prices.edit']));
+    for (const standing of STANDINGS) {
+      const stopped = standing === 'unpaid' || standing === 'cancelled';
+      expect(writes.filter((action) => refusal(standing, action) !== null)).toEqual(stopped ? writes : []);
+    }
   });
 });

@@ -738,7 +738,7 @@ export interface components {
         };
         AuditEntryResponseDto: {
             /** @enum {string} */
-            action: "offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed";
+            action: "offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "plan.trial-started" | "plan.changed";
             /** Format: date-time */
             at: string;
             /** @description null where the account is gone. */
@@ -758,7 +758,7 @@ export interface components {
         AuditObjectDto: {
             id: string;
             /** @enum {string} */
-            kind: "offer" | "supplier" | "rate" | "price-settings";
+            kind: "offer" | "supplier" | "rate" | "price-settings" | "plan";
         };
         BandDto: {
             /** @description 0 = brick wall; 1 to 10 = Butterworth low-pass of that order. */
@@ -920,7 +920,7 @@ export interface components {
             message: string;
         };
         /** @enum {string} */
-        ErrorCode: "request.invalid" | "session.missing" | "session.wrong-credentials" | "access.plan" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "import.not-found" | "part.stale" | "part.duplicate" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "import.state" | "import.outdated" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "database.unavailable";
+        ErrorCode: "request.invalid" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "access.seats" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "import.not-found" | "part.stale" | "part.duplicate" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "import.state" | "import.outdated" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "database.unavailable";
         EvaluateStageDto: {
             amplifier: components["schemas"]["AmplifierDto"];
             conditions: components["schemas"]["OperatingConditionsDto"];
@@ -1726,6 +1726,13 @@ export interface components {
             /** @enum {string} */
             plan: "free" | "team";
             roles: ("admin" | "librarian" | "purchasing" | "engineer" | "reviewer")[];
+            /** @enum {string} */
+            standing: "active" | "trial" | "trial-over" | "past-due" | "unpaid" | "cancelled";
+            /**
+             * Format: date-time
+             * @description When the standing ends by itself, such as a trial; null = it doesn’t.
+             */
+            standingUntil: string | null;
             team: components["schemas"]["SessionTeamDto"];
             user: components["schemas"]["SessionUserDto"];
         };
@@ -1945,8 +1952,8 @@ export interface operations {
             query?: {
                 limit?: number;
                 offset?: number;
-                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed")[];
-                objectKind?: "offer" | "supplier" | "rate" | "price-settings";
+                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "plan.trial-started" | "plan.changed")[];
+                objectKind?: "offer" | "supplier" | "rate" | "price-settings" | "plan";
                 objectId?: string;
                 userId?: string;
                 from?: string;

@@ -1,4 +1,4 @@
-import { mayDo, planIncludes, type Action } from '@roothertz/common/access';
+import { refusalOf, type Action } from '@roothertz/common/access';
 import { createContext, use } from 'react';
 import type { Session } from '../api/session';
 
@@ -11,8 +11,7 @@ export function useMember(): Session {
   return member;
 }
 
-/** Whether the member's roles and the team's plan allow an action. */
+/** Whether the member's roles and the team's plan allow an action now. */
 export function useMayDo(action: Action): boolean {
-  const { roles, plan } = useMember();
-  return mayDo(roles, action) && planIncludes(plan, action);
+  return refusalOf(useMember(), action) === null;
 }

@@ -9,6 +9,8 @@ export function sessionOf(role: Role, plan: Session['plan'] = 'team'): Session {
     team: { id: '1', name: 'Tarnfield Instruments' },
     roles: [role],
     plan,
+    standing: 'active',
+    standingUntil: null,
   };
 }
 

@@ -1,4 +1,12 @@
-import { type Plan, PLANS, type Role, ROLES } from '@roothertz/common/access';
+import {
+  type Plan,
+  type PlanState,
+  PLANS,
+  type Role,
+  ROLES,
+  type Standing,
+  STANDINGS,
+} from '@roothertz/common/access';
 import { ApiProperty } from '@nestjs/swagger';
 
 class SessionUserDto {
@@ -32,21 +40,40 @@ export class SessionResponseDto {
 
   @ApiProperty({ enum: PLANS })
   plan: Plan;
+
+  @ApiProperty({ enum: STANDINGS })
+  standing: Standing;
+
+  @ApiProperty({
+    type: String,
+    format: 'date-time',
+    nullable: true,
+    description: 'When the standing ends by itself, such as a trial; null = it doesn’t.',
+  })
+  standingUntil: string | null;
 }
 
-interface Session {
+interface Session extends Pick<PlanState, 'plan' | 'standing' | 'until'> {
   account: { id: number; email: string; name: string };
   team: { id: number; name: string };
   roles: Role[];
-  plan: Plan;
 }
 
-export function toSessionResponse({ account, team, roles, plan }: Session): SessionResponseDto {
+export function toSessionResponse({
+  account,
+  team,
+  roles,
+  plan,
+  standing,
+  until,
+}: Session): SessionResponseDto {
   const { id, email, name } = account;
   return {
     user: { id: String(id), email, name },
     team: { id: String(team.id), name: team.name },
     roles,
     plan,
+    standing,
+    standingUntil: until?.toISOString() ?? null,
   };
 }

@@ -5,6 +5,7 @@ import { CreateResistors1767300000000 } from './1767300000000-CreateResistors.js
 import { CreateAuditEntries1796083100000 } from './1796083100000-CreateAuditEntries.js';
 import { CreatePrices1796083200000 } from './1796083200000-CreatePrices.js';
 import { CreateImports1796083300000 } from './1796083300000-CreateImports.js';
+import { CreateSubscriptions1796090300000 } from './1796090300000-CreateSubscriptions.js';
 
 /** All migrations; they run in the order of the time in their names. */
 export const MIGRATIONS = [
@@ -15,4 +16,5 @@ export const MIGRATIONS = [
   CreateAuditEntries1796083100000,
   CreatePrices1796083200000,
   CreateImports1796083300000,
+  CreateSubscriptions1796090300000,
 ];

@@ -1,12 +1,13 @@
 import { readFile } from 'node:fs/promises';
-import type { Plan, Role } from '@roothertz/common/access';
+import type { Role } from '@roothertz/common/access';
 import type { RankingRequest } from '@roothertz/common/conditions';
 
 const DEMO_FILE = new URL('../../../../data/demo/tarnfield.json', import.meta.url);
 
 /** The invented team that a new installation can be tried with. */
 export interface DemoData {
-  team: { name: string; plan: Plan };
+  team: { name: string };
+  subscription: { seats: number; customerId: string; subscriptionId: string };
   members: { email: string; name: string; roles: Role[] }[];
   conditions: { name: string; ranking: Required<RankingRequest> }[];
   prices: { currency: string; staleAfterDays: number; rates: { currency: string; rate: string }[] };

@@ -1,6 +1,7 @@
 import type { EntityManager } from 'typeorm';
 import { hashPassword } from '../../auth/passwords.js';
 import { Membership } from '../../teams/entities/membership.entity.js';
+import { Subscription } from '../../plans/entities/subscription.entity.js';
 import { Team } from '../../teams/entities/team.entity.js';
 import { User } from '../../users/entities/user.entity.js';
 import type { DemoData } from './demo-data.js';
@@ -16,8 +17,12 @@ export interface SeededTeam {
 }
 
 /** Makes the demo team with an account for each of its members. */
-export async function seedTeam(manager: EntityManager, { team, members }: DemoData): Promise<SeededTeam> {
+export async function seedTeam(
+  manager: EntityManager,
+  { team, members, subscription }: DemoData,
+): Promise<SeededTeam> {
   const { id: teamId } = await manager.save(Team, { ...team });
+  await manager.insert(Subscription, { teamId, status: 'active', ...subscription });
   const userIds: number[] = [];
   for (const { email, name, roles } of members) {
     const passwordHash = await hashPassword(DEMO_PASSWORD);

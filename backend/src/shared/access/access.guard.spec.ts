@@ -1,4 +1,4 @@
-import type { Plan, Role } from '@roothertz/common/access';
+import type { Plan, Role, Standing } from '@roothertz/common/access';
 import type { ExecutionContext } from '@nestjs/common';
 import { Reflector } from '@nestjs/core';
 import { Access } from './access.decorator.js';
@@ -20,8 +20,8 @@ class Routes {
 
 describe('AccessGuard', () => {
   const guard = new AccessGuard(new Reflector());
-  const call = (route: keyof Routes, roles?: Role[], plan: Plan = 'team') => {
-    const user = roles && { userId: 1, teamId: 1, roles, plan };
+  const call = (route: keyof Routes, roles?: Role[], plan: Plan = 'team', standing: Standing = 'active') => {
+    const user = roles && { userId: 1, teamId: 1, roles, plan, standing };
     const context = {
       getHandler: () => Routes.prototype[route],
       switchToHttp: () => ({ getRequest: () => ({ user }) }),
@@ -50,5 +50,14 @@ describe('AccessGuard', () => {
   it('asks the role first and then the plan', () => {
     expect(call('edit', ['reviewer'], 'free')).toThrow('access.role');
     expect(call('edit', ['librarian'], 'free')).toThrow('access.plan');
+  });
+
+  it('lets a team whose plan is unpaid or cancelled read, and says what to do about changes', () => {
+    expect(call('read', ['librarian'], 'team', 'cancelled')()).toBe(true);
+    expect(call('edit', ['librarian'], 'team', 'past-due')()).toBe(true);
+    expect(call('edit', ['librarian'], 'team', 'unpaid')).toThrow(/^access.read-only: .*pays what is open/);
+    expect(call('edit', ['librarian'], 'team', 'cancelled')).toThrow(
+      /^access.read-only: .*starts the plan again/,
+    );
   });
 });

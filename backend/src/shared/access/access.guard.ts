@@ -1,4 +1,4 @@
-import { type Action, ACTIONS, mayDo, planIncludes } from '@roothertz/common/access';
+import { type Action, ACTIONS, refusalOf } from '@roothertz/common/access';
 import { type CanActivate, type ExecutionContext, Injectable } from '@nestjs/common';
 import { Reflector } from '@nestjs/core';
 import { DomainError } from '../errors/domain-error.js';
@@ -24,11 +24,17 @@ export class AccessGuard implements CanActivate {
 
 function assertMayDo(caller: Caller | undefined, action: Action): void {
   if (caller === undefined) throw new DomainError('session.missing', 'Sign in first.');
-  if (!mayDo(caller.roles, action))
-    throw new DomainError('access.role', `This needs one of the roles: ${rolesFor(action)}.`);
-  if (!planIncludes(caller.plan, action))
-    throw new DomainError('access.plan', 'The team’s plan doesn’t include this.');
+  const refusal = refusalOf(caller, action);
+  if (refusal !== null) throw new DomainError(`access.${refusal}`, REFUSED[refusal](caller, action));
 }
+
+const REFUSED = {
+  role: (_: Caller, action: Action) => `This needs one of the roles: ${rolesFor(action)}.`,
+  plan: ({ standing }: Caller) =>
+    `${standing === 'trial-over' ? 'The trial is over, and the' : 'The'} Free plan doesn’t include this: a team admin can start the Team plan under Plan. What the team has stays readable.`,
+  'read-only': ({ standing }: Caller) =>
+    `The team’s plan ${standing === 'unpaid' ? 'is unpaid' : 'is cancelled'}: everything can be read and exported, and nothing changed until a team admin ${standing === 'unpaid' ? 'pays what is open' : 'starts the plan again'} under Plan.`,
+};
 
 function rolesFor(action: Action): string {
   return [...ACTIONS[action].roles].join(', ');

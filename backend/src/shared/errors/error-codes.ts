@@ -4,6 +4,8 @@ export const ERROR_CODES = {
   'session.missing': { status: 401, title: 'Not signed in' },
   'session.wrong-credentials': { status: 401, title: 'Wrong e-mail or password' },
   'access.plan': { status: 402, title: 'Not in the team’s plan' },
+  'access.read-only': { status: 402, title: 'Read-only' },
+  'access.seats': { status: 402, title: 'No seat left' },
   'plan.saved-conditions': { status: 402, title: 'Not in the team’s plan' },
   'session.no-team': { status: 403, title: 'No team' },
   'access.origin': { status: 403, title: 'Foreign origin' },

@@ -1,4 +1,3 @@
-import { type Plan, PLANS } from '@roothertz/common/access';
 import { Column, CreateDateColumn, Entity, PrimaryGeneratedColumn } from 'typeorm';
 
 @Entity('teams')
@@ -8,9 +7,6 @@ export class Team {
 
   @Column({ type: 'varchar', length: 120 })
   name: string;
-
-  @Column({ type: 'enum', enum: PLANS, default: 'free' })
-  plan: Plan;
 
   @CreateDateColumn({
     name: 'created_at',
