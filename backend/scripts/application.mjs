@@ -45,8 +45,11 @@ export function prepareDatabase(environment) {
   });
 }
 
-/** Starts the server and waits until it is healthy; answers `{ ended }`, a promise of its end. */
-export async function serve(address, environment) {
+/**
+ * Starts the server and waits until it is healthy; answers `{ ended }`, a promise of its end. The owner of the tables
+ * stays unknown to it.
+ */
+export async function serve(address, { DB_OWNER_USER, DB_OWNER_PASSWORD, ...environment }) {
   const env = { ...environment, HOST: address.host, PORT: String(address.port) };
   const { child, ended } = launch(process.execPath, [MAIN], { cwd: inRoot(), env });
   const record = `application-${address.port}`;

@@ -43,8 +43,8 @@ await supervise(async () => {
   const connection = await createConnection({
     host: server.host,
     port: server.port,
-    user: environment.DB_USER,
-    password: environment.DB_PASSWORD,
+    user: environment.DB_OWNER_USER,
+    password: environment.DB_OWNER_PASSWORD,
     database: DATABASE,
   });
   const library = await step('Library', async (note) => {

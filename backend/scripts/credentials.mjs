@@ -8,7 +8,8 @@ const secret = () => randomBytes(32).toString('base64url');
 export function readCredentials() {
   const path = inLocal('credentials.json');
   const kept = readJson(path);
-  const credentials = { databasePassword: secret(), jwtSecret: secret(), ...kept };
-  if (!kept?.databasePassword || !kept?.jwtSecret) writePrivately(path, credentials);
+  const fresh = { databasePassword: secret(), applicationPassword: secret(), jwtSecret: secret() };
+  const credentials = { ...fresh, ...kept };
+  if (Object.keys(fresh).some((name) => !kept?.[name])) writePrivately(path, credentials);
   return credentials;
 }

@@ -11,7 +11,9 @@ import { StepError, step } from './steps.mjs';
 import { whenEnding } from './supervision.mjs';
 
 const HOST = '127.0.0.1';
-const DATABASE_USER = 'roothertz';
+/** Owns the tables and changes their structure; the application itself comes as the other. */
+const OWNER = 'roothertz';
+const APPLICATION = 'roothertz_app';
 const READY_WITHIN = 120_000;
 const ADVICE = 'Install MariaDB 10.11 or newer yourself, or name an existing server with DB_HOST.';
 
@@ -30,7 +32,7 @@ export function ensureMariadbInstalled() {
 
 /**
  * Starts the project's own MariaDB on `.local/<name>`, or takes over the one that a killed script left there.
- * Answers `{ host, port, socket, query(sql), environment(database), stop() }`; it stops with the script. A server
+ * Answers `{ host, port, socket, query(sql), environment(database), ownerEnvironment(database), stop() }`; it stops with the script. A server
  * that another running script of this checkout uses is shared, and left to that script to stop, unless `exclusive`.
  * @param {{ name: string, preferredPort: number, exclusive?: boolean, options?: string[] }} wanted
  */
@@ -51,12 +53,19 @@ export function startMariadb({ name, preferredPort, exclusive = false, options =
 
 function server(place, port, origin, stop) {
   const query = (sql) => querySocket(place, sql);
+  const { databasePassword, applicationPassword } = readCredentials();
+  const reached = (database) => ({ DB_HOST: HOST, DB_PORT: String(port), DB_NAME: database });
   const environment = (database) => ({
-    DB_HOST: HOST,
-    DB_PORT: String(port),
-    DB_USER: DATABASE_USER,
-    DB_PASSWORD: readCredentials().databasePassword,
-    DB_NAME: database,
+    ...reached(database),
+    DB_USER: APPLICATION,
+    DB_PASSWORD: applicationPassword,
+    DB_OWNER_USER: OWNER,
+    DB_OWNER_PASSWORD: databasePassword,
+  });
+  const ownerEnvironment = (database) => ({
+    ...reached(database),
+    DB_USER: OWNER,
+    DB_PASSWORD: databasePassword,
   });
   return {
     host: HOST,
@@ -64,6 +73,7 @@ function server(place, port, origin, stop) {
     socket: place.socket,
     query,
     environment,
+    ownerEnvironment,
     stop,
     outcome: `${origin}, ${HOST}:${port}`,
   };
@@ -158,15 +168,20 @@ function stopOnce(place) {
   return () => (stopping ??= stop());
 }
 
-/** Makes a database, and the project's user, which owns every database of this server whose name begins with its own. */
-export function createDatabase(server, name, { fresh = false } = {}) {
-  const password = readCredentials().databasePassword;
-  const user = `'${DATABASE_USER}'@'${HOST}'`;
+/**
+ * Makes a database and the project's two accounts: the owner of every database of this server whose name begins with its
+ * own, and the application's, which has no right until the owner grants it some.
+ */
+export function createDatabase(server, name, { fresh = false, makesAccounts = false } = {}) {
+  const { databasePassword, applicationPassword } = readCredentials();
+  const owner = `'${OWNER}'@'${HOST}'`;
+  const application = `'${APPLICATION}'@'${HOST}'`;
   return server.query(`
     ${fresh ? `DROP DATABASE IF EXISTS \`${name}\`;` : ''}
     CREATE DATABASE IF NOT EXISTS \`${name}\` CHARACTER SET utf8mb4 COLLATE utf8mb4_unicode_ci;
-    CREATE USER IF NOT EXISTS ${user};
-    ALTER USER ${user} IDENTIFIED BY '${password}';
-    GRANT ALL PRIVILEGES ON \`${DATABASE_USER}%\`.* TO ${user};
+    CREATE USER IF NOT EXISTS ${owner}, ${application};
+    ALTER USER ${owner} IDENTIFIED BY '${databasePassword}', ${application} IDENTIFIED BY '${applicationPassword}';
+    GRANT ALL PRIVILEGES ON \`${OWNER}%\`.* TO ${owner} WITH GRANT OPTION;
+    ${makesAccounts ? `GRANT CREATE USER ON *.* TO ${owner};` : ''}
   `);
 }

@@ -25,8 +25,8 @@ function runCommon({ ngspice, environment }) {
 /** One of its tests kills a server of the built application. */
 async function runBackend({ server, environment }) {
   await buildStale(['common', 'backend']);
-  await createDatabase(server, 'roothertz_test', { fresh: true });
-  const env = { ...environment, NODE_ENV: 'test', ...server.environment('roothertz_test') };
+  await createDatabase(server, 'roothertz_test', { fresh: true, makesAccounts: true });
+  const env = { ...environment, NODE_ENV: 'test', ...server.ownerEnvironment('roothertz_test') };
   return runReporting('backend', (report) => ['jest', '--json', `--outputFile=${report}`], 'backend', env);
 }
 

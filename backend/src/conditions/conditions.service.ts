@@ -2,6 +2,7 @@ import { PLAN_LIMITS } from '@roothertz/common/access';
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
 import type { DataSource, EntityManager } from 'typeorm';
+import { AuditService } from '../audit/audit.service.js';
 import type { Caller } from '../shared/access/caller.js';
 import { checkedRankingRequest } from '../shared/conditions/ranking-request.js';
 import { DomainError } from '../shared/errors/domain-error.js';
@@ -28,6 +29,7 @@ export class ConditionsService {
   constructor(
     @InjectDataSource() private readonly dataSource: DataSource,
     private readonly teams: TeamsService,
+    private readonly audit: AuditService,
   ) {}
 
   async list(caller: Caller, query: ListQueryDto): Promise<ConditionsListDto> {
@@ -60,7 +62,7 @@ export class ConditionsService {
         updatedAt: now,
         updatedById: caller.userId,
       });
-      return toConditionsResponse(await findSaved(manager, caller, String(identifiers[0].id)));
+      return this.recorded(manager, caller, null, String(identifiers[0].id));
     });
   }
 
@@ -84,7 +86,7 @@ export class ConditionsService {
           updatedById: caller.userId,
         },
       );
-      return toConditionsResponse(await findSaved(manager, caller, id));
+      return this.recorded(manager, caller, saved, id);
     });
   }
 
@@ -92,7 +94,25 @@ export class ConditionsService {
     return this.change(caller, async (manager) => {
       const saved = await findChangeable(manager, caller, id, version);
       await manager.delete(SavedConditions, { id: saved.id });
+      await this.audit.record(manager, caller, [
+        { action: 'conditions.deleted', object: objectOf(saved), from: toTrail(saved), to: null },
+      ]);
     });
+  }
+
+  /** Notes what has been saved, and answers it. */
+  private async recorded(
+    manager: EntityManager,
+    caller: Caller,
+    before: SavedConditions | null,
+    id: string,
+  ): Promise<ConditionsResponseDto> {
+    const after = await findSaved(manager, caller, id);
+    const action = before === null ? 'conditions.saved' : 'conditions.changed';
+    await this.audit.record(manager, caller, [
+      { action, object: objectOf(after), from: before && toTrail(before), to: toTrail(after) },
+    ]);
+    return toConditionsResponse(after);
   }
 
   private change<Result>(
@@ -106,6 +126,14 @@ export class ConditionsService {
       })
       .catch(refuseDuplicate);
   }
+}
+
+function objectOf({ id, name }: SavedConditions) {
+  return { kind: 'conditions' as const, id, label: name };
+}
+
+function toTrail({ name, conditions, filter, target, quantity }: SavedConditions): object {
+  return { name, ...conditions, filter, target, quantity };
 }
 
 async function findSaved(manager: EntityManager, caller: Caller, id: string): Promise<SavedConditions> {

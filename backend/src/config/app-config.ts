@@ -58,6 +58,14 @@ export class AppConfig {
   @IsNotEmpty()
   DB_PASSWORD = '';
 
+  /** Owns the tables: migrates, and grants DB_USER what the application needs; left out = DB_USER does all. */
+  @IsOptional()
+  @IsNotEmpty()
+  DB_OWNER_USER?: string;
+
+  @IsString()
+  DB_OWNER_PASSWORD = '';
+
   @Matches(/^\w{1,64}$/)
   DB_NAME = 'roothertz';
 

@@ -13,6 +13,8 @@ const NAMES = [
   'DB_PORT',
   'DB_USER',
   'DB_PASSWORD',
+  'DB_OWNER_USER',
+  'DB_OWNER_PASSWORD',
   'DB_NAME',
   'JWT_SECRET',
   'FRONTEND_DIST',

@@ -7,7 +7,14 @@ const CONNECTIONS = 10;
 const WAITING_REQUESTS = 200;
 const CONNECT_TIMEOUT_MS = 5_000;
 
-/** How the application and its tools reach MariaDB. */
+/** How the tools that change the structure reach MariaDB: as its owner, where there is one. */
+export function ownerOptions(config: AppConfig): DataSourceOptions {
+  const { DB_OWNER_USER: username, DB_OWNER_PASSWORD: password } = config;
+  const options = dataSourceOptions(config);
+  return username === undefined ? options : ({ ...options, username, password } as DataSourceOptions);
+}
+
+/** How the application reaches MariaDB. */
 export function dataSourceOptions(config: AppConfig): DataSourceOptions {
   return {
     type: 'mariadb',

@@ -23,7 +23,7 @@ import { Access } from '../shared/access/access.decorator.js';
 import type { Caller as CallerOfRequest } from '../shared/access/caller.js';
 import { Caller } from '../shared/access/caller.decorator.js';
 import { ListQueryDto } from '../shared/list/list-query.dto.js';
-import { ApiCsv, csvAnswer } from './csv-answer.js';
+import { ApiCsv, csvAnswer } from '../shared/csv/csv-answer.js';
 import { ImportListDto, ImportResponseDto } from './dto/import-response.dto.js';
 import { ImportRowListDto, ListImportRowsDto } from './dto/import-rows.dto.js';
 import { MapImportDto } from './dto/map-import.dto.js';

@@ -1,4 +1,5 @@
 import { Module } from '@nestjs/common';
+import { AuditModule } from '../audit/audit.module.js';
 import { LibraryModule } from '../library/library.module.js';
 import { ApplyImport } from './apply/apply-import.service.js';
 import { UndoImport } from './apply/undo-import.service.js';
@@ -13,7 +14,7 @@ import { PartExports } from './part-exports.service.js';
 import { UploadsService } from './uploads.service.js';
 
 @Module({
-  imports: [LibraryModule],
+  imports: [AuditModule, LibraryModule],
   controllers: [ImportsController, PartExportsController],
   providers: [
     ApplyImport,

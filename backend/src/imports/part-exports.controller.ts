@@ -3,7 +3,7 @@ import { ApiTags } from '@nestjs/swagger';
 import { Access } from '../shared/access/access.decorator.js';
 import type { Caller as CallerOfRequest } from '../shared/access/caller.js';
 import { Caller } from '../shared/access/caller.decorator.js';
-import { ApiCsv, csvAnswer } from './csv-answer.js';
+import { ApiCsv, csvAnswer } from '../shared/csv/csv-answer.js';
 import { ExportQueryDto } from './dto/export-query.dto.js';
 import { PartExports } from './part-exports.service.js';
 

@@ -8,7 +8,7 @@ import { toPartRecord } from '../library/part-record.js';
 import type { PartTable } from '../library/part-tables.js';
 import type { Caller } from '../shared/access/caller.js';
 import type { ExportQueryDto } from './dto/export-query.dto.js';
-import { csvLine, encoderOf, type WrittenList } from './file/csv-lines.js';
+import { csvLine, encoderOf, type WrittenList } from '../shared/csv/csv-lines.js';
 import type { ImportKind } from './import-states.js';
 import { tableOf } from './part-kinds.js';
 

@@ -1,5 +1,6 @@
 import type { LibraryPart } from '@roothertz/common/parts';
 import type { DataSource, EntityManager } from 'typeorm';
+import type { AuditService } from '../audit/audit.service.js';
 import type { Caller } from '../shared/access/caller.js';
 import { DomainError } from '../shared/errors/domain-error.js';
 import { isDuplicateEntry } from '../shared/errors/duplicate-entry.js';
@@ -18,6 +19,7 @@ export class PartStore<Kind extends LibraryPart> {
     readonly table: PartTable<Kind>,
     private readonly dataSource: DataSource,
     private readonly libraries: LibraryService,
+    private readonly audit: AuditService,
   ) {}
 
   async list(caller: Caller, query: PartQuery): Promise<List<PartRecord<Kind>>> {
@@ -37,7 +39,7 @@ export class PartStore<Kind extends LibraryPart> {
   insert(caller: Caller, part: Kind): Promise<PartRecord<Kind>> {
     return this.changeLibrary(caller, async (manager, libraryId) => {
       const [id] = await insertParts(manager, this.table, libraryId, [part], caller.userId);
-      return this.findReadable(manager, caller, id);
+      return this.recorded(manager, caller, 'part.created', null, id);
     });
   }
 
@@ -50,7 +52,7 @@ export class PartStore<Kind extends LibraryPart> {
     return this.changeLibrary(caller, async (manager) => {
       const current = await this.findChangeable(manager, caller, id, version);
       await updatePart(manager, this.table, current, change(current), caller.userId);
-      return this.findReadable(manager, caller, id);
+      return this.recorded(manager, caller, 'part.changed', current, current.id);
     });
   }
 
@@ -58,6 +60,10 @@ export class PartStore<Kind extends LibraryPart> {
     await this.changeLibrary(caller, async (manager) => {
       const current = await this.findChangeable(manager, caller, id, version);
       await manager.delete(Part, { id: current.id });
+      const object = this.objectOf(current);
+      await this.audit.record(manager, caller, [
+        { action: 'part.deleted', object, from: toTrail(current), to: null },
+      ]);
     });
   }
 
@@ -73,6 +79,24 @@ export class PartStore<Kind extends LibraryPart> {
         return change(manager, libraryId);
       })
       .catch(refuseDuplicate);
+  }
+
+  /** Notes what has been written, and answers it. */
+  private async recorded(
+    manager: EntityManager,
+    caller: Caller,
+    action: 'part.created' | 'part.changed',
+    before: PartRecord<Kind> | null,
+    id: number,
+  ): Promise<PartRecord<Kind>> {
+    const after = await this.findReadable(manager, caller, id);
+    const [from, to] = [before && toTrail(before), toTrail(after)];
+    await this.audit.record(manager, caller, [{ action, object: this.objectOf(after), from, to }]);
+    return after;
+  }
+
+  private objectOf({ id, manufacturer, partNumber }: PartRecord<Kind>) {
+    return { kind: this.table.catalogue.kind, id, label: `${manufacturer} ${partNumber}` };
   }
 
   private async findReadable(
@@ -99,6 +123,16 @@ export class PartStore<Kind extends LibraryPart> {
       throw new DomainError('part.stale', 'Somebody has changed this part meanwhile: load it again.');
     return current;
   }
+}
+
+/** What of a part somebody can change. */
+function toTrail<Kind extends LibraryPart>({
+  library,
+  version,
+  updatedAt,
+  ...part
+}: PartRecord<Kind>): object {
+  return part;
 }
 
 function refuseDuplicate(error: unknown): never {

@@ -12,7 +12,7 @@ import { type Draft, draftOffer, type Known, type OfferRow } from './offer-draft
 import { type Fault, refuseFaults } from './offer-faults.js';
 import { closeOffers, insertOffers } from './offer-rows.js';
 import { findOffers } from './offer-select.js';
-import { sameTerms, termsOf } from './offer-terms.js';
+import { objectOf, sameTerms, termsOf } from './offer-terms.js';
 
 const TAKEN = 'supplier’s number: this supplier has an offer for this part under it already';
 
@@ -41,37 +41,40 @@ export class OfferSaver {
     });
     refuseFaults(faults);
     refuseFaults(await findDuplicates(manager, caller, drafts, pathOf));
-    const ids = await this.write(manager, caller, drafts);
+    const changed = drafts.filter(({ current, terms }) => !current || !sameTerms(termsOf(current), terms));
+    const opened = await this.write(manager, caller, changed);
+    const ids = drafts.map((draft) => opened[changed.indexOf(draft)] ?? draft.current!.id);
     const saved = await findOffers(manager, caller, ids);
+    await this.audit.record(
+      manager,
+      caller,
+      changed.map((draft, index) => toRecorded(draft, saved.get(opened[index])!)),
+    );
     return ids.map((id) => saved.get(id)!);
   }
 
-  private async write(manager: EntityManager, caller: Caller, drafts: readonly Draft[]): Promise<number[]> {
-    const { teamId, userId } = caller;
+  private async write(
+    manager: EntityManager,
+    { teamId, userId }: Caller,
+    changed: readonly Draft[],
+  ): Promise<number[]> {
     const now = new Date();
-    const changed = drafts.filter(({ current, terms }) => !current || !sameTerms(termsOf(current), terms));
     const closed = changed.flatMap(({ current }) => current?.id ?? []);
     await closeOffers(manager, closed, userId, now);
-    const opened = await insertOffers(
+    return insertOffers(
       manager,
       changed.map(({ current, partId, supplierId, terms }) => {
         const version = (current?.version ?? 0) + 1;
         return { teamId, userId, partId, supplierId, terms, version, confirmedAt: now, openedAt: now };
       }),
     );
-    await this.audit.record(
-      manager,
-      caller,
-      changed.map((draft, index) => toRecorded(draft, opened[index])),
-    );
-    return drafts.map((draft) => opened[changed.indexOf(draft)] ?? draft.current!.id);
   }
 }
 
-function toRecorded({ current, partId, supplierId, terms }: Draft, id: number): Recorded {
+function toRecorded({ current, partId, supplierId, terms }: Draft, offer: Offer): Recorded {
   return {
     action: current ? 'offer.changed' : 'offer.opened',
-    object: { kind: 'offer', id },
+    object: objectOf(offer),
     from: current && { id: String(current.id), ...termsOf(current) },
     to: { partId: String(partId), supplierId: String(supplierId), ...terms },
   };

@@ -36,6 +36,11 @@ export function termsOf(offer: Offer): OfferTerms {
   };
 }
 
+/** An offer as the trail names it. */
+export function objectOf({ id, part, supplier }: Offer) {
+  return { kind: 'offer' as const, id, label: `${part.partNumber} from ${supplier.name}` };
+}
+
 /** The terms of a new offer before what is stated of it. */
 export function defaultTerms(today: string): Omit<OfferTerms, 'currency' | 'breaks'> {
   return {

@@ -13,7 +13,7 @@ import { toOfferResponse } from './offer-response.js';
 import { closeOffers } from './offer-rows.js';
 import { OfferSaver } from './offer-saver.service.js';
 import { findOffers } from './offer-select.js';
-import { termsOf } from './offer-terms.js';
+import { objectOf, termsOf } from './offer-terms.js';
 import { PriceChanges } from './price-changes.service.js';
 import { PriceSettingsService } from './price-settings.service.js';
 
@@ -47,9 +47,10 @@ export class OffersService {
       if (offer.version !== version)
         refuseFaults([{ code: 'offer.stale', field: 'version', message: CHANGED }]);
       await closeOffers(manager, [offer.id], caller.userId, new Date());
-      const object = { kind: 'offer', id: offer.id } as const;
       const from = termsOf(offer);
-      await this.audit.record(manager, caller, [{ action: 'offer.closed', object, from, to: null }]);
+      await this.audit.record(manager, caller, [
+        { action: 'offer.closed', object: objectOf(offer), from, to: null },
+      ]);
     });
   }
 
@@ -64,10 +65,10 @@ export class OffersService {
       await this.audit.record(
         manager,
         caller,
-        offers.map(({ id, confirmedAt: before }) => ({
+        offers.map((offer) => ({
           action: 'offer.confirmed',
-          object: { kind: 'offer', id },
-          from: { confirmedAt: before },
+          object: objectOf(offer),
+          from: { confirmedAt: offer.confirmedAt },
           to: { confirmedAt },
         })),
       );

@@ -73,7 +73,8 @@ function toRecorded(
   before: ReadonlyMap<string, DatedRateDto>,
 ): Recorded {
   const from = before.get(currency) ?? null;
-  const object = { kind: 'rate', id: `${currency}/${baseCurrency}` } as const;
+  const pair = `${currency}/${baseCurrency}`;
+  const object = { kind: 'rate', id: pair, label: pair } as const;
   return { action: 'rates.changed', object, from, to: { currency, rate, dated } };
 }
 

@@ -46,7 +46,7 @@ export class SuppliersService {
         const row = { teamId: caller.teamId, name, nameKey: nameKey(name), createdAt: new Date() };
         const { identifiers } = await manager.insert(Supplier, row);
         const id = identifiers[0].id as number;
-        const object = { kind: 'supplier', id } as const;
+        const object = { kind: 'supplier', id, label: name } as const;
         await this.audit.record(manager, caller, [
           { action: 'supplier.added', object, from: null, to: { name } },
         ]);

@@ -1,3 +1,4 @@
+import { randomBytes } from 'node:crypto';
 import { createConnection } from 'mysql2/promise';
 import type { AppConfig } from '../../src/config/app-config.js';
 import { readConfig } from '../../src/config/read-config.js';
@@ -18,6 +19,25 @@ export async function createFreshDatabase(config: AppConfig): Promise<void> {
 
 export function dropDatabase(config: AppConfig): Promise<void> {
   return onServer(config, `DROP DATABASE IF EXISTS ${config.DB_NAME}`);
+}
+
+export interface DatabaseAccount {
+  /** What lets the application run as this account, on tables that the suite's own account owns. */
+  environment: Record<string, string>;
+  drop(): Promise<void>;
+}
+
+/** An account without any right, as an installation has one for the application. */
+export async function createDatabaseAccount(): Promise<DatabaseAccount> {
+  const config = testConfig();
+  const [DB_USER, DB_PASSWORD] = [`${config.DB_NAME}_app`, randomBytes(12).toString('hex')];
+  const account = `'${DB_USER}'@'127.0.0.1'`;
+  await onServer(config, `CREATE OR REPLACE USER ${account} IDENTIFIED BY '${DB_PASSWORD}'`);
+  const { DB_USER: DB_OWNER_USER, DB_PASSWORD: DB_OWNER_PASSWORD } = config;
+  return {
+    environment: { DB_USER, DB_PASSWORD, DB_OWNER_USER, DB_OWNER_PASSWORD },
+    drop: () => onServer(config, `DROP USER ${account}`),
+  };
 }
 
 async function onServer(config: AppConfig, sql: string): Promise<void> {

@@ -6,6 +6,7 @@ import { AppModule } from '../../src/app.module.js';
 import { AppConfig } from '../../src/config/app-config.js';
 import { configureApp } from '../../src/http/configure-app.js';
 import { serveOpenApi } from '../../src/openapi/serve-openapi.js';
+import { prepareStructure } from '../../src/database/prepare-database.js';
 import { createFreshDatabase, dropDatabase, testConfig } from './database.js';
 
 export interface TestApp {
@@ -32,9 +33,9 @@ export interface TestApp {
 export async function startTestApp(environment: Record<string, string> = {}): Promise<TestApp> {
   const config = testConfig(environment);
   await createFreshDatabase(testConfig());
+  await prepareStructure(config);
   const nest = await startNest(config);
   const dataSource = nest.get(DataSource);
-  await dataSource.runMigrations();
   const close = async () => {
     await nest.close();
     await dropDatabase(testConfig());

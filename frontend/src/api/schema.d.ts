@@ -20,6 +20,22 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/audit/export.csv": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["exportAuditEntries"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/auth/me": {
         parameters: {
             query?: never;
@@ -738,7 +754,7 @@ export interface components {
         };
         AuditEntryResponseDto: {
             /** @enum {string} */
-            action: "offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "plan.trial-started" | "plan.changed";
+            action: "offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.deleted" | "import.applied" | "import.undone" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked";
             /** Format: date-time */
             at: string;
             /** @description null where the account is gone. */
@@ -758,7 +774,9 @@ export interface components {
         AuditObjectDto: {
             id: string;
             /** @enum {string} */
-            kind: "offer" | "supplier" | "rate" | "price-settings" | "plan";
+            kind: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
+            /** @description What it was called then. */
+            label: string | null;
         };
         BandDto: {
             /** @description 0 = brick wall; 1 to 10 = Butterworth low-pass of that order. */
@@ -1950,10 +1968,45 @@ export interface operations {
     listAuditEntries: {
         parameters: {
             query?: {
+                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.deleted" | "import.applied" | "import.undone" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
+                objectKind?: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
+                objectId?: string;
+                userId?: string;
+                from?: string;
+                to?: string;
                 limit?: number;
                 offset?: number;
-                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "plan.trial-started" | "plan.changed")[];
-                objectKind?: "offer" | "supplier" | "rate" | "price-settings" | "plan";
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["AuditListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    exportAuditEntries: {
+        parameters: {
+            query?: {
+                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.deleted" | "import.applied" | "import.undone" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
+                objectKind?: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
                 objectId?: string;
                 userId?: string;
                 from?: string;
@@ -1970,7 +2023,7 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content: {
-                    "application/json": components["schemas"]["AuditListDto"];
+                    "text/csv": string;
                 };
             };
             /** @description Problem details (RFC 9457) */

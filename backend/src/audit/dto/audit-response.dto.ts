@@ -1,15 +1,18 @@
+import { AUDIT_ACTIONS, AUDIT_OBJECTS, type AuditAction, type AuditObject } from '@roothertz/common/audit';
 import { ApiProperty } from '@nestjs/swagger';
 import { listOf } from '../../shared/list/list-response.js';
 import { MemberDto, toMemberDto } from '../../shared/members/member.dto.js';
-import { AUDIT_ACTIONS, AUDIT_OBJECTS } from '../audit-actions.js';
 import type { AuditEntry } from '../entities/audit-entry.entity.js';
 
 export class AuditObjectDto {
-  @ApiProperty({ enum: AUDIT_OBJECTS })
-  kind: string;
+  @ApiProperty({ enum: Object.keys(AUDIT_OBJECTS) })
+  kind: AuditObject;
 
   @ApiProperty()
   id: string;
+
+  @ApiProperty({ type: String, nullable: true, description: 'What it was called then.' })
+  label: string | null;
 }
 
 export class AuditEntryResponseDto {
@@ -22,8 +25,8 @@ export class AuditEntryResponseDto {
   @ApiProperty({ type: MemberDto, nullable: true, description: 'null where the account is gone.' })
   by: MemberDto | null;
 
-  @ApiProperty({ enum: AUDIT_ACTIONS })
-  action: string;
+  @ApiProperty({ enum: Object.keys(AUDIT_ACTIONS) })
+  action: AuditAction;
 
   @ApiProperty()
   object: AuditObjectDto;
@@ -38,13 +41,13 @@ export class AuditEntryResponseDto {
 export class AuditListDto extends listOf(AuditEntryResponseDto) {}
 
 export function toAuditEntryResponse(entry: AuditEntry): AuditEntryResponseDto {
-  const { id, at, user, action, objectKind, objectId, from, to } = entry;
+  const { id, at, user, action, objectKind, objectId, objectLabel, from, to } = entry;
   return {
     id: String(id),
     at: at.toISOString(),
     by: toMemberDto(user),
     action,
-    object: { kind: objectKind, id: objectId },
+    object: { kind: objectKind, id: objectId, label: objectLabel },
     from,
     to,
   };

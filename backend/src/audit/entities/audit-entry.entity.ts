@@ -1,3 +1,4 @@
+import type { AuditAction, AuditObject } from '@roothertz/common/audit';
 import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryGeneratedColumn, type Relation } from 'typeorm';
 import { Team } from '../../teams/entities/team.entity.js';
 import { User } from '../../users/entities/user.entity.js';
@@ -27,13 +28,17 @@ export class AuditEntry {
   at: Date;
 
   @Column({ type: 'varchar', length: 60 })
-  action: string;
+  action: AuditAction;
 
   @Column({ name: 'object_kind', type: 'varchar', length: 40 })
-  objectKind: string;
+  objectKind: AuditObject;
 
   @Column({ name: 'object_id', type: 'varchar', length: 40 })
   objectId: string;
+
+  /** What the object was called then, where it has a name. */
+  @Column({ name: 'object_label', type: 'varchar', length: 250, nullable: true })
+  objectLabel: string | null;
 
   /** What stood before; null = nothing. */
   @Column({ name: 'from_value', type: 'json', nullable: true })

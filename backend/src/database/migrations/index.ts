@@ -6,6 +6,7 @@ import { CreateAuditEntries1796083100000 } from './1796083100000-CreateAuditEntr
 import { CreatePrices1796083200000 } from './1796083200000-CreatePrices.js';
 import { CreateImports1796083300000 } from './1796083300000-CreateImports.js';
 import { CreateSubscriptions1796090300000 } from './1796090300000-CreateSubscriptions.js';
+import { NameAuditObjects1796090600000 } from './1796090600000-NameAuditObjects.js';
 
 /** All migrations; they run in the order of the time in their names. */
 export const MIGRATIONS = [
@@ -17,4 +18,5 @@ export const MIGRATIONS = [
   CreatePrices1796083200000,
   CreateImports1796083300000,
   CreateSubscriptions1796090300000,
+  NameAuditObjects1796090600000,
 ];

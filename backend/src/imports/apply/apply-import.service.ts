@@ -7,6 +7,7 @@ import {
   replacePartsInBulk,
   type Stamp,
 } from '../../library/bulk-parts.js';
+import { AuditService } from '../../audit/audit.service.js';
 import { LibraryService } from '../../library/library.service.js';
 import type { Caller } from '../../shared/access/caller.js';
 import { DomainError } from '../../shared/errors/domain-error.js';
@@ -14,6 +15,7 @@ import { Import } from '../entities/import.entity.js';
 import { ImportFiles } from '../import-files.service.js';
 import { type ImportJob, ImportJobs } from '../import-jobs.service.js';
 import { APPLICABLE_STATES } from '../import-states.js';
+import { objectOf } from '../import-select.js';
 import { tableOf } from '../part-kinds.js';
 import { acceptedRows } from '../row-counts.js';
 import { acceptedPortions, type AcceptedRow, keysOf } from './accepted-rows.js';
@@ -28,6 +30,7 @@ export class ApplyImport {
     private readonly files: ImportFiles,
     private readonly jobs: ImportJobs,
     private readonly libraries: LibraryService,
+    private readonly audit: AuditService,
   ) {}
 
   async start(caller: Caller, entity: Import): Promise<void> {
@@ -50,6 +53,10 @@ export class ApplyImport {
         { id: entity.id },
         { state: 'applied', appliedAt: stamp.at, appliedById: stamp.userId, storedName: null },
       );
+      const to = { rows: acceptedRows(entity.counts!) };
+      await this.audit.record(job.runner.manager, caller, [
+        { action: 'import.applied', object: objectOf(entity), from: null, to },
+      ]);
     });
     if (entity.storedName !== null) await this.files.remove(entity.storedName);
   }

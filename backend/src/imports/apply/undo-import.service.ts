@@ -2,11 +2,13 @@ import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
 import type { DataSource, QueryRunner } from 'typeorm';
 import { replacePartsInBulk } from '../../library/bulk-parts.js';
+import { AuditService } from '../../audit/audit.service.js';
 import { LibraryService } from '../../library/library.service.js';
 import type { Caller } from '../../shared/access/caller.js';
 import { Import } from '../entities/import.entity.js';
 import { ImportPortion } from '../entities/import-portion.entity.js';
 import { type ImportJob, ImportJobs } from '../import-jobs.service.js';
+import { objectOf } from '../import-select.js';
 import { tableOf } from '../part-kinds.js';
 import { acceptedRows } from '../row-counts.js';
 import { acceptedPortions, type AcceptedRow, keysOf } from './accepted-rows.js';
@@ -26,6 +28,7 @@ export class UndoImport {
     @InjectDataSource() private readonly dataSource: DataSource,
     private readonly jobs: ImportJobs,
     private readonly libraries: LibraryService,
+    private readonly audit: AuditService,
   ) {}
 
   async start(caller: Caller, entity: Import): Promise<void> {
@@ -60,6 +63,10 @@ export class UndoImport {
         { id: entity.id },
         { state: 'undone', undoneAt: stamp.at, undoneById: stamp.userId, keptCount: kept },
       );
+      const to = { takenBack: done - kept, kept };
+      await this.audit.record(job.runner.manager, caller, [
+        { action: 'import.undone', object: objectOf(entity), from: null, to },
+      ]);
     });
   }
 }

@@ -3,7 +3,8 @@ import { ApiProperty } from '@nestjs/swagger';
 import { listOf } from '../../shared/list/list-response.js';
 import { MemberDto, toMemberDto } from '../../shared/members/member.dto.js';
 import type { Import } from '../entities/import.entity.js';
-import { type Delimiter, DELIMITERS, type Dialect, type Encoding, ENCODINGS } from '../file/dialect.js';
+import { type Delimiter, DELIMITERS, type Encoding, ENCODINGS } from '../../shared/csv/csv-format.js';
+import type { Dialect } from '../file/dialect.js';
 import {
   IMPORT_KINDS,
   IMPORT_STATES,

@@ -10,7 +10,7 @@ import { NestedList } from '../../shared/validation/nested.decorator.js';
 import { Option } from '../../shared/validation/option.decorator.js';
 import { Quantity } from '../../shared/validation/quantity.decorator.js';
 import { Text } from '../../shared/validation/text.decorator.js';
-import { type Delimiter, DELIMITERS, type Encoding, ENCODINGS } from '../file/dialect.js';
+import { type Delimiter, DELIMITERS, type Encoding, ENCODINGS } from '../../shared/csv/csv-format.js';
 import { MOST_COLUMNS } from '../file/import-columns.js';
 
 const MOST_LINES = 1_000_000;

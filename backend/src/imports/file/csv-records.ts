@@ -3,7 +3,8 @@ import { pipeline } from 'node:stream';
 import { CsvError, type Options, parse } from 'csv-parse';
 import iconv from 'iconv-lite';
 import { DomainError } from '../../shared/errors/domain-error.js';
-import { type Delimiter, DELIMITER_CHARACTERS, type Dialect } from './dialect.js';
+import { type Delimiter, DELIMITER_CHARACTERS } from '../../shared/csv/csv-format.js';
+import type { Dialect } from './dialect.js';
 
 /** A row of a list with the line on which it begins. */
 export interface CsvRecord {

@@ -4,7 +4,8 @@ import type { ListedFields } from '@roothertz/common/parts';
 import { parse } from 'csv-parse/sync';
 import iconv from 'iconv-lite';
 import { type CsvRecord, type ParsedRecord, parserOptions, toRecord } from './csv-records.js';
-import { type Delimiter, DELIMITERS, type Dialect, type DialectChoice } from './dialect.js';
+import { type Delimiter, DELIMITERS } from '../../shared/csv/csv-format.js';
+import type { Dialect, DialectChoice } from './dialect.js';
 import type { FileFacts } from './text-encoding.js';
 
 const SAMPLE_RECORDS = 100;

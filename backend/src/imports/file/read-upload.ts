@@ -4,7 +4,8 @@ import { DomainError } from '../../shared/errors/domain-error.js';
 import type { Import } from '../entities/import.entity.js';
 import { countRecords } from './csv-records.js';
 import { detectDialect } from './detect-dialect.js';
-import type { Dialect, DialectChoice, Encoding } from './dialect.js';
+import type { Encoding } from '../../shared/csv/csv-format.js';
+import type { Dialect, DialectChoice } from './dialect.js';
 import { headerKey, importColumns, MOST_COLUMNS } from './import-columns.js';
 import { inspectFile } from './text-encoding.js';
 

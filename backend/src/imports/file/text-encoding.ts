@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto';
 import { createReadStream } from 'node:fs';
 import { DomainError } from '../../shared/errors/domain-error.js';
-import type { Encoding } from './dialect.js';
+import type { Encoding } from '../../shared/csv/csv-format.js';
 
 /** What one pass over a file tells of it. */
 export interface FileFacts {

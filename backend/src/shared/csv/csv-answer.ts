@@ -1,7 +1,7 @@
 import { Readable } from 'node:stream';
 import { applyDecorators, StreamableFile } from '@nestjs/common';
 import { ApiOkResponse } from '@nestjs/swagger';
-import type { WrittenList } from './file/csv-lines.js';
+import type { WrittenList } from './csv-lines.js';
 
 /** Sends a list as a file to be saved. */
 export function csvAnswer({ name, pieces }: WrittenList): StreamableFile {

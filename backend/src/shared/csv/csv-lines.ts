@@ -1,5 +1,5 @@
 import iconv from 'iconv-lite';
-import { type Delimiter, DELIMITER_CHARACTERS, type Dialect, type Encoding } from './dialect.js';
+import { type Delimiter, DELIMITER_CHARACTERS, type Encoding } from './csv-format.js';
 
 /** A list that is sent as a file, piece by piece. */
 export interface WrittenList {
@@ -27,7 +27,7 @@ function quoted(cell: string, delimiter: string): string {
 }
 
 /** Turns text into the bytes of a list's encoding, with its byte order mark before the first. */
-export function encoderOf({ encoding, byteOrderMark }: Pick<Dialect, 'encoding' | 'byteOrderMark'>) {
+export function encoderOf({ encoding, byteOrderMark }: { encoding: Encoding; byteOrderMark: boolean }) {
   return {
     first: (text: string) => iconv.encode(text, encoding, { addBOM: byteOrderMark }),
     next: (text: string) => iconv.encode(text, encoding, { addBOM: false }),

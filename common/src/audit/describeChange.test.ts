@@ -1,0 +1,47 @@
+import { describe, expect, it } from 'vitest';
+import { describeChange } from './describeChange.js';
+
+describe('describeChange', () => {
+  it('names what differs, with both values, and nothing else', () => {
+    const from = { id: '7', currency: 'EUR', stock: 10, leadTimeDays: null };
+    const to = { partId: '3', currency: 'EUR', stock: 0, leadTimeDays: 42 };
+    expect(describeChange(from, to)).toEqual([
+      { field: 'stock', from: '10', to: '0' },
+      { field: 'lead time days', from: null, to: '42' },
+    ]);
+  });
+
+  it('tells of what is new or gone all that it holds', () => {
+    expect(describeChange(null, { name: 'Brook', note: '' })).toEqual([
+      { field: 'name', from: null, to: 'Brook' },
+    ]);
+    expect(describeChange({ roles: ['admin', 'engineer'] }, null)).toEqual([
+      { field: 'roles', from: 'admin, engineer', to: null },
+    ]);
+    expect(describeChange(null, null)).toEqual([]);
+  });
+
+  it('looks into nested values', () => {
+    const from = { name: 'Geophone', stage: { gain: 100, network: { minimumTotal: 500 } } };
+    const to = { name: 'Geophone', stage: { gain: 10, network: {} } };
+    expect(describeChange(from, to)).toEqual([
+      { field: 'stage gain', from: '100', to: '10' },
+      { field: 'stage network minimum total', from: '500', to: null },
+    ]);
+  });
+
+  it('puts lists on one line', () => {
+    const breaks = [
+      { minimumQuantity: 1, unitPrice: '4.2000' },
+      { minimumQuantity: 100, unitPrice: '3.1000' },
+    ];
+    expect(describeChange({ breaks: [] }, { breaks, open: true })).toEqual([
+      {
+        field: 'breaks',
+        from: null,
+        to: 'minimum quantity 1 unit price 4.2000, minimum quantity 100 unit price 3.1000',
+      },
+      { field: 'open', from: null, to: 'yes' },
+    ]);
+  });
+});

@@ -1,0 +1,3 @@
+export * from './actorWords.js';
+export * from './auditActions.js';
+export * from './describeChange.js';
