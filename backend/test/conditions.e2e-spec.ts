@@ -1,6 +1,9 @@
 import type { RankingRequest } from '@roothertz/common/conditions';
 import { conditionsBody, saveConditions } from './factories/conditions.js';
+import { createOpAmp } from './factories/op-amps.js';
 import { createTeam, signInMember, startTestApp, type TestApp, type TestMember } from './support/index.js';
+import { ConditionsService } from '../src/conditions/conditions.service.js';
+import { SavedConditionsPart } from '../src/conditions/entities/saved-conditions-part.entity.js';
 import { SavedConditions } from '../src/conditions/entities/saved-conditions.entity.js';
 import { readDemoData } from '../src/database/seeds/demo-data.js';
 
@@ -41,13 +44,14 @@ const WHOLE: Required<RankingRequest> = {
 
 describe('saved conditions', () => {
   let app: TestApp;
+  let team: Awaited<ReturnType<typeof createTeam>>;
   let engineer: TestMember;
   let reviewer: TestMember;
   let stranger: TestMember;
 
   beforeAll(async () => {
     app = await startTestApp();
-    const team = await createTeam(app);
+    team = await createTeam(app);
     engineer = await signInMember(app, team, ['engineer']);
     reviewer = await signInMember(app, team, ['reviewer']);
     stranger = await signInMember(app, await createTeam(app), ['admin']);
@@ -66,6 +70,7 @@ describe('saved conditions', () => {
     expect(body).toEqual({
       name: 'Photodiode',
       ...WHOLE,
+      partIds: [],
       id: expect.stringMatching(/^\d+$/),
       version: 1,
       updatedAt: expect.any(String),
@@ -238,7 +243,6 @@ describe('saved conditions', () => {
 
   it('lets every member read, and admins, librarians and engineers alone save', async () => {
     const { id } = await saveConditions(engineer);
-    const team = { id: engineer.caller.teamId, plan: engineer.caller.plan };
     for (const role of ['purchasing', 'reviewer'] as const) {
       const { agent } = await signInMember(app, team, [role]);
       await agent.get(`/api/conditions/${id}`).expect(200);
@@ -252,6 +256,76 @@ describe('saved conditions', () => {
     for (const role of ['admin', 'librarian'] as const)
       await saveConditions(await signInMember(app, team, [role]), { name: role });
     await app.request.get('/api/conditions').expect(401);
+  });
+
+  describe('keep the parts chosen at them', () => {
+    const chosen = () =>
+      app.dataSource.manager
+        .find(SavedConditionsPart, { order: { partId: 'ASC' } })
+        .then((rows) => rows.map(({ partId }) => String(partId)));
+
+    it('which a change replaces and the rest leaves', async () => {
+      const librarian = await signInMember(app, team, ['librarian']);
+      const [one, other] = [await createOpAmp(librarian), await createOpAmp(librarian)];
+      const { body } = await engineer.agent
+        .post('/api/conditions')
+        .send(conditionsBody({ partIds: [one.id] }))
+        .expect(201);
+      expect(body.partIds).toEqual([one.id]);
+      const patch = (change: object) => engineer.agent.patch(`/api/conditions/${body.id}`).send(change);
+      expect((await patch({ version: 1, quantity: 5 }).expect(200)).body.partIds).toEqual([one.id]);
+      const both = { version: 2, partIds: [one.id, other.id] };
+      expect((await patch(both).expect(200)).body.partIds).toEqual([one.id, other.id]);
+      expect(await chosen()).toEqual([one.id, other.id]);
+      expect((await reviewer.agent.get('/api/conditions').expect(200)).body).toMatchObject({
+        items: [{ partIds: [one.id, other.id] }],
+        total: 1,
+      });
+      expect((await patch({ version: 3, partIds: [] }).expect(200)).body.partIds).toEqual([]);
+      expect(await chosen()).toEqual([]);
+    });
+
+    it('of the libraries that the team reads, and of no other team', async () => {
+      const foreign = await createOpAmp(stranger);
+      const partIds = [foreign.id];
+      const { body } = await engineer.agent
+        .post('/api/conditions')
+        .send(conditionsBody({ partIds }))
+        .expect(404);
+      expect(body).toMatchObject({ code: 'part.not-found', errors: [{ field: 'partIds[0]' }] });
+      expect(await savedCount()).toBe(0);
+      for (const wrong of [['x'], 'x', [1], Array.from({ length: 21 }, () => foreign.id)])
+        expect(
+          fields(
+            (
+              await engineer.agent
+                .post('/api/conditions')
+                .send(conditionsBody({ partIds: wrong }))
+                .expect(400)
+            ).body,
+          ),
+        ).toContain('partIds');
+    });
+
+    it('for other features: by part, with the conditions in the order of their names', async () => {
+      const librarian = await signInMember(app, team, ['librarian']);
+      const { id } = await createOpAmp(librarian);
+      for (const name of ['Weir', 'Geophone'])
+        await saveConditions(engineer, { name, partIds: [id], quantity: 9 });
+      await saveConditions(engineer, { name: 'Without' });
+      const uses = await app.nest.get(ConditionsService).partsInUse(engineer.caller);
+      const use = { conditionsId: expect.any(Number), quantity: 9, updatedById: engineer.caller.userId };
+      expect([...uses]).toEqual([
+        [
+          Number(id),
+          [
+            { ...use, name: 'Geophone' },
+            { ...use, name: 'Weir' },
+          ],
+        ],
+      ]);
+      expect((await app.nest.get(ConditionsService).partsInUse(stranger.caller)).size).toBe(0);
+    });
   });
 
   it('holds as many as the plan does, even when they are saved at once', async () => {

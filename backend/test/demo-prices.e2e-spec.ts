@@ -23,6 +23,10 @@ describe('the demo team’s prices', () => {
     ]);
     expect(await total('state=expired')).toBe(5);
     expect(await total('kind=resistor')).toBe(31);
+    expect([
+      await total('usedInConditions=true&state=stale'),
+      await total('usedInConditions=true&state=missing'),
+    ]).toEqual([1, 1]);
     expect(await total('state=missing&library=team')).toBeGreaterThan(10);
     expect((await agent.get('/api/suppliers')).body.total).toBe(5);
     expect((await agent.get('/api/prices/rates')).body).toMatchObject({ currency: 'EUR', missing: [] });

@@ -1,6 +1,7 @@
 import { addDays, dayOf } from '@roothertz/common/prices';
 import { AuditEntry } from '../src/audit/entities/audit-entry.entity.js';
 import { Offer } from '../src/prices/entities/offer.entity.js';
+import { saveConditions } from './factories/conditions.js';
 import { createOffer, createSupplier } from './factories/offers.js';
 import { createOpAmp } from './factories/op-amps.js';
 import { createResistor } from './factories/resistors.js';
@@ -11,6 +12,7 @@ const TODAY = dayOf(new Date());
 interface Row {
   part: { partNumber: string };
   offer: { id: string; states: string[] } | null;
+  usedIn: string[];
 }
 
 describe('the grid of prices', () => {
@@ -78,6 +80,29 @@ describe('the grid of prices', () => {
 
       await admin.agent.put('/api/prices/settings').send({ currency: 'EUR', staleAfterDays: 91 }).expect(200);
       expect(names(await grid('state=stale'))).toEqual([]);
+    });
+
+    it('the parts that are chosen in saved conditions, with and without an offer', async () => {
+      const used = await offered('P-USED');
+      await offered('P-IDLE');
+      const { id: without } = await createOpAmp(admin, { partNumber: 'P-WITHOUT' });
+      await saveConditions(admin, { name: 'Weir', partIds: [used.part.id, without] });
+      await saveConditions(admin, { name: 'Geophone', partIds: [used.part.id] });
+      const inUse = await grid('usedInConditions=true');
+      expect(names(inUse)).toEqual(['P-USED', 'P-WITHOUT']);
+      expect(inUse.items.map(({ usedIn }) => usedIn)).toEqual([['Geophone', 'Weir'], ['Weir']]);
+      expect(names(await grid('usedInConditions=true&state=missing'))).toEqual(['P-WITHOUT']);
+      expect(names(await grid('usedInConditions=false'))).toEqual(['P-IDLE', 'P-USED']);
+      expect((await admin.agent.get('/api/prices/counts').expect(200)).body).toEqual({
+        offers: 2,
+        stale: 0,
+        expiring: 0,
+        expired: 0,
+        missing: 1,
+        usedInConditions: 2,
+      });
+      expect((await grid('usedInConditions=true', stranger)).total).toBe(0);
+      await admin.agent.get('/api/prices?usedInConditions=1').expect(400);
     });
 
     it('what is searched for, sorted and in pages', async () => {

@@ -5,10 +5,11 @@ import { SavedConditions } from './entities/saved-conditions.entity.js';
 
 export type ConditionsSelect = SelectQueryBuilder<SavedConditions>;
 
-/** The saved conditions of a caller's team, with the one who changed them last: every query starts from here. */
+/** The saved conditions of a caller's team, with the chosen parts and the one who changed them last: every query starts from here. */
 export function selectConditions(manager: EntityManager, { teamId }: Caller): ConditionsSelect {
   return manager
     .createQueryBuilder(SavedConditions, 'saved')
+    .leftJoinAndSelect('saved.parts', 'chosen')
     .leftJoin('saved.updatedBy', 'updatedBy')
     .addSelect(['updatedBy.id', 'updatedBy.name'])
     .where('saved.teamId = :teamId', { teamId });

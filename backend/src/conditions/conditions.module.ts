@@ -8,5 +8,6 @@ import { ConditionsService } from './conditions.service.js';
   imports: [AuditModule, TeamsModule],
   controllers: [ConditionsController],
   providers: [ConditionsService],
+  exports: [ConditionsService],
 })
 export class ConditionsModule {}

@@ -11,6 +11,7 @@ import { readId } from '../shared/ids/read-id.js';
 import type { ListQueryDto } from '../shared/list/list-query.dto.js';
 import { parseSort } from '../shared/list/sort.js';
 import { TeamsService } from '../teams/teams.service.js';
+import { findPartsInUse, type PartUse, writeParts } from './conditions-parts.js';
 import { searchByName, selectConditions } from './conditions-select.js';
 import {
   type ConditionsListDto,
@@ -37,8 +38,8 @@ export class ConditionsService {
     const [items, total] = await searchByName(selectConditions(this.dataSource.manager, caller), query.search)
       .orderBy(`saved.${key}`, descending ? 'DESC' : 'ASC')
       .addOrderBy('saved.id')
-      .limit(query.limit)
-      .offset(query.offset)
+      .take(query.limit)
+      .skip(query.offset)
       .getManyAndCount();
     return { items: items.map(toConditionsResponse), total };
   }
@@ -47,7 +48,7 @@ export class ConditionsService {
     return toConditionsResponse(await findSaved(this.dataSource.manager, caller, id));
   }
 
-  save(caller: Caller, { name, ...dto }: SaveConditionsDto): Promise<ConditionsResponseDto> {
+  save(caller: Caller, { name, partIds, ...dto }: SaveConditionsDto): Promise<ConditionsResponseDto> {
     const request = checkedRankingRequest(dto);
     return this.change(caller, async (manager) => {
       await assertRoom(manager, caller);
@@ -62,14 +63,16 @@ export class ConditionsService {
         updatedAt: now,
         updatedById: caller.userId,
       });
-      return this.recorded(manager, caller, null, String(identifiers[0].id));
+      const id = identifiers[0].id as number;
+      await writeParts(manager, caller, id, partIds);
+      return this.recorded(manager, caller, null, String(id));
     });
   }
 
   update(
     caller: Caller,
     id: string,
-    { version, ...changes }: UpdateConditionsDto,
+    { version, partIds, ...changes }: UpdateConditionsDto,
   ): Promise<ConditionsResponseDto> {
     return this.change(caller, async (manager) => {
       const saved = await findChangeable(manager, caller, id, version);
@@ -86,6 +89,7 @@ export class ConditionsService {
           updatedById: caller.userId,
         },
       );
+      if (partIds) await writeParts(manager, caller, saved.id, partIds);
       return this.recorded(manager, caller, saved, id);
     });
   }
@@ -98,6 +102,14 @@ export class ConditionsService {
         { action: 'conditions.deleted', object: objectOf(saved), from: toTrail(saved), to: null },
       ]);
     });
+  }
+
+  /** The parts that a team has chosen at its saved conditions, by the part's id; one that isn't in it is in no use. */
+  partsInUse(
+    team: Pick<Caller, 'teamId'>,
+    manager: EntityManager = this.dataSource.manager,
+  ): Promise<ReadonlyMap<number, PartUse[]>> {
+    return findPartsInUse(manager, team);
   }
 
   /** Notes what has been saved, and answers it. */
@@ -132,8 +144,9 @@ function objectOf({ id, name }: SavedConditions) {
   return { kind: 'conditions' as const, id, label: name };
 }
 
-function toTrail({ name, conditions, filter, target, quantity }: SavedConditions): object {
-  return { name, ...conditions, filter, target, quantity };
+function toTrail({ name, conditions, filter, target, quantity, parts }: SavedConditions): object {
+  const partIds = parts.map(({ partId }) => String(partId));
+  return { name, ...conditions, filter, target, quantity, partIds };
 }
 
 async function findSaved(manager: EntityManager, caller: Caller, id: string): Promise<SavedConditions> {

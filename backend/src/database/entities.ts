@@ -1,5 +1,6 @@
 import { AuditEntry } from '../audit/entities/audit-entry.entity.js';
 import { SavedConditions } from '../conditions/entities/saved-conditions.entity.js';
+import { SavedConditionsPart } from '../conditions/entities/saved-conditions-part.entity.js';
 import { Import } from '../imports/entities/import.entity.js';
 import { ImportPortion } from '../imports/entities/import-portion.entity.js';
 import { ImportProgress } from '../imports/entities/import-progress.entity.js';
@@ -28,6 +29,7 @@ export const ENTITIES = [
   OpAmp,
   Resistor,
   SavedConditions,
+  SavedConditionsPart,
   AuditEntry,
   PriceSettings,
   ExchangeRate,

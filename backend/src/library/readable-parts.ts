@@ -20,6 +20,19 @@ export function selectReadableParts(manager: EntityManager, { teamId }: Caller):
     .where('(library.teamId IS NULL OR library.teamId = :teamId)', { teamId });
 }
 
+/** Which of the ids belong to parts that a caller may read. */
+export async function findReadableIds(
+  manager: EntityManager,
+  caller: Caller,
+  ids: readonly number[],
+): Promise<Set<number>> {
+  if (ids.length === 0) return new Set();
+  const found = await selectReadableParts(manager, caller)
+    .andWhere('part.id IN (:...ids)', { ids })
+    .getMany();
+  return new Set(found.map(({ id }) => id));
+}
+
 export function toPartName({ id, library, kind, manufacturer, partNumber }: Part): PartName {
   return { id, library: library.teamId === null ? 'curated' : 'team', kind, manufacturer, partNumber };
 }

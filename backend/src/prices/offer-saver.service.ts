@@ -2,7 +2,7 @@ import { dayOf } from '@roothertz/common/prices';
 import { Injectable } from '@nestjs/common';
 import { type EntityManager, In, IsNull } from 'typeorm';
 import { AuditService, type Recorded } from '../audit/audit.service.js';
-import { selectReadableParts } from '../library/readable-parts.js';
+import { findReadableIds } from '../library/readable-parts.js';
 import type { Caller } from '../shared/access/caller.js';
 import { readId } from '../shared/ids/read-id.js';
 import { nameKey } from '../shared/text/name-key.js';
@@ -84,17 +84,10 @@ async function findKnown(manager: EntityManager, caller: Caller, rows: readonly 
   const numbers = (key: 'id' | 'partId' | 'supplierId') => [
     ...new Set(rows.flatMap((row) => (row[key] === undefined ? [] : [readId(row[key]) ?? 0]))),
   ];
-  const partIds = numbers('partId');
-  const parts =
-    partIds.length === 0
-      ? []
-      : await selectReadableParts(manager, caller)
-          .andWhere('part.id IN (:...partIds)', { partIds })
-          .getMany();
   const suppliers = await manager.findBy(Supplier, { teamId: caller.teamId, id: In(numbers('supplierId')) });
   return {
     offers: await findOffers(manager, caller, numbers('id')),
-    parts: new Set(parts.map(({ id }) => id)),
+    parts: await findReadableIds(manager, caller, numbers('partId')),
     suppliers: new Set(suppliers.map(({ id }) => id)),
   };
 }

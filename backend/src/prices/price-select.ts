@@ -20,6 +20,7 @@ export interface PriceQuery {
   kind?: PartKind[];
   partId?: string;
   supplierId?: string;
+  usedInConditions?: boolean;
 }
 
 export type PriceSelect = SelectQueryBuilder<Part>;
@@ -51,10 +52,17 @@ export function selectPrices(manager: EntityManager, caller: Caller): PriceSelec
     .leftJoin('offer.supplier', 'supplier');
 }
 
-export function filterPrices(select: PriceSelect, query: PriceQuery, view: OfferView): PriceSelect {
-  const { state, library, kind, partId, supplierId, search = '' } = query;
+/** @param inUse the ids of the parts that are chosen in saved conditions */
+export function filterPrices(
+  select: PriceSelect,
+  query: PriceQuery,
+  view: OfferView,
+  inUse: readonly number[],
+): PriceSelect {
+  const { state, library, kind, partId, supplierId, usedInConditions, search = '' } = query;
   if (state?.length) select.andWhere(anyState(state, view));
-  else select.andWhere('offer.id IS NOT NULL');
+  else if (!usedInConditions) select.andWhere('offer.id IS NOT NULL');
+  if (usedInConditions) select.andWhere('part.id IN (:...inUse)', { inUse: [0, ...inUse] });
   if (kind?.length) select.andWhere('part.kind IN (:...kind)', { kind });
   if (library?.length)
     select.andWhere('(library.teamId IS NOT NULL) IN (:...isTeam)', {

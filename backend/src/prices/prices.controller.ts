@@ -5,6 +5,7 @@ import type { Caller as CallerOfRequest } from '../shared/access/caller.js';
 import { Caller } from '../shared/access/caller.decorator.js';
 import { ListPricesDto, PriceListDto } from './dto/list-prices.dto.js';
 import { OfferListDto } from './dto/offer-response.dto.js';
+import { PriceCountsDto } from './dto/price-counts.dto.js';
 import { PriceSettingsDto } from './dto/price-settings.dto.js';
 import { RatesResponseDto, SaveRatesDto } from './dto/rates.dto.js';
 import { SavePricesDto } from './dto/save-offers.dto.js';
@@ -28,6 +29,13 @@ export class PricesController {
   @ApiOkResponse({ type: PriceListDto })
   listPrices(@Caller() caller: CallerOfRequest, @Query() query: ListPricesDto): Promise<PriceListDto> {
     return this.prices.list(caller, query);
+  }
+
+  @Get('counts')
+  @Access('prices.read')
+  @ApiOkResponse({ type: PriceCountsDto })
+  countPrices(@Caller() caller: CallerOfRequest): Promise<PriceCountsDto> {
+    return this.prices.count(caller);
   }
 
   @Put()

@@ -1,5 +1,6 @@
 import { Module } from '@nestjs/common';
 import { AuditModule } from '../audit/audit.module.js';
+import { ConditionsModule } from '../conditions/conditions.module.js';
 import { OfferSaver } from './offer-saver.service.js';
 import { OffersController } from './offers.controller.js';
 import { OffersService } from './offers.service.js';
@@ -15,7 +16,7 @@ import { SuppliersController } from './suppliers.controller.js';
 import { SuppliersService } from './suppliers.service.js';
 
 @Module({
-  imports: [AuditModule],
+  imports: [AuditModule, ConditionsModule],
   controllers: [SuppliersController, PricesController, OffersController, PartOffersController],
   providers: [
     OfferSaver,

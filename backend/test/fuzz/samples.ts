@@ -76,8 +76,8 @@ const offered = {
 export const SAMPLES: Record<string, unknown[]> = {
   'post /api/auth/sign-in': [{ email: 'person@weir.example', password: 'a guess' }],
   'post /api/auth/sign-out': [{}],
-  'post /api/conditions': [{ name: 'River geophone', ...request }],
-  'patch /api/conditions/{id}': [{ version: 1, name: 'Turbidity', ...request }],
+  'post /api/conditions': [{ name: 'River geophone', ...request, partIds: ['1'] }],
+  'patch /api/conditions/{id}': [{ version: 1, name: 'Turbidity', ...request, partIds: [] }],
   'put /api/imports/{id}/mapping': [
     {
       decimalMark: 'point',

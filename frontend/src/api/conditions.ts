@@ -20,15 +20,23 @@ export const namedConditionsQuery = queryOptions({
   },
 });
 
-export async function createConditions(name: string, request: RankingRequest): Promise<NamedConditions> {
-  return named(await answer(client.POST('/api/conditions', { body: { name, ...whole(request) } })));
+export async function createConditions(
+  name: string,
+  request: RankingRequest,
+  partIds: string[],
+): Promise<NamedConditions> {
+  const body = { name, ...whole(request), partIds };
+  return named(await answer(client.POST('/api/conditions', { body })));
 }
 
 export async function updateConditions(
   { id, version }: Pick<NamedConditions, 'id' | 'version'>,
-  changes: { name: string } | { request: RankingRequest },
+  changes: { name: string } | { request: RankingRequest; partIds: string[] },
 ): Promise<NamedConditions> {
-  const body = { ...('name' in changes ? changes : whole(changes.request)), version };
+  const body = {
+    ...('name' in changes ? changes : { ...whole(changes.request), partIds: changes.partIds }),
+    version,
+  };
   return named(await answer(client.PATCH('/api/conditions/{id}', { params: { path: { id } }, body })));
 }
 

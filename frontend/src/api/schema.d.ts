@@ -420,6 +420,22 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/prices/counts": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["countPrices"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/prices/rates": {
         parameters: {
             query?: never;
@@ -843,6 +859,8 @@ export interface components {
             filter: components["schemas"]["PartFilterDto"];
             id: string;
             name: string;
+            /** @description The parts that were chosen at these conditions. */
+            partIds: string[];
             quantity: number;
             target: components["schemas"]["RankingTargetDto"];
             /** Format: date-time */
@@ -1258,6 +1276,17 @@ export interface components {
             /** @description Decimal number above 0 with a full stop, up to four decimals. */
             unitPrice: string;
         };
+        PriceCountsDto: {
+            expired: number;
+            expiring: number;
+            /** @description Parts of the team’s own library without an offer. */
+            missing: number;
+            /** @description Offers that stand. */
+            offers: number;
+            stale: number;
+            /** @description Rows of parts that are chosen in saved conditions. */
+            usedInConditions: number;
+        };
         PriceDto: {
             /** @description Decimal number: the total over the pieces that are needed, so that it holds what MOQ and order multiple add. */
             amount: string;
@@ -1318,6 +1347,8 @@ export interface components {
             /** @description null where the part has no offer. */
             offer: components["schemas"]["OfferResponseDto"] | null;
             part: components["schemas"]["OfferedPartDto"];
+            /** @description Names of the saved conditions in which the part is chosen. */
+            usedIn: string[];
         };
         PriceSettingsDto: {
             /** @description ISO 4217 */
@@ -1728,6 +1759,7 @@ export interface components {
             conditions: components["schemas"]["OperatingConditionsDto"];
             filter?: components["schemas"]["PartFilterDto"];
             name: string;
+            partIds?: string[];
             /** @description Pieces to buy. */
             quantity?: number;
             target?: components["schemas"]["RankingTargetDto"];
@@ -1893,6 +1925,7 @@ export interface components {
             conditions?: components["schemas"]["OperatingConditionsDto"];
             filter?: components["schemas"]["PartFilterDto"];
             name?: string;
+            partIds?: string[];
             /** @description Pieces to buy. */
             quantity?: number;
             target?: components["schemas"]["RankingTargetDto"];
@@ -3031,6 +3064,8 @@ export interface operations {
                 kind?: ("op-amp" | "resistor")[];
                 partId?: string;
                 supplierId?: string;
+                /** @description Only parts that are chosen in saved conditions. */
+                usedInConditions?: boolean;
             };
             header?: never;
             path?: never;
@@ -3077,6 +3112,34 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["OfferListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    countPrices: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PriceCountsDto"];
                 };
             };
             /** @description Problem details (RFC 9457) */

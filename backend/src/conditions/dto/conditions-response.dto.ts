@@ -25,6 +25,9 @@ export class ConditionsResponseDto {
   @ApiProperty({ type: 'integer' })
   quantity: number;
 
+  @ApiProperty({ type: [String], description: 'The parts that were chosen at these conditions.' })
+  partIds: string[];
+
   @ApiProperty({ type: 'integer' })
   version: number;
 
@@ -38,7 +41,7 @@ export class ConditionsResponseDto {
 export class ConditionsListDto extends listOf(ConditionsResponseDto) {}
 
 export function toConditionsResponse(saved: SavedConditions): ConditionsResponseDto {
-  const { id, name, conditions, filter, target, quantity, version, updatedAt, updatedBy } = saved;
+  const { id, name, conditions, filter, target, quantity, parts, version, updatedAt, updatedBy } = saved;
   return {
     id: String(id),
     name,
@@ -46,6 +49,7 @@ export function toConditionsResponse(saved: SavedConditions): ConditionsResponse
     filter,
     target,
     quantity,
+    partIds: parts.map(({ partId }) => String(partId)),
     version,
     updatedAt: updatedAt.toISOString(),
     updatedBy: toMemberDto(updatedBy),

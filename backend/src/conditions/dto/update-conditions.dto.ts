@@ -2,11 +2,12 @@ import { CONDITION_FIELDS } from '@roothertz/common/conditions';
 import { OperatingConditionsDto } from '../../shared/conditions/operating-conditions.dto.js';
 import { PartFilterDto } from '../../shared/conditions/part-filter.dto.js';
 import { RankingTargetDto } from '../../shared/conditions/ranking-request.dto.js';
+import { Ids } from '../../shared/validation/id.decorator.js';
 import { Nested } from '../../shared/validation/nested.decorator.js';
 import { Quantity } from '../../shared/validation/quantity.decorator.js';
 import { StoredText } from '../../shared/validation/stored-text.decorator.js';
 import { Version } from '../../shared/validation/version.decorator.js';
-import { CONDITIONS_NAME } from './conditions-name.js';
+import { CONDITIONS_NAME, MOST_PARTS } from './conditions-fields.js';
 
 /** A change of saved conditions: each of its parts is replaced whole, and what is left out stays. */
 export class UpdateConditionsDto {
@@ -27,4 +28,7 @@ export class UpdateConditionsDto {
 
   @Quantity(CONDITION_FIELDS.quantity, { optional: true })
   quantity?: number;
+
+  @Ids(MOST_PARTS, { least: 0, optional: true })
+  partIds?: string[];
 }

@@ -1,7 +1,17 @@
 import type { OperatingConditions, PartFilter, RankingTarget } from '@roothertz/common/conditions';
-import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryGeneratedColumn, type Relation } from 'typeorm';
+import {
+  Column,
+  Entity,
+  Index,
+  JoinColumn,
+  ManyToOne,
+  OneToMany,
+  PrimaryGeneratedColumn,
+  type Relation,
+} from 'typeorm';
 import { Team } from '../../teams/entities/team.entity.js';
 import { User } from '../../users/entities/user.entity.js';
+import { SavedConditionsPart } from './saved-conditions-part.entity.js';
 
 @Entity('saved_conditions')
 @Index('saved_conditions_name', ['teamId', 'nameKey'], { unique: true })
@@ -34,6 +44,9 @@ export class SavedConditions {
 
   @Column({ type: 'int', unsigned: true })
   quantity: number;
+
+  @OneToMany(() => SavedConditionsPart, ({ conditions }) => conditions)
+  parts: Relation<SavedConditionsPart>[];
 
   @Column({ type: 'int', unsigned: true, default: 1 })
   version: number;

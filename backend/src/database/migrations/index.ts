@@ -7,6 +7,7 @@ import { CreatePrices1796083200000 } from './1796083200000-CreatePrices.js';
 import { CreateImports1796083300000 } from './1796083300000-CreateImports.js';
 import { CreateSubscriptions1796090300000 } from './1796090300000-CreateSubscriptions.js';
 import { NameAuditObjects1796090600000 } from './1796090600000-NameAuditObjects.js';
+import { AddPartsOfConditions1796090900000 } from './1796090900000-AddPartsOfConditions.js';
 
 /** All migrations; they run in the order of the time in their names. */
 export const MIGRATIONS = [
@@ -19,4 +20,5 @@ export const MIGRATIONS = [
   CreateImports1796083300000,
   CreateSubscriptions1796090300000,
   NameAuditObjects1796090600000,
+  AddPartsOfConditions1796090900000,
 ];

@@ -1,8 +1,11 @@
 import { checkConditions } from '@roothertz/common/conditions';
+import { normalisePartKey } from '@roothertz/common/parts';
 import type { EntityManager } from 'typeorm';
+import { SavedConditionsPart } from '../../conditions/entities/saved-conditions-part.entity.js';
 import { SavedConditions } from '../../conditions/entities/saved-conditions.entity.js';
 import { nameKey } from '../../shared/text/name-key.js';
 import type { DemoData } from './demo-data.js';
+import { findPartIds } from './part-ids.js';
 import type { SeededTeam } from './seed-team.js';
 
 /** The demo team's named operating conditions; the first fault ends it, naming conditions and field. */
@@ -11,16 +14,23 @@ export async function seedConditions(
   { teamId, userId }: SeededTeam,
   named: DemoData['conditions'],
 ): Promise<void> {
-  for (const { name, ranking } of named) {
+  const partIds = await findPartIds(manager, teamId);
+  for (const { name, ranking, chosen } of named) {
     const [error] = checkConditions(ranking);
     if (error) throw new Error(`Conditions “${name}”, ${error.field}: ${error.message}`);
-    await manager.insert(SavedConditions, {
+    const { identifiers } = await manager.insert(SavedConditions, {
       ...savedNow(userId),
       teamId,
       name,
       nameKey: nameKey(name),
       ...ranking,
     });
+    const conditionsId = identifiers[0].id as number;
+    for (const { manufacturer, partNumber } of chosen) {
+      const partId = partIds.get(normalisePartKey(manufacturer, partNumber));
+      if (partId === undefined) throw new Error(`Conditions “${name}”: no part ${partNumber}`);
+      await manager.insert(SavedConditionsPart, { conditionsId, partId });
+    }
   }
 }
 

@@ -1,13 +1,13 @@
 import { normalisePartKey } from '@roothertz/common/parts';
 import { dayOf } from '@roothertz/common/prices';
 import type { EntityManager } from 'typeorm';
-import { Part } from '../../library/entities/part.entity.js';
 import { ExchangeRate } from '../../prices/entities/exchange-rate.entity.js';
 import { PriceSettings } from '../../prices/entities/price-settings.entity.js';
 import { Supplier } from '../../prices/entities/supplier.entity.js';
 import { insertOffers } from '../../prices/offer-rows.js';
 import { nameKey } from '../../shared/text/name-key.js';
 import type { DemoData } from './demo-data.js';
+import { findPartIds } from './part-ids.js';
 import { type ListedOffer, readPriceList } from './price-list.js';
 import type { SeededTeam } from './seed-team.js';
 
@@ -29,7 +29,7 @@ export async function seedPrices(
   );
   const listed = readPriceList(LIST, today);
   const supplierIds = await insertSuppliers(manager, teamId, listed);
-  const partIds = await findParts(manager, teamId);
+  const partIds = await findPartIds(manager, teamId);
   const versions = new Map<string, number>();
   await insertOffers(
     manager,
@@ -64,15 +64,4 @@ async function insertSuppliers(
   const rows = names.map((name) => ({ teamId, name, nameKey: nameKey(name), createdAt }));
   const { identifiers } = await manager.insert(Supplier, rows);
   return new Map(names.map((name, index) => [name, identifiers[index].id as number]));
-}
-
-/** The parts that the team reads, by what makes them the same part: the team's own records before the curated. */
-async function findParts(manager: EntityManager, teamId: number): Promise<Map<string, number>> {
-  const parts = await manager
-    .createQueryBuilder(Part, 'part')
-    .innerJoin('part.library', 'library')
-    .where('library.teamId IS NULL OR library.teamId = :teamId', { teamId })
-    .orderBy('library.teamId')
-    .getMany();
-  return new Map(parts.map(({ normalisedKey, id }) => [normalisedKey, id]));
 }

@@ -2,6 +2,7 @@ import { LIBRARIES, type Library, PART_KINDS, type PartKind } from '@roothertz/c
 import { ApiProperty } from '@nestjs/swagger';
 import { listOf } from '../../shared/list/list-response.js';
 import { ListQueryDto } from '../../shared/list/list-query.dto.js';
+import { QueryFlag } from '../../shared/validation/flag.decorator.js';
 import { Id } from '../../shared/validation/id.decorator.js';
 import { Options } from '../../shared/validation/option.decorator.js';
 import { PRICE_STATES, type PriceState } from '../price-select.js';
@@ -9,7 +10,10 @@ import { OfferedPartDto, OfferResponseDto } from './offer-response.dto.js';
 
 const IN_QUERY = { optional: true, inQuery: true };
 
-/** What narrows the grid; without a state it holds every offer that stands. */
+/**
+ * What narrows the grid. Without a state it holds every offer that stands; where it is narrowed to the parts in use,
+ * also those of them without one.
+ */
 export class ListPricesDto extends ListQueryDto {
   @Options(PRICE_STATES, IN_QUERY)
   state?: PriceState[];
@@ -25,6 +29,9 @@ export class ListPricesDto extends ListQueryDto {
 
   @Id({ optional: true })
   supplierId?: string;
+
+  @QueryFlag('Only parts that are chosen in saved conditions.')
+  usedInConditions?: boolean;
 }
 
 export class PriceRowResponseDto {
@@ -33,6 +40,9 @@ export class PriceRowResponseDto {
 
   @ApiProperty({ type: OfferResponseDto, nullable: true, description: 'null where the part has no offer.' })
   offer: OfferResponseDto | null;
+
+  @ApiProperty({ type: [String], description: 'Names of the saved conditions in which the part is chosen.' })
+  usedIn: string[];
 }
 
 export class PriceListDto extends listOf(PriceRowResponseDto) {}

@@ -3,7 +3,7 @@ import { ApiProperty } from '@nestjs/swagger';
 import { ArrayMaxSize, ArrayMinSize, IsArray, ValidateBy } from 'class-validator';
 import { readId } from '../ids/read-id.js';
 import { Checked } from './checked.decorator.js';
-import type { Presence } from './presence.js';
+import { type Presence, skipAbsent } from './presence.js';
 
 const MESSAGE = 'an id as an answer gave it was expected';
 
@@ -13,14 +13,18 @@ export function Id(presence?: Presence): PropertyDecorator {
 }
 
 /** A list of ids. */
-export function Ids(most: number): PropertyDecorator {
-  const message = `a list of 1 to ${most} ids was expected`;
+export function Ids(
+  most: number,
+  { least = 1, ...presence }: Presence & { least?: number } = {},
+): PropertyDecorator {
+  const message = `a list of ${least} to ${most} ids was expected`;
   return applyDecorators(
+    ...skipAbsent(presence),
     ValidateBy({ name: 'ids', validator: { validate: isId } }, { each: true, message }),
     ArrayMaxSize(most, { message }),
-    ArrayMinSize(1, { message }),
+    ArrayMinSize(least, { message }),
     IsArray({ message }),
-    ApiProperty({ type: [String], minItems: 1, maxItems: most }),
+    ApiProperty({ type: [String], minItems: least, maxItems: most, required: !presence.optional }),
   );
 }
 

@@ -11,14 +11,19 @@ import { useNamedConditions } from './useNamedConditions';
 interface NamedConditionsBarProps {
   namedId: string | null;
   request: RankingRequest;
+  /** The part that the member has chosen at these conditions; null where none is. */
+  chosenId: string | null;
+  /** The part that the page is about: the chosen one, or else the leading one. */
+  shownId: string | null;
   /** Whether the member may save conditions. */
   maySave: boolean;
   show: (request: RankingRequest, namedId: string | null) => void;
 }
 
 /** The name of the conditions that are shown, whether they are saved, and the menu to change that. */
-export function NamedConditionsBar({ namedId, request, maySave, show }: NamedConditionsBarProps) {
-  const named = useNamedConditions(namedId, request);
+export function NamedConditionsBar(props: NamedConditionsBarProps) {
+  const { namedId, request, chosenId, shownId, maySave, show } = props;
+  const named = useNamedConditions(namedId, request, chosenId);
   const [naming, setNaming] = useState<'save-as' | 'rename' | null>(null);
   const { notification } = App.useApp();
   const { current, create, update, remove } = named;
@@ -29,15 +34,17 @@ export function NamedConditionsBar({ namedId, request, maySave, show }: NamedCon
     const undo = () => {
       notification.destroy(key);
       create.mutate(
-        { name: deleted.name, request: deleted },
+        { name: deleted.name, request: deleted, partIds: deleted.partIds },
         { onSuccess: ({ id }) => show(request, id), onError: tell },
       );
     };
     const actions = <Button onClick={undo}>Undo</Button>;
     notification.info({ key, title: `“${deleted.name}” is deleted.`, actions, duration: 12 });
   };
+  const partIds = shownId === null ? [] : [shownId];
   const act: Record<NamedAction, () => void> = {
-    save: () => current && update.mutate({ named: current, changes: { request } }, { onError: tell }),
+    save: () =>
+      current && update.mutate({ named: current, changes: { request, partIds } }, { onError: tell }),
     'save-as': () => setNaming('save-as'),
     rename: () => setNaming('rename'),
     revert: () => current && show(current, current.id),
@@ -53,7 +60,7 @@ export function NamedConditionsBar({ namedId, request, maySave, show }: NamedCon
   };
   const takeName = async (name: string) => {
     if (naming === 'rename' && current) await update.mutateAsync({ named: current, changes: { name } });
-    else show(request, (await create.mutateAsync({ name, request })).id);
+    else show(request, (await create.mutateAsync({ name, request, partIds })).id);
     setNaming(null);
   };
   if (naming)

@@ -25,7 +25,7 @@ export function useConditionsAddress() {
   const partId = params.get(PART_KEY);
 
   const show = useCallback(
-    (next: RankingRequest, named: string | null, replace = false) =>
+    (next: ShownRequest, named: string | null, replace = false) =>
       setParams((current) => addressOf(next, named, current), { replace, preventScrollReset: true }),
     [setParams],
   );
@@ -52,16 +52,22 @@ export function useConditionsAddress() {
   return { isBlank: content === null, request, problems, namedId, partId, change, replace, show, selectPart };
 }
 
+/** Named conditions bring the part with them that was chosen at them. */
+interface ShownRequest extends RankingRequest {
+  partIds?: readonly string[];
+}
+
 /** Keys of what doesn't belong to the conditions: they stay when the conditions change. */
 const KEPT_KEYS: readonly string[] = [...SEARCH_KEYS, PART_KEY];
 
-function addressOf(request: RankingRequest, named: string | null, before: URLSearchParams): URLSearchParams {
+function addressOf(request: ShownRequest, named: string | null, before: URLSearchParams): URLSearchParams {
   const params = writeAddress(request);
   if (named !== null) params.set(NAMED_KEY, named);
   for (const key of KEPT_KEYS) {
     const text = before.get(key);
     if (text !== null) params.set(key, text);
   }
+  if (request.partIds?.[0] !== undefined) params.set(PART_KEY, request.partIds[0]);
   return params;
 }
 

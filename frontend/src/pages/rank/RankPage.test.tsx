@@ -21,6 +21,7 @@ const named = {
   ...GEOPHONE,
   filter: {},
   target: {},
+  partIds: ['2'],
   version: 2,
   updatedAt: '2026-01-05T10:00:00.000Z',
   updatedBy: null,
@@ -53,7 +54,7 @@ describe('the rank page', () => {
   it('opens with the team’s first named conditions', async () => {
     const { router, ranked } = open('/rank');
     expect(await answer()).toBeInTheDocument();
-    expect(router.state.location.search).toBe('?stage=non-inverting&rs=375&named=4');
+    expect(router.state.location.search).toBe('?stage=non-inverting&rs=375&named=4&part=2');
     expect(ranked()[0].conditions.source.resistance).toBe(375);
     expect(screen.getByRole('heading', { name: 'River geophone' })).toBeInTheDocument();
     expect(screen.getByRole('button', { name: /^saved/ })).toBeInTheDocument();
@@ -190,7 +191,20 @@ describe('named conditions', () => {
     await choose('Save the changes');
     await waitFor(() => expect(asked.some(({ route }) => route === 'PATCH /api/conditions/4')).toBe(true));
     const patch = asked.find(({ route }) => route === 'PATCH /api/conditions/4')!;
-    expect(patch.body).toMatchObject({ version: 2, filter: {}, conditions: { source: { resistance: 400 } } });
+    expect(patch.body).toMatchObject({
+      version: 2,
+      filter: {},
+      conditions: { source: { resistance: 400 } },
+      partIds: ['1'],
+    });
+  });
+
+  it('are marked as changed where another part is chosen at them', async () => {
+    open('/rank?stage=non-inverting&rs=375&named=4&part=1');
+    await answer();
+    await choose('Back to what is saved');
+    expect(await screen.findByRole('button', { name: /^saved/ })).toBeInTheDocument();
+    expect(await screen.findByRole('region', { name: 'Noise budget of LQ-12' })).toBeInTheDocument();
   });
 
   it('are saved under another name', async () => {

@@ -35,7 +35,14 @@ export function RankPage() {
       <ContributorPatterns />
       <BriefAnswer words={words} />
       <section aria-label="Operating conditions" className={styles.conditions}>
-        <NamedConditionsBar namedId={namedId} request={request} maySave={maySave} show={show} />
+        <NamedConditionsBar
+          namedId={namedId}
+          request={request}
+          chosenId={search.view === 'op-amps' ? partId : null}
+          shownId={lookedAt?.selected.part.id ?? null}
+          maySave={maySave}
+          show={show}
+        />
         {!isBlank && (
           <ConditionsPanel
             key={namedId}

@@ -9,3 +9,6 @@ export const CONDITIONS_NAME = {
   fallback: null,
   synonyms: [],
 } as const satisfies TextField;
+
+/** The most parts that are chosen at saved conditions. */
+export const MOST_PARTS = 20;
