@@ -6,7 +6,7 @@ import {
   type PartFields,
 } from '@roothertz/common/parts';
 import { DomainError } from '../shared/errors/domain-error.js';
-import { withFallbacks } from '../shared/parts/parameter-properties.js';
+import { withFallbacks } from '../shared/parts/parameter-dtos.js';
 
 type Stated = Record<string, unknown>;
 

@@ -1,5 +1,5 @@
 import type { PartPlace } from '@roothertz/common/noise';
-import type { PartNameDto } from './dto/ranking-response.dto.js';
+import type { PartNameDto } from '../shared/parts/part-name.dto.js';
 import type { IndexedLibrary } from './library-index.service.js';
 
 /** The name of the part at a place, from the libraries' columns. */

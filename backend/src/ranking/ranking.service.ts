@@ -15,7 +15,7 @@ import type { Caller } from '../shared/access/caller.js';
 import { checkedConditions, checkedRankingRequest } from '../shared/conditions/ranking-request.js';
 import { DomainError } from '../shared/errors/domain-error.js';
 import { parseSort } from '../shared/list/sort.js';
-import { withFallbacks } from '../shared/parts/parameter-properties.js';
+import { withFallbacks } from '../shared/parts/parameter-dtos.js';
 import type { EvaluateStageDto } from './dto/evaluate-stage.dto.js';
 import type { ExclusionDto, ExclusionListDto } from './dto/exclusions-response.dto.js';
 import type { RankOpAmpsDto } from './dto/rank-op-amps.dto.js';

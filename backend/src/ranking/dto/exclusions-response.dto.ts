@@ -1,7 +1,7 @@
 import { EXCLUSION_REASONS, type ExclusionReason } from '@roothertz/common/noise';
 import { ApiProperty } from '@nestjs/swagger';
 import { listOf } from '../../shared/list/list-response.js';
-import { PartNameDto } from './ranking-response.dto.js';
+import { PartNameDto } from '../../shared/parts/part-name.dto.js';
 
 export class ExclusionDto {
   @ApiProperty()

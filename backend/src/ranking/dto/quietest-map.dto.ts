@@ -6,7 +6,7 @@ import { OperatingConditionsDto } from '../../shared/conditions/operating-condit
 import { PartFilterDto } from '../../shared/conditions/part-filter.dto.js';
 import { Nested } from '../../shared/validation/nested.decorator.js';
 import { Quantity } from '../../shared/validation/quantity.decorator.js';
-import { PartNameDto } from './ranking-response.dto.js';
+import { PartNameDto } from '../../shared/parts/part-name.dto.js';
 
 const STEPS: QuantityField = {
   label: 'steps',

@@ -1,41 +1,10 @@
 import { EXCLUSION_REASONS, type ExclusionReason } from '@roothertz/common/noise';
-import {
-  type Amplifier,
-  type AmplifierOrigins,
-  type Approval,
-  APPROVALS,
-  LIBRARIES,
-  type Library,
-  type Lifecycle,
-  LIFECYCLES,
-} from '@roothertz/common/parts';
+import type { Amplifier, AmplifierOrigins } from '@roothertz/common/parts';
 import { ApiProperty } from '@nestjs/swagger';
 import { AmplifierOriginsDto, AmplifierResponseDto } from '../../shared/parts/amplifier.dto.js';
+import { PartNameDto } from '../../shared/parts/part-name.dto.js';
 import { PriceDto } from './price.dto.js';
 import { SourceFloorDto, StageFiguresDto } from './stage-figures.dto.js';
-
-export class PartNameDto {
-  @ApiProperty()
-  id: string;
-
-  @ApiProperty({ enum: LIBRARIES })
-  library: Library;
-
-  @ApiProperty()
-  manufacturer: string;
-
-  @ApiProperty()
-  partNumber: string;
-
-  @ApiProperty()
-  package: string;
-
-  @ApiProperty({ enum: LIFECYCLES })
-  lifecycle: Lifecycle;
-
-  @ApiProperty({ enum: APPROVALS })
-  approval: Approval;
-}
 
 export class RankedPartDto extends PartNameDto {
   @ApiProperty({ type: AmplifierResponseDto })

@@ -10,7 +10,7 @@ import { ApiProperty } from '@nestjs/swagger';
 import { listOf } from '../../shared/list/list-response.js';
 import { ResistorOriginsDto, ResistorParametersDto } from '../../shared/parts/resistor.dto.js';
 import { PriceDto } from './price.dto.js';
-import { PartNameDto } from './ranking-response.dto.js';
+import { PartNameDto } from '../../shared/parts/part-name.dto.js';
 
 export class RankedResistorPartDto extends PartNameDto {
   @ApiProperty({ type: ResistorParametersDto })

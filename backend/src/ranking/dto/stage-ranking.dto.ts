@@ -1,5 +1,6 @@
 import { ApiProperty } from '@nestjs/swagger';
-import { ExcludedDto, PartNameDto, RankedPartDto } from './ranking-response.dto.js';
+import { PartNameDto } from '../../shared/parts/part-name.dto.js';
+import { ExcludedDto, RankedPartDto } from './ranking-response.dto.js';
 import { SourceFloorDto, StageFiguresDto } from './stage-figures.dto.js';
 
 export class NetworkPartDto extends PartNameDto {

@@ -1,35 +1,16 @@
-import { INPUT_TYPES, type InputType, OP_AMP_PARAMETERS } from '@roothertz/common/parts';
-import { Option } from '../validation/option.decorator.js';
+import { type Amplifier, OP_AMP_CATALOGUE } from '@roothertz/common/parts';
 import {
-  answered,
-  changed,
-  changedOrigin,
-  defineParameters,
-  origin,
-  stated,
-} from './parameter-properties.js';
+  answeredParameters,
+  changedOrigins,
+  changedParameters,
+  statedOrigins,
+  statedParameters,
+} from './parameter-dtos.js';
 
-/** An amplifier as a request states it whole. */
-export class AmplifierDto {
-  @Option(INPUT_TYPES, { optional: true, nullable: true })
-  inputType: InputType | null = null;
-}
-defineParameters(AmplifierDto, OP_AMP_PARAMETERS, stated);
+type Choice = Pick<Amplifier, 'inputType'>;
 
-export class AmplifierChangeDto {
-  @Option(INPUT_TYPES, { optional: true, nullable: true })
-  inputType?: InputType | null;
-}
-defineParameters(AmplifierChangeDto, OP_AMP_PARAMETERS, changed);
-
-export class AmplifierResponseDto {
-  @Option(INPUT_TYPES, { nullable: true })
-  inputType: InputType | null;
-}
-defineParameters(AmplifierResponseDto, OP_AMP_PARAMETERS, answered);
-
-export class AmplifierOriginsDto {}
-defineParameters(AmplifierOriginsDto, OP_AMP_PARAMETERS, origin);
-
-export class AmplifierOriginsChangeDto {}
-defineParameters(AmplifierOriginsChangeDto, OP_AMP_PARAMETERS, changedOrigin);
+export class AmplifierDto extends statedParameters<Choice>(OP_AMP_CATALOGUE) {}
+export class AmplifierChangeDto extends changedParameters<Choice>(OP_AMP_CATALOGUE) {}
+export class AmplifierResponseDto extends answeredParameters<Choice>(OP_AMP_CATALOGUE) {}
+export class AmplifierOriginsDto extends statedOrigins(OP_AMP_CATALOGUE) {}
+export class AmplifierOriginsChangeDto extends changedOrigins(OP_AMP_CATALOGUE) {}

@@ -1,35 +1,16 @@
-import { RESISTOR_PARAMETERS, TECHNOLOGIES, type Technology } from '@roothertz/common/parts';
-import { Option } from '../validation/option.decorator.js';
+import { type Resistor, RESISTOR_CATALOGUE } from '@roothertz/common/parts';
 import {
-  answered,
-  changed,
-  changedOrigin,
-  defineParameters,
-  origin,
-  stated,
-} from './parameter-properties.js';
+  answeredParameters,
+  changedOrigins,
+  changedParameters,
+  statedOrigins,
+  statedParameters,
+} from './parameter-dtos.js';
 
-/** A resistor as a request states it whole. */
-export class ResistorDto {
-  @Option(TECHNOLOGIES, { optional: true, nullable: true })
-  technology: Technology | null = null;
-}
-defineParameters(ResistorDto, RESISTOR_PARAMETERS, stated);
+type Choice = Pick<Resistor, 'technology'>;
 
-export class ResistorChangeDto {
-  @Option(TECHNOLOGIES, { optional: true, nullable: true })
-  technology?: Technology | null;
-}
-defineParameters(ResistorChangeDto, RESISTOR_PARAMETERS, changed);
-
-export class ResistorParametersDto {
-  @Option(TECHNOLOGIES, { nullable: true })
-  technology: Technology | null;
-}
-defineParameters(ResistorParametersDto, RESISTOR_PARAMETERS, answered);
-
-export class ResistorOriginsDto {}
-defineParameters(ResistorOriginsDto, RESISTOR_PARAMETERS, origin);
-
-export class ResistorOriginsChangeDto {}
-defineParameters(ResistorOriginsChangeDto, RESISTOR_PARAMETERS, changedOrigin);
+export class ResistorDto extends statedParameters<Choice>(RESISTOR_CATALOGUE) {}
+export class ResistorChangeDto extends changedParameters<Choice>(RESISTOR_CATALOGUE) {}
+export class ResistorParametersDto extends answeredParameters<Choice>(RESISTOR_CATALOGUE) {}
+export class ResistorOriginsDto extends statedOrigins(RESISTOR_CATALOGUE) {}
+export class ResistorOriginsChangeDto extends changedOrigins(RESISTOR_CATALOGUE) {}
