@@ -4,6 +4,7 @@ import { createOpenApiDocument } from '../src/openapi/document.js';
 import { createSupplier } from './factories/offers.js';
 import { applyList, checkedList, uploadList } from './factories/imports.js';
 import { createOpAmp } from './factories/op-amps.js';
+import { createResistor } from './factories/resistors.js';
 import { hostileValue, toRequestText } from './fuzz/hostile.js';
 import { mutated } from './fuzz/mutated.js';
 import { SAMPLES } from './fuzz/samples.js';
@@ -38,6 +39,7 @@ describe('whatever is sent', () => {
     app = await startTestApp();
     member = await signInMember(app, await createTeam(app), ['admin', 'librarian', 'engineer']);
     await createOpAmp(member);
+    await createResistor(member);
     await createSupplier(member);
     await makeImports();
     const document: OpenAPIObject = createOpenApiDocument(app.nest);

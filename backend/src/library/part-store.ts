@@ -11,7 +11,9 @@ import type { LibraryService } from './library.service.js';
 import { type PartRecord, toPartRecord } from './part-record.js';
 import { insertParts, updatePart } from './part-rows.js';
 import { filterParts, type PartQuery, selectParts, sortParts } from './part-select.js';
+import { idsOfChanges, restood, type StandingChange, writeStandings } from './part-standings.js';
 import type { PartTable } from './part-tables.js';
+import { type PartChange, trailOf } from './part-trail.js';
 
 /** Keeps the parts of a kind: each change bumps its library's revision in the same transaction. */
 export class PartStore<Kind extends LibraryPart> {
@@ -39,7 +41,9 @@ export class PartStore<Kind extends LibraryPart> {
   insert(caller: Caller, part: Kind): Promise<PartRecord<Kind>> {
     return this.changeLibrary(caller, async (manager, libraryId) => {
       const [id] = await insertParts(manager, this.table, libraryId, [part], caller.userId);
-      return this.recorded(manager, caller, 'part.created', null, id);
+      const created = await this.findReadable(manager, caller, id);
+      await this.record(manager, caller, [[null, created]]);
+      return created;
     });
   }
 
@@ -52,7 +56,9 @@ export class PartStore<Kind extends LibraryPart> {
     return this.changeLibrary(caller, async (manager) => {
       const current = await this.findChangeable(manager, caller, id, version);
       await updatePart(manager, this.table, current, change(current), caller.userId);
-      return this.recorded(manager, caller, 'part.changed', current, current.id);
+      const changed = await this.findReadable(manager, caller, id);
+      await this.record(manager, caller, [[current, changed]]);
+      return changed;
     });
   }
 
@@ -60,10 +66,24 @@ export class PartStore<Kind extends LibraryPart> {
     await this.changeLibrary(caller, async (manager) => {
       const current = await this.findChangeable(manager, caller, id, version);
       await manager.delete(Part, { id: current.id });
-      const object = this.objectOf(current);
-      await this.audit.record(manager, caller, [
-        { action: 'part.deleted', object, from: toTrail(current), to: null },
-      ]);
+      await this.record(manager, caller, [[current, null]]);
+    });
+  }
+
+  /** Changes how parts stand, all of them or none, and gives them in the order of the changes. */
+  changeStandings(caller: Caller, changes: readonly StandingChange[]): Promise<PartRecord<Kind>[]> {
+    const ids = idsOfChanges(changes);
+    return this.changeLibrary(caller, async (manager) => {
+      const moved = restood(changes, await this.findAll(manager, caller, ids));
+      await writeStandings(manager, moved, caller.userId);
+      const found = await this.findAll(manager, caller, ids);
+      const named = (id: number | string) => found.get(String(id))!;
+      await this.record(
+        manager,
+        caller,
+        moved.map(({ current }) => [current, named(current.id)]),
+      );
+      return changes.map(({ id }) => named(id));
     });
   }
 
@@ -81,22 +101,26 @@ export class PartStore<Kind extends LibraryPart> {
       .catch(refuseDuplicate);
   }
 
-  /** Notes what has been written, and answers it. */
-  private async recorded(
+  private record(
     manager: EntityManager,
     caller: Caller,
-    action: 'part.created' | 'part.changed',
-    before: PartRecord<Kind> | null,
-    id: number,
-  ): Promise<PartRecord<Kind>> {
-    const after = await this.findReadable(manager, caller, id);
-    const [from, to] = [before && toTrail(before), toTrail(after)];
-    await this.audit.record(manager, caller, [{ action, object: this.objectOf(after), from, to }]);
-    return after;
+    changes: readonly PartChange<Kind>[],
+  ): Promise<void> {
+    return this.audit.record(
+      manager,
+      caller,
+      changes.map((change) => trailOf(this.table.catalogue.kind, change)),
+    );
   }
 
-  private objectOf({ id, manufacturer, partNumber }: PartRecord<Kind>) {
-    return { kind: this.table.catalogue.kind, id, label: `${manufacturer} ${partNumber}` };
+  private async findAll(
+    manager: EntityManager,
+    caller: Caller,
+    ids: readonly number[],
+  ): Promise<Map<string, PartRecord<Kind>>> {
+    const select = selectParts(manager, this.table, caller).andWhere('part.id IN (:...ids)', { ids });
+    const records = (await select.getMany()).map((row) => toPartRecord<Kind>(this.table.catalogue, row));
+    return new Map(records.map((record) => [String(record.id), record]));
   }
 
   private async findReadable(
@@ -123,16 +147,6 @@ export class PartStore<Kind extends LibraryPart> {
       throw new DomainError('part.stale', 'Somebody has changed this part meanwhile: load it again.');
     return current;
   }
-}
-
-/** What of a part somebody can change. */
-function toTrail<Kind extends LibraryPart>({
-  library,
-  version,
-  updatedAt,
-  ...part
-}: PartRecord<Kind>): object {
-  return part;
 }
 
 function refuseDuplicate(error: unknown): never {

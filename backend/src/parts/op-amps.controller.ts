@@ -4,6 +4,7 @@ import { Access } from '../shared/access/access.decorator.js';
 import type { Caller as CallerOfRequest } from '../shared/access/caller.js';
 import { Caller } from '../shared/access/caller.decorator.js';
 import { VersionQueryDto } from '../shared/list/version-query.dto.js';
+import { ChangeStandingsDto } from './dto/change-standings.dto.js';
 import { CreateOpAmpDto } from './dto/create-op-amp.dto.js';
 import { ListOpAmpsDto } from './dto/list-op-amps.dto.js';
 import { OpAmpListDto, OpAmpResponseDto } from './dto/op-amp-response.dto.js';
@@ -27,6 +28,16 @@ export class OpAmpsController {
   @ApiCreatedResponse({ type: OpAmpResponseDto })
   createOpAmp(@Caller() caller: CallerOfRequest, @Body() dto: CreateOpAmpDto): Promise<OpAmpResponseDto> {
     return this.opAmps.create(caller, dto);
+  }
+
+  @Patch()
+  @Access('parts.edit')
+  @ApiOkResponse({ type: OpAmpListDto })
+  changeOpAmpStandings(
+    @Caller() caller: CallerOfRequest,
+    @Body() { parts }: ChangeStandingsDto,
+  ): Promise<OpAmpListDto> {
+    return this.opAmps.changeStandings(caller, parts);
   }
 
   @Get(':id')

@@ -1,6 +1,7 @@
 import type { Library, LibraryPart, PartFields } from '@roothertz/common/parts';
 import type { PartRecord } from '../library/part-record.js';
 import { type PartQuery, partSorts } from '../library/part-select.js';
+import type { StandingChange } from '../library/part-standings.js';
 import type { PartStore } from '../library/part-store.js';
 import type { Caller } from '../shared/access/caller.js';
 import { readId } from '../shared/ids/read-id.js';
@@ -34,6 +35,11 @@ export class PartsService<Kind extends LibraryPart> {
       changedPart(this.store.table.catalogue, current as Kind, change),
     );
     return toAnswer(record);
+  }
+
+  async changeStandings(caller: Caller, changes: readonly StandingChange[]): Promise<List<Answer<Kind>>> {
+    const records = await this.store.changeStandings(caller, changes);
+    return { items: records.map((record) => toAnswer(record)), total: records.length };
   }
 
   remove(caller: Caller, id: string, version: number): Promise<void> {

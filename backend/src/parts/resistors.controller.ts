@@ -4,6 +4,7 @@ import { Access } from '../shared/access/access.decorator.js';
 import type { Caller as CallerOfRequest } from '../shared/access/caller.js';
 import { Caller } from '../shared/access/caller.decorator.js';
 import { VersionQueryDto } from '../shared/list/version-query.dto.js';
+import { ChangeStandingsDto } from './dto/change-standings.dto.js';
 import { CreateResistorDto } from './dto/create-resistor.dto.js';
 import { ListResistorsDto } from './dto/list-resistors.dto.js';
 import { ResistorListDto, ResistorResponseDto } from './dto/resistor-response.dto.js';
@@ -33,6 +34,16 @@ export class ResistorsController {
     @Body() dto: CreateResistorDto,
   ): Promise<ResistorResponseDto> {
     return this.resistors.create(caller, dto);
+  }
+
+  @Patch()
+  @Access('parts.edit')
+  @ApiOkResponse({ type: ResistorListDto })
+  changeResistorStandings(
+    @Caller() caller: CallerOfRequest,
+    @Body() { parts }: ChangeStandingsDto,
+  ): Promise<ResistorListDto> {
+    return this.resistors.changeStandings(caller, parts);
   }
 
   @Get(':id')

@@ -9,6 +9,8 @@ export const AUDIT_ACTIONS = {
   'price-settings.changed': 'changed the settings of',
   'part.created': 'added the part',
   'part.changed': 'changed the part',
+  'part.retired': 'retired the part',
+  'part.restored': 'brought back the part',
   'part.deleted': 'deleted the part',
   'import.applied': 'applied the import',
   'import.undone': 'took back the import',

@@ -45,6 +45,7 @@ export const CAUTION_DETAILS: Record<Caution, string> = {
 export const EXCLUSION_REASONS = [
   'lifecycle',
   'approval',
+  'retired',
   'input-type',
   'package',
   'too-few-channels',
@@ -58,6 +59,7 @@ export type ExclusionReason = (typeof EXCLUSION_REASONS)[number];
 export const EXCLUSION_LABELS: Record<ExclusionReason, string> = {
   lifecycle: 'lifecycle not chosen',
   approval: 'approval not chosen',
+  retired: 'retired',
   'input-type': 'input type not chosen',
   package: 'other package',
   'too-few-channels': 'too few channels',

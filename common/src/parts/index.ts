@@ -9,6 +9,7 @@ export * from './reading.js';
 export * from './normalise.js';
 export * from './partText.js';
 export * from './part.js';
+export * from './retirement.js';
 export * from './partCatalogue.js';
 export * from './partColumns.js';
 export * from './figureCell.js';

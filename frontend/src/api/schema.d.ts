@@ -353,7 +353,7 @@ export interface paths {
         delete?: never;
         options?: never;
         head?: never;
-        patch?: never;
+        patch: operations["changeOpAmpStandings"];
         trace?: never;
     };
     "/api/op-amps.csv": {
@@ -577,7 +577,7 @@ export interface paths {
         delete?: never;
         options?: never;
         head?: never;
-        patch?: never;
+        patch: operations["changeResistorStandings"];
         trace?: never;
     };
     "/api/resistors.csv": {
@@ -770,7 +770,7 @@ export interface components {
         };
         AuditEntryResponseDto: {
             /** @enum {string} */
-            action: "offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.deleted" | "import.applied" | "import.undone" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked";
+            action: "offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked";
             /** Format: date-time */
             at: string;
             /** @description null where the account is gone. */
@@ -806,6 +806,9 @@ export interface components {
             minimumQuantity: number;
             /** @description Decimal number with four decimals. */
             unitPrice: string;
+        };
+        ChangeStandingsDto: {
+            parts: components["schemas"]["StandingChangeDto"][];
         };
         CheaperOrderDto: {
             orderQuantity: number;
@@ -978,14 +981,14 @@ export interface components {
         ExclusionCountDto: {
             count: number;
             /** @enum {string} */
-            reason: "lifecycle" | "approval" | "input-type" | "package" | "too-few-channels" | "supply-out-of-range" | "below-minimum-stable-gain" | "too-slow" | "noise-unbounded";
+            reason: "lifecycle" | "approval" | "retired" | "input-type" | "package" | "too-few-channels" | "supply-out-of-range" | "below-minimum-stable-gain" | "too-slow" | "noise-unbounded";
         };
         ExclusionDto: {
             /** @description The reason in plain words, with its figures. */
             detail: string;
             part: components["schemas"]["PartNameDto"];
             /** @enum {string} */
-            reason: "lifecycle" | "approval" | "input-type" | "package" | "too-few-channels" | "supply-out-of-range" | "below-minimum-stable-gain" | "too-slow" | "noise-unbounded";
+            reason: "lifecycle" | "approval" | "retired" | "input-type" | "package" | "too-few-channels" | "supply-out-of-range" | "below-minimum-stable-gain" | "too-slow" | "noise-unbounded";
         };
         ExclusionListDto: {
             items: components["schemas"]["ExclusionDto"][];
@@ -1636,14 +1639,14 @@ export interface components {
         ResistorExclusionCountDto: {
             count: number;
             /** @enum {string} */
-            reason: "lifecycle" | "approval" | "technology" | "package" | "over-rating";
+            reason: "lifecycle" | "approval" | "retired" | "technology" | "package" | "over-rating";
         };
         ResistorExclusionDto: {
             /** @description The reason in plain words, with its figures. */
             detail: string;
             part: components["schemas"]["PartNameDto"];
             /** @enum {string} */
-            reason: "lifecycle" | "approval" | "technology" | "package" | "over-rating";
+            reason: "lifecycle" | "approval" | "retired" | "technology" | "package" | "over-rating";
         };
         ResistorExclusionListDto: {
             items: components["schemas"]["ResistorExclusionDto"][];
@@ -1906,6 +1909,15 @@ export interface components {
             /** @description How many op-amps are ranked, each with its quietest network. */
             total: number;
         };
+        StandingChangeDto: {
+            /** @enum {string} */
+            approval?: "approved" | "restricted" | "not-approved";
+            id: string;
+            /** @enum {string} */
+            lifecycle?: "active" | "not-recommended" | "last-time-buy" | "obsolete";
+            /** @description The version that was last read. */
+            version: number;
+        };
         SupplierListDto: {
             items: components["schemas"]["SupplierResponseDto"][];
             /** @description How many there are in all, whatever the page holds. */
@@ -2001,7 +2013,7 @@ export interface operations {
     listAuditEntries: {
         parameters: {
             query?: {
-                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.deleted" | "import.applied" | "import.undone" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
+                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
                 objectKind?: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
                 objectId?: string;
                 userId?: string;
@@ -2038,7 +2050,7 @@ export interface operations {
     exportAuditEntries: {
         parameters: {
             query?: {
-                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.deleted" | "import.applied" | "import.undone" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
+                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
                 objectKind?: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
                 objectId?: string;
                 userId?: string;
@@ -2895,6 +2907,38 @@ export interface operations {
             };
         };
     };
+    changeOpAmpStandings: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChangeStandingsDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OpAmpListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
     exportOpAmps: {
         parameters: {
             query?: {
@@ -3526,6 +3570,38 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["ResistorResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    changeResistorStandings: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChangeStandingsDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ResistorListDto"];
                 };
             };
             /** @description Problem details (RFC 9457) */

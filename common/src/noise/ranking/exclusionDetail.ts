@@ -1,5 +1,11 @@
 import type { OperatingConditions, PartFilter } from '../../conditions/index.js';
-import { APPROVAL_LABELS, INPUT_TYPE_LABELS, LIFECYCLE_LABELS, type Amplifier } from '../../parts/index.js';
+import {
+  APPROVAL_LABELS,
+  INPUT_TYPE_LABELS,
+  LIFECYCLE_LABELS,
+  RETIRED_DETAIL,
+  type Amplifier,
+} from '../../parts/index.js';
 import { formatQuantity } from '../../units/index.js';
 import type { ExclusionReason } from '../cautions.js';
 import { stageModel } from '../stage/stageModel.js';
@@ -17,6 +23,7 @@ interface Excluded {
 const DETAILS: Record<ExclusionReason, (excluded: Excluded) => string> = {
   lifecycle: ({ columns, row }) => `its lifecycle is “${LIFECYCLE_LABELS[columns.lifecycle[row]]}”`,
   approval: ({ columns, row }) => `its approval is “${APPROVAL_LABELS[columns.approval[row]]}”`,
+  retired: () => RETIRED_DETAIL,
   'input-type': ({ amplifier }) =>
     amplifier.inputType
       ? `its input is ${INPUT_TYPE_LABELS[amplifier.inputType]}`

@@ -31,6 +31,11 @@ describe('an exclusion', () => {
       'its lifecycle is “obsolete”',
       [{ lifecycle: 'obsolete' }, { lifecycle: ['active', 'not-recommended'] }],
     ],
+    [
+      'retired',
+      'it is retired: obsolete and not approved; tick one of these to rank it',
+      [{ lifecycle: 'obsolete', approval: 'not-approved' }],
+    ],
     ['approval', 'its approval is “restricted”', [{ approval: 'restricted' }, { approval: ['approved'] }]],
     ['input-type', 'its input is bipolar', [{}, { inputType: ['jfet', 'cmos'] }]],
     [

@@ -1,4 +1,5 @@
 import type { OperatingConditions, PartFilter } from '../../conditions/index.js';
+import { isRetiredUnasked } from '../../parts/index.js';
 import type { ExclusionReason } from '../cautions.js';
 import type { StageModel } from '../stage/model.js';
 import type { AmplifierColumns } from './columns.js';
@@ -51,6 +52,8 @@ export function filterExclusions(filter: PartFilter): Exclude {
   return (columns, row) => {
     if (lifecycles && !lifecycles.has(columns.lifecycle[row])) return 'lifecycle';
     if (approvals && !approvals.has(columns.approval[row])) return 'approval';
+    const [lifecycle, approval] = [columns.lifecycle[row], columns.approval[row]];
+    if (isRetiredUnasked({ lifecycle, approval }, filter)) return 'retired';
     if (inputTypes && !inputTypes.has(columns.inputType[row])) return 'input-type';
     if (packageName && !columns.package[row].toLowerCase().includes(packageName)) return 'package';
     const { parameters } = columns;

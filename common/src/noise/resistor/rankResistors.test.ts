@@ -98,6 +98,7 @@ describe('rankResistors', () => {
   it.each([
     ['over-rating', { powerRating: 0.005 }, {}, /6\.25\smW, rated for 5\smW/],
     ['lifecycle', { lifecycle: 'obsolete' }, { lifecycle: ['active'] }, /obsolete/],
+    ['retired', { lifecycle: 'obsolete', approval: 'not-approved' }, {}, /retired/],
     ['approval', { approval: 'restricted' }, { approval: ['approved'] }, /restricted/],
     ['technology', {}, { technology: ['thin-film'] }, /thick film/],
     ['package', {}, { package: '0603' }, /0805/],

@@ -1,7 +1,9 @@
 import { smallestPositions } from '../../numeric/index.js';
 import {
   APPROVAL_LABELS,
+  isRetiredUnasked,
   LIFECYCLE_LABELS,
+  RETIRED_DETAIL,
   TECHNOLOGY_LABELS,
   type Approval,
   type Lifecycle,
@@ -23,6 +25,7 @@ export interface LibraryResistor extends Resistor {
 export const RESISTOR_EXCLUSION_REASONS = [
   'lifecycle',
   'approval',
+  'retired',
   'technology',
   'package',
   'over-rating',
@@ -32,6 +35,7 @@ export type ResistorExclusionReason = (typeof RESISTOR_EXCLUSION_REASONS)[number
 export const RESISTOR_EXCLUSION_LABELS: Record<ResistorExclusionReason, string> = {
   lifecycle: 'lifecycle not chosen',
   approval: 'approval not chosen',
+  retired: 'retired',
   technology: 'technology not chosen',
   package: 'other package',
   'over-rating': 'dissipates more than its rating',
@@ -142,6 +146,7 @@ export function resistorFilterExclusion(
 ): ResistorExclusionReason | null {
   if (filter.lifecycle?.length && !filter.lifecycle.includes(lifecycle)) return 'lifecycle';
   if (filter.approval?.length && !filter.approval.includes(approval)) return 'approval';
+  if (isRetiredUnasked({ lifecycle, approval }, filter)) return 'retired';
   if (filter.technology?.length && (!technology || !filter.technology.includes(technology)))
     return 'technology';
   const packageName = filter.package?.trim().toLowerCase() ?? '';
@@ -157,6 +162,7 @@ function detailOf(
   const details: Record<ResistorExclusionReason, () => string> = {
     lifecycle: () => `its lifecycle is “${LIFECYCLE_LABELS[resistor.lifecycle]}”`,
     approval: () => `its approval is “${APPROVAL_LABELS[resistor.approval]}”`,
+    retired: () => RETIRED_DETAIL,
     technology: () =>
       resistor.technology ? `it is ${TECHNOLOGY_LABELS[resistor.technology]}` : 'its technology is unknown',
     package: () => `its package is ${resistor.package || 'unknown'}`,

@@ -56,6 +56,7 @@ function byCount<Reason extends string>(reasons: Excluded<Reason>['reasons']) {
 const ADVICE: Record<ExclusionReason, string> = {
   lifecycle: 'Tick more lifecycles under Parts.',
   approval: 'Tick more approvals under Parts.',
+  retired: 'Tick “obsolete” or “not approved” under Parts.',
   'input-type': 'Tick more input types under Parts.',
   package: 'Change or clear the package under Parts.',
   'too-few-channels': 'Lower the channels.',
@@ -68,6 +69,7 @@ const ADVICE: Record<ExclusionReason, string> = {
 const RESISTOR_ADVICE: Record<ResistorExclusionReason, string> = {
   lifecycle: ADVICE.lifecycle,
   approval: ADVICE.approval,
+  retired: ADVICE.retired,
   technology: 'Choose more technologies.',
   package: 'Change or clear the package.',
   'over-rating': 'Lower the direct voltage, or share it among several resistors in series.',
