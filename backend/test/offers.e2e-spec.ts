@@ -61,6 +61,7 @@ describe('offers', () => {
       confirmedAt: expect.any(String),
       confirmedBy: { id: String(purchasing.caller.userId), name: expect.any(String) },
       openedAt: expect.any(String),
+      openedBy: { id: String(purchasing.caller.userId), name: expect.any(String) },
       closedAt: null,
       states: [],
       version: 1,
@@ -152,6 +153,38 @@ describe('offers', () => {
       confirmedBy: { id: String(purchasing.caller.userId) },
     });
     expect((await ofPart()).current).toEqual(body.items);
+  });
+
+  it('takes back a confirmation: the one before holds again, once', async () => {
+    const { id } = await make();
+    const long = new Date('2026-01-05T08:00:00Z');
+    await app.dataSource.manager.update(
+      Offer,
+      { id: Number(id) },
+      { confirmedAt: long, confirmedById: null },
+    );
+    const undo = (member: TestMember) => member.agent.post('/api/offers/confirm/undo').send({ ids: [id] });
+    expect(fields((await undo(purchasing).expect(409)).body)).toEqual(['ids[0]']);
+    await purchasing.agent
+      .post('/api/offers/confirm')
+      .send({ ids: [id] })
+      .expect(200);
+    const colleague = await signInMember(
+      app,
+      { id: purchasing.caller.teamId, plan: purchasing.caller.plan },
+      ['purchasing'],
+    );
+    expect((await undo(colleague).expect(409)).body.code).toBe('offer.stale');
+    const { body } = await undo(purchasing).expect(200);
+    expect(body.items).toMatchObject([
+      { id, confirmedAt: long.toISOString(), confirmedBy: null, version: 1 },
+    ]);
+    expect(await app.dataSource.manager.findOneByOrFail(Offer, { id: Number(id) })).toMatchObject({
+      confirmedAt: long,
+      confirmedById: null,
+      earlierConfirmedAt: null,
+    });
+    await undo(purchasing).expect(409);
   });
 
   it('confirms all or none', async () => {

@@ -22,6 +22,7 @@ export function toOfferResponse(offer: Offer, { staleAfterDays, today }: OfferVi
     confirmedAt,
     confirmedBy: toMemberDto(offer.confirmedBy),
     openedAt: offer.openedAt.toISOString(),
+    openedBy: toMemberDto(offer.openedBy),
     closedAt: offer.closedAt && offer.closedAt.toISOString(),
     states: offerStates({ confirmedAt, validUntil: offer.validUntil }, staleAfterDays, today),
     version: offer.version,

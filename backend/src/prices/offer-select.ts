@@ -14,6 +14,8 @@ export function selectOffers(manager: EntityManager, { teamId }: Caller): OfferS
     .leftJoinAndSelect('offer.breaks', 'price')
     .leftJoin('offer.confirmedBy', 'confirmedBy')
     .addSelect(['confirmedBy.id', 'confirmedBy.name'])
+    .leftJoin('offer.openedBy', 'openedBy')
+    .addSelect(['openedBy.id', 'openedBy.name'])
     .where('offer.teamId = :teamId', { teamId });
 }
 

@@ -33,6 +33,17 @@ export class OffersController {
     return this.offers.confirm(caller, ids);
   }
 
+  @Post('confirm/undo')
+  @HttpCode(200)
+  @Access('prices.edit')
+  @ApiOkResponse({ type: OfferListDto })
+  undoConfirmation(
+    @Caller() caller: CallerOfRequest,
+    @Body() { ids }: ConfirmOffersDto,
+  ): Promise<OfferListDto> {
+    return this.offers.takeBack(caller, ids);
+  }
+
   @Get('history')
   @Access('prices.read')
   @ApiOkResponse({ type: PriceHistoryDto })

@@ -1,14 +1,15 @@
 import { Injectable } from '@nestjs/common';
 import { dayOf } from '@roothertz/common/prices';
-import { type EntityManager, In } from 'typeorm';
+import type { EntityManager } from 'typeorm';
 import { AuditService } from '../audit/audit.service.js';
 import type { Caller } from '../shared/access/caller.js';
 import { readId } from '../shared/ids/read-id.js';
 import type { OfferListDto, OfferResponseDto } from './dto/offer-response.dto.js';
 import type { CreateOfferDto, UpdateOfferDto } from './dto/save-offers.dto.js';
-import { Offer } from './entities/offer.entity.js';
+import type { Offer } from './entities/offer.entity.js';
 import type { OfferRow } from './offer-drafts.js';
 import { type Fault, refuseFaults } from './offer-faults.js';
+import { noteConfirmation, restoreConfirmation } from './offer-confirmations.js';
 import { toOfferResponse } from './offer-response.js';
 import { closeOffers } from './offer-rows.js';
 import { OfferSaver } from './offer-saver.service.js';
@@ -61,7 +62,7 @@ export class OffersService {
       refuseFaults(expired(offers));
       const confirmedAt = new Date();
       const numbers = offers.map(({ id }) => id);
-      await manager.update(Offer, { id: In(numbers) }, { confirmedAt, confirmedById: caller.userId });
+      await noteConfirmation(manager, numbers, { confirmedAt, confirmedById: caller.userId });
       await this.audit.record(
         manager,
         caller,
@@ -70,6 +71,27 @@ export class OffersService {
           object: objectOf(offer),
           from: { confirmedAt: offer.confirmedAt },
           to: { confirmedAt },
+        })),
+      );
+      return this.answer(manager, caller, numbers);
+    });
+  }
+
+  /** Takes back the caller's own last confirmations: the ones before them hold again. */
+  takeBack(caller: Caller, ids: readonly string[]): Promise<OfferListDto> {
+    return this.changes.run(caller, async (manager) => {
+      const offers = await findOpen(manager, caller, [...new Set(ids)], (index) => `ids[${index}]`);
+      refuseFaults(confirmedOtherwise(offers, caller));
+      const numbers = offers.map(({ id }) => id);
+      await restoreConfirmation(manager, numbers);
+      await this.audit.record(
+        manager,
+        caller,
+        offers.map((offer) => ({
+          action: 'offer.confirmation-undone',
+          object: objectOf(offer),
+          from: { confirmedAt: offer.confirmedAt },
+          to: { confirmedAt: offer.earlierConfirmedAt },
         })),
       );
       return this.answer(manager, caller, numbers);
@@ -142,4 +164,19 @@ function expired(offers: readonly Offer[]): Fault[] {
     const message = `it ended on ${validUntil}: give it another end first`;
     return [{ code: 'offer.invalid', field: `ids[${index}]`, message }];
   });
+}
+
+/** What was confirmed by somebody else since, or whose confirmation has been taken back already. */
+function confirmedOtherwise(offers: readonly Offer[], { userId }: Caller): Fault[] {
+  return offers.flatMap(({ earlierConfirmedAt, confirmedById }, index): Fault[] =>
+    earlierConfirmedAt !== null && confirmedById === userId
+      ? []
+      : [
+          {
+            code: 'offer.stale',
+            field: `ids[${index}]`,
+            message: 'its last confirmation isn’t one of yours',
+          },
+        ],
+  );
 }

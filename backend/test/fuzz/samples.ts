@@ -139,6 +139,7 @@ export const SAMPLES: Record<string, unknown[]> = {
   'put /api/prices/settings': [{ currency: 'EUR', staleAfterDays: 60 }],
   'post /api/offers': [{ ...offered, supplierNumber: 'BW-2' }],
   'post /api/offers/confirm': [{ ids: ['1'] }],
+  'post /api/offers/confirm/undo': [{ ids: ['1'] }],
   'patch /api/offers/{id}': [{ version: 1, currency: 'USD', breaks: offered.breaks, stock: 5 }],
   'post /api/noise/stage': [
     { conditions, amplifier },

@@ -3,6 +3,7 @@ export const AUDIT_ACTIONS = {
   'offer.opened': 'recorded the offer',
   'offer.changed': 'changed the offer',
   'offer.confirmed': 'confirmed the offer',
+  'offer.confirmation-undone': 'took back the confirmation of the offer',
   'offer.closed': 'withdrew the offer',
   'supplier.added': 'added the supplier',
   'rates.changed': 'set the exchange rate',

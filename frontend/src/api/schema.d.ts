@@ -308,6 +308,22 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/offers/confirm/undo": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["undoConfirmation"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/offers/history": {
         parameters: {
             query?: never;
@@ -770,7 +786,7 @@ export interface components {
         };
         AuditEntryResponseDto: {
             /** @enum {string} */
-            action: "offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked";
+            action: "offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked";
             /** Format: date-time */
             at: string;
             /** @description null where the account is gone. */
@@ -1182,6 +1198,7 @@ export interface components {
              * @description Since when these terms stand.
              */
             openedAt: string;
+            openedBy: components["schemas"]["MemberDto"] | null;
             orderMultiple: number;
             part: components["schemas"]["OfferedPartDto"];
             /** @description What calls for a look at it. */
@@ -2013,7 +2030,7 @@ export interface operations {
     listAuditEntries: {
         parameters: {
             query?: {
-                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
+                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
                 objectKind?: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
                 objectId?: string;
                 userId?: string;
@@ -2050,7 +2067,7 @@ export interface operations {
     exportAuditEntries: {
         parameters: {
             query?: {
-                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
+                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
                 objectKind?: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
                 objectId?: string;
                 userId?: string;
@@ -2709,6 +2726,38 @@ export interface operations {
         };
     };
     confirmOffers: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ConfirmOffersDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OfferListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    undoConfirmation: {
         parameters: {
             query?: never;
             header?: never;

@@ -8,6 +8,7 @@ import { CreateImports1796083300000 } from './1796083300000-CreateImports.js';
 import { CreateSubscriptions1796090300000 } from './1796090300000-CreateSubscriptions.js';
 import { NameAuditObjects1796090600000 } from './1796090600000-NameAuditObjects.js';
 import { AddPartsOfConditions1796090900000 } from './1796090900000-AddPartsOfConditions.js';
+import { KeepEarlierConfirmations1796090901000 } from './1796090901000-KeepEarlierConfirmations.js';
 
 /** All migrations; they run in the order of the time in their names. */
 export const MIGRATIONS = [
@@ -21,4 +22,5 @@ export const MIGRATIONS = [
   CreateSubscriptions1796090300000,
   NameAuditObjects1796090600000,
   AddPartsOfConditions1796090900000,
+  KeepEarlierConfirmations1796090901000,
 ];

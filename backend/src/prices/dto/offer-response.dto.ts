@@ -76,6 +76,9 @@ export class OfferResponseDto {
   @ApiProperty({ type: String, format: 'date-time', description: 'Since when these terms stand.' })
   openedAt: string;
 
+  @ApiProperty({ type: MemberDto, nullable: true })
+  openedBy: MemberDto | null;
+
   @ApiProperty({
     type: String,
     format: 'date-time',

@@ -80,6 +80,17 @@ export class Offer {
   @JoinColumn({ name: 'confirmed_by', foreignKeyConstraintName: 'offers_confirmed_by' })
   confirmedBy: Relation<User> | null;
 
+  /** The confirmation before the last one, which takes its place again when that is taken back. */
+  @Column({ name: 'earlier_confirmed_at', type: 'datetime', precision: 3, nullable: true })
+  earlierConfirmedAt: Date | null;
+
+  @Column({ name: 'earlier_confirmed_by', type: 'int', unsigned: true, nullable: true })
+  earlierConfirmedById: number | null;
+
+  @ManyToOne(() => User, { onDelete: 'SET NULL' })
+  @JoinColumn({ name: 'earlier_confirmed_by', foreignKeyConstraintName: 'offers_earlier_confirmed_by' })
+  earlierConfirmedBy: Relation<User> | null;
+
   /** Goes up by one from each state of the offer to the next. */
   @Column({ type: 'int', unsigned: true, default: 1 })
   version: number;
