@@ -20,6 +20,7 @@ const BACKEND_FEATURES = [
   'imports',
   'plans',
   'billing',
+  'mail',
 ];
 const FRONTEND_FEATURES = ['session', 'parts', 'ranking', 'conditions', 'imports', 'prices'];
 
@@ -93,6 +94,16 @@ export default tseslint.config(
       'no-restricted-properties': [
         'error',
         { object: 'process', property: 'env', message: 'Only backend/src/config reads the environment.' },
+      ],
+    },
+  },
+  {
+    files: ['backend/src/**/*.ts'],
+    ignores: ['backend/src/mail/**'],
+    rules: {
+      '@typescript-eslint/no-restricted-imports': [
+        'error',
+        { paths: [{ name: 'nodemailer', message: 'E-mail goes out through MailQueue.' }] },
       ],
     },
   },

@@ -1,6 +1,7 @@
 import { prepareDatabase, readAddress, refuseTakenPort, serve } from './application.mjs';
 import { buildStale } from './builds.mjs';
 import { readCredentials } from './credentials.mjs';
+import { startMailCatcher } from './mail-catcher.mjs';
 import { createDatabase, ensureMariadbInstalled, startMariadb } from './mariadb.mjs';
 import { endOrphans } from './orphans.mjs';
 import { ensurePackages, refuseOldNode } from './packages.mjs';
@@ -20,9 +21,10 @@ await supervise(async () => {
   const environment = { JWT_SECRET: readCredentials().jwtSecret, ...process.env, ...(await database()) };
   await buildStale(['common', 'backend', 'frontend']);
   await prepareDatabase(environment);
-  const { ended } = await serve(address, environment);
+  const mail = await mailCatcher();
+  const { ended } = await serve(address, { ...environment, ...mail?.environment });
   expectStop();
-  welcome(address);
+  welcome(address, mail);
   const { code } = await ended;
   refuseWhenEnding();
   say(`The server ended with code ${code}.`);
@@ -40,8 +42,16 @@ async function database() {
   return server.environment(DATABASE);
 }
 
-function welcome({ url }) {
+/** Not in production, nor where SMTP_HOST names a mail server. */
+async function mailCatcher() {
+  const { NODE_ENV, SMTP_HOST } = process.env;
+  if (NODE_ENV === 'production' || SMTP_HOST) return undefined;
+  return startMailCatcher({ name: 'mail', preferredPorts: { smtp: 33_025, web: 33_080 } });
+}
+
+function welcome({ url }, mail) {
   say(`\nRoothertz is ready: ${url}  (Ctrl-C stops it)`);
+  if (mail) say(`E-mails that it sends are caught and shown at ${mail.url}`);
   if (process.env.NODE_ENV === 'production') return;
   say('Demo accounts, all with the password quiet-bench-2026:');
   for (const role of DEMO_ROLES) say(`  ${role}@tarnfield.example`);

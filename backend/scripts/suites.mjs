@@ -1,6 +1,7 @@
 import { mkdirSync, rmSync } from 'node:fs';
 import { prepareDatabase, readAddress, serve } from './application.mjs';
 import { buildStale } from './builds.mjs';
+import { startMailCatcher } from './mail-catcher.mjs';
 import { createDatabase } from './mariadb.mjs';
 import { inLocal, inRoot } from './paths.mjs';
 import { freePort } from './ports.mjs';
@@ -9,6 +10,7 @@ import { forget, readJson, remember } from './records.mjs';
 import { countResults } from './results.mjs';
 
 const PREFERRED_E2E_PORT = 33_320;
+const PREFERRED_MAIL_PORTS = { smtp: 33_026, web: 33_081 };
 
 /** Each suite answers how many of its tests passed and failed. */
 export const SUITES = {
@@ -36,8 +38,14 @@ async function runJourneys({ server, chromium, environment }) {
   const env = { ...environment, ...server.environment('roothertz_e2e') };
   await prepareDatabase(env);
   const address = readAddress({ PORT: String(await freePort(PREFERRED_E2E_PORT)) });
-  await serve(address, env);
-  const browser = { ...environment, E2E_BASE_URL: address.url, CHROMIUM_PATH: chromium };
+  const mail = await startMailCatcher({ name: 'mail-test', preferredPorts: PREFERRED_MAIL_PORTS });
+  await serve(address, { ...env, ...mail.environment });
+  const browser = {
+    ...environment,
+    E2E_BASE_URL: address.url,
+    E2E_MAIL_URL: mail.url,
+    CHROMIUM_PATH: chromium,
+  };
   return runVitest('frontend', ['--config', 'e2e/vitest.config.ts'], browser, 'e2e');
 }
 

@@ -1,5 +1,6 @@
 import { Module } from '@nestjs/common';
 import { APP_GUARD } from '@nestjs/core';
+import { ScheduleModule } from '@nestjs/schedule';
 import { ThrottlerModule } from '@nestjs/throttler';
 import { AuditModule } from './audit/audit.module.js';
 import { AuthModule } from './auth/auth.module.js';
@@ -9,6 +10,7 @@ import { ConfigModule } from './config/config.module.js';
 import { DatabaseModule } from './database/database.module.js';
 import { HealthModule } from './health/health.module.js';
 import { ImportsModule } from './imports/imports.module.js';
+import { MailModule } from './mail/mail.module.js';
 import { PartsModule } from './parts/parts.module.js';
 import { PricesModule } from './prices/prices.module.js';
 import { RankingModule } from './ranking/ranking.module.js';
@@ -21,12 +23,14 @@ const REQUESTS_A_MINUTE = 600;
   imports: [
     ConfigModule,
     DatabaseModule,
+    ScheduleModule.forRoot(),
     ThrottlerModule.forRoot([{ ttl: 60_000, limit: REQUESTS_A_MINUTE }]),
     AuditModule,
     AuthModule,
     ConditionsModule,
     HealthModule,
     ImportsModule,
+    MailModule,
     PartsModule,
     PricesModule,
     RankingModule,

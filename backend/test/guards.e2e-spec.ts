@@ -11,6 +11,15 @@ interface Route {
   action?: string;
 }
 
+const OPEN_ROUTES = ['getHealth', 'getUnsubscription', 'signIn', 'signOut', 'unsubscribe'];
+const OPEN_ADDRESSES = [
+  'post /api/auth/sign-in',
+  'post /api/auth/sign-out',
+  'get /api/health',
+  'get /api/mail/unsubscribe/:token',
+  'post /api/mail/unsubscribe/:token',
+];
+
 describe('guards', () => {
   let app: TestApp;
 
@@ -25,14 +34,13 @@ describe('guards', () => {
     expect(routes.filter(({ isPublic, action }) => isPublic === (action !== undefined))).toEqual([]);
   });
 
-  it('opens nothing to the public but signing in and out and the health', () => {
+  it('opens nothing to the public but the ways into an account, links in e-mails and the health', () => {
     const open = routesOf(app).filter(({ isPublic }) => isPublic);
-    expect(open.map(({ name }) => name).sort()).toEqual(['getHealth', 'signIn', 'signOut']);
+    expect(open.map(({ name }) => name).sort()).toEqual(OPEN_ROUTES);
   });
 
   it('asks for a session at every other address', async () => {
-    const open = ['post /api/auth/sign-in', 'post /api/auth/sign-out', 'get /api/health'];
-    const closed = addressesOf(app).filter((address) => !open.includes(address));
+    const closed = addressesOf(app).filter((address) => !OPEN_ADDRESSES.includes(address));
     expect(closed.length).toBeGreaterThan(5);
     const statuses = await Promise.all(
       closed.map(async (address) => [address, await statusOf(app, address)]),

@@ -17,6 +17,8 @@ import {
 const HOPS_OR_NETWORKS =
   /^(\d{1,2}|[\da-f.:/]+|loopback|linklocal|uniquelocal)(, ?([\da-f.:/]+|loopback|linklocal|uniquelocal))*$/i;
 
+const MAILBOX = /^([^<>"\r\n]+ <[^\s<>@]+@[^\s<>@]+>|[^\s<>@]+@[^\s<>@]+)$/;
+
 /** Everything that the environment may say: each property is named as its variable. */
 export class AppConfig {
   @IsIn(['development', 'test', 'production'])
@@ -31,8 +33,8 @@ export class AppConfig {
   @IsInt()
   PORT = 3000;
 
-  /** The address that people open, such as https://noise.example.org; left out = the request's own host. */
-  @IsOptional()
+  /** The address that people open, such as https://noise.example.org; never left out in production: links in e-mails need it. */
+  @ValidateIf(isProductionOrGiven('PUBLIC_ORIGIN'))
   @IsUrl({ require_tld: false, require_protocol: true, protocols: ['http', 'https'] })
   @Transform(({ value }) => originOf(value))
   PUBLIC_ORIGIN?: string;
@@ -84,13 +86,50 @@ export class AppConfig {
   @IsNotEmpty()
   IMPORT_DIR?: string;
 
+  /** Where e-mails are handed over; left out = they stay in the outbox, and never left out in production. */
+  @ValidateIf(isProductionOrGiven('SMTP_HOST'))
+  @IsNotEmpty()
+  SMTP_HOST?: string;
+
+  @Type(() => Number)
+  @Max(65535)
+  @Min(1)
+  @IsInt()
+  SMTP_PORT = 587;
+
+  @IsOptional()
+  @IsNotEmpty()
+  SMTP_USER?: string;
+
+  @IsOptional()
+  @IsNotEmpty()
+  SMTP_PASSWORD?: string;
+
+  /** `true` = TLS from the first byte, as on port 465; otherwise it begins when the server offers it. */
+  @IsIn(['true', 'false'])
+  SMTP_SECURE: 'true' | 'false' = 'false';
+
+  /** Whom e-mails come from, such as `Roothertz <noise@example.org>`; never left out in production. */
+  @Matches(MAILBOX)
+  MAIL_FROM: string;
+
   get isProduction(): boolean {
     return isProduction(this);
+  }
+
+  /** What the links in e-mails begin with. */
+  get origin(): string {
+    const host = ['0.0.0.0', '::'].includes(this.HOST) ? 'localhost' : this.HOST;
+    return this.PUBLIC_ORIGIN ?? `http://${host.includes(':') ? `[${host}]` : host}:${this.PORT}`;
   }
 }
 
 function isProduction({ NODE_ENV }: AppConfig): boolean {
   return NODE_ENV === 'production';
+}
+
+function isProductionOrGiven(name: keyof AppConfig) {
+  return (config: AppConfig) => isProduction(config) || config[name] !== undefined;
 }
 
 function originOf(value: unknown): unknown {

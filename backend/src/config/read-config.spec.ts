@@ -4,6 +4,9 @@ const production = {
   NODE_ENV: 'production',
   JWT_SECRET: 'a-secret-of-more-than-thirty-two-letters',
   DB_PASSWORD: 'not-empty',
+  PUBLIC_ORIGIN: 'https://noise.example.org',
+  SMTP_HOST: 'mail.example.org',
+  MAIL_FROM: 'Roothertz <noise@example.org>',
 };
 
 describe('readConfig', () => {
@@ -21,13 +24,16 @@ describe('readConfig', () => {
     expect(config).toMatchObject({ PORT: 8080, PUBLIC_ORIGIN: 'https://noise.example.org' });
   });
 
-  it('starts in production with a secret and a password', () => {
+  it('starts in production with secrets, an address and a mail server', () => {
     expect(readConfig(production).isProduction).toBe(true);
   });
 
-  it.each(['JWT_SECRET', 'DB_PASSWORD'] as const)('refuses production without %s', (name) => {
-    expect(() => readConfig({ ...production, [name]: undefined })).toThrow(name);
-  });
+  it.each(['JWT_SECRET', 'DB_PASSWORD', 'PUBLIC_ORIGIN', 'SMTP_HOST', 'MAIL_FROM'] as const)(
+    'refuses production without %s',
+    (name) => {
+      expect(() => readConfig({ ...production, [name]: undefined })).toThrow(name);
+    },
+  );
 
   it('signs sessions with another secret at every start where none is given', () => {
     expect(readConfig({}).JWT_SECRET).not.toBe(readConfig({}).JWT_SECRET);
@@ -42,6 +48,9 @@ describe('readConfig', () => {
     ['PUBLIC_ORIGIN', 'noise.example.org'],
     ['TRUST_PROXY', 'everyone'],
     ['JWT_SECRET', 'short'],
+    ['SMTP_PORT', '99999'],
+    ['SMTP_SECURE', 'perhaps'],
+    ['MAIL_FROM', 'nobody'],
   ])('names %s and hides its value %s when it is wrong', (name, value) => {
     const message = messageOf(() => readConfig({ [name]: value }));
     expect(message).toContain(name);

@@ -19,6 +19,12 @@ const NAMES = [
   'JWT_SECRET',
   'FRONTEND_DIST',
   'IMPORT_DIR',
+  'SMTP_HOST',
+  'SMTP_PORT',
+  'SMTP_USER',
+  'SMTP_PASSWORD',
+  'SMTP_SECURE',
+  'MAIL_FROM',
 ] as const satisfies readonly (keyof AppConfig)[];
 
 /**
@@ -28,7 +34,10 @@ const NAMES = [
 export function readConfig(environment: NodeJS.ProcessEnv = process.env): AppConfig {
   const given = NAMES.filter((name) => environment[name]).map((name) => [name, environment[name]]);
   const config = plainToInstance(AppConfig, Object.fromEntries(given));
-  if (!config.isProduction) config.JWT_SECRET ??= randomBytes(32).toString('base64url');
+  if (!config.isProduction) {
+    config.JWT_SECRET ??= randomBytes(32).toString('base64url');
+    config.MAIL_FROM ??= 'Roothertz <no-reply@roothertz.example>';
+  }
   const wrong = validateSync(config).map(({ property, constraints }) => {
     return `${property} (${Object.values(constraints ?? {})
       .map(withoutValue)

@@ -9,6 +9,8 @@ import { OpAmp } from '../library/entities/op-amp.entity.js';
 import { Part } from '../library/entities/part.entity.js';
 import { Resistor } from '../library/entities/resistor.entity.js';
 import { Subscription } from '../plans/entities/subscription.entity.js';
+import { OutboxMail } from '../mail/entities/outbox-mail.entity.js';
+import { RefusedMail } from '../mail/entities/refused-mail.entity.js';
 import { ExchangeRate } from '../prices/entities/exchange-rate.entity.js';
 import { Offer } from '../prices/entities/offer.entity.js';
 import { OfferBreak } from '../prices/entities/offer-break.entity.js';
@@ -39,4 +41,6 @@ export const ENTITIES = [
   Import,
   ImportPortion,
   ImportProgress,
+  OutboxMail,
+  RefusedMail,
 ];

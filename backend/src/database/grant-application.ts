@@ -1,5 +1,5 @@
 import { createConnection } from 'mysql2/promise';
-import type { QueryRunner } from 'typeorm';
+import type { DataSource } from 'typeorm';
 import type { AppConfig } from '../config/app-config.js';
 
 const ALL = 'SELECT, INSERT, UPDATE, DELETE';
@@ -12,15 +12,15 @@ const RIGHTS: Readonly<Record<string, string | null>> = {
 };
 
 /** Gives the application's account what it needs on each table, as the owner of all of them. */
-export async function grantApplication(runner: QueryRunner, config: AppConfig): Promise<void> {
+export async function grantApplication(dataSource: DataSource, config: AppConfig): Promise<void> {
   const account = await accountOf(config);
-  const tables: { name: string }[] = await runner.query(
+  const tables: { name: string }[] = await dataSource.query(
     `SELECT table_name AS name FROM information_schema.tables WHERE table_schema = DATABASE()`,
   );
   for (const { name } of tables) {
     const rights = name in RIGHTS ? RIGHTS[name] : ALL;
     if (rights !== null)
-      await runner.query(`GRANT ${rights} ON \`${config.DB_NAME}\`.\`${name}\` TO ${account}`);
+      await dataSource.query(`GRANT ${rights} ON \`${config.DB_NAME}\`.\`${name}\` TO ${account}`);
   }
 }
 

@@ -134,6 +134,8 @@ export const SAMPLES: Record<string, unknown[]> = {
     },
   ],
   'post /api/suppliers': [{ name: 'Brook & Weir' }],
+  'post /api/mail/unsubscribe/{token}': [{}],
+  'put /api/mail/preferences': [{ kind: 'price-digest', wanted: false }],
   'put /api/prices': [{ rows: [{ ...offered, supplierNumber: 'BW-1' }] }],
   'put /api/prices/rates': [{ dated: '2026-03-01', rates: [{ currency: 'USD', rate: '0.9' }] }],
   'put /api/prices/settings': [{ currency: 'EUR', staleAfterDays: 60 }],

@@ -260,6 +260,38 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/mail/preferences": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["listMailPreferences"];
+        put: operations["changeMailPreference"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/mail/unsubscribe/{token}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["getUnsubscription"];
+        put?: never;
+        post: operations["unsubscribe"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/noise/stage": {
         parameters: {
             query?: never;
@@ -823,6 +855,11 @@ export interface components {
             /** @description Decimal number with four decimals. */
             unitPrice: string;
         };
+        ChangeMailPreferenceDto: {
+            /** @enum {string} */
+            kind: "price-digest" | "part-notice";
+            wanted: boolean;
+        };
         ChangeStandingsDto: {
             parts: components["schemas"]["StandingChangeDto"][];
         };
@@ -975,7 +1012,7 @@ export interface components {
             message: string;
         };
         /** @enum {string} */
-        ErrorCode: "request.invalid" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "access.seats" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "import.not-found" | "part.stale" | "part.duplicate" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "import.state" | "import.outdated" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "database.unavailable";
+        ErrorCode: "request.invalid" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "access.seats" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "import.not-found" | "mail.unknown-link" | "part.stale" | "part.duplicate" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "import.state" | "import.outdated" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "database.unavailable";
         EvaluateStageDto: {
             amplifier: components["schemas"]["AmplifierDto"];
             conditions: components["schemas"]["OperatingConditionsDto"];
@@ -1132,6 +1169,16 @@ export interface components {
             undoneAt: string | null;
             undoneBy: components["schemas"]["MemberDto"] | null;
         };
+        MailPreferenceDto: {
+            /** @enum {string} */
+            kind: "price-digest" | "part-notice";
+            /** @description What the notices are about. */
+            label: string;
+            wanted: boolean;
+        };
+        MailPreferencesDto: {
+            items: components["schemas"]["MailPreferenceDto"][];
+        };
         MapImportDto: {
             columns?: components["schemas"]["ColumnMappingDto"][];
             /** @enum {string} */
@@ -1170,6 +1217,12 @@ export interface components {
             partNumber: string;
             /** @description In Ω. */
             resistance: number;
+        };
+        NoticeDto: {
+            /** @enum {string} */
+            kind: "price-digest" | "part-notice";
+            /** @description What the notices are about. */
+            label: string;
         };
         OfferListDto: {
             items: components["schemas"]["OfferResponseDto"][];
@@ -2648,6 +2701,126 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["ImportResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    listMailPreferences: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MailPreferencesDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    changeMailPreference: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChangeMailPreferenceDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MailPreferencesDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    getUnsubscription: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["NoticeDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    unsubscribe: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["NoticeDto"];
                 };
             };
             /** @description Problem details (RFC 9457) */

@@ -5,6 +5,7 @@ import { CreateResistors1767300000000 } from './1767300000000-CreateResistors.js
 import { CreateAuditEntries1796083100000 } from './1796083100000-CreateAuditEntries.js';
 import { CreatePrices1796083200000 } from './1796083200000-CreatePrices.js';
 import { CreateImports1796083300000 } from './1796083300000-CreateImports.js';
+import { CreateMail1796090100000 } from './1796090100000-CreateMail.js';
 import { CreateSubscriptions1796090300000 } from './1796090300000-CreateSubscriptions.js';
 import { NameAuditObjects1796090600000 } from './1796090600000-NameAuditObjects.js';
 import { AddPartsOfConditions1796090900000 } from './1796090900000-AddPartsOfConditions.js';
@@ -19,6 +20,7 @@ export const MIGRATIONS = [
   CreateAuditEntries1796083100000,
   CreatePrices1796083200000,
   CreateImports1796083300000,
+  CreateMail1796090100000,
   CreateSubscriptions1796090300000,
   NameAuditObjects1796090600000,
   AddPartsOfConditions1796090900000,

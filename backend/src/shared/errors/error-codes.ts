@@ -18,6 +18,7 @@ export const ERROR_CODES = {
   'supplier.not-found': { status: 404, title: 'Supplier not found' },
   'offer.not-found': { status: 404, title: 'Offer not found' },
   'import.not-found': { status: 404, title: 'Import not found' },
+  'mail.unknown-link': { status: 404, title: 'Unknown link' },
   'part.stale': { status: 409, title: 'Part changed meanwhile' },
   'part.duplicate': { status: 409, title: 'Part exists already' },
   'conditions.stale': { status: 409, title: 'Conditions changed meanwhile' },
