@@ -17,16 +17,26 @@ const CONDITIONS = {
   amplifierTemperatureModel: 'none',
 };
 
+/** Every tenth op-amp and every seventh resistor is without a price. */
+const PRICES = {
+  quantity: 100,
+  opAmp: ({ row }, pieces) => (row % 10 === 9 ? NaN : (3000 + ((row * 7919) % 80_000)) * pieces),
+  resistor: (index, pieces) => (index % 7 === 6 ? NaN : (20 + ((index * 104_729) % 3000)) * pieces),
+};
+
 /**
- * Ranks whole stages by the pruned search and by trying every pair of resistors with every amplifier, on the same
- * library; answers how many stages each evaluated and how long it took, in ms.
+ * Ranks whole stages by the pruned search, by noise and by price with its frontier, and by trying every pair of
+ * resistors with every amplifier, on the same library; answers how many stages each evaluated and how long it
+ * took, in ms.
  */
 export async function compareStages(columns) {
   const noise = await import('@roothertz/common/noise');
   const library = amplifierLibrary(noise, columns);
   const resistors = await resistorLibrary();
-  const pruned = timed(() =>
-    noise.rankStages({ conditions: CONDITIONS, filter: {}, limit: 50, offset: 0 }, [library], resistors),
+  const page = { conditions: CONDITIONS, filter: {}, within: 1, limit: 50, offset: 0 };
+  const pruned = timed(() => noise.rankStages({ ...page, sort: 'inputNoiseRms' }, [library], resistors));
+  const priced = timed(() =>
+    noise.rankStages({ ...page, sort: 'unitPrice', prices: PRICES }, [library], resistors),
   );
   const exhaustive = timed(() => tryAll(noise, library, resistors));
   const quietest = pruned.result.items[0].figures.inputNoiseRms;
@@ -35,6 +45,8 @@ export async function compareStages(columns) {
     evaluations: pruned.result.evaluations.made,
     exhaustiveEvaluations: exhaustive.result.evaluations,
     time: pruned.time,
+    pricedEvaluations: priced.result.evaluations.made,
+    pricedTime: priced.time,
     exhaustiveTime: exhaustive.time,
   };
 }

@@ -151,9 +151,11 @@ function reportImports({ rows, imported, loaded, peakMiB }) {
   return { importOverLoadData: Number((imported / loaded).toFixed(3)), importServerPeakMiB: peakMiB };
 }
 
-function reportStages({ evaluations, exhaustiveEvaluations, time, exhaustiveTime }) {
+function reportStages(compared) {
+  const { evaluations, exhaustiveEvaluations, time, exhaustiveTime } = compared;
   say('\n300 op-amps × 4000 resistors, whole stages:');
   say(`pruned: ${evaluations} stages evaluated in ${time.toFixed(0)} ms`);
+  say(`by price: ${compared.pricedEvaluations} evaluated in ${compared.pricedTime.toFixed(0)} ms`);
   say(`exhaustive: ${exhaustiveEvaluations} stages evaluated in ${exhaustiveTime.toFixed(0)} ms\n`);
   return {
     stagesEvaluationsOverExhaustive: rounded(evaluations / exhaustiveEvaluations),

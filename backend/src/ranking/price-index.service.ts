@@ -15,6 +15,11 @@ export class PriceIndex {
 
   /** What the parts cost the caller's team today. */
   async at(caller: Caller, quantity: number): Promise<QuantityPrices> {
-    return new QuantityPrices(await this.cache.contentOf(await this.books.teamOf(caller)), quantity);
+    return new QuantityPrices(await this.of(caller), quantity);
+  }
+
+  /** The prices of the caller's team, for more than one quantity. */
+  async of(caller: Caller): Promise<PriceBook> {
+    return this.cache.contentOf(await this.books.teamOf(caller));
   }
 }

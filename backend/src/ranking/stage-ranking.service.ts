@@ -1,34 +1,28 @@
 import {
   checkStageSearch,
-  type Network,
-  type RankedStage,
   rankStages,
   resistorFilterExclusion,
   type SoughtConditions,
+  type StageRanking,
 } from '@roothertz/common/noise';
 import { Injectable } from '@nestjs/common';
 import { LibraryService } from '../library/library.service.js';
 import type { ListedResistor } from '../library/listed-resistors.js';
-import type { OpAmpPart } from '@roothertz/common/parts';
-import type { PartRecord } from '../library/part-record.js';
 import type { Caller } from '../shared/access/caller.js';
 import { refuseConditions, toPartFilter, toPlainConditions } from '../shared/conditions/ranking-request.js';
 import type { RankStagesDto } from './dto/rank-stages.dto.js';
-import type {
-  NetworkPartDto,
-  RankedNetworkDto,
-  RankedStageDto,
-  StageRankingDto,
-} from './dto/stage-ranking.dto.js';
-import { type IndexedLibrary, LibraryIndex, revisionOf } from './library-index.service.js';
-import { toPartName } from './part-name-at.js';
-import { countReasons } from './ranking-response.js';
+import type { StageRankingDto } from './dto/stage-ranking.dto.js';
+import { type IndexedLibrary, LibraryIndex } from './library-index.service.js';
+import { PriceIndex } from './price-index.service.js';
+import { StagePricing } from './stage-pricing.js';
+import { toStageRanking } from './stage-response.js';
 
 @Injectable()
 export class StageRankingService {
   constructor(
     private readonly index: LibraryIndex,
     private readonly library: LibraryService,
+    private readonly prices: PriceIndex,
   ) {}
 
   async rank(caller: Caller, dto: RankStagesDto): Promise<StageRankingDto> {
@@ -38,21 +32,23 @@ export class StageRankingService {
     const libraries = await this.index.opAmpsReadableBy(caller, filter);
     refuseMany(libraries, conditions);
     const resistors = await this.usableResistors(caller, dto);
-    const { limit, offset } = dto;
-    const columns = libraries.map((library) => library.columns);
-    const ranking = rankStages({ conditions, filter, limit, offset }, columns, resistors);
-    const idOf = ({ library, row }: RankedStage) => libraries[library].ids[row];
-    const records = await this.library.findOpAmps(caller, ranking.items.map(idOf));
-    const byId = new Map(records.map((record) => [record.id, record]));
-    return {
-      ...ranking,
-      excluded: countReasons(ranking.excluded),
-      libraryRevision: revisionOf(libraries),
-      items: ranking.items.flatMap((stage) => {
-        const record = byId.get(idOf(stage));
-        return record === undefined ? [] : [toRankedStage(stage, record, resistors)];
-      }),
-    };
+    const pricing = new StagePricing(await this.prices.of(caller), dto.quantity, libraries, resistors);
+    const { sort, within, limit, offset } = dto;
+    const ranking = rankStages(
+      { conditions, filter, sort, within, limit, offset, prices: pricing.ofParts() },
+      libraries.map(({ columns }) => columns),
+      resistors,
+    );
+    const { topology } = conditions.stage;
+    const records = await this.recordsOf(caller, ranking, libraries);
+    return toStageRanking(ranking, { topology, libraries, resistors, records, pricing });
+  }
+
+  private async recordsOf(caller: Caller, ranking: StageRanking, libraries: readonly IndexedLibrary[]) {
+    const stages = [...ranking.items, ...ranking.frontier];
+    const ids = new Set(stages.map(({ library, row }) => libraries[library].ids[row]));
+    const records = await this.library.findOpAmps(caller, [...ids]);
+    return new Map(records.map((record) => [record.id, record]));
   }
 
   private async usableResistors(
@@ -79,23 +75,4 @@ function refuseMany(libraries: readonly IndexedLibrary[], { stage }: SoughtCondi
   if (candidates <= MOST_CANDIDATES) return;
   const message = `at most ${MOST_CANDIDATES} op-amps, counted for each number of channels, can be searched: choose one library or fewer channels in parallel`;
   refuseConditions([{ field: 'filter.library', message }]);
-}
-
-function toRankedStage(
-  { rank, channelsInParallel, network, figures }: RankedStage,
-  record: PartRecord<OpAmpPart>,
-  resistors: readonly ListedResistor[],
-): RankedStageDto {
-  const { amplifier, origins } = record;
-  const part = { ...toPartName(record), amplifier, origins };
-  return { rank, part, channelsInParallel, network: toNetwork(network, resistors), ...figures };
-}
-
-function toNetwork(
-  { gain, gainResistor, feedbackResistor }: Network,
-  resistors: readonly ListedResistor[],
-): RankedNetworkDto {
-  const partOf = (index: number | null): NetworkPartDto | null =>
-    index === null ? null : { ...toPartName(resistors[index]), resistance: resistors[index].resistance };
-  return { gain, gainResistor: partOf(gainResistor), feedbackResistor: partOf(feedbackResistor) };
 }

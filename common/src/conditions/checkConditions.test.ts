@@ -228,7 +228,7 @@ describe('checkConditions', () => {
     const { label, bounds } = definition;
     const outOfBounds = { field, message: `${label}: ${describeBounds(definition)} was expected` };
 
-    it.each([1e300, -1, -1e300])('refuses %d', (value) => {
+    it.each([1e300, (bounds.from ?? 0) - 1, -1e300])('refuses %d', (value) => {
       expect(checkConditions(withValue(field, value))).toEqual([outOfBounds]);
     });
 

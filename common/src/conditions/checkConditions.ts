@@ -3,15 +3,21 @@ import { checkBandLimits, checkFields } from './checkFields.js';
 import { CONDITION_FIELDS, type ConditionFieldPath } from './conditionFields.js';
 import type { RankingRequest, StageConditions, Topology } from './conditions.js';
 
+/** What any stage with a network of R_g and R_f may state of it. */
+const NETWORK_FIELDS = ['outputVoltage', 'gainNoiseIndex', 'feedbackNoiseIndex', 'network'] as const;
+
 /** The stage's fields that each topology has, and which of them it can't do without. */
 export const STAGE_FIELDS = {
-  'non-inverting': { required: ['gain'], optional: ['gainResistance', 'loadResistance', 'network'] },
-  inverting: { required: ['gain', 'gainResistance'], optional: ['biasResistance', 'network'] },
-  transimpedance: { required: ['feedbackResistance'], optional: ['feedbackCapacitance', 'network'] },
-  difference: { required: ['gain', 'gainResistance'], optional: ['network'] },
+  'non-inverting': { required: ['gain'], optional: ['gainResistance', 'loadResistance', ...NETWORK_FIELDS] },
+  inverting: { required: ['gain', 'gainResistance'], optional: ['biasResistance', ...NETWORK_FIELDS] },
+  transimpedance: {
+    required: ['feedbackResistance'],
+    optional: ['feedbackCapacitance', 'outputVoltage', 'feedbackNoiseIndex', 'network'],
+  },
+  difference: { required: ['gain', 'gainResistance'], optional: NETWORK_FIELDS },
   instrumentation: {
     required: ['gain'],
-    optional: ['gainResistance', 'loadResistance', 'differenceResistance', 'network'],
+    optional: ['gainResistance', 'loadResistance', 'differenceResistance', ...NETWORK_FIELDS],
   },
 } as const satisfies Record<
   Topology,

@@ -114,6 +114,26 @@ export const CONDITION_FIELDS = {
     bounds: { from: 0, least: 1e-18, to: 1 },
     help: 'Across the feedback resistor; “auto” = maximally flat for each amplifier.',
   },
+  'conditions.stage.outputVoltage': {
+    label: 'direct output voltage',
+    kind: 'voltage',
+    bounds: { from: -1e4, to: 1e4 },
+    help: 'It drives a direct current through the network, and so its excess noise; left out = none.',
+  },
+  'conditions.stage.gainNoiseIndex': {
+    label: 'noise index of the gain resistors',
+    symbol: 'NI_g',
+    kind: 'decibel',
+    bounds: { from: -100, to: 100 },
+    help: 'Excess noise of R_g (IEC 60195): 0 dB = 1 µV per volt in one decade; left out = none.',
+  },
+  'conditions.stage.feedbackNoiseIndex': {
+    label: 'noise index of the feedback resistors',
+    symbol: 'NI_f',
+    kind: 'decibel',
+    bounds: { from: -100, to: 100 },
+    help: 'Excess noise of R_f (IEC 60195): 0 dB = 1 µV per volt in one decade; left out = none.',
+  },
   'conditions.stage.network.minimumTotal': {
     label: 'output drives at least',
     kind: 'resistance',

@@ -1,9 +1,12 @@
+/** What entries are handed out by: the first number, where that is equal the second. */
+export type Key = readonly [number, number];
+
 /** Hands out entries in ascending order of their keys, equal keys in the order in which they were added. */
 export class PriorityQueue<Entry> {
-  private readonly heap: { key: number; turn: number; entry: Entry }[] = [];
+  private readonly heap: { key: Key; turn: number; entry: Entry }[] = [];
   private turns = 0;
 
-  add(key: number, entry: Entry): void {
+  add(key: Key, entry: Entry): void {
     this.heap.push({ key, turn: this.turns++, entry });
     let child = this.heap.length - 1;
     while (child > 0) {
@@ -35,10 +38,16 @@ export class PriorityQueue<Entry> {
 
   private isBefore(a: number, b: number): boolean {
     const [one, other] = [this.heap[a], this.heap[b]];
-    return one.key < other.key || (one.key === other.key && one.turn < other.turn);
+    return difference(one.key, other.key, one.turn - other.turn) < 0;
   }
 
   private swap(a: number, b: number): void {
     [this.heap[a], this.heap[b]] = [this.heap[b], this.heap[a]];
   }
+}
+
+function difference(one: Key, other: Key, ofTurns: number): number {
+  if (one[0] !== other[0]) return one[0] < other[0] ? -1 : 1;
+  if (one[1] !== other[1]) return one[1] < other[1] ? -1 : 1;
+  return ofTurns;
 }

@@ -1213,10 +1213,17 @@ export interface components {
             /** @enum {string} */
             lifecycle: "active" | "not-recommended" | "last-time-buy" | "obsolete";
             manufacturer: string;
+            /** @description In dB (IEC 60195); null = unknown. */
+            noiseIndex: number | null;
             package: string;
             partNumber: string;
             /** @description In Ω. */
             resistance: number;
+            /**
+             * @description null = unknown
+             * @enum {string|null}
+             */
+            technology: "metal-foil" | "thin-film" | "metal-film" | "wirewound" | "thick-film" | "carbon-film" | "carbon-composition" | null;
         };
         NoticeDto: {
             /** @enum {string} */
@@ -1515,7 +1522,13 @@ export interface components {
             limit?: number;
             /** @description How many items come before the first one of the answer. */
             offset?: number;
+            /** @description Pieces to buy. */
+            quantity?: number;
             resistorFilter?: components["schemas"]["ResistorFilterDto"];
+            /** @enum {string} */
+            sort?: "inputNoiseRms" | "unitPrice";
+            /** @description How far above the quietest stage the noise of one sorted by price may lie. In dB. */
+            within?: number;
         };
         RankedNetworkDto: {
             /** @description null in a follower. */
@@ -1621,9 +1634,13 @@ export interface components {
             /** @description V, over the band. */
             outputNoiseRms: number;
             part: components["schemas"]["RankedPartDto"];
+            /** @description The parts of a stage that the price is made of. */
+            pieces: components["schemas"]["StagePieceDto"][];
             rank: number;
             /** @description V/V (V/A in a transimpedance stage), at the reference frequency. */
             signalGain: number;
+            /** @description Of op-amps and found resistors; null where one of them is without a price. */
+            unitPrice: components["schemas"]["StagePriceDto"] | null;
         };
         RankingResponseDto: {
             /** @description The cheapest part of the quiet set; null where none of it has a price. */
@@ -1901,7 +1918,7 @@ export interface components {
             /** @description From the + input to ground: damping, termination or bias return; left out = none. In Ω. */
             loadResistance?: number;
             network?: components["schemas"]["NetworkLimitsDto"];
-            /** @description It drives a direct current through the network, and so its excess noise. In V. */
+            /** @description It drives a direct current through the network, and so its excess noise; left out = none. In V. */
             outputVoltage?: number;
             /** @description Identical channels of one package that may work in parallel. */
             parallelMaximum?: number;
@@ -1933,15 +1950,21 @@ export interface components {
             differenceResistance?: number;
             /** @description Across the feedback resistor; “auto” = maximally flat for each amplifier. In F. */
             feedbackCapacitance?: number | "auto";
+            /** @description Excess noise of R_f (IEC 60195): 0 dB = 1 µV per volt in one decade; left out = none. In dB. */
+            feedbackNoiseIndex?: number;
             /** @description Gain of a transimpedance stage in V/A. In Ω. */
             feedbackResistance?: number;
             /** @description Magnitude of the signal gain. */
             gain?: number;
+            /** @description Excess noise of R_g (IEC 60195): 0 dB = 1 µV per volt in one decade; left out = none. In dB. */
+            gainNoiseIndex?: number;
             /** @description From the − input to ground, to the source in an inverting and in each leg of a difference stage, or between the − inputs of an instrumentation stage. In Ω. */
             gainResistance?: number;
             /** @description From the + input to ground: damping, termination or bias return; left out = none. In Ω. */
             loadResistance?: number;
             network?: components["schemas"]["NetworkDto"];
+            /** @description It drives a direct current through the network, and so its excess noise; left out = none. In V. */
+            outputVoltage?: number;
             /** @enum {string} */
             topology: "non-inverting" | "inverting" | "transimpedance" | "difference" | "instrumentation";
         };
@@ -1965,10 +1988,30 @@ export interface components {
             /** @description V/V (V/A in a transimpedance stage), at the reference frequency. */
             signalGain: number;
         };
+        StagePieceDto: {
+            /** @description In one stage. */
+            pieces: number;
+            /** @description Where the part stands: one part may be both gain and feedback resistor. */
+            places: ("op-amp" | "gain" | "feedback")[];
+            /** @description At the pieces of all stages; null where the team has no price. */
+            unitPrice: components["schemas"]["PriceDto"] | null;
+        };
+        StagePriceDto: {
+            /** @description Decimal number: the total over the stages that are wanted. */
+            amount: string;
+            /** @description The team’s currency (ISO 4217). */
+            currency: string;
+            /** @description Nobody has confirmed one of the prices for longer than the team allows. */
+            isStale: boolean;
+            /** @description Decimal number: what the pieces of all stages cost. */
+            total: string;
+        };
         StageRankingDto: {
             evaluations: components["schemas"]["EvaluationsDto"];
             excluded: components["schemas"]["ExcludedDto"];
             floor: components["schemas"]["SourceFloorDto"];
+            /** @description The noise–price frontier of all stages, the quietest first: each is cheaper than any that is as quiet. Stages without a price don’t count. */
+            frontier: components["schemas"]["WholeStageDto"][];
             items: components["schemas"]["RankedStageDto"][];
             /** @description Changes whenever a part that could be ranked changes. */
             libraryRevision: string;
@@ -1976,7 +2019,7 @@ export interface components {
             nearestGain: number | null;
             /** @description How many pairs of resistors give the gain. */
             pairs: number;
-            /** @description How many op-amps are ranked, each with its quietest network. */
+            /** @description How many op-amps are ranked, each with its quietest network; by price, each that makes a stage within the noise allowed, with the cheapest network that does. */
             total: number;
         };
         StandingChangeDto: {
@@ -2070,6 +2113,34 @@ export interface components {
             file: string;
             /** @enum {string} */
             kind: "op-amps" | "resistors";
+        };
+        WholeStageDto: {
+            /** @description dB, over the band; null where the source makes no noise. */
+            aboveFloor: number | null;
+            cautions: ("current-noise-unknown" | "corner-unknown" | "bandwidth-unknown" | "capacitance-unknown" | "estimated-at-temperature" | "feedback-network-loads-output" | "stability-unknown" | "supply-unknown" | "several-packages")[];
+            /** @description Identical channels of the package in parallel. */
+            channelsInParallel: number;
+            /** @description Hz; null where the GBW is unknown. */
+            closedLoopBandwidth: number | null;
+            contributions: components["schemas"]["ContributionsDto"];
+            /** @enum {string} */
+            dominant: "source" | "amplifierVoltage" | "amplifierCurrentSource" | "amplifierCurrentFeedback" | "feedback" | "bias" | "excess";
+            /** @description V/√Hz (A/√Hz in a transimpedance stage), at the reference frequency. */
+            inputNoiseDensity: number;
+            /** @description V (A in a transimpedance stage), over the band. */
+            inputNoiseRms: number;
+            network: components["schemas"]["RankedNetworkDto"];
+            /** @description dB, at the reference frequency; null where the source makes no noise. */
+            noiseFigure: number | null;
+            /** @description V, over the band. */
+            outputNoiseRms: number;
+            part: components["schemas"]["RankedPartDto"];
+            /** @description The parts of a stage that the price is made of. */
+            pieces: components["schemas"]["StagePieceDto"][];
+            /** @description V/V (V/A in a transimpedance stage), at the reference frequency. */
+            signalGain: number;
+            /** @description Of op-amps and found resistors; null where one of them is without a price. */
+            unitPrice: components["schemas"]["StagePriceDto"] | null;
         };
     };
     responses: never;

@@ -13,6 +13,7 @@ export interface StageRequest {
   conditions: SoughtConditions;
   filter?: PartFilter;
   resistorFilter?: ResistorFilter;
+  quantity?: number;
 }
 
 export interface StagePage extends StageRanking {

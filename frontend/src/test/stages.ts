@@ -21,12 +21,20 @@ export function rankedStage(request: StageRequest, rank: number, partNumber: str
       gainResistor: networkPart('901', 'TN-5R00', 5),
       feedbackResistor: networkPart('902', 'TN-500R', 500),
     },
+    unitPrice: null,
+    pieces: [
+      { places: ['op-amp'], pieces: 1, unitPrice: null },
+      { places: ['gain'], pieces: 1, unitPrice: null },
+      { places: ['feedback'], pieces: 1, unitPrice: null },
+    ],
   };
 }
 
 function networkPart(id: string, partNumber: string, resistance: number) {
-  const { library, manufacturer, package: packageName, lifecycle, approval } = resistor();
-  return { id, library, manufacturer, partNumber, package: packageName, lifecycle, approval, resistance };
+  const { description: _description, version: _version, updatedAt: _updatedAt, ...part } = resistor();
+  const { resistor: parameters, origins: _origins, ...name } = part;
+  const { noiseIndex, technology } = parameters;
+  return { ...name, id, partNumber, resistance, noiseIndex, technology };
 }
 
 /** The server's answer with these stages. */
@@ -45,6 +53,7 @@ export function stageRankingOf(
     evaluations: { made: 10, exhaustive: 1000 },
     libraryRevision: '1.1',
     items,
+    frontier: [],
     ...more,
   };
 }

@@ -39,6 +39,15 @@ export class StageDto implements StageConditions {
   @Quantity(CONDITION_FIELDS['conditions.stage.feedbackCapacitance'], { optional: true, orAuto: true })
   feedbackCapacitance?: number | 'auto';
 
+  @Quantity(CONDITION_FIELDS['conditions.stage.outputVoltage'], { optional: true })
+  outputVoltage?: number;
+
+  @Quantity(CONDITION_FIELDS['conditions.stage.gainNoiseIndex'], { optional: true })
+  gainNoiseIndex?: number;
+
+  @Quantity(CONDITION_FIELDS['conditions.stage.feedbackNoiseIndex'], { optional: true })
+  feedbackNoiseIndex?: number;
+
   @Nested(() => NetworkDto, { optional: true })
   network?: NetworkDto;
 }

@@ -30,6 +30,11 @@ const stages = {
     source: { resistance: 300 },
     stage: { topology: 'instrumentation', gain: 10, gainResistance: 1000 },
   }),
+  'a direct output voltage': conditionsWith({
+    stage: { gain: 10, gainResistance: 1000, outputVoltage: -5, gainNoiseIndex: -10, feedbackNoiseIndex: 0 },
+    band: { lower: 0.1, upper: 100 },
+    referenceFrequency: 10,
+  }),
   'a transimpedance stage': conditionsWith({
     source: { resistance: 1e8, capacitance: 1e-11 },
     stage: {
@@ -80,6 +85,9 @@ describe('findLevers', () => {
 
   it.each<[LeverKey, ReturnType<typeof conditionsWith>]>([
     ['lower-network', conditionsWith({ stage: { gain: 100, gainResistance: 5 } })],
+    ['lower-voltage', stages['a low source resistance']],
+    ['lower-voltage', conditionsWith({ stage: { gain: 10, gainResistance: 1000, outputVoltage: 5 } })],
+    ['lower-voltage', conditionsWith({ stage: { gain: 10, gainResistance: 1000, feedbackNoiseIndex: 0 } })],
     ['raise-feedback', stages['a low source resistance']],
     ['halve-band', conditionsWith({ band: { lower: 15e3 }, referenceFrequency: 16e3 })],
     ['cool-source', conditionsWith({ source: { resistance: 0 } })],
@@ -94,6 +102,15 @@ describe('findLevers', () => {
     ],
   ])('leaves out %s where it can’t help', (key, conditions) => {
     expect(keysOf(conditions)).not.toContain(key);
+  });
+
+  it('halves the direct output voltage, and with it the excess noise', () => {
+    const conditions = stages['a direct output voltage'];
+    const lever = findLevers(conditions, part).find(({ key }) => key === 'lower-voltage')!;
+    expect(lever.conditions.stage.outputVoltage).toBe(-2.5);
+    const excess = (at: typeof conditions) => evaluateStage(at, amplifier).contributions.excess;
+    expect(excess(lever.conditions)).toBeCloseTo(excess(conditions) / 2, 12);
+    expect(lever.change).toBeLessThan(0);
   });
 
   it('lowers the network to what the output is to drive', () => {

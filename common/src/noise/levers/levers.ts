@@ -20,6 +20,7 @@ export const LEVERS = [
   'halve-band',
   'lower-network',
   'raise-feedback',
+  'lower-voltage',
   'parallel',
   'transformer',
   'quieter-part',
@@ -57,13 +58,14 @@ type Proposal = Omit<Lever, 'change' | 'ratio'> & { ratio?: number };
  */
 export function findLevers(conditions: OperatingConditions, part: LeverPart, quieter?: LeverPart): Lever[] {
   const { amplifier } = part;
-  const now = evaluateStage(conditions, amplifier).inputNoiseRms;
+  const { inputNoiseRms: now, contributions } = evaluateStage(conditions, amplifier);
   const proposals = [
     coolSource(conditions, amplifier),
     coolCircuit(conditions, amplifier),
     halveBand(conditions, amplifier),
     lowerNetwork(conditions, amplifier),
     raiseFeedback(conditions, amplifier),
+    contributions.excess > 0 ? lowerVoltage(conditions, amplifier) : null,
     inParallel(conditions, amplifier),
     stepUp(conditions, amplifier),
     quieter && quieterPart(conditions, quieter),
@@ -179,6 +181,18 @@ function raiseFeedback(conditions: OperatingConditions, amplifier: NoiseAmplifie
     sentence:
       'The current noise of a resistor falls with its value; check that the bandwidth is still enough.',
     conditions: { ...conditions, stage: { ...stage, feedbackResistance } },
+    amplifier,
+  };
+}
+
+function lowerVoltage(conditions: OperatingConditions, amplifier: NoiseAmplifier): Proposal {
+  const { stage } = conditions;
+  const outputVoltage = stage.outputVoltage! / 2;
+  return {
+    key: 'lower-voltage',
+    label: `Halve the direct output voltage to ${show(outputVoltage, 'voltage')}`,
+    sentence: 'The excess noise of the resistors goes with the direct voltage across them.',
+    conditions: { ...conditions, stage: { ...stage, outputVoltage } },
     amplifier,
   };
 }

@@ -1,3 +1,4 @@
+import type { PricedNetwork } from './networks.js';
 import type { Network } from './stageSearch.js';
 
 /** Networks that stand next to each other in the order of their gain resistance. */
@@ -9,6 +10,8 @@ export interface Block {
   corners: Network[];
   /** How much less than at the corners the noise inside may be at least: a factor, 0 = unknown. */
   dip: number;
+  /** the least price of its networks */
+  price: number;
 }
 
 /** From this many networks on, bounds cost less than they save. */
@@ -20,7 +23,7 @@ export class Blocks {
 
   /** @param neverFalls the noise never falls with more gain resistance */
   constructor(
-    private readonly networks: readonly Network[],
+    private readonly networks: readonly PricedNetwork[],
     private readonly neverFalls: boolean,
   ) {}
 
@@ -33,6 +36,11 @@ export class Blocks {
     if (to - from <= WORTH_BOUNDING) return null;
     const middle = (from + to) >> 1;
     return [this.block(from, middle), this.block(middle, to)];
+  }
+
+  /** The networks of a block. */
+  of({ from, to }: Block): readonly PricedNetwork[] {
+    return this.networks.slice(from, to);
   }
 
   private block(from: number, to: number): Block {
@@ -51,7 +59,8 @@ export class Blocks {
     const corners = resistances.flatMap((gainResistance) =>
       gains.map((gain) => cornerOf(members, gain, gainResistance)),
     );
-    return { from, to, corners, dip };
+    const [price] = ends(members.map((network) => network.price));
+    return { from, to, corners, dip, price };
   }
 }
 

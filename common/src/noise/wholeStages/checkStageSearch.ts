@@ -8,12 +8,11 @@ import { STAGE_SEARCH_FIELDS } from './stageSearchFields.js';
  * network's limits against each other. Empty = it can be ranked.
  */
 export function checkStageSearch(conditions: SoughtConditions, filter?: PartFilter): FieldError[] {
-  const { gainTolerance, parallelMaximum, outputVoltage = 0, network } = conditions.stage;
+  const { gainTolerance, parallelMaximum, network } = conditions.stage;
   const values = {
     'conditions.stage.gainTolerance': gainTolerance,
     'conditions.stage.network.maximumTotal': network.maximumTotal,
     'conditions.stage.parallelMaximum': parallelMaximum,
-    'conditions.stage.outputVoltage': outputVoltage,
   };
   const bounds = Object.entries(values).flatMap(([field, value]) => {
     const message = boundsError(STAGE_SEARCH_FIELDS[field as keyof typeof values], value);
@@ -42,8 +41,7 @@ function checkParallel({ stage: { topology, parallelMaximum } }: SoughtCondition
 
 /** The stage at the wanted gain must be one that can be computed; its network isn't the asker's to state. */
 function checkNominal(conditions: SoughtConditions, filter?: PartFilter): FieldError[] {
-  const stage = { ...conditions.stage, outputVoltage: undefined };
-  const nominal = withNetwork({ ...conditions, stage }, nominalNetwork(conditions));
+  const nominal = withNetwork(conditions, nominalNetwork(conditions));
   return checkConditions({ conditions: nominal, filter }).filter(
     ({ field }) => field !== 'conditions.stage.gainResistance',
   );

@@ -1,20 +1,20 @@
+import { distinctValues, pairChoices, type Value } from './resistorChoices.js';
+import type { NetworkCosts } from './stageCosts.js';
 import { isFollower, type Network, type NetworkResistor, type SoughtConditions } from './stageSearch.js';
+
+/** A network and what its resistors cost for all stages. */
+export interface PricedNetwork extends Network {
+  /** Infinity = one of them is without a price */
+  price: number;
+}
 
 /** All networks that the library's resistors make, in ascending order of the gain resistance. */
 export interface Networks {
-  all: Network[];
+  all: PricedNetwork[];
   /** how many pairs of library resistors they stand for, those of equal values counted each */
   pairs: number;
   /** the gain nearest to the wanted one within the limits, also where it misses the tolerance; null = none at all */
   nearestGain: number | null;
-}
-
-interface Value {
-  resistance: number;
-  resistor: number;
-  noiseIndex?: number;
-  /** how many usable resistors have the value */
-  count: number;
 }
 
 /** Decimal values: a gain of 101 lies within 1 % of 100 whatever the rounding of its double. */
@@ -22,53 +22,57 @@ const ROUNDING = 1e-12;
 
 /**
  * The networks that give the wanted gain within its tolerance and keep the limits of their total: R_g and
- * R_f of a stage on a voltage source, R_f alone of a transimpedance stage, none of a follower. Of
- * resistors with equal values only the one with the least excess noise counts; where a direct output voltage
- * drives excess noise, resistors of unknown noise index don't count.
+ * R_f of a stage on a voltage source, R_f alone of a transimpedance stage, none of a follower. Of resistors
+ * with equal values only those count that no other beats in excess noise and price; where a direct output
+ * voltage drives excess noise, resistors of unknown noise index don't count.
  */
-export function findNetworks(conditions: SoughtConditions, resistors: readonly NetworkResistor[]): Networks {
+export function findNetworks(
+  conditions: SoughtConditions,
+  resistors: readonly NetworkResistor[],
+  costs: NetworkCosts,
+): Networks {
   const { stage } = conditions;
   if (isFollower(stage)) return { all: [FOLLOWER], pairs: 1, nearestGain: 1 };
-  const values = distinctValues(resistors, (stage.outputVoltage ?? 0) !== 0);
-  return stage.topology === 'transimpedance' ? findSingle(conditions, values) : findPairs(conditions, values);
+  const values = distinctValues(resistors, (stage.outputVoltage ?? 0) !== 0, costs);
+  return stage.topology === 'transimpedance'
+    ? findSingle(conditions, values)
+    : findPairs(conditions, values, costs);
 }
 
-const FOLLOWER: Network = {
+const FOLLOWER: PricedNetwork = {
   gain: 1,
   gainResistor: null,
   feedbackResistor: null,
   gainResistance: 0,
   feedbackResistance: 0,
+  price: 0,
 };
-
-function distinctValues(resistors: readonly NetworkResistor[], hasExcess: boolean): Value[] {
-  const quietest = new Map<number, Value>();
-  resistors.forEach(({ resistance, noiseIndex }, resistor) => {
-    if (hasExcess && noiseIndex === null) return;
-    const known = quietest.get(resistance);
-    const count = (known?.count ?? 0) + 1;
-    const isQuieter = known === undefined || (hasExcess && noiseIndex! < known.noiseIndex!);
-    const value = { resistance, resistor, ...(hasExcess && { noiseIndex: noiseIndex! }) };
-    quietest.set(resistance, { ...(isQuieter ? value : known), count });
-  });
-  return [...quietest.values()].sort((a, b) => a.resistance - b.resistance);
-}
 
 function findSingle({ stage }: SoughtConditions, values: readonly Value[]): Networks {
   const wanted = stage.feedbackResistance!;
-  const networks = values
-    .filter(({ resistance }) => isWithin(resistance, stage.network))
-    .map((feedback) => ({ network: toNetwork(feedback.resistance, null, feedback), count: feedback.count }));
-  const chosen = networks.filter(
-    ({ network }) => Math.abs(network.gain / wanted - 1) <= stage.gainTolerance + ROUNDING,
+  const within = values.filter(({ resistance }) => isWithin(resistance, stage.network));
+  const chosen = within.filter(
+    ({ resistance }) => Math.abs(resistance / wanted - 1) <= stage.gainTolerance + ROUNDING,
   );
   return {
-    all: chosen.map(({ network }) => network),
+    all: chosen.flatMap((value) => value.feedback.map((choice) => singleNetwork(value, choice))),
     pairs: chosen.reduce((sum, { count }) => sum + count, 0),
-    nearestGain: networks.reduce<number | null>(
-      (best, { network }) => nearer(best, network.gain, wanted),
+    nearestGain: within.reduce<number | null>(
+      (best, { resistance }) => nearer(best, resistance, wanted),
       null,
     ),
+  };
+}
+
+function singleNetwork({ resistance }: Value, choice: Value['feedback'][number]): PricedNetwork {
+  return {
+    gain: resistance,
+    gainResistor: null,
+    feedbackResistor: choice.resistor,
+    gainResistance: 0,
+    feedbackResistance: resistance,
+    feedbackNoiseIndex: choice.noiseIndex,
+    price: choice.price,
   };
 }
 
@@ -83,11 +87,11 @@ function nearer(best: number | null, gain: number, wanted: number): number {
   return best === null || Math.abs(gain - wanted) < Math.abs(best - wanted) ? gain : best;
 }
 
-function findPairs(conditions: SoughtConditions, values: readonly Value[]): Networks {
+function findPairs(conditions: SoughtConditions, values: readonly Value[], costs: NetworkCosts): Networks {
   const { stage } = conditions;
   const wanted = stage.gain!;
   const { least, times, series, share } = gainLaw(conditions);
-  const all: Network[] = [];
+  const all: PricedNetwork[] = [];
   let pairs = 0;
   let nearestGain: number | null = null;
   const spread = wanted * (stage.gainTolerance + ROUNDING);
@@ -101,7 +105,7 @@ function findPairs(conditions: SoughtConditions, values: readonly Value[]): Netw
       if (isWithin(total, stage.network)) {
         nearestGain = nearer(nearestGain, gain, wanted);
         if (Math.abs(gain - wanted) <= spread) {
-          all.push(toNetwork(gain, gainValue, feedback));
+          all.push(...pairNetworks(gain, gainValue, feedback, costs));
           pairs += gainValue.count * feedback.count;
         }
       }
@@ -144,14 +148,20 @@ function firstAtLeast(values: readonly Value[], least: number): number {
   return low;
 }
 
-function toNetwork(gain: number, gainValue: Value | null, feedback: Value): Network {
-  return {
+function pairNetworks(
+  gain: number,
+  gainValue: Value,
+  feedbackValue: Value,
+  costs: NetworkCosts,
+): PricedNetwork[] {
+  return pairChoices(gainValue, feedbackValue, costs).map(({ gain: one, feedback, price }) => ({
     gain,
-    gainResistor: gainValue?.resistor ?? null,
+    gainResistor: one.resistor,
     feedbackResistor: feedback.resistor,
-    gainResistance: gainValue?.resistance ?? 0,
-    feedbackResistance: feedback.resistance,
-    gainNoiseIndex: gainValue?.noiseIndex,
+    gainResistance: gainValue.resistance,
+    feedbackResistance: feedbackValue.resistance,
+    gainNoiseIndex: one.noiseIndex,
     feedbackNoiseIndex: feedback.noiseIndex,
-  };
+    price,
+  }));
 }

@@ -5,7 +5,14 @@ import { evaluateStage } from '../evaluateStage.js';
 import { parallelStage } from '../levers/index.js';
 import { findNetworks } from './networks.js';
 import { rankStages } from './rankStages.js';
-import { withNetwork, type NetworkResistor, type SoughtConditions, type SoughtStage } from './stageSearch.js';
+import { StageCosts } from './stageCosts.js';
+import {
+  STAGE_SORTS,
+  withNetwork,
+  type NetworkResistor,
+  type SoughtConditions,
+  type SoughtStage,
+} from './stageSearch.js';
 
 const base: SoughtConditions = {
   source: { resistance: 200, inductance: 0, capacitance: 0 },
@@ -45,9 +52,19 @@ const amplifiers = [
 ];
 const library = libraryOf(amplifiers.map((amplifier) => ({ amplifier })));
 
+const NO_PRICES = new StageCosts('non-inverting', undefined).network(1);
+
+const rank = (
+  conditions: SoughtConditions,
+  among: readonly NetworkResistor[] = resistors,
+  limit = 10,
+  offset = 0,
+) =>
+  rankStages({ conditions, filter: {}, sort: 'inputNoiseRms', within: 1, limit, offset }, [library], among);
+
 /** Every amplifier with every network and number of channels, one by one. */
 function exhaustive(conditions: SoughtConditions, rows: readonly number[]) {
-  const { all } = findNetworks(conditions, resistors);
+  const { all } = findNetworks(conditions, resistors, NO_PRICES);
   return rows
     .map((row) => {
       const amplifier = amplifiers[row];
@@ -116,7 +133,7 @@ describe('rankStages', () => {
       ),
     ],
   ])('finds what trying every network finds, for %s', (_, conditions) => {
-    const ranking = rankStages({ conditions, filter: {}, limit: 10, offset: 0 }, [library], resistors);
+    const ranking = rank(conditions);
     const excluded = new Set(ranking.excluded.map(({ row }) => row));
     const expected = exhaustive(
       conditions,
@@ -131,18 +148,13 @@ describe('rankStages', () => {
   });
 
   it('gives pages that join', () => {
-    const page = (offset: number, limit: number) =>
-      rankStages({ conditions: base, filter: {}, limit, offset }, [library], resistors).items;
+    const page = (offset: number, limit: number) => rank(base, resistors, limit, offset).items;
     expect([...page(0, 2), ...page(2, 10)]).toEqual(page(0, 10));
   });
 
   it('looks at few of the networks of a large library', () => {
     const many = preferredValuesBetween(192, 1, 1e6).map((resistance) => ({ resistance, noiseIndex: -30 }));
-    const { evaluations, pairs } = rankStages(
-      { conditions: base, filter: {}, limit: 3, offset: 0 },
-      [library],
-      many,
-    );
+    const { evaluations, pairs } = rank(base, many, 3);
     expect(pairs).toBeGreaterThan(500);
     expect(evaluations.made).toBeLessThan(evaluations.exhaustive / 10);
   });
@@ -152,15 +164,15 @@ describe('rankStages', () => {
       { resistance: 100, noiseIndex: null },
       { resistance: 4700, noiseIndex: null },
     ];
-    const ranking = rankStages({ conditions: base, filter: {}, limit: 5, offset: 0 }, [library], few);
+    const ranking = rank(base, few);
     expect(ranking).toMatchObject({ total: 0, items: [], pairs: 0, nearestGain: 48 });
-    const none = rankStages({ conditions: base, filter: {}, limit: 5, offset: 0 }, [library], []);
+    const none = rank(base, []);
     expect(none).toMatchObject({ total: 0, items: [], nearestGain: null });
   });
 
   it('ranks a follower without a network', () => {
     const conditions = sought({ gain: 1 });
-    const { items } = rankStages({ conditions, filter: {}, limit: 1, offset: 0 }, [library], []);
+    const { items } = rank(conditions, []);
     expect(items[0].network).toMatchObject({ gain: 1, gainResistor: null, feedbackResistor: null });
   });
 
@@ -169,7 +181,7 @@ describe('rankStages', () => {
       { resistance: 900, noiseIndex: null },
       { resistance: 5000, noiseIndex: null },
     ];
-    const gainOf = (stage: Partial<SoughtStage>) => findNetworks(sought(stage), two).all[0]?.gain;
+    const gainOf = (stage: Partial<SoughtStage>) => findNetworks(sought(stage), two, NO_PRICES).all[0]?.gain;
     // The source has 200 Ω.
     expect(gainOf({ topology: 'difference', gain: 5 })).toBe(5);
     expect(gainOf({ topology: 'instrumentation', gain: 12, gainTolerance: 0.02 })).toBeCloseTo(1 + 1e4 / 900);
@@ -177,14 +189,14 @@ describe('rankStages', () => {
 
   it('ranks the followers of an instrumentation stage without a network', () => {
     const conditions = sought({ topology: 'instrumentation', gain: 1 });
-    const { items } = rankStages({ conditions, filter: {}, limit: 1, offset: 0 }, [library], []);
+    const { items } = rank(conditions, []);
     expect(items[0].network).toMatchObject({ gain: 1, gainResistor: null, feedbackResistor: null });
     expect(items[0].figures.signalGain).toBeCloseTo(1, 3);
   });
 
   it('takes no resistor of unknown noise index where a direct voltage drives excess noise', () => {
     const conditions = sought({ outputVoltage: 5, network: { minimumTotal: 1.5e5, maximumTotal: 1e6 } });
-    const { items } = rankStages({ conditions, filter: {}, limit: 5, offset: 0 }, [library], resistors);
+    const { items } = rank(conditions);
     for (const { network } of items) {
       expect(resistors[network.feedbackResistor!].noiseIndex).not.toBeNull();
       expect(network.feedbackNoiseIndex).toBe(-20);
@@ -192,9 +204,12 @@ describe('rankStages', () => {
   });
 
   it('answers an empty library with an empty ranking', () => {
-    expect(rankStages({ conditions: base, filter: {}, limit: 5, offset: 0 }, [], resistors)).toMatchObject({
-      total: 0,
-      items: [],
-    });
+    const search = { conditions: base, filter: {}, within: 1, limit: 5, offset: 0 };
+    for (const sort of STAGE_SORTS)
+      expect(rankStages({ ...search, sort }, [], resistors)).toMatchObject({
+        total: 0,
+        items: [],
+        frontier: [],
+      });
   });
 });

@@ -1,29 +1,28 @@
-import { PriorityQueue } from '../../numeric/index.js';
-import type { Amplifier } from '../../parts/index.js';
-import type { OperatingConditions } from '../../conditions/index.js';
-import { evaluateStage, sourceFloor, stageNoise } from '../evaluateStage.js';
+import { evaluateStage, sourceFloor } from '../evaluateStage.js';
 import type { SourceFloor, StageFigures } from '../figures.js';
 import { parallelStage } from '../levers/parallelStage.js';
-import { amplifierAt, type AmplifierColumns } from '../ranking/columns.js';
+import type { AmplifierColumns } from '../ranking/columns.js';
 import { sift, type ExcludedPart, type PartPlace } from '../ranking/sift.js';
 import { stageModel } from '../stage/stageModel.js';
-import { Blocks, type Block } from './blocks.js';
+import { Blocks } from './blocks.js';
+import { listCandidates, noiseOf, type Candidate, type FoundStage } from './candidates.js';
 import { findNetworks } from './networks.js';
-import {
-  nominalNetwork,
-  withNetwork,
-  type Network,
-  type NetworkResistor,
-  type SoughtConditions,
-  type StageSearch,
-} from './stageSearch.js';
+import { StageCosts } from './stageCosts.js';
+import { nominalNetwork, withNetwork, type Network, type NetworkResistor } from './stageSearch.js';
+import type { SoughtConditions, StageSearch } from './stageSearch.js';
+import { findCheapest, findQuietest, type StageSpace } from './sweeps.js';
 
-/** An amplifier with the network, and the number of channels in parallel, that make it quietest. */
-export interface RankedStage extends PartPlace {
-  rank: number;
+/** An amplifier with a network and a number of channels in parallel. */
+export interface WholeStage extends PartPlace {
   channelsInParallel: number;
   network: Network;
   figures: StageFigures;
+  /** of its parts for all stages that are wanted; null = one of them is without a price */
+  price: number | null;
+}
+
+export interface RankedStage extends WholeStage {
+  rank: number;
 }
 
 export interface StageRanking {
@@ -35,24 +34,17 @@ export interface StageRanking {
   pairs: number;
   nearestGain: number | null;
   items: RankedStage[];
+  /** the stages that no other beats in both noise and price, the quietest first */
+  frontier: WholeStage[];
   /** stages whose noise was computed to find these, and how many there are in all */
   evaluations: { made: number; exhaustive: number };
 }
 
-interface Candidate extends PartPlace {
-  amplifier: Amplifier;
-  channelsInParallel: number;
-}
-
-type Entry = Candidate & ({ block: Block } | { network: Network; block?: undefined });
-
 /**
  * Ranks every amplifier with the network of library resistors, and the number of identical channels in
- * parallel, that make the quietest stage with it. Amplifiers are excluded as at the wanted gain.
- *
- * Best-first search: blocks of networks wait with a lower bound of their noise, single networks with their
- * noise itself; the least is taken and, if it is a block, halved. What comes out as a single network is the
- * next-quietest stage, and most networks are never looked at.
+ * parallel, that make the quietest stage with it, or the cheapest within so many dB of the quietest of all. Of
+ * equally quiet stages the cheapest counts, of equally cheap ones the quietest. Amplifiers are excluded as
+ * at the wanted gain.
  *
  * @param resistors those that may be used, in order of preference among equals
  */
@@ -61,99 +53,73 @@ export function rankStages(
   libraries: readonly AmplifierColumns[],
   resistors: readonly NetworkResistor[],
 ): StageRanking {
-  const { conditions, filter } = search;
-  const { all, pairs, nearestGain } = findNetworks(conditions, resistors);
+  const { conditions, filter, offset, limit } = search;
+  const costs = new StageCosts(conditions.stage.topology, search.prices);
   const nominal = withNetwork(conditions, nominalNetwork(conditions));
   const { accepted, excluded } = sift({ conditions: nominal, filter }, stageModel(nominal), libraries);
-  const candidates = listCandidates(conditions, libraries, accepted);
-  const found = { evaluations: 0, stages: [] as (Candidate & { network: Network })[] };
-  if (all.length > 0) findQuietest(search, candidates, all, found);
+  const candidates = listCandidates(conditions, libraries, accepted, costs);
+  const { pairs, nearestGain, blocksFor } = prepareNetworks(conditions, resistors, costs);
+  const evaluations = { made: 0, exhaustive: pairs * candidates.length };
+  const countedNoise = (candidate: Candidate, network: Network) => {
+    evaluations.made++;
+    return noiseOf(conditions, candidate, network);
+  };
+  const space = { candidates: pairs === 0 ? [] : candidates, blocksFor, noiseOf: countedNoise };
+  const { total, rows, frontier } = findStages(search, space);
   return {
-    total: all.length === 0 ? 0 : accepted.reduce((total, rows) => total + rows.length, 0),
+    total: total ?? (pairs === 0 ? 0 : accepted.reduce((sum, { length }) => sum + length, 0)),
     excluded,
     floor: sourceFloor(nominal),
     pairs,
     nearestGain,
-    items: found.stages
-      .slice(search.offset)
-      .map((stage, n) => toRanked(search, stage, search.offset + n + 1)),
-    evaluations: { made: found.evaluations, exhaustive: pairs * candidates.length },
+    items: rows
+      .slice(offset, offset + limit)
+      .map((stage, n) => ({ ...toStage(search, stage), rank: offset + n + 1 })),
+    frontier: frontier.map((stage) => toStage(search, stage)),
+    evaluations,
   };
 }
 
-function listCandidates(
-  { stage }: SoughtConditions,
-  libraries: readonly AmplifierColumns[],
-  accepted: readonly Uint32Array[],
-): Candidate[] {
-  return accepted.flatMap((rows, library) =>
-    Array.from(rows).flatMap((row) => {
-      const amplifier = amplifierAt(libraries[library], row);
-      const most = Math.min(stage.parallelMaximum, amplifier.channels);
-      return Array.from({ length: most }, (_, n) => ({ library, row, amplifier, channelsInParallel: n + 1 }));
-    }),
-  );
-}
-
-function findQuietest(
-  { conditions, offset, limit }: StageSearch,
-  candidates: readonly Candidate[],
-  networks: readonly Network[],
-  found: { evaluations: number; stages: (Candidate & { network: Network })[] },
-): void {
-  const blocks = new Blocks(networks, conditions.stage.topology === 'non-inverting');
-  const queue = new PriorityQueue<Entry>();
-  const taken = new Set<string>();
-  const noise = (candidate: Candidate, network: Network) => {
-    found.evaluations++;
-    return totalNoise(conditions, candidate, network);
-  };
-  const addBlock = (candidate: Candidate, block: Block) => {
-    const least =
-      block.dip === 0 ? 0 : block.dip * Math.min(...block.corners.map((corner) => noise(candidate, corner)));
-    queue.add(least, { ...candidate, block });
-  };
-  for (const candidate of candidates) addBlock(candidate, blocks.whole());
-  while (found.stages.length < offset + limit) {
-    const entry = queue.take();
-    if (entry === undefined) return;
-    const key = `${entry.library} ${entry.row}`;
-    if (taken.has(key)) continue;
-    if (entry.block === undefined) {
-      taken.add(key);
-      found.stages.push(entry);
-      continue;
-    }
-    const halves = blocks.halves(entry.block);
-    if (halves) for (const half of halves) addBlock(entry, half);
-    else
-      for (const network of networks.slice(entry.block.from, entry.block.to))
-        queue.add(noise(entry, network), { ...entry, block: undefined, network });
-  }
-}
-
-function stageOf(
+/** The networks of one channel, and in blocks those for any number of channels, made at the first asking. */
+function prepareNetworks(
   conditions: SoughtConditions,
-  { amplifier, channelsInParallel }: Candidate,
-  network: Network,
+  resistors: readonly NetworkResistor[],
+  costs: StageCosts,
 ) {
-  return parallelStage({ conditions: withNetwork(conditions, network), amplifier }, channelsInParallel);
+  const neverFalls = conditions.stage.topology === 'non-inverting';
+  const single = findNetworks(conditions, resistors, costs.network(1));
+  const known = [new Blocks(single.all, neverFalls)];
+  const blocksFor: StageSpace['blocksFor'] = (channelsInParallel) => {
+    const count = costs.distinct(channelsInParallel);
+    return (known[count - 1] ??= new Blocks(
+      findNetworks(conditions, resistors, costs.network(count)).all,
+      neverFalls,
+    ));
+  };
+  return { ...single, blocksFor };
 }
 
-function totalNoise(sought: SoughtConditions, candidate: Candidate, network: Network): number {
-  const { conditions, amplifier } = stageOf(sought, candidate, network);
-  return stageNoise(conditions, amplifier);
+function findStages({ sort, within, offset, limit }: StageSearch, space: StageSpace) {
+  if (sort === 'inputNoiseRms') return { total: null, ...findQuietest(space, offset + limit) };
+  const { rows, frontier } = findQuietest(space, 1);
+  const [quietest] = rows;
+  const cheapest = quietest ? findCheapest(space, quietest.noise * 10 ** (within / 20)) : [];
+  return { total: cheapest.length, rows: cheapest, frontier };
 }
 
-function toRanked(
-  { conditions, filter }: StageSearch,
-  stage: Candidate & { network: Network },
-  rank: number,
-): RankedStage {
-  const { library, row, channelsInParallel, network } = stage;
-  const single: OperatingConditions = withNetwork(conditions, network);
-  const several = parallelStage({ conditions: single, amplifier: stage.amplifier }, channelsInParallel);
-  const { cautions } = evaluateStage(single, stage.amplifier, filter);
+function toStage({ conditions, filter }: StageSearch, stage: FoundStage): WholeStage {
+  const { candidate, network, price } = stage;
+  const { library, row, amplifier, channelsInParallel } = candidate;
+  const single = withNetwork(conditions, network);
+  const several = parallelStage({ conditions: single, amplifier }, channelsInParallel);
+  const { cautions } = evaluateStage(single, amplifier, filter);
   const figures = { ...evaluateStage(several.conditions, several.amplifier), cautions };
-  return { library, row, rank, channelsInParallel, network, figures };
+  return {
+    library,
+    row,
+    channelsInParallel,
+    network,
+    figures,
+    price: Number.isFinite(price) ? price : null,
+  };
 }

@@ -1,5 +1,6 @@
 import { leastGainResistance } from '../leastGainResistance.js';
 import type { OperatingConditions, PartFilter, StageConditions } from '../../conditions/index.js';
+import type { StagePrices } from './stageCosts.js';
 
 /** What the network of a whole stage must keep. */
 export interface NetworkLimits {
@@ -25,11 +26,20 @@ export interface SoughtConditions extends Omit<OperatingConditions, 'stage'> {
   stage: SoughtStage;
 }
 
+/** What whole stages can be sorted by. */
+export const STAGE_SORTS = ['inputNoiseRms', 'unitPrice'] as const;
+export type StageSort = (typeof STAGE_SORTS)[number];
+
 export interface StageSearch {
   conditions: SoughtConditions;
   filter: PartFilter;
+  sort: StageSort;
+  /** dB above the quietest stage that one sorted by price may lie at most */
+  within: number;
   limit: number;
   offset: number;
+  /** left out = nothing has a price */
+  prices?: StagePrices;
 }
 
 /** A resistor of the library as a network's part. */

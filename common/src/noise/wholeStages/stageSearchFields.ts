@@ -21,10 +21,10 @@ export const STAGE_SEARCH_FIELDS = {
     integer: true,
     help: 'Identical channels of one package that may work in parallel.',
   },
-  'conditions.stage.outputVoltage': {
-    label: 'direct output voltage',
-    kind: 'voltage',
-    bounds: { from: -1e4, to: 1e4 },
-    help: 'It drives a direct current through the network, and so its excess noise.',
+  within: {
+    label: 'within',
+    kind: 'decibel',
+    bounds: { from: 0, to: 60 },
+    help: 'How far above the quietest stage the noise of one sorted by price may lie.',
   },
 } as const satisfies Record<string, QuantityField>;

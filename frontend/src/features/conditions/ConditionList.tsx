@@ -44,6 +44,7 @@ export function ConditionList() {
           <ConditionField path="conditions.stage.network.minimumTotal" emptyText="not stated" />
         </Row>
       )}
+      <ExcessRows />
       <Row label="Target, input rms">
         <ConditionField path="target.inputNoiseRms" emptyText="none" />
       </Row>
@@ -52,6 +53,31 @@ export function ConditionList() {
       </Row>
       <PartsFilter />
     </div>
+  );
+}
+
+/** What makes the excess noise of the network: the voltage over it, and what its resistors make of that. */
+function ExcessRows() {
+  const { stage } = useConditionsForm().request.conditions;
+  const kind = stageKindOf(stage);
+  if (!hasStageField(kind, 'outputVoltage')) return null;
+  const hasGainResistor = hasStageField(kind, 'gainNoiseIndex');
+  return (
+    <>
+      <Row label="Direct output voltage">
+        <ConditionField path="conditions.stage.outputVoltage" emptyText="none" />
+      </Row>
+      {stage.outputVoltage && (
+        <Row label={hasGainResistor ? 'Noise index, R_g and R_f' : 'Noise index, R_f'}>
+          {hasGainResistor && (
+            <>
+              <ConditionField path="conditions.stage.gainNoiseIndex" emptyText="none" /> and{' '}
+            </>
+          )}
+          <ConditionField path="conditions.stage.feedbackNoiseIndex" emptyText="none" />
+        </Row>
+      )}
+    </>
   );
 }
 

@@ -1,5 +1,6 @@
 import type { RankingRequest } from '@roothertz/common/conditions';
 import { createContext, use } from 'react';
+import type { NextRequest } from './useConditionsAddress';
 
 /** What the fields of the operating conditions share. */
 export interface ConditionsForm {
@@ -8,7 +9,7 @@ export interface ConditionsForm {
   messages: ReadonlyMap<string, string>;
   /** Puts another value at a path; undefined takes it away. */
   change: (path: string, value: unknown) => void;
-  replace: (request: RankingRequest) => void;
+  replace: (next: NextRequest) => void;
   /** Told of a text in a field that can't be read, and when it is gone. */
   reportDraft: (path: string, message: string | null) => void;
 }

@@ -18,7 +18,7 @@ export function StageSwitch() {
             name="stage"
             className="visually-hidden"
             checked={kind === current}
-            onChange={() => replace(withStageKind(request, kind))}
+            onChange={() => replace((before) => withStageKind(before, kind))}
           />
           {STAGE_KIND_LABELS[kind]}
         </label>

@@ -1,7 +1,7 @@
 import { checkConditions, type RankingRequest } from '@roothertz/common/conditions';
 import type { FieldError } from '@roothertz/common/parts';
 import { useCallback, useMemo, useRef } from 'react';
-import { useSearchParams } from 'react-router-dom';
+import type { Address } from '../../components/useAddress';
 import { readAddress } from './address/readAddress';
 import { writeAddress } from './address/writeAddress';
 import { exampleRequest } from './exampleRequest';
@@ -14,42 +14,54 @@ const PART_KEY = 'part';
 /** Fields whose text is taken while it is typed: one step back for all of it. */
 const TYPED_FIELDS: readonly string[] = ['filter.search', 'filter.package'];
 
-/** The conditions of the page's address, and how to change it. */
-export function useConditionsAddress() {
-  const [params, setParams] = useSearchParams();
+/** Other conditions, or how they follow from those that were asked for last. */
+export type NextRequest = RankingRequest | ((before: RankingRequest) => RankingRequest);
+
+/** The conditions of the page's address, and how to change them. */
+export function useConditionsAddress({ params, change: changeAddress }: Address) {
   const lastTyped = useRef<{ path: string; value: unknown } | null>(null);
   const content = useMemo(() => readAddress(params), [params]);
   const request = useMemo(() => content?.request ?? exampleRequest('non-inverting'), [content]);
   const problems = useMemo(() => problemsOf(request, content?.errors ?? []), [request, content]);
-  const namedId = params.get(NAMED_KEY);
-  const partId = params.get(PART_KEY);
 
   const show = useCallback(
     (next: ShownRequest, named: string | null, replace = false) =>
-      setParams((current) => addressOf(next, named, current), { replace, preventScrollReset: true }),
-    [setParams],
+      changeAddress((before) => addressOf(next, named, before), replace),
+    [changeAddress],
+  );
+  const replace = useCallback(
+    (next: NextRequest, noStepBack = false) =>
+      changeAddress((before) => {
+        const after = typeof next === 'function' ? next(requestOf(before)) : next;
+        return addressOf(after, before.get(NAMED_KEY), before);
+      }, noStepBack),
+    [changeAddress],
   );
   const change = useCallback(
     (path: string, value: unknown) => {
       const goesOn = lastTyped.current?.path === path && lastTyped.current.value === valueAt(request, path);
       lastTyped.current = TYPED_FIELDS.includes(path) ? { path, value: value || undefined } : null;
-      show(withValue(request, path, value), namedId, goesOn);
+      replace((before) => withValue(before, path, value), goesOn);
     },
-    [request, namedId, show],
+    [request, replace],
   );
-  const replace = useCallback((next: RankingRequest) => show(next, namedId), [namedId, show]);
   const selectPart = useCallback(
-    (id: string) =>
-      setParams(
-        (current) => {
-          current.set(PART_KEY, id);
-          return current;
-        },
-        { replace: true, preventScrollReset: true },
-      ),
-    [setParams],
+    (id: string) => changeAddress((before) => withPart(before, id), true),
+    [changeAddress],
   );
+  const namedId = params.get(NAMED_KEY);
+  const partId = params.get(PART_KEY);
   return { isBlank: content === null, request, problems, namedId, partId, change, replace, show, selectPart };
+}
+
+function requestOf(params: URLSearchParams): RankingRequest {
+  return readAddress(params)?.request ?? exampleRequest('non-inverting');
+}
+
+function withPart(before: URLSearchParams, id: string): URLSearchParams {
+  const params = new URLSearchParams(before);
+  params.set(PART_KEY, id);
+  return params;
 }
 
 /** Named conditions bring the part with them that was chosen at them. */

@@ -1,5 +1,5 @@
-import { useCallback, useEffect, useMemo, useRef } from 'react';
-import { useSearchParams } from 'react-router-dom';
+import { useCallback, useMemo } from 'react';
+import { useAddress } from '../../components/useAddress';
 import type { KindOfPart } from './kindOfPart';
 import { readPartsView } from './partsView';
 
@@ -7,24 +7,19 @@ export type ChangeView = (changes: Record<string, string | readonly string[] | u
 
 /** What the list shows, kept in the page's address. */
 export function usePartsView(kind: KindOfPart) {
-  const [address, setAddress] = useSearchParams();
-  const view = useMemo(() => readPartsView(kind, address), [kind, address]);
-  /** The latest address asked for: a second change may come before the page has taken the first. */
-  const latest = useRef(address);
-  useEffect(() => {
-    latest.current = address;
-  }, [address]);
+  const { params, change: changeAddress } = useAddress();
+  const view = useMemo(() => readPartsView(kind, params), [kind, params]);
   const change = useCallback<ChangeView>(
-    (changes) => {
-      const next = new URLSearchParams(latest.current);
-      for (const [key, value] of Object.entries(changes)) {
-        if (value === undefined || value.length === 0) next.delete(key);
-        else next.set(key, typeof value === 'string' ? value : value.join(','));
-      }
-      latest.current = next;
-      setAddress(next, { replace: true });
-    },
-    [setAddress],
+    (changes) =>
+      changeAddress((before) => {
+        const next = new URLSearchParams(before);
+        for (const [key, value] of Object.entries(changes)) {
+          if (value === undefined || value.length === 0) next.delete(key);
+          else next.set(key, typeof value === 'string' ? value : value.join(','));
+        }
+        return next;
+      }, true),
+    [changeAddress],
   );
   return { view, change };
 }

@@ -166,6 +166,16 @@ describe('the rank page', () => {
     ).toBeInTheDocument();
   });
 
+  it('asks for the noise indices where there is a direct output voltage', async () => {
+    const { router, ranked } = open('/rank?stage=non-inverting');
+    await answer();
+    expect(screen.queryByLabelText('noise index of the gain resistors')).toBeNull();
+    await type('direct output voltage', '2.5 V');
+    await type('noise index of the gain resistors', '-20 dB');
+    await waitFor(() => expect(ranked().at(-1)!.conditions.stage.gainNoiseIndex).toBe(-20));
+    expect(router.state.location.search).toBe('?stage=non-inverting&vout=2.5&nig=-20dB');
+  });
+
   it('changes the stage and what the form asks for', async () => {
     const { ranked } = open('/rank?stage=non-inverting');
     await answer();

@@ -1,6 +1,7 @@
 import { ApiProblem, detailOf } from '../../api/problem';
 import { ContributorPatterns } from '../../components/charts/ContributorPatterns';
 import { sharesOf } from '../../components/charts/shares';
+import { useAddress } from '../../components/useAddress';
 import { useMayDo } from '../../components/useMember';
 import { ConditionsContext } from '../../features/conditions/ConditionsContext';
 import { ConditionsPanel } from '../../features/conditions/ConditionsPanel';
@@ -20,9 +21,10 @@ import { useRanked } from './useRanked';
 
 /** The product's main page: the conditions, the ranking at them, and the picture of the selected part. */
 export function RankPage() {
-  const address = useConditionsAddress();
+  const query = useAddress();
+  const address = useConditionsAddress(query);
   const { isBlank, request, namedId, partId, show, replace, selectPart } = address;
-  const search = useSearchAddress();
+  const search = useSearchAddress(query);
   useStartingConditions(isBlank, show);
   const ranked = useRanked(address, search);
   const { error, words, problems } = ranked;

@@ -54,7 +54,7 @@ describe('the schematic', () => {
   it.each(STAGE_KINDS)('has a field for every value of a %s stage', (kind) => {
     const { stage } = exampleRequest(kind).conditions;
     const { required, optional } = STAGE_FIELDS[stage.topology];
-    const onList = ['network'];
+    const onList = ['network', 'outputVoltage', 'gainNoiseIndex', 'feedbackNoiseIndex'];
     const fields = kind === 'follower' ? ['loadResistance'] : [...required, ...optional];
     const drawn = LAYOUTS[kind].values.map(({ field }) => field as string);
     expect(drawn).toEqual(

@@ -2,7 +2,7 @@ import { useConditionsForm } from '../ConditionsContext';
 import { stageKindOf } from '../stageKind';
 import { SearchFieldInput } from './SearchFieldInput';
 import styles from './SearchFields.module.css';
-import { canBeParallel } from './stageSearch';
+import { canBeParallel, isNetworkLimited } from './stageSearch';
 import type { StageSearchForm } from './useSearchAddress';
 
 /** What a search for whole stages asks beside the conditions. */
@@ -11,9 +11,8 @@ export function StageSearchFields({ form }: { form: StageSearchForm }) {
   return (
     <div role="group" aria-label="Search for whole stages" className={styles.line}>
       <SearchFieldInput form={form} name="gtol" label="Gain within" />
-      <SearchFieldInput form={form} name="nmax" label="network at most" />
+      {isNetworkLimited(stage) && <SearchFieldInput form={form} name="nmax" label="network at most" />}
       {canBeParallel(stage) && <SearchFieldInput form={form} name="par" label="in parallel up to" />}
-      <SearchFieldInput form={form} name="vout" label="direct output voltage" />
       {stageKindOf(stage) !== 'follower' && (
         <span className={styles.label}>
           {stage.topology === 'transimpedance'

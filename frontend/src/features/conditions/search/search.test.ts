@@ -15,7 +15,7 @@ const usualPlace = readSearch(params(''), PLACE_KEYS).values;
 
 describe('the address beside the conditions', () => {
   it('gives back the fields that it was written from, and keeps the rest', () => {
-    const values = { gtol: 0.005, nmax: 47e3, par: 4, vout: -2.5 };
+    const values = { gtol: 0.005, nmax: 47e3, par: 4 };
     const written = withSearch(params('stage=follower'), STAGE_SEARCH_KEYS, values);
     expect(readSearch(params(written.toString()), STAGE_SEARCH_KEYS)).toEqual({
       values,
@@ -55,6 +55,21 @@ describe('a search for whole stages', () => {
     const stated = withValue(example, 'conditions.stage.network.minimumTotal', 2000);
     expect(stageRequest(example, usualSearch).conditions.stage.network.minimumTotal).toBe(500);
     expect(stageRequest(stated, usualSearch).conditions.stage.network.minimumTotal).toBe(2000);
+  });
+
+  it('takes the direct output voltage, but no noise index: those are of the resistors that are found', () => {
+    const stated = withValue(exampleRequest('non-inverting'), 'conditions.stage.outputVoltage', -2.5);
+    const { stage } = stageRequest(
+      withValue(stated, 'conditions.stage.gainNoiseIndex', -20),
+      usualSearch,
+    ).conditions;
+    expect(stage.outputVoltage).toBe(-2.5);
+    expect(stage).not.toHaveProperty('gainNoiseIndex');
+  });
+
+  it('limits no network of a transimpedance stage, whose resistor is wanted as it is', () => {
+    const { conditions } = stageRequest(exampleRequest('transimpedance'), usualSearch);
+    expect(conditions.stage.network.maximumTotal).toBeGreaterThan(1e12);
   });
 
   it('joins channels only where their sources can be joined', () => {

@@ -32,7 +32,6 @@ export const STAGE_SEARCH_KEYS = {
   gtol: stageField('conditions.stage.gainTolerance', 0.01),
   nmax: stageField('conditions.stage.network.maximumTotal', 100e3),
   par: stageField('conditions.stage.parallelMaximum', 1),
-  vout: stageField('conditions.stage.outputVoltage', 0),
 };
 
 /** The place of a resistor; band and temperature are those of the conditions. */

@@ -5,7 +5,7 @@ import type {
   ResistorRankingRequest,
   StageConditions,
 } from '@roothertz/common/conditions';
-import type { SoughtConditions } from '@roothertz/common/noise';
+import { STAGE_SEARCH_FIELDS, type SoughtConditions } from '@roothertz/common/noise';
 import type { SearchContent } from './searchAddress';
 import type { PLACE_KEYS, STAGE_SEARCH_KEYS } from './searchKeys';
 
@@ -14,35 +14,44 @@ export const USUAL_MINIMUM_TOTAL = 500;
 
 /** The search for whole stages at the conditions: the network's resistors are what is to be found. */
 export function stageRequest(
-  { conditions, filter = {} }: RankingRequest,
-  { gtol, nmax, par, vout }: SearchContent<typeof STAGE_SEARCH_KEYS>['values'],
+  { conditions, filter = {}, quantity }: RankingRequest,
+  { gtol, nmax, par }: SearchContent<typeof STAGE_SEARCH_KEYS>['values'],
 ) {
-  const { network, ...stage } = withoutGainResistance(conditions.stage);
+  const { network, ...stage } = withoutNetwork(conditions.stage);
+  const minimumTotal = network?.minimumTotal ?? USUAL_MINIMUM_TOTAL;
   const sought: SoughtConditions = {
     ...conditions,
     stage: {
       ...stage,
       gainTolerance: gtol,
-      network: { minimumTotal: network?.minimumTotal ?? USUAL_MINIMUM_TOTAL, maximumTotal: nmax },
-      parallelMaximum: canBeParallel(conditions.stage) ? par : 1,
-      outputVoltage: vout,
+      network: { minimumTotal, maximumTotal: isNetworkLimited(stage) ? nmax : NO_LIMIT },
+      parallelMaximum: canBeParallel(stage) ? par : 1,
     },
   };
-  return { conditions: sought, filter, resistorFilter: resistorFilterOf(filter) };
+  return { conditions: sought, filter, resistorFilter: resistorFilterOf(filter), quantity };
 }
 
-/** R_g is what is sought. */
-function withoutGainResistance(stage: StageConditions): Omit<StageConditions, 'gainResistance'> {
-  return Object.fromEntries(Object.entries(stage).filter(([field]) => field !== 'gainResistance')) as Omit<
-    StageConditions,
-    'gainResistance'
-  >;
+type Sought = Omit<StageConditions, 'gainResistance' | 'gainNoiseIndex' | 'feedbackNoiseIndex'>;
+
+/** R_g, and which resistors make it and R_f, is what is sought. */
+function withoutNetwork({
+  gainResistance: _sought,
+  gainNoiseIndex: _ofGain,
+  feedbackNoiseIndex: _ofFeedback,
+  ...stage
+}: StageConditions): Sought {
+  return stage;
+}
+
+const NO_LIMIT = STAGE_SEARCH_FIELDS['conditions.stage.network.maximumTotal'].bounds.to;
+
+/** The one resistor of a transimpedance stage is near the wanted value, whatever that is. */
+export function isNetworkLimited({ topology }: Pick<StageConditions, 'topology'>): boolean {
+  return topology !== 'transimpedance';
 }
 
 /** Elsewhere the source sees the networks of joined channels, and the gain isn't that of one. */
-export function canBeParallel({
-  topology,
-}: Pick<RankingRequest['conditions']['stage'], 'topology'>): boolean {
+export function canBeParallel({ topology }: Pick<StageConditions, 'topology'>): boolean {
   return topology === 'non-inverting';
 }
 

@@ -1,5 +1,5 @@
 import { useCallback, useMemo } from 'react';
-import { useSearchParams } from 'react-router-dom';
+import type { Address } from '../../../components/useAddress';
 import {
   readSearch,
   readView,
@@ -20,27 +20,26 @@ export type StageSearchForm = SearchForm<typeof STAGE_SEARCH_KEYS>;
 export type PlaceForm = SearchForm<typeof PLACE_KEYS>;
 
 /** What the address says beside the operating conditions: what is ranked, and the fields of that. */
-export function useSearchAddress() {
-  const [params, setParams] = useSearchParams();
-  const show = useCallback(
-    (view: View) => setParams((current) => withView(current, view), { preventScrollReset: true }),
-    [setParams],
-  );
+export function useSearchAddress(address: Address) {
+  const { params, change } = address;
+  const show = useCallback((view: View) => change((before) => withView(before, view)), [change]);
   return {
     view: readView(params),
     show,
-    stageSearch: useSearchForm(STAGE_SEARCH_KEYS),
-    place: useSearchForm(PLACE_KEYS),
+    stageSearch: useSearchForm(address, STAGE_SEARCH_KEYS),
+    place: useSearchForm(address, PLACE_KEYS),
   };
 }
 
-function useSearchForm<Keys extends SearchKeys>(keys: Keys): SearchForm<Keys> {
-  const [params, setParams] = useSearchParams();
+function useSearchForm<Keys extends SearchKeys>(
+  { params, change: changeAddress }: Address,
+  keys: Keys,
+): SearchForm<Keys> {
   const content = useMemo(() => readSearch(params, keys), [params, keys]);
   const change = useCallback(
     (values: Partial<Record<keyof Keys, number>>) =>
-      setParams((current) => withSearch(current, keys, values), { preventScrollReset: true }),
-    [setParams, keys],
+      changeAddress((before) => withSearch(before, keys, values)),
+    [changeAddress, keys],
   );
   return useMemo(() => ({ ...content, keys, change }), [content, keys, change]);
 }

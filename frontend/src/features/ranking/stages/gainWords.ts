@@ -22,13 +22,25 @@ const LIMITS = 'raise “network at most” or lower “output drives at least�
 
 /** What to change where no network of the library gives the gain. */
 export function nearestGainAdvice(stage: SoughtStage, nearest: number | null): string {
-  if (nearest === null)
-    return `The chosen libraries hold no resistors that keep the network’s limits: ${LIMITS}, tick more lifecycles and approvals under Parts, or add resistors.`;
+  if (nearest === null) return emptyLibraryAdvice(stage);
   const off = Math.abs(nearest / wantedGain(stage) - 1);
-  const told = `The nearest that the library can give within the network’s limits is ${gainText(stage, nearest)}, ${percent(off)} off`;
+  const told = `The nearest that the library can give${isLimited(stage) ? ' within the network’s limits' : ''} is ${gainText(stage, nearest)}, ${percent(off)} off`;
+  const other = isLimited(stage) ? `${LIMITS}, or ask for that` : 'ask for that, or add resistors';
   return off > WIDEST
-    ? `${told}: ${LIMITS}, or ask for that.`
-    : `${told}: widen the tolerance to ${percent(nextRound(off))}, or ${LIMITS}.`;
+    ? `${told}: ${other}.`
+    : `${told}: widen the tolerance to ${percent(nextRound(off))}, or ${isLimited(stage) ? LIMITS : other}.`;
+}
+
+function emptyLibraryAdvice(stage: SoughtStage): string {
+  const more = 'tick more lifecycles, approvals and technologies under Parts, or add resistors';
+  return isLimited(stage)
+    ? `The chosen libraries hold no resistors that keep the network’s limits: ${LIMITS}, ${more}.`
+    : `The chosen libraries hold no resistors: ${more}.`;
+}
+
+/** The one resistor of a transimpedance stage is only held against the wanted value. */
+function isLimited({ topology }: SoughtStage): boolean {
+  return topology !== 'transimpedance';
 }
 
 /** The next number of one digit, so that what is typed from the text is wide enough. */

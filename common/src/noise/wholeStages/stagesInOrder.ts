@@ -1,0 +1,84 @@
+import { PriorityQueue } from '../../numeric/index.js';
+import type { Block, Blocks } from './blocks.js';
+import type { Candidate, FoundStage } from './candidates.js';
+import type { PricedNetwork } from './networks.js';
+import type { Network } from './stageSearch.js';
+
+/** What any stage of an entry has at least. */
+export type Bound = Pick<FoundStage, 'candidate' | 'noise' | 'price'>;
+
+export interface OrderedSearch {
+  candidates: readonly Candidate[];
+  /** the networks for a number of channels in parallel */
+  blocksFor: (channelsInParallel: number) => Blocks;
+  /** what comes first; among equals the other counts */
+  by: 'noise' | 'price';
+  noiseOf: (candidate: Candidate, network: Network) => number;
+  /** Nothing at or above the bound is wanted any more. */
+  isOut: (bound: Bound) => boolean;
+}
+
+type Entry = Bound & ({ block: Block } | { network: PricedNetwork; block?: undefined });
+
+/**
+ * Whole stages in ascending order of noise or price, by best-first search: blocks of networks wait with lower
+ * bounds of noise and price, single networks with both themselves; the least is taken and, if it is a
+ * block, halved. What comes out as a single network is the next stage, and most networks are never looked at.
+ */
+export function* stagesInOrder(search: OrderedSearch): Generator<FoundStage> {
+  const waiting = new Waiting(search);
+  for (let entry = waiting.next(); entry !== undefined; entry = waiting.next()) {
+    const { candidate, block, noise, price } = entry;
+    if (block === undefined) yield { candidate, network: entry.network, noise, price };
+    else waiting.divide(candidate, block);
+  }
+}
+
+class Waiting {
+  private readonly queue = new PriorityQueue<Entry>();
+
+  constructor(private readonly search: OrderedSearch) {
+    for (const candidate of search.candidates)
+      this.addBlock(candidate, search.blocksFor(candidate.channelsInParallel).whole());
+  }
+
+  /** The least entry that is still wanted. */
+  next(): Entry | undefined {
+    let entry = this.queue.take();
+    while (entry !== undefined && this.search.isOut(entry)) entry = this.queue.take();
+    return entry;
+  }
+
+  divide(candidate: Candidate, block: Block): void {
+    const blocks = this.search.blocksFor(candidate.channelsInParallel);
+    const halves = blocks.halves(block);
+    if (halves) for (const half of halves) this.addBlock(candidate, half);
+    else for (const network of blocks.of(block)) this.addNetwork(candidate, network);
+  }
+
+  private addBlock(candidate: Candidate, block: Block): void {
+    this.add(candidate, block.price, (price) => {
+      const corners = block.dip === 0 ? [0] : block.corners.map((corner) => this.noise(candidate, corner));
+      return { candidate, block, price, noise: block.dip * Math.min(...corners) };
+    });
+  }
+
+  private addNetwork(candidate: Candidate, network: PricedNetwork): void {
+    this.add(candidate, network.price, (price) => {
+      return { candidate, network, price, noise: this.noise(candidate, network) };
+    });
+  }
+
+  /** What the price alone rules out is never evaluated. */
+  private add(candidate: Candidate, ofNetwork: number, entryAt: (price: number) => Entry): void {
+    const { isOut, by } = this.search;
+    const price = candidate.price + ofNetwork;
+    if (isOut({ candidate, price, noise: 0 })) return;
+    const entry = entryAt(price);
+    if (!isOut(entry)) this.queue.add(by === 'noise' ? [entry.noise, price] : [price, entry.noise], entry);
+  }
+
+  private noise(candidate: Candidate, network: Network): number {
+    return this.search.noiseOf(candidate, network);
+  }
+}
