@@ -1,13 +1,20 @@
 import { Module } from '@nestjs/common';
 import { TypeOrmModule } from '@nestjs/typeorm';
+import { AuditModule } from '../audit/audit.module.js';
 import { PlansModule } from '../plans/plans.module.js';
 import { Membership } from './entities/membership.entity.js';
+import { MembersController } from './members.controller.js';
+import { MembersService } from './members.service.js';
 import { SeatsService } from './seats.service.js';
+import { TeamChanges } from './team-changes.service.js';
+import { TeamController } from './team.controller.js';
+import { TeamSettingsService } from './team-settings.service.js';
 import { TeamsService } from './teams.service.js';
 
 @Module({
-  imports: [TypeOrmModule.forFeature([Membership]), PlansModule],
-  providers: [SeatsService, TeamsService],
+  imports: [TypeOrmModule.forFeature([Membership]), AuditModule, PlansModule],
+  controllers: [MembersController, TeamController],
+  providers: [MembersService, SeatsService, TeamChanges, TeamSettingsService, TeamsService],
   exports: [SeatsService, TeamsService],
 })
 export class TeamsModule {}

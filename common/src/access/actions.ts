@@ -20,6 +20,8 @@ export const ACTIONS = {
   'conditions.save': { roles: ['admin', 'librarian', 'engineer'], writes: true },
   'prices.read': { roles: 'every member' },
   'prices.edit': { roles: ['admin', 'purchasing'], needs: 'prices', writes: true },
+  'team.read': { roles: 'every member' },
+  'team.manage': { roles: ['admin'] },
   'audit.read': { roles: ['admin'] },
   'billing.read': { roles: ['admin'] },
   'billing.manage': { roles: ['admin'] },

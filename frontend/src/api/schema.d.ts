@@ -676,6 +676,86 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/team": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["getTeam"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch: operations["renameTeam"];
+        trace?: never;
+    };
+    "/api/team/members": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["listTeamMembers"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/team/members/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete: operations["removeTeamMember"];
+        options?: never;
+        head?: never;
+        patch: operations["changeTeamMemberRoles"];
+        trace?: never;
+    };
+    "/api/team/membership": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete: operations["leaveTeam"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/team/owner": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["handOverTeam"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
 }
 export type webhooks = Record<string, never>;
 export interface components {
@@ -860,6 +940,9 @@ export interface components {
             kind: "price-digest" | "part-notice";
             wanted: boolean;
         };
+        ChangeRolesDto: {
+            roles: ("admin" | "librarian" | "purchasing" | "engineer" | "reviewer")[];
+        };
         ChangeStandingsDto: {
             parts: components["schemas"]["StandingChangeDto"][];
         };
@@ -1012,7 +1095,7 @@ export interface components {
             message: string;
         };
         /** @enum {string} */
-        ErrorCode: "request.invalid" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "access.seats" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "import.not-found" | "mail.unknown-link" | "part.stale" | "part.duplicate" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "import.state" | "import.outdated" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "database.unavailable";
+        ErrorCode: "request.invalid" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "access.seats" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "member.not-found" | "import.not-found" | "mail.unknown-link" | "team.last-admin" | "team.owner" | "part.stale" | "part.duplicate" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "import.state" | "import.outdated" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "team.owner-invalid" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "database.unavailable";
         EvaluateStageDto: {
             amplifier: components["schemas"]["AmplifierDto"];
             conditions: components["schemas"]["OperatingConditionsDto"];
@@ -1063,6 +1146,9 @@ export interface components {
             steps: number;
             /** @description Where gain, density and noise figure are stated; inside the band. In Hz. */
             to: number;
+        };
+        HandOverTeamDto: {
+            memberId: string;
         };
         HealthResponseDto: {
             /** @enum {string} */
@@ -1672,6 +1758,9 @@ export interface components {
             /** @description Currencies of offers that don’t count for want of a rate. */
             missing: string[];
         };
+        RenameTeamDto: {
+            name: string;
+        };
         ResistanceAxisDto: {
             /** @description Resistance in series with the source’s voltage, or across its current in a transimpedance stage. In Ω. */
             from: number;
@@ -2045,6 +2134,25 @@ export interface components {
             maximum: number;
             /** @description Lowest total supply voltage, rail to rail. In V. */
             minimum: number;
+        };
+        TeamMemberDto: {
+            email: string;
+            id: string;
+            /** @description The admin who holds the team’s plan. */
+            isOwner: boolean;
+            /** Format: date-time */
+            joinedAt: string;
+            name: string;
+            roles: ("admin" | "librarian" | "purchasing" | "engineer" | "reviewer")[];
+        };
+        TeamMemberListDto: {
+            items: components["schemas"]["TeamMemberDto"][];
+            /** @description How many there are in all, whatever the page holds. */
+            total: number;
+        };
+        TeamResponseDto: {
+            id: string;
+            name: string;
         };
         UpdateConditionsDto: {
             conditions?: components["schemas"]["OperatingConditionsDto"];
@@ -4088,6 +4196,212 @@ export interface operations {
                 content: {
                     "application/json": components["schemas"]["SupplierResponseDto"];
                 };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    getTeam: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TeamResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    renameTeam: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["RenameTeamDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TeamResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    listTeamMembers: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TeamMemberListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    removeTeamMember: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    changeTeamMemberRoles: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChangeRolesDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TeamMemberDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    leaveTeam: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    handOverTeam: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["HandOverTeamDto"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
             };
             /** @description Problem details (RFC 9457) */
             default: {

@@ -30,6 +30,7 @@ export async function seedTeam(
     await manager.insert(Membership, { userId, teamId, roles });
     userIds.push(userId);
   }
+  await manager.update(Team, { id: teamId }, { ownerId: userIds[0] });
   const buyer = members.findIndex(({ roles }) => roles.includes('purchasing'));
   return { teamId, userId: userIds[0], buyerId: userIds[buyer] };
 }

@@ -1,5 +1,13 @@
 import { type Role, ROLES } from '@roothertz/common/access';
-import { Column, Entity, JoinColumn, ManyToOne, PrimaryColumn, type Relation } from 'typeorm';
+import {
+  Column,
+  CreateDateColumn,
+  Entity,
+  JoinColumn,
+  ManyToOne,
+  PrimaryColumn,
+  type Relation,
+} from 'typeorm';
 import { User } from '../../users/entities/user.entity.js';
 import { Team } from './team.entity.js';
 
@@ -21,4 +29,12 @@ export class Membership {
 
   @Column({ type: 'set', enum: ROLES })
   roles: Role[];
+
+  @CreateDateColumn({
+    name: 'joined_at',
+    type: 'datetime',
+    precision: 3,
+    default: () => 'CURRENT_TIMESTAMP(3)',
+  })
+  joinedAt: Date;
 }
