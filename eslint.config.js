@@ -24,6 +24,8 @@ const BACKEND_FEATURES = [
 ];
 const FRONTEND_FEATURES = ['session', 'parts', 'ranking', 'conditions', 'imports', 'prices'];
 
+const PAYMENTS_SDK = { name: 'stripe', message: 'Only backend/src/billing talks to the payment service.' };
+
 /** A feature may use another's service, never its repositories' entities or its DTOs. */
 const backendZones = BACKEND_FEATURES.flatMap((feature) =>
   BACKEND_FEATURES.filter((other) => other !== feature).map((other) => ({
@@ -64,6 +66,8 @@ export default tseslint.config(
             { target: './common', from: ['./backend', './frontend'] },
             { target: './backend', from: './frontend' },
             { target: './frontend', from: './backend' },
+            { target: './backend/src', from: './backend/fakes' },
+            { target: './backend/fakes', from: './backend/src' },
             { target: './frontend/src/features', from: './frontend/src/pages' },
             {
               target: './frontend/src/components',
@@ -108,11 +112,19 @@ export default tseslint.config(
     },
   },
   {
+    files: ['backend/src/**/*.ts'],
+    ignores: ['backend/src/billing/**'],
+    rules: { 'no-restricted-imports': ['error', { paths: [PAYMENTS_SDK] }] },
+  },
+  {
     files: ['backend/**/*.controller.ts'],
     rules: {
       'no-restricted-imports': [
         'error',
-        { paths: ['typeorm', '@nestjs/typeorm'], patterns: ['**/entities/*', '**/*.entity.js'] },
+        {
+          paths: ['typeorm', '@nestjs/typeorm', PAYMENTS_SDK],
+          patterns: ['**/entities/*', '**/*.entity.js'],
+        },
       ],
     },
   },

@@ -24,7 +24,7 @@ const swc = {
 
 export default {
   testEnvironment: 'node',
-  testMatch: ['<rootDir>/src/**/*.spec.ts', '<rootDir>/test/**/*.e2e-spec.ts'],
+  testMatch: ['<rootDir>/{src,fakes}/**/*.spec.ts', '<rootDir>/test/**/*.e2e-spec.ts'],
   transform: { '^.+\\.(t|j)s$': ['@swc/jest', swc] },
   transformIgnorePatterns: [`/node_modules/(?!(${ESM_PACKAGES.join('|')})/)`],
   moduleNameMapper: { '^(\\.{1,2}/.*)\\.js$': '$1' },

@@ -1,4 +1,5 @@
 import { mkdirSync, rmSync, utimesSync, writeFileSync } from 'node:fs';
+import { join } from 'node:path';
 import { inLocal, inRoot } from './paths.mjs';
 import { run } from './processes.mjs';
 import { isStale, leftovers } from './staleness.mjs';
@@ -9,6 +10,13 @@ const stampOf = (name) => inLocal('built', name);
 
 /** In the order in which they need each other. Vite empties its own output. */
 const BUILDS = [
+  {
+    name: 'fakes',
+    folder: join('backend', 'fakes'),
+    workspace: 'backend',
+    script: 'build:fakes',
+    sources: ['payments', 'tsconfig.json'],
+  },
   { name: 'common', sources: ['src', 'package.json', 'tsconfig.json', 'tsconfig.build.json'] },
   {
     name: 'backend',
@@ -23,22 +31,22 @@ const BUILDS = [
   },
 ];
 
-const isBuildStale = ({ name, sources, needs }) =>
+const isBuildStale = ({ name, folder = name, sources, needs }) =>
   isStale({
     stamp: stampOf(name),
-    output: inRoot(name, 'dist'),
+    output: inRoot(folder, 'dist'),
     sources: [
-      ...sources.map((source) => inRoot(name, source)),
+      ...sources.map((source) => inRoot(folder, source)),
       ...SHARED_SOURCES.map((source) => inRoot(source)),
       ...(needs ? [stampOf(needs)] : []),
     ],
   });
 
 /** The stamp carries the time at which the build began: what is edited meanwhile counts as newer. */
-async function build({ name, emptiesItsOutput }) {
+async function build({ name, folder = name, workspace = name, script = 'build', emptiesItsOutput }) {
   const began = Date.now();
-  await run('npm', ['run', 'build', '-w', name], { cwd: inRoot() });
-  if (!emptiesItsOutput) leftovers(inRoot(name, 'dist'), began).forEach((path) => rmSync(path));
+  await run('npm', ['run', script, '-w', workspace], { cwd: inRoot() });
+  if (!emptiesItsOutput) leftovers(inRoot(folder, 'dist'), began).forEach((path) => rmSync(path));
   mkdirSync(inLocal('built'), { recursive: true });
   writeFileSync(stampOf(name), '');
   utimesSync(stampOf(name), began / 1000, began / 1000);

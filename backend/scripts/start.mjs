@@ -5,6 +5,7 @@ import { startMailCatcher } from './mail-catcher.mjs';
 import { createDatabase, ensureMariadbInstalled, startMariadb } from './mariadb.mjs';
 import { endOrphans } from './orphans.mjs';
 import { ensurePackages, refuseOldNode } from './packages.mjs';
+import { startPayments } from './payments.mjs';
 import { say } from './steps.mjs';
 import { expectStop, refuseWhenEnding, supervise } from './supervision.mjs';
 
@@ -22,9 +23,10 @@ await supervise(async () => {
   await buildStale(['common', 'backend', 'frontend']);
   await prepareDatabase(environment);
   const mail = await mailCatcher();
-  const { ended } = await serve(address, { ...environment, ...mail?.environment });
+  const payments = await paymentStandIn(address);
+  const { ended } = await serve(address, { ...environment, ...mail?.environment, ...payments?.environment });
   expectStop();
-  welcome(address, mail);
+  welcome(address, mail, payments);
   const { code } = await ended;
   refuseWhenEnding();
   say(`The server ended with code ${code}.`);
@@ -49,9 +51,17 @@ async function mailCatcher() {
   return startMailCatcher({ name: 'mail', preferredPorts: { smtp: 33_025, web: 33_080 } });
 }
 
-function welcome({ url }, mail) {
+/** Not in production, nor where STRIPE_SECRET_KEY opens the service itself. */
+async function paymentStandIn(address) {
+  const { NODE_ENV, STRIPE_SECRET_KEY } = process.env;
+  if (NODE_ENV === 'production' || STRIPE_SECRET_KEY) return undefined;
+  return startPayments({ name: 'payments', preferredPort: 33_090, address });
+}
+
+function welcome({ url }, mail, payments) {
   say(`\nRoothertz is ready: ${url}  (Ctrl-C stops it)`);
   if (mail) say(`E-mails that it sends are caught and shown at ${mail.url}`);
+  if (payments) say(`Plans are paid at a local stand-in of the payment service: ${payments.url}`);
   if (process.env.NODE_ENV === 'production') return;
   say('Demo accounts, all with the password quiet-bench-2026:');
   for (const role of DEMO_ROLES) say(`  ${role}@tarnfield.example`);

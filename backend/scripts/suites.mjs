@@ -4,6 +4,7 @@ import { buildStale } from './builds.mjs';
 import { startMailCatcher } from './mail-catcher.mjs';
 import { createDatabase } from './mariadb.mjs';
 import { inLocal, inRoot } from './paths.mjs';
+import { startPayments } from './payments.mjs';
 import { freePort } from './ports.mjs';
 import { launch, runToEnd } from './processes.mjs';
 import { forget, readJson, remember } from './records.mjs';
@@ -11,6 +12,7 @@ import { countResults } from './results.mjs';
 
 const PREFERRED_E2E_PORT = 33_320;
 const PREFERRED_MAIL_PORTS = { smtp: 33_026, web: 33_081 };
+const PAYMENTS = { name: 'payments-test', preferredPort: 33_091 };
 
 /** Each suite answers how many of its tests passed and failed. */
 export const SUITES = {
@@ -39,7 +41,8 @@ async function runJourneys({ server, chromium, environment }) {
   await prepareDatabase(env);
   const address = readAddress({ PORT: String(await freePort(PREFERRED_E2E_PORT)) });
   const mail = await startMailCatcher({ name: 'mail-test', preferredPorts: PREFERRED_MAIL_PORTS });
-  await serve(address, { ...env, ...mail.environment });
+  const payments = await startPayments({ ...PAYMENTS, address, fresh: true });
+  await serve(address, { ...env, ...mail.environment, ...payments.environment });
   const browser = {
     ...environment,
     E2E_BASE_URL: address.url,

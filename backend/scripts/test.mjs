@@ -14,7 +14,8 @@ import { closeAll, refuseWhenEnding, supervise } from './supervision.mjs';
 const QUICK = ['--innodb-flush-log-at-trx-commit=0', '--innodb-doublewrite=0'];
 
 /** Settings of the application in the caller's environment, which must not steer the tests. */
-const OWN_SETTINGS = /^(DB_.*|PORT|HOST|NODE_ENV|JWT_SECRET|PUBLIC_ORIGIN|TRUST_PROXY|SMTP_.*|MAIL_FROM)$/;
+const OWN_SETTINGS =
+  /^(DB_.*|PORT|HOST|NODE_ENV|JWT_SECRET|PUBLIC_ORIGIN|TRUST_PROXY|SMTP_.*|MAIL_FROM|STRIPE_.*)$/;
 
 await supervise(async () => {
   const names = readNames(process.argv.slice(2));

@@ -5,6 +5,7 @@ import { ThrottlerModule } from '@nestjs/throttler';
 import { AuditModule } from './audit/audit.module.js';
 import { AuthModule } from './auth/auth.module.js';
 import { JwtAuthGuard } from './auth/jwt-auth.guard.js';
+import { BillingModule } from './billing/billing.module.js';
 import { ConditionsModule } from './conditions/conditions.module.js';
 import { ConfigModule } from './config/config.module.js';
 import { DatabaseModule } from './database/database.module.js';
@@ -27,6 +28,7 @@ const REQUESTS_A_MINUTE = 600;
     ThrottlerModule.forRoot([{ ttl: 60_000, limit: REQUESTS_A_MINUTE }]),
     AuditModule,
     AuthModule,
+    BillingModule,
     ConditionsModule,
     HealthModule,
     ImportsModule,

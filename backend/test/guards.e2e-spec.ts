@@ -11,13 +11,21 @@ interface Route {
   action?: string;
 }
 
-const OPEN_ROUTES = ['getHealth', 'getUnsubscription', 'signIn', 'signOut', 'unsubscribe'];
+const OPEN_ROUTES = [
+  'getHealth',
+  'getUnsubscription',
+  'receiveBillingEvent',
+  'signIn',
+  'signOut',
+  'unsubscribe',
+];
 const OPEN_ADDRESSES = [
   'post /api/auth/sign-in',
   'post /api/auth/sign-out',
   'get /api/health',
   'get /api/mail/unsubscribe/:token',
   'post /api/mail/unsubscribe/:token',
+  'post /api/billing/webhook',
 ];
 
 describe('guards', () => {
@@ -34,7 +42,7 @@ describe('guards', () => {
     expect(routes.filter(({ isPublic, action }) => isPublic === (action !== undefined))).toEqual([]);
   });
 
-  it('opens nothing to the public but the ways into an account, links in e-mails and the health', () => {
+  it('opens nothing to the public but the ways into an account, links in e-mails, signed events and the health', () => {
     const open = routesOf(app).filter(({ isPublic }) => isPublic);
     expect(open.map(({ name }) => name).sort()).toEqual(OPEN_ROUTES);
   });

@@ -11,6 +11,7 @@ import {
   Max,
   Min,
   MinLength,
+  ValidateBy,
   ValidateIf,
 } from 'class-validator';
 
@@ -18,6 +19,7 @@ const HOPS_OR_NETWORKS =
   /^(\d{1,2}|[\da-f.:/]+|loopback|linklocal|uniquelocal)(, ?([\da-f.:/]+|loopback|linklocal|uniquelocal))*$/i;
 
 const MAILBOX = /^([^<>"\r\n]+ <[^\s<>@]+@[^\s<>@]+>|[^\s<>@]+@[^\s<>@]+)$/;
+const LOOPBACK = /^(localhost|127\..*|\[?::1\]?|0\.0\.0\.0)$/i;
 
 /** Everything that the environment may say: each property is named as its variable. */
 export class AppConfig {
@@ -113,6 +115,36 @@ export class AppConfig {
   @Matches(MAILBOX)
   MAIL_FROM: string;
 
+  /** The key of the payment service; left out = nothing can be paid. */
+  @NotInProduction(/fake/, 'a key of the payment service itself')
+  @IsOptional()
+  @IsNotEmpty()
+  STRIPE_SECRET_KEY?: string;
+
+  /** What events of the payment service are signed with; never left out where it has a key. */
+  @NotInProduction(/fake/, 'a secret of the payment service itself')
+  @ValidateIf(({ STRIPE_SECRET_KEY }: AppConfig) => STRIPE_SECRET_KEY !== undefined)
+  @IsNotEmpty()
+  STRIPE_WEBHOOK_SECRET?: string;
+
+  @NotInProduction(LOOPBACK, 'the payment service itself and no stand-in')
+  @IsNotEmpty()
+  STRIPE_HOST = 'api.stripe.com';
+
+  @Type(() => Number)
+  @Max(65535)
+  @Min(1)
+  @IsInt()
+  STRIPE_PORT = 443;
+
+  @NotInProduction(/^http$/, 'https')
+  @IsIn(['http', 'https'])
+  STRIPE_PROTOCOL: 'http' | 'https' = 'https';
+
+  /** Finds the price of a seat a month at the payment service. */
+  @Matches(/^[\w-]{1,200}$/)
+  STRIPE_PRICE_LOOKUP_KEY = 'roothertz_team_seat_month';
+
   get isProduction(): boolean {
     return isProduction(this);
   }
@@ -122,6 +154,18 @@ export class AppConfig {
     const host = ['0.0.0.0', '::'].includes(this.HOST) ? 'localhost' : this.HOST;
     return this.PUBLIC_ORIGIN ?? `http://${host.includes(':') ? `[${host}]` : host}:${this.PORT}`;
   }
+}
+
+/** Refuses in production what is for trying out only. */
+function NotInProduction(refused: RegExp, expected: string): PropertyDecorator {
+  const isFine = (value: unknown, config: AppConfig) => !isProduction(config) || !refused.test(String(value));
+  return ValidateBy(
+    {
+      name: 'notInProduction',
+      validator: { validate: (value, args) => isFine(value, args?.object as AppConfig) },
+    },
+    { message: ({ property }) => `${property} must be ${expected} in production` },
+  );
 }
 
 function isProduction({ NODE_ENV }: AppConfig): boolean {

@@ -51,10 +51,29 @@ describe('readConfig', () => {
     ['SMTP_PORT', '99999'],
     ['SMTP_SECURE', 'perhaps'],
     ['MAIL_FROM', 'nobody'],
+    ['STRIPE_PORT', '99999'],
+    ['STRIPE_PROTOCOL', 'gopher'],
   ])('names %s and hides its value %s when it is wrong', (name, value) => {
     const message = messageOf(() => readConfig({ [name]: value }));
     expect(message).toContain(name);
     expect(message).not.toContain(value);
+  });
+
+  it.each([
+    ['STRIPE_HOST', '127.0.0.1'],
+    ['STRIPE_HOST', 'localhost'],
+    ['STRIPE_PROTOCOL', 'http'],
+    ['STRIPE_SECRET_KEY', 'sk_fake_7f3a'],
+    ['STRIPE_WEBHOOK_SECRET', 'whsec_fake_7f3a'],
+  ])('takes %s = %s of a stand-in of the payment service anywhere but in production', (name, value) => {
+    const keys = { STRIPE_SECRET_KEY: 'sk_live_x', STRIPE_WEBHOOK_SECRET: 'whsec_x' };
+    expect(readConfig({ ...keys, [name]: value })).toHaveProperty(name, value);
+    expect(readConfig({ ...production, ...keys })).toMatchObject({ ...keys, STRIPE_HOST: 'api.stripe.com' });
+    expect(() => readConfig({ ...production, ...keys, [name]: value })).toThrow(name);
+  });
+
+  it('refuses a key of the payment service without the secret of its events', () => {
+    expect(() => readConfig({ STRIPE_SECRET_KEY: 'sk_test_x' })).toThrow('STRIPE_WEBHOOK_SECRET');
   });
 
   it('names everything that is wrong at once', () => {

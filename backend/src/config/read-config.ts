@@ -25,6 +25,12 @@ const NAMES = [
   'SMTP_PASSWORD',
   'SMTP_SECURE',
   'MAIL_FROM',
+  'STRIPE_SECRET_KEY',
+  'STRIPE_WEBHOOK_SECRET',
+  'STRIPE_HOST',
+  'STRIPE_PORT',
+  'STRIPE_PROTOCOL',
+  'STRIPE_PRICE_LOOKUP_KEY',
 ] as const satisfies readonly (keyof AppConfig)[];
 
 /**

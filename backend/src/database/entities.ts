@@ -1,4 +1,5 @@
 import { AuditEntry } from '../audit/entities/audit-entry.entity.js';
+import { BillingEvent } from '../billing/entities/billing-event.entity.js';
 import { SavedConditions } from '../conditions/entities/saved-conditions.entity.js';
 import { SavedConditionsPart } from '../conditions/entities/saved-conditions-part.entity.js';
 import { Import } from '../imports/entities/import.entity.js';
@@ -26,6 +27,7 @@ export const ENTITIES = [
   User,
   Membership,
   Subscription,
+  BillingEvent,
   Library,
   Part,
   OpAmp,

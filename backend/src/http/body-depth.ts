@@ -14,5 +14,5 @@ export function refuseDeepBodies(request: Request, _: Response, next: NextFuncti
 }
 
 function isNested(value: unknown): value is object {
-  return typeof value === 'object' && value !== null;
+  return typeof value === 'object' && value !== null && !Buffer.isBuffer(value);
 }

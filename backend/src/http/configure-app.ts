@@ -1,5 +1,6 @@
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import compression from 'compression';
+import express from 'express';
 import cookieParser from 'cookie-parser';
 import { AppConfig } from '../config/app-config.js';
 import { ProblemFilter } from '../shared/errors/problem-filter.js';
@@ -10,6 +11,9 @@ import { originCheck } from './origin-check.js';
 import { BUILT_PAGES, pageFallback, pageFiles } from './pages.js';
 import { neverStored, securityHeaders } from './security-headers.js';
 
+/** What is sent here is signed byte by byte, and so isn't read as JSON before its signature is. */
+const SIGNED_BODIES = '/api/billing/webhook';
+
 /** Everything around the routes, in the order in which a request meets it. The app is made without a body parser. */
 export function configureApp(app: NestExpressApplication): void {
   const config = app.get(AppConfig);
@@ -19,7 +23,8 @@ export function configureApp(app: NestExpressApplication): void {
   app.use(correlationId, securityHeaders(), compression());
   app.use(pageFiles(pages), pageFallback(pages));
   app.use('/api', neverStored);
-  app.use(originCheck(config.PUBLIC_ORIGIN), cookieParser());
+  app.use(originCheck(config.PUBLIC_ORIGIN, SIGNED_BODIES), cookieParser());
+  app.use(SIGNED_BODIES, express.raw({ type: () => true, limit: '1mb' }));
   app.useBodyParser('json', { limit: '1mb' });
   app.use(refuseDeepBodies);
   app.useGlobalPipes(createValidationPipe());

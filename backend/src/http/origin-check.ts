@@ -3,12 +3,17 @@ import { DomainError } from '../shared/errors/domain-error.js';
 
 const SAFE_METHODS = ['GET', 'HEAD', 'OPTIONS'];
 
-/** Refuses requests that change something when a page of another origin sends them. */
-export function originCheck(publicOrigin: string | undefined): RequestHandler {
+/**
+ * Refuses requests that change something when a page of another origin sends them.
+ *
+ * @param signedPath where the sender is known by a signature, which no page can make
+ */
+export function originCheck(publicOrigin: string | undefined, signedPath: string): RequestHandler {
   return (request: Request, _: Response, next: NextFunction) => {
     const origin = request.get('Origin');
     const foreign = origin !== undefined && !isOwn(origin, request, publicOrigin);
-    if (foreign && !SAFE_METHODS.includes(request.method))
+    const open = SAFE_METHODS.includes(request.method) || request.path === signedPath;
+    if (foreign && !open)
       throw new DomainError('access.origin', 'This request comes from a page of another origin.');
     next();
   };

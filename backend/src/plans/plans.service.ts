@@ -12,6 +12,11 @@ export class PlansService {
     return this.subscriptions.findOneBy({ teamId });
   }
 
+  /** The subscription of a customer at the payment service. */
+  findByCustomer(customerId: string): Promise<Subscription | null> {
+    return this.subscriptions.findOneBy({ customerId });
+  }
+
   /** The team's plan now. */
   async stateOf(teamId: number): Promise<PlanState> {
     return planState(await this.find(teamId), new Date());

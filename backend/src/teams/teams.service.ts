@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
-import type { EntityManager, Repository } from 'typeorm';
+import { type EntityManager, Raw, type Repository } from 'typeorm';
 import { PlansService } from '../plans/plans.service.js';
 import { Membership } from './entities/membership.entity.js';
 import { Team } from './entities/team.entity.js';
@@ -29,6 +29,15 @@ export class TeamsService {
       relations: { user: true, team: true },
     });
     return membership && this.toMember(membership);
+  }
+
+  /** The team's admins, as they stand in the transaction. */
+  async findAdmins(manager: EntityManager, teamId: number): Promise<Member[]> {
+    const memberships = await manager.find(Membership, {
+      where: { teamId, roles: Raw((roles) => `FIND_IN_SET('admin', ${roles})`) },
+      relations: { user: true, team: true },
+    });
+    return Promise.all(memberships.map((membership) => this.toMember(membership)));
   }
 
   /** Holds the team until the transaction ends, so that what its plan limits is counted by one at a time. */

@@ -84,6 +84,134 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/billing": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["getBilling"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/billing/checkout": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["openCheckout"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/billing/portal": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["openBillingPortal"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/billing/seats": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put: operations["changeSeats"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/billing/seats/preview": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["previewSeats"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/billing/sync": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["syncBilling"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/billing/trial": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["startTrial"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/billing/webhook": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["receiveBillingEvent"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/conditions": {
         parameters: {
             query?: never;
@@ -930,6 +1058,38 @@ export interface components {
             /** @description Where the band ends; the −3 dB frequency of a low-pass. In Hz. */
             upper: number;
         };
+        BillingPageDto: {
+            url: string;
+        };
+        BillingResponseDto: {
+            /**
+             * Format: date-time
+             * @description When the subscription is set to end, or has ended.
+             */
+            endsAt: string | null;
+            /** @description Whether the plan was granted without payment. */
+            granted: boolean;
+            /** @description Whether the payment service knows the team. */
+            hasCustomer: boolean;
+            /** @description Whether the team may start its one trial. */
+            mayTry: boolean;
+            /** Format: date-time */
+            paidUntil: string | null;
+            /** @description null = the payment service doesn’t answer. */
+            payment: components["schemas"]["PaymentDto"] | null;
+            /** @enum {string} */
+            plan: "free" | "team";
+            /** @description People that the plan allows. */
+            seats: number;
+            /** @enum {string} */
+            standing: "active" | "trial" | "trial-over" | "past-due" | "unpaid" | "cancelled";
+            /**
+             * Format: date-time
+             * @description When the standing ends by itself.
+             */
+            standingUntil: string | null;
+            usedSeats: number;
+        };
         BreakResponseDto: {
             minimumQuantity: number;
             /** @description Decimal number with four decimals. */
@@ -940,8 +1100,14 @@ export interface components {
             kind: "price-digest" | "part-notice";
             wanted: boolean;
         };
+<<<<<<< HEAD
         ChangeRolesDto: {
             roles: ("admin" | "librarian" | "purchasing" | "engineer" | "reviewer")[];
+=======
+        ChangeSeatsDto: {
+            prorationDate: number;
+            seats: number;
+>>>>>>> 465ed1c (Plans are paid through Stripe: checkout, seats with the proration said before, portal, signed events that are hints only; npm start runs the stand-in)
         };
         ChangeStandingsDto: {
             parts: components["schemas"]["StandingChangeDto"][];
@@ -1095,7 +1261,11 @@ export interface components {
             message: string;
         };
         /** @enum {string} */
+<<<<<<< HEAD
         ErrorCode: "request.invalid" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "access.seats" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "member.not-found" | "import.not-found" | "mail.unknown-link" | "team.last-admin" | "team.owner" | "part.stale" | "part.duplicate" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "import.state" | "import.outdated" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "team.owner-invalid" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "database.unavailable";
+=======
+        ErrorCode: "request.invalid" | "billing.event" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "billing.declined" | "access.seats" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "import.not-found" | "mail.unknown-link" | "part.stale" | "part.duplicate" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "billing.trial-used" | "billing.subscribed" | "billing.not-subscribed" | "billing.outdated" | "import.state" | "import.outdated" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "billing.seats" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "billing.unavailable" | "database.unavailable";
+>>>>>>> 465ed1c (Plans are paid through Stripe: checkout, seats with the proration said before, portal, signed events that are hints only; npm start runs the stand-in)
         EvaluateStageDto: {
             amplifier: components["schemas"]["AmplifierDto"];
             conditions: components["schemas"]["OperatingConditionsDto"];
@@ -1255,6 +1425,23 @@ export interface components {
             undoneAt: string | null;
             undoneBy: components["schemas"]["MemberDto"] | null;
         };
+        InvoiceDto: {
+            /**
+             * @description Below zero = a credit.
+             * @example 19.00
+             */
+            amount: string;
+            /** Format: date-time */
+            createdAt: string;
+            /** @example EUR */
+            currency: string;
+            id: string;
+            number: string | null;
+            /** @example paid */
+            status: string;
+            /** @description Where the payment service shows it. */
+            url: string | null;
+        };
         MailPreferenceDto: {
             /** @enum {string} */
             kind: "price-digest" | "part-notice";
@@ -1279,6 +1466,15 @@ export interface components {
         MemberDto: {
             id: string;
             name: string;
+        };
+        MoneyDto: {
+            /**
+             * @description Below zero = a credit.
+             * @example 19.00
+             */
+            amount: string;
+            /** @example EUR */
+            currency: string;
         };
         NetworkDto: {
             /** @description The least feedback network that the output can drive; a lower one is marked. In Ω. */
@@ -1310,6 +1506,17 @@ export interface components {
              * @enum {string|null}
              */
             technology: "metal-foil" | "thin-film" | "metal-film" | "wirewound" | "thick-film" | "carbon-film" | "carbon-composition" | null;
+        };
+        NextInvoiceDto: {
+            /**
+             * @description Below zero = a credit.
+             * @example 19.00
+             */
+            amount: string;
+            /** Format: date-time */
+            at: string | null;
+            /** @example EUR */
+            currency: string;
         };
         NoticeDto: {
             /** @enum {string} */
@@ -1435,6 +1642,13 @@ export interface components {
             current: components["schemas"]["OfferResponseDto"][];
             /** @description The closed ones, the latest first. */
             history: components["schemas"]["OfferResponseDto"][];
+        };
+        PaymentDto: {
+            /** @description The newest first. */
+            invoices: components["schemas"]["InvoiceDto"][];
+            next: components["schemas"]["NextInvoiceDto"] | null;
+            /** @description What a seat costs a month. */
+            seatPrice: components["schemas"]["MoneyDto"];
         };
         PriceBreakDto: {
             /** @description Pieces from which on the unit price holds. */
@@ -1951,6 +2165,17 @@ export interface components {
             dated?: string;
             rates: components["schemas"]["RateDto"][];
         };
+        SeatPreviewDto: {
+            /** @description What is charged at once; below zero = credited to the next invoices. */
+            dueNow: components["schemas"]["MoneyDto"];
+            /** @description What each month costs from then on. */
+            monthly: components["schemas"]["MoneyDto"];
+            prorationDate: number;
+            seats: number;
+        };
+        SeatsDto: {
+            seats: number;
+        };
         SessionResponseDto: {
             /** @enum {string} */
             plan: "free" | "team";
@@ -2392,6 +2617,240 @@ export interface operations {
         };
     };
     signOut: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    getBilling: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BillingResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    openCheckout: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SeatsDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BillingPageDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    openBillingPortal: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BillingPageDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    changeSeats: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChangeSeatsDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BillingResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    previewSeats: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SeatsDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SeatPreviewDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    syncBilling: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BillingResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    startTrial: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BillingResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    receiveBillingEvent: {
         parameters: {
             query?: never;
             header?: never;

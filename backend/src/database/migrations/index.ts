@@ -7,6 +7,7 @@ import { CreatePrices1796083200000 } from './1796083200000-CreatePrices.js';
 import { CreateImports1796083300000 } from './1796083300000-CreateImports.js';
 import { CreateMail1796090100000 } from './1796090100000-CreateMail.js';
 import { CreateSubscriptions1796090300000 } from './1796090300000-CreateSubscriptions.js';
+import { CreateBillingEvents1796090310000 } from './1796090310000-CreateBillingEvents.js';
 import { NameAuditObjects1796090600000 } from './1796090600000-NameAuditObjects.js';
 import { AddTeamOwners1796090600100 } from './1796090600100-AddTeamOwners.js';
 import { AddPartsOfConditions1796090900000 } from './1796090900000-AddPartsOfConditions.js';
@@ -23,6 +24,7 @@ export const MIGRATIONS = [
   CreateImports1796083300000,
   CreateMail1796090100000,
   CreateSubscriptions1796090300000,
+  CreateBillingEvents1796090310000,
   NameAuditObjects1796090600000,
   AddTeamOwners1796090600100,
   AddPartsOfConditions1796090900000,

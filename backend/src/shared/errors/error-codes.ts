@@ -1,10 +1,12 @@
 /** Every way in which a request can fail: the status and the title that its problem details carry. */
 export const ERROR_CODES = {
   'request.invalid': { status: 400, title: 'Invalid request' },
+  'billing.event': { status: 400, title: 'Unsigned event' },
   'session.missing': { status: 401, title: 'Not signed in' },
   'session.wrong-credentials': { status: 401, title: 'Wrong e-mail or password' },
   'access.plan': { status: 402, title: 'Not in the team’s plan' },
   'access.read-only': { status: 402, title: 'Read-only' },
+  'billing.declined': { status: 402, title: 'Card declined' },
   'access.seats': { status: 402, title: 'No seat left' },
   'plan.saved-conditions': { status: 402, title: 'Not in the team’s plan' },
   'session.no-team': { status: 403, title: 'No team' },
@@ -29,6 +31,10 @@ export const ERROR_CODES = {
   'supplier.duplicate': { status: 409, title: 'Supplier exists already' },
   'offer.stale': { status: 409, title: 'Offer changed meanwhile' },
   'offer.duplicate': { status: 409, title: 'Offer exists already' },
+  'billing.trial-used': { status: 409, title: 'No trial left' },
+  'billing.subscribed': { status: 409, title: 'Has a plan already' },
+  'billing.not-subscribed': { status: 409, title: 'No paid plan' },
+  'billing.outdated': { status: 409, title: 'Costs changed meanwhile' },
   'import.state': { status: 409, title: 'Not now' },
   'import.outdated': { status: 409, title: 'Library changed meanwhile' },
   'import.too-large': { status: 413, title: 'List too large' },
@@ -38,11 +44,16 @@ export const ERROR_CODES = {
   'conditions.invalid': { status: 422, title: 'Invalid operating conditions' },
   'offer.invalid': { status: 422, title: 'Invalid offer' },
   'rates.invalid': { status: 422, title: 'Invalid exchange rates' },
+<<<<<<< HEAD
   'team.owner-invalid': { status: 422, title: 'Not an admin' },
+=======
+  'billing.seats': { status: 422, title: 'Seats are taken' },
+>>>>>>> 465ed1c (Plans are paid through Stripe: checkout, seats with the proration said before, portal, signed events that are hints only; npm start runs the stand-in)
   'import.unreadable': { status: 422, title: 'Unreadable list' },
   'import.mapping': { status: 422, title: 'Invalid columns' },
   'request.too-many': { status: 429, title: 'Too many requests' },
   'server.failed': { status: 500, title: 'Internal error' },
+  'billing.unavailable': { status: 503, title: 'Payment service not available' },
   'database.unavailable': { status: 503, title: 'Database not available' },
 } as const satisfies Record<string, { status: number; title: string }>;
 
