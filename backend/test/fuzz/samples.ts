@@ -136,11 +136,9 @@ export const SAMPLES: Record<string, unknown[]> = {
       frequency: { from: 1, to: 1e5, steps: 3 },
     },
   ],
-<<<<<<< HEAD
   'patch /api/team': [{ name: 'Weir & Sons' }],
   'patch /api/team/members/{id}': [{ roles: ['admin', 'librarian', 'engineer'] }],
   'post /api/team/owner': [{ memberId: '1' }],
-=======
   'post /api/billing/trial': [{}],
   'post /api/billing/checkout': [{ seats: 3 }],
   'post /api/billing/portal': [{}],
@@ -148,7 +146,6 @@ export const SAMPLES: Record<string, unknown[]> = {
   'post /api/billing/seats/preview': [{ seats: 4 }],
   'put /api/billing/seats': [{ seats: 4, prorationDate: 1_767_225_600 }],
   'post /api/billing/webhook': [{ id: 'evt_1', type: 'invoice.paid' }],
->>>>>>> 465ed1c (Plans are paid through Stripe: checkout, seats with the proration said before, portal, signed events that are hints only; npm start runs the stand-in)
   'post /api/suppliers': [{ name: 'Brook & Weir' }],
   'post /api/mail/unsubscribe/{token}': [{}],
   'put /api/mail/preferences': [{ kind: 'price-digest', wanted: false }],

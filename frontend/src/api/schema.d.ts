@@ -1100,14 +1100,12 @@ export interface components {
             kind: "price-digest" | "part-notice";
             wanted: boolean;
         };
-<<<<<<< HEAD
         ChangeRolesDto: {
             roles: ("admin" | "librarian" | "purchasing" | "engineer" | "reviewer")[];
-=======
+        };
         ChangeSeatsDto: {
             prorationDate: number;
             seats: number;
->>>>>>> 465ed1c (Plans are paid through Stripe: checkout, seats with the proration said before, portal, signed events that are hints only; npm start runs the stand-in)
         };
         ChangeStandingsDto: {
             parts: components["schemas"]["StandingChangeDto"][];
@@ -1261,11 +1259,7 @@ export interface components {
             message: string;
         };
         /** @enum {string} */
-<<<<<<< HEAD
-        ErrorCode: "request.invalid" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "access.seats" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "member.not-found" | "import.not-found" | "mail.unknown-link" | "team.last-admin" | "team.owner" | "part.stale" | "part.duplicate" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "import.state" | "import.outdated" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "team.owner-invalid" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "database.unavailable";
-=======
-        ErrorCode: "request.invalid" | "billing.event" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "billing.declined" | "access.seats" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "import.not-found" | "mail.unknown-link" | "part.stale" | "part.duplicate" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "billing.trial-used" | "billing.subscribed" | "billing.not-subscribed" | "billing.outdated" | "import.state" | "import.outdated" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "billing.seats" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "billing.unavailable" | "database.unavailable";
->>>>>>> 465ed1c (Plans are paid through Stripe: checkout, seats with the proration said before, portal, signed events that are hints only; npm start runs the stand-in)
+        ErrorCode: "request.invalid" | "billing.event" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "billing.declined" | "access.seats" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "member.not-found" | "import.not-found" | "mail.unknown-link" | "team.last-admin" | "team.owner" | "part.stale" | "part.duplicate" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "billing.trial-used" | "billing.subscribed" | "billing.not-subscribed" | "billing.outdated" | "import.state" | "import.outdated" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "team.owner-invalid" | "billing.seats" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "billing.unavailable" | "database.unavailable";
         EvaluateStageDto: {
             amplifier: components["schemas"]["AmplifierDto"];
             conditions: components["schemas"]["OperatingConditionsDto"];

@@ -44,11 +44,8 @@ export const ERROR_CODES = {
   'conditions.invalid': { status: 422, title: 'Invalid operating conditions' },
   'offer.invalid': { status: 422, title: 'Invalid offer' },
   'rates.invalid': { status: 422, title: 'Invalid exchange rates' },
-<<<<<<< HEAD
   'team.owner-invalid': { status: 422, title: 'Not an admin' },
-=======
   'billing.seats': { status: 422, title: 'Seats are taken' },
->>>>>>> 465ed1c (Plans are paid through Stripe: checkout, seats with the proration said before, portal, signed events that are hints only; npm start runs the stand-in)
   'import.unreadable': { status: 422, title: 'Unreadable list' },
   'import.mapping': { status: 422, title: 'Invalid columns' },
   'request.too-many': { status: 429, title: 'Too many requests' },
