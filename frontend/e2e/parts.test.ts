@@ -157,6 +157,30 @@ describe('the parts', () => {
     await close();
   });
 
+  it('are chosen, retired in one act and brought back by Undo', async () => {
+    const { page, problems, close } = await visit(browser);
+    await signIn(page, 'librarian', '/parts');
+    const partNumber = uniqueNumber();
+    const address = await createPart(page, partNumber);
+    await page.goto(`/parts?library=team&search=${partNumber}`);
+    await page.getByRole('checkbox', { name: 'Choose all parts listed' }).click();
+    const bar = page.getByRole('region', { name: 'Chosen parts' });
+    await bar.getByRole('button', { name: 'Retire' }).click();
+    await bar.getByText('Retires 1 part: obsolete and not approved.').waitFor();
+    await screenshot(page, 'parts-retire');
+    await bar.getByRole('button', { name: 'Retire 1 part' }).click();
+    await page.getByText(`${partNumber} is retired`).waitFor();
+    await page.goto(address);
+    await page.getByText(/obsolete · not approved/).waitFor();
+    await page.getByRole('button', { name: 'Bring back' }).click();
+    await page.getByText(/active · approved/).waitFor();
+    await page.getByRole('button', { name: 'Undo' }).click();
+    await page.getByText(/obsolete · not approved/).waitFor();
+    await removePart(page, address);
+    expect(problems).toEqual([]);
+    await close();
+  });
+
   it('warn before unsaved changes are left', async () => {
     const { page, problems, close } = await visit(browser);
     await signIn(page, 'librarian', '/parts/new');

@@ -62,9 +62,16 @@ export class PartStore<Kind extends LibraryPart> {
     });
   }
 
-  async remove(caller: Caller, id: number | null, version: number): Promise<void> {
+  /** @param assertUnused refuses where something else needs the part */
+  async remove(
+    caller: Caller,
+    id: number | null,
+    version: number,
+    assertUnused: (manager: EntityManager, id: number) => Promise<void>,
+  ): Promise<void> {
     await this.changeLibrary(caller, async (manager) => {
       const current = await this.findChangeable(manager, caller, id, version);
+      await assertUnused(manager, current.id);
       await manager.delete(Part, { id: current.id });
       await this.record(manager, caller, [[current, null]]);
     });

@@ -4,12 +4,13 @@ import { OpAmpStore } from '../library/op-amp-store.service.js';
 import type { Caller } from '../shared/access/caller.js';
 import type { ListOpAmpsDto } from './dto/list-op-amps.dto.js';
 import type { OpAmpListDto } from './dto/op-amp-response.dto.js';
+import { PartUsesService } from './part-uses.service.js';
 import { PartsService } from './parts.service.js';
 
 @Injectable()
 export class OpAmpsService extends PartsService<OpAmpPart> {
-  constructor(store: OpAmpStore) {
-    super(store);
+  constructor(store: OpAmpStore, uses: PartUsesService) {
+    super(store, uses);
   }
 
   list(caller: Caller, { inputType, ...query }: ListOpAmpsDto): Promise<OpAmpListDto> {

@@ -1,13 +1,17 @@
 import { Module } from '@nestjs/common';
+import { ConditionsModule } from '../conditions/conditions.module.js';
 import { LibraryModule } from '../library/library.module.js';
+import { TeamsModule } from '../teams/teams.module.js';
 import { OpAmpsController } from './op-amps.controller.js';
 import { OpAmpsService } from './op-amps.service.js';
+import { PartUsesController } from './part-uses.controller.js';
+import { PartUsesService } from './part-uses.service.js';
 import { ResistorsController } from './resistors.controller.js';
 import { ResistorsService } from './resistors.service.js';
 
 @Module({
-  imports: [LibraryModule],
-  controllers: [OpAmpsController, ResistorsController],
-  providers: [OpAmpsService, ResistorsService],
+  imports: [ConditionsModule, LibraryModule, TeamsModule],
+  controllers: [OpAmpsController, ResistorsController, PartUsesController],
+  providers: [PartUsesService, OpAmpsService, ResistorsService],
 })
 export class PartsModule {}

@@ -9,6 +9,7 @@ import type { List } from '../shared/list/list-response.js';
 import { parseSort } from '../shared/list/sort.js';
 import type { ListPartsDto } from './dto/list-parts.dto.js';
 import type { UpdatePartDto } from './dto/update-part.dto.js';
+import type { PartUsesService } from './part-uses.service.js';
 import { changedPart, newPart } from './part-draft.js';
 
 type Answer<Kind extends LibraryPart> = Kind & {
@@ -20,7 +21,10 @@ type Answer<Kind extends LibraryPart> = Kind & {
 
 /** What the API does with parts of a kind. */
 export class PartsService<Kind extends LibraryPart> {
-  constructor(private readonly store: PartStore<Kind>) {}
+  constructor(
+    private readonly store: PartStore<Kind>,
+    private readonly uses: PartUsesService,
+  ) {}
 
   async find(caller: Caller, id: string): Promise<Answer<Kind>> {
     return toAnswer(await this.store.find(caller, readId(id)));
@@ -43,7 +47,9 @@ export class PartsService<Kind extends LibraryPart> {
   }
 
   remove(caller: Caller, id: string, version: number): Promise<void> {
-    return this.store.remove(caller, readId(id), version);
+    return this.store.remove(caller, readId(id), version, (manager, part) =>
+      this.uses.assertUnused(manager, caller, part),
+    );
   }
 
   protected async listParts(

@@ -12,6 +12,7 @@ export const OP_AMPS_API: PartsApi<OpAmpPart, OpAmp> = {
   create: (part) => answer(client.POST('/api/op-amps', { body: part })),
   update: (id, version, part) =>
     answer(client.PATCH('/api/op-amps/{id}', { params: { path: { id } }, body: { ...part, version } })),
+  changeStandings: (parts) => answer(client.PATCH('/api/op-amps', { body: { parts } })),
   remove: (id, version) =>
     answer(client.DELETE('/api/op-amps/{id}', { params: { path: { id }, query: { version } } })),
 };

@@ -6,8 +6,11 @@ import type {
   LibraryPart,
   Lifecycle,
   ParameterGroup,
+  Standing,
   Technology,
 } from '@roothertz/common/parts';
+import { answer, client } from './client';
+import type { components } from './schema';
 
 /** The figures of a part and the choice of words among them, by their key. */
 export type Figures = Readonly<Record<string, number | string | null>>;
@@ -35,12 +38,20 @@ export interface PartListQuery {
   offset?: number;
 }
 
-/** The calls that read and delete parts of a kind. */
+/** How a part is to stand; what is left out stays. */
+export interface StandingChange extends Partial<Standing> {
+  id: string;
+  version: number;
+}
+
+/** The calls that read and change parts of a kind. */
 export interface PartsReader<Stored extends StoredPart = StoredPart> {
   /** As the server calls them: `op-amps`. */
   name: string;
   list: (query: PartListQuery, signal: AbortSignal) => Promise<{ items: Stored[]; total: number }>;
   find: (id: string, signal: AbortSignal) => Promise<Stored>;
+  /** All of them or none; the answer holds them in the same order. */
+  changeStandings: (changes: StandingChange[]) => Promise<{ items: Stored[] }>;
   remove: (id: string, version: number) => Promise<void>;
 }
 
@@ -48,6 +59,16 @@ export interface PartsReader<Stored extends StoredPart = StoredPart> {
 export interface PartsApi<Part extends LibraryPart, Stored extends StoredPart> extends PartsReader<Stored> {
   create: (part: Part) => Promise<Stored>;
   update: (id: string, version: number, part: Part) => Promise<Stored>;
+}
+
+export type PartUses = components['schemas']['PartUsesDto'];
+
+/** Where a part has been chosen. */
+export function partUsesQuery(id: string) {
+  return queryOptions({
+    queryKey: ['part-uses', id],
+    queryFn: ({ signal }) => answer(client.GET('/api/parts/{id}/uses', { params: { path: { id } }, signal })),
+  });
 }
 
 /** The most that the server gives in one page. */

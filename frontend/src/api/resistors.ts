@@ -12,6 +12,7 @@ export const RESISTORS_API: PartsApi<ResistorPart, StoredResistor> = {
   create: (part) => answer(client.POST('/api/resistors', { body: part })),
   update: (id, version, part) =>
     answer(client.PATCH('/api/resistors/{id}', { params: { path: { id } }, body: { ...part, version } })),
+  changeStandings: (parts) => answer(client.PATCH('/api/resistors', { body: { parts } })),
   remove: (id, version) =>
     answer(client.DELETE('/api/resistors/{id}', { params: { path: { id }, query: { version } } })),
 };

@@ -580,6 +580,22 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/parts/{id}/uses": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["listPartUses"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/prices": {
         parameters: {
             query?: never;
@@ -1259,7 +1275,7 @@ export interface components {
             message: string;
         };
         /** @enum {string} */
-        ErrorCode: "request.invalid" | "billing.event" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "billing.declined" | "access.seats" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "member.not-found" | "import.not-found" | "mail.unknown-link" | "team.last-admin" | "team.owner" | "part.stale" | "part.duplicate" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "billing.trial-used" | "billing.subscribed" | "billing.not-subscribed" | "billing.outdated" | "import.state" | "import.outdated" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "team.owner-invalid" | "billing.seats" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "billing.unavailable" | "database.unavailable";
+        ErrorCode: "request.invalid" | "billing.event" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "billing.declined" | "access.seats" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "member.not-found" | "import.not-found" | "mail.unknown-link" | "team.last-admin" | "team.owner" | "part.stale" | "part.duplicate" | "part.in-use" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "billing.trial-used" | "billing.subscribed" | "billing.not-subscribed" | "billing.outdated" | "import.state" | "import.outdated" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "team.owner-invalid" | "billing.seats" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "billing.unavailable" | "database.unavailable";
         EvaluateStageDto: {
             amplifier: components["schemas"]["AmplifierDto"];
             conditions: components["schemas"]["OperatingConditionsDto"];
@@ -1636,6 +1652,10 @@ export interface components {
             current: components["schemas"]["OfferResponseDto"][];
             /** @description The closed ones, the latest first. */
             history: components["schemas"]["OfferResponseDto"][];
+        };
+        PartUsesDto: {
+            /** @description Saved conditions at which it was chosen. */
+            conditions: components["schemas"]["UsingConditionsDto"][];
         };
         PaymentDto: {
             /** @description The newest first. */
@@ -2440,6 +2460,10 @@ export interface components {
             file: string;
             /** @enum {string} */
             kind: "op-amps" | "resistors";
+        };
+        UsingConditionsDto: {
+            id: string;
+            name: string;
         };
         WholeStageDto: {
             /** @description dB, over the band; null where the source makes no noise. */
@@ -3936,6 +3960,36 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["PartOffersDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    listPartUses: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PartUsesDto"];
                 };
             };
             /** @description Problem details (RFC 9457) */

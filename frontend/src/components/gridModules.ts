@@ -2,12 +2,14 @@ import {
   CellStyleModule,
   ClientSideRowModelModule,
   ColumnApiModule,
+  LocaleModule,
   ModuleRegistry,
   PinnedRowModule,
   RowApiModule,
   RowSelectionModule,
   RowStyleModule,
   ScrollApiModule,
+  SelectEditorModule,
 } from 'ag-grid-community';
 
 /** The parts of the grid that the pages use; every page with a grid imports this file. */
@@ -15,9 +17,11 @@ ModuleRegistry.registerModules([
   CellStyleModule,
   ClientSideRowModelModule,
   ColumnApiModule,
+  LocaleModule,
   PinnedRowModule,
   RowApiModule,
   RowSelectionModule,
   RowStyleModule,
   ScrollApiModule,
+  SelectEditorModule,
 ]);

@@ -26,6 +26,7 @@ export const ERROR_CODES = {
   'team.owner': { status: 409, title: 'Owner of the team' },
   'part.stale': { status: 409, title: 'Part changed meanwhile' },
   'part.duplicate': { status: 409, title: 'Part exists already' },
+  'part.in-use': { status: 409, title: 'Part in use' },
   'conditions.stale': { status: 409, title: 'Conditions changed meanwhile' },
   'conditions.duplicate': { status: 409, title: 'Name is taken' },
   'supplier.duplicate': { status: 409, title: 'Supplier exists already' },

@@ -1,20 +1,25 @@
 import '../../components/gridModules';
-import type { CellKeyDownEvent, ColDef, RowClickedEvent, SortChangedEvent } from 'ag-grid-community';
+import type { ColDef, SortChangedEvent } from 'ag-grid-community';
 import { AgGridReact } from 'ag-grid-react';
-import { useCallback, useMemo } from 'react';
-import { useNavigate } from 'react-router-dom';
+import { useCallback, useMemo, type Ref } from 'react';
 import type { StoredPart } from '../../api/parts';
 import { gridTheme } from '../../components/gridTheme';
 import type { KindOfPart } from './kindOfPart';
 import { partsColumns } from './partsColumns';
 import styles from './PartsGrid.module.css';
+import { useChooseParts } from './useChooseParts';
+import { useEditStanding } from './useEditStanding';
+import { useOpenPart } from './useOpenPart';
 
 interface PartsGridProps {
+  ref: Ref<AgGridReact<StoredPart>>;
   kind: KindOfPart;
   parts: readonly StoredPart[];
   /** A column, with a minus in front for descending order. */
   sort?: string;
   onSort: (sort: string | undefined) => void;
+  /** Told which parts are chosen; null = the member changes none. */
+  onChoose: ((ids: ReadonlySet<string>) => void) | null;
 }
 
 const DEFAULTS: ColDef<StoredPart> = {
@@ -24,10 +29,16 @@ const DEFAULTS: ColDef<StoredPart> = {
   suppressHeaderMenuButton: true,
 };
 
-/** The parts as rows; Enter or a click opens one. */
-export function PartsGrid({ kind, parts, sort, onSort }: PartsGridProps) {
+/** The parts as rows; Enter or a click opens one. Who may change parts chooses rows and edits how they stand. */
+export function PartsGrid({ ref, kind, parts, sort, onSort, onChoose }: PartsGridProps) {
   const open = useOpenPart(kind.path);
-  const columns = useMemo(() => partsColumns(kind).map((column) => withSort(column, sort)), [kind, sort]);
+  const choose = useChooseParts(onChoose);
+  const edit = useEditStanding(kind);
+  const mayEdit = onChoose !== null;
+  const columns = useMemo(
+    () => partsColumns(kind, mayEdit).map((column) => withSort(column, sort)),
+    [kind, mayEdit, sort],
+  );
   const tellSort = useCallback(
     ({ api, source }: SortChangedEvent<StoredPart>) => {
       if (source !== 'uiColumnSorted') return;
@@ -39,6 +50,7 @@ export function PartsGrid({ kind, parts, sort, onSort }: PartsGridProps) {
   return (
     <section aria-label={`${kind.title}s`} className={styles.grid}>
       <AgGridReact<StoredPart>
+        ref={ref}
         theme={gridTheme}
         rowData={parts as StoredPart[]}
         columnDefs={columns}
@@ -47,28 +59,11 @@ export function PartsGrid({ kind, parts, sort, onSort }: PartsGridProps) {
         headerHeight={54}
         onSortChanged={tellSort}
         {...open}
+        {...choose}
+        {...edit}
       />
     </section>
   );
-}
-
-function useOpenPart(path: string) {
-  const navigate = useNavigate();
-  return useMemo(() => {
-    const open = (part: StoredPart | undefined) => part && void navigate(`${path}/${part.id}`);
-    return {
-      onCellKeyDown: ({
-        data,
-        event,
-      }: CellKeyDownEvent<StoredPart> | { data?: StoredPart; event?: Event | null }) => {
-        if (event instanceof KeyboardEvent && event.key === 'Enter') open(data);
-      },
-      onRowClicked: ({ data, event }: RowClickedEvent<StoredPart>) => {
-        const onLink = event?.target instanceof Element && event.target.closest('a') !== null;
-        if (!onLink) open(data);
-      },
-    };
-  }, [navigate, path]);
 }
 
 function withSort(column: ColDef<StoredPart>, sort = ''): ColDef<StoredPart> {

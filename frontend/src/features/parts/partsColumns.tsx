@@ -1,4 +1,4 @@
-import type { ListedFields, ParameterDefinition } from '@roothertz/common/parts';
+import { APPROVALS, LIFECYCLES, type ListedFields, type ParameterDefinition } from '@roothertz/common/parts';
 import {
   formatInPrefix,
   formatQuantity,
@@ -22,7 +22,10 @@ type Column = ColDef<StoredPart>;
 const WITH_OWN_UNIT: readonly QuantityKind[] = ['resistance'];
 
 /** The list's columns: what names the part, its figures in catalogue order, and its standing. */
-export function partsColumns({ path, choice, columnWidths, catalogue }: KindOfPart): Column[] {
+export function partsColumns(
+  { path, choice, columnWidths, catalogue }: KindOfPart,
+  mayEdit: boolean,
+): Column[] {
   return [
     {
       colId: 'partNumber',
@@ -42,8 +45,14 @@ export function partsColumns({ path, choice, columnWidths, catalogue }: KindOfPa
     ),
     ...catalogue.parameters.map((parameter) => figureColumn(catalogue, parameter)),
     { colId: 'package', field: 'package', headerName: 'Package', width: 104 },
-    wordColumn('approval', 'Approval', 104, ({ approval }) => approval),
-    wordColumn('lifecycle', 'Lifecycle', 100, ({ lifecycle }) => lifecycle),
+    {
+      ...wordColumn('approval', 'Approval', 112, ({ approval }) => approval),
+      ...(mayEdit && choiceEditor('approval', APPROVALS)),
+    },
+    {
+      ...wordColumn('lifecycle', 'Lifecycle', 132, ({ lifecycle }) => lifecycle),
+      ...(mayEdit && choiceEditor('lifecycle', LIFECYCLES)),
+    },
     wordColumn('library', 'Library', 92, ({ library }) => library),
   ];
 }
@@ -61,6 +70,17 @@ function wordColumn(
     valueGetter: ({ data }) => data && wordOf(data),
     cellRenderer: ({ value }: ICellRendererParams) =>
       value ? optionLabel(key, value as string) : <Unknown />,
+  };
+}
+
+/** A choice of words in the cells of the team's own parts. */
+function choiceEditor(key: string, values: readonly string[]): Column {
+  return {
+    editable: ({ data }) => data?.library === 'team',
+    singleClickEdit: true,
+    cellEditor: 'agSelectCellEditor',
+    cellEditorParams: { values, valueListMaxWidth: 260 },
+    valueFormatter: ({ value }) => optionLabel(key, value as string),
   };
 }
 

@@ -1,3 +1,4 @@
+import { countOf, grouped } from './countOf';
 import type { KindOfPart } from './kindOfPart';
 import { figuresOf } from './partDraft';
 import type { PartsList } from './usePartsList';
@@ -8,19 +9,11 @@ export function partsFacts(
   { parts, total, isComplete }: PartsList,
   searched: boolean,
 ): string {
-  if (searched) return `${count(parts.length, 'part')} found among ${count(total, 'part')}`;
+  if (searched) return `${countOf(parts.length, 'part')} found among ${countOf(total, 'part')}`;
   if (!isComplete)
-    return `${count(total, 'part')}, of which the first ${grouped(parts.length)} are shown: search or narrow for the others`;
+    return `${countOf(total, 'part')}, of which the first ${grouped(parts.length)} are shown: search or narrow for the others`;
   const curated = parts.filter(({ library }) => library === 'curated').length;
   const unknown = parts.filter((part) => figuresOf(catalogue, part)[key] === null).length;
-  const whose = `${count(parts.length, 'part')}: ${curated} curated, ${parts.length - curated} of your own`;
+  const whose = `${countOf(parts.length, 'part')}: ${curated} curated, ${parts.length - curated} of your own`;
   return unknown === 0 ? whose : `${whose}; ${unknown} without ${label}`;
-}
-
-function count(number: number, noun: string): string {
-  return `${grouped(number)} ${noun}${number === 1 ? '' : 's'}`;
-}
-
-function grouped(number: number): string {
-  return new Intl.NumberFormat('en-GB').format(number).replaceAll(',', '\u2009');
 }

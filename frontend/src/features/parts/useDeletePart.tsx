@@ -1,7 +1,7 @@
 import { hashKey, useMutation, useQueryClient } from '@tanstack/react-query';
 import { App, Button } from 'antd';
 import { useNavigate } from 'react-router-dom';
-import { partKey, type StoredPart } from '../../api/parts';
+import { partKey, partUsesQuery, type StoredPart } from '../../api/parts';
 import { detailOf } from '../../api/problem';
 import type { KindOfPart } from './kindOfPart';
 import { draftOf } from './partDraft';
@@ -34,8 +34,8 @@ export function useDeletePart({ catalogue, reader, create, path }: KindOfPart, p
         placement: 'bottomRight',
         actions: <Button onClick={() => void undo()}>Undo</Button>,
       });
-      const gone = hashKey(partKey(reader, part.id));
-      await queryClient.invalidateQueries({ predicate: ({ queryHash }) => queryHash !== gone });
+      const gone = [partKey(reader, part.id), partUsesQuery(part.id).queryKey].map(hashKey);
+      await queryClient.invalidateQueries({ predicate: ({ queryHash }) => !gone.includes(queryHash) });
     },
   });
 }

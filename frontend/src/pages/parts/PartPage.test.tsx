@@ -6,8 +6,14 @@ import { opAmp, sessionOf } from '../../test/factories';
 import { fakeServer, json, problem } from '../../test/fakeServer';
 import { renderApp } from '../../test/renderApp';
 
-function open(role: Parameters<typeof sessionOf>[0], part: OpAmp, plan?: 'free' | 'team') {
+function open(
+  role: Parameters<typeof sessionOf>[0],
+  part: OpAmp,
+  plan?: 'free' | 'team',
+  conditions: { id: string; name: string }[] = [],
+) {
   const asked = fakeServer({
+    [`GET /api/parts/${part.id}/uses`]: () => json({ conditions }),
     'GET /api/auth/me': () => json(sessionOf(role, plan)),
     [`GET /api/op-amps/${part.id}`]: () => json(part),
   });
@@ -45,7 +51,19 @@ describe('a part’s page', () => {
   it('lets a librarian edit and delete a part of the own library', async () => {
     open('librarian', opAmp());
     expect(await screen.findByRole('link', { name: 'Edit' })).toHaveAttribute('href', '/parts/41/edit');
-    expect(screen.getByRole('button', { name: 'Delete' })).toBeInTheDocument();
+    expect(await screen.findByRole('button', { name: 'Delete' })).toBeInTheDocument();
+  });
+
+  it('offers to retire, and not to delete, a part that is chosen somewhere', async () => {
+    open('librarian', opAmp(), 'team', [{ id: '5', name: 'River geophone' }]);
+    expect(await screen.findByText(/Chosen at “River geophone”: it can be retired/)).toBeInTheDocument();
+    expect(screen.getByRole('button', { name: 'Retire' })).toBeInTheDocument();
+    expect(screen.queryByRole('button', { name: 'Delete' })).not.toBeInTheDocument();
+  });
+
+  it('offers to bring a retired part back', async () => {
+    open('librarian', opAmp({ lifecycle: 'obsolete', approval: 'not-approved' }));
+    expect(await screen.findByRole('button', { name: 'Bring back' })).toBeInTheDocument();
   });
 
   it.each([
@@ -79,6 +97,7 @@ describe('a part’s page', () => {
     fakeServer({
       'GET /api/auth/me': () => json(sessionOf('librarian')),
       'GET /api/op-amps/41': () => json(part),
+      'GET /api/parts/41/uses': () => json({ conditions: [] }),
       'DELETE /api/op-amps/41': () =>
         problem(409, 'part.stale', { detail: 'Somebody changed it meanwhile.' }),
     });

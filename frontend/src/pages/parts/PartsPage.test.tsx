@@ -109,3 +109,71 @@ describe('the lists of parts', () => {
     expect(await screen.findByRole('alert')).toHaveTextContent('limit: too many');
   });
 });
+
+describe('the chosen parts', () => {
+  const CURATED = opAmp({ id: '43', partNumber: 'KM-21', library: 'curated' });
+  const PARTS = [opAmp(), opAmp({ id: '42', partNumber: 'VR-1109', version: 5 }), CURATED];
+  const changed = (parts: { id: string; version: number }[]) =>
+    json({ items: parts.map(({ id, version }) => ({ ...opAmp(), id, version: version + 1 })), total: 2 });
+
+  async function chooseAll(answer: (body: unknown) => Response) {
+    const asked = fakeServer({
+      ...SESSION,
+      'GET /api/op-amps': listed(PARTS),
+      'PATCH /api/op-amps': answer,
+    });
+    renderApp('/parts');
+    await userEvent.click(await screen.findByRole('checkbox', { name: 'Choose all parts listed' }));
+    const bar = await screen.findByRole('region', { name: 'Chosen parts' });
+    return { asked, bar };
+  }
+
+  it('are retired in one act whose outcome is said first, and come back by Undo', async () => {
+    const { asked, bar } = await chooseAll((body) =>
+      changed((body as { parts: { id: string; version: number }[] }).parts),
+    );
+    await userEvent.click(within(bar).getByRole('button', { name: 'Retire' }));
+    expect(bar).toHaveTextContent(
+      'Retires 2 of 3 parts: obsolete and not approved; 1 curated one can’t be changed.',
+    );
+    await userEvent.click(within(bar).getByRole('button', { name: 'Retire 2 parts' }));
+    expect(await screen.findByText('2 parts are retired')).toBeInTheDocument();
+    const sent = () => asked.filter(({ route }) => route === 'PATCH /api/op-amps').map(({ body }) => body);
+    const retired = { lifecycle: 'obsolete', approval: 'not-approved' };
+    expect(sent()).toEqual([
+      {
+        parts: [
+          { id: '41', version: 3, ...retired },
+          { id: '42', version: 5, ...retired },
+        ],
+      },
+    ]);
+    await userEvent.click(screen.getByRole('button', { name: 'Undo' }));
+    await waitFor(() => expect(sent()).toHaveLength(2));
+    const before = { lifecycle: 'active', approval: 'approved' };
+    expect(sent()[1]).toEqual({
+      parts: [
+        { id: '41', version: 4, ...before },
+        { id: '42', version: 6, ...before },
+      ],
+    });
+  });
+
+  it('stay chosen where somebody changed one meanwhile, and it is named', async () => {
+    const message = 'VR-1109: somebody has changed this part meanwhile';
+    const { bar } = await chooseAll(() =>
+      problem(409, 'part.stale', { detail: 'Changed meanwhile.', errors: [{ field: 'parts[1]', message }] }),
+    );
+    await userEvent.click(within(bar).getByRole('button', { name: 'Retire' }));
+    await userEvent.click(within(bar).getByRole('button', { name: 'Retire 2 parts' }));
+    expect(await within(bar).findByRole('alert')).toHaveTextContent(message);
+    expect(bar).toHaveTextContent('3 parts chosen');
+  });
+
+  it('aren’t there for an engineer', async () => {
+    fakeServer({ 'GET /api/auth/me': () => json(sessionOf('engineer')), 'GET /api/op-amps': listed(PARTS) });
+    renderApp('/parts');
+    await screen.findByText(/^3 parts:/);
+    expect(screen.queryByRole('checkbox')).not.toBeInTheDocument();
+  });
+});

@@ -7,7 +7,7 @@ import { KindTabs } from '../../features/parts/KindTabs';
 import { NoParts } from '../../features/parts/NoParts';
 import { partsFacts } from '../../features/parts/partsFacts';
 import { PartsFilters } from '../../features/parts/PartsFilters';
-import { PartsGrid } from '../../features/parts/PartsGrid';
+import { ChosenParts } from '../../features/parts/ChosenParts';
 import { isNarrowed, narrowingKeys } from '../../features/parts/partsView';
 import { usePartsList } from '../../features/parts/usePartsList';
 import { usePartsView } from '../../features/parts/usePartsView';
@@ -39,7 +39,7 @@ export function PartsPage({ kind }: { kind: KindOfPart }) {
       ) : list.parts.length === 0 ? (
         <NoParts kind={kind} isNarrowed={isNarrowed(kind, view)} onShowAll={showAll} />
       ) : (
-        <PartsGrid kind={kind} parts={list.parts} sort={view.sort} onSort={(sort) => change({ sort })} />
+        <ChosenParts kind={kind} parts={list.parts} sort={view.sort} onSort={(sort) => change({ sort })} />
       )}
     </div>
   );

@@ -1,0 +1,39 @@
+import type { AgGridReact } from 'ag-grid-react';
+import { useRef, useState } from 'react';
+import type { StoredPart } from '../../api/parts';
+import { useMayDo } from '../../components/useMember';
+import type { KindOfPart } from './kindOfPart';
+import { PartsGrid } from './PartsGrid';
+import styles from './PartsGrid.module.css';
+import { StandingBar } from './standing/StandingBar';
+
+interface ChosenPartsProps {
+  kind: KindOfPart;
+  parts: readonly StoredPart[];
+  sort?: string;
+  onSort: (sort: string | undefined) => void;
+}
+
+const NONE: ReadonlySet<string> = new Set();
+
+/** The list, and below it what can be done with the parts chosen in it. */
+export function ChosenParts({ kind, parts, sort, onSort }: ChosenPartsProps) {
+  const mayEdit = useMayDo('parts.edit');
+  const [ids, setIds] = useState(NONE);
+  const grid = useRef<AgGridReact<StoredPart>>(null);
+  const chosen = parts.filter(({ id }) => ids.has(id));
+  const clear = () => grid.current?.api.deselectAll();
+  return (
+    <div className={styles.chosen}>
+      <PartsGrid
+        ref={grid}
+        kind={kind}
+        parts={parts}
+        sort={sort}
+        onSort={onSort}
+        onChoose={mayEdit ? setIds : null}
+      />
+      {chosen.length > 0 && <StandingBar kind={kind} parts={chosen} onClear={clear} />}
+    </div>
+  );
+}
