@@ -1,5 +1,6 @@
 import type { OpenAPIObject } from '@nestjs/swagger';
 import fc from 'fast-check';
+import { Invitation } from '../src/teams/invitations/entities/invitation.entity.js';
 import { createOpenApiDocument } from '../src/openapi/document.js';
 import { createSupplier } from './factories/offers.js';
 import { applyList, checkedList, uploadList } from './factories/imports.js';
@@ -58,6 +59,7 @@ describe('whatever is sent', () => {
     await createResistor(member);
     await createSupplier(member);
     await makeImports();
+    await makeInvitation();
     const document: OpenAPIObject = createOpenApiDocument(app.nest);
     operations = operationsOf(document)
       .filter(({ method }) => ['post', 'put', 'patch'].includes(method))
@@ -80,6 +82,14 @@ describe('whatever is sent', () => {
     const steps = { mapping: uploadList, cancel: uploadList, apply: checkedList, undo: applyList };
     for (const [step, make] of Object.entries(steps))
       made.set(`/api/imports/${step}`, (await make(member, 'op-amps', list(step))).id);
+  }
+
+  /** One that was sent long enough ago to be sent again. */
+  async function makeInvitation(): Promise<void> {
+    const invited = { email: 'invited@weir.example', roles: ['reviewer'] };
+    const { body } = await member.agent.post('/api/team/invitations').send(invited).expect(201);
+    await app.dataSource.manager.update(Invitation, { id: body.id }, { sentAt: new Date('2026-01-01') });
+    made.set('/api/team/invitations/resend', body.id);
   }
 
   it('has a sample for every operation that takes a body', () => {

@@ -15,8 +15,10 @@ const DOCUMENT = new URL('../openapi.json', import.meta.url);
 /** Stands in everything that the one team calls by a name, and so in no answer to the other. */
 const MARK = 'Zirkon-7731';
 
+const INVITED = { email: `${MARK.toLowerCase()}@weir.example`, roles: ['engineer'] };
+
 /** Paths whose parameter is a secret that opens them, whoever asks. */
-const SECRET_PATHS = /^\/api\/invitations\/\{token\}/;
+const SECRET_PATHS = /\{token\}/;
 
 describe('two teams', () => {
   let app: TestApp;
@@ -53,6 +55,8 @@ describe('two teams', () => {
       '/api/parts': part.id,
       '/api/resistors': (await createResistor(theirs, { manufacturer: MARK })).id,
       '/api/team/members': String(userId),
+      '/api/team/invitations': (await theirs.agent.post('/api/team/invitations').send(INVITED).expect(201))
+        .body.id,
     });
     Object.assign(named, {
       partId: part.id,

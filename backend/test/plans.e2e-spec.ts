@@ -93,7 +93,10 @@ describe('a team’s plan', () => {
       app.dataSource.transaction(async (manager) => {
         await seats.assertSeat(manager, teamId);
         await manager.query(`INSERT INTO users (email, name, password_hash) VALUES (UUID(), 'Guest', '')`);
-        await manager.query(`INSERT INTO memberships SELECT LAST_INSERT_ID(), ?, 'reviewer'`, [teamId]);
+        await manager.query(
+          `INSERT INTO memberships (user_id, team_id, roles) SELECT LAST_INSERT_ID(), ?, 'reviewer'`,
+          [teamId],
+        );
       });
     const given = await Promise.allSettled([give(), give(), give()]);
     expect(given.filter(({ status }) => status === 'fulfilled').length).toBe(1);

@@ -17,6 +17,7 @@ import { Offer } from '../prices/entities/offer.entity.js';
 import { OfferBreak } from '../prices/entities/offer-break.entity.js';
 import { PriceSettings } from '../prices/entities/price-settings.entity.js';
 import { Supplier } from '../prices/entities/supplier.entity.js';
+import { Invitation } from '../teams/invitations/entities/invitation.entity.js';
 import { Membership } from '../teams/entities/membership.entity.js';
 import { Team } from '../teams/entities/team.entity.js';
 import { User } from '../users/entities/user.entity.js';
@@ -26,6 +27,7 @@ export const ENTITIES = [
   Team,
   User,
   Membership,
+  Invitation,
   Subscription,
   BillingEvent,
   Library,

@@ -1,9 +1,10 @@
 import { planState, type Standing } from '@roothertz/common/access';
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
-import type { DataSource, EntityManager } from 'typeorm';
+import { type DataSource, type EntityManager, IsNull, MoreThan, Not } from 'typeorm';
 import { PlansService } from '../plans/plans.service.js';
 import { DomainError } from '../shared/errors/domain-error.js';
+import { Invitation } from './invitations/entities/invitation.entity.js';
 import { Membership } from './entities/membership.entity.js';
 
 export interface SeatCount {
@@ -26,17 +27,31 @@ export class SeatsService {
     return { seats, used: await this.used(this.dataSource.manager, teamId) };
   }
 
-  used(manager: EntityManager, teamId: number): Promise<number> {
-    return manager.countBy(Membership, { teamId });
+  /** Who is in the team, and who may still come: an invitation keeps its seat. */
+  async used(manager: EntityManager, teamId: number, exceptInvitation = 0): Promise<number> {
+    const members = await manager.countBy(Membership, { teamId });
+    const invited = await manager.countBy(Invitation, {
+      teamId,
+      id: Not(exceptInvitation),
+      openEmail: Not(IsNull()),
+      expiresAt: MoreThan(new Date()),
+    });
+    return members + invited;
+  }
+
+  /** Makes others who give or remove seats wait until the transaction ends; call it before anything else in it. */
+  async hold(manager: EntityManager, teamId: number): Promise<void> {
+    await this.plans.lock(manager, teamId);
   }
 
   /**
-   * Refuses to give away a seat that the team doesn't have. Call it before anything else in the transaction that
-   * gives the seat away: it makes others who give or remove seats wait until that one ends.
+   * Refuses to give away a seat that the team doesn't have, in a transaction that holds the seats.
+   *
+   * @param exceptInvitation the invitation that the seat is for
    */
-  async assertSeat(manager: EntityManager, teamId: number): Promise<void> {
+  async assertSeat(manager: EntityManager, teamId: number, exceptInvitation?: number): Promise<void> {
     const { seats, standing } = planState(await this.plans.lock(manager, teamId), new Date());
-    const used = await this.used(manager, teamId);
+    const used = await this.used(manager, teamId, exceptInvitation);
     if (used >= seats) throw new DomainError('access.seats', noSeat(seats, used, standing));
   }
 }

@@ -388,6 +388,54 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/invitations/{token}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["getInvitation"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/invitations/{token}/accept": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["acceptInvitation"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/invitations/{token}/account": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["joinWithNewAccount"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/mail/preferences": {
         parameters: {
             query?: never;
@@ -836,6 +884,54 @@ export interface paths {
         patch: operations["renameTeam"];
         trace?: never;
     };
+    "/api/team/invitations": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["listInvitations"];
+        put?: never;
+        post: operations["inviteTeamMember"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/team/invitations/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete: operations["revokeInvitation"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/team/invitations/{id}/resend": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["resendInvitation"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/team/members": {
         parameters: {
             query?: never;
@@ -1275,7 +1371,7 @@ export interface components {
             message: string;
         };
         /** @enum {string} */
-        ErrorCode: "request.invalid" | "billing.event" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "billing.declined" | "access.seats" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "member.not-found" | "import.not-found" | "mail.unknown-link" | "team.last-admin" | "team.owner" | "part.stale" | "part.duplicate" | "part.in-use" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "billing.trial-used" | "billing.subscribed" | "billing.not-subscribed" | "billing.outdated" | "import.state" | "import.outdated" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "team.owner-invalid" | "billing.seats" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "billing.unavailable" | "database.unavailable";
+        ErrorCode: "request.invalid" | "billing.event" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "billing.declined" | "access.seats" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "invitation.other-address" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "invitation.not-found" | "member.not-found" | "import.not-found" | "mail.unknown-link" | "invitation.member" | "invitation.duplicate" | "invitation.used" | "invitation.account-exists" | "team.last-admin" | "team.owner" | "part.stale" | "part.duplicate" | "part.in-use" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "billing.trial-used" | "billing.subscribed" | "billing.not-subscribed" | "billing.outdated" | "import.state" | "import.outdated" | "invitation.expired" | "invitation.revoked" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "team.owner-invalid" | "billing.seats" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "billing.unavailable" | "database.unavailable";
         EvaluateStageDto: {
             amplifier: components["schemas"]["AmplifierDto"];
             conditions: components["schemas"]["OperatingConditionsDto"];
@@ -1435,6 +1531,27 @@ export interface components {
             undoneAt: string | null;
             undoneBy: components["schemas"]["MemberDto"] | null;
         };
+        InvitationListDto: {
+            items: components["schemas"]["InvitationResponseDto"][];
+            /** @description How many there are in all, whatever the page holds. */
+            total: number;
+        };
+        InvitationResponseDto: {
+            email: string;
+            /** Format: date-time */
+            expiresAt: string;
+            id: string;
+            /** @description null where the account is gone. */
+            invitedBy: components["schemas"]["MemberDto"] | null;
+            roles: ("admin" | "librarian" | "purchasing" | "engineer" | "reviewer")[];
+            /** Format: date-time */
+            sentAt: string;
+        };
+        InviteMemberDto: {
+            /** Format: email */
+            email: string;
+            roles: ("admin" | "librarian" | "purchasing" | "engineer" | "reviewer")[];
+        };
         InvoiceDto: {
             /**
              * @description Below zero = a credit.
@@ -1451,6 +1568,10 @@ export interface components {
             status: string;
             /** @description Where the payment service shows it. */
             url: string | null;
+        };
+        JoinTeamDto: {
+            name: string;
+            password: string;
         };
         MailPreferenceDto: {
             /** @enum {string} */
@@ -1610,6 +1731,17 @@ export interface components {
             /** Format: date-time */
             updatedAt: string;
             version: number;
+        };
+        OpenInvitationDto: {
+            /** @description The address that is invited. */
+            email: string;
+            /** Format: date-time */
+            expiresAt: string;
+            /** @description The address has an account, which accepts by signing in. */
+            hasAccount: boolean;
+            invitedBy: string | null;
+            roles: ("admin" | "librarian" | "purchasing" | "engineer" | "reviewer")[];
+            team: components["schemas"]["TeamResponseDto"];
         };
         OperatingConditionsDto: {
             /** @description Temperature of amplifier and resistors. In K. */
@@ -3370,6 +3502,100 @@ export interface operations {
             };
         };
     };
+    getInvitation: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OpenInvitationDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    acceptInvitation: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TeamResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    joinWithNewAccount: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["JoinTeamDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TeamResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
     listMailPreferences: {
         parameters: {
             query?: never;
@@ -4762,6 +4988,124 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["TeamResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    listInvitations: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InvitationListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    inviteTeamMember: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["InviteMemberDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InvitationResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    revokeInvitation: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    resendInvitation: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InvitationResponseDto"];
                 };
             };
             /** @description Problem details (RFC 9457) */

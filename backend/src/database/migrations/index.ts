@@ -10,6 +10,7 @@ import { CreateSubscriptions1796090300000 } from './1796090300000-CreateSubscrip
 import { CreateBillingEvents1796090310000 } from './1796090310000-CreateBillingEvents.js';
 import { NameAuditObjects1796090600000 } from './1796090600000-NameAuditObjects.js';
 import { AddTeamOwners1796090600100 } from './1796090600100-AddTeamOwners.js';
+import { CreateInvitations1796090600200 } from './1796090600200-CreateInvitations.js';
 import { AddPartsOfConditions1796090900000 } from './1796090900000-AddPartsOfConditions.js';
 import { KeepEarlierConfirmations1796090901000 } from './1796090901000-KeepEarlierConfirmations.js';
 
@@ -27,6 +28,7 @@ export const MIGRATIONS = [
   CreateBillingEvents1796090310000,
   NameAuditObjects1796090600000,
   AddTeamOwners1796090600100,
+  CreateInvitations1796090600200,
   AddPartsOfConditions1796090900000,
   KeepEarlierConfirmations1796090901000,
 ];
