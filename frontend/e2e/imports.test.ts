@@ -68,7 +68,7 @@ describe('a list', () => {
 
     await page.goto(address);
     await page.getByRole('button', { name: 'Undo this import' }).click();
-    await page.getByText('The library is as it was before.').waitFor();
+    await page.getByText('Now the library is as it was before.').waitFor();
     expect(await shownInParts(page, partNumber)).toBe(false);
     expect(problems).toEqual([]);
     await close();
@@ -103,7 +103,7 @@ describe('a list', () => {
   it('fits a narrow screen, and isn’t for engineers to bring in', async () => {
     const { page, problems, close } = await visit(browser, { viewport: PHONE });
     await signIn(page, 'engineer', '/imports');
-    await page.getByText('Lists are imported by your team’s librarians and admins.').waitFor();
+    await page.getByText('Lists of parts are imported by your team’s librarians').waitFor();
     await page
       .getByRole('link', { name: /verstärker/ })
       .first()
@@ -122,3 +122,52 @@ describe('a list', () => {
     await close();
   });
 });
+
+/** A quotation as a German supplier writes it, for a part of the demo team and for one that nobody knows. */
+function quotation(): Buffer {
+  const rows = [
+    'Hersteller;Typ;Bestellnr.;1;10+;ab 100;Lieferzeit (Wochen)',
+    'TARN MICRO;TN 610;Q-1;7,20;6,10;5,30;11',
+    'Tarn Micro;TN-610X;Q-2;7,20;6,10;5,30;11',
+    'Hallam;HT-2041;Q-3;8,20;1.234,56;5,30;11',
+  ];
+  return Buffer.from(`${rows.join('\r\n')}\r\n`, 'latin1');
+}
+
+describe('a quotation', () => {
+  it('is compared with the prices that stand, applied and undone by purchasing', async () => {
+    const { page, problems, close } = await visit(browser);
+    await signIn(page, 'purchasing', '/rank');
+    await page.getByRole('navigation', { name: 'Pages' }).getByRole('link', { name: 'Import' }).click();
+    const file = { name: 'angebot.csv', mimeType: 'text/csv', buffer: quotation() };
+    await page.locator('input[type=file]').setInputFiles(file);
+    await page.getByText(/supplier: a column is needed/).waitFor();
+    const supplier = `Brauwerk ${uniqueNumber()}`;
+    await page.getByLabel('Supplier of all rows').fill(supplier);
+    await page.keyboard.press('Enter');
+    await page.getByLabel('Currency of all rows').fill('EUR');
+    await page.keyboard.press('Enter');
+    await page.getByRole('tab', { name: '1 new' }).waitFor();
+    const panel = page.getByRole('tabpanel', { name: 'Rows: new' });
+    await panel.getByText(`${supplier} is no supplier of yours yet: applying the list adds it`).waitFor();
+    await panel.getByText('from 100 5.30').waitFor();
+    const refused = page.getByRole('region', { name: 'Refused' });
+    await refused.getByText('your libraries have no such part').waitFor();
+    await refused.getByText(/digits in groups/).waitFor();
+    await page.getByRole('button', { name: 'Apply 1 row' }).click();
+    await page.getByText(/^1 row applied by/).waitFor();
+    await screenshot(page, 'import-prices');
+    expect(await offersOf(page, supplier)).toBe(1);
+    await page.getByRole('button', { name: 'Undo this import' }).click();
+    await page.getByText('Now the prices are as they were before.').waitFor();
+    expect(await offersOf(page, supplier)).toBe(0);
+    expect(problems).toEqual([]);
+    await close();
+  });
+});
+
+/** How many offers of a supplier stand. */
+async function offersOf(page: Page, supplier: string): Promise<number> {
+  const answer = await page.request.get(`/api/prices?search=${encodeURIComponent(supplier)}`);
+  return ((await answer.json()) as { total: number }).total;
+}

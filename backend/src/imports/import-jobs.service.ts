@@ -5,12 +5,14 @@ import {
   type OnApplicationBootstrap,
 } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
-import { type DataSource, In, type QueryRunner } from 'typeorm';
+import { type DataSource, type EntityManager, In, IsNull, type QueryRunner } from 'typeorm';
+import { AuditService } from '../audit/audit.service.js';
 import { isDatabaseLoss } from '../shared/errors/database-loss.js';
 import { DomainError } from '../shared/errors/domain-error.js';
 import { Import } from './entities/import.entity.js';
 import { ImportProgress } from './entities/import-progress.entity.js';
 import { ImportCancelled, ImportInterrupted } from './import-endings.js';
+import { importRecord } from './import-record.js';
 import { type ImportState, isRunning, RUNNING_STATES } from './import-states.js';
 
 /** Work on an import while it runs. */
@@ -45,7 +47,10 @@ export class ImportJobs implements OnApplicationBootstrap, BeforeApplicationShut
   private readonly running = new Map<number, Promise<void>>();
   private stopping = false;
 
-  constructor(@InjectDataSource() private readonly dataSource: DataSource) {}
+  constructor(
+    @InjectDataSource() private readonly dataSource: DataSource,
+    private readonly audit: AuditService,
+  ) {}
 
   async onApplicationBootstrap(): Promise<void> {
     const abandoned = await this.dataSource
@@ -117,7 +122,7 @@ export class ImportJobs implements OnApplicationBootstrap, BeforeApplicationShut
       await this.dataSource.manager.update(
         ImportProgress,
         { importId },
-        { done: 0, total, since: new Date(), cancelRequested: 0 },
+        { done: 0, total, since: new Date(), cancelledById: null },
       );
     } catch (error) {
       await this.release(importId, runner);
@@ -140,7 +145,17 @@ export class ImportJobs implements OnApplicationBootstrap, BeforeApplicationShut
     const { state: ending, failure } = endingOf(error);
     if (ending === 'failed')
       this.logger.error(error instanceof Error ? (error.stack ?? error.message) : String(error));
-    await this.dataSource.manager.update(Import, { id, state }, { state: ENDED[state] ?? ending, failure });
+    await this.dataSource.transaction(async (manager) => {
+      await manager.update(Import, { id, state }, { state: ENDED[state] ?? ending, failure });
+      if (ending === 'cancelled' && state !== 'checking') await this.recordCancelled(manager, id);
+    });
+  }
+
+  private async recordCancelled(manager: EntityManager, id: number): Promise<void> {
+    const entity = await manager.findOneOrFail(Import, { where: { id }, relations: { progress: true } });
+    const { teamId, progress } = entity;
+    const actor = { teamId, userId: progress.cancelledById };
+    await this.audit.record(manager, actor, [importRecord('import.cancelled', entity)]);
   }
 
   private noter(importId: number): ImportJob['progress'] {
@@ -149,7 +164,7 @@ export class ImportJobs implements OnApplicationBootstrap, BeforeApplicationShut
       if (this.stopping) throw new ImportInterrupted();
       if (Date.now() - noted < NOTED_EVERY_MS) return;
       noted = Date.now();
-      const uncancelled = { importId, cancelRequested: 0 };
+      const uncancelled = { importId, cancelledById: IsNull() };
       const { affected } = await this.dataSource.manager.update(ImportProgress, uncancelled, { done });
       if (affected === 0) throw new ImportCancelled();
     };

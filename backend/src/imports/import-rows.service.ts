@@ -21,7 +21,8 @@ export class ImportRowsService {
 
   async list(caller: Caller, id: string, query: ListImportRowsDto): Promise<ImportRowListDto> {
     const { descending } = parseSort(query.sort ?? 'line', ['line']);
-    const { id: importId, columns } = await findImport(this.dataSource.manager, caller, id);
+    const entity = await findImport(this.dataSource.manager, caller, id);
+    const { id: importId } = entity;
     const counted = await this.portionsOf(importId);
     const page = pageOf(descending ? counted.reverse() : counted, query);
     const portions = await this.dataSource
@@ -29,7 +30,7 @@ export class ImportRowsService {
       .find({ where: { importId, portion: In(page.portions) }, order: { portion: 'ASC' } });
     const rows = portions.flatMap((portion) => portion.rows).filter((row) => standsIn(row, query.state));
     const shown = (descending ? rows.reverse() : rows).slice(page.skipped, page.skipped + query.limit);
-    return { items: shown.map((row) => toImportRow(row, columns)), total: page.total };
+    return { items: shown.map((row) => toImportRow(row, entity)), total: page.total };
   }
 
   /** The refused rows as they stood in the file, in its dialect, with the reasons behind them. */

@@ -24,8 +24,3 @@ export async function findImport(manager: EntityManager, caller: Caller, id: str
   if (!found) throw new DomainError('import.not-found', 'Your team has no such import.');
   return found;
 }
-
-/** An import as the trail names it. */
-export function objectOf({ id, fileName }: Import) {
-  return { kind: 'import' as const, id, label: fileName };
-}

@@ -1,10 +1,11 @@
 /** What can be imported. */
-export const IMPORT_KINDS = ['op-amps', 'resistors'] as const;
+export const IMPORT_KINDS = ['op-amps', 'resistors', 'prices'] as const;
 export type ImportKind = (typeof IMPORT_KINDS)[number];
+export type PartListKind = Exclude<ImportKind, 'prices'>;
 
 /**
- * Where an import stands. `waiting` = another import of the team is being applied; `outdated` = parts were edited
- * since the check; `interrupted` = the server ended meanwhile, and the library is as before.
+ * Where an import stands. `waiting` = another import of the team is being applied; `outdated` = parts or
+ * offers were edited since the check; `interrupted` = the server ended meanwhile, and the library is as before.
  */
 export const IMPORT_STATES = [
   'uploaded',

@@ -1,6 +1,7 @@
 import {
   Body,
   Controller,
+  Delete,
   Get,
   HttpCode,
   Param,
@@ -16,6 +17,7 @@ import {
   ApiBody,
   ApiConsumes,
   ApiCreatedResponse,
+  ApiNoContentResponse,
   ApiOkResponse,
   ApiTags,
 } from '@nestjs/swagger';
@@ -49,7 +51,7 @@ export class ImportsController {
   }
 
   @Post()
-  @Access('parts.edit')
+  @Access('lists.import')
   @UseInterceptors(UploadInterceptor)
   @ApiConsumes('multipart/form-data')
   @ApiBody({ type: UploadFormDto })
@@ -70,7 +72,7 @@ export class ImportsController {
   }
 
   @Put(':id/mapping')
-  @Access('parts.edit')
+  @Access('lists.import')
   @ApiOkResponse({ type: ImportResponseDto })
   mapImport(
     @Caller() caller: CallerOfRequest,
@@ -100,7 +102,7 @@ export class ImportsController {
 
   @Post(':id/apply')
   @HttpCode(202)
-  @Access('parts.edit')
+  @Access('lists.import')
   @ApiAcceptedResponse({ type: ImportResponseDto })
   applyImport(@Caller() caller: CallerOfRequest, @Param('id') id: string): Promise<ImportResponseDto> {
     return this.imports.apply(caller, id);
@@ -108,15 +110,23 @@ export class ImportsController {
 
   @Post(':id/cancel')
   @HttpCode(202)
-  @Access('parts.edit')
+  @Access('lists.import')
   @ApiAcceptedResponse({ type: ImportResponseDto })
   cancelImport(@Caller() caller: CallerOfRequest, @Param('id') id: string): Promise<ImportResponseDto> {
     return this.imports.cancel(caller, id);
   }
 
+  @Delete(':id')
+  @HttpCode(204)
+  @Access('lists.import')
+  @ApiNoContentResponse()
+  discardImport(@Caller() caller: CallerOfRequest, @Param('id') id: string): Promise<void> {
+    return this.imports.discard(caller, id);
+  }
+
   @Post(':id/undo')
   @HttpCode(202)
-  @Access('parts.edit')
+  @Access('lists.import')
   @ApiAcceptedResponse({ type: ImportResponseDto })
   undoImport(@Caller() caller: CallerOfRequest, @Param('id') id: string): Promise<ImportResponseDto> {
     return this.imports.undo(caller, id);

@@ -1,6 +1,7 @@
 import { Module } from '@nestjs/common';
 import { AuditModule } from '../audit/audit.module.js';
 import { LibraryModule } from '../library/library.module.js';
+import { PricesModule } from '../prices/prices.module.js';
 import { ApplyImport } from './apply/apply-import.service.js';
 import { UndoImport } from './apply/undo-import.service.js';
 import { CheckImport } from './check/check-import.service.js';
@@ -11,20 +12,30 @@ import { ImportsController } from './imports.controller.js';
 import { ImportsService } from './imports.service.js';
 import { PartExportsController } from './part-exports.controller.js';
 import { PartExports } from './part-exports.service.js';
+import { PartLists } from './part-lists.service.js';
+import { ApplyPriceList } from './prices/apply-price-list.service.js';
+import { CheckPriceList } from './prices/check-price-list.service.js';
+import { PriceLists } from './prices/price-lists.service.js';
+import { UndoPriceList } from './prices/undo-price-list.service.js';
 import { UploadsService } from './uploads.service.js';
 
 @Module({
-  imports: [AuditModule, LibraryModule],
+  imports: [AuditModule, LibraryModule, PricesModule],
   controllers: [ImportsController, PartExportsController],
   providers: [
     ApplyImport,
+    ApplyPriceList,
     CheckImport,
+    CheckPriceList,
     ImportFiles,
     ImportJobs,
     ImportRowsService,
     ImportsService,
     PartExports,
+    PartLists,
+    PriceLists,
     UndoImport,
+    UndoPriceList,
     UploadsService,
   ],
 })

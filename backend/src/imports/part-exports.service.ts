@@ -9,8 +9,8 @@ import type { PartTable } from '../library/part-tables.js';
 import type { Caller } from '../shared/access/caller.js';
 import type { ExportQueryDto } from './dto/export-query.dto.js';
 import { csvLine, encoderOf, type WrittenList } from '../shared/csv/csv-lines.js';
-import type { ImportKind } from './import-states.js';
-import { tableOf } from './part-kinds.js';
+import type { PartListKind } from './import-states.js';
+import { tableOf } from './list-kinds.js';
 
 const PORTION = 1000;
 
@@ -19,7 +19,7 @@ const PORTION = 1000;
 export class PartExports {
   constructor(@InjectDataSource() private readonly dataSource: DataSource) {}
 
-  export(caller: Caller, kind: ImportKind, query: ExportQueryDto): WrittenList {
+  export(caller: Caller, kind: PartListKind, query: ExportQueryDto): WrittenList {
     return { name: `${kind}.csv`, pieces: this.pieces(caller, tableOf(kind), query) };
   }
 

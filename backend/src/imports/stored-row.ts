@@ -6,6 +6,7 @@ import {
   type RowState,
 } from '@roothertz/common/imports';
 import type { PartCells } from '../library/bulk-parts.js';
+import type { QuotedOffer } from '../prices/quoted-offers.service.js';
 
 /** A row of an uploaded list with its verdict; what doesn't concern it is left out. */
 export interface StoredRow {
@@ -22,6 +23,12 @@ export interface StoredRow {
   content?: PartCells;
   /** The part that stood there. */
   before?: PartCells;
+  /** Whose prices the row states. */
+  supplier?: string;
+  /** The offer that is to be written, at the first of its rows that changes something. */
+  offer?: QuotedOffer;
+  /** The id under which that offer was written. */
+  writtenId?: number;
   changes?: FieldChange[];
   doubts?: Doubt[];
   errors?: RowError[];

@@ -169,11 +169,21 @@ function parameterNames<Kind extends LibraryPart>(table: PartTable<Kind>): strin
 function toFoundPart<Kind extends LibraryPart>(table: PartTable<Kind>, row: unknown[]): FoundPart<Kind> {
   const [id, libraryId, kind, version, normalisedKey] = row as [number, number, PartKind, number, string];
   const ofKind = kind === table.catalogue.kind;
-  return { id, libraryId, kind, version, normalisedKey, part: ofKind ? toPart(table, row.slice(5)) : null };
+  return {
+    id,
+    libraryId,
+    kind,
+    version,
+    normalisedKey,
+    part: ofKind ? partOfCells(table, row.slice(5)) : null,
+  };
 }
 
 /** The part that the cells hold: the inverse of {@link toCells}. */
-function toPart<Kind extends LibraryPart>(table: PartTable<Kind>, cells: unknown[]): Kind {
+export function partOfCells<Kind extends LibraryPart>(
+  table: PartTable<Kind>,
+  cells: readonly unknown[],
+): Kind {
   const [manufacturer, partNumber, description, packageName, lifecycle, approval, origins, ...figures] =
     cells;
   const parameters = parameterKeys(table).map((key, place) => [key, figures[place]]);

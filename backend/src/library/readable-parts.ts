@@ -36,3 +36,21 @@ export async function findReadableIds(
 export function toPartName({ id, library, kind, manufacturer, partNumber }: Part): PartName {
   return { id, library: library.teamId === null ? 'curated' : 'team', kind, manufacturer, partNumber };
 }
+
+/** A part by what makes it the same part however its name is written. */
+export type KeyedPartName = PartName & { normalisedKey: string };
+
+/** The parts of these keys in the libraries that a caller reads; the team's own stand before the curated ones. */
+export async function findPartNames(
+  manager: EntityManager,
+  caller: Caller,
+  keys: readonly string[],
+): Promise<KeyedPartName[]> {
+  if (keys.length === 0) return [];
+  const parts = await selectReadableParts(manager, caller)
+    .andWhere('part.normalisedKey IN (:...keys)', { keys })
+    .orderBy('library.teamId IS NULL')
+    .addOrderBy('part.id')
+    .getMany();
+  return parts.map((part) => ({ ...toPartName(part), normalisedKey: part.normalisedKey }));
+}

@@ -1,7 +1,7 @@
-import { checkOffer } from '@roothertz/common/prices';
+import { checkOffer, newOfferTerms, type OfferTerms } from '@roothertz/common/prices';
 import type { Offer } from './entities/offer.entity.js';
 import type { Fault } from './offer-faults.js';
-import { defaultTerms, type OfferTerms, type StatedTerms, termsOf, withStated } from './offer-terms.js';
+import { type StatedTerms, termsOf, withStated } from './offer-terms.js';
 
 /** A change of the offer `id` at its `version`, or else a new offer. */
 export interface OfferRow extends StatedTerms {
@@ -63,7 +63,7 @@ function newDraft(row: OfferRow, { parts, suppliers }: Known, today: string): Dr
     return fault('part.not-found', 'partId', 'your libraries have no such part');
   if (!suppliers.has(Number(supplierId)))
     return fault('supplier.not-found', 'supplierId', 'your team has no such supplier');
-  const terms = withStated(defaultTerms(today), row) as OfferTerms;
+  const terms = withStated(newOfferTerms(today), row) as OfferTerms;
   return { draft: { current: null, partId: Number(partId), supplierId: Number(supplierId), terms } };
 }
 

@@ -14,11 +14,13 @@ export interface OfferView {
 
 export function toOfferResponse(offer: Offer, { staleAfterDays, today }: OfferView): OfferResponseDto {
   const confirmedAt = offer.confirmedAt.toISOString();
+  const { breaks, ...terms } = termsOf(offer);
   return {
     id: String(offer.id),
     part: toOfferedPart(toPartName(offer.part)),
     supplier: toSupplierResponse(offer.supplier),
-    ...termsOf(offer),
+    ...terms,
+    breaks: [...breaks],
     confirmedAt,
     confirmedBy: toMemberDto(offer.confirmedBy),
     openedAt: offer.openedAt.toISOString(),

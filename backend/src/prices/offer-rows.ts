@@ -1,7 +1,7 @@
+import type { OfferTerms } from '@roothertz/common/prices';
 import type { EntityManager } from 'typeorm';
 import { Offer } from './entities/offer.entity.js';
 import { OfferBreak } from './entities/offer-break.entity.js';
-import type { OfferTerms } from './offer-terms.js';
 
 /** An offer to be opened. */
 export interface NewOffer {
@@ -15,6 +15,8 @@ export interface NewOffer {
   openedAt: Date;
   closedAt?: Date;
   userId: number;
+  /** who saw that; left out = whose change it is */
+  confirmedById?: number | null;
 }
 
 /** Writes new offers with their breaks and gives their ids. */
@@ -29,12 +31,12 @@ export async function insertOffers(manager: EntityManager, offers: readonly NewO
   return ids;
 }
 
-function toRow({ terms, userId, closedAt, ...offer }: NewOffer) {
+function toRow({ terms, userId, closedAt, confirmedById = userId, ...offer }: NewOffer) {
   return {
     ...offer,
     ...terms,
     breaks: undefined,
-    confirmedById: userId,
+    confirmedById,
     openedById: userId,
     closedAt: closedAt ?? null,
     closedById: closedAt === undefined ? null : userId,

@@ -5,11 +5,11 @@ import { AuditService, type Recorded } from '../audit/audit.service.js';
 import { findReadableIds } from '../library/readable-parts.js';
 import type { Caller } from '../shared/access/caller.js';
 import { readId } from '../shared/ids/read-id.js';
-import { nameKey } from '../shared/text/name-key.js';
 import { Offer } from './entities/offer.entity.js';
 import { Supplier } from './entities/supplier.entity.js';
 import { type Draft, draftOffer, type Known, type OfferRow } from './offer-drafts.js';
 import { type Fault, refuseFaults } from './offer-faults.js';
+import { offerKey } from './offer-key.js';
 import { closeOffers, insertOffers } from './offer-rows.js';
 import { findOffers } from './offer-select.js';
 import { objectOf, sameTerms, termsOf } from './offer-terms.js';
@@ -102,24 +102,16 @@ async function findDuplicates(
   const partId = In(drafts.map((draft) => draft.partId));
   const open = await manager.findBy(Offer, { teamId, partId, closedAt: IsNull() });
   const changed = new Set(drafts.map(({ current }) => current?.id));
-  const taken = new Set(open.filter(({ id }) => !changed.has(id)).map(keyOf));
+  const taken = new Set(open.filter(({ id }) => !changed.has(id)).map(offerKey));
   return drafts.flatMap(({ current, terms, ...draft }, index): Fault[] => {
     const code = 'offer.duplicate';
     if (current && !changed.delete(current.id))
       return [{ code, field: `${pathOf(index)}id`, message: 'another row changes this offer already' }];
-    const key = keyOf({ ...draft, supplierNumber: terms.supplierNumber });
+    const key = offerKey({ ...draft, supplierNumber: terms.supplierNumber });
     if (taken.has(key)) return [{ code, field: `${pathOf(index)}supplierNumber`, message: TAKEN }];
     taken.add(key);
     return [];
   });
-}
-
-function keyOf({
-  partId,
-  supplierId,
-  supplierNumber,
-}: Omit<Draft, 'terms' | 'current'> & { supplierNumber: string }) {
-  return `${partId} ${supplierId} ${nameKey(supplierNumber)}`;
 }
 
 function atPath(faults: readonly Fault[], path: string): Fault[] {

@@ -1,18 +1,5 @@
-import { type PriceBreak, priceText } from '@roothertz/common/prices';
+import { type OfferTerms, priceText } from '@roothertz/common/prices';
 import type { Offer } from './entities/offer.entity.js';
-
-/** What of an offer a change can change. */
-export interface OfferTerms {
-  supplierNumber: string;
-  currency: string;
-  breaks: PriceBreak[];
-  minimumOrderQuantity: number;
-  orderMultiple: number;
-  leadTimeDays: number | null;
-  stock: number | null;
-  validFrom: string;
-  validUntil: string | null;
-}
 
 /** Terms of which what is left out stays, or has its default. */
 export type StatedTerms = Partial<OfferTerms>;
@@ -39,19 +26,6 @@ export function termsOf(offer: Offer): OfferTerms {
 /** An offer as the trail names it. */
 export function objectOf({ id, part, supplier }: Offer) {
   return { kind: 'offer' as const, id, label: `${part.partNumber} from ${supplier.name}` };
-}
-
-/** The terms of a new offer before what is stated of it. */
-export function defaultTerms(today: string): Omit<OfferTerms, 'currency' | 'breaks'> {
-  return {
-    supplierNumber: '',
-    minimumOrderQuantity: 1,
-    orderMultiple: 1,
-    leadTimeDays: null,
-    stock: null,
-    validFrom: today,
-    validUntil: null,
-  };
 }
 
 /** The terms that a statement makes of others. */

@@ -9,13 +9,18 @@ import { PriceSettings } from './entities/price-settings.entity.js';
 export class PriceChanges {
   constructor(@InjectDataSource() private readonly dataSource: DataSource) {}
 
-  /** The bump comes first: its lock lets each change see what the one before has left. */
+  /**
+   * The bump comes first: its lock lets each change see what the one before has left.
+   *
+   * @param within whose connection holds the transaction
+   */
   async run<Result>(
     { teamId }: Caller,
     change: (manager: EntityManager) => Promise<Result>,
+    within = this.dataSource.manager,
   ): Promise<Result> {
     await this.makeSettings(teamId);
-    return this.dataSource.transaction(async (manager) => {
+    return within.transaction(async (manager) => {
       await manager.increment(PriceSettings, { teamId }, 'revision', 1);
       return change(manager);
     });

@@ -11,6 +11,7 @@ import { PriceChanges } from './price-changes.service.js';
 import { PriceListService } from './price-list.service.js';
 import { PriceSettingsService } from './price-settings.service.js';
 import { PricesController } from './prices.controller.js';
+import { QuotedOffers } from './quoted-offers.service.js';
 import { RatesService } from './rates.service.js';
 import { SuppliersController } from './suppliers.controller.js';
 import { SuppliersService } from './suppliers.service.js';
@@ -26,9 +27,10 @@ import { SuppliersService } from './suppliers.service.js';
     PriceChanges,
     PriceListService,
     PriceSettingsService,
+    QuotedOffers,
     RatesService,
     SuppliersService,
   ],
-  exports: [PriceBookService],
+  exports: [PriceBookService, QuotedOffers],
 })
 export class PricesModule {}

@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
-import type { DataSource } from 'typeorm';
+import type { DataSource, EntityManager } from 'typeorm';
 import { AuditService } from '../audit/audit.service.js';
 import type { Caller } from '../shared/access/caller.js';
 import { DomainError } from '../shared/errors/domain-error.js';
@@ -42,17 +42,29 @@ export class SuppliersService {
 
   create(caller: Caller, { name }: CreateSupplierDto): Promise<SupplierResponseDto> {
     return this.dataSource
-      .transaction(async (manager) => {
-        const row = { teamId: caller.teamId, name, nameKey: nameKey(name), createdAt: new Date() };
-        const { identifiers } = await manager.insert(Supplier, row);
-        const id = identifiers[0].id as number;
-        const object = { kind: 'supplier', id, label: name } as const;
-        await this.audit.record(manager, caller, [
-          { action: 'supplier.added', object, from: null, to: { name } },
-        ]);
-        return toSupplierResponse({ id, name });
-      })
+      .transaction((manager) => this.add(manager, caller, name))
+      .then(toSupplierResponse)
       .catch(refuseDuplicate);
+  }
+
+  /** All suppliers of a team by the keys of their names. */
+  async byNameKey(
+    manager: EntityManager,
+    { teamId }: Pick<Caller, 'teamId'>,
+  ): Promise<Map<string, Pick<Supplier, 'id' | 'name'>>> {
+    const suppliers = await manager.findBy(Supplier, { teamId });
+    return new Map(suppliers.map(({ id, name, nameKey: key }) => [key, { id, name }]));
+  }
+
+  async add(manager: EntityManager, caller: Caller, name: string): Promise<Pick<Supplier, 'id' | 'name'>> {
+    const row = { teamId: caller.teamId, name, nameKey: nameKey(name), createdAt: new Date() };
+    const { identifiers } = await manager.insert(Supplier, row);
+    const id = identifiers[0].id as number;
+    const object = { kind: 'supplier', id, label: name } as const;
+    await this.audit.record(manager, caller, [
+      { action: 'supplier.added', object, from: null, to: { name } },
+    ]);
+    return { id, name };
   }
 }
 

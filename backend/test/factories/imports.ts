@@ -22,8 +22,8 @@ export async function uploadList(
 export function proposedMapping({ columns }: ImportResponseDto) {
   return columns.flatMap(({ proposed }) => {
     if (proposed === null) return [];
-    const { column, field, form, unit, frequency, origin } = proposed;
-    return [{ column, field, form, unit, frequency, origin }];
+    const { column, field, form, unit, frequency, quantity, origin } = proposed;
+    return [{ column, field, form, unit, frequency, quantity, origin }];
   });
 }
 
@@ -32,10 +32,14 @@ export async function checkedList(
   member: TestMember,
   kind: ImportKind,
   list: string | Buffer,
+  wholeList?: { supplier?: string; currency?: string },
 ): Promise<ImportResponseDto> {
   const upload = await uploadList(member, kind, list);
   const columns = proposedMapping(upload);
-  const { body } = await member.agent.put(`/api/imports/${upload.id}/mapping`).send({ columns }).expect(200);
+  const { body } = await member.agent
+    .put(`/api/imports/${upload.id}/mapping`)
+    .send({ columns, wholeList })
+    .expect(200);
   return ended(member, body as ImportResponseDto);
 }
 
@@ -55,8 +59,9 @@ export async function applyList(
   member: TestMember,
   kind: ImportKind,
   list: string | Buffer,
+  wholeList?: { supplier?: string; currency?: string },
 ): Promise<ImportResponseDto> {
-  const checked = await checkedList(member, kind, list);
+  const checked = await checkedList(member, kind, list, wholeList);
   await member.agent.post(`/api/imports/${checked.id}/apply`).expect(202);
   return ended(member, checked);
 }

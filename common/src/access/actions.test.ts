@@ -33,6 +33,10 @@ describe('mayDo', () => {
     expect(allowedRoles('audit.read')).toEqual(['admin']);
   });
 
+  it('lets whoever keeps parts or prices bring in lists', () => {
+    expect(allowedRoles('lists.import')).toEqual(['admin', 'librarian', 'purchasing']);
+  });
+
   it('lets admin, librarian and engineer save conditions', () => {
     expect(allowedRoles('conditions.save')).toEqual(['admin', 'librarian', 'engineer']);
   });
@@ -50,7 +54,11 @@ describe('planIncludes', () => {
   });
 
   it('leaves a library of one’s own and prices out of the free plan', () => {
-    expect(actions.filter((action) => !planIncludes('free', action))).toEqual(['parts.edit', 'prices.edit']);
+    expect(actions.filter((action) => !planIncludes('free', action))).toEqual([
+      'parts.edit',
+      'prices.edit',
+      'lists.import',
+    ]);
   });
 });
 

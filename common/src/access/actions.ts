@@ -20,6 +20,8 @@ export const ACTIONS = {
   'conditions.save': { roles: ['admin', 'librarian', 'engineer'], writes: true },
   'prices.read': { roles: 'every member' },
   'prices.edit': { roles: ['admin', 'purchasing'], needs: 'prices', writes: true },
+  /** Lists of parts or of prices: which of them a member brings in, the action of that kind says besides. */
+  'lists.import': { roles: ['admin', 'librarian', 'purchasing'], needs: 'ownLibrary', writes: true },
   'team.read': { roles: 'every member' },
   'team.manage': { roles: ['admin'] },
   'audit.read': { roles: ['admin'] },

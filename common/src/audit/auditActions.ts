@@ -15,6 +15,8 @@ export const AUDIT_ACTIONS = {
   'part.deleted': 'deleted the part',
   'import.applied': 'applied the import',
   'import.undone': 'took back the import',
+  'import.cancelled': 'cancelled the work on the import',
+  'import.discarded': 'discarded the list',
   'conditions.saved': 'saved the conditions',
   'conditions.changed': 'changed the conditions',
   'conditions.deleted': 'deleted the conditions',

@@ -21,8 +21,8 @@ function mappingOf(headings: readonly string[], propose = columnProposer(OP_AMP_
   return headings.flatMap((heading, column) => {
     const proposed = propose(heading);
     if (proposed === null) return [];
-    const { field, form, unit, frequency, origin } = proposed;
-    return [{ column, field, form, unit, frequency, origin }];
+    const { field, form, unit, frequency, quantity, origin } = proposed;
+    return [{ column, field, form, unit, frequency, quantity, origin }];
   });
 }
 

@@ -14,7 +14,7 @@ export type ProposedColumn = Omit<ColumnMapping, 'column'> & {
   unitAssumed: boolean;
 };
 
-const NOTHING = { unit: null, frequency: null, origin: null, unitAssumed: false };
+const NOTHING = { unit: null, frequency: null, quantity: null, origin: null, unitAssumed: false };
 const SLOW_NOISE = 'voltageNoise';
 
 /**
@@ -76,6 +76,7 @@ function figureProposal(parameter: ParameterDefinition, pieces: HeadingPieces): 
     form,
     unit: unit ?? (isPeaks ? 'µV' : parameter.displayUnit),
     frequency: form === 'spot' ? pieces.frequency : null,
+    quantity: null,
     origin: pieces.origin === 'maximum' ? 'maximum' : null,
     unitAssumed: unit === null && (isPeaks || parameter.displayUnit !== ''),
   };

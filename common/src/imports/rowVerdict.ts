@@ -21,7 +21,14 @@ export interface RowError {
   expected: string;
 }
 
-export const DOUBT_CODES = ['below-shot-noise', 'implausibly-quiet', 'factor-of-1000', 'repeated'] as const;
+export const DOUBT_CODES = [
+  'below-shot-noise',
+  'implausibly-quiet',
+  'factor-of-1000',
+  'repeated',
+  'price-slip',
+  'new-supplier',
+] as const;
 export type DoubtCode = (typeof DOUBT_CODES)[number];
 
 /** What makes a row suspicious that could be kept. */

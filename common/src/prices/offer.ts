@@ -29,6 +29,22 @@ export interface Offer {
   confirmedAt: string;
 }
 
+/** What of an offer a change can change. */
+export type OfferTerms = Omit<Offer, 'supplier' | 'confirmedAt'>;
+
+/** The terms of a new offer before what is stated of it. */
+export function newOfferTerms(today: string): Omit<OfferTerms, 'currency' | 'breaks'> {
+  return {
+    supplierNumber: '',
+    minimumOrderQuantity: 1,
+    orderMultiple: 1,
+    leadTimeDays: null,
+    stock: null,
+    validFrom: today,
+    validUntil: null,
+  };
+}
+
 /** Whether an offer can be accepted on a day. */
 export function isValidOn({ validFrom, validUntil }: Offer, day: string): boolean {
   return validFrom <= day && (validUntil === null || day <= validUntil);

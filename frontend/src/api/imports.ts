@@ -13,7 +13,9 @@ export type ImportRow = Schemas['ImportRowDto'];
 export type RowCounts = Schemas['RowCountsDto'];
 export type RowList = ImportRow['state'] | 'kept';
 export type Dialect = Import['dialect'];
-export type DialectChoice = Omit<Schemas['MapImportDto'], 'columns'>;
+export type DialectChoice = Omit<Schemas['MapImportDto'], 'columns' | 'wholeList' | 'version'>;
+export type ImportDescription = Schemas['MapImportDto'];
+export type PartListKind = Exclude<ImportKind, 'prices'>;
 
 const POLL_MS = 1000;
 const RUNNING: readonly ImportState[] = ['checking', 'waiting', 'applying', 'undoing'];
@@ -74,7 +76,7 @@ export function uploadImport(kind: ImportKind, file: File, signal: AbortSignal):
   return answer(client.POST('/api/imports', { body, bodySerializer: () => form, signal }));
 }
 
-export function mapImport(id: string, body: Schemas['MapImportDto']): Promise<Import> {
+export function mapImport(id: string, body: ImportDescription): Promise<Import> {
   return answer(client.PUT('/api/imports/{id}/mapping', { params: { path: { id } }, body }));
 }
 
@@ -86,6 +88,10 @@ export function cancelImport(id: string): Promise<Import> {
   return answer(client.POST('/api/imports/{id}/cancel', { params: { path: { id } } }));
 }
 
+export function discardImport(id: string): Promise<unknown> {
+  return answer(client.DELETE('/api/imports/{id}', { params: { path: { id } } }));
+}
+
 export function undoImport(id: string): Promise<Import> {
   return answer(client.POST('/api/imports/{id}/undo', { params: { path: { id } } }));
 }
@@ -95,7 +101,7 @@ export function refusedRowsAddress(id: string): string {
 }
 
 /** Where the team's own library is exported, for a spreadsheet of either decimal mark. */
-export function libraryAddress(kind: ImportKind, decimalMark: Dialect['decimalMark']): string {
+export function libraryAddress(kind: PartListKind, decimalMark: Dialect['decimalMark']): string {
   const delimiter = decimalMark === 'comma' ? 'semicolon' : 'comma';
   return `/api/${kind}.csv?delimiter=${delimiter}&decimalMark=${decimalMark}`;
 }

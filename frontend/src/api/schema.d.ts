@@ -286,7 +286,7 @@ export interface paths {
         get: operations["getImport"];
         put?: never;
         post?: never;
-        delete?: never;
+        delete: operations["discardImport"];
         options?: never;
         head?: never;
         patch?: never;
@@ -1138,7 +1138,7 @@ export interface components {
         };
         AuditEntryResponseDto: {
             /** @enum {string} */
-            action: "offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked";
+            action: "offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked";
             /** Format: date-time */
             at: string;
             /** @description null where the account is gone. */
@@ -1238,12 +1238,14 @@ export interface components {
             /** @description Key of a field or parameter. */
             field: string;
             /** @enum {string} */
-            form?: "value" | "origin" | "spot" | "peak-to-peak";
+            form?: "value" | "origin" | "spot" | "peak-to-peak" | "break";
             /** @description At which the noise density is stated. In Hz. */
             frequency?: number | null;
             /** @enum {string|null} */
             origin?: "typical" | "maximum" | "measured" | "estimated" | null;
-            /** @description Of figures whose cells state none. */
+            /** @description Pieces from which on the unit price holds. */
+            quantity?: number | null;
+            /** @description Of figures whose cells state none; of prices, their currency. */
             unit?: string | null;
         };
         ColumnProposalDto: {
@@ -1254,12 +1256,14 @@ export interface components {
             /** @description Key of a field or parameter. */
             field: string;
             /** @enum {string} */
-            form?: "value" | "origin" | "spot" | "peak-to-peak";
+            form?: "value" | "origin" | "spot" | "peak-to-peak" | "break";
             /** @description At which the noise density is stated. In Hz. */
             frequency?: number | null;
             /** @enum {string|null} */
             origin?: "typical" | "maximum" | "measured" | "estimated" | null;
-            /** @description Of figures whose cells state none. */
+            /** @description Pieces from which on the unit price holds. */
+            quantity?: number | null;
+            /** @description Of figures whose cells state none; of prices, their currency. */
             unit?: string | null;
             /** @description The file names no unit. */
             unitAssumed: boolean;
@@ -1366,12 +1370,12 @@ export interface components {
         };
         DoubtDto: {
             /** @enum {string} */
-            code: "below-shot-noise" | "implausibly-quiet" | "factor-of-1000" | "repeated";
+            code: "below-shot-noise" | "implausibly-quiet" | "factor-of-1000" | "repeated" | "price-slip" | "new-supplier";
             field: string | null;
             message: string;
         };
         /** @enum {string} */
-        ErrorCode: "request.invalid" | "billing.event" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "billing.declined" | "access.seats" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "invitation.other-address" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "invitation.not-found" | "member.not-found" | "import.not-found" | "mail.unknown-link" | "invitation.member" | "invitation.duplicate" | "invitation.used" | "invitation.account-exists" | "team.last-admin" | "team.owner" | "part.stale" | "part.duplicate" | "part.in-use" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "billing.trial-used" | "billing.subscribed" | "billing.not-subscribed" | "billing.outdated" | "import.state" | "import.outdated" | "invitation.expired" | "invitation.revoked" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "team.owner-invalid" | "billing.seats" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "billing.unavailable" | "database.unavailable";
+        ErrorCode: "request.invalid" | "billing.event" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "billing.declined" | "access.seats" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "invitation.other-address" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "invitation.not-found" | "member.not-found" | "import.not-found" | "mail.unknown-link" | "invitation.member" | "invitation.duplicate" | "invitation.used" | "invitation.account-exists" | "team.last-admin" | "team.owner" | "part.stale" | "part.duplicate" | "part.in-use" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "billing.trial-used" | "billing.subscribed" | "billing.not-subscribed" | "billing.outdated" | "import.state" | "import.stale" | "import.too-many" | "import.outdated" | "invitation.expired" | "invitation.revoked" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "team.owner-invalid" | "billing.seats" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "billing.unavailable" | "database.unavailable";
         EvaluateStageDto: {
             amplifier: components["schemas"]["AmplifierDto"];
             conditions: components["schemas"]["OperatingConditionsDto"];
@@ -1469,7 +1473,7 @@ export interface components {
             /** @description Rows that an undoing left, for they were edited since. */
             keptCount: number;
             /** @enum {string} */
-            kind: "op-amps" | "resistors";
+            kind: "op-amps" | "resistors" | "prices";
             /** @description Null = not said yet. */
             mapping: components["schemas"]["ColumnMappingDto"][] | null;
             /** @description Null = nobody is at work on it. */
@@ -1484,8 +1488,13 @@ export interface components {
             /** Format: date-time */
             undoneAt: string | null;
             undoneBy: components["schemas"]["MemberDto"] | null;
+            /** @description Goes up with each change of dialect or columns. */
+            version: number;
+            /** @description What holds for all rows of a price list that has no column for it. */
+            wholeList: components["schemas"]["StatedOfListDto"];
         };
         ImportRowDto: {
+            /** @description Of a new row, all that would be kept. */
             changes: components["schemas"]["FieldChangeDto"][];
             doubts: components["schemas"]["DoubtDto"][];
             errors: components["schemas"]["RowErrorDto"][];
@@ -1497,6 +1506,8 @@ export interface components {
             partNumber: string;
             /** @enum {string} */
             state: "new" | "changed" | "unchanged" | "doubtful" | "refused";
+            /** @description Whose price it is; null in a list of parts. */
+            supplier: string | null;
         };
         ImportRowListDto: {
             items: components["schemas"]["ImportRowDto"][];
@@ -1521,7 +1532,7 @@ export interface components {
             /** @description Rows that an undoing left, for they were edited since. */
             keptCount: number;
             /** @enum {string} */
-            kind: "op-amps" | "resistors";
+            kind: "op-amps" | "resistors" | "prices";
             /** @description Null = nobody is at work on it. */
             progress: components["schemas"]["ImportProgressDto"] | null;
             rowCount: number;
@@ -1593,6 +1604,9 @@ export interface components {
             encoding?: "utf-8" | "utf-16le" | "utf-16be" | "windows-1252";
             /** @description The line on which the headings stand, from 1. */
             headerLine?: number;
+            /** @description The version that was last read. */
+            version?: number;
+            wholeList?: components["schemas"]["WholeListDto"];
         };
         MemberDto: {
             id: string;
@@ -2491,6 +2505,10 @@ export interface components {
             /** @description The version that was last read. */
             version: number;
         };
+        StatedOfListDto: {
+            currency: string | null;
+            supplier: string | null;
+        };
         SupplierListDto: {
             items: components["schemas"]["SupplierResponseDto"][];
             /** @description How many there are in all, whatever the page holds. */
@@ -2591,11 +2609,16 @@ export interface components {
              */
             file: string;
             /** @enum {string} */
-            kind: "op-amps" | "resistors";
+            kind: "op-amps" | "resistors" | "prices";
         };
         UsingConditionsDto: {
             id: string;
             name: string;
+        };
+        WholeListDto: {
+            /** @description ISO 4217 */
+            currency?: string;
+            supplier?: string;
         };
         WholeStageDto: {
             /** @description dB, over the band; null where the source makes no noise. */
@@ -2637,7 +2660,7 @@ export interface operations {
     listAuditEntries: {
         parameters: {
             query?: {
-                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
+                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
                 objectKind?: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
                 objectId?: string;
                 userId?: string;
@@ -2674,7 +2697,7 @@ export interface operations {
     exportAuditEntries: {
         parameters: {
             query?: {
-                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
+                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
                 objectKind?: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
                 objectId?: string;
                 userId?: string;
@@ -3299,6 +3322,34 @@ export interface operations {
                 content: {
                     "application/json": components["schemas"]["ImportResponseDto"];
                 };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    discardImport: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
             };
             /** @description Problem details (RFC 9457) */
             default: {

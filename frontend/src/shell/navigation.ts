@@ -10,7 +10,7 @@ interface NavigationEntry {
 export const NAVIGATION: readonly NavigationEntry[] = [
   { to: '/rank', label: 'Rank', action: 'rankings.run' },
   { to: '/parts', label: 'Parts', action: 'parts.read' },
-  { to: '/imports', label: 'Import', action: 'parts.edit' },
+  { to: '/imports', label: 'Import', action: 'lists.import' },
 ];
 
 export const START_PAGE = '/rank';

@@ -12,7 +12,10 @@ export function importOf(changes: Partial<Import> = {}): Import {
     column,
     heading,
     samples,
-    proposed: field === null ? null : { ...proposal, column, field, unit, frequency: null, origin: null },
+    proposed:
+      field === null
+        ? null
+        : { ...proposal, column, field, unit, frequency: null, quantity: null, origin: null },
   }));
   return {
     id: '5',
@@ -44,6 +47,8 @@ export function importOf(changes: Partial<Import> = {}): Import {
       const { confidence: _confidence, unitAssumed: _unitAssumed, ...mapped } = proposed;
       return [mapped];
     }),
+    wholeList: { supplier: null, currency: null },
+    version: 1,
     rememberedMapping: null,
     sameFile: null,
     ...changes,
@@ -55,6 +60,7 @@ export const CHANGED_ROW: ImportRow = {
   state: 'changed',
   manufacturer: 'Vireo',
   partNumber: 'VR-1108',
+  supplier: null,
   changes: [{ field: 'amplifier.voltageNoise', old: 1.1e-9, new: 1.15e-9 }],
   doubts: [],
   errors: [],
@@ -69,4 +75,39 @@ export const REFUSED_ROW: ImportRow = {
   partNumber: '',
   changes: [],
   errors: [{ column: 'en', value: 'n.a.', why: 'a number was expected', expected: 'such as 3.3 nV/√Hz' }],
+};
+
+/** A price list that isn't checked yet, without columns for supplier and currency. */
+export function pricesOf(changes: Partial<Import> = {}): Import {
+  const proposal = { confidence: 1, unitAssumed: false, unit: null, frequency: null, origin: null };
+  const columns: Import['columns'] = [
+    { field: 'manufacturer', heading: 'Hersteller' },
+    { field: 'partNumber', heading: 'Typ' },
+    { field: 'unitPrice', heading: 'ab 100', quantity: 100 },
+    { field: null, heading: 'Lagerort' },
+  ].map(({ field, heading, quantity = null }, column) => ({
+    column,
+    heading,
+    samples: ['1'],
+    proposed:
+      field === null
+        ? null
+        : { ...proposal, column, field, quantity, form: quantity === null ? 'value' : ('break' as const) },
+  }));
+  return importOf({
+    id: '6',
+    kind: 'prices',
+    fileName: 'angebot.csv',
+    state: 'uploaded',
+    columns,
+    mapping: null,
+    counts: null,
+    ...changes,
+  });
+}
+
+export const PRICE_ROW: ImportRow = {
+  ...CHANGED_ROW,
+  supplier: 'Larkholm Components',
+  changes: [{ field: 'breaks.100', old: '3.1000', new: '2.9500' }],
 };

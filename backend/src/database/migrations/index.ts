@@ -8,6 +8,7 @@ import { CreateImports1796083300000 } from './1796083300000-CreateImports.js';
 import { CreateMail1796090100000 } from './1796090100000-CreateMail.js';
 import { CreateSubscriptions1796090300000 } from './1796090300000-CreateSubscriptions.js';
 import { CreateBillingEvents1796090310000 } from './1796090310000-CreateBillingEvents.js';
+import { AddPriceLists1796090400000 } from './1796090400000-AddPriceLists.js';
 import { NameAuditObjects1796090600000 } from './1796090600000-NameAuditObjects.js';
 import { AddTeamOwners1796090600100 } from './1796090600100-AddTeamOwners.js';
 import { CreateInvitations1796090600200 } from './1796090600200-CreateInvitations.js';
@@ -26,6 +27,7 @@ export const MIGRATIONS = [
   CreateMail1796090100000,
   CreateSubscriptions1796090300000,
   CreateBillingEvents1796090310000,
+  AddPriceLists1796090400000,
   NameAuditObjects1796090600000,
   AddTeamOwners1796090600100,
   CreateInvitations1796090600200,

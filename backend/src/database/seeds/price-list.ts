@@ -1,5 +1,4 @@
-import { addDays, checkOffer } from '@roothertz/common/prices';
-import type { OfferTerms } from '../../prices/offer-terms.js';
+import { addDays, checkOffer, type OfferTerms } from '@roothertz/common/prices';
 import { type ListedRow, readRows } from './part-list.js';
 
 const PRICE_AT = /^price at (\d+)$/;

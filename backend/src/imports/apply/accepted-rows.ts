@@ -12,16 +12,21 @@ export interface AcceptedPortion {
   accepted: AcceptedRow[];
 }
 
-/** The portions of an import's rows; the next one is read by another connection meanwhile. */
 export async function* acceptedPortions(
   dataSource: DataSource,
   importId: number,
 ): AsyncGenerator<AcceptedPortion> {
+  for await (const portion of portionsOf(dataSource, importId))
+    yield { portion, accepted: portion.rows.filter(isAccepted) };
+}
+
+/** The portions of an import's rows; the next one is read by another connection meanwhile. */
+export async function* portionsOf(dataSource: DataSource, importId: number): AsyncGenerator<ImportPortion> {
   let portion = await portionAfter(dataSource, importId, 0);
   while (portion !== null) {
     const next = portionAfter(dataSource, importId, portion.portion);
     next.catch(() => undefined);
-    yield { portion, accepted: portion.rows.filter(isAccepted) };
+    yield portion;
     portion = await next;
   }
 }

@@ -14,9 +14,9 @@ import { DomainError } from '../../shared/errors/domain-error.js';
 import { Import } from '../entities/import.entity.js';
 import { ImportFiles } from '../import-files.service.js';
 import { type ImportJob, ImportJobs } from '../import-jobs.service.js';
+import { importRecord } from '../import-record.js';
 import { APPLICABLE_STATES } from '../import-states.js';
-import { objectOf } from '../import-select.js';
-import { tableOf } from '../part-kinds.js';
+import { tableOf } from '../list-kinds.js';
 import { acceptedRows } from '../row-counts.js';
 import { acceptedPortions, type AcceptedRow, keysOf } from './accepted-rows.js';
 import { changeLibraryAlone } from './library-lock.js';
@@ -53,10 +53,7 @@ export class ApplyImport {
         { id: entity.id },
         { state: 'applied', appliedAt: stamp.at, appliedById: stamp.userId, storedName: null },
       );
-      const to = { rows: acceptedRows(entity.counts!) };
-      await this.audit.record(job.runner.manager, caller, [
-        { action: 'import.applied', object: objectOf(entity), from: null, to },
-      ]);
+      await this.audit.record(job.runner.manager, caller, [importRecord('import.applied', entity)]);
     });
     if (entity.storedName !== null) await this.files.remove(entity.storedName);
   }

@@ -6,14 +6,14 @@ import { AuditService } from '../../audit/audit.service.js';
 import { LibraryService } from '../../library/library.service.js';
 import type { Caller } from '../../shared/access/caller.js';
 import { Import } from '../entities/import.entity.js';
-import { ImportPortion } from '../entities/import-portion.entity.js';
 import { type ImportJob, ImportJobs } from '../import-jobs.service.js';
-import { objectOf } from '../import-select.js';
-import { tableOf } from '../part-kinds.js';
+import { importRecord } from '../import-record.js';
+import { tableOf } from '../list-kinds.js';
 import { acceptedRows } from '../row-counts.js';
 import { acceptedPortions, type AcceptedRow, keysOf } from './accepted-rows.js';
 import { type CurrentPart, currentParts } from './current-parts.js';
 import { changeLibraryAlone } from './library-lock.js';
+import { markKept } from './mark-kept.js';
 
 /** A row of an applied import with the part that it wrote, where nobody has touched it since. */
 interface Untouched {
@@ -54,7 +54,12 @@ export class UndoImport {
           untouched.flatMap(({ row, part }) => restored(row, part)),
           stamp,
         );
-        kept += await markKept(job.runner, portion, rows, untouched);
+        const undone = new Set(untouched.map(({ row }) => row));
+        kept += await markKept(
+          job.runner,
+          portion,
+          rows.filter((row) => !undone.has(row)),
+        );
         done += rows.length;
         await job.progress(done);
       }
@@ -63,9 +68,8 @@ export class UndoImport {
         { id: entity.id },
         { state: 'undone', undoneAt: stamp.at, undoneById: stamp.userId, keptCount: kept },
       );
-      const to = { takenBack: done - kept, kept };
       await this.audit.record(job.runner.manager, caller, [
-        { action: 'import.undone', object: objectOf(entity), from: null, to },
+        importRecord('import.undone', entity, { takenBack: done - kept, kept }),
       ]);
     });
   }
@@ -110,22 +114,4 @@ async function takeBack(runner: QueryRunner, untouched: readonly Untouched[]): P
 
 function restored({ before, normalisedKey }: AcceptedRow, { id, version }: CurrentPart) {
   return before === undefined ? [] : [{ id, version: version + 1, normalisedKey, cells: before }];
-}
-
-async function markKept(
-  runner: QueryRunner,
-  { importId, portion, counts, rows: all }: ImportPortion,
-  rows: readonly AcceptedRow[],
-  untouched: readonly Untouched[],
-): Promise<number> {
-  const undone = new Set(untouched.map(({ row }) => row));
-  const kept = rows.filter((row) => !undone.has(row));
-  for (const row of kept) row.kept = true;
-  if (kept.length > 0)
-    await runner.manager.update(
-      ImportPortion,
-      { importId, portion },
-      { counts: { ...counts, kept: kept.length }, rows: all as object[] },
-    );
-  return kept.length;
 }

@@ -7,14 +7,14 @@ import type { PartTable } from '../../library/part-tables.js';
 import type { Caller } from '../../shared/access/caller.js';
 import { Import } from '../entities/import.entity.js';
 import { ImportPortion } from '../entities/import-portion.entity.js';
-import { readRecords } from '../file/csv-records.js';
+import { readRows } from '../file/csv-records.js';
 import { ImportFiles } from '../import-files.service.js';
 import { type ImportJob, ImportJobs } from '../import-jobs.service.js';
 import { MAPPABLE_STATES } from '../import-states.js';
-import { tableOf } from '../part-kinds.js';
+import { tableOf } from '../list-kinds.js';
 import { noRows } from '../row-counts.js';
 import { type CheckedRow, type ReadRow, RowChecker } from './row-checker.js';
-import { writeVerdicts } from './row-writer.js';
+import { toStored, writeRows } from './row-writer.js';
 
 /** Rows that are read, looked up and written together. */
 const PORTION = 500;
@@ -32,16 +32,16 @@ export class CheckImport {
     const ownLibraryId = await this.libraries.editableLibrary(caller);
     const libraries = await this.libraries.readableLibraries(caller);
     const beginning = { from: MAPPABLE_STATES, to: 'checking' as const, total: entity.rowCount };
-    return this.jobs.start(entity.id, beginning, (job) => this.check(job, entity, libraries, ownLibraryId));
+    return this.jobs.start(entity.id, beginning, (job) => this.check(job, libraries, ownLibraryId));
   }
 
   private async check(
     job: ImportJob,
-    entity: Import,
     libraries: readonly ReadableLibrary[],
     ownLibraryId: number,
   ): Promise<void> {
-    const { runner } = job;
+    const { runner, importId: id } = job;
+    const entity = await runner.manager.findOneByOrFail(Import, { id });
     const table = tableOf(entity.kind);
     const checker = new RowChecker(table.catalogue, entity, ownLibraryId);
     const counts = noRows();
@@ -57,7 +57,8 @@ export class CheckImport {
       for await (const rows of this.readRows(entity, checker)) {
         const checked = await checkRows(runner, table, checker, libraries, known, rows);
         await writing;
-        writing = writeVerdicts(runner, table, { importId: entity.id, portion }, checked, counts);
+        const stored = checked.map((row) => toStored(table, row));
+        writing = writeRows(runner, { importId: entity.id, portion }, stored, counts);
         writing.catch(() => undefined);
         portion += 1;
         position += rows.length;
@@ -79,12 +80,8 @@ export class CheckImport {
   }
 
   private async *readRows({ storedName, dialect }: Import, checker: RowChecker): AsyncGenerator<ReadRow[]> {
-    let isHeader = true;
-    for await (const records of readRecords(this.files.pathOf(storedName!), dialect, PORTION)) {
-      const rows = isHeader ? records.slice(1) : records;
-      isHeader = false;
-      if (rows.length > 0) yield rows.map((record) => checker.read(record));
-    }
+    for await (const records of readRows(this.files.pathOf(storedName!), dialect, PORTION))
+      yield records.map((record) => checker.read(record));
   }
 }
 

@@ -1,4 +1,10 @@
-import { DECIMAL_MARKS, type DecimalMark, type RowState } from '@roothertz/common/imports';
+import {
+  DECIMAL_MARKS,
+  type DecimalMark,
+  NOT_STATED,
+  type RowState,
+  type WholeList,
+} from '@roothertz/common/imports';
 import { ApiProperty } from '@nestjs/swagger';
 import { listOf } from '../../shared/list/list-response.js';
 import { MemberDto, toMemberDto } from '../../shared/members/member.dto.js';
@@ -136,6 +142,14 @@ class ImportColumnDto {
   proposed: ColumnProposalDto | null;
 }
 
+class StatedOfListDto implements WholeList {
+  @ApiProperty({ type: String, nullable: true })
+  supplier: string | null;
+
+  @ApiProperty({ type: String, nullable: true })
+  currency: string | null;
+}
+
 class SameFileDto {
   @ApiProperty()
   id: string;
@@ -157,6 +171,12 @@ export class ImportResponseDto extends ImportSummaryDto {
 
   @ApiProperty({ type: [ColumnMappingDto], nullable: true, description: 'Null = not said yet.' })
   mapping: ColumnMappingDto[] | null;
+
+  @ApiProperty({ description: 'What holds for all rows of a price list that has no column for it.' })
+  wholeList: StatedOfListDto;
+
+  @ApiProperty({ type: 'integer', description: 'Goes up with each change of dialect or columns.' })
+  version: number;
 
   @ApiProperty({
     type: [ColumnMappingDto],
@@ -197,8 +217,9 @@ export function toImportResponse(
   entity: Import,
   beside: Pick<ImportResponseDto, 'rememberedMapping' | 'sameFile'>,
 ): ImportResponseDto {
-  const { dialect, columns, mapping } = entity;
-  return { ...toImportSummary(entity), dialect, columns, mapping, ...beside };
+  const { dialect, columns, mapping, version } = entity;
+  const wholeList = entity.wholeList ?? NOT_STATED;
+  return { ...toImportSummary(entity), dialect, columns, mapping, wholeList, version, ...beside };
 }
 
 export function toSameFile({ id, state, createdAt }: Import): SameFileDto {

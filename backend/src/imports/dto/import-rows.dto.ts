@@ -11,7 +11,8 @@ import { ApiProperty } from '@nestjs/swagger';
 import { ListQueryDto } from '../../shared/list/list-query.dto.js';
 import { listOf } from '../../shared/list/list-response.js';
 import { Option } from '../../shared/validation/option.decorator.js';
-import type { ImportColumn } from '../file/import-columns.js';
+import type { Import } from '../entities/import.entity.js';
+import { keptValues } from '../kept-values.js';
 import { ROW_LISTS, type RowList, type StoredRow } from '../stored-row.js';
 
 export class ListImportRowsDto extends ListQueryDto {
@@ -74,7 +75,10 @@ export class ImportRowDto {
   @ApiProperty()
   partNumber: string;
 
-  @ApiProperty({ type: [FieldChangeDto] })
+  @ApiProperty({ type: String, nullable: true, description: 'Whose price it is; null in a list of parts.' })
+  supplier: string | null;
+
+  @ApiProperty({ type: [FieldChangeDto], description: 'Of a new row, all that would be kept.' })
   changes: FieldChangeDto[];
 
   @ApiProperty({ type: [DoubtDto] })
@@ -89,14 +93,18 @@ export class ImportRowDto {
 
 export class ImportRowListDto extends listOf(ImportRowDto) {}
 
-export function toImportRow(row: StoredRow, columns: readonly ImportColumn[]): ImportRowDto {
-  const { line, state, manufacturer, partNumber, changes, doubts, errors, kept } = row;
+export function toImportRow(
+  row: StoredRow,
+  { columns, kind }: Pick<Import, 'columns' | 'kind'>,
+): ImportRowDto {
+  const { line, state, manufacturer, partNumber, supplier, doubts, errors, kept } = row;
   return {
     line,
     state,
     manufacturer,
     partNumber,
-    changes: changes ?? [],
+    supplier: supplier ?? null,
+    changes: row.changes ?? keptValues(kind, row),
     doubts: doubts ?? [],
     errors: (errors ?? []).map(({ column, value, why, expected }) => ({
       column: column === null ? null : (columns[column]?.heading ?? null),

@@ -6,10 +6,14 @@ import {
   type DecimalMark,
 } from '@roothertz/common/imports';
 import { type Origin, ORIGINS, type QuantityField } from '@roothertz/common/parts';
-import { NestedList } from '../../shared/validation/nested.decorator.js';
+import { currencyError, OFFER_FIELDS, SUPPLIER_NAME } from '@roothertz/common/prices';
+import { Checked } from '../../shared/validation/checked.decorator.js';
+import { Nested, NestedList } from '../../shared/validation/nested.decorator.js';
 import { Option } from '../../shared/validation/option.decorator.js';
 import { Quantity } from '../../shared/validation/quantity.decorator.js';
+import { StoredText } from '../../shared/validation/stored-text.decorator.js';
 import { Text } from '../../shared/validation/text.decorator.js';
+import { Version } from '../../shared/validation/version.decorator.js';
 import { type Delimiter, DELIMITERS, type Encoding, ENCODINGS } from '../../shared/csv/csv-format.js';
 import { MOST_COLUMNS } from '../file/import-columns.js';
 
@@ -47,14 +51,31 @@ export class ColumnMappingDto implements ColumnMapping {
   @Option(COLUMN_FORMS, { optional: true })
   form: ColumnForm = 'value';
 
-  @Text({ label: 'unit', maxLength: 40, ...MAYBE, description: 'Of figures whose cells state none.' })
+  @Text({
+    label: 'unit',
+    maxLength: 40,
+    ...MAYBE,
+    description: 'Of figures whose cells state none; of prices, their currency.',
+  })
   unit: string | null = null;
 
   @Quantity(FREQUENCY, MAYBE)
   frequency: number | null = null;
 
+  @Quantity(OFFER_FIELDS.minimumQuantity, MAYBE)
+  quantity: number | null = null;
+
   @Option(ORIGINS, MAYBE)
   origin: Origin | null = null;
+}
+
+/** What holds for all rows of a price list that has no column for it; what is left out isn't stated. */
+export class WholeListDto {
+  @StoredText(SUPPLIER_NAME, { optional: true })
+  supplier?: string;
+
+  @Checked(currencyError, { description: 'ISO 4217' }, { optional: true })
+  currency?: string;
 }
 
 /** What the columns are, and what is overruled of the dialect; without columns they are proposed anew. */
@@ -70,6 +91,13 @@ export class MapImportDto {
 
   @Quantity(HEADER_LINE, { optional: true })
   headerLine?: number;
+
+  @Nested(() => WholeListDto, { optional: true })
+  wholeList?: WholeListDto;
+
+  /** Left out = whatever the import's version is. */
+  @Version({ optional: true })
+  version?: number;
 
   @NestedList(() => ColumnMappingDto, { most: MOST_COLUMNS, optional: true })
   columns?: ColumnMappingDto[];

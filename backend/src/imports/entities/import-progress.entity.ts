@@ -20,6 +20,7 @@ export class ImportProgress {
   @Column({ type: 'datetime', precision: 3, nullable: true })
   since: Date | null;
 
-  @Column({ name: 'cancel_requested', type: 'tinyint', default: 0 })
-  cancelRequested: number;
+  /** The user who wants the work to stop; null = nobody. */
+  @Column({ name: 'cancelled_by', type: 'int', unsigned: true, nullable: true })
+  cancelledById: number | null;
 }

@@ -1,4 +1,4 @@
-import type { ColumnMapping } from '@roothertz/common/imports';
+import type { ColumnMapping, WholeList } from '@roothertz/common/imports';
 import {
   Column,
   Entity,
@@ -63,6 +63,14 @@ export class Import {
 
   @Column({ type: 'json', nullable: true })
   mapping: ColumnMapping[] | null;
+
+  /** What was said of all rows; null = nothing. */
+  @Column({ name: 'whole_list', type: 'json', nullable: true })
+  wholeList: WholeList | null;
+
+  /** Goes up by one with each change of dialect, columns or what holds for the whole list. */
+  @Column({ type: 'int', unsigned: true, default: 1 })
+  version: number;
 
   @Column({ name: 'row_count', type: 'int', unsigned: true })
   rowCount: number;

@@ -39,11 +39,7 @@ export function parserOptions(delimiter: Delimiter): Options {
 }
 
 /** The rows of a file from its headings on, in portions, so that no more of them is in memory at once. */
-export async function* readRecords(
-  path: string,
-  dialect: Dialect,
-  portion: number,
-): AsyncGenerator<CsvRecord[]> {
+async function* readRecords(path: string, dialect: Dialect, portion: number): AsyncGenerator<CsvRecord[]> {
   let records: CsvRecord[] = [];
   let size = 0;
   for await (const parsed of parsedFile<ParsedRecord>(path, dialect, true)) {
@@ -57,6 +53,20 @@ export async function* readRecords(
     size = 0;
   }
   if (records.length > 0) yield records;
+}
+
+/** The rows of a file below its headings, in portions. */
+export async function* readRows(
+  path: string,
+  dialect: Dialect,
+  portion: number,
+): AsyncGenerator<CsvRecord[]> {
+  let isHeader = true;
+  for await (const records of readRecords(path, dialect, portion)) {
+    const rows = isHeader ? records.slice(1) : records;
+    isHeader = false;
+    if (rows.length > 0) yield rows;
+  }
 }
 
 /** Counts the rows of a file, those above the headings among them. */

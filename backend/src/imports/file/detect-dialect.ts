@@ -1,6 +1,4 @@
-import type { DecimalMark } from '@roothertz/common/imports';
-import { columnProposer } from '@roothertz/common/imports';
-import type { ListedFields } from '@roothertz/common/parts';
+import type { DecimalMark, ListColumns } from '@roothertz/common/imports';
 import { parse } from 'csv-parse/sync';
 import iconv from 'iconv-lite';
 import { type CsvRecord, type ParsedRecord, parserOptions, toRecord } from './csv-records.js';
@@ -10,6 +8,8 @@ import type { FileFacts } from './text-encoding.js';
 
 const SAMPLE_RECORDS = 100;
 const HEADER_WITHIN = 20;
+/** A number alone may head a column of prices, but it doesn't tell headings from other rows. */
+const LETTER = /\p{L}/u;
 const WITH_COMMA = /(?<![\d.,])\d+,\d+(?![\d.,])/;
 const WITH_POINT = /(?<![\d.,])\d+\.\d+(?![\d.,])/;
 
@@ -24,14 +24,14 @@ export interface DetectedDialect {
 
 /** Detects how a list is written; null where not one row can be read. */
 export function detectDialect(
-  catalogue: ListedFields,
+  columns: ListColumns,
   facts: FileFacts,
   choice: DialectChoice = {},
 ): DetectedDialect | null {
   const encoding = choice.encoding ?? facts.encoding;
   const text = iconv.decode(facts.head, encoding);
-  const propose = columnProposer(catalogue);
-  const known = rememberedTest((heading) => propose(heading) !== null);
+  const propose = columns.proposer();
+  const known = rememberedTest((heading) => LETTER.test(heading) && propose(heading) !== null);
   const candidates = choice.delimiter === undefined ? DELIMITERS : [choice.delimiter];
   const [best] = candidates
     .map((delimiter) => readAs(text, delimiter, known, choice.headerLine))

@@ -1,12 +1,11 @@
 import { createHash } from 'node:crypto';
 import {
   type ColumnMapping,
-  columnProposer,
-  proposeField,
+  type ListColumns,
   type ProposedColumn,
   readHeading,
 } from '@roothertz/common/imports';
-import { type ListedFields, normaliseWord, PART_FIELDS } from '@roothertz/common/parts';
+import { normaliseWord } from '@roothertz/common/parts';
 import Fuse from 'fuse.js';
 import { shortened } from '../../shared/text/shortened.js';
 import type { DetectedDialect } from './detect-dialect.js';
@@ -36,8 +35,8 @@ const SHORTEST_WORD = 4;
 const MOST_SPOTS = 2;
 
 /** The columns of a list with what each is proposed to become. */
-export function importColumns(catalogue: ListedFields, { header, sample }: DetectedDialect): ImportColumn[] {
-  const proposals = withoutRivals(proposalsFor(catalogue, header.cells));
+export function importColumns(list: ListColumns, { header, sample }: DetectedDialect): ImportColumn[] {
+  const proposals = withoutRivals(proposalsFor(list, header.cells));
   return header.cells.map((heading, column) => ({
     column,
     heading: shown(heading),
@@ -63,15 +62,15 @@ function samplesOf(cells: readonly string[]): string[] {
     .map(shown);
 }
 
-function proposalsFor(catalogue: ListedFields, headings: readonly string[]): (ColumnProposal | null)[] {
-  const propose = columnProposer(catalogue);
-  const guess = fieldGuesser(catalogue);
+function proposalsFor(list: ListColumns, headings: readonly string[]): (ColumnProposal | null)[] {
+  const propose = list.proposer();
+  const guess = fieldGuesser(list);
   return headings.map((heading, column) => {
     if (heading.length > LONGEST_TEXT) return null;
     const exact = propose(heading);
     if (exact !== null) return toProposal(exact, column, 1);
     const guessed = guess(heading);
-    return guessed && toProposal(proposeField(catalogue, guessed.field, heading), column, guessed.confidence);
+    return guessed && toProposal(list.proposeField(guessed.field, heading), column, guessed.confidence);
   });
 }
 
@@ -80,11 +79,9 @@ function toProposal(proposed: ProposedColumn, column: number, confidence: number
 }
 
 /** Finds the field whose names a heading resembles. */
-function fieldGuesser({ choice, parameters }: ListedFields) {
-  const names = [...PART_FIELDS, choice, ...parameters].flatMap(({ key, label, synonyms }) =>
-    [label, ...synonyms].map((name) => ({ field: key as string, word: normaliseWord(name) })),
-  );
-  const known = names.filter(({ word }) => word.length >= SHORTEST_WORD);
+function fieldGuesser({ names }: ListColumns) {
+  const words = names.map(({ field, name }) => ({ field, word: normaliseWord(name) }));
+  const known = words.filter(({ word }) => word.length >= SHORTEST_WORD);
   const fuse = new Fuse(known, { keys: ['word'], includeScore: true, threshold: 1 - LEAST_CONFIDENCE });
   return (heading: string): { field: string; confidence: number } | null => {
     const word = normaliseWord(readHeading(heading).name);
@@ -95,19 +92,25 @@ function fieldGuesser({ choice, parameters }: ListedFields) {
   };
 }
 
-/** Of several columns for one value the surest stays, the first of equals; of several spots the outermost two. */
+/**
+ * Of several columns for one value the surest stays, the first of equals; of several spots the outermost two; of
+ * several prices from one quantity on none, for “Qty 1” and “Price 1” are something else.
+ */
 function withoutRivals(proposals: (ColumnProposal | null)[]): (ColumnProposal | null)[] {
   const kept = new Set<ColumnProposal>();
   const groups = new Map<string, ColumnProposal[]>();
   for (const proposal of proposals) {
     if (proposal === null) continue;
-    const name = `${proposal.field} ${proposal.form}`;
+    const name = `${proposal.field} ${proposal.form} ${proposal.quantity ?? ''}`;
     groups.set(name, [...(groups.get(name) ?? []), proposal]);
   }
-  for (const rivals of groups.values())
-    for (const proposal of rivals[0].form === 'spot' ? outermost(rivals) : [surest(rivals)])
-      kept.add(proposal);
+  for (const rivals of groups.values()) for (const proposal of keptOf(rivals)) kept.add(proposal);
   return proposals.map((proposal) => (proposal !== null && kept.has(proposal) ? proposal : null));
+}
+
+function keptOf(rivals: readonly ColumnProposal[]): readonly ColumnProposal[] {
+  if (rivals[0].form === 'spot') return outermost(rivals);
+  return rivals[0].form === 'break' && rivals.length > 1 ? [] : [surest(rivals)];
 }
 
 function surest(rivals: readonly ColumnProposal[]): ColumnProposal {

@@ -1,7 +1,8 @@
-import type { ListedFields } from '@roothertz/common/parts';
 import iconv from 'iconv-lite';
 import { DomainError } from '../../shared/errors/domain-error.js';
 import type { Import } from '../entities/import.entity.js';
+import type { ImportKind } from '../import-states.js';
+import { LIST_KINDS } from '../list-kinds.js';
 import { countRecords } from './csv-records.js';
 import { detectDialect } from './detect-dialect.js';
 import type { Encoding } from '../../shared/csv/csv-format.js';
@@ -9,7 +10,6 @@ import type { Dialect, DialectChoice } from './dialect.js';
 import { headerKey, importColumns, MOST_COLUMNS } from './import-columns.js';
 import { inspectFile } from './text-encoding.js';
 
-const MOST_ROWS = 500_000;
 /** So many of a list's characters may be controls; a file with more is no text. */
 const CONTROL_SHARE = 0.05;
 
@@ -21,18 +21,19 @@ export type ReadUpload = Pick<
 
 /** Reads an uploaded list through once: how it is written, its columns, how many rows it has. */
 export async function readUpload(
-  catalogue: ListedFields,
+  kind: ImportKind,
   path: string,
   choice?: DialectChoice,
 ): Promise<ReadUpload> {
+  const { columns, mostRows } = LIST_KINDS[kind];
   const facts = await inspectFile(path);
-  const detected = detectDialect(catalogue, facts, choice);
+  const detected = detectDialect(columns, facts, choice);
   if (detected === null || isNoText(facts.head, detected.dialect.encoding))
     throw new DomainError('import.unreadable', 'No row can be read: is the file a text with a delimiter?');
   const { dialect, header, recordsBefore } = detected;
   if (header.cells.length > MOST_COLUMNS)
     throw new DomainError('import.unreadable', `The list has more than ${MOST_COLUMNS} columns.`);
-  const rowCount = await countRows(path, dialect, recordsBefore);
+  const rowCount = await countRows(path, dialect, { recordsBefore, mostRows });
   if (rowCount === 0)
     throw new DomainError('import.unreadable', `There is no row below the headings of line ${header.line}.`);
   return {
@@ -40,7 +41,7 @@ export async function readUpload(
     sha256: facts.sha256,
     headerKey: headerKey(header.cells),
     dialect,
-    columns: importColumns(catalogue, detected),
+    columns: importColumns(columns, detected),
     rowCount,
   };
 }
@@ -51,12 +52,19 @@ function isNoText(head: Buffer, encoding: Encoding): boolean {
   return controls > text.length * CONTROL_SHARE;
 }
 
-async function countRows(path: string, dialect: Dialect, recordsBefore: number): Promise<number> {
+async function countRows(
+  path: string,
+  dialect: Dialect,
+  { recordsBefore, mostRows }: { recordsBefore: number; mostRows: number },
+): Promise<number> {
   let count = -recordsBefore - 1;
   for await (const more of countRecords(path, dialect)) {
     count += more;
-    if (count > MOST_ROWS)
-      throw new DomainError('import.too-large', 'The list has more than 500 000 rows: split it.');
+    if (count > mostRows)
+      throw new DomainError(
+        'import.too-large',
+        `The list has more than ${mostRows / 1000} 000 rows: split it.`,
+      );
   }
   return Math.max(0, count);
 }

@@ -43,6 +43,8 @@ export const ERROR_CODES = {
   'billing.not-subscribed': { status: 409, title: 'No paid plan' },
   'billing.outdated': { status: 409, title: 'Costs changed meanwhile' },
   'import.state': { status: 409, title: 'Not now' },
+  'import.stale': { status: 409, title: 'Import changed meanwhile' },
+  'import.too-many': { status: 409, title: 'Too many lists' },
   'import.outdated': { status: 409, title: 'Library changed meanwhile' },
   'invitation.expired': { status: 410, title: 'Invitation too old' },
   'invitation.revoked': { status: 410, title: 'Invitation withdrawn' },

@@ -1,5 +1,5 @@
-import { type Dialect, type ImportKind, libraryAddress } from '../../api/imports';
-import { KINDS } from './kinds';
+import { type Dialect, libraryAddress } from '../../api/imports';
+import { KINDS, PART_LISTS } from './kinds';
 import styles from './ExportLinks.module.css';
 
 const MARKS: readonly [Dialect['decimalMark'], string][] = [
@@ -12,13 +12,13 @@ export function ExportLinks() {
   return (
     <section className={styles.exports} aria-label="Export your library">
       <h2>Export your library as CSV</h2>
-      {Object.entries(KINDS).map(([kind, { title }]) => (
+      {PART_LISTS.map((kind) => (
         <p key={kind}>
-          {title}:{' '}
+          {KINDS[kind].title}:{' '}
           {MARKS.map(([mark, words]) => (
-            <a key={mark} href={libraryAddress(kind as ImportKind, mark)} download>
+            <a key={mark} href={libraryAddress(kind, mark)} download>
               with {words}
-              <span className="visually-hidden">, {title.toLowerCase()}</span>
+              <span className="visually-hidden">, {KINDS[kind].title.toLowerCase()}</span>
             </a>
           ))}
         </p>

@@ -10,7 +10,7 @@ const PAGE = 50;
 const COLUMNS = ['file', 'read by', 'new', 'changed', 'unchanged', 'doubtful', 'refused', 'outcome', ''];
 
 /** The team's imports, the latest first. */
-export function History({ mayEdit }: { mayEdit: boolean }) {
+export function History() {
   const [page, setPage] = useState(1);
   const { data, error, refetch } = useQuery(importsQuery(page));
   if (error)
@@ -39,7 +39,7 @@ export function History({ mayEdit }: { mayEdit: boolean }) {
           </thead>
           <tbody>
             {data.items.map((imported) => (
-              <HistoryRow key={imported.id} imported={imported} mayEdit={mayEdit} />
+              <HistoryRow key={imported.id} imported={imported} />
             ))}
           </tbody>
         </table>

@@ -4,6 +4,7 @@ import { Link } from 'react-router-dom';
 import { type ImportSummary, isRunning } from '../../api/imports';
 import { detailOf } from '../../api/problem';
 import { FieldMessage } from '../../components/FieldMessage';
+import { useMayDo } from '../../components/useMember';
 import styles from './History.module.css';
 import { count, moment, rows, stateWords } from './importWords';
 import { KINDS } from './kinds';
@@ -11,11 +12,11 @@ import { useImportActs } from './useImportActs';
 
 interface HistoryRowProps {
   imported: ImportSummary;
-  mayEdit: boolean;
 }
 
-export function HistoryRow({ imported, mayEdit }: HistoryRowProps) {
+export function HistoryRow({ imported }: HistoryRowProps) {
   const { id, kind, fileName, rowCount, counts, createdAt, createdBy, state } = imported;
+  const mayEdit = useMayDo(KINDS[kind].action);
   const { undo } = useImportActs(id);
   return (
     <tr>

@@ -1,7 +1,7 @@
 import { type Import, isRunning } from '../../api/imports';
 import { Detected } from './Detected';
 import styles from './ImportWork.module.css';
-import { isMappable } from './importWords';
+import { isDescribable, isMappable } from './importWords';
 import { MappingTable } from './MappingTable';
 import { Notices } from './Notices';
 import { Outcome } from './Outcome';
@@ -19,14 +19,13 @@ interface ImportWorkProps {
 export function ImportWork({ imported, mayEdit }: ImportWorkProps) {
   const mapping = useMapping(imported, mayEdit);
   const acts = useImportActs(imported.id);
-  const canChange = mayEdit && isMappable(imported);
-  const canMap = mayEdit && (canChange || imported.state === 'checking');
+  const canChange = mayEdit && isDescribable(imported);
   const isStale = isMappable(imported) && mapping.isStale;
   return (
     <>
       <Detected imported={imported} canChange={canChange} onOverrule={mapping.overrule} />
       <div className={styles.work}>
-        <MappingTable imported={imported} mapping={mapping} canChange={canMap} />
+        <MappingTable imported={imported} mapping={mapping} canChange={canChange} />
         <section className={styles.verdicts} aria-label="What becomes of the rows">
           <Notices imported={imported} mapping={mapping} mayEdit={mayEdit} />
           {isRunning(imported) && (

@@ -1,11 +1,10 @@
 import type { ColumnMapping } from '@roothertz/common/imports';
-import type { ListedFields } from '@roothertz/common/parts';
 import { Select } from 'antd';
-import { unitChoices } from './fieldChoices';
+import type { ListView } from './listView';
 import styles from './MappingTable.module.css';
 
 interface MappedUnitProps {
-  catalogue: ListedFields;
+  view: ListView;
   heading: string;
   mapped: ColumnMapping;
   canChange: boolean;
@@ -13,11 +12,8 @@ interface MappedUnitProps {
 }
 
 /** The unit of the figures whose cells state none. */
-export function MappedUnit({ catalogue, heading, mapped, canChange, onChange }: MappedUnitProps) {
-  const parameter = catalogue.parameters.find(({ key }) => key === mapped.field);
-  if (parameter === undefined || mapped.form === 'origin') return null;
-  const kind = mapped.form === 'peak-to-peak' ? 'voltage' : parameter.kind;
-  const options = unitChoices(kind, mapped.unit);
+export function MappedUnit({ view, heading, mapped, canChange, onChange }: MappedUnitProps) {
+  const options = view.units(mapped);
   if (options.length === 0) return null;
   if (!canChange) return mapped.unit;
   return (
@@ -30,7 +26,8 @@ export function MappedUnit({ catalogue, heading, mapped, canChange, onChange }: 
       placeholder="none"
       options={options}
       value={mapped.unit}
-      onChange={(unit) => onChange({ ...mapped, unit })}
+      showSearch={options.length > 20 && { optionFilterProp: 'label' }}
+      onChange={(unit) => onChange({ ...mapped, unit: unit || null })}
     />
   );
 }

@@ -1,9 +1,9 @@
 import type { ColumnMapping } from '@roothertz/common/imports';
-import type { ListedFields } from '@roothertz/common/parts';
 import { Select } from 'antd';
 import type { ImportColumn } from '../../api/imports';
 import { FieldMessage } from '../../components/FieldMessage';
-import { becomesWords, type fieldChoices } from './fieldChoices';
+import { BreakQuantity } from './BreakQuantity';
+import { becomesWords, type FieldChoice, type FieldChoices, type ListView } from './listView';
 import { type Becomes, becomesOf, columnAs, type Mapping } from './mappingDraft';
 import { doubtOf, notesOf } from './mappingNotes';
 import styles from './MappingTable.module.css';
@@ -11,17 +11,16 @@ import { MappedUnit } from './MappedUnit';
 import { SpotFrequency } from './SpotFrequency';
 
 interface MappingRowProps {
-  catalogue: ListedFields;
+  view: ListView;
   column: ImportColumn;
   mapping: Mapping;
-  choices: ReturnType<typeof fieldChoices>;
   canChange: boolean;
   fault: string | undefined;
   onChange: (next: ColumnMapping | null) => void;
 }
 
 export function MappingRow(props: MappingRowProps) {
-  const { catalogue, column, mapping, choices, canChange, fault, onChange } = props;
+  const { view, column, mapping, canChange, fault, onChange } = props;
   const heading = column.heading || `column ${column.column + 1}`;
   const mapped = mapping.find((one) => one.column === column.column);
   const doubt = doubtOf(column, mapped);
@@ -36,19 +35,21 @@ export function MappingRow(props: MappingRowProps) {
       <td>
         <span className={styles.becomes}>
           {canChange ? (
-            <Select<Becomes, { value?: Becomes; label: string }>
+            <Select<Becomes, FieldChoices[number] & Partial<FieldChoice>>
               variant="borderless"
               suffixIcon={null}
               className={mapped ? styles.choice : styles.leftOut}
               popupMatchSelectWidth={false}
               showSearch={{ optionFilterProp: 'label' }}
               aria-label={`${heading} becomes`}
-              options={choices}
+              options={[...view.choices]}
               value={becomesOf(mapped)}
-              onChange={(becomes) => onChange(columnAs(catalogue, column, becomes))}
+              onChange={(becomes) => onChange(columnAs(view, column, becomes))}
             />
           ) : (
-            <span className={mapped ? styles.fixed : styles.none}>{becomesWords(choices, mapped)}</span>
+            <span className={mapped ? styles.fixed : styles.none}>
+              {becomesWords(view.choices, becomesOf(mapped))}
+            </span>
           )}
           {doubt && (
             <abbr className={styles.doubt} title={doubt}>
@@ -57,10 +58,11 @@ export function MappingRow(props: MappingRowProps) {
           )}
         </span>
         {mapped?.form === 'spot' && <SpotFrequency {...{ heading, mapped, canChange, onChange }} />}
+        {mapped?.form === 'break' && <BreakQuantity {...{ heading, mapped, canChange, onChange }} />}
         {mapped && <Notes lines={notesOf(column, mapped, mapping)} />}
         {fault !== undefined && <FieldMessage>{fault}</FieldMessage>}
       </td>
-      <td>{mapped && <MappedUnit {...{ catalogue, heading, mapped, canChange, onChange }} />}</td>
+      <td>{mapped && <MappedUnit {...{ view, heading, mapped, canChange, onChange }} />}</td>
     </tr>
   );
 }

@@ -1,14 +1,14 @@
 import { Button } from 'antd';
-import { useMemo, useState } from 'react';
+import { useState } from 'react';
 import type { Import } from '../../api/imports';
 import { FieldMessage } from '../../components/FieldMessage';
-import { fieldChoices } from './fieldChoices';
 import { count } from './importWords';
 import { KINDS } from './kinds';
-import { faultsByColumn, withColumn } from './mappingDraft';
+import { faultsByColumn, isStatedByColumn, withColumn } from './mappingDraft';
 import { MappingRow } from './MappingRow';
 import styles from './MappingTable.module.css';
 import type { ImportMapping } from './useMapping';
+import { WholeListFields } from './WholeListFields';
 
 interface MappingTableProps {
   imported: Import;
@@ -21,14 +21,20 @@ const MOST_AT_FIRST = 60;
 /** What each column of the file is, with the first cells under its heading. */
 export function MappingTable({ imported, mapping, canChange }: MappingTableProps) {
   const { kind, columns } = imported;
-  const { catalogue } = KINDS[kind];
+  const { view } = KINDS[kind];
   const [isWhole, setWhole] = useState(false);
-  const choices = useMemo(() => fieldChoices(catalogue), [catalogue]);
   const faults = faultsByColumn(mapping.mapping, mapping.errors);
   const fault = faults.get(null);
   const shown = isWhole ? columns : columns.slice(0, MOST_AT_FIRST);
   return (
     <section className={styles.mapping} aria-label="What each column is">
+      {kind === 'prices' && (
+        <WholeListFields
+          {...{ canChange, wholeList: mapping.wholeList, errors: mapping.errors }}
+          has={(field) => isStatedByColumn(mapping.mapping, field)}
+          onChange={mapping.changeWholeList}
+        />
+      )}
       <h2>What each column is</h2>
       {fault !== undefined && <FieldMessage>{fault}</FieldMessage>}
       <table className={styles.table}>
@@ -43,7 +49,7 @@ export function MappingTable({ imported, mapping, canChange }: MappingTableProps
           {shown.map((column) => (
             <MappingRow
               key={column.column}
-              {...{ catalogue, column, choices, canChange }}
+              {...{ view, column, canChange }}
               mapping={mapping.mapping}
               fault={faults.get(column.column)}
               onChange={(next) => mapping.change(withColumn(mapping.mapping, column.column, next))}

@@ -6,9 +6,9 @@ export function NoOwnLibrary() {
   const { roles } = useMember();
   return (
     <p>
-      {mayDo(roles, 'parts.edit')
+      {mayDo(roles, 'lists.import')
         ? 'Your team’s plan has no library of its own, so there is nothing to import into. The team plan has one.'
-        : 'Lists are imported by your team’s librarians and admins. You can look at what was imported.'}
+        : 'Lists of parts are imported by your team’s librarians, prices by purchasing, and both by its admins. You can look at what was imported.'}
     </p>
   );
 }

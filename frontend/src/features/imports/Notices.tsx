@@ -4,6 +4,7 @@ import { type Import, isRunning } from '../../api/imports';
 import { detailOf } from '../../api/problem';
 import { FieldMessage } from '../../components/FieldMessage';
 import { isMappable, moment, stateWords } from './importWords';
+import { KINDS } from './kinds';
 import type { ImportMapping } from './useMapping';
 
 interface NoticesProps {
@@ -20,7 +21,7 @@ export function Notices({ imported, mapping, mayEdit }: NoticesProps) {
   return (
     <>
       {failure !== null && !isRunning(imported) && <p role="alert">{failure}</p>}
-      {state === 'cancelled' && <p role="status">Cancelled: the library is as before.</p>}
+      {state === 'cancelled' && <p role="status">Cancelled: {KINDS[imported.kind].asBefore}.</p>}
       {sameFile !== null && (
         <p>
           The very same file was{' '}

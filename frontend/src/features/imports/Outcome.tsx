@@ -3,7 +3,8 @@ import { Link } from 'react-router-dom';
 import { type Import, isRunning, refusedRowsAddress } from '../../api/imports';
 import { detailOf } from '../../api/problem';
 import { FieldMessage } from '../../components/FieldMessage';
-import { acceptedRows, count, isApplicable, moment, rows } from './importWords';
+import { DiscardButton } from './DiscardButton';
+import { acceptedRows, count, isApplicable, isMappable, moment, rows } from './importWords';
 import { KINDS } from './kinds';
 import styles from './Outcome.module.css';
 import type { useImportActs } from './useImportActs';
@@ -18,19 +19,22 @@ interface OutcomeProps {
 /** What can be done with the checked rows, or what became of them. */
 export function Outcome({ imported, acts, mayEdit, isStale }: OutcomeProps) {
   const { id, counts } = imported;
-  const error = acts.apply.error ?? acts.undo.error ?? acts.cancel.error;
-  if (isRunning(imported) || counts === null) return error && <FieldMessage>{detailOf(error)}</FieldMessage>;
+  const error = acts.apply.error ?? acts.undo.error ?? acts.cancel.error ?? acts.discard.error;
+  if (isRunning(imported)) return error && <FieldMessage>{detailOf(error)}</FieldMessage>;
   return (
     <footer className={styles.outcome}>
-      {mayEdit && <NextAct imported={imported} acts={acts} isStale={isStale} />}
-      {counts.refused > 0 && (
+      {mayEdit && counts && <NextAct imported={imported} acts={acts} isStale={isStale} />}
+      {counts && counts.refused > 0 && (
         <Button href={refusedRowsAddress(id)} download disabled={isStale}>
           Download the {count(counts.refused)} refused {counts.refused === 1 ? 'row' : 'rows'}
         </Button>
       )}
-      <p className={styles.words}>
-        <OutcomeWords imported={imported} />
-      </p>
+      {mayEdit && isMappable(imported) && <DiscardButton discard={acts.discard} />}
+      {counts && (
+        <p className={styles.words}>
+          <OutcomeWords imported={imported} />
+        </p>
+      )}
       {error && <FieldMessage>{detailOf(error)}</FieldMessage>}
     </footer>
   );
@@ -67,16 +71,17 @@ function OutcomeWords({ imported }: { imported: Import }) {
       <>
         {rows(acceptedRows(counts!))} applied by {who(appliedBy)}, {moment(appliedAt!)}.{' '}
         <Link to={KINDS[kind].path}>See the {KINDS[kind].title.toLowerCase()}</Link>. Undoing brings back what
-        stood there before; parts that were edited since stay.
+        stood there before; {KINDS[kind].stays} stay.
       </>
     );
   if (state === 'undone')
     return (
       `Undone by ${who(undoneBy)}, ${moment(undoneAt!)}. ` +
       (keptCount === 0
-        ? 'The library is as it was before.'
-        : `${rows(keptCount)} stay as they are, for their parts were edited or priced since: they are listed under “kept”.`)
+        ? `Now ${KINDS[kind].asBefore}.`
+        : `${rows(keptCount)} stay as they are: they are listed under “kept”, being ${KINDS[kind].stays}.`)
     );
-  if (acceptedRows(counts!) === 0) return 'There is nothing to apply: no row adds or changes a part.';
+  if (acceptedRows(counts!) === 0)
+    return `There is nothing to apply: no row adds or changes ${KINDS[kind].row}.`;
   return 'Nothing has changed yet. It can be undone afterwards.';
 }

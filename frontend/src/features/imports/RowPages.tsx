@@ -15,14 +15,17 @@ interface RowPagesProps {
   limit: number;
 }
 
-const NOTHING: Record<RowList, string> = {
-  new: 'No row adds a part.',
-  changed: 'No row changes a part.',
-  unchanged: 'No row is as the library has it already.',
-  doubtful: 'No accepted row is doubtful.',
-  refused: 'No row is refused.',
-  kept: 'No row was kept.',
-};
+function nothing(list: RowList, row: string): string {
+  const words: Record<RowList, string> = {
+    new: `No row adds ${row}.`,
+    changed: `No row changes ${row}.`,
+    unchanged: 'No row says what stands there already.',
+    doubtful: 'No accepted row is doubtful.',
+    refused: 'No row is refused.',
+    kept: 'No row was kept.',
+  };
+  return words[list];
+}
 
 /** The rows of one verdict, in pages. */
 export function RowPages({ imported: { id, kind }, list, limit }: RowPagesProps) {
@@ -36,14 +39,14 @@ export function RowPages({ imported: { id, kind }, list, limit }: RowPagesProps)
       </p>
     );
   if (data === undefined) return <Skeleton title={false} paragraph={{ rows: 6, width: '100%' }} />;
-  if (data.items.length === 0) return <p className={styles.nothing}>{NOTHING[list]}</p>;
+  if (data.items.length === 0) return <p className={styles.nothing}>{nothing(list, KINDS[kind].row)}</p>;
   return (
     <>
       <div className={styles.scroll}>
         {list === 'refused' ? (
           <RefusedTable rows={data.items} />
         ) : (
-          <RowsTable catalogue={KINDS[kind].catalogue} rows={data.items} />
+          <RowsTable view={KINDS[kind].view} rows={data.items} />
         )}
       </div>
       {data.total > limit && (

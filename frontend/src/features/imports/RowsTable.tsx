@@ -1,16 +1,15 @@
-import type { ListedFields } from '@roothertz/common/parts';
 import type { ImportRow } from '../../api/imports';
-import { changeWords } from './changeWords';
 import { count } from './importWords';
+import type { ListView } from './listView';
 import styles from './RowsTable.module.css';
 
 interface RowsTableProps {
-  catalogue: ListedFields;
+  view: ListView;
   rows: readonly ImportRow[];
 }
 
 /** Rows that are accepted: what each changes, field by field, and what is doubtful in it. */
-export function RowsTable({ catalogue, rows }: RowsTableProps) {
+export function RowsTable({ view, rows }: RowsTableProps) {
   return (
     <table className={styles.table}>
       <thead>
@@ -27,9 +26,10 @@ export function RowsTable({ catalogue, rows }: RowsTableProps) {
             <td className={styles.line}>{count(row.line)}</td>
             <td>
               <strong>{row.partNumber}</strong> <span className={styles.maker}>{row.manufacturer}</span>
+              {row.supplier !== null && <span className={styles.supplier}>{row.supplier}</span>}
             </td>
             <td>
-              <Changes catalogue={catalogue} row={row} />
+              <Changes view={view} row={row} />
             </td>
             <td className={styles.doubt}>
               {row.doubts.map(({ message }) => (
@@ -43,11 +43,21 @@ export function RowsTable({ catalogue, rows }: RowsTableProps) {
   );
 }
 
-function Changes({ catalogue, row: { changes, state } }: { catalogue: ListedFields; row: ImportRow }) {
-  if (changes.length === 0)
-    return <span className={styles.maker}>{state === 'unchanged' ? 'nothing' : 'new part'}</span>;
+interface ChangesProps {
+  view: ListView;
+  row: ImportRow;
+}
+
+function Changes({ view, row: { changes, state } }: ChangesProps) {
+  if (changes.length === 0 && state === 'unchanged') return <span className={styles.maker}>nothing</span>;
   return changes.map((change) => {
-    const { label, old, next } = changeWords(catalogue, change);
+    const { label, old, next } = view.changeWords(change);
+    if (change.old === null && state !== 'changed')
+      return (
+        <span key={change.field} className={styles.kept}>
+          {label} <ins>{next}</ins>
+        </span>
+      );
     return (
       <span key={change.field} className={styles.change}>
         {label} <del aria-label={`was ${old}`}>{old}</del> <ins>{next}</ins>

@@ -1,15 +1,10 @@
 import { type ColumnMapping, NOISE_FORMS } from '@roothertz/common/imports';
 import { type ListedFields, PART_FIELDS } from '@roothertz/common/parts';
 import { type QuantityKind, QUANTITIES, parseUnit } from '@roothertz/common/units';
-import { type Becomes, becomesOf } from './mappingDraft';
+import type { FieldChoice, FieldChoices } from './listView';
 
-interface FieldChoice {
-  value: Becomes;
-  label: string;
-}
-
-/** Everything that a column can become, in groups. */
-export function fieldChoices({ choice, parameters }: ListedFields) {
+/** Everything that a column of a list of parts can become, in groups. */
+export function fieldChoices({ choice, parameters }: ListedFields): FieldChoices {
   const texts = [...PART_FIELDS, choice].map(({ key, label }) => choiceOf('value', key, label));
   const figures = parameters.flatMap(({ key, label }) => [
     choiceOf('value', key, label),
@@ -22,17 +17,6 @@ export function fieldChoices({ choice, parameters }: ListedFields) {
     { label: 'Figures', options: figures },
     { label: 'Where a figure comes from', options: origins },
   ];
-}
-
-/** What a column becomes, as the choices call it. */
-export function becomesWords(
-  choices: ReturnType<typeof fieldChoices>,
-  mapped: ColumnMapping | undefined,
-): string {
-  const all: FieldChoice[] = choices.flatMap(
-    (entry) => ('options' in entry ? entry.options : [entry]) as FieldChoice[],
-  );
-  return all.find(({ value }) => value === becomesOf(mapped))?.label ?? 'left out';
 }
 
 function noiseForms(key: string, label: string): FieldChoice[] {
@@ -75,4 +59,11 @@ export function unitChoices(kind: QuantityKind, present: string | null): { value
   const usual = PREFIXES_OF[kind]?.map((prefix) => prefix + QUANTITIES[kind].unit) ?? OTHER_UNITS[kind] ?? [];
   const spelt = present !== null && !usual.includes(present) && parseUnit(present, kind) ? [present] : [];
   return [...spelt, ...usual].map((unit) => ({ value: unit, label: unit }));
+}
+
+/** The units that a column of a list of parts may be in. */
+export function partUnits({ parameters }: ListedFields, { field, form, unit }: ColumnMapping) {
+  const parameter = parameters.find(({ key }) => key === field);
+  if (parameter === undefined || form === 'origin') return [];
+  return unitChoices(form === 'peak-to-peak' ? 'voltage' : parameter.kind, unit);
 }

@@ -34,6 +34,11 @@ export function isMappable({ state }: Pick<Import, 'state'>): boolean {
   return MAPPABLE.includes(state);
 }
 
+/** Something can be said of columns and dialect: a check that is under way is stopped by that. */
+export function isDescribable(imported: Pick<Import, 'state'>): boolean {
+  return isMappable(imported) || imported.state === 'checking';
+}
+
 /** The rows are checked, and can be written. */
 export function isApplicable({ state, counts }: Pick<Import, 'state' | 'counts'>): boolean {
   return counts !== null && MAPPABLE.includes(state) && state !== 'uploaded' && state !== 'outdated';

@@ -2,8 +2,11 @@ import { OP_AMP_CATALOGUE } from '@roothertz/common/parts';
 import { describe, expect, it } from 'vitest';
 import type { ImportColumn } from '../../api/imports';
 import { columnAs, faultsByColumn, proposedMapping, sameMapping, withColumn } from './mappingDraft';
+import { partView } from './partView';
 import { doubtOf, notesOf } from './mappingNotes';
 import { carriedMapping } from './readAnew';
+
+const VIEW = partView(OP_AMP_CATALOGUE);
 
 function column(
   place: number,
@@ -22,9 +25,7 @@ const SPOTS = [
 
 describe('a column that becomes something else', () => {
   it('takes unit and frequency from its heading', () => {
-    expect(
-      columnAs(OP_AMP_CATALOGUE, column(4, 'Rauschen bei 10 Hz (µV/√Hz)'), 'spot:voltageNoise'),
-    ).toMatchObject({
+    expect(columnAs(VIEW, column(4, 'Rauschen bei 10 Hz (µV/√Hz)'), 'spot:voltageNoise')).toMatchObject({
       column: 4,
       form: 'spot',
       unit: 'µV/√Hz',
@@ -34,11 +35,11 @@ describe('a column that becomes something else', () => {
 
   it('takes the usual unit where the heading names none, and none for words', () => {
     const heading = column(4, 'Spalte 5');
-    expect(columnAs(OP_AMP_CATALOGUE, heading, 'value:gainBandwidth')?.unit).toBe('MHz');
-    expect(columnAs(OP_AMP_CATALOGUE, heading, 'peak-to-peak:voltageNoise')?.unit).toBe('µV');
-    expect(columnAs(OP_AMP_CATALOGUE, heading, 'value:package')?.unit).toBeNull();
-    expect(columnAs(OP_AMP_CATALOGUE, heading, 'origin:voltageNoise')?.unit).toBeNull();
-    expect(columnAs(OP_AMP_CATALOGUE, heading, '')).toBeNull();
+    expect(columnAs(VIEW, heading, 'value:gainBandwidth')?.unit).toBe('MHz');
+    expect(columnAs(VIEW, heading, 'peak-to-peak:voltageNoise')?.unit).toBe('µV');
+    expect(columnAs(VIEW, heading, 'value:package')?.unit).toBeNull();
+    expect(columnAs(VIEW, heading, 'origin:voltageNoise')?.unit).toBeNull();
+    expect(columnAs(VIEW, heading, '')).toBeNull();
   });
 
   it('replaces what was said of the column', () => {

@@ -1,6 +1,7 @@
-import { type ColumnForm, type ColumnMapping, proposeField } from '@roothertz/common/imports';
-import type { FieldError, ListedFields } from '@roothertz/common/parts';
+import type { ColumnForm, ColumnMapping } from '@roothertz/common/imports';
+import type { FieldError } from '@roothertz/common/parts';
 import type { Import, ImportColumn } from '../../api/imports';
+import type { ListView } from './listView';
 
 export type Mapping = readonly ColumnMapping[];
 type SentMapping = NonNullable<Import['mapping']>[number];
@@ -22,13 +23,14 @@ export function proposedMapping(columns: readonly ImportColumn[]): Mapping {
   return columns.flatMap(({ proposed }) => (proposed === null ? [] : [toMapping(proposed)]));
 }
 
-function toMapping({ column, field, form, unit, frequency, origin }: SentMapping): ColumnMapping {
+function toMapping({ column, field, form, unit, frequency, quantity, origin }: SentMapping): ColumnMapping {
   return {
     column,
     field,
     form: form ?? 'value',
     unit: unit || null,
     frequency: frequency ?? null,
+    quantity: quantity ?? null,
     origin: origin ?? null,
   };
 }
@@ -51,38 +53,42 @@ export function withColumn(mapping: Mapping, column: number, next: ColumnMapping
   return next === null ? others : [...others, next].sort((one, other) => one.column - other.column);
 }
 
-/** The mapping of a column that becomes something else; unit and frequency are read from its heading. */
+/** The mapping of a column that becomes something else; unit, frequency and quantity are read from its heading. */
 export function columnAs(
-  catalogue: ListedFields,
+  view: ListView,
   { column, heading }: ImportColumn,
   becomes: Becomes,
 ): ColumnMapping | null {
   if (becomes === '') return null;
   const [form, field] = becomes.split(':') as [ColumnForm, string];
-  const read = proposeField(catalogue, field, heading);
+  const read = view.columns.proposeField(field, heading);
   const hasUnit = form !== 'origin' && (form === 'peak-to-peak') === (read.form === 'peak-to-peak');
-  const usual = form === 'peak-to-peak' ? 'µV' : null;
   return {
     column,
     field,
     form,
-    unit: (hasUnit && read.unit) || usual || unitOf(catalogue, form, field),
+    unit: (hasUnit && read.unit) || view.usualUnit(form, field),
     frequency: form === 'spot' ? (read.frequency ?? USUAL_SPOT) : null,
+    quantity: form === 'break' ? (view.columns.proposer()(heading)?.quantity ?? 1) : null,
     origin: form === 'origin' ? null : read.origin,
   };
 }
 
-function unitOf({ parameters }: ListedFields, form: ColumnForm, field: string): string | null {
-  if (form === 'origin') return null;
-  return parameters.find(({ key }) => key === field)?.displayUnit || null;
+/** Whether a column, or the heading of prices, says in each row what could be said of the whole list. */
+export function isStatedByColumn(mapping: Mapping, field: string): boolean {
+  return mapping.some(
+    (one) => one.field === field || (field === 'currency' && one.field === 'unitPrice' && one.unit),
+  );
 }
 
 /** What is wrong with a mapping, at the column that it concerns; null = at the list as a whole. */
 export function faultsByColumn(mapping: Mapping, errors: readonly FieldError[]): Map<number | null, string> {
   return new Map(
-    errors.map(({ field, message }) => {
-      const place = /^columns\.(\d+)\./.exec(field)?.[1];
-      return [place === undefined ? null : mapping[Number(place)].column, message];
-    }),
+    errors
+      .filter(({ field }) => field.startsWith('columns'))
+      .map(({ field, message }) => {
+        const place = /^columns\.(\d+)\./.exec(field)?.[1];
+        return [place === undefined ? null : mapping[Number(place)].column, message];
+      }),
   );
 }

@@ -1,21 +1,23 @@
-import { checkMapping } from '@roothertz/common/imports';
 import { type DialectChoice, type Import, type ImportColumn, mapImport } from '../../api/imports';
 import { KINDS } from './kinds';
 import { type Mapping, proposedMapping } from './mappingDraft';
+import { type Said, tell } from './said';
 
 interface ReadAnew {
   answered: Import;
-  /** A mapping with which the rows can’t be checked yet; null = the server has the one that stands. */
-  unsent: Mapping | null;
+  /** What can’t be checked yet; null = the server has what stands. */
+  unsent: Said | null;
 }
 
 /** Has the file read in another dialect, and its rows checked where the columns are still known. */
-export async function readAnew(before: Import, mapping: Mapping, choice: DialectChoice): Promise<ReadAnew> {
-  const read = await mapImport(before.id, choice);
-  const columns = carriedMapping(before.columns, mapping, read.columns);
-  if (checkMapping(KINDS[read.kind].catalogue, columns, read.columns.length).length > 0)
-    return { answered: read, unsent: columns };
-  return { answered: await mapImport(before.id, { columns: [...columns] }), unsent: null };
+export async function readAnew(before: Import, said: Said, choice: DialectChoice): Promise<ReadAnew> {
+  const read = await mapImport(before.id, { ...choice, version: said.version });
+  const mapping = carriedMapping(before.columns, said.mapping, read.columns);
+  const carried = { mapping, wholeList: said.wholeList, version: read.version };
+  const { columns } = KINDS[read.kind].view;
+  if (columns.check(mapping, read.columns.length, said.wholeList).length > 0)
+    return { answered: read, unsent: carried };
+  return { answered: await tell(read, carried), unsent: null };
 }
 
 /** Columns whose heading stays keep what was said of them; the others take what is proposed. */
@@ -31,7 +33,7 @@ export function carriedMapping(
   const proposed = proposedMapping(after).filter(
     ({ column, field, form }) =>
       !stays.has(column) &&
-      (form === 'spot' || !kept.some((one) => one.field === field && one.form === form)),
+      (form === 'spot' || form === 'break' || !kept.some((one) => one.field === field && one.form === form)),
   );
   return [...kept, ...proposed].sort((one, other) => one.column - other.column);
 }

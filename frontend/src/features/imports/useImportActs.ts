@@ -1,5 +1,6 @@
 import { useMutation } from '@tanstack/react-query';
-import { applyImport, cancelImport, undoImport } from '../../api/imports';
+import { useNavigate } from 'react-router-dom';
+import { applyImport, cancelImport, discardImport, undoImport } from '../../api/imports';
 import { useTakeImport } from './useImport';
 
 /** What can be done with an import as a whole. */
@@ -8,5 +9,7 @@ export function useImportActs(id: string) {
   const apply = useMutation({ mutationFn: () => applyImport(id), onSuccess });
   const cancel = useMutation({ mutationFn: () => cancelImport(id), onSuccess });
   const undo = useMutation({ mutationFn: () => undoImport(id), onSuccess });
-  return { apply, cancel, undo };
+  const navigate = useNavigate();
+  const discard = useMutation({ mutationFn: () => discardImport(id), onSuccess: () => navigate('/imports') });
+  return { apply, cancel, undo, discard };
 }

@@ -1,88 +1,99 @@
-import { checkMapping } from '@roothertz/common/imports';
-import { useMutation, type UseMutationResult } from '@tanstack/react-query';
+import type { WholeList } from '@roothertz/common/imports';
+import { useMutation, type UseMutationResult, useQueryClient } from '@tanstack/react-query';
 import { useEffect, useMemo, useState } from 'react';
-import { cancelImport, type DialectChoice, type Import, mapImport } from '../../api/imports';
+import { type DialectChoice, type Import, importKey } from '../../api/imports';
+import { ApiProblem } from '../../api/problem';
 import { useDebounced } from '../../components/useDebounced';
-import { isMappable } from './importWords';
+import { isDescribable } from './importWords';
 import { KINDS } from './kinds';
-import { type Mapping, sameMapping, startingMapping } from './mappingDraft';
+import type { Mapping } from './mappingDraft';
 import { readAnew } from './readAnew';
+import { isKept, type Said, startingSaid, stillUnsaid, tell } from './said';
 import { useTakeImport } from './useImport';
 
 const PAUSE_MS = 500;
 
-/** What the columns are, as it stands on the page; each change of it has the rows checked again. */
+/** What is said of the list, as it stands on the page; each change of it has the rows checked again. */
 export function useMapping(imported: Import, mayEdit: boolean) {
-  const { id, kind, columns } = imported;
-  const take = useTakeImport();
-  const [draft, setDraft] = useState<Mapping | null>(null);
-  const mapping = useStanding(imported, draft);
+  const { kind, columns } = imported;
+  const [draft, setDraft] = useState<Said | null>(null);
+  const starting = useMemo(() => startingSaid(imported), [imported]);
+  const said = draft ?? starting;
   const errors = useMemo(
-    () => checkMapping(KINDS[kind].catalogue, mapping, columns.length),
-    [kind, mapping, columns],
+    () => KINDS[kind].view.columns.check(said.mapping, columns.length, said.wholeList),
+    [kind, said, columns],
   );
-  const scope = { id: `mapping of import ${id}` };
-  const check = useMutation({
-    scope,
-    mutationFn: (sent: Mapping) => mapImport(id, { columns: [...sent] }),
-    onSuccess: (answered, sent) => {
-      take(answered);
-      setDraft((standing) => (standing === sent ? null : standing));
-    },
-  });
-  const overrule = useMutation({
-    scope,
-    mutationFn: (choice: DialectChoice) => readAnew(imported, mapping, choice),
-    onSuccess: ({ answered, unsent }) => {
-      take(answered);
-      setDraft(unsent);
-    },
-  });
+  const { check, overrule } = useTelling(imported, said, setDraft);
   const isPending = check.isPending || overrule.isPending;
-  useAutomaticCheck({ imported, mapping, isOff: !mayEdit || errors.length > 0 || isPending }, check);
+  useAutomaticCheck({ imported, said, isOff: !mayEdit || errors.length > 0 || isPending }, check);
   return {
-    mapping,
+    mapping: said.mapping,
+    wholeList: said.wholeList,
     errors,
-    isStale: isPending || imported.counts === null || !sameMapping(mapping, imported.mapping),
+    isStale: isPending || imported.counts === null || !isKept(said, imported),
     isPending,
     error: overrule.error ?? check.error,
-    change: setDraft,
+    change: (mapping: Mapping) => setDraft({ ...said, mapping }),
+    changeWholeList: (wholeList: WholeList) => setDraft({ ...said, wholeList }),
     overrule: overrule.mutate,
-    checkAgain: () => check.mutate(mapping),
+    checkAgain: () => check.mutate(said),
   };
 }
 
 export type ImportMapping = ReturnType<typeof useMapping>;
 
-function useStanding({ mapping, rememberedMapping, columns }: Import, draft: Mapping | null): Mapping {
-  return useMemo(
-    () => draft ?? startingMapping({ mapping, rememberedMapping, columns }),
-    [draft, mapping, rememberedMapping, columns],
-  );
+/** Sends what is said, one after the other; where another member was quicker, theirs stands. */
+function useTelling(
+  imported: Import,
+  said: Said,
+  setDraft: React.Dispatch<React.SetStateAction<Said | null>>,
+) {
+  const { id } = imported;
+  const take = useTakeImport();
+  const queryClient = useQueryClient();
+  const options = {
+    scope: { id: `mapping of import ${id}` },
+    onError: (error: Error) => {
+      if (!(error instanceof ApiProblem) || error.code !== 'import.stale') return;
+      setDraft(null);
+      void queryClient.invalidateQueries({ queryKey: importKey(id) });
+    },
+  };
+  const check = useMutation({
+    ...options,
+    mutationFn: (sent: Said) => tell(imported, sent),
+    onSuccess: (answered, sent) => {
+      take(answered);
+      setDraft((standing) => stillUnsaid(standing, sent, answered));
+    },
+  });
+  const overrule = useMutation({
+    ...options,
+    mutationFn: (choice: DialectChoice) => readAnew(imported, said, choice),
+    onSuccess: ({ answered, unsent }) => {
+      take(answered);
+      setDraft(unsent);
+    },
+  });
+  return { check, overrule };
 }
 
 interface Standing {
   imported: Import;
-  mapping: Mapping;
+  said: Said;
   isOff: boolean;
 }
 
-/** Checks the rows once a mapping that the server doesn't have has stood for a moment; a running check is stopped first. */
+/** Checks the rows once something that the server doesn't have has stood for a moment; a running check is stopped by that. */
 function useAutomaticCheck(
-  { imported, mapping, isOff }: Standing,
-  check: UseMutationResult<Import, Error, Mapping>,
+  { imported, said, isOff }: Standing,
+  check: UseMutationResult<Import, Error, Said>,
 ): void {
-  const settled = useDebounced(mapping, PAUSE_MS);
-  const take = useTakeImport();
-  const stop = useMutation({ mutationFn: cancelImport, onSuccess: take });
-  const isDue = !isOff && settled === mapping && !sameMapping(mapping, imported.mapping);
-  const canCheck = isDue && isMappable(imported) && check.variables !== mapping;
-  const mustStop = isDue && imported.state === 'checking';
-  const [{ mutate: checkNow }, { mutate: stopNow }, id] = [check, stop, imported.id];
+  const settled = useDebounced(said, PAUSE_MS);
+  const isDue = !isOff && settled === said && !isKept(said, imported) && isDescribable(imported);
+  const isNew = check.variables !== said;
+  const { mutate } = check;
   useEffect(() => {
-    if (canCheck) checkNow(mapping);
-  }, [canCheck, checkNow, mapping]);
-  useEffect(() => {
-    if (mustStop) stopNow(id);
-  }, [mustStop, stopNow, id]);
+    if (isDue && isNew) mutate(said);
+  }, [isDue, isNew, mutate, said]);
 }

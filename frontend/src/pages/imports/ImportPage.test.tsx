@@ -4,7 +4,7 @@ import { describe, expect, it } from 'vitest';
 import type { Import } from '../../api/imports';
 import { sessionOf } from '../../test/factories';
 import { fakeServer, json, problem } from '../../test/fakeServer';
-import { CHANGED_ROW, importOf, REFUSED_ROW } from '../../test/imports';
+import { CHANGED_ROW, importOf, PRICE_ROW, pricesOf, REFUSED_ROW } from '../../test/imports';
 import { renderApp } from '../../test/renderApp';
 
 const SESSION = { 'GET /api/auth/me': () => json(sessionOf('librarian')) };
@@ -104,7 +104,7 @@ describe('the page of an import', () => {
       await screen.findByText('12 000 of 100 000 rows · 8000 rows/s · about 11 s left'),
     ).toBeInTheDocument();
     await userEvent.click(screen.getByRole('button', { name: 'Cancel' }));
-    expect(await screen.findByText('Cancelled: the library is as before.')).toBeInTheDocument();
+    expect(await screen.findByText('Cancelled: the library is as it was before.')).toBeInTheDocument();
     expect(screen.getByRole('button', { name: 'Apply 1 row' })).toBeEnabled();
   });
 
@@ -117,10 +117,95 @@ describe('the page of an import', () => {
     expect(screen.getByRole('button', { name: 'Apply 1 row again' })).toBeEnabled();
   });
 
+  it('says that somebody was quicker, and shows what they said', async () => {
+    const theirs = importOf({ version: 2, mapping: importOf().mapping!.slice(0, 2) });
+    let answers = 0;
+    fakeServer({
+      ...SESSION,
+      ...ROWS,
+      'GET /api/imports/5': () => json((answers += 1) === 1 ? importOf() : theirs),
+      'PUT /api/imports/5/mapping': () =>
+        problem(409, 'import.stale', { detail: 'Somebody has said something else.' }),
+    });
+    renderApp('/imports/5');
+    await userEvent.click(await screen.findByLabelText('Bauform becomes'));
+    await userEvent.click(await screen.findByTitle('package'));
+    expect(await screen.findByText('Somebody has said something else.')).toBeInTheDocument();
+    const row = within(await screen.findByRole('row', { name: /^en/ }));
+    expect(await row.findByText('left out')).toBeInTheDocument();
+  });
+
+  it('discards a list that isn’t applied', async () => {
+    const asked = fakeServer({
+      ...SESSION,
+      ...ROWS,
+      'GET /api/imports/5': () => json(importOf()),
+      'GET /api/imports': () => json({ items: [], total: 0 }),
+      'DELETE /api/imports/5': () => new Response(null, { status: 204 }),
+    });
+    renderApp('/imports/5');
+    await userEvent.click(await screen.findByRole('button', { name: 'Discard' }));
+    await userEvent.click(await screen.findByRole('button', { name: 'Discard the list' }));
+    expect(await screen.findByText(/Your team has imported no list yet/)).toBeInTheDocument();
+    expect(asked.some(({ route }) => route === 'DELETE /api/imports/5')).toBe(true);
+  });
+
   it('says that there is no such import', async () => {
     fakeServer({ ...SESSION, 'GET /api/imports/9': () => problem(404, 'import.not-found') });
     renderApp('/imports/9');
     expect(await screen.findByRole('heading', { name: 'There is no such import' })).toBeInTheDocument();
+  });
+});
+
+describe('the page of a price list', () => {
+  it('asks once for supplier and currency, has the rows checked by them, and shows old and new prices', async () => {
+    let kept = pricesOf();
+    const asked = fakeServer({
+      'GET /api/auth/me': () => json(sessionOf('purchasing')),
+      'GET /api/suppliers': () => json({ items: [{ id: '1', name: 'Larkholm Components' }], total: 1 }),
+      'GET /api/imports/6': () => json(kept),
+      'GET /api/imports/6/rows': () => json({ items: [PRICE_ROW], total: 1 }),
+      'PUT /api/imports/6/mapping': (body) => {
+        const { columns, wholeList } = body as { columns: Import['mapping']; wholeList: Import['wholeList'] };
+        kept = {
+          ...kept,
+          mapping: columns,
+          wholeList,
+          version: 2,
+          state: 'checked',
+          counts: importOf().counts,
+        };
+        return json(kept);
+      },
+    });
+    renderApp('/imports/6');
+    expect(await screen.findByText(/supplier: a column is needed/)).toBeInTheDocument();
+    expect(screen.getByLabelText('Quantity of ab 100')).toHaveValue('100');
+    await userEvent.type(screen.getByLabelText('Supplier of all rows'), 'Larkholm Components{Enter}');
+    await userEvent.click(screen.getByLabelText('Currency of all rows'));
+    await userEvent.click(await screen.findByTitle('EUR'));
+    const panel = within(await screen.findByRole('tabpanel'));
+    expect((await panel.findByText(/from 100/)).textContent).toBe('from 100 3.10 2.95');
+    expect(panel.getByText('Larkholm Components')).toBeInTheDocument();
+    const [{ body }] = asked.filter(({ route }) => route === 'PUT /api/imports/6/mapping');
+    expect(body).toMatchObject({
+      version: 1,
+      wholeList: { supplier: 'Larkholm Components', currency: 'EUR' },
+      columns: [{ field: 'manufacturer' }, { field: 'partNumber' }, { form: 'break', quantity: 100 }],
+    });
+    expect(screen.getByRole('button', { name: 'Apply 1 row' })).toBeEnabled();
+  });
+
+  it('can’t be changed by a librarian', async () => {
+    fakeServer({
+      ...SESSION,
+      'GET /api/imports/6': () => json(pricesOf({ state: 'checked', counts: importOf().counts })),
+      'GET /api/imports/6/rows': () => json({ items: [PRICE_ROW], total: 1 }),
+    });
+    renderApp('/imports/6');
+    expect(await screen.findByText('left out')).toBeInTheDocument();
+    expect(screen.queryByRole('button', { name: /Apply|Discard/ })).not.toBeInTheDocument();
+    expect(screen.queryByLabelText('Supplier of all rows')).not.toBeInTheDocument();
   });
 });
 

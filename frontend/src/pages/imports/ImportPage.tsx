@@ -4,14 +4,15 @@ import { MessagePage } from '../../components/MessagePage';
 import { PageSkeleton } from '../../components/PageSkeleton';
 import { useMayDo } from '../../components/useMember';
 import { ImportWork } from '../../features/imports/ImportWork';
+import { KINDS } from '../../features/imports/kinds';
 import { useImport } from '../../features/imports/useImport';
 import styles from './ImportsPage.module.css';
 
 /** One import on one page. */
 export function ImportPage() {
   const { id = '' } = useParams();
-  const mayEdit = useMayDo('parts.edit');
   const { data: imported, error } = useImport(id);
+  const mayEdit = useMayDo(imported ? KINDS[imported.kind].action : 'lists.import');
   if (imported)
     return (
       <div className={styles.page}>

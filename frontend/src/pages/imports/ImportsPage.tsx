@@ -7,15 +7,15 @@ import styles from './ImportsPage.module.css';
 
 /** The lists that came in, and where the next one is taken. */
 export function ImportsPage() {
-  const mayEdit = useMayDo('parts.edit');
+  const mayImport = useMayDo('lists.import');
   return (
     <div className={styles.page}>
       <title>Import · Roothertz</title>
       <h1>Import</h1>
-      {mayEdit ? <UploadList /> : <NoOwnLibrary />}
+      {mayImport ? <UploadList /> : <NoOwnLibrary />}
       <section className={styles.history} aria-label="History">
         <h2>What came in</h2>
-        <History mayEdit={mayEdit} />
+        <History />
       </section>
       <ExportLinks />
     </div>
