@@ -10,7 +10,8 @@ import { Part } from './entities/part.entity.js';
 import type { LibraryService } from './library.service.js';
 import { type PartRecord, toPartRecord } from './part-record.js';
 import { insertParts, updatePart } from './part-rows.js';
-import { filterParts, type PartQuery, selectParts, sortParts } from './part-select.js';
+import { countGaps, type GapCounts } from './gap-counts.js';
+import { filterParts, type PartFilters, type PartQuery, selectParts, sortParts } from './part-select.js';
 import { idsOfChanges, restood, type StandingChange, writeStandings } from './part-standings.js';
 import type { PartTable } from './part-tables.js';
 import { type PartChange, trailOf } from './part-trail.js';
@@ -32,6 +33,13 @@ export class PartStore<Kind extends LibraryPart> {
       .offset(query.offset)
       .getManyAndCount();
     return { items: rows.map((row) => toPartRecord<Kind>(catalogue, row)), total };
+  }
+
+  /** How many of the parts lack each parameter that can be unknown, and how many lack none. */
+  async countGaps(caller: Caller, query: PartFilters): Promise<GapCounts> {
+    const { catalogue } = this.table;
+    const select = filterParts(selectParts(this.dataSource.manager, this.table, caller), catalogue, query);
+    return countGaps(select, catalogue);
   }
 
   find(caller: Caller, id: number | null): Promise<PartRecord<Kind>> {

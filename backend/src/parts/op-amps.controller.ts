@@ -6,7 +6,8 @@ import { Caller } from '../shared/access/caller.decorator.js';
 import { VersionQueryDto } from '../shared/list/version-query.dto.js';
 import { ChangeStandingsDto } from './dto/change-standings.dto.js';
 import { CreateOpAmpDto } from './dto/create-op-amp.dto.js';
-import { ListOpAmpsDto } from './dto/list-op-amps.dto.js';
+import { GapCountsDto } from './dto/gap-counts.dto.js';
+import { ListOpAmpsDto, OpAmpFilterDto } from './dto/list-op-amps.dto.js';
 import { OpAmpListDto, OpAmpResponseDto } from './dto/op-amp-response.dto.js';
 import { UpdateOpAmpDto } from './dto/update-op-amp.dto.js';
 import { OpAmpsService } from './op-amps.service.js';
@@ -38,6 +39,13 @@ export class OpAmpsController {
     @Body() { parts }: ChangeStandingsDto,
   ): Promise<OpAmpListDto> {
     return this.opAmps.changeStandings(caller, parts);
+  }
+
+  @Get('completeness')
+  @Access('parts.read')
+  @ApiOkResponse({ type: GapCountsDto })
+  countOpAmpGaps(@Caller() caller: CallerOfRequest, @Query() filter: OpAmpFilterDto): Promise<GapCountsDto> {
+    return this.opAmps.countGaps(caller, filter);
   }
 
   @Get(':id')

@@ -2,7 +2,8 @@ import { Injectable } from '@nestjs/common';
 import type { OpAmpPart } from '@roothertz/common/parts';
 import { OpAmpStore } from '../library/op-amp-store.service.js';
 import type { Caller } from '../shared/access/caller.js';
-import type { ListOpAmpsDto } from './dto/list-op-amps.dto.js';
+import type { GapCountsDto } from './dto/gap-counts.dto.js';
+import type { ListOpAmpsDto, OpAmpFilterDto } from './dto/list-op-amps.dto.js';
 import type { OpAmpListDto } from './dto/op-amp-response.dto.js';
 import { PartUsesService } from './part-uses.service.js';
 import { PartsService } from './parts.service.js';
@@ -13,7 +14,11 @@ export class OpAmpsService extends PartsService<OpAmpPart> {
     super(store, uses);
   }
 
+  countGaps(caller: Caller, { inputType, ...filter }: OpAmpFilterDto): Promise<GapCountsDto> {
+    return this.store.countGaps(caller, { ...filter, choice: inputType });
+  }
+
   list(caller: Caller, { inputType, ...query }: ListOpAmpsDto): Promise<OpAmpListDto> {
-    return this.listParts(caller, query, { choice: inputType });
+    return this.listParts(caller, { ...query, choice: inputType });
   }
 }

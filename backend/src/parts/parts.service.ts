@@ -7,7 +7,6 @@ import type { Caller } from '../shared/access/caller.js';
 import { readId } from '../shared/ids/read-id.js';
 import type { List } from '../shared/list/list-response.js';
 import { parseSort } from '../shared/list/sort.js';
-import type { ListPartsDto } from './dto/list-parts.dto.js';
 import type { UpdatePartDto } from './dto/update-part.dto.js';
 import type { PartUsesService } from './part-uses.service.js';
 import { changedPart, newPart } from './part-draft.js';
@@ -22,7 +21,7 @@ type Answer<Kind extends LibraryPart> = Kind & {
 /** What the API does with parts of a kind. */
 export class PartsService<Kind extends LibraryPart> {
   constructor(
-    private readonly store: PartStore<Kind>,
+    protected readonly store: PartStore<Kind>,
     private readonly uses: PartUsesService,
   ) {}
 
@@ -54,11 +53,10 @@ export class PartsService<Kind extends LibraryPart> {
 
   protected async listParts(
     caller: Caller,
-    query: ListPartsDto,
-    narrowed: Pick<PartQuery, 'choice' | 'range'>,
+    { sort: stated = 'manufacturer', ...query }: Omit<PartQuery, 'sort'> & { sort?: string },
   ): Promise<List<Answer<Kind>>> {
-    const sort = parseSort(query.sort ?? 'manufacturer', partSorts(this.store.table.catalogue));
-    const { items, total } = await this.store.list(caller, { ...query, ...narrowed, sort });
+    const sort = parseSort(stated, partSorts(this.store.table.catalogue));
+    const { items, total } = await this.store.list(caller, { ...query, sort });
     return { items: items.map((record) => toAnswer(record)), total };
   }
 }

@@ -6,7 +6,8 @@ import { Caller } from '../shared/access/caller.decorator.js';
 import { VersionQueryDto } from '../shared/list/version-query.dto.js';
 import { ChangeStandingsDto } from './dto/change-standings.dto.js';
 import { CreateResistorDto } from './dto/create-resistor.dto.js';
-import { ListResistorsDto } from './dto/list-resistors.dto.js';
+import { GapCountsDto } from './dto/gap-counts.dto.js';
+import { ListResistorsDto, ResistorFilterDto } from './dto/list-resistors.dto.js';
 import { ResistorListDto, ResistorResponseDto } from './dto/resistor-response.dto.js';
 import { UpdateResistorDto } from './dto/update-resistor.dto.js';
 import { ResistorsService } from './resistors.service.js';
@@ -44,6 +45,16 @@ export class ResistorsController {
     @Body() { parts }: ChangeStandingsDto,
   ): Promise<ResistorListDto> {
     return this.resistors.changeStandings(caller, parts);
+  }
+
+  @Get('completeness')
+  @Access('parts.read')
+  @ApiOkResponse({ type: GapCountsDto })
+  countResistorGaps(
+    @Caller() caller: CallerOfRequest,
+    @Query() filter: ResistorFilterDto,
+  ): Promise<GapCountsDto> {
+    return this.resistors.countGaps(caller, filter);
   }
 
   @Get(':id')

@@ -1,8 +1,10 @@
 import { Injectable } from '@nestjs/common';
 import type { ResistorPart } from '@roothertz/common/parts';
+import type { PartFilters } from '../library/part-select.js';
 import { ResistorStore } from '../library/resistor-store.service.js';
 import type { Caller } from '../shared/access/caller.js';
-import type { ListResistorsDto } from './dto/list-resistors.dto.js';
+import type { GapCountsDto } from './dto/gap-counts.dto.js';
+import type { ListResistorsDto, ResistorFilterDto } from './dto/list-resistors.dto.js';
 import type { ResistorListDto } from './dto/resistor-response.dto.js';
 import { PartUsesService } from './part-uses.service.js';
 import { PartsService } from './parts.service.js';
@@ -13,8 +15,16 @@ export class ResistorsService extends PartsService<ResistorPart> {
     super(store, uses);
   }
 
-  list(caller: Caller, dto: ListResistorsDto): Promise<ResistorListDto> {
-    const { technology, resistanceFrom: from, resistanceTo: to, ...query } = dto;
-    return this.listParts(caller, query, { choice: technology, range: { key: 'resistance', from, to } });
+  list(caller: Caller, { limit, offset, sort, missing, ...dto }: ListResistorsDto): Promise<ResistorListDto> {
+    return this.listParts(caller, { limit, offset, sort, missing, ...filtersOf(dto) });
   }
+
+  countGaps(caller: Caller, dto: ResistorFilterDto): Promise<GapCountsDto> {
+    return this.store.countGaps(caller, filtersOf(dto));
+  }
+}
+
+function filtersOf(dto: ResistorFilterDto): PartFilters {
+  const { technology, resistanceFrom: from, resistanceTo: to, ...filters } = dto;
+  return { ...filters, choice: technology, range: { key: 'resistance', from, to } };
 }

@@ -11,6 +11,7 @@ export * from './partText.js';
 export * from './part.js';
 export * from './retirement.js';
 export * from './partCatalogue.js';
+export * from './completeness.js';
 export * from './partColumns.js';
 export * from './figureCell.js';
 export * from './partCell.js';

@@ -42,6 +42,10 @@ export const OP_AMP_PARAMETERS = [
     displayUnit: 'Hz',
     synonyms: ['en corner', '1/f corner', 'corner frequency', 'Eckfrequenz', 'fréquence de coin', 'fce'],
     help: 'Frequency at which the 1/f part of the voltage noise equals its white part; 0 = no 1/f noise.',
+    gap: {
+      weight: 5,
+      meaning: 'The corner counts as 0 Hz: in low bands the total is too low.',
+    },
   },
   {
     key: 'currentNoise',
@@ -53,6 +57,11 @@ export const OP_AMP_PARAMETERS = [
     displayUnit: 'pA/√Hz',
     synonyms: ['in', 'input current noise density', 'Rauschstrom', 'Stromrauschen', 'bruit de courant'],
     help: 'Noise current density of each input well above its 1/f corner.',
+    gap: {
+      weight: 8,
+      meaning:
+        'A lower bound stands in for it: at high source resistance the total is only known to be no less.',
+    },
   },
   {
     key: 'currentNoiseCorner',
@@ -64,6 +73,10 @@ export const OP_AMP_PARAMETERS = [
     displayUnit: 'Hz',
     synonyms: ['in corner', 'current 1/f corner', 'fci'],
     help: 'Frequency at which the 1/f part of the current noise equals its white part; 0 = no 1/f noise.',
+    gap: {
+      weight: 3,
+      meaning: 'The corner counts as 0 Hz: in low bands and at high source resistance the total is too low.',
+    },
   },
   {
     key: 'gainBandwidth',
@@ -83,6 +96,11 @@ export const OP_AMP_PARAMETERS = [
       'gain bandwidth',
     ],
     help: 'Open-loop gain times frequency on the slope of 20 dB a decade.',
+    gap: {
+      weight: 6,
+      meaning:
+        'The part counts as ideally fast: it is never left out as too slow, and its peaking isn’t in the total.',
+    },
   },
   {
     key: 'inputCapacitance',
@@ -94,6 +112,10 @@ export const OP_AMP_PARAMETERS = [
     displayUnit: 'pF',
     synonyms: ['cin', 'Eingangskapazität', "capacité d'entrée"],
     help: 'Capacitance that loads the signal node.',
+    gap: {
+      weight: 3,
+      meaning: 'It counts as none: with a reactive or high-ohmic source the noise gain is too low.',
+    },
   },
   {
     key: 'inputBiasCurrent',
@@ -105,6 +127,10 @@ export const OP_AMP_PARAMETERS = [
     displayUnit: 'nA',
     synonyms: ['ib', 'bias current', 'Eingangsstrom', 'Ruhestrom des Eingangs', 'courant de polarisation'],
     help: 'Magnitude of the direct current of each input; its shot noise bounds the current noise from below.',
+    gap: {
+      weight: 2,
+      meaning: 'No shot noise bounds the current noise from below.',
+    },
   },
   {
     key: 'minimumStableGain',
@@ -115,6 +141,10 @@ export const OP_AMP_PARAMETERS = [
     displayUnit: '',
     synonyms: ['min stable gain', 'stable at gain', 'Mindestverstärkung', 'gain minimal'],
     help: 'Lowest noise gain at which the amplifier is stable; 1 = unity-gain stable.',
+    gap: {
+      weight: 3,
+      meaning: 'The part is never left out as unstable at low gain.',
+    },
   },
   {
     key: 'supplyMinimum',
@@ -125,6 +155,10 @@ export const OP_AMP_PARAMETERS = [
     displayUnit: 'V',
     synonyms: ['vs min', 'supply voltage min', 'Versorgung min', 'alimentation min', 'vcc min'],
     help: 'Lowest total supply voltage, from the negative to the positive rail.',
+    gap: {
+      weight: 2,
+      meaning: 'The part is never left out because the supply is too low for it.',
+    },
   },
   {
     key: 'supplyMaximum',
@@ -135,6 +169,10 @@ export const OP_AMP_PARAMETERS = [
     displayUnit: 'V',
     synonyms: ['vs max', 'supply voltage max', 'Versorgung max', 'alimentation max', 'vcc max'],
     help: 'Highest total supply voltage, from the negative to the positive rail.',
+    gap: {
+      weight: 2,
+      meaning: 'The part is never left out because the supply is too high for it.',
+    },
   },
   {
     key: 'supplyCurrent',
@@ -146,6 +184,10 @@ export const OP_AMP_PARAMETERS = [
     displayUnit: 'mA',
     synonyms: ['iq', 'quiescent current', 'Stromaufnahme', 'courant de repos', 'icc'],
     help: 'Quiescent current of one channel.',
+    gap: {
+      weight: 1,
+      meaning: 'It is only shown: no ranking depends on it.',
+    },
   },
 ] as const satisfies readonly ParameterDefinition[];
 

@@ -22,6 +22,17 @@ export interface QuantityField {
   help: string;
 }
 
+/** What a ranking can't say where a parameter is unknown. */
+export interface Gap {
+  /**
+   * How much the ranking misses it: 8 = its total is only a bound, 5–6 = the part stands better than it may be, 2–3 = a
+   * limit isn't checked or the total is too low at some sources, 1 = nothing depends on it. Our judgement, no source.
+   */
+  weight: number;
+  /** In one sentence. */
+  meaning: string;
+}
+
 /** One parameter of a part: the single place where form, API, grid, database column and import learn of it. */
 export interface ParameterDefinition<Key extends string = string> extends QuantityField {
   key: Key;
@@ -29,6 +40,8 @@ export interface ParameterDefinition<Key extends string = string> extends Quanti
   required?: boolean;
   /** What stands when the parameter is left out; `null` = unknown. */
   fallback: number | null;
+  /** Left out = a part always has it. */
+  gap?: Gap;
   /** The unit of the CSV column and of grid and form, such as `nV/√Hz`. */
   displayUnit: string;
   /** Other names that lists give this column; compared without case, accents and punctuation. */

@@ -1,3 +1,4 @@
+import type { Gap } from './parameter.js';
 import { TECHNOLOGIES } from './technology.js';
 import { APPROVALS, INPUT_TYPES, LIFECYCLES } from './vocabulary.js';
 
@@ -16,6 +17,7 @@ export interface TextField {
 export interface ChoiceField extends TextField {
   options: readonly string[];
   fallback: null;
+  gap: Gap;
 }
 
 /** What every part has, whatever its kind. */
@@ -77,6 +79,11 @@ export const INPUT_TYPE_FIELD = {
   maxLength: 20,
   options: INPUT_TYPES,
   fallback: null,
+  gap: {
+    weight: 2,
+    meaning:
+      'The current noise isn’t carried to another temperature, and nothing bounds an unknown one from below.',
+  },
   synonyms: ['input', 'technology', 'Eingang', 'Technologie', 'entrée'],
 } as const satisfies ChoiceField;
 
@@ -87,5 +94,6 @@ export const TECHNOLOGY_FIELD = {
   maxLength: 20,
   options: TECHNOLOGIES,
   fallback: null,
+  gap: { weight: 2, meaning: 'A ranking narrowed by technology leaves the part out.' },
   synonyms: ['resistor technology', 'construction', 'element', 'Technologie', 'Bauart', 'fabrication'],
 } as const satisfies ChoiceField;

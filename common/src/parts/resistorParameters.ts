@@ -32,6 +32,10 @@ export const RESISTOR_PARAMETERS = [
     displayUnit: '%',
     synonyms: ['tol', 'resistance tolerance', 'Toleranz', 'tolérance'],
     help: 'How far a new part may lie from its nominal value.',
+    gap: {
+      weight: 3,
+      meaning: 'How exactly a gain is met can’t be said, nor resistors sorted by it.',
+    },
   },
   {
     key: 'temperatureCoefficient',
@@ -51,6 +55,10 @@ export const RESISTOR_PARAMETERS = [
       'coefficient de température',
     ],
     help: 'Relative change of the value per kelvin; where only ± is stated, its magnitude.',
+    gap: {
+      weight: 1,
+      meaning: 'It is only shown: no ranking depends on it.',
+    },
   },
   {
     key: 'powerRating',
@@ -62,6 +70,11 @@ export const RESISTOR_PARAMETERS = [
     displayUnit: 'W',
     synonyms: ['power', 'rated power', 'rating', 'Belastbarkeit', 'Nennleistung', 'Leistung', 'puissance'],
     help: 'Continuous dissipation that the part stands at the data sheet’s temperature.',
+    gap: {
+      weight: 3,
+      meaning:
+        'The part is never left out because it would dissipate too much, and its self-heating isn’t in the total.',
+    },
   },
   {
     key: 'noiseIndex',
@@ -80,6 +93,11 @@ export const RESISTOR_PARAMETERS = [
       'indice de bruit',
     ],
     help: 'Excess noise under a direct voltage: 0 dB = 1 µV rms per volt in one decade of frequency.',
+    gap: {
+      weight: 8,
+      meaning:
+        'Its excess noise is left out: under a direct voltage the total is only known to be no less than the thermal noise.',
+    },
   },
   {
     key: 'temperatureRise',
@@ -97,6 +115,10 @@ export const RESISTOR_PARAMETERS = [
       'échauffement',
     ],
     help: 'How much warmer than its surroundings the part is at its power rating.',
+    gap: {
+      weight: 2,
+      meaning: 'It counts as no warmer than its surroundings: under load its thermal noise is too low.',
+    },
   },
 ] as const satisfies readonly ParameterDefinition[];
 

@@ -31,6 +31,8 @@ export interface PartListQuery {
   technology?: Technology[];
   lifecycle?: Lifecycle[];
   approval?: Approval[];
+  /** Keys of parameters, one of which the parts lack. */
+  missing?: string[];
   resistanceFrom?: number;
   resistanceTo?: number;
   sort?: string;
@@ -50,6 +52,7 @@ export interface PartsReader<Stored extends StoredPart = StoredPart> {
   name: string;
   list: (query: PartListQuery, signal: AbortSignal) => Promise<{ items: Stored[]; total: number }>;
   find: (id: string, signal: AbortSignal) => Promise<Stored>;
+  gapCounts: (query: PartListQuery, signal: AbortSignal) => Promise<GapCounts>;
   /** All of them or none; the answer holds them in the same order. */
   changeStandings: (changes: StandingChange[]) => Promise<{ items: Stored[] }>;
   remove: (id: string, version: number) => Promise<void>;
@@ -59,6 +62,17 @@ export interface PartsReader<Stored extends StoredPart = StoredPart> {
 export interface PartsApi<Part extends LibraryPart, Stored extends StoredPart> extends PartsReader<Stored> {
   create: (part: Part) => Promise<Stored>;
   update: (id: string, version: number, part: Part) => Promise<Stored>;
+}
+
+/** How many parts lack what. */
+export type GapCounts = components['schemas']['GapCountsDto'];
+
+export function gapCountsQuery(reader: PartsReader, query: PartListQuery) {
+  return queryOptions({
+    queryKey: [reader.name, 'gaps', query],
+    queryFn: ({ signal }) => reader.gapCounts(query, signal),
+    placeholderData: keepPreviousData,
+  });
 }
 
 export type PartUses = components['schemas']['PartUsesDto'];

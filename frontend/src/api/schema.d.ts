@@ -596,6 +596,22 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/op-amps/completeness": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["countOpAmpGaps"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/op-amps/{id}": {
         parameters: {
             query?: never;
@@ -828,6 +844,22 @@ export interface paths {
             cookie?: never;
         };
         get: operations["exportResistors"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/resistors/completeness": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["countResistorGaps"];
         put?: never;
         post?: never;
         delete?: never;
@@ -1427,6 +1459,12 @@ export interface components {
             /** @description Where gain, density and noise figure are stated; inside the band. In Hz. */
             to: number;
         };
+        GapCountsDto: {
+            /** @description They lack nothing. */
+            complete: number;
+            missing: components["schemas"]["MissingCountDto"][];
+            total: number;
+        };
         HandOverTeamDto: {
             memberId: string;
         };
@@ -1611,6 +1649,11 @@ export interface components {
         MemberDto: {
             id: string;
             name: string;
+        };
+        MissingCountDto: {
+            count: number;
+            /** @description The key of a parameter or of the choice of words. */
+            parameter: string;
         };
         MoneyDto: {
             /**
@@ -4004,6 +4047,7 @@ export interface operations {
                 lifecycle?: ("active" | "not-recommended" | "last-time-buy" | "obsolete")[];
                 approval?: ("approved" | "restricted" | "not-approved")[];
                 inputType?: ("bipolar" | "jfet" | "cmos" | "zero-drift")[];
+                missing?: ("currentNoise" | "gainBandwidth" | "voltageNoiseCorner" | "currentNoiseCorner" | "inputCapacitance" | "minimumStableGain" | "inputType" | "inputBiasCurrent" | "supplyMinimum" | "supplyMaximum" | "supplyCurrent")[];
             };
             header?: never;
             path?: never;
@@ -4112,6 +4156,40 @@ export interface operations {
                 };
                 content: {
                     "text/csv": string;
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    countOpAmpGaps: {
+        parameters: {
+            query?: {
+                search?: string;
+                library?: ("curated" | "team")[];
+                lifecycle?: ("active" | "not-recommended" | "last-time-buy" | "obsolete")[];
+                approval?: ("approved" | "restricted" | "not-approved")[];
+                inputType?: ("bipolar" | "jfet" | "cmos" | "zero-drift")[];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["GapCountsDto"];
                 };
             };
             /** @description Problem details (RFC 9457) */
@@ -4710,6 +4788,7 @@ export interface operations {
                 resistanceFrom?: number;
                 /** @description The greatest value that the list holds. In Ω. */
                 resistanceTo?: number;
+                missing?: ("noiseIndex" | "tolerance" | "powerRating" | "technology" | "temperatureRise" | "temperatureCoefficient")[];
             };
             header?: never;
             path?: never;
@@ -4818,6 +4897,44 @@ export interface operations {
                 };
                 content: {
                     "text/csv": string;
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    countResistorGaps: {
+        parameters: {
+            query?: {
+                search?: string;
+                library?: ("curated" | "team")[];
+                lifecycle?: ("active" | "not-recommended" | "last-time-buy" | "obsolete")[];
+                approval?: ("approved" | "restricted" | "not-approved")[];
+                technology?: ("metal-foil" | "thin-film" | "metal-film" | "wirewound" | "thick-film" | "carbon-film" | "carbon-composition")[];
+                /** @description The least value that the list holds. In Ω. */
+                resistanceFrom?: number;
+                /** @description The greatest value that the list holds. In Ω. */
+                resistanceTo?: number;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["GapCountsDto"];
                 };
             };
             /** @description Problem details (RFC 9457) */

@@ -1,10 +1,13 @@
 import {
+  gapFields,
   type QuantityField,
+  RESISTOR_CATALOGUE,
   RESISTOR_PARAMETERS,
   TECHNOLOGIES,
   type Technology,
 } from '@roothertz/common/parts';
 import { Type } from 'class-transformer';
+import { OmitType } from '@nestjs/swagger';
 import { Options } from '../../shared/validation/option.decorator.js';
 import { Quantity } from '../../shared/validation/quantity.decorator.js';
 import { IN_QUERY, ListPartsDto } from './list-parts.dto.js';
@@ -12,6 +15,8 @@ import { IN_QUERY, ListPartsDto } from './list-parts.dto.js';
 const RESISTANCE: QuantityField = RESISTOR_PARAMETERS[0];
 const FROM = { ...RESISTANCE, label: 'resistance from', help: 'The least value that the list holds.' };
 const TO = { ...RESISTANCE, label: 'resistance to', help: 'The greatest value that the list holds.' };
+
+const MISSING = gapFields(RESISTOR_CATALOGUE).map(({ key }) => key);
 
 export class ListResistorsDto extends ListPartsDto {
   @Options(TECHNOLOGIES, IN_QUERY)
@@ -24,4 +29,10 @@ export class ListResistorsDto extends ListPartsDto {
   @Type(() => Number)
   @Quantity(TO, { optional: true })
   resistanceTo?: number;
+
+  @Options(MISSING, IN_QUERY)
+  missing?: string[];
 }
+
+/** What narrows the parts whose gaps are counted. */
+export class ResistorFilterDto extends OmitType(ListResistorsDto, ['limit', 'offset', 'sort', 'missing']) {}

@@ -1,4 +1,4 @@
-import { APPROVALS, boundsError, LIBRARIES, LIFECYCLES } from '@roothertz/common/parts';
+import { APPROVALS, boundsError, gapFields, LIBRARIES, LIFECYCLES } from '@roothertz/common/parts';
 import type { PartListQuery } from '../../api/parts';
 import type { KindOfPart } from './kindOfPart';
 
@@ -15,7 +15,15 @@ export interface PartsFilter {
 /** The ends of the window of values that the list can be narrowed by. */
 export const WINDOW_ENDS = ['resistanceFrom', 'resistanceTo'] as const;
 
-const SORTED_WORDS = ['partNumber', 'manufacturer', 'package', 'approval', 'lifecycle', 'library'];
+const SORTED_WORDS = [
+  'partNumber',
+  'manufacturer',
+  'package',
+  'approval',
+  'lifecycle',
+  'library',
+  'completeness',
+];
 
 export function filtersOf({ choice, catalogue }: KindOfPart): PartsFilter[] {
   return [
@@ -31,6 +39,7 @@ export function readPartsView(kind: KindOfPart, address: URLSearchParams): Parts
     search: address.get('search') ?? '',
     ...readSort(kind, address),
     ...readChoices(kind, address),
+    ...readMissing(kind, address),
     ...readWindow(kind, address),
   };
 }
@@ -51,6 +60,12 @@ function readChoices(kind: KindOfPart, address: URLSearchParams): Pick<PartsView
   return Object.fromEntries(choices);
 }
 
+function readMissing({ catalogue }: KindOfPart, address: URLSearchParams): Pick<PartsView, 'missing'> {
+  const words = (address.get('missing') ?? '').split(',');
+  const missing = gapFields(catalogue).flatMap(({ key }) => (words.includes(key) ? [key] : []));
+  return missing.length === 0 ? {} : { missing };
+}
+
 function readWindow({ narrowedBy }: KindOfPart, address: URLSearchParams): PartsView | object {
   if (narrowedBy === null) return {};
   const ends = WINDOW_ENDS.map((key) => [key, Number(address.get(key) ?? NaN)] as const);
@@ -63,5 +78,5 @@ export function isNarrowed(kind: KindOfPart, view: PartsView): boolean {
 
 /** Everything in the address that hides parts, beside the search. */
 export function narrowingKeys(kind: KindOfPart): (keyof PartsView)[] {
-  return [...filtersOf(kind).map(({ key }) => key), ...WINDOW_ENDS];
+  return [...filtersOf(kind).map(({ key }) => key), 'missing', ...WINDOW_ENDS];
 }

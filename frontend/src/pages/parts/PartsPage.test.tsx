@@ -110,6 +110,64 @@ describe('the lists of parts', () => {
   });
 });
 
+describe('the completeness of the parts', () => {
+  const part = opAmp();
+  const little = opAmp({ amplifier: { ...part.amplifier, currentNoise: null, supplyCurrent: null } });
+  const counts = {
+    total: 2,
+    complete: 1,
+    missing: [
+      { parameter: 'currentNoise', count: 1 },
+      { parameter: 'supplyCurrent', count: 1 },
+      { parameter: 'gainBandwidth', count: 0 },
+    ],
+  };
+
+  function open(address: string, role: Parameters<typeof sessionOf>[0] = 'librarian') {
+    const asked = fakeServer({
+      'GET /api/auth/me': () => json(sessionOf(role)),
+      'GET /api/op-amps': listed([little]),
+      'GET /api/op-amps/completeness': () => json(counts),
+      'PATCH /api/op-amps/41': () =>
+        json({ ...little, version: 4, amplifier: { ...little.amplifier, currentNoise: 2.2e-12 } }),
+    });
+    return { asked, router: renderApp(address) };
+  }
+
+  it('is counted by parameter, and one of them narrows the list', async () => {
+    const { asked, router } = open('/parts/completeness?library=team');
+    expect(await screen.findByText('2 parts, 1 complete')).toBeInTheDocument();
+    const lacks = screen.getByRole('group', { name: 'What parts lack' });
+    expect(
+      within(lacks)
+        .getAllByRole('button')
+        .map(({ textContent }) => textContent),
+    ).toEqual(['current noise 1', 'supply current 1']);
+    expect(await screen.findByText(/75\s%/)).toBeInTheDocument();
+    await userEvent.click(within(lacks).getByRole('button', { name: 'current noise 1' }));
+    expect(router.state.location.search).toBe('?library=team&missing=currentNoise');
+    expect(await screen.findByText(/at high source resistance/)).toBeInTheDocument();
+    await waitFor(() => expect(asked.at(-1)!.url.searchParams.getAll('missing')).toEqual(['currentNoise']));
+  });
+
+  it('is completed in the row, which stays where it is', async () => {
+    const { asked } = open('/parts/completeness?library=team&missing=currentNoise');
+    await userEvent.type(await screen.findByLabelText('current noise of VR-1108'), '2.2 pA/√Hz{Enter}');
+    expect(await screen.findByText(/97\s%/)).toBeInTheDocument();
+    const { body } = asked.find(({ route }) => route === 'PATCH /api/op-amps/41')!;
+    expect(body).toMatchObject({ version: 3, amplifier: { currentNoise: 2.2e-12, supplyCurrent: null } });
+    expect(screen.getByLabelText('current noise of VR-1108')).toHaveValue('2.2 pA/√Hz');
+    await userEvent.click(screen.getByRole('button', { name: 'State supply current of VR-1108' }));
+    expect(screen.getByLabelText('supply current of VR-1108')).toHaveFocus();
+  });
+
+  it('is read by an engineer', async () => {
+    open('/parts/completeness?library=team', 'engineer');
+    expect(await screen.findByText('current noise')).toBeInTheDocument();
+    expect(screen.queryByRole('button', { name: /^State/ })).not.toBeInTheDocument();
+  });
+});
+
 describe('the chosen parts', () => {
   const CURATED = opAmp({ id: '43', partNumber: 'KM-21', library: 'curated' });
   const PARTS = [opAmp(), opAmp({ id: '42', partNumber: 'VR-1109', version: 5 }), CURATED];

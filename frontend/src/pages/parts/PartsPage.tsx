@@ -1,9 +1,6 @@
 import { Button, Skeleton } from 'antd';
-import { Link } from 'react-router-dom';
 import { detailOf } from '../../api/problem';
-import { useMayDo } from '../../components/useMember';
 import type { KindOfPart } from '../../features/parts/kindOfPart';
-import { KindTabs } from '../../features/parts/KindTabs';
 import { NoParts } from '../../features/parts/NoParts';
 import { partsFacts } from '../../features/parts/partsFacts';
 import { PartsFilters } from '../../features/parts/PartsFilters';
@@ -11,6 +8,7 @@ import { ChosenParts } from '../../features/parts/ChosenParts';
 import { isNarrowed, narrowingKeys } from '../../features/parts/partsView';
 import { usePartsList } from '../../features/parts/usePartsList';
 import { usePartsView } from '../../features/parts/usePartsView';
+import { PartsHead } from './PartsHead';
 import styles from './PartsPage.module.css';
 
 export function PartsPage({ kind }: { kind: KindOfPart }) {
@@ -21,14 +19,11 @@ export function PartsPage({ kind }: { kind: KindOfPart }) {
   return (
     <div className={styles.page}>
       <title>{`${kind.title}s · Roothertz`}</title>
-      <div className={styles.head}>
-        <h1>Parts</h1>
-        <KindTabs />
-        <p className={styles.facts} role="status">
-          {!list.isPending && !list.error && partsFacts(kind, list, view.search.trim() !== '')}
-        </p>
-        <NewPartLink kind={kind} />
-      </div>
+      <PartsHead
+        kind={kind}
+        place="list"
+        facts={!list.isPending && !list.error && partsFacts(kind, list, view.search.trim() !== '')}
+      />
       <PartsFilters kind={kind} view={view} change={change} />
       {list.error ? (
         <p role="alert">
@@ -42,14 +37,5 @@ export function PartsPage({ kind }: { kind: KindOfPart }) {
         <ChosenParts kind={kind} parts={list.parts} sort={view.sort} onSort={(sort) => change({ sort })} />
       )}
     </div>
-  );
-}
-
-function NewPartLink({ kind: { path, noun } }: { kind: KindOfPart }) {
-  if (!useMayDo('parts.edit')) return null;
-  return (
-    <Link to={`${path}/new`} className={styles.new}>
-      New {noun}
-    </Link>
   );
 }

@@ -16,6 +16,10 @@ export const partsRoutes: RouteObject[] = [
 function routesOf(path: string, loadKind: Load<KindOfPart>, loadPage: Load<ComponentType>): RouteObject[] {
   return [
     { path, lazy: pageOf(loadKind, async () => (await import('./PartsPage')).PartsPage) },
+    {
+      path: `${path}/completeness`,
+      lazy: pageOf(loadKind, async () => (await import('./CompletenessPage')).CompletenessPage),
+    },
     { path: `${path}/new`, lazy: pageOf(loadKind, async () => (await import('./NewPartPage')).NewPartPage) },
     { path: `${path}/:id`, lazy: async () => ({ Component: await loadPage() }) },
     {
