@@ -21,6 +21,7 @@ const BACKEND_FEATURES = [
   'plans',
   'billing',
   'mail',
+  'notices',
 ];
 const FRONTEND_FEATURES = ['session', 'parts', 'ranking', 'conditions', 'imports', 'prices'];
 

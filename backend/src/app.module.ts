@@ -12,6 +12,7 @@ import { DatabaseModule } from './database/database.module.js';
 import { HealthModule } from './health/health.module.js';
 import { ImportsModule } from './imports/imports.module.js';
 import { MailModule } from './mail/mail.module.js';
+import { NoticesModule } from './notices/notices.module.js';
 import { PartsModule } from './parts/parts.module.js';
 import { PricesModule } from './prices/prices.module.js';
 import { RankingModule } from './ranking/ranking.module.js';
@@ -33,6 +34,7 @@ const REQUESTS_A_MINUTE = 600;
     HealthModule,
     ImportsModule,
     MailModule,
+    NoticesModule,
     PartsModule,
     PricesModule,
     RankingModule,

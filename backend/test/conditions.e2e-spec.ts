@@ -314,7 +314,9 @@ describe('saved conditions', () => {
         await saveConditions(engineer, { name, partIds: [id], quantity: 9 });
       await saveConditions(engineer, { name: 'Without' });
       const uses = await app.nest.get(ConditionsService).partsInUse(engineer.caller);
-      const use = { conditionsId: expect.any(Number), quantity: 9, updatedById: engineer.caller.userId };
+      const { userId } = engineer.caller;
+      const savedBy = { createdById: userId, updatedById: userId };
+      const use = { conditionsId: expect.any(Number), quantity: 9, ...savedBy };
       expect([...uses]).toEqual([
         [
           Number(id),

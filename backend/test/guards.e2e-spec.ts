@@ -13,11 +13,10 @@ interface Route {
 
 const OPEN_ROUTES = [
   'getHealth',
-  'getUnsubscription',
-  'receiveBillingEvent',
   'getInvitation',
   'getUnsubscription',
   'joinWithNewAccount',
+  'receiveBillingEvent',
   'signIn',
   'signOut',
   'unsubscribe',

@@ -3,6 +3,7 @@ import { PassportStrategy } from '@nestjs/passport';
 import { Strategy } from 'passport-jwt';
 import { AppConfig } from '../config/app-config.js';
 import type { Caller } from '../shared/access/caller.js';
+import { toCaller } from '../teams/member.js';
 import { TeamsService } from '../teams/teams.service.js';
 import { readSessionCookie } from './session-cookie.js';
 import { fingerprint, type SessionClaims } from './session-token.service.js';
@@ -24,7 +25,6 @@ export class JwtStrategy extends PassportStrategy(Strategy) {
   async validate({ sub, team, key }: SessionClaims): Promise<Caller | null> {
     const member = await this.teams.findMember(Number(sub), team);
     if (member === null || fingerprint(member.account.passwordHash) !== key) return null;
-    const { account, roles, plan, standing } = member;
-    return { userId: account.id, teamId: team, roles, plan, standing };
+    return toCaller(member);
   }
 }

@@ -1,4 +1,4 @@
-import type { EntityManager } from 'typeorm';
+import { type EntityManager, In, Not } from 'typeorm';
 import { findReadableIds } from '../library/readable-parts.js';
 import type { Caller } from '../shared/access/caller.js';
 import { DomainError } from '../shared/errors/domain-error.js';
@@ -9,11 +9,13 @@ export interface PartUse {
   conditionsId: number;
   name: string;
   quantity: number;
+  /** Who saved the conditions first; null where that member has left. */
+  createdById: number | null;
   /** Who changed the conditions last; null where that member has left. */
   updatedById: number | null;
 }
 
-/** Keeps which parts are chosen at saved conditions, in place of those before. */
+/** Keeps which parts are chosen at saved conditions, in place of those before; what stays chosen isn't touched. */
 export async function writeParts(
   manager: EntityManager,
   caller: Caller,
@@ -28,10 +30,12 @@ export async function writeParts(
   );
   if (errors.length > 0)
     throw new DomainError('part.not-found', 'There is no such part in your libraries.', { errors });
-  await manager.delete(SavedConditionsPart, { conditionsId });
+  const before = await manager.findBy(SavedConditionsPart, { conditionsId });
+  const chosen = new Set(before.map(({ partId }) => partId));
+  await manager.delete(SavedConditionsPart, { conditionsId, partId: Not(In([...readable])) });
   await manager.insert(
     SavedConditionsPart,
-    [...readable].map((partId) => ({ conditionsId, partId })),
+    [...readable].filter((id) => !chosen.has(id)).map((partId) => ({ conditionsId, partId })),
   );
 }
 
@@ -49,8 +53,20 @@ export async function findPartsInUse(
     .getMany();
   const uses = new Map<number, PartUse[]>();
   for (const { partId, conditions } of found) {
-    const { id: conditionsId, name, quantity, updatedById } = conditions;
-    uses.set(partId, [...(uses.get(partId) ?? []), { conditionsId, name, quantity, updatedById }]);
+    const { id: conditionsId, name, quantity, createdById, updatedById } = conditions;
+    const use = { conditionsId, name, quantity, createdById, updatedById };
+    uses.set(partId, [...(uses.get(partId) ?? []), use]);
   }
   return uses;
+}
+
+/** The teams that have chosen parts at saved conditions. */
+export async function findTeamsWithParts(manager: EntityManager): Promise<number[]> {
+  const found = await manager
+    .createQueryBuilder(SavedConditionsPart, 'chosen')
+    .innerJoin('chosen.conditions', 'saved')
+    .select('DISTINCT saved.teamId', 'teamId')
+    .orderBy('saved.teamId')
+    .getRawMany<{ teamId: number }>();
+  return found.map(({ teamId }) => teamId);
 }

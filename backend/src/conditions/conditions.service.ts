@@ -11,7 +11,7 @@ import { readId } from '../shared/ids/read-id.js';
 import type { ListQueryDto } from '../shared/list/list-query.dto.js';
 import { parseSort } from '../shared/list/sort.js';
 import { TeamsService } from '../teams/teams.service.js';
-import { findPartsInUse, type PartUse, writeParts } from './conditions-parts.js';
+import { findPartsInUse, findTeamsWithParts, type PartUse, writeParts } from './conditions-parts.js';
 import { searchByName, selectConditions } from './conditions-select.js';
 import {
   type ConditionsListDto,
@@ -25,13 +25,22 @@ import { nameKey } from '../shared/text/name-key.js';
 
 const SORTS = ['name', 'updatedAt'] as const;
 
+/** What is done whenever conditions have been saved, in the transaction that saves them. */
+export type SavedListener = (manager: EntityManager, caller: Caller) => Promise<void>;
+
 @Injectable()
 export class ConditionsService {
+  private readonly listeners: SavedListener[] = [];
+
   constructor(
     @InjectDataSource() private readonly dataSource: DataSource,
     private readonly teams: TeamsService,
     private readonly audit: AuditService,
   ) {}
+
+  whenSaved(listener: SavedListener): void {
+    this.listeners.push(listener);
+  }
 
   async list(caller: Caller, query: ListQueryDto): Promise<ConditionsListDto> {
     const { key, descending } = parseSort(query.sort ?? 'name', SORTS);
@@ -112,13 +121,18 @@ export class ConditionsService {
     return findPartsInUse(manager, team);
   }
 
-  /** Notes what has been saved, and answers it. */
+  teamsWithParts(): Promise<number[]> {
+    return findTeamsWithParts(this.dataSource.manager);
+  }
+
+  /** Tells and notes what has been saved, and answers it. */
   private async recorded(
     manager: EntityManager,
     caller: Caller,
     before: SavedConditions | null,
     id: string,
   ): Promise<ConditionsResponseDto> {
+    for (const listener of this.listeners) await listener(manager, caller);
     const after = await findSaved(manager, caller, id);
     const action = before === null ? 'conditions.saved' : 'conditions.changed';
     await this.audit.record(manager, caller, [

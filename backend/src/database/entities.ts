@@ -12,6 +12,8 @@ import { Resistor } from '../library/entities/resistor.entity.js';
 import { Subscription } from '../plans/entities/subscription.entity.js';
 import { OutboxMail } from '../mail/entities/outbox-mail.entity.js';
 import { RefusedMail } from '../mail/entities/refused-mail.entity.js';
+import { PartWatch } from '../notices/entities/part-watch.entity.js';
+import { PriceDigest } from '../notices/entities/price-digest.entity.js';
 import { ExchangeRate } from '../prices/entities/exchange-rate.entity.js';
 import { Offer } from '../prices/entities/offer.entity.js';
 import { OfferBreak } from '../prices/entities/offer-break.entity.js';
@@ -47,4 +49,6 @@ export const ENTITIES = [
   ImportProgress,
   OutboxMail,
   RefusedMail,
+  PriceDigest,
+  PartWatch,
 ];

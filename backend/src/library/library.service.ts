@@ -1,7 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
-import type { Library as LibraryName, OpAmpPart } from '@roothertz/common/parts';
-import { type DataSource, IsNull } from 'typeorm';
+import type { Library as LibraryName, Lifecycle, OpAmpPart } from '@roothertz/common/parts';
+import { type DataSource, type EntityManager, IsNull } from 'typeorm';
 import type { Caller } from '../shared/access/caller.js';
 import { Library } from './entities/library.entity.js';
 import { type ListedResistor, toListedResistors } from './listed-resistors.js';
@@ -10,6 +10,7 @@ import { type LibraryColumns, toLibraryColumns } from './op-amp-columns.js';
 import { type OpAmpRecord, toPartRecord } from './part-record.js';
 import { selectParts } from './part-select.js';
 import { OP_AMPS, RESISTORS } from './part-tables.js';
+import { findReadableParts, type PartName, toPartName } from './readable-parts.js';
 
 export interface ReadableLibrary {
   id: number;
@@ -17,12 +18,15 @@ export interface ReadableLibrary {
   revision: number;
 }
 
+/** A part of any kind, and how long its maker will sell it. */
+export type LivingPart = PartName & { lifecycle: Lifecycle };
+
 /** Says which libraries a caller reads and which one it edits, and gives their parts to other features. */
 @Injectable()
 export class LibraryService {
   constructor(@InjectDataSource() private readonly dataSource: DataSource) {}
 
-  async readableLibraries({ teamId }: Caller): Promise<ReadableLibrary[]> {
+  async readableLibraries({ teamId }: Pick<Caller, 'teamId'>): Promise<ReadableLibrary[]> {
     const libraries = await this.dataSource
       .getRepository(Library)
       .find({ where: [{ teamId: IsNull() }, { teamId }], order: { id: 'ASC' } });
@@ -52,6 +56,16 @@ export class LibraryService {
       found.map((row) => [row.partId, toPartRecord<OpAmpPart>(OP_AMPS.catalogue, row)]),
     );
     return ids.flatMap((id) => records.get(id) ?? []);
+  }
+
+  /** The parts of every kind that a team may read among the given ids, as a transaction sees them. */
+  async findParts(
+    manager: EntityManager,
+    team: Pick<Caller, 'teamId'>,
+    ids: readonly number[],
+  ): Promise<LivingPart[]> {
+    const found = await findReadableParts(manager, team, ids);
+    return found.map((part) => ({ ...toPartName(part), lifecycle: part.lifecycle }));
   }
 
   /** The op-amps of a library that {@link readableLibraries} named, as columns; to be cached by its revision. */

@@ -13,7 +13,10 @@ export interface PartName {
 }
 
 /** The parts of all kinds that a caller may read, as `part` with its `library`. */
-export function selectReadableParts(manager: EntityManager, { teamId }: Caller): SelectQueryBuilder<Part> {
+export function selectReadableParts(
+  manager: EntityManager,
+  { teamId }: Pick<Caller, 'teamId'>,
+): SelectQueryBuilder<Part> {
   return manager
     .createQueryBuilder(Part, 'part')
     .innerJoinAndSelect('part.library', 'library')
@@ -26,11 +29,17 @@ export async function findReadableIds(
   caller: Caller,
   ids: readonly number[],
 ): Promise<Set<number>> {
-  if (ids.length === 0) return new Set();
-  const found = await selectReadableParts(manager, caller)
-    .andWhere('part.id IN (:...ids)', { ids })
-    .getMany();
-  return new Set(found.map(({ id }) => id));
+  return new Set((await findReadableParts(manager, caller, ids)).map(({ id }) => id));
+}
+
+/** The parts that a team may read among the given ids. */
+export async function findReadableParts(
+  manager: EntityManager,
+  team: Pick<Caller, 'teamId'>,
+  ids: readonly number[],
+): Promise<Part[]> {
+  if (ids.length === 0) return [];
+  return selectReadableParts(manager, team).andWhere('part.id IN (:...ids)', { ids }).getMany();
 }
 
 export function toPartName({ id, library, kind, manufacturer, partNumber }: Part): PartName {

@@ -9,7 +9,7 @@ import { InjectDataSource } from '@nestjs/typeorm';
 import type { MailKind } from '@roothertz/common/mail';
 import { type DataSource, IsNull, LessThan, LessThanOrEqual } from 'typeorm';
 import { AppConfig } from '../config/app-config.js';
-import { isDatabaseLoss } from '../shared/errors/database-loss.js';
+import { logFailure } from '../shared/errors/log-failure.js';
 import { shortened } from '../shared/text/shortened.js';
 import { OutboxMail } from './entities/outbox-mail.entity.js';
 import { isRefusedForGood, mailTransport } from './mail-transport.js';
@@ -81,13 +81,13 @@ export class MailSender implements OnApplicationBootstrap, BeforeApplicationShut
     const before = new Date(Date.now() - KEPT_MS);
     await this.dataSource.manager
       .delete(OutboxMail, { nextAttemptAt: IsNull(), createdAt: LessThan(before) })
-      .catch((error: unknown) => this.report(error));
+      .catch((error: unknown) => logFailure(this.logger, error));
   }
 
   private async run(): Promise<void> {
     while (this.askedAgain && !this.stopping && this.transport !== null) {
       this.askedAgain = false;
-      await this.sendDue().catch((error: unknown) => this.report(error));
+      await this.sendDue().catch((error: unknown) => logFailure(this.logger, error));
     }
   }
 
@@ -132,10 +132,5 @@ export class MailSender implements OnApplicationBootstrap, BeforeApplicationShut
     };
     const content = { messageId, subject, html: html ?? '', text: text ?? '' };
     return { from: this.config.MAIL_FROM, to: { name: '', address: to }, ...content, headers: headers ?? {} };
-  }
-
-  private report(error: unknown): void {
-    if (!isDatabaseLoss(error))
-      this.logger.error(error instanceof Error ? (error.stack ?? error.message) : String(error));
   }
 }

@@ -1,6 +1,7 @@
 import {
   dayOf,
   type ExchangeRates,
+  isValidOn,
   type Offer as OfferOfSupplier,
   offerStates,
   priceAt,
@@ -40,6 +41,12 @@ export class QuantityPrices {
   of(partId: number): PriceAtQuantity | null {
     const offers = this.book.offers.get(partId);
     return offers ? priceAt(offers, this.quantity, this.rates, this.book.currency, this.today) : null;
+  }
+
+  /** Whether an offer holds today whose stock isn't known to be 0. */
+  isAvailable(partId: number): boolean {
+    const offers = this.book.offers.get(partId) ?? [];
+    return offers.some((offer) => isValidOn(offer, this.today) && offer.stock !== 0);
   }
 
   isStale(offer: OfferOfSupplier): boolean {

@@ -2,7 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
 import type { DataSource } from 'typeorm';
 import { ConditionsService } from '../conditions/conditions.service.js';
-import { selectReadableParts, toPartName } from '../library/readable-parts.js';
+import { findReadableParts, toPartName } from '../library/readable-parts.js';
 import type { Caller } from '../shared/access/caller.js';
 import { parseSort } from '../shared/list/sort.js';
 import type { ListPricesDto, PriceListDto } from './dto/list-prices.dto.js';
@@ -78,10 +78,7 @@ export class PriceListService {
 
   private async findParts(caller: Caller, rows: readonly Row[]) {
     const ids = rows.map(({ partId }) => partId);
-    if (ids.length === 0) return new Map();
-    const parts = await selectReadableParts(this.dataSource.manager, caller)
-      .andWhere('part.id IN (:...ids)', { ids })
-      .getMany();
+    const parts = await findReadableParts(this.dataSource.manager, caller, ids);
     return new Map(parts.map((part) => [part.id, toPartName(part)]));
   }
 }

@@ -31,6 +31,6 @@ import { SuppliersService } from './suppliers.service.js';
     RatesService,
     SuppliersService,
   ],
-  exports: [PriceBookService, QuotedOffers],
+  exports: [PriceBookService, PriceListService, PriceSettingsService, QuotedOffers],
 })
 export class PricesModule {}

@@ -40,6 +40,17 @@ export class TeamsService {
     return Promise.all(memberships.map((membership) => this.toMember(membership)));
   }
 
+  /** All members of a team, in the order of their accounts. */
+  async listMembers(teamId: number): Promise<Member[]> {
+    const plan = await this.plans.stateOf(teamId);
+    const memberships = await this.memberships.find({
+      where: { teamId },
+      order: { userId: 'ASC' },
+      relations: { user: true, team: true },
+    });
+    return memberships.map((membership) => toMember(membership, plan));
+  }
+
   /** Holds the team until the transaction ends, so that what its plan limits is counted by one at a time. */
   async lockTeam(manager: EntityManager, teamId: number): Promise<void> {
     await manager.findOneOrFail(Team, { where: { id: teamId }, lock: { mode: 'pessimistic_write' } });

@@ -1,8 +1,10 @@
 import type { NestExpressApplication } from '@nestjs/platform-express';
+import { SchedulerRegistry } from '@nestjs/schedule';
 import { Test } from '@nestjs/testing';
 import supertest from 'supertest';
 import { DataSource } from 'typeorm';
 import { AppModule } from '../../src/app.module.js';
+import { NOTICES } from '../../src/notices/notice-schedule.service.js';
 import { AppConfig } from '../../src/config/app-config.js';
 import { configureApp } from '../../src/http/configure-app.js';
 import { serveOpenApi } from '../../src/openapi/serve-openapi.js';
@@ -28,7 +30,8 @@ export interface TestApp {
  *     await app.close();                                                  // afterAll
  *
  * `environment` sets variables, such as `{ PUBLIC_ORIGIN: 'https://noise.example.org' }`. One application
- * at a time in a test file: the session strategy is registered for the whole process.
+ * at a time in a test file: the session strategy is registered for the whole process. Notices are sent when a test
+ * asks for them, never by the clock.
  */
 export async function startTestApp(environment: Record<string, string> = {}): Promise<TestApp> {
   const config = testConfig(environment);
@@ -52,5 +55,6 @@ async function startNest(config: AppConfig): Promise<NestExpressApplication> {
   configureApp(nest);
   serveOpenApi(nest);
   await nest.listen(0, '127.0.0.1');
+  nest.get(SchedulerRegistry, { strict: false }).deleteInterval(NOTICES);
   return nest;
 }

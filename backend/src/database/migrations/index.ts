@@ -14,6 +14,7 @@ import { AddTeamOwners1796090600100 } from './1796090600100-AddTeamOwners.js';
 import { CreateInvitations1796090600200 } from './1796090600200-CreateInvitations.js';
 import { AddPartsOfConditions1796090900000 } from './1796090900000-AddPartsOfConditions.js';
 import { KeepEarlierConfirmations1796090901000 } from './1796090901000-KeepEarlierConfirmations.js';
+import { CreateNotices1796091000000 } from './1796091000000-CreateNotices.js';
 
 /** All migrations; they run in the order of the time in their names. */
 export const MIGRATIONS = [
@@ -33,4 +34,5 @@ export const MIGRATIONS = [
   CreateInvitations1796090600200,
   AddPartsOfConditions1796090900000,
   KeepEarlierConfirmations1796090901000,
+  CreateNotices1796091000000,
 ];
