@@ -19,10 +19,10 @@ describe('the demo team’s prices', () => {
   it('are seeded: offers that stand, stale, about to end and past, and parts without one', async () => {
     const total = async (query: string) => (await agent.get(`/api/prices?${query}`).expect(200)).body.total;
     expect([await total(''), await total('state=stale'), await total('state=expiring')]).toEqual([
-      137, 20, 15,
+      247, 20, 15,
     ]);
     expect(await total('state=expired')).toBe(5);
-    expect(await total('kind=resistor')).toBe(31);
+    expect(await total('kind=resistor')).toBe(141);
     expect([
       await total('usedInConditions=true&state=stale'),
       await total('usedInConditions=true&state=missing'),

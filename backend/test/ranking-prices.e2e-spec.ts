@@ -119,6 +119,18 @@ describe('a ranking with prices', () => {
     expect((await rank({ filter: { search: 'NONE' } })).cheapest).toBeNull();
   });
 
+  it('draws the frontier: each part cheaper than all that are as quiet', async () => {
+    const { frontier } = await rank({ quantity: 100 });
+    expect(priced({ items: frontier })).toEqual([
+      ['Q-1', '9.5000'],
+      ['Q-2', '1.9800'],
+      ['Q-3', '1.8000'],
+      ['LOUD', '0.4000'],
+    ]);
+    expect(frontier[0].inputNoiseRms).toBeLessThan(frontier[3].inputNoiseRms);
+    expect((await rank({ filter: { search: 'NONE' } })).frontier).toEqual([]);
+  });
+
   it('follows each change of a price, of the rates and of the team’s currency', async () => {
     const { id, version } = await price('NONE', '0.10');
     expect(priced(await rank()).at(-1)).toEqual(['NONE', '0.1000']);

@@ -1,4 +1,4 @@
-import type { CheapestPart, RankedPart, Ranking } from '@roothertz/common/noise';
+import type { CheapestPart, PartPlace, RankedPart, Ranking } from '@roothertz/common/noise';
 import type { OpAmpRecord } from '../library/part-record.js';
 import type { QuantityPrices } from '../prices/price-book.js';
 import type { CheapestDto, RankedOpAmpDto, RankingResponseDto } from './dto/ranking-response.dto.js';
@@ -8,7 +8,7 @@ import { toPrice } from './price-response.js';
 
 /** Ranked parts whose record is gone since they were ranked are left out. */
 export function toRankingResponse(
-  { total, excluded, quietSetTotal, cheapest, floor, items }: Ranking,
+  { total, excluded, quietSetTotal, cheapest, frontier, floor, items }: Ranking,
   libraries: readonly IndexedLibrary[],
   records: ReadonlyMap<number, OpAmpRecord>,
   prices: QuantityPrices,
@@ -18,6 +18,10 @@ export function toRankingResponse(
     excluded: countReasons(excluded),
     quietSet: { total: quietSetTotal },
     cheapest: cheapest && toCheapest(cheapest, libraries, prices),
+    frontier: frontier.map(({ inputNoiseRms, ...place }) => ({
+      ...toPricedName(place, libraries, prices),
+      inputNoiseRms,
+    })),
     floor,
     libraryRevision: revisionOf(libraries),
     items: items.flatMap((item) => {
@@ -42,8 +46,13 @@ function toCheapest(
   libraries: readonly IndexedLibrary[],
   prices: QuantityPrices,
 ): CheapestDto {
+  return { ...toPricedName(place, libraries, prices), aboveQuietest };
+}
+
+/** A part that has a price. */
+function toPricedName(place: PartPlace, libraries: readonly IndexedLibrary[], prices: QuantityPrices) {
   const part = partNameAt(place, libraries);
-  return { part, unitPrice: toPrice(prices, Number(part.id))!, aboveQuietest };
+  return { part, unitPrice: toPrice(prices, Number(part.id))! };
 }
 
 /** How many parts are excluded for each reason, the most frequent one first. */

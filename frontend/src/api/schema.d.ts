@@ -1459,6 +1459,12 @@ export interface components {
             /** @description Where gain, density and noise figure are stated; inside the band. In Hz. */
             to: number;
         };
+        FrontierPartDto: {
+            /** @description V (A in a transimpedance stage), over the band. */
+            inputNoiseRms: number;
+            part: components["schemas"]["PartNameDto"];
+            unitPrice: components["schemas"]["PriceDto"];
+        };
         GapCountsDto: {
             /** @description They lack nothing. */
             complete: number;
@@ -2150,6 +2156,8 @@ export interface components {
             cheapest: components["schemas"]["CheapestDto"] | null;
             excluded: components["schemas"]["ExcludedDto"];
             floor: components["schemas"]["SourceFloorDto"];
+            /** @description The noise–price frontier, the quietest first: each part is cheaper than any that is as quiet. Parts without a price don’t count. */
+            frontier: components["schemas"]["FrontierPartDto"][];
             items: components["schemas"]["RankedOpAmpDto"][];
             /** @description Changes whenever a part that could be ranked changes. */
             libraryRevision: string;

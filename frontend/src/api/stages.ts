@@ -1,5 +1,5 @@
 import type { PartFilter, ResistorFilter } from '@roothertz/common/conditions';
-import type { SoughtConditions } from '@roothertz/common/noise';
+import type { SoughtConditions, StageSort } from '@roothertz/common/noise';
 import { answer, client } from './client';
 import { pagesQuery } from './pages';
 import { PAGE, RANKINGS_KEY } from './ranking';
@@ -7,6 +7,7 @@ import type { components } from './schema';
 
 export type StageRanking = components['schemas']['StageRankingDto'];
 export type StageItem = StageRanking['items'][number];
+export type WholeStage = StageRanking['frontier'][number];
 
 /** What whole stages are ranked by. */
 export interface StageRequest {
@@ -14,6 +15,9 @@ export interface StageRequest {
   filter?: PartFilter;
   resistorFilter?: ResistorFilter;
   quantity?: number;
+  sort?: StageSort;
+  /** dB above the quietest stage, where they are sorted by price */
+  within?: number;
 }
 
 export interface StagePage extends StageRanking {

@@ -37,6 +37,7 @@ export function rankingOf(
     floor: sourceFloor(request.conditions),
     libraryRevision: '1.1',
     cheapest: null,
+    frontier: [],
     items,
     ...more,
   };

@@ -63,6 +63,17 @@ export class CheapestDto {
   aboveQuietest: number;
 }
 
+export class FrontierPartDto {
+  @ApiProperty()
+  part: PartNameDto;
+
+  @ApiProperty({ description: 'V (A in a transimpedance stage), over the band.' })
+  inputNoiseRms: number;
+
+  @ApiProperty()
+  unitPrice: PriceDto;
+}
+
 export class RankingResponseDto {
   @ApiProperty({ type: 'integer', description: 'How many parts are ranked.' })
   total: number;
@@ -79,6 +90,13 @@ export class RankingResponseDto {
     description: 'The cheapest part of the quiet set; null where none of it has a price.',
   })
   cheapest: CheapestDto | null;
+
+  @ApiProperty({
+    type: [FrontierPartDto],
+    description:
+      'The noise–price frontier, the quietest first: each part is cheaper than any that is as quiet. Parts without a price don’t count.',
+  })
+  frontier: FrontierPartDto[];
 
   @ApiProperty()
   floor: SourceFloorDto;

@@ -146,7 +146,8 @@ describe('the network of a stage with two inputs', () => {
 
 describe('parallelStage', () => {
   it('lets voltage noise and network fall with n and current noise into the source rise with n', () => {
-    const conditions = conditionsWith({ stage: { gain: 100, gainResistance: 100 } });
+    const direct = { outputVoltage: 5, gainNoiseIndex: 0, feedbackNoiseIndex: -10 };
+    const conditions = conditionsWith({ stage: { gain: 100, gainResistance: 100, ...direct } });
     const fast = amplifierWith({ gainBandwidth: null, inputCapacitance: 0 });
     const one = evaluateStage(conditions, fast).contributions;
     const four = parallelStage({ conditions, amplifier: fast }, 4);
@@ -154,6 +155,7 @@ describe('parallelStage', () => {
     expect(many.source).toBeCloseTo(one.source, 15);
     expect(many.amplifierVoltage / one.amplifierVoltage).toBeCloseTo(1 / 2, 9);
     expect(many.feedback / one.feedback).toBeCloseTo(1 / 2, 9);
+    expect(many.excess / one.excess).toBeCloseTo(1 / 2, 9);
     expect(many.amplifierCurrentFeedback / one.amplifierCurrentFeedback).toBeCloseTo(1 / 2, 9);
     expect(many.amplifierCurrentSource / one.amplifierCurrentSource).toBeCloseTo(2, 9);
   });

@@ -1,4 +1,4 @@
-import type { OperatingConditions } from '../../conditions/index.js';
+import type { OperatingConditions, StageConditions } from '../../conditions/index.js';
 import { leastCurrentNoise, type NoiseAmplifier } from '../amplifierNoise.js';
 
 /** One stage, or several alike whose inputs are joined and whose outputs are averaged. */
@@ -10,7 +10,7 @@ export interface ParallelStage {
 /**
  * The single stage that makes the noise of `count` identical channels in parallel, each with a network of
  * its own: e_n falls with √n, i_n into the source rises with √n, the input capacitances add up, and each
- * network's resistances count as 1/n.
+ * network's resistances count as 1/n, with a noise index 10·lg n lower: their excess noises are uncorrelated.
  *
  * @param count channels, a whole number ≥ 1
  * Source: Motchenbacher & Connelly 1993, parallel input stages.
@@ -27,15 +27,17 @@ export function parallelStage({ conditions, amplifier }: ParallelStage, count: n
       currentNoise: currentNoise * Math.sqrt(count),
       inputCapacitance: inputCapacitance && inputCapacitance * count,
     },
-    conditions: {
-      ...conditions,
-      stage: {
-        ...stage,
-        ...(stage.gainResistance !== undefined && { gainResistance: stage.gainResistance / count }),
-        ...(stage.network && {
-          network: { ...stage.network, minimumTotal: stage.network.minimumTotal / count },
-        }),
-      },
-    },
+    conditions: { ...conditions, stage: { ...stage, ...networkOfMany(stage, count) } },
+  };
+}
+
+function networkOfMany(stage: StageConditions, count: number): Partial<StageConditions> {
+  const { gainResistance, gainNoiseIndex, feedbackNoiseIndex, network } = stage;
+  const lower = 10 * Math.log10(count);
+  return {
+    ...(gainResistance !== undefined && { gainResistance: gainResistance / count }),
+    ...(gainNoiseIndex !== undefined && { gainNoiseIndex: gainNoiseIndex - lower }),
+    ...(feedbackNoiseIndex !== undefined && { feedbackNoiseIndex: feedbackNoiseIndex - lower }),
+    ...(network && { network: { ...network, minimumTotal: network.minimumTotal / count } }),
   };
 }

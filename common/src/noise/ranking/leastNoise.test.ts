@@ -1,36 +1,13 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { randomLibrary } from '../../../test/support/randomLibrary.js';
 import { checkConditions, type OperatingConditions } from '../../conditions/index.js';
 import { stageModel } from '../stage/stageModel.js';
-import { emptyColumns, type AmplifierColumns } from './columns.js';
 import { findContenders } from './contenders.js';
 import { leastNoise } from './leastNoise.js';
 import { rankAmplifiers } from './rankAmplifiers.js';
 import { scoreRows } from './scores.js';
 import { findQuietest, isInQuietSet } from './quietSet.js';
-
-/** Numbers from 0 to 1 that are the same in every run. */
-function sequence(seed: number): () => number {
-  let state = seed;
-  return () => (state = (state * 1103515245 + 12345) % 2 ** 31) / 2 ** 31;
-}
-
-function library(count: number, seed: number): AmplifierColumns {
-  const random = sequence(seed);
-  const between = (from: number, to: number) => from * (to / from) ** random();
-  const columns = emptyColumns(count);
-  const { parameters, origins } = columns;
-  for (let row = 0; row < count; row++) {
-    parameters.voltageNoise[row] = between(0.8e-9, 60e-9);
-    parameters.voltageNoiseCorner[row] = between(0.1, 3000);
-    parameters.currentNoise[row] = between(1e-16, 5e-12);
-    parameters.currentNoiseCorner[row] = between(0.1, 1000);
-    if (random() > 0.05) parameters.gainBandwidth[row] = between(1e4, 2e9);
-    if (random() > 0.1) parameters.inputCapacitance[row] = between(1e-13, 1e-10);
-    origins.voltageNoise[row] = (['typical', 'maximum', 'measured', 'estimated'] as const)[row % 4];
-  }
-  return columns;
-}
 
 const between = (from: number, to: number) =>
   fc.double({ min: Math.log(from), max: Math.log(to), noNaN: true }).map(Math.exp);
@@ -98,7 +75,7 @@ const conditions = fc
   .filter((c) => checkConditions({ conditions: c }).length === 0);
 
 describe('leastNoise', () => {
-  const columns = library(250, 3);
+  const columns = randomLibrary(250, 3);
   const rows = Uint32Array.from({ length: columns.count }, (_, row) => row);
 
   it('is never above the total, for any conditions in which no notch can be tuned', () => {
@@ -119,7 +96,7 @@ describe('leastNoise', () => {
 });
 
 describe('findContenders', () => {
-  const columns = library(5000, 5);
+  const columns = randomLibrary(5000, 5);
   const all = Uint32Array.from({ length: columns.count }, (_, row) => row);
   const page = {
     filter: {},

@@ -1,23 +1,14 @@
 import { describe, expect, it } from 'vitest';
+import { randomLibrary } from '../../../test/support/randomLibrary.js';
 import type { OperatingConditions } from '../../conditions/index.js';
-import { emptyColumns, type AmplifierColumns } from './columns.js';
+import type { AmplifierColumns } from './columns.js';
 import { axisPoints, cellConditions, quietestMap, type MapQuery } from './quietestMap.js';
 import { rankAmplifiers } from './rankAmplifiers.js';
 
 function library(count: number, seed: number): AmplifierColumns {
-  let state = seed;
-  const random = () => (state = (state * 1103515245 + 12345) % 2 ** 31) / 2 ** 31;
-  const between = (from: number, to: number) => from * (to / from) ** random();
-  const columns = emptyColumns(count);
-  const { parameters } = columns;
+  const columns = randomLibrary(count, seed);
   for (let row = 0; row < count; row++) {
-    parameters.voltageNoise[row] = between(0.8e-9, 60e-9);
-    parameters.voltageNoiseCorner[row] = between(0.1, 3000);
-    parameters.currentNoise[row] = between(1e-16, 5e-12);
-    parameters.currentNoiseCorner[row] = between(0.1, 1000);
-    if (row % 7 > 0) parameters.gainBandwidth[row] = between(1e4, 2e9);
-    if (row % 5 > 0) parameters.inputCapacitance[row] = between(1e-12, 1e-10);
-    if (row % 3 > 0) parameters.minimumStableGain[row] = between(1, 20);
+    if (row % 3 > 0) columns.parameters.minimumStableGain[row] = 1 + (row % 20);
     columns.searchText[row] = row % 11 === 0 ? 'odd' : 'plain';
   }
   return columns;

@@ -8,6 +8,7 @@ import { stageCautions } from '../stageCautions.js';
 import { figuresFrom, floorFrom } from '../stageFigures.js';
 import { amplifierAt, type AmplifierColumns } from './columns.js';
 import { findContenders } from './contenders.js';
+import { findFrontier, type FrontierPart } from './frontier.js';
 import { findCheapest, type CheapestPart } from './cheapest.js';
 import { countQuietSet, findQuietest, isInQuietSet, type Quietest } from './quietSet.js';
 import { scoreRows, type Scores } from './scores.js';
@@ -56,6 +57,8 @@ export interface Ranking {
   quietSetTotal: number;
   /** the cheapest part of the quiet set; null where none of it has a price */
   cheapest: CheapestPart | null;
+  /** the parts that no other beats in both noise and price, the quietest first */
+  frontier: FrontierPart[];
   items: RankedPart[];
 }
 
@@ -88,6 +91,7 @@ export function rankAmplifiers(query: RankingQuery, libraries: readonly Amplifie
     floor: floorFrom(conditions, model),
     quietSetTotal: countQuietSet(scores, quietest),
     cheapest: findCheapest(scores, quietest, query.prices),
+    frontier: findFrontier(conditions, model, libraries, accepted, query.prices),
     items: Array.from(page, (place, index) =>
       rankedPart(query, model, libraries, scores, quietest!, places(place), query.offset + index + 1),
     ),

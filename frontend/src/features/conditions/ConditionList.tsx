@@ -9,8 +9,13 @@ import { SupplyFields } from './SupplyFields';
 
 const MODEL_LABELS = { estimated: 'carried to ambient', none: 'as at 25 °C' };
 
+interface ConditionListProps {
+  /** The resistors of the network are what is sought. */
+  isNetworkSought: boolean;
+}
+
 /** What isn't on the schematic: band, temperature, limits, target and which parts count. */
-export function ConditionList() {
+export function ConditionList({ isNetworkSought }: ConditionListProps) {
   const { conditions } = useConditionsForm().request;
   const kind = stageKindOf(conditions.stage);
   return (
@@ -44,7 +49,7 @@ export function ConditionList() {
           <ConditionField path="conditions.stage.network.minimumTotal" emptyText="not stated" />
         </Row>
       )}
-      <ExcessRows />
+      <ExcessRows isNetworkSought={isNetworkSought} />
       <Row label="Target, input rms">
         <ConditionField path="target.inputNoiseRms" emptyText="none" />
       </Row>
@@ -57,7 +62,7 @@ export function ConditionList() {
 }
 
 /** What makes the excess noise of the network: the voltage over it, and what its resistors make of that. */
-function ExcessRows() {
+function ExcessRows({ isNetworkSought }: ConditionListProps) {
   const { stage } = useConditionsForm().request.conditions;
   const kind = stageKindOf(stage);
   if (!hasStageField(kind, 'outputVoltage')) return null;
@@ -67,8 +72,8 @@ function ExcessRows() {
       <Row label="Direct output voltage">
         <ConditionField path="conditions.stage.outputVoltage" emptyText="none" />
       </Row>
-      {stage.outputVoltage && (
-        <Row label={hasGainResistor ? 'Noise index, R_g and R_f' : 'Noise index, R_f'}>
+      {!isNetworkSought && Boolean(stage.outputVoltage) && (
+        <Row label={<NoiseIndexLabel hasGainResistor={hasGainResistor} />}>
           {hasGainResistor && (
             <>
               <ConditionField path="conditions.stage.gainNoiseIndex" emptyText="none" /> and{' '}
@@ -81,7 +86,21 @@ function ExcessRows() {
   );
 }
 
-function Row({ label, note, children }: { label: string; note?: string; children: ReactNode }) {
+function NoiseIndexLabel({ hasGainResistor }: { hasGainResistor: boolean }) {
+  return (
+    <>
+      Noise index,{' '}
+      {hasGainResistor && (
+        <>
+          R<sub>g</sub> and{' '}
+        </>
+      )}
+      R<sub>f</sub>
+    </>
+  );
+}
+
+function Row({ label, note, children }: { label: ReactNode; note?: string; children: ReactNode }) {
   return (
     <div className={styles.row}>
       <span className={styles.label}>{label}</span>

@@ -8,15 +8,17 @@ interface ConditionsPanelProps {
   form: ConditionsForm;
   /** The selected part's shares of the noise power; null while there is none. */
   shares: Contributions | null;
+  /** The resistors of the network are what is sought. */
+  isNetworkSought: boolean;
 }
 
 /** The operating conditions: the schematic, which is the form, and the list of what it doesn't show. */
-export function ConditionsPanel({ form, shares }: ConditionsPanelProps) {
+export function ConditionsPanel({ form, shares, isNetworkSought }: ConditionsPanelProps) {
   return (
     <ConditionsContext value={form}>
       <StageSwitch />
       <Schematic shares={shares} />
-      <ConditionList />
+      <ConditionList isNetworkSought={isNetworkSought} />
     </ConditionsContext>
   );
 }

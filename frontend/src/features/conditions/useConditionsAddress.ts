@@ -6,7 +6,8 @@ import { readAddress } from './address/readAddress';
 import { writeAddress } from './address/writeAddress';
 import { exampleRequest } from './exampleRequest';
 import { valueAt, withValue } from './requestPath';
-import { SEARCH_KEYS } from './search/searchKeys';
+import { withView } from './search/searchAddress';
+import { SEARCH_KEYS, type View } from './search/searchKeys';
 
 const NAMED_KEY = 'named';
 const PART_KEY = 'part';
@@ -45,13 +46,34 @@ export function useConditionsAddress({ params, change: changeAddress }: Address)
     },
     [request, replace],
   );
+  /** Other conditions in another view, one step back for both. */
+  const showIn = useCallback(
+    (view: View, next: (before: RankingRequest) => RankingRequest) =>
+      changeAddress((before) =>
+        withView(addressOf(next(requestOf(before)), before.get(NAMED_KEY), before), view),
+      ),
+    [changeAddress],
+  );
   const selectPart = useCallback(
     (id: string) => changeAddress((before) => withPart(before, id), true),
     [changeAddress],
   );
   const namedId = params.get(NAMED_KEY);
-  const partId = params.get(PART_KEY);
-  return { isBlank: content === null, request, problems, namedId, partId, change, replace, show, selectPart };
+  const chosenKey = params.get(PART_KEY);
+  return {
+    isBlank: content === null,
+    request,
+    problems,
+    namedId,
+    /** the chosen part, or one of its stages: then its id stands in front of a full stop */
+    chosenKey,
+    partId: chosenKey?.split('.')[0] ?? null,
+    change,
+    replace,
+    show,
+    showIn,
+    selectPart,
+  };
 }
 
 function requestOf(params: URLSearchParams): RankingRequest {

@@ -9,12 +9,15 @@ import { SavePlotMenu } from '../../components/charts/SavePlotMenu';
 import { frequencyPlot } from './frequencyPlot';
 import { QuietestMapView } from './map/QuietestMapView';
 import styles from './Picture.module.css';
+import type { PricePlot } from './price/pricePlot';
+import { PriceView } from './price/PriceView';
 import { resistancePlot } from './resistancePlot';
 import type { SelectedPart } from './useSelectedPart';
 
 const TABS = [
   { key: 'resistance', label: 'Resistance' },
   { key: 'frequency', label: 'Frequency' },
+  { key: 'price', label: 'Price' },
   { key: 'map', label: 'Quietest map' },
 ] as const;
 type Tab = (typeof TABS)[number]['key'];
@@ -27,15 +30,20 @@ interface PictureProps {
   request: RankingRequest;
   /** Moves the conditions to a place of the map. */
   onMove: (request: RankingRequest) => void;
+  prices: PricePlot;
+  /** Which of the prices' points is selected. */
+  chosen: string;
+  onSelect: (id: string) => void;
 }
 
-/** The selected part over the floor: the chosen curves large, the others below; or the quietest map. */
-export function Picture({ selected, request, onMove }: PictureProps) {
+/** The selected part over the floor: the chosen curves large, the others below; noise against price; or the quietest map. */
+export function Picture({ selected, request, onMove, ...priced }: PictureProps) {
   const [tab, setTab] = useState<Tab>('resistance');
   const plots = useMemo(() => plotsOf(selected, request), [selected, request]);
   const contents = {
     resistance: () => <Plots large={plots.resistance} small={plots.frequency} />,
     frequency: () => <Plots large={plots.frequency} small={plots.resistance} />,
+    price: () => <PriceView plot={priced.prices} selectedId={priced.chosen} onSelect={priced.onSelect} />,
     map: () => <QuietestMapView request={request} selectedId={selected.part.id} onMove={onMove} />,
   };
   return (
@@ -46,7 +54,7 @@ export function Picture({ selected, request, onMove }: PictureProps) {
         onChange={(key) => setTab(key as Tab)}
         items={TABS.map((item) => ({ ...item, children: item.key === tab && contents[item.key]() }))}
         tabBarStyle={{ marginBottom: 4 }}
-        tabBarGutter={24}
+        tabBarGutter={20}
       />
     </section>
   );

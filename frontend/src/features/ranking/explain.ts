@@ -41,7 +41,8 @@ const SENTENCES: Record<Contributor, (explained: Explained) => string> = {
     conditions.stage.topology === 'inverting'
       ? `The bias resistor makes ${share} of the noise: a lower one, or none, would help.`
       : `The load resistor makes ${share} of the noise: a higher one would help.`,
-  excess: ({ share }) => `Excess noise of the resistors makes ${share} of the noise.`,
+  excess: ({ share }) =>
+    `Excess noise of the resistors makes ${share} of the noise: less direct voltage, or resistors with a lower noise index, would help.`,
 };
 
 function flickerNote({ band }: OperatingConditions, { voltageNoiseCorner }: Amplifier): string {

@@ -24,7 +24,10 @@ export function priceText({ amount, currency }: Pick<Price, 'amount' | 'currency
 }
 
 /** "€ at 250", or null where no part has a price. */
-export function priceHeading(items: readonly RankingItem[], quantity: number): string | null {
+export function priceHeading(
+  items: readonly { unitPrice: Pick<Price, 'currency'> | null }[],
+  quantity: number,
+): string | null {
   const currency = items.find(({ unitPrice }) => unitPrice !== null)?.unitPrice?.currency;
   if (currency === undefined) return null;
   const parts = new Intl.NumberFormat('en-GB', { style: 'currency', currency }).formatToParts(0);

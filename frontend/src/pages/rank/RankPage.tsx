@@ -6,6 +6,7 @@ import { useMayDo } from '../../components/useMember';
 import { ConditionsContext } from '../../features/conditions/ConditionsContext';
 import { ConditionsPanel } from '../../features/conditions/ConditionsPanel';
 import { NamedConditionsBar } from '../../features/conditions/NamedConditionsBar';
+import { withNetworkOf } from '../../features/conditions/search/takenNetwork';
 import { useSearchAddress } from '../../features/conditions/search/useSearchAddress';
 import { useConditionsAddress } from '../../features/conditions/useConditionsAddress';
 import { useFormState } from '../../features/conditions/useFormState';
@@ -23,13 +24,13 @@ import { useRanked } from './useRanked';
 export function RankPage() {
   const query = useAddress();
   const address = useConditionsAddress(query);
-  const { isBlank, request, namedId, partId, show, replace, selectPart } = address;
+  const { isBlank, request, namedId, partId, show, showIn, replace, selectPart } = address;
   const search = useSearchAddress(query);
   useStartingConditions(isBlank, show);
   const ranked = useRanked(address, search);
   const { error, words, problems } = ranked;
   const { form, blockedBy } = useFormState({ ...address, problems }, refusedFields(error));
-  const lookedAt = useLookedAt(ranked, search.view, partId, request);
+  const lookedAt = useLookedAt(ranked, search.view, address);
   const note = noteOf(blockedBy, error, words !== undefined);
   const maySave = useMayDo('conditions.save');
   return (
@@ -49,6 +50,7 @@ export function RankPage() {
           <ConditionsPanel
             key={namedId}
             form={form}
+            isNetworkSought={search.view === 'stages'}
             shares={lookedAt && sharesOf(lookedAt.selected.figures.contributions)}
           />
         )}
@@ -70,6 +72,7 @@ export function RankPage() {
           isAwaited={!words && note === null}
           onChange={replace}
           onSelect={selectPart}
+          onTake={(single) => showIn('op-amps', (before) => withNetworkOf(before, single))}
         />
       )}
       <Shortcuts />

@@ -2,10 +2,12 @@ import type { RankingRequest, ResistorRankingRequest } from '@roothertz/common/c
 import { screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { describe, expect, it } from 'vitest';
+import type { RankingItem } from '../../api/ranking';
 import type { StageRequest } from '../../api/stages';
 import { exampleRanking } from '../../test/exampleRanking';
-import { sessionOf } from '../../test/factories';
+import { resistor, sessionOf } from '../../test/factories';
 import { fakeServer, json } from '../../test/fakeServer';
+import { rankingOf } from '../../test/rankings';
 import { renderApp } from '../../test/renderApp';
 import { rankedResistor, rankedStage, resistorRankingOf, stageRankingOf } from '../../test/stages';
 
@@ -105,6 +107,110 @@ describe('whole stages', () => {
     });
     expect(await answer(/No resistor pair gives a gain of 100\./)).toBeInTheDocument();
     expect(screen.getByText(/a gain of 103\.2, 3\.2\s% off: widen the tolerance/)).toBeInTheDocument();
+  });
+});
+
+describe('whole stages by price', () => {
+  const priceOf = (amount: string) => ({ amount, currency: 'EUR', total: amount, isStale: false });
+  const withPrices = (body: unknown) => {
+    const request = body as StageRequest;
+    const dear = { ...rankedStage(request, 1, 'VR-1108'), unitPrice: priceOf('8.20') };
+    const cheap = { ...rankedStage(request, 2, 'LQ-12'), unitPrice: priceOf('1.22'), channelsInParallel: 2 };
+    const { rank: _rank, ...other } = { ...cheap, channelsInParallel: 1, unitPrice: priceOf('1.10') };
+    return json(stageRankingOf(request, [dear, cheap], { frontier: [dear, other] }));
+  };
+
+  it('are sought within so many dB of the quietest, with the technologies chosen', async () => {
+    const { router, bodies } = open('/rank?stage=non-inverting&view=stages', { [STAGES]: withPrices });
+    await answer(/^VR-1108 with/);
+    await userEvent.selectOptions(screen.getByLabelText('sorted by'), 'price');
+    await answer(/^VR-1108 with .*: €8\.20/);
+    await type('within', '2 dB');
+    await userEvent.click(screen.getByRole('button', { name: /^technology of the resistors: any/ }));
+    await userEvent.click(screen.getByRole('checkbox', { name: 'thin film' }));
+    const last = () => bodies<StageRequest>(STAGES).at(-1)!;
+    await waitFor(() => expect(last().resistorFilter).toEqual({ technology: ['thin-film'] }));
+    expect(last()).toMatchObject({ sort: 'unitPrice', within: 2 });
+    expect(router.state.location.search).toBe(
+      '?stage=non-inverting&view=stages&by=unitPrice&within=2dB&tech=thin-film',
+    );
+  });
+
+  it('are drawn with their frontier, of which each stage can be selected', async () => {
+    const { router } = open('/rank?stage=non-inverting&view=stages', { [STAGES]: withPrices });
+    await answer(/^VR-1108 with/);
+    await userEvent.click(screen.getByRole('tab', { name: 'Price' }));
+    const chart = await screen.findByRole('application', { name: /^Noise against price/ });
+    expect(screen.getByText(/^VR-1108 with .*: €8\.20 at 1, .* on the frontier$/)).toBeInTheDocument();
+    chart.focus();
+    await userEvent.keyboard('{ArrowLeft}');
+    expect(screen.getByText(/^LQ-12 with .*: €1\.22 at 1, [^,]*$/)).toBeInTheDocument();
+    await userEvent.keyboard('{ArrowLeft}{Enter}');
+    await waitFor(() => expect(router.state.location.search).toContain('part=2.1.901.902'));
+    const parts = screen.getByRole('region', { name: 'Parts of the stage with LQ-12' });
+    expect(within(parts).getByRole('row', { name: /a stage\s+€1\.10/ })).toBeInTheDocument();
+  });
+
+  it('hand their network to the schematic, and back undoes it', async () => {
+    const { router, bodies } = open('/rank?stage=non-inverting&view=stages&vout=5', { [STAGES]: withPrices });
+    await answer(/^VR-1108 with/);
+    await userEvent.click(
+      await screen.findByRole('button', { name: 'Take this network into the schematic' }),
+    );
+    await answer(/^VR-1108: /);
+    const { stage } = bodies<RankingRequest>('POST /api/rankings/op-amps').at(-1)!.conditions;
+    const { noiseIndex } = resistor().resistor;
+    expect(stage).toMatchObject({
+      gain: 101,
+      gainResistance: 5,
+      outputVoltage: 5,
+      gainNoiseIndex: noiseIndex,
+    });
+    await router.navigate(-1);
+    expect(await answer(/^VR-1108 with/)).toBeInTheDocument();
+  });
+
+  it('count the excess noise of their resistors in budget and levers', async () => {
+    const { router, bodies } = open('/rank?stage=non-inverting&view=stages&vout=5', { [STAGES]: withPrices });
+    await answer(/^VR-1108 with/);
+    const levers = await screen.findByRole('region', { name: 'Levers for VR-1108' });
+    expect(within(levers).queryByRole('button', { name: /^Lower the gain resistance/ })).toBeNull();
+    await userEvent.click(
+      within(levers).getByRole('button', { name: /^Halve the direct output voltage to 2\.5\sV/ }),
+    );
+    await waitFor(() =>
+      expect(bodies<StageRequest>(STAGES).at(-1)!.conditions.stage.outputVoltage).toBe(2.5),
+    );
+    expect(router.state.location.search).toContain('vout=2.5');
+  });
+});
+
+describe('noise against price', () => {
+  it('selects an op-amp, and lists those without a price', async () => {
+    const price = { amount: '3.20', currency: 'EUR' } as RankingItem['unitPrice'];
+    const { router } = open('/rank?stage=non-inverting&part=2', {
+      'POST /api/rankings/op-amps': (body) => {
+        const { request, items } = exampleRanking(body as RankingRequest);
+        const [first, second] = items;
+        const priced = { ...first, unitPrice: price };
+        return json(rankingOf(request, [priced, second], { frontier: [priced as never] }));
+      },
+    });
+    await answer(/^VR-1108: /);
+    await userEvent.click(screen.getByRole('tab', { name: 'Price' }));
+    expect(await screen.findByText('What is selected has no price.')).toBeInTheDocument();
+    expect(screen.getByText('Without a price: LQ-12.')).toBeInTheDocument();
+    screen.getByRole('application', { name: /^Noise against price/ }).focus();
+    await userEvent.keyboard('{ArrowRight}{Enter}');
+    await waitFor(() => expect(router.state.location.search).toContain('part=1'));
+    expect(await screen.findByText(/^VR-1108: €3\.20 at 1, .* on the frontier$/)).toBeInTheDocument();
+  });
+
+  it('says where prices come from where there are none', async () => {
+    open('/rank?stage=non-inverting');
+    await answer(/^VR-1108: /);
+    await userEvent.click(screen.getByRole('tab', { name: 'Price' }));
+    expect(await screen.findByText(/^Nothing that is ranked has a price\./)).toBeInTheDocument();
   });
 });
 

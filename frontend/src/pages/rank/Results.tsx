@@ -27,18 +27,18 @@ interface ResultsProps {
 
 /** The ranking of the chosen view, with the fields that only it has. */
 export function Results(props: ResultsProps) {
-  const { view, stageSearch, place } = props.search;
+  const { view } = props.search;
   if (view === 'op-amps') return <OpAmpResults {...props} />;
   if (view === 'stages')
     return (
       <>
-        <StageSearchFields form={stageSearch} />
+        <StageSearchFields {...props.search} />
         <StageResults {...props} />
       </>
     );
   return (
     <>
-      <PlaceFields form={place} />
+      <PlaceFields {...props.search} />
       <ResistorResults {...props} />
     </>
   );

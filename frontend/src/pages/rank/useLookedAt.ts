@@ -1,17 +1,27 @@
-import type { RankingRequest } from '@roothertz/common/conditions';
+import type { RankingRequest, StageConditions } from '@roothertz/common/conditions';
 import type { LeverKey } from '@roothertz/common/noise';
 import { useMemo } from 'react';
+import type { WholeStage } from '../../api/stages';
 import type { View } from '../../features/conditions/search/searchKeys';
 import { nextQuieter } from '../../features/ranking/levers/leverRows';
 import type { PlottedPart } from '../../features/ranking/comparedPart';
+import { opAmpPricePlot } from '../../features/ranking/price/opAmpPricePlot';
+import type { PricePlot } from '../../features/ranking/price/pricePlot';
+import { stageKey } from '../../features/ranking/stages/stageKey';
+import { stagePricePlot } from '../../features/ranking/stages/stagePricePlot';
 import { useSelectedStage } from '../../features/ranking/stages/useSelectedStage';
 import { useSelectedPart, type SelectedPart } from '../../features/ranking/useSelectedPart';
-import type { Ranked } from './useRanked';
+import type { Address, Ranked } from './useRanked';
 
 /** The part that picture, budget and levers are about, in the stage that it stands in. */
 export interface LookedAt {
   selected: SelectedPart;
   request: RankingRequest;
+  /** The whole stage, where one is looked at, with one channel of it. */
+  stage?: { whole: WholeStage; single: StageConditions; hasNetwork: boolean };
+  prices: PricePlot;
+  /** Which of the prices' points it is. */
+  chosen: string;
   quieter: PlottedPart | undefined;
   /** Levers that the ranking itself has pulled already. */
   pulled: readonly LeverKey[];
@@ -19,17 +29,17 @@ export interface LookedAt {
   changed: (next: RankingRequest) => RankingRequest;
 }
 
-const NETWORK_LEVERS: readonly LeverKey[] = ['lower-network', 'raise-feedback', 'parallel'];
+/** The search has chosen the network; the value of a transimpedance stage's resistor is the asker's. */
+const NETWORK_LEVERS: readonly LeverKey[] = ['lower-network', 'parallel'];
 
 /** The chosen op-amp of the ranking, or the chosen whole stage. */
 export function useLookedAt(
   { opAmps, stages }: Ranked,
   view: View,
-  partId: string | null,
-  request: RankingRequest,
+  { partId, chosenKey, request }: Pick<Address, 'partId' | 'chosenKey' | 'request'>,
 ): LookedAt | null {
   const selectedPart = useSelectedPart(opAmps.ranking, partId);
-  const selectedStage = useSelectedStage(stages.stages, partId);
+  const selectedStage = useSelectedStage(stages.stages, chosenKey);
   return useMemo(() => {
     if (view !== 'stages') {
       const { ranking } = opAmps;
@@ -38,21 +48,37 @@ export function useLookedAt(
       return {
         selected: selectedPart,
         request: ranking.request,
+        prices: opAmpPricePlot(ranking),
+        chosen: selectedPart.part.id,
         quieter,
         pulled: [],
         changed: (next) => next,
       };
     }
-    return (
-      selectedStage && {
-        ...selectedStage,
-        quieter: undefined,
-        pulled: NETWORK_LEVERS,
-        changed: ({ conditions }) => ({
-          ...request,
-          conditions: { ...conditions, stage: request.conditions.stage },
-        }),
-      }
-    );
-  }, [view, opAmps, selectedPart, selectedStage, request]);
+    if (!stages.stages || !selectedStage) return null;
+    const { stage: whole, single, ...looked } = selectedStage;
+    return {
+      ...looked,
+      stage: { whole, single, hasNetwork: whole.network.feedbackResistor !== null },
+      prices: stagePricePlot(stages.stages),
+      chosen: stageKey(whole),
+      quieter: undefined,
+      pulled: NETWORK_LEVERS,
+      changed: (next) => withLever(request, looked.request, next),
+    };
+  }, [view, opAmps, stages, selectedPart, selectedStage, request]);
+}
+
+/** Of a lever's stage, what is asked and not found: the rest is the search's to find again. */
+const ASKED = ['outputVoltage', 'feedbackResistance'] as const;
+
+/** The page's request with what a lever changes of a found stage's conditions. */
+function withLever(asked: RankingRequest, found: RankingRequest, next: RankingRequest): RankingRequest {
+  const [before, after] = [found.conditions.stage, next.conditions.stage];
+  const changes = ASKED.filter((field) => after[field] !== before[field]).map((field) => [
+    field,
+    after[field],
+  ]);
+  const stage = { ...asked.conditions.stage, ...Object.fromEntries(changes) };
+  return { ...asked, conditions: { ...next.conditions, stage } };
 }

@@ -12,17 +12,18 @@ import { stageAnswer } from '../../features/ranking/stages/stageAnswer';
 import { useStages } from '../../features/ranking/stages/useStages';
 import { useRanking } from '../../features/ranking/useRanking';
 
-type Address = ReturnType<typeof useConditionsAddress>;
+export type Address = ReturnType<typeof useConditionsAddress>;
 type Search = ReturnType<typeof useSearchAddress>;
 
 /** What the chosen view ranks at the conditions of the address, and what stands in the way of it. */
-export function useRanked({ isBlank, request, problems }: Address, { view, stageSearch, place }: Search) {
+export function useRanked({ isBlank, request, problems }: Address, search: Search) {
+  const { view, stageSearch, place, sort, technologies } = search;
   const requests = useMemo(
     () => ({
-      stages: stageRequest(request, stageSearch.values),
-      resistors: resistorRequest(request, place.values),
+      stages: stageRequest(request, stageSearch.values, { sort, technologies }),
+      resistors: resistorRequest(request, place.values, technologies),
     }),
-    [request, stageSearch.values, place.values],
+    [request, stageSearch.values, place.values, sort, technologies],
   );
   const blocking = useMemo(() => {
     const { conditions, filter } = requests.stages;

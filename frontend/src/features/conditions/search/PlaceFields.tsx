@@ -3,10 +3,16 @@ import { useConditionsForm } from '../ConditionsContext';
 import { placesOf, type CircuitPlace } from './placesOf';
 import { SearchFieldInput } from './SearchFieldInput';
 import styles from './SearchFields.module.css';
-import type { PlaceForm } from './useSearchAddress';
+import { TechnologyChoice } from './TechnologyChoice';
+import type { useSearchAddress } from './useSearchAddress';
+
+type PlaceFieldsProps = Pick<
+  ReturnType<typeof useSearchAddress>,
+  'place' | 'technologies' | 'chooseTechnologies'
+>;
 
 /** The place in the circuit for which a resistor is sought; band and temperature are those of the conditions. */
-export function PlaceFields({ form }: { form: PlaceForm }) {
+export function PlaceFields({ place: form, technologies, chooseTechnologies }: PlaceFieldsProps) {
   const places = placesOf(useConditionsForm().request);
   return (
     <div role="group" aria-label="Place of the resistor" className={styles.line}>
@@ -24,6 +30,7 @@ export function PlaceFields({ form }: { form: PlaceForm }) {
       </span>
       <SearchFieldInput form={form} name="rtol" label="within" />
       <SearchFieldInput form={form} name="vr" label="direct voltage across it" />
+      <TechnologyChoice chosen={technologies} onChange={chooseTechnologies} />
     </div>
   );
 }

@@ -2,23 +2,37 @@ import { useConditionsForm } from '../ConditionsContext';
 import { stageKindOf } from '../stageKind';
 import { SearchFieldInput } from './SearchFieldInput';
 import styles from './SearchFields.module.css';
+import { SortChoice } from './SortChoice';
 import { canBeParallel, isNetworkLimited } from './stageSearch';
-import type { StageSearchForm } from './useSearchAddress';
+import { TechnologyChoice } from './TechnologyChoice';
+import type { useSearchAddress } from './useSearchAddress';
+
+type StageSearchFieldsProps = Pick<
+  ReturnType<typeof useSearchAddress>,
+  'stageSearch' | 'sort' | 'sortBy' | 'technologies' | 'chooseTechnologies'
+>;
 
 /** What a search for whole stages asks beside the conditions. */
-export function StageSearchFields({ form }: { form: StageSearchForm }) {
+export function StageSearchFields({ stageSearch: form, ...choices }: StageSearchFieldsProps) {
   const { stage } = useConditionsForm().request.conditions;
+  const isFollower = stageKindOf(stage) === 'follower';
   return (
     <div role="group" aria-label="Search for whole stages" className={styles.line}>
-      <SearchFieldInput form={form} name="gtol" label="Gain within" />
-      {isNetworkLimited(stage) && <SearchFieldInput form={form} name="nmax" label="network at most" />}
+      <SortChoice form={form} sort={choices.sort} onSort={choices.sortBy} />
+      {!isFollower && <SearchFieldInput form={form} name="gtol" label="gain within" />}
+      {!isFollower && isNetworkLimited(stage) && (
+        <SearchFieldInput form={form} name="nmax" label="network at most" />
+      )}
       {canBeParallel(stage) && <SearchFieldInput form={form} name="par" label="in parallel up to" />}
-      {stageKindOf(stage) !== 'follower' && (
-        <span className={styles.label}>
-          {stage.topology === 'transimpedance'
-            ? 'The feedback resistor is sought near the schematic’s value.'
-            : 'Both resistors are sought: the schematic’s don’t count here.'}
-        </span>
+      {!isFollower && (
+        <>
+          <TechnologyChoice chosen={choices.technologies} onChange={choices.chooseTechnologies} />
+          <span className={styles.label}>
+            {stage.topology === 'transimpedance'
+              ? 'The feedback resistor is sought near the schematic’s value.'
+              : 'Both resistors are sought: the schematic’s don’t count here.'}
+          </span>
+        </>
       )}
     </div>
   );

@@ -5,17 +5,27 @@ import { exampleRequest } from '../exampleRequest';
 import { withValue } from '../requestPath';
 import { STAGE_KINDS } from '../stageKind';
 import { placesOf } from './placesOf';
-import { readSearch, readView, withSearch, withView } from './searchAddress';
+import {
+  readSearch,
+  readSort,
+  readTechnologies,
+  readView,
+  withSearch,
+  withSort,
+  withTechnologies,
+  withView,
+} from './searchAddress';
 import { PLACE_KEYS, STAGE_SEARCH_KEYS } from './searchKeys';
 import { resistorRequest, stageRequest } from './stageSearch';
 
 const params = (query: string) => new URLSearchParams(query);
 const usualSearch = readSearch(params(''), STAGE_SEARCH_KEYS).values;
+const BY_NOISE = { sort: 'inputNoiseRms', technologies: [] } as const;
 const usualPlace = readSearch(params(''), PLACE_KEYS).values;
 
 describe('the address beside the conditions', () => {
   it('gives back the fields that it was written from, and keeps the rest', () => {
-    const values = { gtol: 0.005, nmax: 47e3, par: 4 };
+    const values = { gtol: 0.005, nmax: 47e3, par: 4, within: 2 };
     const written = withSearch(params('stage=follower'), STAGE_SEARCH_KEYS, values);
     expect(readSearch(params(written.toString()), STAGE_SEARCH_KEYS)).toEqual({
       values,
@@ -43,9 +53,32 @@ describe('the address beside the conditions', () => {
   });
 });
 
+describe('the choices of the address', () => {
+  it('are written only where they aren’t as usual, and unknown words are passed over', () => {
+    const written = withTechnologies(withSort(params(''), 'unitPrice'), ['thin-film', 'metal-foil']);
+    expect(written.toString()).toBe('by=unitPrice&tech=thin-film+metal-foil');
+    expect(readSort(written)).toBe('unitPrice');
+    expect(readTechnologies(written)).toEqual(['metal-foil', 'thin-film']);
+    expect(withTechnologies(withSort(written, 'inputNoiseRms'), []).toString()).toBe('');
+    expect(readSort(params('by=luck'))).toBe('inputNoiseRms');
+    expect(readTechnologies(params('tech=unobtainium'))).toEqual([]);
+  });
+});
+
 describe('a search for whole stages', () => {
+  it('is sorted by price within so many dB, with the technologies that count', () => {
+    const choices = { sort: 'unitPrice', technologies: ['thin-film'] } as const;
+    const request = stageRequest(exampleRequest('non-inverting'), { ...usualSearch, within: 2 }, choices);
+    expect(request).toMatchObject({ sort: 'unitPrice', within: 2, quantity: 1 });
+    expect(request.resistorFilter).toEqual({ technology: ['thin-film'] });
+  });
+
   it.each(STAGE_KINDS)('can be ranked as it stands, for the %s example', (kind) => {
-    const { conditions, filter } = stageRequest(exampleRequest(kind), { ...usualSearch, nmax: 1e9 });
+    const { conditions, filter } = stageRequest(
+      exampleRequest(kind),
+      { ...usualSearch, nmax: 1e9 },
+      BY_NOISE,
+    );
     expect(checkStageSearch(conditions, filter)).toEqual([]);
     expect(conditions.stage).not.toHaveProperty('gainResistance');
   });
@@ -53,8 +86,8 @@ describe('a search for whole stages', () => {
   it('keeps what the output drives, and 500 Ω where nothing is stated', () => {
     const example = exampleRequest('non-inverting');
     const stated = withValue(example, 'conditions.stage.network.minimumTotal', 2000);
-    expect(stageRequest(example, usualSearch).conditions.stage.network.minimumTotal).toBe(500);
-    expect(stageRequest(stated, usualSearch).conditions.stage.network.minimumTotal).toBe(2000);
+    expect(stageRequest(example, usualSearch, BY_NOISE).conditions.stage.network.minimumTotal).toBe(500);
+    expect(stageRequest(stated, usualSearch, BY_NOISE).conditions.stage.network.minimumTotal).toBe(2000);
   });
 
   it('takes the direct output voltage, but no noise index: those are of the resistors that are found', () => {
@@ -62,20 +95,21 @@ describe('a search for whole stages', () => {
     const { stage } = stageRequest(
       withValue(stated, 'conditions.stage.gainNoiseIndex', -20),
       usualSearch,
+      BY_NOISE,
     ).conditions;
     expect(stage.outputVoltage).toBe(-2.5);
     expect(stage).not.toHaveProperty('gainNoiseIndex');
   });
 
   it('limits no network of a transimpedance stage, whose resistor is wanted as it is', () => {
-    const { conditions } = stageRequest(exampleRequest('transimpedance'), usualSearch);
+    const { conditions } = stageRequest(exampleRequest('transimpedance'), usualSearch, BY_NOISE);
     expect(conditions.stage.network.maximumTotal).toBeGreaterThan(1e12);
   });
 
   it('joins channels only where their sources can be joined', () => {
     const four = { ...usualSearch, par: 4 };
     const most = (kind: 'non-inverting' | 'inverting') =>
-      stageRequest(exampleRequest(kind), four).conditions.stage.parallelMaximum;
+      stageRequest(exampleRequest(kind), four, BY_NOISE).conditions.stage.parallelMaximum;
     expect([most('non-inverting'), most('inverting')]).toEqual([4, 1]);
   });
 
@@ -84,14 +118,17 @@ describe('a search for whole stages', () => {
       ...exampleRequest('follower'),
       filter: { search: 'LQ', lifecycle: ['active' as const] },
     };
-    expect(stageRequest(filtered, usualSearch).resistorFilter).toEqual({ lifecycle: ['active'] });
+    expect(stageRequest(filtered, usualSearch, BY_NOISE).resistorFilter).toEqual({ lifecycle: ['active'] });
   });
 });
 
 describe('the place of a resistor', () => {
   it('has band and temperature of the conditions', () => {
-    const request = resistorRequest(exampleRequest('non-inverting'), { ...usualPlace, r: 4700 });
+    const request = resistorRequest(exampleRequest('non-inverting'), { ...usualPlace, r: 4700 }, [
+      'metal-foil',
+    ]);
     expect(checkResistorConditions(request)).toEqual([]);
+    expect(request.filter).toEqual({ technology: ['metal-foil'] });
     expect(request.conditions).toMatchObject({
       resistance: 4700,
       band: { upper: 20e3 },

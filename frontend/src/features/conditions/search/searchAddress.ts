@@ -1,5 +1,7 @@
+import { STAGE_SORTS, type StageSort } from '@roothertz/common/noise';
+import { TECHNOLOGIES, type Technology } from '@roothertz/common/parts';
 import { readAddressQuantity, writeAddressQuantity } from '../address/addressQuantity';
-import { VIEW_KEY, VIEWS, type SearchField, type View } from './searchKeys';
+import { SORT_KEY, TECHNOLOGY_KEY, VIEW_KEY, VIEWS, type SearchField, type View } from './searchKeys';
 
 export type SearchKeys = Record<string, SearchField>;
 
@@ -16,6 +18,25 @@ export function readView(params: URLSearchParams): View {
 
 export function withView(params: URLSearchParams, view: View): URLSearchParams {
   return withText(params, VIEW_KEY, view === 'op-amps' ? null : view);
+}
+
+/** What an address sorts whole stages by; by noise where it says nothing that is known. */
+export function readSort(params: URLSearchParams): StageSort {
+  return STAGE_SORTS.find((sort) => sort === params.get(SORT_KEY)) ?? 'inputNoiseRms';
+}
+
+export function withSort(params: URLSearchParams, sort: StageSort): URLSearchParams {
+  return withText(params, SORT_KEY, sort === 'inputNoiseRms' ? null : sort);
+}
+
+/** The technologies of resistors that an address names, in the usual order; what isn't known is passed over. */
+export function readTechnologies(params: URLSearchParams): Technology[] {
+  const named = (params.get(TECHNOLOGY_KEY) ?? '').split(/[ ,]/);
+  return TECHNOLOGIES.filter((technology) => named.includes(technology));
+}
+
+export function withTechnologies(params: URLSearchParams, chosen: readonly Technology[]): URLSearchParams {
+  return withText(params, TECHNOLOGY_KEY, chosen.length === 0 ? null : chosen.join(' '));
 }
 
 /** The fields that an address holds beside the operating conditions. */

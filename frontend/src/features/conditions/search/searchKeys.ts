@@ -32,6 +32,7 @@ export const STAGE_SEARCH_KEYS = {
   gtol: stageField('conditions.stage.gainTolerance', 0.01),
   nmax: stageField('conditions.stage.network.maximumTotal', 100e3),
   par: stageField('conditions.stage.parallelMaximum', 1),
+  within: stageField('within', 1),
 };
 
 /** The place of a resistor; band and temperature are those of the conditions. */
@@ -41,9 +42,16 @@ export const PLACE_KEYS = {
   vr: placeField('conditions.dcVoltage', 0),
 };
 
+/** What whole stages are sorted by, where it isn't the noise. */
+export const SORT_KEY = 'by';
+/** The technologies of resistors that count; all where none is named. */
+export const TECHNOLOGY_KEY = 'tech';
+
 /** What stays in the address when the conditions change. */
 export const SEARCH_KEYS: readonly string[] = [
   VIEW_KEY,
+  SORT_KEY,
+  TECHNOLOGY_KEY,
   ...Object.keys(STAGE_SEARCH_KEYS),
   ...Object.keys(PLACE_KEYS),
 ];

@@ -5,17 +5,24 @@ import type {
   ResistorRankingRequest,
   StageConditions,
 } from '@roothertz/common/conditions';
-import { STAGE_SEARCH_FIELDS, type SoughtConditions } from '@roothertz/common/noise';
+import { STAGE_SEARCH_FIELDS, type SoughtConditions, type StageSort } from '@roothertz/common/noise';
+import type { Technology } from '@roothertz/common/parts';
 import type { SearchContent } from './searchAddress';
 import type { PLACE_KEYS, STAGE_SEARCH_KEYS } from './searchKeys';
 
 /** Ω, what an output drives where nothing else is stated (common practice, no source). */
 export const USUAL_MINIMUM_TOTAL = 500;
 
+export interface StageChoices {
+  sort: StageSort;
+  technologies: readonly Technology[];
+}
+
 /** The search for whole stages at the conditions: the network's resistors are what is to be found. */
 export function stageRequest(
   { conditions, filter = {}, quantity }: RankingRequest,
-  { gtol, nmax, par }: SearchContent<typeof STAGE_SEARCH_KEYS>['values'],
+  { gtol, nmax, par, within }: SearchContent<typeof STAGE_SEARCH_KEYS>['values'],
+  { sort, technologies }: StageChoices,
 ) {
   const { network, ...stage } = withoutNetwork(conditions.stage);
   const minimumTotal = network?.minimumTotal ?? USUAL_MINIMUM_TOTAL;
@@ -28,7 +35,14 @@ export function stageRequest(
       parallelMaximum: canBeParallel(stage) ? par : 1,
     },
   };
-  return { conditions: sought, filter, resistorFilter: resistorFilterOf(filter), quantity };
+  return {
+    conditions: sought,
+    filter,
+    resistorFilter: resistorFilterOf(filter, technologies),
+    quantity,
+    sort,
+    ...(sort === 'unitPrice' && { within }),
+  };
 }
 
 type Sought = Omit<StageConditions, 'gainResistance' | 'gainNoiseIndex' | 'feedbackNoiseIndex'>;
@@ -59,18 +73,23 @@ export function canBeParallel({ topology }: Pick<StageConditions, 'topology'>): 
 export function resistorRequest(
   { conditions, filter = {}, quantity }: RankingRequest,
   { r, rtol, vr }: SearchContent<typeof PLACE_KEYS>['values'],
+  technologies: readonly Technology[],
 ): ResistorRankingRequest {
   const { ambientTemperature, band } = conditions;
   return {
     conditions: { resistance: r, resistanceTolerance: rtol, dcVoltage: vr, ambientTemperature, band },
-    filter: resistorFilterOf(filter),
+    filter: resistorFilterOf(filter, technologies),
     quantity,
   };
 }
 
 /** Search and package name op-amps; which libraries, lifecycles and approvals count holds for all parts. */
-function resistorFilterOf({ library, lifecycle, approval }: PartFilter): ResistorFilter {
+function resistorFilterOf(
+  { library, lifecycle, approval }: PartFilter,
+  technologies: readonly Technology[],
+): ResistorFilter {
   return {
+    ...(technologies.length > 0 && { technology: [...technologies] }),
     ...(library && { library }),
     ...(lifecycle && { lifecycle }),
     ...(approval && { approval }),

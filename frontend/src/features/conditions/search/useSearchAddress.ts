@@ -1,9 +1,15 @@
+import type { StageSort } from '@roothertz/common/noise';
+import type { Technology } from '@roothertz/common/parts';
 import { useCallback, useMemo } from 'react';
 import type { Address } from '../../../components/useAddress';
 import {
   readSearch,
+  readSort,
+  readTechnologies,
   readView,
   withSearch,
+  withSort,
+  withTechnologies,
   withView,
   type SearchContent,
   type SearchKeys,
@@ -23,9 +29,18 @@ export type PlaceForm = SearchForm<typeof PLACE_KEYS>;
 export function useSearchAddress(address: Address) {
   const { params, change } = address;
   const show = useCallback((view: View) => change((before) => withView(before, view)), [change]);
+  const sortBy = useCallback((sort: StageSort) => change((before) => withSort(before, sort)), [change]);
+  const chooseTechnologies = useCallback(
+    (chosen: readonly Technology[]) => change((before) => withTechnologies(before, chosen)),
+    [change],
+  );
   return {
     view: readView(params),
     show,
+    sort: readSort(params),
+    sortBy,
+    technologies: useMemo(() => readTechnologies(params), [params]),
+    chooseTechnologies,
     stageSearch: useSearchForm(address, STAGE_SEARCH_KEYS),
     place: useSearchForm(address, PLACE_KEYS),
   };

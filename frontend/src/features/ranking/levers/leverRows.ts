@@ -23,6 +23,7 @@ const CONDITION_LEVERS: readonly LeverKey[] = [
   'halve-band',
   'lower-network',
   'raise-feedback',
+  'lower-voltage',
 ];
 
 /** Less than this can't be told on a bench, dB. */

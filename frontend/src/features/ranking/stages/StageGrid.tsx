@@ -18,9 +18,9 @@ const TWO_LINES = 42;
 
 /** The whole stages as rows under the source floor. */
 export function StageGrid({ stages, ...state }: StageGridProps) {
-  const { unit, floor, rows } = useMemo(() => stageRows(stages), [stages]);
+  const { unit, priceHeading, floor, rows } = useMemo(() => stageRows(stages), [stages]);
   const { topology } = stages.request.conditions.stage;
-  const columns = useMemo(() => stageColumns(unit, topology), [unit, topology]);
+  const columns = useMemo(() => stageColumns(unit, topology, priceHeading), [unit, topology, priceHeading]);
   const floorRows = useMemo(() => [floor], [floor]);
   return (
     <>

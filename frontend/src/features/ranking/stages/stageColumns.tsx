@@ -9,8 +9,13 @@ type Cell<Value> = ICellRendererParams<StageRow, Value>;
 const RIGHT: ColDef<StageRow> = { cellStyle: { textAlign: 'right' }, headerClass: 'ag-right-aligned-header' };
 
 /** The columns of whole stages; the noise column's heading carries the one unit of its figures. */
-export function stageColumns(unit: string, topology: Topology): ColDef<StageRow>[] {
+export function stageColumns(
+  unit: string,
+  topology: Topology,
+  priceHeading: string | null,
+): ColDef<StageRow>[] {
   const isTransimpedance = topology === 'transimpedance';
+  const hasPrices = priceHeading !== null;
   return [
     {
       colId: 'place',
@@ -32,14 +37,14 @@ export function stageColumns(unit: string, topology: Topology): ColDef<StageRow>
       colId: 'noise',
       field: 'noise',
       headerName: `noise, ${unit} rms`,
-      width: 98,
+      width: 96,
       cellRenderer: ({ value }: Cell<StageRow['noise']>) => value && <StageNoiseCell {...value} />,
     },
     {
       colId: 'network',
       field: 'network',
       headerName: isTransimpedance ? 'R_f' : 'R_g, R_f',
-      width: 146,
+      width: hasPrices ? 132 : 146,
       headerComponent: () => <NetworkHeading hasGainResistor={!isTransimpedance} />,
       cellRenderer: ({ value }: Cell<StageRow['network']>) => value && <NetworkCell parts={value} />,
     },
@@ -48,17 +53,34 @@ export function stageColumns(unit: string, topology: Topology): ColDef<StageRow>
       colId: 'gain',
       field: 'gain',
       headerName: 'gain',
-      width: 50,
+      width: hasPrices ? 46 : 50,
       hide: isTransimpedance,
       cellRenderer: ({ value }: Cell<StageRow['gain']>) => value && <GainCell {...value} />,
     },
     {
       colId: 'budget',
       field: 'budget',
-      headerName: 'budget, power',
-      width: 134,
+      headerName: hasPrices ? 'budget' : 'budget, power',
+      width: hasPrices ? 60 : 134,
       cellStyle: { display: 'flex', alignItems: 'center', paddingLeft: 4, paddingRight: 2 },
       cellRenderer: ({ value }: Cell<StageRow['budget']>) => value && <BudgetBar {...value} />,
     },
+    ...(hasPrices ? [priceColumn(priceHeading)] : []),
   ];
+}
+
+const SCROLLBAR = 18;
+
+/** The last column: it leaves room for the scrollbar, which the grid doesn't count when it fits the columns. */
+function priceColumn(headerName: string): ColDef<StageRow> {
+  return {
+    ...RIGHT,
+    colId: 'price',
+    field: 'price',
+    headerName,
+    width: 80,
+    cellStyle: { textAlign: 'right', paddingLeft: 0, paddingRight: SCROLLBAR },
+    cellRenderer: ({ value }: Cell<StageRow['price']>) =>
+      value && <span title={value.title}>{value.text}</span>,
+  };
 }

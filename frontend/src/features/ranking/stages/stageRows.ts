@@ -5,6 +5,8 @@ import { barOf, barScale, type Bar } from '../barScale';
 import { cautionsOfPart } from '../cautionsOf';
 import { FLOOR_ID, type GridRow } from '../gridRows';
 import { commonUnit, inUnit, noiseKind } from '../noiseUnit';
+import { amountText, priceHeading } from '../priceWords';
+import { stageParts } from './stagePartRows';
 import type { ShownStages } from './useStages';
 
 /** A resistor of the network as its cell shows it. */
@@ -23,11 +25,14 @@ export interface StageRow {
   gain: { text: string; channelsInParallel: number };
   noise: { text: string; aboveFloor: string };
   budget: { bar: Bar; contributions: Contributions };
+  price: { text: string; title: string };
 }
 
 export interface StageRows {
   /** The unit of the noise column. */
   unit: string;
+  /** The heading of the price column; null where there is none. */
+  priceHeading: string | null;
   floor: StageRow;
   rows: StageRow[];
 }
@@ -36,11 +41,12 @@ export interface StageRows {
 export function stageRows({ first, items, request }: ShownStages): StageRows {
   const { stage } = request.conditions;
   const floor = first.floor.inputNoiseRms;
-  const quietest = items[0]?.inputNoiseRms ?? floor;
+  const quietest = items.length === 0 ? floor : Math.min(...items.map((item) => item.inputNoiseRms));
   const unit = commonUnit(floor || quietest, noiseKind(stage.topology));
   const scale = barScale(floor, quietest);
   return {
     unit,
+    priceHeading: priceHeading([...items, ...first.frontier], request.quantity ?? 1),
     floor: floorRow(floor, unit, scale),
     rows: items.map((item) => rowOf(item, stage, unit, scale)),
   };
@@ -59,7 +65,13 @@ function rowOf(item: StageItem, stage: SoughtStage, unit: string, scale: number)
       aboveFloor: aboveFloor === null ? '–' : formatQuantity(aboveFloor, 'decibel'),
     },
     budget: { bar: barOf(contributions, scale), contributions },
+    price: priceOf(item),
   };
+}
+
+function priceOf(item: StageItem): StageRow['price'] {
+  const title = stageParts(item).map(({ pieces, name, price }) => `${pieces} ${name}: ${price}`);
+  return { text: item.unitPrice ? amountText(item.unitPrice) : 'no price', title: title.join('\n') };
 }
 
 function networkOf({ gainResistor, feedbackResistor }: StageItem['network']): NetworkPart[] {
@@ -97,5 +109,6 @@ function floorRow(rms: number, unit: string, scale: number): StageRow {
     gain: { text: '', channelsInParallel: 1 },
     noise: { text: inUnit(rms, unit), aboveFloor: rms > 0 ? formatQuantity(0, 'decibel') : '–' },
     budget: { bar: barOf(contributions, scale), contributions },
+    price: { text: '', title: '' },
   };
 }

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import type { StageRanking, StageRequest } from '../../../api/stages';
+import type { StageRanking, StageRequest, WholeStage } from '../../../api/stages';
 import { EXAMPLE } from '../../../test/exampleRanking';
 import { rankedStage, stageRankingOf } from '../../../test/stages';
 import { plainText } from '../answer';
@@ -25,6 +25,10 @@ function shown(more: Partial<StageRanking> = {}, items = [leader], request = REQ
   return { request, first: { ...stageRankingOf(request, items, more), request }, items };
 }
 
+function priced<Stage extends WholeStage>(stage: Stage, amount: string): Stage {
+  return { ...stage, unitPrice: { amount, currency: 'EUR', total: amount, isStale: false } };
+}
+
 const plain = (text: string) => text.replaceAll('\u2009', ' ');
 const lead = (...given: Parameters<typeof shown>) => plain(plainText(stageAnswer(shown(...given)).lead));
 const following = (...given: Parameters<typeof shown>) => plain(stageAnswer(shown(...given)).following);
@@ -37,6 +41,30 @@ describe('the answer of whole stages', () => {
     expect(following()).toBe(
       'The gain is 101, 1.0 % above the wanted one. 1 op-amp is ranked, with the quietest of 1234 resistor pairs that give it.',
     );
+  });
+
+  it('says what it costs, and what the cheapest of all would save and spoil', () => {
+    const dear = priced(leader, '8.2000');
+    const cheap = priced({ ...leader, inputNoiseRms: leader.inputNoiseRms * 2 }, '1.2200');
+    const sentences = (...given: Parameters<typeof shown>) => following(...given).split('. ')[1];
+    expect(sentences({ frontier: [dear, cheap] }, [dear])).toBe(
+      'The stage costs €8.20; the cheapest stage of all costs €1.22 and is 6.02 dB noisier',
+    );
+    expect(sentences({ frontier: [cheap] }, [leader])).toMatch(/^The stage has no price; the cheapest/);
+    expect(sentences({ frontier: [cheap] }, [cheap])).toBe('The stage costs €1.22: no stage is cheaper');
+  });
+
+  it('leads with the price where they are sorted by it', () => {
+    const request = { ...REQUEST, sort: 'unitPrice' as const, within: 1 };
+    const cheap = priced(leader, '1.2200');
+    expect(lead({ frontier: [cheap] }, [cheap], request)).toMatch(
+      /^Cheapest within 1 dB of the quietest is VR-1108 with 5 Ω and 500 Ω: €1\.22, [\d.]+ nV rms,/,
+    );
+    expect(following({ frontier: [cheap] }, [cheap], request)).toBe(
+      'The gain is 101, 1.0 % above the wanted one. No stage is cheaper. 1 op-amp makes a stage within 1 dB, with the cheapest of 1234 resistor pairs that give it.',
+    );
+    expect(lead({}, [leader], request)).toMatch(/^Quietest is VR-1108/);
+    expect(following({}, [leader], request)).toContain('None of these stages has a price.');
   });
 
   it('tells of channels in parallel', () => {
@@ -86,5 +114,15 @@ describe('the rows of whole stages', () => {
       ['R_f', '500 Ω', 'TN-500R'],
     ]);
     expect(rows[0].gain).toEqual({ text: '101', channelsInParallel: 1 });
+  });
+
+  it('have a price where any stage has one, and say of which part it is missing', () => {
+    expect(stageRows(shown()).priceHeading).toBeNull();
+    const { priceHeading, rows } = stageRows(shown({ frontier: [priced(leader, '1.22')] }));
+    expect(priceHeading).toBe('€ at 1');
+    expect(rows[0].price).toEqual({
+      text: 'no price',
+      title: '1 × VR-1108: no price\n1 × TN-5R00: no price\n1 × TN-500R: no price',
+    });
   });
 });

@@ -1,56 +1,68 @@
-import type { OperatingConditions, RankingRequest } from '@roothertz/common/conditions';
+import type { OperatingConditions, RankingRequest, StageConditions } from '@roothertz/common/conditions';
 import { parallelStage, type SoughtConditions, withNetwork } from '@roothertz/common/noise';
 import { useMemo } from 'react';
-import type { StageItem } from '../../../api/stages';
+import type { WholeStage } from '../../../api/stages';
 import { comparedWith } from '../comparedPart';
 import type { SelectedPart } from '../useSelectedPart';
+import { stageKey } from './stageKey';
 import type { ShownStages } from './useStages';
 
 /** A stage that is looked at, as an op-amp in a stage of its own. */
 export interface SelectedStage {
+  stage: WholeStage;
   selected: SelectedPart;
-  /** The conditions with the stage's network. */
+  /** The conditions with the stage's network, those of several channels as one. */
   request: RankingRequest;
+  /** One channel of it. */
+  single: StageConditions;
 }
 
 /** Curves of stages nearer than this to the quietest lie on one another. */
 const ALIKE = 1.05;
 
-/** The chosen stage, the quietest where none is chosen or the chosen one isn't ranked. */
+/**
+ * The chosen stage, or that of the chosen part; the first where neither is ranked.
+ *
+ * @param chosenKey of a stage, as `stageKey` makes it, or the id of a part
+ */
 export function useSelectedStage(
   stages: ShownStages | undefined,
-  chosenId: string | null,
+  chosenKey: string | null,
 ): SelectedStage | null {
   return useMemo(() => {
     if (!stages) return null;
-    const { items, request } = stages;
-    const item = items.find(({ part }) => part.id === chosenId) ?? items[0];
-    return item ? selectedStage(item, items, request.conditions, request.filter) : null;
-  }, [stages, chosenId]);
+    const stage = chosenStage(stages, chosenKey);
+    return stage ? selectedStage(stage, stages) : null;
+  }, [stages, chosenKey]);
 }
 
-function selectedStage(
-  item: StageItem,
-  items: readonly StageItem[],
-  sought: SoughtConditions,
-  filter: RankingRequest['filter'],
-): SelectedStage {
-  const alone = { conditions: conditionsOf(item, sought), amplifier: item.part.amplifier };
-  const { conditions, amplifier } = parallelStage(alone, item.channelsInParallel);
-  const limit = items[0].inputNoiseRms * ALIKE;
+function chosenStage({ items, first }: ShownStages, chosenKey: string | null): WholeStage | undefined {
+  const all: WholeStage[] = [...items, ...first.frontier];
+  const [partId] = chosenKey?.split('.') ?? [];
+  return (
+    all.find((stage) => stageKey(stage) === chosenKey) ?? all.find(({ part }) => part.id === partId) ?? all[0]
+  );
+}
+
+function selectedStage(stage: WholeStage, { items, request: { conditions: sought, filter } }: ShownStages) {
+  const alone = { conditions: conditionsOf(stage, sought), amplifier: stage.part.amplifier };
+  const { conditions, amplifier } = parallelStage(alone, stage.channelsInParallel);
+  const limit = Math.min(...items.map(({ inputNoiseRms }) => inputNoiseRms)) * ALIKE;
   const others = items.map(({ part, inputNoiseRms }) => ({ part, quietSet: inputNoiseRms <= limit }));
   return {
+    stage,
     selected: {
-      part: { ...item.part, amplifier: { ...item.part.amplifier, ...amplifier } },
-      figures: item,
-      compared: comparedWith(item.part.id, others),
+      part: { ...stage.part, amplifier: { ...stage.part.amplifier, ...amplifier } },
+      figures: stage,
+      compared: comparedWith(stage.part.id, others),
     },
     request: { conditions, filter },
+    single: alone.conditions.stage,
   };
 }
 
 /** The operating conditions with the network of a ranked stage. */
-function conditionsOf({ network }: StageItem, sought: SoughtConditions): OperatingConditions {
+function conditionsOf({ network }: WholeStage, sought: SoughtConditions): OperatingConditions {
   const { gain, gainResistor, feedbackResistor } = network;
   return withNetwork(sought, {
     gain,
@@ -58,5 +70,18 @@ function conditionsOf({ network }: StageItem, sought: SoughtConditions): Operati
     feedbackResistor: null,
     gainResistance: gainResistor?.resistance ?? 0,
     feedbackResistance: feedbackResistor?.resistance ?? 0,
+    ...noiseIndicesOf(network, sought),
   });
+}
+
+/** Noise indices count where a direct output voltage drives excess noise. */
+function noiseIndicesOf(
+  { gainResistor, feedbackResistor }: WholeStage['network'],
+  { stage }: SoughtConditions,
+) {
+  if (!stage.outputVoltage) return {};
+  return {
+    gainNoiseIndex: gainResistor?.noiseIndex ?? undefined,
+    feedbackNoiseIndex: feedbackResistor?.noiseIndex ?? undefined,
+  };
 }
