@@ -86,9 +86,10 @@ describe('paying for a plan', () => {
         standing: 'active',
         seats: 3,
         usedSeats: 1,
+        periodEndsAt: (await kept()).currentPeriodEnd?.toISOString(),
         payment: {
           seatPrice: { amount: '19.00', currency: 'EUR' },
-          next: { amount: '57.00', currency: 'EUR' },
+          next: { amount: '57.00', currency: 'EUR', at: (await kept()).currentPeriodEnd?.toISOString() },
           invoices: [{ status: 'paid', amount: '57.00', url: expect.stringContaining('/invoice/') }],
         },
       });

@@ -22,6 +22,10 @@ const pages: RouteObject[] = [
     lazy: async () => ({ Component: (await import('./pages/imports/ImportPage')).ImportPage }),
   },
   {
+    path: 'team/plan',
+    lazy: async () => ({ Component: (await import('./pages/plan/PlanPage')).PlanPage }),
+  },
+  {
     path: 'account',
     lazy: async () => ({ Component: (await import('./pages/account/AccountPage')).AccountPage }),
   },

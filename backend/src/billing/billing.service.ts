@@ -32,7 +32,7 @@ export class BillingService {
       mayTry: mayTry(kept),
       granted: kept?.status === 'active' && kept.subscriptionId === null,
       hasCustomer: Boolean(kept?.customerId),
-      paidUntil: kept?.currentPeriodEnd?.toISOString() ?? null,
+      periodEndsAt: kept?.currentPeriodEnd?.toISOString() ?? null,
       endsAt: kept?.endsAt?.toISOString() ?? null,
       payment: await this.payment(kept).catch(() => null),
     };
@@ -51,10 +51,9 @@ export class BillingService {
     if (!kept?.subscriptionId || kept.status !== 'active' || kept.endsAt !== null) return null;
     const { subscriptionId: subscription } = kept;
     const invoice = await this.payments.ask((service) => service.invoices.createPreview({ subscription }));
-    return {
-      ...toMoney(invoice.amount_due, invoice.currency),
-      at: kept.currentPeriodEnd?.toISOString() ?? null,
-    };
+    const starts = invoice.lines.data.map(({ period }) => period.start);
+    const at = new Date(Math.max(...starts) * 1000).toISOString();
+    return { ...toMoney(invoice.amount_due, invoice.currency), at };
   }
 
   private async invoices(customer: string | null | undefined): Promise<PaymentDto['invoices']> {

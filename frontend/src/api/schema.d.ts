@@ -1217,10 +1217,13 @@ export interface components {
             hasCustomer: boolean;
             /** @description Whether the team may start its one trial. */
             mayTry: boolean;
-            /** Format: date-time */
-            paidUntil: string | null;
             /** @description null = the payment service doesn’t answer. */
             payment: components["schemas"]["PaymentDto"] | null;
+            /**
+             * Format: date-time
+             * @description The end of the period that was invoiced last.
+             */
+            periodEndsAt: string | null;
             /** @enum {string} */
             plan: "free" | "team";
             /** @description People that the plan allows. */
@@ -1708,7 +1711,7 @@ export interface components {
              */
             amount: string;
             /** Format: date-time */
-            at: string | null;
+            at: string;
             /** @example EUR */
             currency: string;
         };

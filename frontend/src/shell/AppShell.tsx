@@ -1,6 +1,7 @@
 import { Suspense, useEffect, useRef } from 'react';
 import { Outlet, ScrollRestoration, useLocation } from 'react-router-dom';
 import { PageSkeleton } from '../components/PageSkeleton';
+import { PlanNotice } from './PlanNotice';
 import { Rail } from './Rail';
 import styles from './Shell.module.css';
 import { UnreachableNotice } from './UnreachableNotice';
@@ -16,6 +17,7 @@ export function AppShell() {
       <Rail />
       <main id="main" ref={main} tabIndex={-1} className={styles.main}>
         <UnreachableNotice />
+        <PlanNotice />
         <Suspense fallback={<PageSkeleton />}>
           <Outlet />
         </Suspense>

@@ -14,8 +14,8 @@ export class MoneyDto implements Money {
 }
 
 export class NextInvoiceDto extends MoneyDto {
-  @ApiProperty({ ...MOMENT, nullable: true })
-  at: string | null;
+  @ApiProperty(MOMENT)
+  at: string;
 }
 
 export class InvoiceDto extends MoneyDto {
@@ -71,8 +71,8 @@ export class BillingResponseDto {
   @ApiProperty({ description: 'Whether the payment service knows the team.' })
   hasCustomer: boolean;
 
-  @ApiProperty({ ...MOMENT, nullable: true })
-  paidUntil: string | null;
+  @ApiProperty({ ...MOMENT, nullable: true, description: 'The end of the period that was invoiced last.' })
+  periodEndsAt: string | null;
 
   @ApiProperty({
     ...MOMENT,

@@ -1,4 +1,5 @@
-import { PLAN_LIMITS, ROLE_LABELS } from '@roothertz/common/access';
+import { PLAN_LABELS, ROLE_LABELS } from '@roothertz/common/access';
+import { Link } from 'react-router-dom';
 import { Facts } from '../../components/Facts';
 import { useMember } from '../../components/useMember';
 import { SignOutButton } from '../../features/session/SignOutButton';
@@ -17,7 +18,7 @@ export function AccountPage() {
           { term: 'E-mail', value: user.email },
           { term: 'Team', value: team.name },
           { term: 'Roles', value: roles.map((role) => ROLE_LABELS[role]).join(', ') },
-          { term: 'Plan', value: planText(plan) },
+          { term: 'Plan', value: <Link to="/team/plan">{PLAN_LABELS[plan]}</Link> },
         ]}
       />
       <section className={styles.section}>
@@ -27,8 +28,4 @@ export function AccountPage() {
       <SignOutButton />
     </div>
   );
-}
-
-function planText(plan: keyof typeof PLAN_LIMITS): string {
-  return PLAN_LIMITS[plan].ownLibrary ? 'Team, with a library of your own' : 'Free, the curated library only';
 }
