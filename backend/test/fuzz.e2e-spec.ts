@@ -20,12 +20,13 @@ import {
 } from './support/index.js';
 import { type DocumentedOperation, operationsOf } from './support/operations.js';
 
-const BODIES_PER_OPERATION = 60;
+const BODIES_PER_OPERATION = 40;
 /**
  * What takes a password, a token or a signature, which can't be guessed, and what a team that has paid can't do a
  * second time.
  */
-const REFUSED = /sign-in|\{token\}|billing\/(trial|checkout|webhook|seats)$/;
+const REFUSED =
+  /sign-in|auth\/confirm|reset-password|account\/|\{token\}|billing\/(trial|checkout|webhook|seats)$/;
 /** Stands for the id of what the operation's sample made. */
 const OWN = 'own';
 const IDS = [
@@ -116,10 +117,12 @@ describe('whatever is sent', () => {
     await fc.assert(property, { numRuns: BODIES_PER_OPERATION });
   });
 
+  /** The member never signs out: nothing could be tried after that. */
   async function send({ method, path }: DocumentedOperation, body: unknown, id: string): Promise<number> {
     const own = made.get(path.replace('/{id}', '')) ?? '1';
     const place = path.replace('{id}', id === OWN ? own : id);
-    const { status, headers, text } = await member.agent[method](place)
+    const asker = path.endsWith('/sign-out') ? app.request : member.agent;
+    const { status, headers, text } = await asker[method](place)
       .set('Content-Type', 'application/json')
       .send(toRequestText(body));
     if (status >= 400) {

@@ -12,18 +12,28 @@ interface Route {
 }
 
 const OPEN_ROUTES = [
+  'askForPasswordReset',
+  'confirmAddress',
+  'getAccountLink',
   'getHealth',
   'getInvitation',
   'getUnsubscription',
   'joinWithNewAccount',
   'receiveBillingEvent',
+  'resetPassword',
   'signIn',
   'signOut',
+  'signUp',
   'unsubscribe',
 ];
 const OPEN_ADDRESSES = [
   'post /api/auth/sign-in',
   'post /api/auth/sign-out',
+  'post /api/auth/sign-up',
+  'post /api/auth/password-resets',
+  'get /api/auth/links/:token',
+  'post /api/auth/confirm',
+  'post /api/auth/reset-password',
   'get /api/health',
   'get /api/invitations/:token',
   'post /api/invitations/:token/account',

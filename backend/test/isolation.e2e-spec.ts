@@ -47,7 +47,9 @@ describe('two teams', () => {
     const supplier = await createSupplier(theirs, MARK);
     const offer = await createOffer(theirs, { partId: part.id, supplierId: supplier.id });
     const list = await checkedList(theirs, 'op-amps', `maker,mpn,en\n${MARK},M-1,2\n`);
+    const sessions = await theirs.agent.get('/api/auth/sessions').expect(200);
     Object.assign(ids, {
+      '/api/auth/sessions': sessions.body.items[0].id,
       '/api/conditions': (await saveConditions(theirs, { name: MARK })).id,
       '/api/imports': list.id,
       '/api/offers': offer.id,
@@ -63,6 +65,7 @@ describe('two teams', () => {
       partIds: [part.id],
       supplierId: supplier.id,
       memberId: String(userId),
+      teamId: String(theirs.caller.teamId),
       ids: [offer.id],
     });
   }

@@ -1,7 +1,10 @@
 import { JwtService } from '@nestjs/jwt';
 import supertest from 'supertest';
+import { Attempts } from '../src/auth/attempts.service.js';
+import { signInSubjects } from '../src/auth/attempt-limits.js';
+import { AttemptCount } from '../src/auth/entities/attempt-count.entity.js';
+import { Session } from '../src/auth/entities/session.entity.js';
 import { Membership } from '../src/teams/entities/membership.entity.js';
-import { User } from '../src/users/entities/user.entity.js';
 import {
   createTeam,
   PASSWORD,
@@ -10,6 +13,12 @@ import {
   type TestApp,
   type TestTeam,
 } from './support/index.js';
+
+interface OpenSession {
+  userAgent: string;
+  current: boolean;
+  address: string;
+}
 
 describe('session', () => {
   let app: TestApp;
@@ -71,16 +80,33 @@ describe('session', () => {
     },
   );
 
+  it('slows attempts on one account from many places, and hears it again when the wait is over', async () => {
+    const attempts = () => new Attempts(app.dataSource);
+    for (let place = 1; place <= 50; place++)
+      await attempts().count(signInSubjects('ada@weir.example', `10.0.0.${place}`));
+    const next = () => attempts().count(signInSubjects('ada@weir.example', '10.0.1.1'));
+    await expect(next()).rejects.toMatchObject({ code: 'request.too-many', retryAfter: 5 });
+    await attempts().count(signInSubjects('bob@weir.example', '10.0.1.1'));
+    await app.dataSource.query('UPDATE attempt_counts SET until = NOW(3) - INTERVAL 1 SECOND');
+    await next();
+    await expect(next()).rejects.toMatchObject({ retryAfter: 10 });
+    await app.dataSource.query('UPDATE attempt_counts SET until = NOW(3) - INTERVAL 1 HOUR');
+    for (let time = 0; time < 5; time++) await next();
+    await expect(next()).rejects.toMatchObject({ retryAfter: 5 });
+    await app.dataSource.getRepository(AttemptCount).deleteAll();
+  });
+
   it('counts attempts that are made at the same time', async () => {
     const { email } = await signInMember(app, team, ['engineer']);
     const answers = await Promise.all(Array.from({ length: 12 }, () => signIn(email, 'wrong')));
     expect(answers.filter(({ status }) => status === 401).length).toBeLessThanOrEqual(5);
   });
 
-  it('ends the session in the browser on sign-out', async () => {
-    const { agent } = await signInMember(app, team, ['engineer']);
+  it('ends on sign-out, in the browser and for whoever kept the token', async () => {
+    const { agent, cookie } = await signInMember(app, team, ['engineer']);
     const answer = await agent.post('/api/auth/sign-out').expect(204);
     expect(answer.headers['set-cookie'][0]).toMatch(/^roothertz_session=; .*Expires=Thu, 01 Jan 1970/);
+    await askWith(cookie.split('=')[1]).expect(401);
   });
 
   it('asks for a session', async () => {
@@ -91,9 +117,9 @@ describe('session', () => {
   it('refuses a token that is forged, unsigned, garbled or expired', async () => {
     const { caller, cookie } = await signInMember(app, team, ['engineer']);
     const claims = app.nest.get(JwtService, { strict: false }).decode(cookie.split('=')[1]);
-    const { sub, team: teamId, key } = claims;
+    const { sub, sid } = claims;
     const sign = (secret: string, expiresIn: number) =>
-      new JwtService().sign({ sub, team: teamId, key }, { secret, expiresIn });
+      new JwtService().sign({ sub, sid }, { secret, expiresIn });
     const unsigned = `${btoa('{"alg":"none"}')}.${btoa(JSON.stringify(claims))}.`;
     await askWith(sign(app.config.JWT_SECRET, 60)).expect(200);
     await askWith(sign('another secret of thirty-two letters', 60)).expect(401);
@@ -110,10 +136,55 @@ describe('session', () => {
     await agent.get('/api/auth/me').expect(401);
   });
 
-  it('ends when the password changes', async () => {
+  it('is listed with where it came from, and ended one by one or all but this', async () => {
+    const { email, agent, caller } = await signInMember(app, team, ['engineer']);
+    const other = await signInMember(app, team, ['engineer']);
+    const phone = supertest.agent(await app.nest.getUrl());
+    await phone.post('/api/auth/sign-in').set('User-Agent', 'A phone').send({ email, password: PASSWORD });
+    const list = await agent.get('/api/auth/sessions').expect(200);
+    expect(
+      list.body.items.map(({ userAgent, current, address }: OpenSession) => [userAgent, current, address]),
+    ).toEqual([
+      ['A phone', false, '127.0.0.1'],
+      ['tests', true, '127.0.0.1'],
+    ]);
+    const [{ id }] = list.body.items;
+    await other.agent.delete(`/api/auth/sessions/${id}`).expect(404);
+    await phone.get('/api/auth/me').expect(200);
+    await agent.delete(`/api/auth/sessions/${id}`).expect(204);
+    await phone.get('/api/auth/me').expect(401);
+    await agent.delete(`/api/auth/sessions/${id}`).expect(404);
+    await phone.post('/api/auth/sign-in').send({ email, password: PASSWORD }).expect(200);
+    await agent.delete('/api/auth/sessions').expect(204);
+    await phone.get('/api/auth/me').expect(401);
+    await agent.get('/api/auth/me').expect(200);
+    await other.agent.get('/api/auth/me').expect(200);
+    expect(await app.dataSource.getRepository(Session).countBy({ userId: caller.userId })).toBe(1);
+  });
+
+  it('goes on in another of the person’s teams, and in no other', async () => {
     const { agent, caller } = await signInMember(app, team, ['engineer']);
-    await app.dataSource.getRepository(User).update(caller.userId, { passwordHash: 'another' });
-    await agent.get('/api/auth/me').expect(401);
+    const second = await createTeam(app, { plan: 'free' });
+    const foreign = await createTeam(app);
+    const membership = { userId: caller.userId, teamId: second.id, roles: ['admin' as const] };
+    await app.dataSource.getRepository(Membership).insert(membership);
+    const teams = await agent.get('/api/auth/teams').expect(200);
+    expect(teams.body.items.map(({ id }: { id: string }) => id)).toEqual([
+      String(team.id),
+      String(second.id),
+    ]);
+    const answer = await agent
+      .post('/api/auth/team')
+      .send({ teamId: String(second.id) })
+      .expect(200);
+    expect(answer.body).toMatchObject({ team: { id: String(second.id) }, roles: ['admin'], plan: 'free' });
+    const refused = await agent
+      .post('/api/auth/team')
+      .send({ teamId: String(foreign.id) })
+      .expect(404);
+    expect(refused.body.code).toBe('team.not-found');
+    const me = await agent.get('/api/auth/me').expect(200);
+    expect(me.body).toEqual(answer.body);
   });
 
   it('follows a change of roles at once', async () => {

@@ -1,7 +1,7 @@
-import { Body, Controller, Get, HttpCode, Ip, Post, Res } from '@nestjs/common';
-import { ApiNoContentResponse, ApiOkResponse } from '@nestjs/swagger';
+import { Body, Controller, Get, Headers, HttpCode, Ip, Post, Req, Res } from '@nestjs/common';
+import { ApiNoContentResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import { Throttle } from '@nestjs/throttler';
-import type { Response } from 'express';
+import type { Request, Response } from 'express';
 import { AppConfig } from '../config/app-config.js';
 import { Access } from '../shared/access/access.decorator.js';
 import { Caller } from '../shared/access/caller.decorator.js';
@@ -10,16 +10,17 @@ import { Public } from '../shared/access/public.decorator.js';
 import { AuthService } from './auth.service.js';
 import { SessionResponseDto, toSessionResponse } from './dto/session-response.dto.js';
 import { SignInDto } from './dto/sign-in.dto.js';
-import { clearSessionCookie, setSessionCookie } from './session-cookie.js';
-import { SessionTokenService } from './session-token.service.js';
+import { clearSessionCookie, readSessionCookie, setSessionCookie } from './session-cookie.js';
+import { SessionsService } from './sessions.service.js';
 
 const SIGN_INS_A_MINUTE = 60;
 
+@ApiTags('session')
 @Controller('auth')
 export class AuthController {
   constructor(
     private readonly auth: AuthService,
-    private readonly tokens: SessionTokenService,
+    private readonly sessions: SessionsService,
     private readonly config: AppConfig,
   ) {}
 
@@ -31,10 +32,11 @@ export class AuthController {
   async signIn(
     @Body() credentials: SignInDto,
     @Ip() address: string,
+    @Headers('user-agent') userAgent = '',
     @Res({ passthrough: true }) response: Response,
   ): Promise<SessionResponseDto> {
     const member = await this.auth.signIn(credentials, address);
-    setSessionCookie(response, await this.tokens.issue(member), this.config);
+    setSessionCookie(response, await this.sessions.begin(member, { address, userAgent }), this.config);
     return toSessionResponse(member);
   }
 
@@ -42,8 +44,10 @@ export class AuthController {
   @Post('sign-out')
   @HttpCode(204)
   @ApiNoContentResponse()
-  signOut(@Res({ passthrough: true }) response: Response): void {
+  async signOut(@Req() request: Request, @Res({ passthrough: true }) response: Response): Promise<void> {
     clearSessionCookie(response, this.config);
+    const token = readSessionCookie(request);
+    if (token !== null) await this.sessions.endByToken(token);
   }
 
   @Access('session.own')

@@ -5,8 +5,9 @@ import type { Member } from '../teams/member.js';
 import { TeamsService } from '../teams/teams.service.js';
 import type { Account } from '../users/account.js';
 import { UsersService } from '../users/users.service.js';
+import { signInSubjects } from './attempt-limits.js';
+import { Attempts } from './attempts.service.js';
 import { passwordMatches } from './passwords.js';
-import { SignInAttempts } from './sign-in-attempts.js';
 
 export interface Credentials {
   email: string;
@@ -18,7 +19,7 @@ export class AuthService {
   constructor(
     private readonly users: UsersService,
     private readonly teams: TeamsService,
-    private readonly attempts: SignInAttempts,
+    private readonly attempts: Attempts,
   ) {}
 
   /**
@@ -26,13 +27,12 @@ export class AuthService {
    * failed until it succeeds, so that many at once gain nothing.
    */
   async signIn({ email, password }: Credentials, address: string): Promise<Member> {
-    const key = `${email}|${address}`;
+    const subjects = signInSubjects(email, address);
+    await this.attempts.count(subjects);
     const account = await this.users.findByEmail(email);
-    this.refuseWhileSlowed(key);
-    this.attempts.recordFailure(key);
     if (!(await passwordMatches(password, account?.passwordHash ?? null)))
       throw new DomainError('session.wrong-credentials', 'E-mail address or password is wrong.');
-    this.attempts.recordSuccess(key);
+    await this.attempts.succeed(subjects);
     return this.memberOf(account as Account);
   }
 
@@ -40,14 +40,6 @@ export class AuthService {
     const member = await this.teams.findMember(userId, teamId);
     if (member === null) throw new DomainError('session.missing', 'Sign in first.');
     return member;
-  }
-
-  private refuseWhileSlowed(key: string): void {
-    const retryAfter = this.attempts.waitSeconds(key);
-    if (retryAfter > 0)
-      throw new DomainError('request.too-many', `Too many failures: try again in ${retryAfter} s.`, {
-        retryAfter,
-      });
   }
 
   private async memberOf(account: Account): Promise<Member> {

@@ -1,4 +1,7 @@
 import { AuditEntry } from '../audit/entities/audit-entry.entity.js';
+import { AccountToken } from '../auth/entities/account-token.entity.js';
+import { AttemptCount } from '../auth/entities/attempt-count.entity.js';
+import { Session } from '../auth/entities/session.entity.js';
 import { BillingEvent } from '../billing/entities/billing-event.entity.js';
 import { SavedConditions } from '../conditions/entities/saved-conditions.entity.js';
 import { SavedConditionsPart } from '../conditions/entities/saved-conditions-part.entity.js';
@@ -47,6 +50,9 @@ export const ENTITIES = [
   Import,
   ImportPortion,
   ImportProgress,
+  Session,
+  AccountToken,
+  AttemptCount,
   OutboxMail,
   RefusedMail,
   PriceDigest,

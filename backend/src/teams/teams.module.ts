@@ -3,6 +3,7 @@ import { TypeOrmModule } from '@nestjs/typeorm';
 import { AuditModule } from '../audit/audit.module.js';
 import { MailModule } from '../mail/mail.module.js';
 import { PlansModule } from '../plans/plans.module.js';
+import { Departures } from './departures.service.js';
 import { Membership } from './entities/membership.entity.js';
 import { UsersModule } from '../users/users.module.js';
 import { AcceptanceController } from './invitations/acceptance.controller.js';
@@ -22,6 +23,7 @@ import { TeamsService } from './teams.service.js';
   controllers: [AcceptanceController, InvitationsController, MembersController, TeamController],
   providers: [
     AcceptanceService,
+    Departures,
     InvitationsService,
     MembersService,
     SeatsService,
@@ -29,6 +31,6 @@ import { TeamsService } from './teams.service.js';
     TeamSettingsService,
     TeamsService,
   ],
-  exports: [SeatsService, TeamsService],
+  exports: [Departures, SeatsService, TeamsService],
 })
 export class TeamsModule {}

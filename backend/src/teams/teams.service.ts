@@ -51,6 +51,19 @@ export class TeamsService {
     return memberships.map((membership) => toMember(membership, plan));
   }
 
+  /** All teams of a person, each with the roles that they have there. */
+  async teamsOf(userId: number): Promise<Pick<Member, 'team' | 'roles'>[]> {
+    return this.memberships.find({ where: { userId }, order: { teamId: 'ASC' }, relations: { team: true } });
+  }
+
+  /** Makes a team, on Free, with its first member as admin and owner; answers its id. */
+  async found(manager: EntityManager, name: string, userId: number): Promise<number> {
+    const { identifiers } = await manager.insert(Team, { name, ownerId: userId });
+    const teamId = identifiers[0].id as number;
+    await manager.insert(Membership, { userId, teamId, roles: ['admin'] });
+    return teamId;
+  }
+
   /** Holds the team until the transaction ends, so that what its plan limits is counted by one at a time. */
   async lockTeam(manager: EntityManager, teamId: number): Promise<void> {
     await manager.findOneOrFail(Team, { where: { id: teamId }, lock: { mode: 'pessimistic_write' } });

@@ -4,6 +4,8 @@ import type { EntityManager, Repository } from 'typeorm';
 import { type Account, toAccount } from './account.js';
 import { User } from './entities/user.entity.js';
 
+export type NewAccount = Omit<Account, 'id'>;
+
 @Injectable()
 export class UsersService {
   constructor(@InjectRepository(User) private readonly users: Repository<User>) {}
@@ -13,9 +15,22 @@ export class UsersService {
     return user && toAccount(user);
   }
 
-  /** Makes an account whose address is known to be the person's own; answers its id. */
-  async create(manager: EntityManager, account: Omit<Account, 'id'>): Promise<number> {
+  async get(id: number): Promise<Account> {
+    return toAccount(await this.users.findOneByOrFail({ id }));
+  }
+
+  /** Makes an account whose address is confirmed; answers its id. */
+  async create(manager: EntityManager, account: NewAccount): Promise<number> {
     const { identifiers } = await manager.insert(User, account);
     return identifiers[0].id as number;
+  }
+
+  async change(manager: EntityManager, id: number, changes: Partial<NewAccount>): Promise<void> {
+    await manager.update(User, { id }, changes);
+  }
+
+  /** What the person has made stays. */
+  async remove(manager: EntityManager, id: number): Promise<void> {
+    await manager.delete(User, { id });
   }
 }

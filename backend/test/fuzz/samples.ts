@@ -76,6 +76,22 @@ const offered = {
 export const SAMPLES: Record<string, unknown[]> = {
   'post /api/auth/sign-in': [{ email: 'person@weir.example', password: 'a guess' }],
   'post /api/auth/sign-out': [{}],
+  'post /api/auth/sign-up': [
+    {
+      name: 'Ada Weir',
+      email: 'ada@weir.example',
+      password: 'correct pony battery',
+      teamName: 'Weir & Daughter',
+    },
+  ],
+  'post /api/auth/password-resets': [{ email: 'nobody@weir.example' }],
+  'post /api/auth/confirm': [{ token: 'a-guess' }],
+  'post /api/auth/reset-password': [{ token: 'a-guess', password: 'correct pony battery' }],
+  'post /api/auth/team': [{ teamId: '1' }],
+  'patch /api/account': [{ name: 'Ada Weir' }],
+  'post /api/account/password': [{ currentPassword: 'a guess', newPassword: 'correct pony battery' }],
+  'post /api/account/email': [{ email: 'ada@weir.example', password: 'a guess' }],
+  'post /api/account/close': [{ password: 'a guess' }],
   'post /api/conditions': [{ name: 'River geophone', ...request, partIds: ['1'] }],
   'patch /api/conditions/{id}': [{ version: 1, name: 'Turbidity', ...request, partIds: [] }],
   'put /api/imports/{id}/mapping': [

@@ -2,7 +2,7 @@ import type { Plan, Role } from '@roothertz/common/access';
 import { hash } from 'bcryptjs';
 import supertest from 'supertest';
 import { SESSION_COOKIE } from '../../src/auth/session-cookie.js';
-import { SessionTokenService } from '../../src/auth/session-token.service.js';
+import { SessionsService } from '../../src/auth/sessions.service.js';
 import type { Caller } from '../../src/shared/access/caller.js';
 import { Subscription } from '../../src/plans/entities/subscription.entity.js';
 import { Membership } from '../../src/teams/entities/membership.entity.js';
@@ -58,6 +58,8 @@ export async function signInMember(app: TestApp, team: TestTeam, roles: Role[]):
 async function sessionCookie(app: TestApp, userId: number, teamId: number): Promise<string> {
   const member = await app.nest.get(TeamsService, { strict: false }).findMember(userId, teamId);
   if (member === null) throw new Error('The member was not stored.');
-  const token = await app.nest.get(SessionTokenService, { strict: false }).issue(member);
+  const token = await app.nest
+    .get(SessionsService, { strict: false })
+    .begin(member, { address: '127.0.0.1', userAgent: 'tests' });
   return `${SESSION_COOKIE}=${token}`;
 }

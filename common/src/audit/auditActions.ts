@@ -22,6 +22,7 @@ export const AUDIT_ACTIONS = {
   'conditions.deleted': 'deleted the conditions',
   'plan.trial-started': 'started the trial of',
   'plan.changed': 'changed',
+  'team.founded': 'founded the team',
   'team.renamed': 'renamed the team',
   'team.handed-over': 'handed over the team',
   'member.roles-changed': 'changed the roles of',

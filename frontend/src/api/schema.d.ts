@@ -4,6 +4,86 @@
  */
 
 export interface paths {
+    "/api/account": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch: operations["renameAccount"];
+        trace?: never;
+    };
+    "/api/account/close": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["closeAccount"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/account/closing": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["foreseeClosing"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/account/email": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["changeAddress"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/account/password": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["changePassword"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/audit": {
         parameters: {
             query?: never;
@@ -36,6 +116,38 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/auth/confirm": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["confirmAddress"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/auth/links/{token}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["getAccountLink"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/auth/me": {
         parameters: {
             query?: never;
@@ -47,6 +159,70 @@ export interface paths {
         put?: never;
         post?: never;
         delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/auth/password-resets": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["askForPasswordReset"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/auth/reset-password": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["resetPassword"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/auth/sessions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["listSessions"];
+        put?: never;
+        post?: never;
+        delete: operations["endOtherSessions"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/auth/sessions/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete: operations["endSession"];
         options?: never;
         head?: never;
         patch?: never;
@@ -78,6 +254,54 @@ export interface paths {
         get?: never;
         put?: never;
         post: operations["signOut"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/auth/sign-up": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["signUp"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/auth/team": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["switchTeam"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/auth/teams": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["listOwnTeams"];
+        put?: never;
+        post?: never;
         delete?: never;
         options?: never;
         head?: never;
@@ -1170,7 +1394,7 @@ export interface components {
         };
         AuditEntryResponseDto: {
             /** @enum {string} */
-            action: "offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked";
+            action: "offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.founded" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked";
             /** Format: date-time */
             at: string;
             /** @description null where the account is gone. */
@@ -1242,10 +1466,19 @@ export interface components {
             /** @description Decimal number with four decimals. */
             unitPrice: string;
         };
+        ChangeAddressDto: {
+            /** Format: email */
+            email: string;
+            password: string;
+        };
         ChangeMailPreferenceDto: {
             /** @enum {string} */
             kind: "price-digest" | "part-notice";
             wanted: boolean;
+        };
+        ChangePasswordDto: {
+            currentPassword: string;
+            newPassword: string;
         };
         ChangeRolesDto: {
             roles: ("admin" | "librarian" | "purchasing" | "engineer" | "reviewer")[];
@@ -1266,6 +1499,9 @@ export interface components {
             aboveQuietest: number;
             part: components["schemas"]["PartNameDto"];
             unitPrice: components["schemas"]["PriceDto"];
+        };
+        CloseAccountDto: {
+            password: string;
         };
         ColumnMappingDto: {
             /** @description The column’s place, from 0. */
@@ -1392,6 +1628,16 @@ export interface components {
             /** @description Decimal number: a unit of the currency in the team’s currency. */
             rate: string;
         };
+        DepartureDto: {
+            /** @description Nobody else is in the team: it is closed, and what it has kept. */
+            closes: boolean;
+            /** @description Why the account can’t be closed yet. */
+            obstacle: string | null;
+            team: components["schemas"]["SessionTeamDto"];
+        };
+        DepartureListDto: {
+            items: components["schemas"]["DepartureDto"][];
+        };
         DialectDto: {
             byteOrderMark: boolean;
             /** @enum {string} */
@@ -1409,8 +1655,12 @@ export interface components {
             field: string | null;
             message: string;
         };
+        EmailDto: {
+            /** Format: email */
+            email: string;
+        };
         /** @enum {string} */
-        ErrorCode: "request.invalid" | "billing.event" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "billing.declined" | "access.seats" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "invitation.other-address" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "invitation.not-found" | "member.not-found" | "import.not-found" | "mail.unknown-link" | "invitation.member" | "invitation.duplicate" | "invitation.used" | "invitation.account-exists" | "team.last-admin" | "team.owner" | "part.stale" | "part.duplicate" | "part.in-use" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "billing.trial-used" | "billing.subscribed" | "billing.not-subscribed" | "billing.outdated" | "import.state" | "import.stale" | "import.too-many" | "import.outdated" | "invitation.expired" | "invitation.revoked" | "import.too-large" | "request.too-large" | "request.unsupported" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "team.owner-invalid" | "billing.seats" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "billing.unavailable" | "database.unavailable";
+        ErrorCode: "request.invalid" | "billing.event" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "billing.declined" | "access.seats" | "plan.saved-conditions" | "session.no-team" | "access.origin" | "access.role" | "access.undeclared" | "invitation.other-address" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "invitation.not-found" | "member.not-found" | "import.not-found" | "mail.unknown-link" | "session.not-found" | "team.not-found" | "token.unknown" | "invitation.member" | "invitation.duplicate" | "invitation.used" | "invitation.account-exists" | "account.exists" | "account.needed" | "team.last-admin" | "team.owner" | "part.stale" | "part.duplicate" | "part.in-use" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "billing.trial-used" | "billing.subscribed" | "billing.not-subscribed" | "billing.outdated" | "import.state" | "import.stale" | "import.too-many" | "import.outdated" | "invitation.expired" | "invitation.revoked" | "token.used" | "token.expired" | "import.too-large" | "request.too-large" | "request.unsupported" | "account.invalid" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "team.owner-invalid" | "billing.seats" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "billing.unavailable" | "database.unavailable";
         EvaluateStageDto: {
             amplifier: components["schemas"]["AmplifierDto"];
             conditions: components["schemas"]["OperatingConditionsDto"];
@@ -1631,6 +1881,12 @@ export interface components {
             name: string;
             password: string;
         };
+        LinkResponseDto: {
+            /** @description The address to which the link was sent. */
+            email: string;
+            /** @enum {string} */
+            purpose: "sign-up" | "change-address" | "reset-password";
+        };
         MailPreferenceDto: {
             /** @enum {string} */
             kind: "price-digest" | "part-notice";
@@ -1809,6 +2065,23 @@ export interface components {
             roles: ("admin" | "librarian" | "purchasing" | "engineer" | "reviewer")[];
             team: components["schemas"]["TeamResponseDto"];
         };
+        OpenSessionDto: {
+            /** @description The network address of the sign-in. */
+            address: string;
+            /** Format: date-time */
+            createdAt: string;
+            /** @description Whether the request came by this one. */
+            current: boolean;
+            id: string;
+            /** Format: date-time */
+            lastSeenAt: string;
+            team: components["schemas"]["SessionTeamDto"];
+            /** @description What the browser calls itself. */
+            userAgent: string;
+        };
+        OpenSessionListDto: {
+            items: components["schemas"]["OpenSessionDto"][];
+        };
         OperatingConditionsDto: {
             /** @description Temperature of amplifier and resistors. In K. */
             ambientTemperature?: number;
@@ -1821,6 +2094,14 @@ export interface components {
             referenceFrequency?: number;
             source: components["schemas"]["SourceDto"];
             stage: components["schemas"]["StageDto"];
+        };
+        OwnTeamDto: {
+            id: string;
+            name: string;
+            roles: ("admin" | "librarian" | "purchasing" | "engineer" | "reviewer")[];
+        };
+        OwnTeamListDto: {
+            items: components["schemas"]["OwnTeamDto"][];
         };
         PartFilterDto: {
             approval?: ("approved" | "restricted" | "not-approved")[];
@@ -2186,8 +2467,15 @@ export interface components {
             /** @description Currencies of offers that don’t count for want of a rate. */
             missing: string[];
         };
+        RenameAccountDto: {
+            name: string;
+        };
         RenameTeamDto: {
             name: string;
+        };
+        ResetPasswordDto: {
+            password: string;
+            token: string;
         };
         ResistanceAxisDto: {
             /** @description Resistance in series with the source’s voltage, or across its current in a transimpedance stage. In Ω. */
@@ -2417,6 +2705,13 @@ export interface components {
             email: string;
             password: string;
         };
+        SignUpDto: {
+            /** Format: email */
+            email: string;
+            name: string;
+            password: string;
+            teamName: string;
+        };
         SoughtConditionsDto: {
             /** @description Temperature of amplifier and resistors. In K. */
             ambientTemperature?: number;
@@ -2578,6 +2873,9 @@ export interface components {
             /** @description Lowest total supply voltage, rail to rail. In V. */
             minimum: number;
         };
+        SwitchTeamDto: {
+            teamId: string;
+        };
         TeamMemberDto: {
             email: string;
             id: string;
@@ -2596,6 +2894,9 @@ export interface components {
         TeamResponseDto: {
             id: string;
             name: string;
+        };
+        TokenDto: {
+            token: string;
         };
         UpdateConditionsDto: {
             conditions?: components["schemas"]["OperatingConditionsDto"];
@@ -2711,10 +3012,160 @@ export interface components {
 }
 export type $defs = Record<string, never>;
 export interface operations {
+    renameAccount: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["RenameAccountDto"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    closeAccount: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CloseAccountDto"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    foreseeClosing: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["DepartureListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    changeAddress: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChangeAddressDto"];
+            };
+        };
+        responses: {
+            /** @description The new address is asked for its consent. */
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    changePassword: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChangePasswordDto"];
+            };
+        };
+        responses: {
+            /** @description The other sessions are over. */
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
     listAuditEntries: {
         parameters: {
             query?: {
-                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
+                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.founded" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
                 objectKind?: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
                 objectId?: string;
                 userId?: string;
@@ -2751,7 +3202,7 @@ export interface operations {
     exportAuditEntries: {
         parameters: {
             query?: {
-                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
+                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.founded" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
                 objectKind?: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
                 objectId?: string;
                 userId?: string;
@@ -2783,6 +3234,66 @@ export interface operations {
             };
         };
     };
+    confirmAddress: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["TokenDto"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    getAccountLink: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["LinkResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
     getSession: {
         parameters: {
             query?: never;
@@ -2799,6 +3310,150 @@ export interface operations {
                 content: {
                     "application/json": components["schemas"]["SessionResponseDto"];
                 };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    askForPasswordReset: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["EmailDto"];
+            };
+        };
+        responses: {
+            /** @description Says the same whether or not the address has an account: its mailbox is told. */
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    resetPassword: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ResetPasswordDto"];
+            };
+        };
+        responses: {
+            /** @description All sessions of the account are over. */
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    listSessions: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OpenSessionListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    endOtherSessions: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    endSession: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
             };
             /** @description Problem details (RFC 9457) */
             default: {
@@ -2857,6 +3512,97 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    signUp: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SignUpDto"];
+            };
+        };
+        responses: {
+            /** @description Says the same whether or not the address has an account: its mailbox is told. */
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    switchTeam: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SwitchTeamDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SessionResponseDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    listOwnTeams: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OwnTeamListDto"];
+                };
             };
             /** @description Problem details (RFC 9457) */
             default: {

@@ -20,7 +20,7 @@ class SessionUserDto {
   name: string;
 }
 
-class SessionTeamDto {
+export class SessionTeamDto {
   @ApiProperty()
   id: string;
 

@@ -6,6 +6,7 @@ import { CreateAuditEntries1796083100000 } from './1796083100000-CreateAuditEntr
 import { CreatePrices1796083200000 } from './1796083200000-CreatePrices.js';
 import { CreateImports1796083300000 } from './1796083300000-CreateImports.js';
 import { CreateMail1796090100000 } from './1796090100000-CreateMail.js';
+import { CreateAccounts1796090200000 } from './1796090200000-CreateAccounts.js';
 import { CreateSubscriptions1796090300000 } from './1796090300000-CreateSubscriptions.js';
 import { CreateBillingEvents1796090310000 } from './1796090310000-CreateBillingEvents.js';
 import { AddPriceLists1796090400000 } from './1796090400000-AddPriceLists.js';
@@ -26,6 +27,7 @@ export const MIGRATIONS = [
   CreatePrices1796083200000,
   CreateImports1796083300000,
   CreateMail1796090100000,
+  CreateAccounts1796090200000,
   CreateSubscriptions1796090300000,
   CreateBillingEvents1796090310000,
   AddPriceLists1796090400000,

@@ -2,6 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
 import type { DataSource, EntityManager } from 'typeorm';
 import { AuditService } from '../../audit/audit.service.js';
+import { assertPassword } from '../../auth/password-rules.js';
 import { hashPassword } from '../../auth/passwords.js';
 import type { Caller } from '../../shared/access/caller.js';
 import { DomainError } from '../../shared/errors/domain-error.js';
@@ -48,7 +49,8 @@ export class AcceptanceService {
 
   /** A new account joins. */
   async signUp(token: string, { name, password }: JoinTeamDto): Promise<TeamResponseDto> {
-    await findByToken(this.dataSource.manager, token);
+    const { email: invited } = await findByToken(this.dataSource.manager, token);
+    assertPassword(password, invited, 'password');
     const passwordHash = await hashPassword(password);
     return this.join(token, async (manager, { email }) => {
       const id = await this.users.create(manager, { email, name, passwordHash }).catch(refuseKnown);

@@ -1,0 +1,93 @@
+import { Injectable } from '@nestjs/common';
+import { InjectDataSource } from '@nestjs/typeorm';
+import type { DataSource, EntityManager } from 'typeorm';
+import { AuditService } from '../audit/audit.service.js';
+import { MailQueue } from '../mail/mail-queue.service.js';
+import { DomainError } from '../shared/errors/domain-error.js';
+import { isDuplicateEntry } from '../shared/errors/duplicate-entry.js';
+import { TeamsService } from '../teams/teams.service.js';
+import { UsersService } from '../users/users.service.js';
+import { accountExistsLetter, confirmSignUpLetter } from './account-letters.js';
+import { AccountTokens } from './account-tokens.service.js';
+import { mailSubjects } from './attempt-limits.js';
+import { Attempts } from './attempts.service.js';
+import type { AccountToken } from './entities/account-token.entity.js';
+import { assertPassword } from './password-rules.js';
+import { hashPassword } from './passwords.js';
+import { takingAtLeast } from './taking-at-least.js';
+import type { SignUpDetails } from './token-purposes.js';
+
+export interface SignUp {
+  name: string;
+  email: string;
+  password: string;
+  teamName: string;
+}
+
+const ANSWERED_AFTER_MS = 400;
+
+/**
+ * Makes accounts. Until its address is confirmed a sign-up stands in its link alone, so that nobody can take a name,
+ * a place in a team or somebody's address by it, and each link makes the account that was asked for with it.
+ */
+@Injectable()
+export class SignUpService {
+  constructor(
+    @InjectDataSource() private readonly dataSource: DataSource,
+    private readonly users: UsersService,
+    private readonly teams: TeamsService,
+    private readonly tokens: AccountTokens,
+    private readonly attempts: Attempts,
+    private readonly mail: MailQueue,
+    private readonly audit: AuditService,
+  ) {}
+
+  /** Sends a link to the address; whether there is an account already, only its mailbox learns. */
+  async signUp(asked: SignUp, address: string): Promise<void> {
+    assertPassword(asked.password, asked.email, 'password');
+    await this.attempts.count(mailSubjects(asked.email, address));
+    await takingAtLeast(ANSWERED_AFTER_MS, this.send(asked));
+  }
+
+  /** Makes the account and its own team, of which the person is the admin. */
+  async confirm(manager: EntityManager, { email, details }: AccountToken): Promise<void> {
+    const { name, teamName, passwordHash } = details as SignUpDetails;
+    const userId = await this.users.create(manager, { email, name, passwordHash }).catch(refuseTaken);
+    const teamId = await this.teams.found(manager, teamName, userId);
+    const object = { kind: 'team' as const, id: teamId, label: teamName };
+    const founded = { action: 'team.founded' as const, object, from: null, to: { name: teamName } };
+    await this.audit.record(manager, { teamId, userId }, [founded]);
+  }
+
+  private async send({ email, name, teamName, password }: SignUp): Promise<void> {
+    const passwordHash = await hashPassword(password);
+    const account = await this.users.findByEmail(email);
+    await this.dataSource.transaction(async (manager) => {
+      if (account !== null) {
+        const to = { email, userId: account.id };
+        await this.mail.enqueue(manager, {
+          kind: 'account-exists',
+          to,
+          teamId: null,
+          letter: accountExistsLetter(),
+        });
+        return;
+      }
+      const details = { name, teamName, passwordHash };
+      const token = await this.tokens.issue(manager, { purpose: 'sign-up', userId: null, email, details });
+      const letter = confirmSignUpLetter(name, token);
+      await this.mail.enqueue(manager, {
+        kind: 'confirm-address',
+        to: { email, userId: null },
+        teamId: null,
+        letter,
+      });
+    });
+  }
+}
+
+function refuseTaken(error: unknown): never {
+  if (isDuplicateEntry(error))
+    throw new DomainError('account.exists', 'This address has an account already: sign in.');
+  throw error;
+}
