@@ -61,6 +61,8 @@ describe('two teams', () => {
         .body.id,
     });
     Object.assign(named, {
+      oneId: part.id,
+      otherId: part.id,
       partId: part.id,
       partIds: [part.id],
       supplierId: supplier.id,

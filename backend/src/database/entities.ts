@@ -17,6 +17,7 @@ import { OutboxMail } from '../mail/entities/outbox-mail.entity.js';
 import { RefusedMail } from '../mail/entities/refused-mail.entity.js';
 import { PartWatch } from '../notices/entities/part-watch.entity.js';
 import { PriceDigest } from '../notices/entities/price-digest.entity.js';
+import { KeptPair } from '../parts/entities/kept-pair.entity.js';
 import { ExchangeRate } from '../prices/entities/exchange-rate.entity.js';
 import { Offer } from '../prices/entities/offer.entity.js';
 import { OfferBreak } from '../prices/entities/offer-break.entity.js';
@@ -39,6 +40,7 @@ export const ENTITIES = [
   Part,
   OpAmp,
   Resistor,
+  KeptPair,
   SavedConditions,
   SavedConditionsPart,
   AuditEntry,

@@ -1,16 +1,17 @@
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
-import type { Library as LibraryName, Lifecycle, OpAmpPart } from '@roothertz/common/parts';
+import type { Library as LibraryName, LibraryPart, Lifecycle, OpAmpPart } from '@roothertz/common/parts';
 import { type DataSource, type EntityManager, IsNull } from 'typeorm';
 import type { Caller } from '../shared/access/caller.js';
+import { type IdentifiedPart, toComparedParts } from './compared-parts.js';
 import { Library } from './entities/library.entity.js';
 import { type ListedResistor, toListedResistors } from './listed-resistors.js';
 import { readListedRows } from './listed-rows.js';
 import { type LibraryColumns, toLibraryColumns } from './op-amp-columns.js';
 import { type OpAmpRecord, toPartRecord } from './part-record.js';
 import { selectParts } from './part-select.js';
-import { OP_AMPS, RESISTORS } from './part-tables.js';
 import { findReadableParts, type PartName, toPartName } from './readable-parts.js';
+import { OP_AMPS, type PartTable, RESISTORS } from './part-tables.js';
 
 export interface ReadableLibrary {
   id: number;
@@ -71,6 +72,14 @@ export class LibraryService {
   /** The op-amps of a library that {@link readableLibraries} named, as columns; to be cached by its revision. */
   async loadOpAmpColumns(libraryId: number): Promise<LibraryColumns> {
     return toLibraryColumns(await readListedRows(this.dataSource, OP_AMPS, libraryId));
+  }
+
+  /** The parts of a library that {@link readableLibraries} named, as the search for duplicates takes them. */
+  async loadComparedParts<Kind extends LibraryPart>(
+    table: PartTable<Kind>,
+    { id, library }: ReadableLibrary,
+  ): Promise<IdentifiedPart[]> {
+    return toComparedParts(table, await readListedRows(this.dataSource, table, id), library === 'team');
   }
 
   /** The resistors of a library that {@link readableLibraries} named; to be cached by its revision. */

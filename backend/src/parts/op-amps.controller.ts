@@ -6,9 +6,10 @@ import { Caller } from '../shared/access/caller.decorator.js';
 import { VersionQueryDto } from '../shared/list/version-query.dto.js';
 import { ChangeStandingsDto } from './dto/change-standings.dto.js';
 import { CreateOpAmpDto } from './dto/create-op-amp.dto.js';
+import { ListDuplicatesDto } from './dto/list-duplicates.dto.js';
 import { GapCountsDto } from './dto/gap-counts.dto.js';
 import { ListOpAmpsDto, OpAmpFilterDto } from './dto/list-op-amps.dto.js';
-import { OpAmpListDto, OpAmpResponseDto } from './dto/op-amp-response.dto.js';
+import { OpAmpDuplicateListDto, OpAmpListDto, OpAmpResponseDto } from './dto/op-amp-response.dto.js';
 import { UpdateOpAmpDto } from './dto/update-op-amp.dto.js';
 import { OpAmpsService } from './op-amps.service.js';
 
@@ -46,6 +47,16 @@ export class OpAmpsController {
   @ApiOkResponse({ type: GapCountsDto })
   countOpAmpGaps(@Caller() caller: CallerOfRequest, @Query() filter: OpAmpFilterDto): Promise<GapCountsDto> {
     return this.opAmps.countGaps(caller, filter);
+  }
+
+  @Get('duplicates')
+  @Access('parts.read')
+  @ApiOkResponse({ type: OpAmpDuplicateListDto })
+  listOpAmpDuplicates(
+    @Caller() caller: CallerOfRequest,
+    @Query() page: ListDuplicatesDto,
+  ): Promise<OpAmpDuplicateListDto> {
+    return this.opAmps.listDuplicates(caller, page);
   }
 
   @Get(':id')

@@ -5,13 +5,14 @@ import type { Caller } from '../shared/access/caller.js';
 import type { GapCountsDto } from './dto/gap-counts.dto.js';
 import type { ListOpAmpsDto, OpAmpFilterDto } from './dto/list-op-amps.dto.js';
 import type { OpAmpListDto } from './dto/op-amp-response.dto.js';
+import { DuplicatesService } from './duplicates.service.js';
 import { PartUsesService } from './part-uses.service.js';
 import { PartsService } from './parts.service.js';
 
 @Injectable()
 export class OpAmpsService extends PartsService<OpAmpPart> {
-  constructor(store: OpAmpStore, uses: PartUsesService) {
-    super(store, uses);
+  constructor(store: OpAmpStore, uses: PartUsesService, duplicates: DuplicatesService) {
+    super(store, uses, duplicates);
   }
 
   countGaps(caller: Caller, { inputType, ...filter }: OpAmpFilterDto): Promise<GapCountsDto> {

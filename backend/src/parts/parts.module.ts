@@ -2,6 +2,8 @@ import { Module } from '@nestjs/common';
 import { ConditionsModule } from '../conditions/conditions.module.js';
 import { LibraryModule } from '../library/library.module.js';
 import { TeamsModule } from '../teams/teams.module.js';
+import { DuplicatesController } from './duplicates.controller.js';
+import { DuplicatesService } from './duplicates.service.js';
 import { OpAmpsController } from './op-amps.controller.js';
 import { OpAmpsService } from './op-amps.service.js';
 import { PartUsesController } from './part-uses.controller.js';
@@ -11,7 +13,7 @@ import { ResistorsService } from './resistors.service.js';
 
 @Module({
   imports: [ConditionsModule, LibraryModule, TeamsModule],
-  controllers: [OpAmpsController, ResistorsController, PartUsesController],
-  providers: [PartUsesService, OpAmpsService, ResistorsService],
+  controllers: [OpAmpsController, ResistorsController, PartUsesController, DuplicatesController],
+  providers: [DuplicatesService, PartUsesService, OpAmpsService, ResistorsService],
 })
 export class PartsModule {}

@@ -8,6 +8,9 @@ import { readId } from '../shared/ids/read-id.js';
 import type { List } from '../shared/list/list-response.js';
 import { parseSort } from '../shared/list/sort.js';
 import type { UpdatePartDto } from './dto/update-part.dto.js';
+import type { Duplicate } from './dto/duplicate-response.dto.js';
+import type { ListDuplicatesDto } from './dto/list-duplicates.dto.js';
+import type { DuplicatesService } from './duplicates.service.js';
 import type { PartUsesService } from './part-uses.service.js';
 import { changedPart, newPart } from './part-draft.js';
 
@@ -23,6 +26,7 @@ export class PartsService<Kind extends LibraryPart> {
   constructor(
     protected readonly store: PartStore<Kind>,
     private readonly uses: PartUsesService,
+    private readonly duplicates: DuplicatesService,
   ) {}
 
   async find(caller: Caller, id: string): Promise<Answer<Kind>> {
@@ -51,6 +55,19 @@ export class PartsService<Kind extends LibraryPart> {
     );
   }
 
+  /** The pairs of parts that may be one; in each the team's own comes first. */
+  async listDuplicates(caller: Caller, page: ListDuplicatesDto): Promise<List<Duplicate<Answer<Kind>>>> {
+    const { items: pairs, total } = await this.duplicates.list(caller, this.store.table, page);
+    const ids = [...new Set(pairs.flatMap(({ oneId, otherId }) => [oneId, otherId]))];
+    const found = await this.store.findMany(caller, ids);
+    const items = pairs.flatMap(({ oneId, otherId, reasons, likelihood }) => {
+      const parts = [oneId, otherId].flatMap((id) => found.get(String(id)) ?? []).map(toAnswer<Kind>);
+      const [one, other] = parts.sort((left, right) => rankOf(left) - rankOf(right));
+      return other === undefined ? [] : [{ likelihood, reasons, one, other }];
+    });
+    return { items, total };
+  }
+
   protected async listParts(
     caller: Caller,
     { sort: stated = 'manufacturer', ...query }: Omit<PartQuery, 'sort'> & { sort?: string },
@@ -59,6 +76,10 @@ export class PartsService<Kind extends LibraryPart> {
     const { items, total } = await this.store.list(caller, { ...query, sort });
     return { items: items.map((record) => toAnswer(record)), total };
   }
+}
+
+function rankOf({ library }: { library: Library }): number {
+  return library === 'team' ? 0 : 1;
 }
 
 function toAnswer<Kind extends LibraryPart>(record: PartRecord<Kind>): Answer<Kind> {

@@ -6,9 +6,14 @@ import { Caller } from '../shared/access/caller.decorator.js';
 import { VersionQueryDto } from '../shared/list/version-query.dto.js';
 import { ChangeStandingsDto } from './dto/change-standings.dto.js';
 import { CreateResistorDto } from './dto/create-resistor.dto.js';
+import { ListDuplicatesDto } from './dto/list-duplicates.dto.js';
 import { GapCountsDto } from './dto/gap-counts.dto.js';
 import { ListResistorsDto, ResistorFilterDto } from './dto/list-resistors.dto.js';
-import { ResistorListDto, ResistorResponseDto } from './dto/resistor-response.dto.js';
+import {
+  ResistorDuplicateListDto,
+  ResistorListDto,
+  ResistorResponseDto,
+} from './dto/resistor-response.dto.js';
 import { UpdateResistorDto } from './dto/update-resistor.dto.js';
 import { ResistorsService } from './resistors.service.js';
 
@@ -55,6 +60,16 @@ export class ResistorsController {
     @Query() filter: ResistorFilterDto,
   ): Promise<GapCountsDto> {
     return this.resistors.countGaps(caller, filter);
+  }
+
+  @Get('duplicates')
+  @Access('parts.read')
+  @ApiOkResponse({ type: ResistorDuplicateListDto })
+  listResistorDuplicates(
+    @Caller() caller: CallerOfRequest,
+    @Query() page: ListDuplicatesDto,
+  ): Promise<ResistorDuplicateListDto> {
+    return this.resistors.listDuplicates(caller, page);
   }
 
   @Get(':id')

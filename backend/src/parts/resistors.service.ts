@@ -6,13 +6,14 @@ import type { Caller } from '../shared/access/caller.js';
 import type { GapCountsDto } from './dto/gap-counts.dto.js';
 import type { ListResistorsDto, ResistorFilterDto } from './dto/list-resistors.dto.js';
 import type { ResistorListDto } from './dto/resistor-response.dto.js';
+import { DuplicatesService } from './duplicates.service.js';
 import { PartUsesService } from './part-uses.service.js';
 import { PartsService } from './parts.service.js';
 
 @Injectable()
 export class ResistorsService extends PartsService<ResistorPart> {
-  constructor(store: ResistorStore, uses: PartUsesService) {
-    super(store, uses);
+  constructor(store: ResistorStore, uses: PartUsesService, duplicates: DuplicatesService) {
+    super(store, uses, duplicates);
   }
 
   list(caller: Caller, { limit, offset, sort, missing, ...dto }: ListResistorsDto): Promise<ResistorListDto> {

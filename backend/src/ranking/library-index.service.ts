@@ -4,7 +4,7 @@ import { LibraryService, type ReadableLibrary } from '../library/library.service
 import type { ListedResistor } from '../library/listed-resistors.js';
 import type { LibraryColumns } from '../library/op-amp-columns.js';
 import type { Caller } from '../shared/access/caller.js';
-import { RevisionCache } from './revision-cache.js';
+import { RevisionCache } from '../library/revision-cache.js';
 
 /** A library's op-amps as the ranking takes them, at the revision that the database has. */
 export interface IndexedLibrary extends ReadableLibrary, LibraryColumns {}

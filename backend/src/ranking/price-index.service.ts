@@ -2,7 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { type PriceBook, QuantityPrices } from '../prices/price-book.js';
 import { PriceBookService, type PricedTeam } from '../prices/price-book.service.js';
 import type { Caller } from '../shared/access/caller.js';
-import { RevisionCache } from './revision-cache.js';
+import { RevisionCache } from '../library/revision-cache.js';
 
 /** Keeps the teams' prices in memory, each at the revision that the database has. */
 @Injectable()

@@ -118,6 +118,8 @@ export const SAMPLES: Record<string, unknown[]> = {
   'post /api/imports/{id}/undo': [{}],
   'post /api/op-amps': [opAmp],
   'patch /api/op-amps/{id}': [{ version: 1, partNumber: 'AA102', amplifier: { voltageNoise: 2e-9 } }],
+  'post /api/duplicates/keep-both': [{ oneId: '1', otherId: '2' }],
+  'post /api/duplicates/ask-again': [{ oneId: '1', otherId: '2' }],
   'patch /api/op-amps': [{ parts: [{ id: '1', version: 1, lifecycle: 'obsolete', approval: 'restricted' }] }],
   'patch /api/resistors': [{ parts: [{ id: '2', version: 1, approval: 'not-approved' }] }],
   'post /api/resistors': [resistor],

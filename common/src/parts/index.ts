@@ -12,6 +12,7 @@ export * from './part.js';
 export * from './retirement.js';
 export * from './partCatalogue.js';
 export * from './completeness.js';
+export * from './duplicates/index.js';
 export * from './partColumns.js';
 export * from './figureCell.js';
 export * from './partCell.js';

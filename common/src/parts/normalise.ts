@@ -32,7 +32,8 @@ export function normalisePartKey(manufacturer: string, partNumber: string): stri
   return `${normaliseMaker(manufacturer)}|${lettersAndDigits(partNumber)}`;
 }
 
-function normaliseMaker(manufacturer: string): string {
+/** A maker's name without case, marks and the suffixes of its company form: "ACME  corp." → `acme`. */
+export function normaliseMaker(manufacturer: string): string {
   const words = foldCase(manufacturer)
     .replace(/\./g, '')
     .split(/[^\p{L}\p{N}\p{M}]+/u)
@@ -41,7 +42,8 @@ function normaliseMaker(manufacturer: string): string {
   return words.join('') || foldCase(manufacturer).trim();
 }
 
-function lettersAndDigits(text: string): string {
+/** A text's letters and digits without case; a text that has none stands as it is. */
+export function lettersAndDigits(text: string): string {
   const folded = foldCase(text);
   return folded.replace(/[^\p{L}\p{N}\p{M}]/gu, '') || folded.trim();
 }

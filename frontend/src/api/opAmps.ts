@@ -12,6 +12,7 @@ export const OP_AMPS_API: PartsApi<OpAmpPart, OpAmp> = {
   create: (part) => answer(client.POST('/api/op-amps', { body: part })),
   update: (id, version, part) =>
     answer(client.PATCH('/api/op-amps/{id}', { params: { path: { id } }, body: { ...part, version } })),
+  duplicates: (query, signal) => answer(client.GET('/api/op-amps/duplicates', { params: { query }, signal })),
   gapCounts: (query, signal) =>
     answer(client.GET('/api/op-amps/completeness', { params: { query: ownQuery(query) }, signal })),
   changeStandings: (parts) => answer(client.PATCH('/api/op-amps', { body: { parts } })),

@@ -1,6 +1,7 @@
 import { keepPreviousData, queryOptions } from '@tanstack/react-query';
 import type {
   Approval,
+  DuplicateReason,
   InputType,
   Library,
   LibraryPart,
@@ -46,12 +47,26 @@ export interface StandingChange extends Partial<Standing> {
   version: number;
 }
 
+interface Page {
+  limit: number;
+  offset: number;
+}
+
+/** Two parts that may be one, the team's own first. */
+export interface Duplicate<Stored extends StoredPart = StoredPart> {
+  likelihood: number;
+  reasons: DuplicateReason[];
+  one: Stored;
+  other: Stored;
+}
+
 /** The calls that read and change parts of a kind. */
 export interface PartsReader<Stored extends StoredPart = StoredPart> {
   /** As the server calls them: `op-amps`. */
   name: string;
   list: (query: PartListQuery, signal: AbortSignal) => Promise<{ items: Stored[]; total: number }>;
   find: (id: string, signal: AbortSignal) => Promise<Stored>;
+  duplicates: (page: Page, signal: AbortSignal) => Promise<{ items: Duplicate<Stored>[]; total: number }>;
   gapCounts: (query: PartListQuery, signal: AbortSignal) => Promise<GapCounts>;
   /** All of them or none; the answer holds them in the same order. */
   changeStandings: (changes: StandingChange[]) => Promise<{ items: Stored[] }>;
@@ -76,6 +91,25 @@ export function gapCountsQuery(reader: PartsReader, query: PartListQuery) {
 }
 
 export type PartUses = components['schemas']['PartUsesDto'];
+
+export function duplicatesQuery(reader: PartsReader, page: Page) {
+  return queryOptions({
+    queryKey: [reader.name, 'duplicates', page],
+    queryFn: ({ signal }) => reader.duplicates(page, signal),
+    placeholderData: keepPreviousData,
+  });
+}
+
+type PartPair = components['schemas']['PartPairDto'];
+
+/** Two parts that look like one are kept both. */
+export function keepBoth(pair: PartPair) {
+  return answer(client.POST('/api/duplicates/keep-both', { body: pair }));
+}
+
+export function askAgain(pair: PartPair) {
+  return answer(client.POST('/api/duplicates/ask-again', { body: pair }));
+}
 
 /** Where a part has been chosen. */
 export function partUsesQuery(id: string) {

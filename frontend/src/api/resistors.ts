@@ -13,6 +13,8 @@ export const RESISTORS_API: PartsApi<ResistorPart, StoredResistor> = {
   create: (part) => answer(client.POST('/api/resistors', { body: part })),
   update: (id, version, part) =>
     answer(client.PATCH('/api/resistors/{id}', { params: { path: { id } }, body: { ...part, version } })),
+  duplicates: (query, signal) =>
+    answer(client.GET('/api/resistors/duplicates', { params: { query }, signal })),
   gapCounts: (query, signal) =>
     answer(client.GET('/api/resistors/completeness', { params: { query: ownQuery(query) }, signal })),
   changeStandings: (parts) => answer(client.PATCH('/api/resistors', { body: { parts } })),

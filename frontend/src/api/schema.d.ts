@@ -468,6 +468,38 @@ export interface paths {
         patch: operations["updateConditions"];
         trace?: never;
     };
+    "/api/duplicates/ask-again": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["askAgainAboutParts"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/duplicates/keep-both": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["keepBothParts"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/health": {
         parameters: {
             query?: never;
@@ -836,6 +868,22 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/op-amps/duplicates": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["listOpAmpDuplicates"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/op-amps/{id}": {
         parameters: {
             query?: never;
@@ -1084,6 +1132,22 @@ export interface paths {
             cookie?: never;
         };
         get: operations["countResistorGaps"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/resistors/duplicates": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["listResistorDuplicates"];
         put?: never;
         post?: never;
         delete?: never;
@@ -2031,6 +2095,19 @@ export interface components {
             manufacturer: string;
             partNumber: string;
         };
+        OpAmpDuplicateDto: {
+            /** @description From 0 to 1. */
+            likelihood: number;
+            /** @description One of the team’s own. */
+            one: components["schemas"]["OpAmpResponseDto"];
+            other: components["schemas"]["OpAmpResponseDto"];
+            reasons: ("same-part" | "same-number" | "look-alike" | "suffix" | "same-figures")[];
+        };
+        OpAmpDuplicateListDto: {
+            items: components["schemas"]["OpAmpDuplicateDto"][];
+            /** @description How many there are in all, whatever the page holds. */
+            total: number;
+        };
         OpAmpListDto: {
             items: components["schemas"]["OpAmpResponseDto"][];
             /** @description How many there are in all, whatever the page holds. */
@@ -2131,6 +2208,10 @@ export interface components {
             current: components["schemas"]["OfferResponseDto"][];
             /** @description The closed ones, the latest first. */
             history: components["schemas"]["OfferResponseDto"][];
+        };
+        PartPairDto: {
+            oneId: string;
+            otherId: string;
         };
         PartUsesDto: {
             /** @description Saved conditions at which it was chosen. */
@@ -2527,6 +2608,19 @@ export interface components {
             temperatureRise?: number | null;
             /** @description How far a new part may lie from its nominal value. */
             tolerance?: number | null;
+        };
+        ResistorDuplicateDto: {
+            /** @description From 0 to 1. */
+            likelihood: number;
+            /** @description One of the team’s own. */
+            one: components["schemas"]["ResistorResponseDto"];
+            other: components["schemas"]["ResistorResponseDto"];
+            reasons: ("same-part" | "same-number" | "look-alike" | "suffix" | "same-figures")[];
+        };
+        ResistorDuplicateListDto: {
+            items: components["schemas"]["ResistorDuplicateDto"][];
+            /** @description How many there are in all, whatever the page holds. */
+            total: number;
         };
         ResistorExclusionCountDto: {
             count: number;
@@ -4010,6 +4104,66 @@ export interface operations {
             };
         };
     };
+    askAgainAboutParts: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PartPairDto"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    keepBothParts: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PartPairDto"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
     getHealth: {
         parameters: {
             query?: never;
@@ -4960,6 +5114,37 @@ export interface operations {
             };
         };
     };
+    listOpAmpDuplicates: {
+        parameters: {
+            query?: {
+                limit?: number;
+                offset?: number;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OpAmpDuplicateListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
     getOpAmp: {
         parameters: {
             query?: never;
@@ -5692,6 +5877,37 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["GapCountsDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    listResistorDuplicates: {
+        parameters: {
+            query?: {
+                limit?: number;
+                offset?: number;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ResistorDuplicateListDto"];
                 };
             };
             /** @description Problem details (RFC 9457) */

@@ -10,6 +10,7 @@ import { CreateAccounts1796090200000 } from './1796090200000-CreateAccounts.js';
 import { CreateSubscriptions1796090300000 } from './1796090300000-CreateSubscriptions.js';
 import { CreateBillingEvents1796090310000 } from './1796090310000-CreateBillingEvents.js';
 import { AddPriceLists1796090400000 } from './1796090400000-AddPriceLists.js';
+import { CreateKeptPairs1796090500000 } from './1796090500000-CreateKeptPairs.js';
 import { NameAuditObjects1796090600000 } from './1796090600000-NameAuditObjects.js';
 import { AddTeamOwners1796090600100 } from './1796090600100-AddTeamOwners.js';
 import { CreateInvitations1796090600200 } from './1796090600200-CreateInvitations.js';
@@ -31,6 +32,7 @@ export const MIGRATIONS = [
   CreateSubscriptions1796090300000,
   CreateBillingEvents1796090310000,
   AddPriceLists1796090400000,
+  CreateKeptPairs1796090500000,
   NameAuditObjects1796090600000,
   AddTeamOwners1796090600100,
   CreateInvitations1796090600200,

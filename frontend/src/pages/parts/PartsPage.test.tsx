@@ -168,6 +168,52 @@ describe('the completeness of the parts', () => {
   });
 });
 
+describe('parts that may be one', () => {
+  const PAIR = {
+    likelihood: 0.85,
+    reasons: ['look-alike'],
+    one: opAmp({ partNumber: 'VR-1108', package: 'SOIC-8' }),
+    other: opAmp({ id: '42', partNumber: 'VR-11O8', package: 'DIP-8', version: 5 }),
+  };
+
+  function open() {
+    const asked = fakeServer({
+      ...SESSION,
+      'GET /api/op-amps/duplicates': listed([PAIR]),
+      'POST /api/duplicates/keep-both': () => new Response(null, { status: 204 }),
+      'PATCH /api/op-amps': () => json({ items: [{ ...PAIR.other, version: 6 }], total: 1 }),
+    });
+    renderApp('/parts/duplicates');
+    return asked;
+  }
+
+  it('stand side by side with what differs', async () => {
+    open();
+    expect(await screen.findByText('1 pair of parts that may be one')).toBeInTheDocument();
+    const pair = screen.getByRole('article', { name: 'VR-1108 and VR-11O8' });
+    expect(pair).toHaveTextContent('likely one part: part numbers that read alike');
+    const rows = within(pair)
+      .getAllByRole('row')
+      .map((row) => row.textContent);
+    expect(rows.slice(1)).toEqual(['part numberVR-1108VR-11O8', 'packageSOIC-8DIP-8']);
+  });
+
+  it('are kept both, or one of them is retired', async () => {
+    const asked = open();
+    await userEvent.click(await screen.findByRole('button', { name: 'Keep both' }));
+    expect(await screen.findByText('VR-1108 and VR-11O8 are both kept')).toBeInTheDocument();
+    expect(asked.find(({ route }) => route === 'POST /api/duplicates/keep-both')!.body).toEqual({
+      oneId: '41',
+      otherId: '42',
+    });
+    await userEvent.click(screen.getByRole('button', { name: 'Retire VR-11O8' }));
+    expect(await screen.findByText('VR-11O8 is retired')).toBeInTheDocument();
+    expect(asked.find(({ route }) => route === 'PATCH /api/op-amps')!.body).toEqual({
+      parts: [{ id: '42', version: 5, lifecycle: 'obsolete', approval: 'not-approved' }],
+    });
+  });
+});
+
 describe('the chosen parts', () => {
   const CURATED = opAmp({ id: '43', partNumber: 'KM-21', library: 'curated' });
   const PARTS = [opAmp(), opAmp({ id: '42', partNumber: 'VR-1109', version: 5 }), CURATED];

@@ -20,6 +20,10 @@ function routesOf(path: string, loadKind: Load<KindOfPart>, loadPage: Load<Compo
       path: `${path}/completeness`,
       lazy: pageOf(loadKind, async () => (await import('./CompletenessPage')).CompletenessPage),
     },
+    {
+      path: `${path}/duplicates`,
+      lazy: pageOf(loadKind, async () => (await import('./DuplicatesPage')).DuplicatesPage),
+    },
     { path: `${path}/new`, lazy: pageOf(loadKind, async () => (await import('./NewPartPage')).NewPartPage) },
     { path: `${path}/:id`, lazy: async () => ({ Component: await loadPage() }) },
     {

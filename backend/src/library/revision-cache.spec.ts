@@ -1,4 +1,4 @@
-import type { ReadableLibrary } from '../library/library.service.js';
+import type { ReadableLibrary } from './library.service.js';
 import { RevisionCache } from './revision-cache.js';
 
 const library = (id: number, revision = 1): ReadableLibrary => ({ id, revision, library: 'team' });

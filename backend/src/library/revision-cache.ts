@@ -1,13 +1,13 @@
-import type { ReadableLibrary } from '../library/library.service.js';
+import type { ReadableLibrary } from './library.service.js';
 
 /** What changes its revision with each change of its content. */
 interface Revised {
   id: number;
-  revision: number;
+  revision: number | string;
 }
 
 interface Entry<Content> {
-  revision: number;
+  revision: number | string;
   content: Promise<Content>;
 }
 

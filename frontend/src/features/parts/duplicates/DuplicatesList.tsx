@@ -1,0 +1,36 @@
+import { Pagination } from 'antd';
+import type { Duplicate } from '../../../api/parts';
+import { grouped } from '../countOf';
+import type { KindOfPart } from '../kindOfPart';
+import { DuplicatePair } from './DuplicatePair';
+
+interface DuplicatesListProps {
+  kind: KindOfPart;
+  pairs: readonly Duplicate[];
+  total: number;
+  page: number;
+  pageSize: number;
+  onPage: (page: number) => void;
+}
+
+/** The pairs of a page. */
+export function DuplicatesList({ kind, pairs, total, page, pageSize, onPage }: DuplicatesListProps) {
+  return (
+    <>
+      {pairs.map((pair) => (
+        <DuplicatePair key={`${pair.one.id} ${pair.other.id}`} kind={kind} pair={pair} />
+      ))}
+      {total > pageSize && (
+        <Pagination
+          size="small"
+          current={page}
+          pageSize={pageSize}
+          total={total}
+          showSizeChanger={false}
+          showTotal={(all, [from, to]) => `${grouped(from)}–${grouped(to)} of ${grouped(all)}`}
+          onChange={onPage}
+        />
+      )}
+    </>
+  );
+}
