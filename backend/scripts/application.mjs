@@ -9,6 +9,11 @@ import { whenEnding } from './supervision.mjs';
 const MAIN = inRoot('backend', 'dist', 'main.js');
 const PREPARE = inRoot('backend', 'dist', 'database', 'prepare.js');
 const HEALTHY_WITHIN = 120_000;
+/**
+ * In MiB. Where its heap may take gigabytes, V8 lets it grow fourfold before it collects; and what waits for the
+ * database outlives a small young space though it is soon garbage.
+ */
+const HEAP = ['--max-old-space-size=1536', '--max-semi-space-size=32'];
 
 export function readAddress({ HOST = '127.0.0.1', PORT = '3000' }) {
   const port = Number(PORT);
@@ -51,7 +56,7 @@ export function prepareDatabase(environment) {
  */
 export async function serve(address, { DB_OWNER_USER, DB_OWNER_PASSWORD, ...environment }) {
   const env = { ...environment, HOST: address.host, PORT: String(address.port) };
-  const { child, ended } = launch(process.execPath, [MAIN], { cwd: inRoot(), env });
+  const { child, ended } = launch(process.execPath, [...HEAP, MAIN], { cwd: inRoot(), env });
   const record = `application-${address.port}`;
   remember(record, { pid: child.pid, mark: MAIN });
   whenEnding(async () => {

@@ -11,6 +11,7 @@ import {
   uploadList,
 } from './factories/imports.js';
 import type { Response } from 'superagent';
+import { saveConditions } from './factories/conditions.js';
 import { createOpAmp } from './factories/op-amps.js';
 import { createTeam, signInMember, startTestApp, type TestApp, type TestMember } from './support/index.js';
 import { Part } from '../src/library/entities/part.entity.js';
@@ -152,6 +153,7 @@ describe('imports', () => {
       amplifier: { voltageNoise: 1e-9 },
     });
     const edited = await createOpAmp(librarian, { partNumber: 'E-1', amplifier: { voltageNoise: 2e-9 } });
+    await saveConditions(librarian, { name: 'River geophone', partIds: [edited.id] });
     const before = (await librarian.agent.get(`/api/op-amps/${changed.id}`)).body;
     const list =
       'maker,mpn,en [nV/√Hz],remark\nKestrel Analog,C-1,1.5,After\nKestrel-Analog Inc.,E1,3,\nKestrel Analog,N-1,4,\nKestrel Analog,N-2,4,\n';
@@ -166,7 +168,21 @@ describe('imports', () => {
           { field: 'amplifier.voltageNoise', old: 1e-9, new: 1.5e-9 },
         ],
       },
-      { line: 3, partNumber: 'E1' },
+      {
+        line: 3,
+        partNumber: 'E1',
+        doubts: [{ code: 'in-use', message: 'used in the saved conditions “River geophone”' }],
+      },
+    ]);
+    expect(await rowsOf(librarian, done, 'state=new')).toMatchObject([
+      {
+        partNumber: 'N-1',
+        changes: expect.arrayContaining([
+          { field: 'manufacturer', old: null, new: 'Kestrel Analog' },
+          { field: 'amplifier.voltageNoise', old: null, new: 4e-9 },
+        ]),
+      },
+      { partNumber: 'N-2' },
     ]);
     const { body: now } = await librarian.agent.get(`/api/op-amps/${edited.id}`).expect(200);
     expect(now).toMatchObject({
@@ -178,20 +194,24 @@ describe('imports', () => {
       .patch(`/api/op-amps/${edited.id}`)
       .send({ version: 2, package: 'DIP-8' })
       .expect(200);
+    const chosen = (await opAmps()).find(({ partNumber }: { partNumber: string }) => partNumber === 'N-2');
+    await saveConditions(librarian, { name: 'Hydrophone', partIds: [chosen.id] });
     await librarian.agent.post(`/api/imports/${done.id}/undo`).expect(202);
     expect(await ended(librarian, done)).toMatchObject({
       state: 'undone',
-      keptCount: 1,
+      keptCount: 2,
       undoneBy: expect.any(Object),
     });
     expect(await rowsOf(librarian, done, 'state=kept')).toMatchObject([
       { line: 3, partNumber: 'E1', kept: true },
+      { line: 5, partNumber: 'N-2', kept: true },
     ]);
     const after = (await librarian.agent.get(`/api/op-amps/${changed.id}`)).body;
     expect(after).toEqual({ ...before, version: 3, updatedAt: expect.any(String) });
     expect((await opAmps()).map(({ partNumber }: { partNumber: string }) => partNumber).sort()).toEqual([
       'C-1',
       'E1',
+      'N-2',
     ]);
     await librarian.agent.post(`/api/imports/${done.id}/undo`).expect(409);
     await librarian.agent.post(`/api/imports/${done.id}/apply`).expect(409);

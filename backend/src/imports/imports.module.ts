@@ -1,5 +1,6 @@
 import { Module } from '@nestjs/common';
 import { AuditModule } from '../audit/audit.module.js';
+import { ConditionsModule } from '../conditions/conditions.module.js';
 import { LibraryModule } from '../library/library.module.js';
 import { PricesModule } from '../prices/prices.module.js';
 import { ApplyImport } from './apply/apply-import.service.js';
@@ -20,7 +21,7 @@ import { UndoPriceList } from './prices/undo-price-list.service.js';
 import { UploadsService } from './uploads.service.js';
 
 @Module({
-  imports: [AuditModule, LibraryModule, PricesModule],
+  imports: [AuditModule, ConditionsModule, LibraryModule, PricesModule],
   controllers: [ImportsController, PartExportsController],
   providers: [
     ApplyImport,

@@ -28,6 +28,7 @@ export const DOUBT_CODES = [
   'repeated',
   'price-slip',
   'new-supplier',
+  'in-use',
 ] as const;
 export type DoubtCode = (typeof DOUBT_CODES)[number];
 

@@ -83,7 +83,7 @@ async function untouchedRows(
   rows: readonly AcceptedRow[],
 ): Promise<Untouched[]> {
   const current = await currentParts(runner, libraryId, keysOf(rows));
-  const inUse = await partsWithOffers(
+  const inUse = await partsInUse(
     runner,
     rows.flatMap(({ partId, normalisedKey }) =>
       partId === undefined ? (current.get(normalisedKey)?.id ?? []) : [],
@@ -97,12 +97,13 @@ async function untouchedRows(
   });
 }
 
-/** An offer on a new part would go with it. */
-async function partsWithOffers(runner: QueryRunner, ids: readonly number[]): Promise<Set<number>> {
+/** What was offered or chosen of a new part would go with it. */
+async function partsInUse(runner: QueryRunner, ids: readonly number[]): Promise<Set<number>> {
   if (ids.length === 0) return new Set();
   const rows: { id: number }[] = await runner.query(
-    'SELECT DISTINCT part_id AS id FROM offers WHERE part_id IN (?)',
-    [ids],
+    `SELECT part_id AS id FROM offers WHERE part_id IN (?)
+     UNION SELECT part_id FROM saved_conditions_parts WHERE part_id IN (?)`,
+    [ids, ids],
   );
   return new Set(rows.map(({ id }) => id));
 }

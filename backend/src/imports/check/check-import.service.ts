@@ -1,6 +1,7 @@
 import type { LibraryPart } from '@roothertz/common/parts';
 import { Injectable } from '@nestjs/common';
 import type { QueryRunner } from 'typeorm';
+import { ConditionsService } from '../../conditions/conditions.service.js';
 import { findPartsByKeys, type FoundPart, knownKeys } from '../../library/bulk-parts.js';
 import { LibraryService, type ReadableLibrary } from '../../library/library.service.js';
 import type { PartTable } from '../../library/part-tables.js';
@@ -26,24 +27,27 @@ export class CheckImport {
     private readonly files: ImportFiles,
     private readonly jobs: ImportJobs,
     private readonly libraries: LibraryService,
+    private readonly conditions: ConditionsService,
   ) {}
 
   async start(caller: Caller, entity: Import): Promise<{ done: Promise<void> }> {
     const ownLibraryId = await this.libraries.editableLibrary(caller);
     const libraries = await this.libraries.readableLibraries(caller);
     const beginning = { from: MAPPABLE_STATES, to: 'checking' as const, total: entity.rowCount };
-    return this.jobs.start(entity.id, beginning, (job) => this.check(job, libraries, ownLibraryId));
+    return this.jobs.start(entity.id, beginning, (job) => this.check(job, caller, libraries, ownLibraryId));
   }
 
   private async check(
     job: ImportJob,
+    caller: Caller,
     libraries: readonly ReadableLibrary[],
     ownLibraryId: number,
   ): Promise<void> {
     const { runner, importId: id } = job;
     const entity = await runner.manager.findOneByOrFail(Import, { id });
     const table = tableOf(entity.kind);
-    const checker = new RowChecker(table.catalogue, entity, ownLibraryId);
+    const uses = await this.conditions.partsInUse(caller, runner.manager);
+    const checker = new RowChecker(table.catalogue, entity, ownLibraryId, uses);
     const counts = noRows();
     let [position, portion] = [0, 1];
     let writing = Promise.resolve();

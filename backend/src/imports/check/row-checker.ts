@@ -9,6 +9,7 @@ import { type LibraryPart, normalisePartKey, type PartCatalogue } from '@roother
 import type { FoundPart } from '../../library/bulk-parts.js';
 import type { Import } from '../entities/import.entity.js';
 import type { CsvRecord } from '../file/csv-records.js';
+import { type PartUses, useRemark } from './use-remark.js';
 
 type Reading = ReturnType<ImportRowReader['read']>;
 
@@ -43,6 +44,7 @@ export class RowChecker {
     catalogue: PartCatalogue<LibraryPart>,
     { mapping, dialect }: Pick<Import, 'mapping' | 'dialect'>,
     private readonly ownLibraryId: number,
+    private readonly uses: PartUses,
   ) {
     this.reader = importRowReader(catalogue, mapping ?? [], dialect.decimalMark);
     this.judge = rowJudge(catalogue, this.reader);
@@ -64,7 +66,16 @@ export class RowChecker {
     if (before !== undefined) return this.checkAgain(record, reading, key!, before, written, existing);
     const verdict = this.judge(reading, { existing: existing?.part ?? null, curated });
     if (key !== null && verdict.state !== 'refused') this.seen.set(key, { line: record.line, written });
-    return { record, key, verdict, existing };
+    return { record, key, verdict: this.remarked(verdict, existing), existing };
+  }
+
+  private remarked(
+    verdict: RowVerdict<LibraryPart>,
+    existing: FoundPart<LibraryPart> | null,
+  ): RowVerdict<LibraryPart> {
+    if (existing === null || verdict.state === 'refused' || verdict.state === 'unchanged') return verdict;
+    const remark = useRemark(this.uses, existing.id);
+    return remark.length === 0 ? verdict : { ...verdict, doubts: [...verdict.doubts, ...remark] };
   }
 
   /** The part stands in the file before. */

@@ -1,6 +1,6 @@
 import { createReadStream } from 'node:fs';
 import { pipeline } from 'node:stream';
-import { CsvError, type Options, parse } from 'csv-parse';
+import { CsvError, type Options, parse, type Parser } from 'csv-parse';
 import iconv from 'iconv-lite';
 import { DomainError } from '../../shared/errors/domain-error.js';
 import { type Delimiter, DELIMITER_CHARACTERS } from '../../shared/csv/csv-format.js';
@@ -21,7 +21,6 @@ export interface ParsedRecord {
 const LONGEST_RECORD = 300_000;
 /** In characters, so that a portion of long rows goes to the database in one piece. */
 const LARGEST_PORTION = 300_000;
-const COUNTED_AT_ONCE = 5000;
 const LINE_BREAK = /\r\n|\n|\r/g;
 
 /** How csv-parse is to read a list: as it comes, with rows of any length and quotes within cells. */
@@ -42,16 +41,17 @@ export function parserOptions(delimiter: Delimiter): Options {
 async function* readRecords(path: string, dialect: Dialect, portion: number): AsyncGenerator<CsvRecord[]> {
   let records: CsvRecord[] = [];
   let size = 0;
-  for await (const parsed of parsedFile<ParsedRecord>(path, dialect, true)) {
-    const record = toRecord(parsed);
-    if (record.line < dialect.headerLine) continue;
-    records.push(record);
-    for (const cell of record.cells) size += cell.length;
-    if (records.length < portion && size < LARGEST_PORTION) continue;
-    yield records;
-    records = [];
-    size = 0;
-  }
+  for await (const parsed of parsedFile<ParsedRecord>(path, dialect, true))
+    for (const one of parsed) {
+      const record = toRecord(one);
+      if (record.line < dialect.headerLine) continue;
+      records.push(record);
+      for (const cell of record.cells) size += cell.length;
+      if (records.length < portion && size < LARGEST_PORTION) continue;
+      yield records;
+      records = [];
+      size = 0;
+    }
   if (records.length > 0) yield records;
 }
 
@@ -69,27 +69,24 @@ export async function* readRows(
   }
 }
 
-/** Counts the rows of a file, those above the headings among them. */
+/** Counts the rows of a file, those above the headings among them, some after some. */
 export async function* countRecords(path: string, dialect: Dialect): AsyncGenerator<number> {
-  const rows = parsedFile<string[]>(path, dialect, false);
-  let count = 0;
-  while (!(await rows.next()).done) {
-    count += 1;
-    if (count < COUNTED_AT_ONCE) continue;
-    yield count;
-    count = 0;
-  }
-  yield count;
+  for await (const rows of parsedFile<string[]>(path, dialect, false)) yield rows.length;
 }
 
-async function* parsedFile<Parsed>(path: string, dialect: Dialect, info: boolean): AsyncGenerator<Parsed> {
+/** The rows of a file, as many at once as the parser has made of a piece of it. */
+async function* parsedFile<Parsed>(path: string, dialect: Dialect, info: boolean): AsyncGenerator<Parsed[]> {
   const parser = parse({ ...parserOptions(dialect.delimiter), info });
   pipeline(createReadStream(path), iconv.decodeStream(dialect.encoding), parser, () => {});
   try {
-    yield* parser as AsyncIterable<Parsed>;
+    for await (const first of parser as AsyncIterable<Parsed>) yield [first, ...readyRecords<Parsed>(parser)];
   } catch (error) {
     throw toUnreadable(error);
   }
+}
+
+function* readyRecords<Parsed>(parser: Parser): Generator<Parsed> {
+  for (let record: unknown = parser.read(); record !== null; record = parser.read()) yield record as Parsed;
 }
 
 /** A quoted cell may go over several lines: the row begins before them. */

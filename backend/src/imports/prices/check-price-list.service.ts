@@ -2,6 +2,7 @@ import { NOT_STATED, type PriceRowReader, priceRowReader } from '@roothertz/comm
 import { dayOf } from '@roothertz/common/prices';
 import { Injectable } from '@nestjs/common';
 import type { EntityManager } from 'typeorm';
+import { ConditionsService } from '../../conditions/conditions.service.js';
 import { QuotedOffers } from '../../prices/quoted-offers.service.js';
 import type { Caller } from '../../shared/access/caller.js';
 import { writeRows } from '../check/row-writer.js';
@@ -27,6 +28,7 @@ export class CheckPriceList {
     private readonly files: ImportFiles,
     private readonly jobs: ImportJobs,
     private readonly quoted: QuotedOffers,
+    private readonly conditions: ConditionsService,
   ) {}
 
   start(caller: Caller, { id, rowCount }: Import): Promise<{ done: Promise<void> }> {
@@ -72,7 +74,8 @@ export class CheckPriceList {
     reader: PriceRowReader,
     lines: readonly ReadLine[],
   ): Promise<Map<ReadLine, StoredRow>> {
-    const verdicts = new PriceVerdicts(reader, dayOf(new Date()));
+    const uses = await this.conditions.partsInUse(caller, manager);
+    const verdicts = new PriceVerdicts(reader, dayOf(new Date()), uses);
     const { groups, apart } = offerGroups(reader, lines);
     const suppliers = await this.quoted.supplierIds(manager, caller);
     const rows = new Map(apart.map((line): [ReadLine, StoredRow] => [line, verdicts.apart(line)]));

@@ -2,6 +2,7 @@ import { type Doubt, judgeOffer, type LineVerdict, type PriceRowReader } from '@
 import type { OfferTerms } from '@roothertz/common/prices';
 import type { QuotedOffer } from '../../prices/quoted-offers.service.js';
 import { refusedRow } from '../check/row-writer.js';
+import { type PartUses, useRemark } from '../check/use-remark.js';
 import type { StoredRow } from '../stored-row.js';
 import type { OfferGroup, ReadLine } from './offer-groups.js';
 import type { OfferPlace } from './offer-places.js';
@@ -13,6 +14,7 @@ export class PriceVerdicts {
   constructor(
     private readonly reader: PriceRowReader,
     private readonly today: string,
+    private readonly uses: PartUses,
   ) {}
 
   /** The rows of a group as they are stored. */
@@ -33,7 +35,8 @@ export class PriceVerdicts {
       const row = acceptedRow(line, verdict);
       if (index !== carrier) return [line, row];
       const offer = quotedOffer(group, place, terms!);
-      return [line, { ...row, doubts: [...verdict.doubts, ...supplierDoubt(group, place)], offer }];
+      const remarks = [...supplierDoubt(group, place), ...useRemark(this.uses, place.partId)];
+      return [line, { ...row, doubts: [...verdict.doubts, ...remarks], offer }];
     });
   }
 

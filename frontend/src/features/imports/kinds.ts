@@ -25,7 +25,7 @@ const OF_PARTS = {
   row: 'a part',
   action: 'parts.edit',
   asBefore: 'the library is as it was before',
-  stays: 'parts that were edited or priced since',
+  stays: 'parts that were edited, priced or chosen since',
 } as const;
 
 /** What can be imported. */
