@@ -303,6 +303,20 @@ describe('paying for a plan', () => {
     });
   });
 
+  describe('for a team whose only member goes', () => {
+    const obstacle = async () =>
+      (await admin.agent.get('/api/account/closing').expect(200)).body.items[0].obstacle;
+
+    it('is ended first, and needn’t have run out', async () => {
+      expect(await obstacle()).toBe(null);
+      await buy(1);
+      expect(await obstacle()).toContain('end it under Plan first');
+      await press(`${await portal()}/cancel`);
+      await payments.settled();
+      expect(await obstacle()).toBe(null);
+    });
+  });
+
   describe('by seats', () => {
     const preview = (seats: number, status = 200) => send('seats/preview', { seats }, status);
     const change = (seats: number, prorationDate: number) =>

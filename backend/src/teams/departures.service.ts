@@ -58,7 +58,8 @@ export class Departures {
 
   private async paidPlan(teamId: number): Promise<string | null> {
     const plan = await this.plans.find(teamId);
-    const isPaid = plan?.subscriptionId != null && ['active', 'past-due'].includes(plan.status ?? '');
+    const runs = plan?.subscriptionId != null && ['active', 'past-due'].includes(plan.status ?? '');
+    const isPaid = runs && plan.endsAt === null;
     return isPaid ? 'The team’s plan is being paid for: end it under Plan first.' : null;
   }
 }
