@@ -26,6 +26,10 @@ const pages: RouteObject[] = [
     lazy: async () => ({ Component: (await import('./pages/plan/PlanPage')).PlanPage }),
   },
   {
+    path: 'prices',
+    lazy: async () => ({ Component: (await import('./pages/prices/PricesPage')).PricesPage }),
+  },
+  {
     path: 'account',
     lazy: async () => ({ Component: (await import('./pages/account/AccountPage')).AccountPage }),
   },

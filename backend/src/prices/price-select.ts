@@ -61,7 +61,7 @@ export function filterPrices(
 ): PriceSelect {
   const { state, library, kind, partId, supplierId, usedInConditions, search = '' } = query;
   if (state?.length) select.andWhere(anyState(state, view));
-  else if (!usedInConditions) select.andWhere('offer.id IS NOT NULL');
+  else if (!usedInConditions && !partId) select.andWhere('offer.id IS NOT NULL');
   if (usedInConditions) select.andWhere('part.id IN (:...inUse)', { inUse: [0, ...inUse] });
   if (kind?.length) select.andWhere('part.kind IN (:...kind)', { kind });
   if (library?.length)

@@ -3,6 +3,7 @@ import {
   ClientSideRowModelModule,
   ColumnApiModule,
   LocaleModule,
+  CustomEditorModule,
   ModuleRegistry,
   PinnedRowModule,
   RowApiModule,
@@ -10,6 +11,7 @@ import {
   RowStyleModule,
   ScrollApiModule,
   SelectEditorModule,
+  TextEditorModule,
 } from 'ag-grid-community';
 
 /** The parts of the grid that the pages use; every page with a grid imports this file. */
@@ -18,10 +20,12 @@ ModuleRegistry.registerModules([
   ClientSideRowModelModule,
   ColumnApiModule,
   LocaleModule,
+  CustomEditorModule,
   PinnedRowModule,
   RowApiModule,
   RowSelectionModule,
   RowStyleModule,
   ScrollApiModule,
   SelectEditorModule,
+  TextEditorModule,
 ]);

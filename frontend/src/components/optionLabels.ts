@@ -13,6 +13,7 @@ const OPTION_LABELS: Readonly<Record<string, Readonly<Record<string, string>>>> 
   inputType: INPUT_TYPE_LABELS,
   technology: TECHNOLOGY_LABELS,
   library: { curated: 'curated', team: 'your own' },
+  kind: { 'op-amp': 'op-amps', resistor: 'resistors' },
 };
 
 /** The words that a member reads for an option of a field. */

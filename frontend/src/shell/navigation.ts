@@ -11,6 +11,7 @@ export const NAVIGATION: readonly NavigationEntry[] = [
   { to: '/rank', label: 'Rank', action: 'rankings.run' },
   { to: '/parts', label: 'Parts', action: 'parts.read' },
   { to: '/imports', label: 'Import', action: 'lists.import' },
+  { to: '/prices', label: 'Prices', action: 'prices.read' },
 ];
 
 export const START_PAGE = '/rank';

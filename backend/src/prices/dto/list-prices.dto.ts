@@ -11,8 +11,8 @@ import { OfferedPartDto, OfferResponseDto } from './offer-response.dto.js';
 const IN_QUERY = { optional: true, inQuery: true };
 
 /**
- * What narrows the grid. Without a state it holds every offer that stands; where it is narrowed to the parts in use,
- * also those of them without one.
+ * What narrows the grid. Without a state it holds every offer that stands; where it is narrowed to a part or
+ * to the parts in use, also those of them without one.
  */
 export class ListPricesDto extends ListQueryDto {
   @Options(PRICE_STATES, IN_QUERY)

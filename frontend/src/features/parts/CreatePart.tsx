@@ -1,12 +1,12 @@
 import { useMemo, useState } from 'react';
 import { Link, useNavigate } from 'react-router-dom';
-import { LeaveQuestion } from './LeaveQuestion';
+import { LeaveQuestion } from '../../components/LeaveQuestion';
 import type { KindOfPart } from './kindOfPart';
 import { emptyDraft } from './partDraft';
 import { PartForm } from './PartForm';
 import { refusalOf } from './refusal';
 import { useCreatePart } from './useCreatePart';
-import { useLeaveGuard } from './useLeaveGuard';
+import { useLeaveGuard } from '../../components/useLeaveGuard';
 
 export function CreatePart({ kind }: { kind: KindOfPart }) {
   const navigate = useNavigate();

@@ -2,13 +2,13 @@ import { useMemo } from 'react';
 import { Link, useNavigate } from 'react-router-dom';
 import type { StoredPart } from '../../api/parts';
 import type { KindOfPart } from './kindOfPart';
-import { LeaveQuestion } from './LeaveQuestion';
+import { LeaveQuestion } from '../../components/LeaveQuestion';
 import { draftOf } from './partDraft';
 import { PartForm } from './PartForm';
 import { refusalOf } from './refusal';
 import { StaleEdit } from './StaleEdit';
 import { useEditPart } from './useEditPart';
-import { useLeaveGuard } from './useLeaveGuard';
+import { useLeaveGuard } from '../../components/useLeaveGuard';
 
 export function EditPart({ kind, part }: { kind: KindOfPart; part: StoredPart }) {
   const navigate = useNavigate();

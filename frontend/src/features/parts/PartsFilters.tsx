@@ -3,13 +3,13 @@ import type { KindOfPart } from './kindOfPart';
 import { optionLabel } from '../../components/optionLabels';
 import { filtersOf, type PartsView } from './partsView';
 import styles from './PartsFilters.module.css';
-import type { ChangeView } from './usePartsView';
+import type { ChangeFields } from '../../components/useAddressFields';
 import { ValueWindow } from './ValueWindow';
 
 interface PartsFiltersProps {
   kind: KindOfPart;
   view: PartsView;
-  change: ChangeView;
+  change: ChangeFields;
 }
 
 /** The search box and the choices that narrow the list. */

@@ -2,12 +2,12 @@ import type { QuantityField } from '@roothertz/common/parts';
 import { QuantityInput } from '../../components/QuantityInput';
 import styles from './PartsFilters.module.css';
 import type { PartsView } from './partsView';
-import type { ChangeView } from './usePartsView';
+import type { ChangeFields } from '../../components/useAddressFields';
 
 interface ValueWindowProps {
   field: QuantityField;
   view: PartsView;
-  change: ChangeView;
+  change: ChangeFields;
 }
 
 /** The least and the greatest value that the list shows; an empty end is open. */

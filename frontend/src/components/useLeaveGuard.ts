@@ -23,3 +23,8 @@ export function useLeaveGuard() {
   }, []);
   return { blocker, markDirty, release };
 }
+
+/** Keeps a guard up as long as there are unsaved changes. */
+export function useMarkedDirty({ markDirty, release }: ReturnType<typeof useLeaveGuard>, isDirty: boolean) {
+  useEffect(() => (isDirty ? markDirty() : release()), [isDirty, markDirty, release]);
+}

@@ -1,0 +1,60 @@
+import { Button, Skeleton } from 'antd';
+import { useState } from 'react';
+import { MOST_LISTED } from '../../api/prices';
+import { detailOf } from '../../api/problem';
+import { NoPrices } from '../../features/prices/NoPrices';
+import { PricesFacts } from '../../features/prices/PricesFacts';
+import { PricesFilters } from '../../features/prices/PricesFilters';
+import { isNarrowed, NARROWING_KEYS } from '../../features/prices/pricesView';
+import { PricesWork } from '../../features/prices/PricesWork';
+import { PriceSettingsDrawer } from '../../features/prices/settings/PriceSettingsDrawer';
+import { usePriceList } from '../../features/prices/usePriceList';
+import { usePricesView } from '../../features/prices/usePricesView';
+import styles from './PricesPage.module.css';
+
+const EVERYTHING = Object.fromEntries(NARROWING_KEYS.map((key) => [key, undefined]));
+
+/** What the team pays for its parts, kept true by purchasing and seen by everybody. */
+export function PricesPage() {
+  const { view, change } = usePricesView();
+  const { items, total, suppliers, isPending, error, retry } = usePriceList(view);
+  const [areSettingsOpen, setSettingsOpen] = useState(false);
+  return (
+    <div className={styles.page}>
+      <title>Prices · Roothertz</title>
+      <div className={styles.head}>
+        <h1>Prices</h1>
+        <PricesFacts view={view} change={change} />
+      </div>
+      <div>
+        <PricesFilters view={view} change={change} suppliers={suppliers} />
+        {view.partId !== undefined && (
+          <p className={styles.note}>
+            Only one part is shown. <Button onClick={() => change(EVERYTHING)}>Show all offers</Button>
+          </p>
+        )}
+        {total > MOST_LISTED && (
+          <p className={styles.note}>
+            The first {MOST_LISTED} of {total} rows are shown: search or narrow for the others.
+          </p>
+        )}
+      </div>
+      {error ? (
+        <p role="alert">
+          {detailOf(error)} <Button onClick={retry}>Try again</Button>
+        </p>
+      ) : isPending || !items ? (
+        <Skeleton title={false} paragraph={{ rows: 12, width: '100%' }} />
+      ) : (
+        <PricesWork items={items} suppliers={suppliers} onSettings={() => setSettingsOpen(true)}>
+          <NoPrices
+            isNarrowed={isNarrowed(view)}
+            onShowAll={() => change(EVERYTHING)}
+            onShowMissing={() => change({ state: 'missing', library: 'team' })}
+          />
+        </PricesWork>
+      )}
+      <PriceSettingsDrawer isOpen={areSettingsOpen} onClose={() => setSettingsOpen(false)} />
+    </div>
+  );
+}
