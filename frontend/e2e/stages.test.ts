@@ -80,8 +80,71 @@ describe('whole stages', () => {
   it('have no network in a follower and one resistor in a transimpedance stage', async () => {
     await start('/rank?stage=follower&view=stages');
     expect(await page.locator('#answer').textContent()).toContain('without a network');
-    await page.goto('/rank?stage=transimpedance&view=stages&nmax=10M');
+    await page.goto('/rank?stage=transimpedance&view=stages');
     await says(/^Quietest is .+ with 1\sMΩ: /);
+  });
+});
+
+describe('whole stages by price', () => {
+  it('are drawn with their frontier, selected there, and handed to the schematic', async () => {
+    await start('/rank?stage=non-inverting&view=stages&qty=100&vout=2&within=3dB');
+    await page.getByLabel('sorted by').selectOption('price');
+    await says(/^Cheapest within 3\sdB of the quietest is .+ with .+: €[\d.]+, /);
+    await page.getByRole('tab', { name: 'Price' }).click();
+    const chart = page.getByRole('application', { name: /^Noise against price/ });
+    await page.getByText(/at 100, .+ rms, on the frontier$/).waitFor();
+    await screenshot(page, 'stages-by-price');
+    await chart.focus();
+    for (let step = 0; step < 3; step++) await chart.press('ArrowLeft');
+    const told = await page
+      .getByText(/ with .+ at 100, .+ rms/)
+      .last()
+      .textContent();
+    const resistance = / with ([\d.]+\s.?Ω) and /.exec(told!)![1].replace(/\s/, ' ');
+    await chart.press('Enter');
+    await page.waitForURL(/[?&]part=\d+\.1\.\d+\.\d+/);
+    const parts = page.getByRole('region', { name: /^Parts of the stage with/ });
+    await parts.getByRole('rowheader', { name: new RegExp(`^${resistance} `) }).waitFor();
+    await page.getByRole('button', { name: 'Take this network into the schematic' }).click();
+    await says(/^Quietest is [^:]+: [\d.]+\s.V rms/);
+    expect((await field('gain resistance').inputValue()).replace(/\s/, ' ')).toBe(resistance);
+    expect(await field('noise index of the gain resistors').inputValue()).toMatch(/dB$/);
+    await page.goBack();
+    await says(/^Cheapest within 3\sdB/);
+    await page.waitForURL(/[?&]part=\d+\.1\.\d+\.\d+/);
+  });
+
+  it('count only resistors of the technologies that are chosen', async () => {
+    await start('/rank?stage=non-inverting&view=stages&by=unitPrice&within=3dB&qty=100');
+    await says(/^Cheapest within/);
+    const before = await answer().textContent();
+    await page.getByRole('button', { name: /^technology of the resistors/ }).click();
+    await page.getByRole('checkbox', { name: 'metal film' }).click();
+    await expect.poll(() => answer().textContent()).not.toBe(before);
+    await rows('Whole stages').filter({ hasText: 'OD-MM-' }).first().waitFor();
+    expect(await rows('Whole stages').filter({ hasText: 'OD-C0' }).count()).toBe(0);
+  });
+});
+
+describe('op-amps by noise and price', () => {
+  it('are picked from the chart, which can be saved', async () => {
+    await start('/rank?stage=non-inverting&qty=100');
+    await page.getByRole('tab', { name: 'Price' }).click();
+    const chart = page.getByRole('application', { name: /^Noise against price/ });
+    await chart.waitFor();
+    await screenshot(page, 'op-amps-by-price');
+    const budget = () => page.getByRole('region', { name: /^Noise budget of/ }).getAttribute('aria-label');
+    const ofLeader = await budget();
+    await chart.click({ position: { x: 20, y: 20 } });
+    await expect.poll(budget).not.toBe(ofLeader);
+    const [download] = await Promise.all([
+      page.waitForEvent('download'),
+      (async () => {
+        await page.getByRole('button', { name: /^Save the chart “Noise against price”/ }).click();
+        await page.getByRole('menuitem', { name: 'as CSV' }).click();
+      })(),
+    ]);
+    expect(download.suggestedFilename()).toBe('noise-against-price.csv');
   });
 });
 

@@ -17,7 +17,7 @@ interface PriceDrawingProps {
 /** Each part at its price and noise, the frontier as steps, in colours of its own so that it can be saved. */
 export function PriceDrawing({ plot, geometry, tokens, selected, cursor, ref }: PriceDrawingProps) {
   const { points, floor } = plot;
-  const { left, right, xOf, yOf } = geometry;
+  const { left, right, bottom, xOf, yOf } = geometry;
   const path = useMemo(() => frontierPath(points, geometry), [points, geometry]);
   return (
     <svg
@@ -32,7 +32,12 @@ export function PriceDrawing({ plot, geometry, tokens, selected, cursor, ref }: 
       {floor > 0 && (
         <>
           <path d={`M${left} ${yOf(floor)}H${right}`} stroke={tokens.slate} strokeWidth={3} />
-          <text x={right} y={yOf(floor) - 5} textAnchor="end" fill={tokens.muted}>
+          <text
+            x={right}
+            y={yOf(floor) + (bottom - yOf(floor) > 20 ? 14 : -5)}
+            textAnchor="end"
+            fill={tokens.muted}
+          >
             source floor
           </text>
         </>

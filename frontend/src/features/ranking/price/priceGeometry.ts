@@ -35,14 +35,15 @@ export function priceGeometry({ points, floor }: PricePlot): PriceGeometry {
 type Range = [number, number];
 
 const ROOM = 0.06;
-/** Values nearer together than this stand in the middle of so much. */
+/** The ends of an axis lie at least so far apart. */
 const NARROW = 2.5;
 
 /** The values with some room around them. */
 function rangeOf(values: readonly number[]): Range {
   if (values.length === 0) return [1, 10];
   const [least, most] = [Math.min(...values), Math.max(...values)];
-  const room = Math.max((most / least) ** ROOM, most / least < NARROW ? NARROW ** 0.5 : 1);
+  const ratio = most / least;
+  const room = Math.max(ratio ** ROOM, Math.sqrt(NARROW / ratio));
   return [least / room, most * room];
 }
 

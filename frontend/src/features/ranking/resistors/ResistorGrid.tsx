@@ -12,8 +12,8 @@ interface ResistorGridProps {
 
 /** The resistors as rows. */
 export function ResistorGrid({ resistors, ...state }: ResistorGridProps) {
-  const { unit, rows } = useMemo(() => resistorRows(resistors), [resistors]);
-  const columns = useMemo(() => resistorColumns(unit), [unit]);
+  const { unit, priceHeading, rows } = useMemo(() => resistorRows(resistors), [resistors]);
+  const columns = useMemo(() => resistorColumns(unit, priceHeading), [unit, priceHeading]);
   const [selectedId, setSelectedId] = useState<string | null>(null);
   return (
     <RowsGrid

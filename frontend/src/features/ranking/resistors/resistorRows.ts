@@ -3,6 +3,7 @@ import { TECHNOLOGY_LABELS } from '@roothertz/common/parts';
 import { formatQuantity } from '@roothertz/common/units';
 import type { ResistorItem } from '../../../api/resistorRanking';
 import { commonUnit, inUnit } from '../noiseUnit';
+import { amountText, priceHeading } from '../priceWords';
 import type { ShownResistors } from './useResistors';
 
 export interface ResistorRow {
@@ -16,15 +17,21 @@ export interface ResistorRow {
   total: string;
   aboveThermal: string;
   dissipation: string;
+  price: string;
+}
+
+export interface ResistorRows {
+  unit: string;
+  /** The heading of the price column; null where there is none. */
+  priceHeading: string | null;
+  rows: ResistorRow[];
 }
 
 /** The rows of the resistors, all noise in one unit. */
-export function resistorRows({ items }: Pick<ShownResistors, 'items'>): {
-  unit: string;
-  rows: ResistorRow[];
-} {
+export function resistorRows({ items, request }: Pick<ShownResistors, 'items' | 'request'>): ResistorRows {
   const unit = commonUnit(items[0]?.thermalRms ?? 1, 'voltage');
-  return { unit, rows: items.map((item) => rowOf(item, unit)) };
+  const heading = priceHeading(items, request.quantity ?? 1);
+  return { unit, priceHeading: heading, rows: items.map((item) => rowOf(item, unit)) };
 }
 
 function rowOf(item: ResistorItem, unit: string): ResistorRow {
@@ -41,6 +48,7 @@ function rowOf(item: ResistorItem, unit: string): ResistorRow {
     total: excessRms === null ? `≥\u2009${inUnit(item.totalRms, unit)}` : inUnit(item.totalRms, unit),
     aboveThermal: excessRms === null ? '–' : formatQuantity(aboveThermal, 'decibel'),
     dissipation: dissipationText(item),
+    price: item.unitPrice ? amountText(item.unitPrice) : 'no price',
   };
 }
 

@@ -48,12 +48,19 @@ describe('the answer of resistors', () => {
 });
 
 describe('the rows of resistors', () => {
-  const { unit, rows } = resistorRows({ items: [noisy, unknown] });
+  const { unit, rows } = resistorRows({ items: [noisy, unknown], request });
 
   it('share one unit and set the dissipation beside the rating', () => {
     expect(unit).toBe('nV');
     expect(rows[0]).toMatchObject({ thermal: '100', excess: '100', total: '141', technology: 'thick film' });
     expect(rows[0].dissipation).toBe('4.00\u2009mW of 125\u2009mW');
+  });
+
+  it('have a price where any has one', () => {
+    const priced = { ...noisy, unitPrice: { amount: '0.0125', currency: 'EUR' } as never };
+    const { priceHeading, rows: all } = resistorRows({ items: [priced, unknown], request });
+    expect([priceHeading, all[0].price, all[1].price]).toEqual(['€ at 1', '0.0125', 'no price']);
+    expect(resistorRows({ items: [unknown], request }).priceHeading).toBeNull();
   });
 
   it('take an unknown excess noise for a bound, never for none', () => {

@@ -72,3 +72,12 @@ export function StageNoiseCell({ text, aboveFloor }: StageRow['noise']) {
     </span>
   );
 }
+
+/** What a stage costs, with the prices of its parts on hover. */
+export function StagePriceCell({ text, title }: StageRow['price']) {
+  return (
+    <span className={styles.two} title={title}>
+      <span>{text}</span>
+    </span>
+  );
+}

@@ -1,7 +1,14 @@
 import type { Topology } from '@roothertz/common/conditions';
 import type { ColDef, ICellRendererParams } from 'ag-grid-community';
 import { BudgetBar } from '../BudgetBar';
-import { GainCell, NetworkCell, NetworkHeading, StageNoiseCell, StagePartCell } from './StageCells';
+import {
+  GainCell,
+  NetworkCell,
+  NetworkHeading,
+  StageNoiseCell,
+  StagePartCell,
+  StagePriceCell,
+} from './StageCells';
 import type { StageRow } from './stageRows';
 
 type Cell<Value> = ICellRendererParams<StageRow, Value>;
@@ -44,7 +51,7 @@ export function stageColumns(
       colId: 'network',
       field: 'network',
       headerName: isTransimpedance ? 'R_f' : 'R_g, R_f',
-      width: hasPrices ? 132 : 146,
+      width: hasPrices ? 142 : 146,
       headerComponent: () => <NetworkHeading hasGainResistor={!isTransimpedance} />,
       cellRenderer: ({ value }: Cell<StageRow['network']>) => value && <NetworkCell parts={value} />,
     },
@@ -61,7 +68,7 @@ export function stageColumns(
       colId: 'budget',
       field: 'budget',
       headerName: hasPrices ? 'budget' : 'budget, power',
-      width: hasPrices ? 60 : 134,
+      width: hasPrices ? 54 : 134,
       cellStyle: { display: 'flex', alignItems: 'center', paddingLeft: 4, paddingRight: 2 },
       cellRenderer: ({ value }: Cell<StageRow['budget']>) => value && <BudgetBar {...value} />,
     },
@@ -80,7 +87,6 @@ function priceColumn(headerName: string): ColDef<StageRow> {
     headerName,
     width: 80,
     cellStyle: { textAlign: 'right', paddingLeft: 0, paddingRight: SCROLLBAR },
-    cellRenderer: ({ value }: Cell<StageRow['price']>) =>
-      value && <span title={value.title}>{value.text}</span>,
+    cellRenderer: ({ value }: Cell<StageRow['price']>) => value && <StagePriceCell {...value} />,
   };
 }
