@@ -7,6 +7,13 @@ import { advance } from './passing-time.js';
 import { findIn, type State } from './state.js';
 import type { Switches } from './switches.js';
 
+/** Days that a button lets pass. */
+const SPANS: readonly [number, string][] = [
+  [1, 'a day'],
+  [15, '15 days'],
+  [31, '31 days'],
+];
+
 const clockForm = shape({ days: integer(0, 400) });
 const switchForm = shape({ duplicate: flag, reverse: flag, failNext: integer(0, 100) });
 const resendForm = shape({ event: text });
@@ -43,8 +50,8 @@ function controlPage(now: number, { duplicate, reverse, failNext }: Switches, su
   return page(
     'What it does',
     paragraph(`By its clock it is ${day(now)}. It keeps ${subscriptions} subscriptions.`),
-    ...[1, 15, 31].map((days) =>
-      form('/control/clock', `Let ${days} days pass`, hidden('days', String(days))),
+    ...SPANS.map(([days, label]) =>
+      form('/control/clock', `Let ${label} pass`, hidden('days', String(days))),
     ),
     table([
       ['every event twice', duplicate ? 'on' : 'off'],

@@ -167,6 +167,20 @@ describe('the stand-in of the payment service, through its official SDK', () => 
     expect(types().at(-1)).toBe('customer.subscription.deleted');
   });
 
+  it('is told to end a subscription at its period’s end, not to, and at once', async () => {
+    const { id } = await subscribed();
+    const ending = await stripe.subscriptions.update(id, { cancel_at_period_end: true });
+    expect(ending.cancel_at).toBe(ending.items.data[0].current_period_end);
+    await expect(stripe.invoices.createPreview({ subscription: id })).rejects.toMatchObject({
+      code: 'invoice_upcoming_none',
+    });
+    expect(await stripe.subscriptions.update(id, { cancel_at_period_end: false })).toMatchObject({
+      cancel_at: null,
+    });
+    expect(await stripe.subscriptions.cancel(id)).toMatchObject({ status: 'canceled' });
+    await expect(stripe.subscriptions.cancel(id)).rejects.toMatchObject({ statusCode: 400 });
+  });
+
   it('refuses what it doesn’t know with the error object of the service', async () => {
     const stray = { name: 'x', colour: 'red' } as Stripe.CustomerCreateParams;
     await expect(stripe.customers.create(stray)).rejects.toMatchObject({
