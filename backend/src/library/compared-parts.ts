@@ -15,6 +15,7 @@ export function toComparedParts<Kind extends LibraryPart>(
 ): IdentifiedPart[] {
   const shared = sharedTexts();
   const inUse = rows.filter(([, , , , , lifecycle, approval]) => !isRetired({ lifecycle, approval }));
+  const nominal = catalogue.parameters.findIndex(({ key }) => key === catalogue.nominal);
   return inUse.map((row) => {
     const [id, manufacturer, partNumber, , packageName, , , choice] = row;
     return {
@@ -23,6 +24,7 @@ export function toComparedParts<Kind extends LibraryPart>(
       partNumber,
       package: shared(packageName),
       figures: [shared(choice), ...catalogue.parameters.map((_, place) => figureAt(row, place))],
+      nominal: nominal < 0 ? null : figureAt(row, nominal),
       isOwn,
     };
   });

@@ -6,6 +6,7 @@ import { INPUT_TYPE_FIELD } from './partFields.js';
 
 export const OP_AMP_CATALOGUE: PartCatalogue<OpAmpPart> = {
   kind: 'op-amp',
+  nominal: null,
   group: 'amplifier',
   choice: INPUT_TYPE_FIELD,
   parameters: OP_AMP_PARAMETERS,

@@ -21,6 +21,8 @@ export interface ListedFields {
 /** All that tells one kind of part from another: API, database, lists and forms are made from it. */
 export interface PartCatalogue<Part extends LibraryPart> extends ListedFields {
   kind: PartKind;
+  /** The parameter that no two names of one part differ in; null = none. */
+  nominal: string | null;
   /** What is wrong between figures that are each within their own bounds; empty = the part can be kept. */
   check: (part: Part) => FieldError[];
 }

@@ -6,6 +6,7 @@ import { RESISTOR_PARAMETERS } from './resistorParameters.js';
 /** No two of a resistor's figures can contradict each other. */
 export const RESISTOR_CATALOGUE: PartCatalogue<ResistorPart> = {
   kind: 'resistor',
+  nominal: 'resistance',
   group: 'resistor',
   choice: TECHNOLOGY_FIELD,
   parameters: RESISTOR_PARAMETERS,

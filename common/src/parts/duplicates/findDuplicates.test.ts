@@ -9,6 +9,7 @@ const part = (manufacturer: string, partNumber: string, more: Partial<ComparedPa
   partNumber,
   package: 'SOIC-8',
   figures: [1e-9, 2e-12, null, 4e7],
+  nominal: null,
   isOwn: true,
   ...more,
 });
@@ -77,6 +78,12 @@ describe('parts that may be one', () => {
   it('don’t contradict each other in most of their figures', () => {
     const different = { figures: [9e-9, 7e-12, null, 4e7] };
     expect(reasonsOf(part('Hallam', 'HT-10'), part('Hallam', 'HT-10-TR', different))).toEqual([]);
+  });
+
+  it('have one nominal value', () => {
+    const [small, large] = [{ nominal: 1000 }, { nominal: 10_000 }];
+    expect(reasonsOf(part('Hallam', 'HR-1O', small), part('Hallam', 'HR-10', large))).toEqual([]);
+    expect(reasonsOf(part('Hallam', 'HR-1O', small), part('Hallam', 'HR-10', small))).toHaveLength(1);
   });
 
   it('are never both curated', () => {

@@ -10,6 +10,8 @@ export interface ComparedPart {
   package: string;
   /** Parameters and choice in the same order for all parts; `null` = unknown. */
   figures: readonly (number | string | null)[];
+  /** The figure that no two names of one part differ in, such as a resistance; `null` where the kind has none. */
+  nominal: number | null;
   /** It stands in the team's own library. */
   isOwn: boolean;
 }
@@ -38,6 +40,7 @@ export function findDuplicates(parts: readonly ComparedPart[]): DuplicatePair[] 
   const pairs = new Map<string, DuplicatePair>();
   const keep = (one: number, other: number, compare: Compare) => {
     if (!parts[one].isOwn && !parts[other].isOwn) return;
+    if (parts[one].nominal !== parts[other].nominal) return;
     const pair = { one: Math.min(one, other), other: Math.max(one, other) };
     const key = `${pair.one} ${pair.other}`;
     if (pairs.has(key)) return;

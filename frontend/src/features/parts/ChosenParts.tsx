@@ -10,6 +10,8 @@ import { StandingBar } from './standing/StandingBar';
 interface ChosenPartsProps {
   kind: KindOfPart;
   parts: readonly StoredPart[];
+  /** Parts that the filters let through; only the first of them are listed. */
+  total: number;
   sort?: string;
   onSort: (sort: string | undefined) => void;
 }
@@ -17,7 +19,7 @@ interface ChosenPartsProps {
 const NONE: ReadonlySet<string> = new Set();
 
 /** The list, and below it what can be done with the parts chosen in it. */
-export function ChosenParts({ kind, parts, sort, onSort }: ChosenPartsProps) {
+export function ChosenParts({ kind, parts, total, sort, onSort }: ChosenPartsProps) {
   const mayEdit = useMayDo('parts.edit');
   const [ids, setIds] = useState(NONE);
   const grid = useRef<AgGridReact<StoredPart>>(null);
@@ -33,7 +35,14 @@ export function ChosenParts({ kind, parts, sort, onSort }: ChosenPartsProps) {
         onSort={onSort}
         onChoose={mayEdit ? setIds : null}
       />
-      {chosen.length > 0 && <StandingBar kind={kind} parts={chosen} onClear={clear} />}
+      {chosen.length > 0 && (
+        <StandingBar
+          kind={kind}
+          parts={chosen}
+          unlisted={chosen.length === parts.length ? total - parts.length : 0}
+          onClear={clear}
+        />
+      )}
     </div>
   );
 }

@@ -34,7 +34,13 @@ export function PartsPage({ kind }: { kind: KindOfPart }) {
       ) : list.parts.length === 0 ? (
         <NoParts kind={kind} isNarrowed={isNarrowed(kind, view)} onShowAll={showAll} />
       ) : (
-        <ChosenParts kind={kind} parts={list.parts} sort={view.sort} onSort={(sort) => change({ sort })} />
+        <ChosenParts
+          kind={kind}
+          parts={list.parts}
+          total={view.search.trim() === '' ? list.total : list.parts.length}
+          sort={view.sort}
+          onSort={(sort) => change({ sort })}
+        />
       )}
     </div>
   );

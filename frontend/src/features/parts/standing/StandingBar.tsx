@@ -14,11 +14,13 @@ import { useChangeStandings } from './useChangeStandings';
 interface StandingBarProps {
   kind: KindOfPart;
   parts: readonly StoredPart[];
+  /** Parts that match and aren't listed, so that they can't be chosen. */
+  unlisted: number;
   onClear: () => void;
 }
 
 /** What can be done with the chosen parts: its outcome is said before it is done. */
-export function StandingBar({ kind, parts, onClear }: StandingBarProps) {
+export function StandingBar({ kind, parts, unlisted, onClear }: StandingBarProps) {
   const [wanted, setWanted] = useState<Wanted>({});
   const { mutate, isPending, error, reset } = useChangeStandings(kind);
   const plan = planStanding(parts, wanted);
@@ -64,6 +66,12 @@ export function StandingBar({ kind, parts, onClear }: StandingBarProps) {
           >
             {isRetirement(wanted) ? 'Retire' : 'Set'} {countOf(plan.changed.length, 'part')}
           </Button>
+        </p>
+      )}
+      {unlisted > 0 && (
+        <p className={styles.unlisted}>
+          {countOf(unlisted, 'more part')} match and {unlisted === 1 ? 'isn’t' : 'aren’t'} listed: narrow the
+          list to reach them.
         </p>
       )}
       {error && <FieldMessage>{refusedWords(error)}</FieldMessage>}
