@@ -23,7 +23,17 @@ const BACKEND_FEATURES = [
   'mail',
   'notices',
 ];
-const FRONTEND_FEATURES = ['billing', 'session', 'parts', 'ranking', 'conditions', 'imports', 'prices'];
+const FRONTEND_FEATURES = [
+  'audit',
+  'billing',
+  'session',
+  'team',
+  'parts',
+  'ranking',
+  'conditions',
+  'imports',
+  'prices',
+];
 
 const PAYMENTS_SDK = { name: 'stripe', message: 'Only backend/src/billing talks to the payment service.' };
 

@@ -306,7 +306,8 @@ describe('an account', () => {
       await agent.get('/api/auth/me').expect(401);
       await signIn(email, PASSWORD).expect(401);
       const trail = await app.dataSource.getRepository(AuditEntry).findBy({ teamId: team.id });
-      expect(trail).toMatchObject([{ action: 'member.left', objectId: String(caller.userId), userId: null }]);
+      const gone = { action: 'member.account-closed', objectId: String(caller.userId), userId: null };
+      expect(trail).toMatchObject([gone]);
     });
 
     it('is refused to the last admin of a team with others in it, and to who holds a paid plan alone', async () => {

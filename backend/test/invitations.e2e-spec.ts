@@ -96,7 +96,7 @@ describe('an invitation', () => {
       action: 'member.joined',
       teamId: team.id,
     });
-    expect(joined).toMatchObject({ userId: user.id, objectLabel: 'Nell Weir' });
+    expect(joined).toMatchObject({ userId: user.id, objectLabel: 'Weir & Sons' });
   });
 
   it('is accepted by an existing account of that address, and of no other', async () => {
@@ -212,7 +212,7 @@ describe('an invitation', () => {
 
   it.each<[string, object]>([
     ['name', { name: ' ' }],
-    ['password', { password: 'short' }],
+    ['password', { password: '' }],
     ['password', { password: undefined }],
     ['email', { email: 'other@weir.example' }],
   ])('is not accepted with a wrong %s: %j', async (field, body) => {
@@ -221,6 +221,16 @@ describe('an invitation', () => {
     expect(answer.body.errors.map((error: { field: string }) => error.field)).toContain(field);
     expect((await stored()).acceptedAt).toBeNull();
   });
+
+  it.each(['too short', 'password1234', 'x'.repeat(73)])(
+    'is not accepted with the password %s',
+    async (password) => {
+      await invite();
+      const { body } = await join(await tokenFor(), { ...NEW_ACCOUNT, password }).expect(422);
+      expect(body.errors).toMatchObject([{ field: 'password' }]);
+      expect((await stored()).acceptedAt).toBeNull();
+    },
+  );
 
   it('is the admin’s to send, and its team’s to see', async () => {
     const { body } = await invite();

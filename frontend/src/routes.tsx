@@ -1,6 +1,7 @@
 import { createBrowserRouter, Navigate, type RouteObject } from 'react-router-dom';
 import { PageSkeleton } from './components/PageSkeleton';
 import { partsRoutes } from './pages/parts/partsRoutes';
+import { teamRoutes } from './pages/team/teamRoutes';
 import { ErrorPage } from './shell/ErrorPage';
 import { START_PAGE } from './shell/navigation';
 import { NotFoundPage } from './shell/NotFoundPage';
@@ -21,10 +22,7 @@ const pages: RouteObject[] = [
     path: 'imports/:id',
     lazy: async () => ({ Component: (await import('./pages/imports/ImportPage')).ImportPage }),
   },
-  {
-    path: 'team/plan',
-    lazy: async () => ({ Component: (await import('./pages/plan/PlanPage')).PlanPage }),
-  },
+  ...teamRoutes,
   {
     path: 'prices',
     lazy: async () => ({ Component: (await import('./pages/prices/PricesPage')).PricesPage }),
@@ -40,6 +38,12 @@ export const routes: RouteObject[] = [
   {
     path: '/sign-in',
     lazy: async () => ({ Component: (await import('./pages/sign-in/SignInPage')).SignInPage }),
+    errorElement: <ErrorPage />,
+    HydrateFallback: PageSkeleton,
+  },
+  {
+    path: '/invitations/:token',
+    lazy: async () => ({ Component: (await import('./pages/invitation/InvitationPage')).InvitationPage }),
     errorElement: <ErrorPage />,
     HydrateFallback: PageSkeleton,
   },

@@ -44,7 +44,7 @@ export class Departures {
       await manager.delete(Membership, { userId, teamId });
       const object = { kind: 'member' as const, id: userId, label: user.name };
       await this.audit.record(manager, { teamId, userId }, [
-        { action: 'member.left', object, from: { roles }, to: null },
+        { action: 'member.account-closed', object, from: { roles }, to: null },
       ]);
     }
   }

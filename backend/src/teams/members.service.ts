@@ -2,7 +2,6 @@ import { type Role, ROLES } from '@roothertz/common/access';
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
 import type { DataSource, EntityManager } from 'typeorm';
-import type { Recorded } from '../audit/audit.service.js';
 import type { Caller } from '../shared/access/caller.js';
 import { type TeamMemberDto, type TeamMemberListDto, toTeamMember } from './dto/team-member.dto.js';
 import { Membership } from './entities/membership.entity.js';
@@ -39,26 +38,25 @@ export class MembersService {
 
   /** What the member has made stays; an open session ends with its next request. */
   remove(caller: Caller, id: string): Promise<void> {
-    return this.changes.asAdmin(caller, (manager, roster) => takeOut(manager, roster, id, 'member.removed'));
+    return this.changes.asAdmin(caller, async (manager, roster) => {
+      const member = await takeOut(manager, roster, id);
+      return { action: 'member.removed', object: objectOf(member), from: { roles: member.roles }, to: null };
+    });
   }
 
   leave(caller: Caller): Promise<void> {
-    return this.changes.asMember(caller, (manager, roster) =>
-      takeOut(manager, roster, caller.userId, 'member.left'),
-    );
+    return this.changes.asMember(caller, async (manager, roster) => {
+      const { roles } = await takeOut(manager, roster, caller.userId);
+      return { action: 'member.left', object: roster.object, from: { roles }, to: null };
+    });
   }
 }
 
-async function takeOut(
-  manager: EntityManager,
-  roster: Roster,
-  id: string | number,
-  action: 'member.removed' | 'member.left',
-): Promise<Recorded> {
+async function takeOut(manager: EntityManager, roster: Roster, id: string | number): Promise<Membership> {
   const member = roster.member(id);
   roster.assertReplaceable(member);
   await manager.delete(Membership, { userId: member.userId, teamId: member.teamId });
-  return { action, object: objectOf(member), from: { roles: member.roles }, to: null };
+  return member;
 }
 
 /** A member as the trail names them. */

@@ -19,6 +19,12 @@ export class Roster {
     return admins.find(({ userId }) => userId === ownerId)?.userId ?? admins[0]?.userId ?? null;
   }
 
+  /** The team as the trail names it. */
+  get object() {
+    const { id, name } = this.team;
+    return { kind: 'team' as const, id, label: name };
+  }
+
   /** @throws where the team has no such member */
   member(id: string | number): Membership {
     const userId = readId(String(id));

@@ -22,10 +22,9 @@ export class TeamSettingsService {
   }
 
   async rename(caller: Caller, name: string): Promise<TeamResponseDto> {
-    await this.changes.asAdmin(caller, async (manager, { team }) => {
+    await this.changes.asAdmin(caller, async (manager, { team, object }) => {
       if (team.name === name) return null;
       await manager.update(Team, { id: team.id }, { name });
-      const object = { kind: 'team', id: team.id, label: team.name } as const;
       return { action: 'team.renamed', object, from: { name: team.name }, to: { name } };
     });
     return this.read(caller);
@@ -34,13 +33,12 @@ export class TeamSettingsService {
   /** Makes another admin the one who holds the plan. */
   handOver(caller: Caller, memberId: string): Promise<void> {
     return this.changes.asAdmin(caller, async (manager, roster) => {
-      const { team, ownerId, members } = roster;
+      const { team, ownerId, members, object } = roster;
       const member = roster.member(memberId);
       if (!isAdmin(member)) refuseOwner();
       if (member.userId === ownerId) return null;
       await manager.update(Team, { id: team.id }, { ownerId: member.userId });
       const before = members.find(({ userId }) => userId === ownerId);
-      const object = { kind: 'team', id: team.id, label: team.name } as const;
       const [from, to] = [{ owner: before?.user.name }, { owner: member.user.name }];
       return { action: 'team.handed-over', object, from, to };
     });

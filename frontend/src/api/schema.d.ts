@@ -1458,7 +1458,7 @@ export interface components {
         };
         AuditEntryResponseDto: {
             /** @enum {string} */
-            action: "offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.founded" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked";
+            action: "offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.founded" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.account-closed" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked";
             /** Format: date-time */
             at: string;
             /** @description null where the account is gone. */
@@ -3259,7 +3259,7 @@ export interface operations {
     listAuditEntries: {
         parameters: {
             query?: {
-                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.founded" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
+                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.founded" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.account-closed" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
                 objectKind?: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
                 objectId?: string;
                 userId?: string;
@@ -3296,7 +3296,7 @@ export interface operations {
     exportAuditEntries: {
         parameters: {
             query?: {
-                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.founded" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
+                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.founded" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.account-closed" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
                 objectKind?: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
                 objectId?: string;
                 userId?: string;

@@ -28,6 +28,11 @@ export function signIn(credentials: Credentials): Promise<Session> {
   return answer(client.POST('/api/auth/sign-in', { body: credentials }));
 }
 
+/** Goes on in another of the person's teams. */
+export function switchTeam(teamId: string): Promise<Session> {
+  return answer(client.POST('/api/auth/team', { body: { teamId } }));
+}
+
 export async function signOut(): Promise<void> {
   await answer(client.POST('/api/auth/sign-out'));
 }

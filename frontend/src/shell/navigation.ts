@@ -12,6 +12,7 @@ export const NAVIGATION: readonly NavigationEntry[] = [
   { to: '/parts', label: 'Parts', action: 'parts.read' },
   { to: '/imports', label: 'Import', action: 'lists.import' },
   { to: '/prices', label: 'Prices', action: 'prices.read' },
+  { to: '/team', label: 'Team', action: 'team.read' },
 ];
 
 export const START_PAGE = '/rank';

@@ -7,7 +7,6 @@ import { hashPassword } from '../../auth/passwords.js';
 import type { Caller } from '../../shared/access/caller.js';
 import { DomainError } from '../../shared/errors/domain-error.js';
 import { isDuplicateEntry } from '../../shared/errors/duplicate-entry.js';
-import type { Account } from '../../users/account.js';
 import { UsersService } from '../../users/users.service.js';
 import type { TeamResponseDto } from '../dto/team.dto.js';
 import { Membership } from '../entities/membership.entity.js';
@@ -16,8 +15,6 @@ import { TeamsService } from '../teams.service.js';
 import { type JoinTeamDto, type OpenInvitationDto, toOpenInvitation } from './dto/acceptance.dto.js';
 import { Invitation } from './entities/invitation.entity.js';
 import { findByToken, holdByToken } from './invitation-select.js';
-
-type Joining = Pick<Account, 'id' | 'name'>;
 
 /** What the holder of an invitation's link can do with it. */
 @Injectable()
@@ -39,7 +36,7 @@ export class AcceptanceService {
   accept({ userId }: Caller, token: string): Promise<TeamResponseDto> {
     return this.join(token, async (_, { email }) => {
       const account = await this.users.findByEmail(email);
-      if (account?.id === userId) return account;
+      if (account?.id === userId) return userId;
       throw new DomainError(
         'invitation.other-address',
         'This invitation is for another address: sign out, and open it again.',
@@ -52,38 +49,37 @@ export class AcceptanceService {
     const { email: invited } = await findByToken(this.dataSource.manager, token);
     assertPassword(password, invited, 'password');
     const passwordHash = await hashPassword(password);
-    return this.join(token, async (manager, { email }) => {
-      const id = await this.users.create(manager, { email, name, passwordHash }).catch(refuseKnown);
-      return { id, name };
-    });
+    return this.join(token, (manager, { email }) =>
+      this.users.create(manager, { email, name, passwordHash }).catch(refuseKnown),
+    );
   }
 
   private async join(
     token: string,
-    accountFor: (manager: EntityManager, invitation: Invitation) => Promise<Joining>,
+    userFor: (manager: EntityManager, invitation: Invitation) => Promise<number>,
   ): Promise<TeamResponseDto> {
     const { teamId, team } = await findByToken(this.dataSource.manager, token);
     await this.dataSource.transaction(async (manager) => {
       await this.seats.hold(manager, teamId);
       await this.teams.lockTeam(manager, teamId);
       const invitation = await holdByToken(manager, token);
-      const account = await accountFor(manager, invitation);
+      const userId = await userFor(manager, invitation);
       await this.seats.assertSeat(manager, teamId, invitation.id);
       await manager.update(Invitation, { id: invitation.id }, { acceptedAt: new Date(), openEmail: null });
-      await this.addMember(manager, invitation, account);
+      await this.addMember(manager, { ...invitation, team }, userId);
     });
     return { id: String(teamId), name: team.name };
   }
 
   private async addMember(
     manager: EntityManager,
-    { teamId, roles }: Invitation,
-    { id: userId, name }: Joining,
+    { teamId, team, roles }: Invitation,
+    userId: number,
   ): Promise<void> {
     if (await manager.existsBy(Membership, { userId, teamId }))
       throw new DomainError('invitation.member', 'You are in this team already.');
     await manager.insert(Membership, { userId, teamId, roles });
-    const object = { kind: 'member', id: userId, label: name } as const;
+    const object = { kind: 'team', id: teamId, label: team.name } as const;
     await this.audit.record(manager, { teamId, userId }, [
       { action: 'member.joined', object, from: null, to: { roles } },
     ]);

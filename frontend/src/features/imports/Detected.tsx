@@ -4,7 +4,8 @@ import type { ReactNode } from 'react';
 import type { Dialect, DialectChoice, Import } from '../../api/imports';
 import { QuantityInput } from '../../components/QuantityInput';
 import styles from './Detected.module.css';
-import { count, moment } from './importWords';
+import { moment } from '../../components/moments';
+import { count } from './importWords';
 
 interface DetectedProps {
   imported: Import;

@@ -6,7 +6,8 @@ import { detailOf } from '../../api/problem';
 import { FieldMessage } from '../../components/FieldMessage';
 import { useMayDo } from '../../components/useMember';
 import styles from './History.module.css';
-import { count, moment, rows, stateWords } from './importWords';
+import { moment } from '../../components/moments';
+import { count, rows, stateWords } from './importWords';
 import { KINDS } from './kinds';
 import { useImportActs } from './useImportActs';
 

@@ -3,7 +3,8 @@ import { Link } from 'react-router-dom';
 import { type Import, isRunning } from '../../api/imports';
 import { detailOf } from '../../api/problem';
 import { FieldMessage } from '../../components/FieldMessage';
-import { isMappable, moment, stateWords } from './importWords';
+import { moment } from '../../components/moments';
+import { isMappable, stateWords } from './importWords';
 import { KINDS } from './kinds';
 import type { ImportMapping } from './useMapping';
 

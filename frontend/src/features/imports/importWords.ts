@@ -57,12 +57,6 @@ export function rows(number: number): string {
   return `${count(number)} ${number === 1 ? 'row' : 'rows'}`;
 }
 
-const MOMENT = new Intl.DateTimeFormat('en-GB', { dateStyle: 'medium', timeStyle: 'short' });
-
-export function moment(time: string): string {
-  return MOMENT.format(new Date(time));
-}
-
 /** How long the work still takes, roughly. */
 export function timeLeft(seconds: number): string {
   if (seconds < 1) return 'nearly done';

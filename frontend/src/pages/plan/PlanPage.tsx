@@ -10,6 +10,7 @@ import { BillingFacts } from '../../features/billing/BillingFacts';
 import { Invoices } from '../../features/billing/Invoices';
 import { planHeadline, planMeaning } from '../../features/billing/planWords';
 import { PlanTable } from '../../features/billing/PlanTable';
+import { TeamTabs } from '../team/TeamTabs';
 import styles from './PlanPage.module.css';
 
 /** The team's plan: how it stands, what it costs, and what can be done about it. */
@@ -72,6 +73,7 @@ function Page({ title, meaning, children }: { title: string; meaning?: string; c
   return (
     <div className={styles.page}>
       <title>Plan · Roothertz</title>
+      <TeamTabs />
       <div className={styles.lead}>
         <h1>{title}</h1>
         {meaning && <p>{meaning}</p>}

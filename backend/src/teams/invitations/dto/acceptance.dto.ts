@@ -40,7 +40,7 @@ export class JoinTeamDto {
   @StoredText(PERSON_NAME)
   name: string;
 
-  @Text({ label: 'password', minLength: 12, maxLength: 200 })
+  @Text({ label: 'password', minLength: 1, maxLength: 200 })
   password: string;
 }
 

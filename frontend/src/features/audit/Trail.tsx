@@ -1,0 +1,62 @@
+import { useQuery } from '@tanstack/react-query';
+import { Button, Pagination, Skeleton } from 'antd';
+import { useState } from 'react';
+import { AUDIT_PAGE, auditExportAddress, auditQuery } from '../../api/audit';
+import { detailOf } from '../../api/problem';
+import styles from './Trail.module.css';
+import { TrailFilters } from './TrailFilters';
+import { TrailTable } from './TrailTable';
+import { useTrailFilter } from './useTrailFilter';
+
+/** The team's trail: narrowed, in pages, and as a list for a spreadsheet. */
+export function Trail() {
+  const { filter, narrow, showAll } = useTrailFilter();
+  const [page, setPage] = useState(1);
+  const { data, error, refetch } = useQuery(auditQuery(filter, page));
+  const isNarrowed = Object.keys(filter).length > 0;
+  return (
+    <>
+      <div className={styles.bar}>
+        <TrailFilters
+          filter={filter}
+          narrow={(changes) => {
+            setPage(1);
+            narrow(changes);
+          }}
+        />
+        <a href={auditExportAddress(filter)} download>
+          Export as CSV
+        </a>
+      </div>
+      {error ? (
+        <p role="alert">
+          {detailOf(error)} <Button onClick={() => void refetch()}>Try again</Button>
+        </p>
+      ) : data === undefined ? (
+        <Skeleton title={false} paragraph={{ rows: 10, width: '100%' }} />
+      ) : data.total === 0 ? (
+        <p className={styles.nothing}>
+          {isNarrowed ? 'Nothing of this was done. ' : 'Nothing has been changed yet.'}
+          {isNarrowed && (
+            <Button type="link" onClick={showAll}>
+              Show all of it
+            </Button>
+          )}
+        </p>
+      ) : (
+        <TrailTable entries={data.items} />
+      )}
+      {data !== undefined && data.total > AUDIT_PAGE && (
+        <Pagination
+          size="small"
+          current={page}
+          pageSize={AUDIT_PAGE}
+          total={data.total}
+          showSizeChanger={false}
+          showTotal={(total, [from, to]) => `${from}–${to} of ${total}`}
+          onChange={setPage}
+        />
+      )}
+    </>
+  );
+}

@@ -1,0 +1,53 @@
+import { actorWords, AUDIT_ACTIONS, describeChange } from '@roothertz/common/audit';
+import type { AuditEntry } from '../../api/audit';
+import { moment } from '../../components/moments';
+import { ObjectName } from './ObjectName';
+import styles from './Trail.module.css';
+
+/** One row an act: when, who, what, and what it changed. */
+export function TrailTable({ entries }: { entries: readonly AuditEntry[] }) {
+  return (
+    <table className={styles.table}>
+      <thead>
+        <tr>
+          <th scope="col">when</th>
+          <th scope="col">who did what</th>
+          <th scope="col">from → to</th>
+        </tr>
+      </thead>
+      <tbody>
+        {entries.map((entry) => (
+          <tr key={entry.id}>
+            <td className={styles.when}>
+              <time dateTime={entry.at}>{moment(entry.at)}</time>
+            </td>
+            <th scope="row">
+              <strong>{actorWords(entry.by?.name, entry.object.kind)}</strong> {AUDIT_ACTIONS[entry.action]}{' '}
+              <ObjectName entry={entry} />
+            </th>
+            <td>
+              <Changes entry={entry} />
+            </td>
+          </tr>
+        ))}
+      </tbody>
+    </table>
+  );
+}
+
+function Changes({ entry: { from, to } }: { entry: AuditEntry }) {
+  const changes = describeChange(from, to);
+  if (changes.length === 0) return <span className={styles.muted}>–</span>;
+  return (
+    <ul className={styles.changes}>
+      {changes.map((change) => (
+        <li key={change.field}>
+          <span className={styles.muted}>{change.field}</span>{' '}
+          {change.from !== null && <del>{change.from}</del>}
+          {change.from !== null && ' → '}
+          {change.to === null ? <span className={styles.muted}>nothing</span> : <ins>{change.to}</ins>}
+        </li>
+      ))}
+    </ul>
+  );
+}

@@ -1,0 +1,32 @@
+import { useQuery } from '@tanstack/react-query';
+import { invitationsQuery } from '../../api/team';
+import { InvitationRow } from './InvitationRow';
+import styles from './Team.module.css';
+
+/** The invitations that wait for an answer; nothing where there are none. */
+export function Invitations() {
+  const { data = [] } = useQuery(invitationsQuery);
+  if (data.length === 0) return null;
+  return (
+    <section className={styles.section} aria-label="Open invitations">
+      <h2>{data.length === 1 ? 'One open invitation' : `${data.length} open invitations`}</h2>
+      <table className={styles.table}>
+        <thead>
+          <tr>
+            <th scope="col">invited</th>
+            <th scope="col">roles</th>
+            <th scope="col">sent</th>
+            <th scope="col">
+              <span className="visually-hidden">acts</span>
+            </th>
+          </tr>
+        </thead>
+        <tbody>
+          {data.map((invitation) => (
+            <InvitationRow key={invitation.id} invitation={invitation} />
+          ))}
+        </tbody>
+      </table>
+    </section>
+  );
+}

@@ -1,0 +1,42 @@
+import { useQuery } from '@tanstack/react-query';
+import { Button, Skeleton } from 'antd';
+import { detailOf } from '../../api/problem';
+import { teamMembersQuery } from '../../api/team';
+import { MemberRow } from './MemberRow';
+import styles from './Team.module.css';
+
+/** Everybody in the team; an admin changes roles in their place. */
+export function MemberTable({ mayManage }: { mayManage: boolean }) {
+  const { data, error, refetch } = useQuery(teamMembersQuery);
+  if (error)
+    return (
+      <p role="alert">
+        {detailOf(error)} <Button onClick={() => void refetch()}>Try again</Button>
+      </p>
+    );
+  if (data === undefined) return <Skeleton title={false} paragraph={{ rows: 5, width: '100%' }} />;
+  return (
+    <section className={styles.section} aria-label="Members">
+      <h2>{data.length === 1 ? 'One member' : `${data.length} members`}</h2>
+      <table className={styles.table}>
+        <thead>
+          <tr>
+            <th scope="col">member</th>
+            <th scope="col">roles</th>
+            <th scope="col">since</th>
+            {mayManage && (
+              <th scope="col">
+                <span className="visually-hidden">acts</span>
+              </th>
+            )}
+          </tr>
+        </thead>
+        <tbody>
+          {data.map((member) => (
+            <MemberRow key={member.id} member={member} mayManage={mayManage} />
+          ))}
+        </tbody>
+      </table>
+    </section>
+  );
+}
