@@ -21,7 +21,7 @@ export function EditedCell({ data, value, column, children }: EditedCellProps) {
         {content}
       </Refused>
     );
-  if (!isChanged(data, id)) return content;
+  if (!isChanged(data, id)) return children ?? <span title={value ?? undefined}>{value}</span>;
   const before = textBefore(data, id);
   return (
     <span className={styles.changed} title={before === '' ? 'not saved yet' : `not saved yet; was ${before}`}>

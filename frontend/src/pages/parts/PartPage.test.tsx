@@ -1,21 +1,32 @@
 import { screen, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { describe, expect, it } from 'vitest';
+import type { Offer } from '../../api/prices';
 import type { OpAmp } from '../../api/opAmps';
+import { offerOf } from '../../test/prices';
 import { opAmp, sessionOf } from '../../test/factories';
 import { fakeServer, json, problem } from '../../test/fakeServer';
 import { renderApp } from '../../test/renderApp';
+
+const RATES = {
+  currency: 'EUR',
+  items: [{ currency: 'USD', rate: '0.50000000', dated: '2026-01-01' }],
+  missing: [],
+};
 
 function open(
   role: Parameters<typeof sessionOf>[0],
   part: OpAmp,
   plan?: 'free' | 'team',
   conditions: { id: string; name: string }[] = [],
+  offers: Offer[] = [],
 ) {
   const asked = fakeServer({
     [`GET /api/parts/${part.id}/uses`]: () => json({ conditions }),
     'GET /api/auth/me': () => json(sessionOf(role, plan)),
     [`GET /api/op-amps/${part.id}`]: () => json(part),
+    [`GET /api/parts/${part.id}/offers`]: () => json({ current: offers, history: [] }),
+    'GET /api/prices/rates': () => json(RATES),
   });
   renderApp(`/parts/${part.id}`);
   return asked;
@@ -31,6 +42,38 @@ describe('a part’s page', () => {
     const parameters = await screen.findByLabelText('Parameters');
     expect(entry(parameters, 'voltage noise e_n')).toHaveTextContent('1.1 nV/√Hzmeasured');
     expect(entry(parameters, 'current noise i_n')).toHaveTextContent('1.7 pA/√Hzdata sheet, typical');
+  });
+
+  it('says what a quantity costs, and where more pieces cost less in all', async () => {
+    const dollars = offerOf({
+      id: '12',
+      supplier: { id: '4', name: 'Tidewrack Trading' },
+      currency: 'USD',
+      minimumOrderQuantity: 1,
+      orderMultiple: 1,
+      breaks: [
+        { minimumQuantity: 1, unitPrice: '8.0000' },
+        { minimumQuantity: 120, unitPrice: '4.0000' },
+      ],
+    });
+    open('engineer', opAmp(), 'team', [], [offerOf(), dollars]);
+    const prices = await screen.findByRole('region', { name: 'Prices' });
+    expect(await within(prices).findByRole('status')).toHaveTextContent(
+      '100 pieces cost €3.10 each from Brook & Weir, €310.00 in all, delivered in 42 days. ' +
+        '120 from Tidewrack Trading cost less in all: €240.00.',
+    );
+    expect(within(prices).getByRole('row', { name: /Tidewrack Trading.*US\$8\.00/ })).toBeInTheDocument();
+    expect(within(prices).getByRole('link', { name: 'See its prices' })).toHaveAttribute(
+      'href',
+      '/prices?partId=41',
+    );
+  });
+
+  it('says where the team has no price', async () => {
+    open('purchasing', opAmp());
+    const prices = await screen.findByRole('region', { name: 'Prices' });
+    expect(await within(prices).findByText(/has no price for this part/)).toBeInTheDocument();
+    expect(within(prices).getByRole('link', { name: 'Enter one' })).toBeInTheDocument();
   });
 
   it('derives the source resistance at which the amplifier adds least', async () => {
@@ -98,6 +141,7 @@ describe('a part’s page', () => {
       'GET /api/auth/me': () => json(sessionOf('librarian')),
       'GET /api/op-amps/41': () => json(part),
       'GET /api/parts/41/uses': () => json({ conditions: [] }),
+      'GET /api/parts/41/offers': () => json({ current: [], history: [] }),
       'DELETE /api/op-amps/41': () =>
         problem(409, 'part.stale', { detail: 'Somebody changed it meanwhile.' }),
     });

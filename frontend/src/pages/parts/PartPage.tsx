@@ -6,6 +6,7 @@ import { LoadedPart } from '../../features/parts/LoadedPart';
 import { PartActions } from '../../features/parts/PartActions';
 import { PartParameters } from '../../features/parts/PartParameters';
 import { PartTitle } from '../../features/parts/PartTitle';
+import { PartPrices } from '../../features/prices/part/PartPrices';
 import styles from './PartPage.module.css';
 
 interface PartPageProps<Stored extends StoredPart> {
@@ -38,6 +39,12 @@ export function PartPage<Stored extends StoredPart>({ kind, density, derived }: 
             {density(part)}
             <h2 className={styles.heading}>What follows</h2>
             {derived(part)}
+          </section>
+          <section aria-labelledby="prices" className={styles.prices}>
+            <h2 id="prices" className={styles.heading}>
+              Prices
+            </h2>
+            <PartPrices partId={part.id} />
           </section>
           <p className={styles.caution}>
             Figures are estimates from typical data: verify on the bench and against the data sheet’s limits.

@@ -10,6 +10,7 @@ function open(part: StoredResistor) {
   fakeServer({
     'GET /api/auth/me': () => json(sessionOf('librarian')),
     'GET /api/resistors/61': () => json(part),
+    'GET /api/parts/61/offers': () => json({ current: [], history: [] }),
   });
   renderApp('/parts/resistors/61');
 }

@@ -28,6 +28,10 @@ export function PriceHistoryChart({ partId, quantity, offers }: PriceHistoryChar
     [history, lines, tokens],
   );
   if (!option) return <Skeleton title={false} paragraph={{ rows: 5 }} />;
+  if (lines.every(({ points }) => points.every(([, price]) => price === null)))
+    return (
+      <p>Its offers are in currencies without an exchange rate: enter one under “Currency and rates”.</p>
+    );
   const label = `Price at ${quantity} over time: ${lines.map(({ name }) => name).join(', ')}`;
   return <EChart option={option} label={label} height={HEIGHT} />;
 }
