@@ -82,7 +82,9 @@ describe('a list', () => {
     await page.keyboard.press('Enter');
     await page.getByText('Nothing has changed yet.').waitFor();
     await page.getByLabel('Decimal mark').click();
+    const told = page.waitForResponse((answer) => answer.request().postData()?.includes('"point"') === true);
     await page.getByTitle('point').click();
+    await told;
     await page
       .getByRole('row', { name: /Bauart/ })
       .getByText('description')

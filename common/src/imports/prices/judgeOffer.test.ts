@@ -75,8 +75,8 @@ describe('judgeOffer in the wide form', () => {
       {
         state: 'changed',
         changes: [
-          { field: 'breaks.100', old: '3.1000', new: '3.0000' },
           { field: 'breaks.10', old: '3.9000', new: null },
+          { field: 'breaks.100', old: '3.1000', new: '3.0000' },
         ],
       },
     ]);

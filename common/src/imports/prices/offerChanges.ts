@@ -4,14 +4,15 @@ import type { Doubt, FieldChange, PartValue } from '../rowVerdict.js';
 /** A price that is so many times what it was has slipped by a digit. */
 const SLIP = 8n;
 
-/** What differs between an offer and what a list makes of it, prices by the quantity such as `breaks.100`. */
+/** What differs between an offer and what a list makes of it, first the prices by the quantity such as `breaks.100`. */
 export function offerChanges(current: OfferTerms | null, next: OfferTerms): FieldChange[] {
-  const [before, after] = [
-    current === null ? new Map<string, PartValue>() : valuesOf(current),
-    valuesOf(next),
-  ];
-  const paths = new Set([...after.keys(), ...before.keys()]);
-  return [...paths]
+  const before = current === null ? new Map<string, PartValue>() : valuesOf(current);
+  const after = valuesOf(next);
+  const quantities = [...(current?.breaks ?? []), ...next.breaks].map(
+    ({ minimumQuantity }) => minimumQuantity,
+  );
+  const prices = [...new Set(quantities)].sort((one, other) => one - other).map(breakPath);
+  return [...new Set([...prices, ...after.keys()])]
     .map((field) => ({ field, old: before.get(field) ?? null, new: after.get(field) ?? null }))
     .filter((change) => change.old !== change.new);
 }

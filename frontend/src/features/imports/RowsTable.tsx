@@ -43,6 +43,9 @@ export function RowsTable({ view, rows }: RowsTableProps) {
   );
 }
 
+/** They stand in a column of their own. */
+const NAMES = ['manufacturer', 'partNumber'];
+
 interface ChangesProps {
   view: ListView;
   row: ImportRow;
@@ -53,7 +56,7 @@ function Changes({ view, row: { changes, state } }: ChangesProps) {
   return changes.map((change) => {
     const { label, old, next } = view.changeWords(change);
     if (change.old === null && state !== 'changed')
-      return (
+      return NAMES.includes(change.field) ? null : (
         <span key={change.field} className={styles.kept}>
           {label} <ins>{next}</ins>
         </span>

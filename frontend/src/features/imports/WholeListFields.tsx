@@ -3,7 +3,7 @@ import type { FieldError } from '@roothertz/common/parts';
 import { useQuery } from '@tanstack/react-query';
 import { AutoComplete, Select } from 'antd';
 import { type ReactNode, useState } from 'react';
-import { suppliersQuery } from '../../api/suppliers';
+import { suppliersQuery } from '../../api/prices';
 import { FieldMessage } from '../../components/FieldMessage';
 import { CURRENCY_CHOICES } from './priceView';
 import styles from './WholeListFields.module.css';
@@ -74,7 +74,7 @@ function SupplierName({
   value: string | null;
   onCommit: (name: string | null) => void;
 }) {
-  const { data } = useQuery(suppliersQuery());
+  const { data } = useQuery(suppliersQuery);
   const [text, setText] = useState(value ?? '');
   const commit = (name: string) => {
     setText(name);
@@ -84,7 +84,7 @@ function SupplierName({
     <AutoComplete
       aria-label="Supplier of all rows"
       placeholder="a supplier’s name"
-      options={data?.items.map(({ name }) => ({ value: name }))}
+      options={data?.map(({ name }) => ({ value: name }))}
       showSearch={{
         filterOption: (input, option) => (option?.value ?? '').toLowerCase().includes(input.toLowerCase()),
       }}

@@ -30,10 +30,7 @@ export const PRICE_VIEW: ListView = {
     { label: 'Part and supplier', options: NAMES.map(choiceOf) },
     {
       label: 'Prices',
-      options: [
-        { value: 'break:unitPrice', label: 'unit price from a quantity on' },
-        ...PRICES.map(choiceOf),
-      ],
+      options: [{ value: 'break:unitPrice', label: 'price by quantity' }, ...PRICES.map(choiceOf)],
     },
     {
       label: 'Terms',

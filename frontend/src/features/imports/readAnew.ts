@@ -9,15 +9,26 @@ interface ReadAnew {
   unsent: Said | null;
 }
 
-/** Has the file read in another dialect, and its rows checked where the columns are still known. */
-export async function readAnew(before: Import, said: Said, choice: DialectChoice): Promise<ReadAnew> {
-  const read = await mapImport(before.id, { ...choice, version: said.version });
+/**
+ * Has the file read in another dialect, and its rows checked where the columns are still known: at once where the
+ * columns stay what they are.
+ */
+export async function readAnew(
+  before: Import,
+  said: Said,
+  choice: DialectChoice,
+  version: number,
+): Promise<ReadAnew> {
+  const isKnown = (mapping: Mapping, columns: readonly ImportColumn[]) =>
+    KINDS[before.kind].view.columns.check(mapping, columns.length, said.wholeList).length === 0;
+  const keepsColumns = Object.keys(choice).every((name) => name === 'decimalMark');
+  if (keepsColumns && isKnown(said.mapping, before.columns))
+    return { answered: await tell(before, said, version, choice), unsent: null };
+  const read = await mapImport(before.id, { ...choice, version });
   const mapping = carriedMapping(before.columns, said.mapping, read.columns);
-  const carried = { mapping, wholeList: said.wholeList, version: read.version };
-  const { columns } = KINDS[read.kind].view;
-  if (columns.check(mapping, read.columns.length, said.wholeList).length > 0)
-    return { answered: read, unsent: carried };
-  return { answered: await tell(read, carried), unsent: null };
+  const carried = { mapping, wholeList: said.wholeList };
+  if (!isKnown(mapping, read.columns)) return { answered: read, unsent: carried };
+  return { answered: await tell(read, carried, read.version), unsent: null };
 }
 
 /** Columns whose heading stays keep what was said of them; the others take what is proposed. */

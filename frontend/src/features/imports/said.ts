@@ -1,18 +1,15 @@
 import type { WholeList } from '@roothertz/common/imports';
-import { type Import, type ImportDescription, mapImport } from '../../api/imports';
+import { type DialectChoice, type Import, type ImportDescription, mapImport } from '../../api/imports';
 import { type Mapping, sameMapping, startingMapping } from './mappingDraft';
 
 /** What a member says of a list: what its columns are, and what holds for all its rows. */
 export interface Said {
   mapping: Mapping;
   wholeList: WholeList;
-  /** The version of the import on which it is based. */
-  version: number;
 }
 
 export function startingSaid(imported: Import): Said {
-  const { wholeList, version } = imported;
-  return { mapping: startingMapping(imported), wholeList, version };
+  return { mapping: startingMapping(imported), wholeList: imported.wholeList };
 }
 
 /** The server has what is said, and nothing else. */
@@ -24,18 +21,19 @@ export function isKept({ mapping, wholeList }: Said, imported: Import): boolean 
   );
 }
 
-/** Tells the server, which checks the rows by it. */
-export function tell({ id, kind }: Import, { mapping, wholeList, version }: Said): Promise<Import> {
-  const stated: ImportDescription =
-    kind === 'prices'
-      ? {
-          wholeList: { supplier: wholeList.supplier ?? undefined, currency: wholeList.currency ?? undefined },
-        }
-      : {};
-  return mapImport(id, { columns: [...mapping], version, ...stated });
-}
-
-/** What stays to be said once the server has answered: nothing, or what was changed meanwhile. */
-export function stillUnsaid(standing: Said | null, sent: Said, { version }: Import): Said | null {
-  return standing === null || standing === sent ? null : { ...standing, version };
+/**
+ * Tells the server, which checks the rows by it.
+ *
+ * @param version the version of the import on which it is based
+ */
+export function tell(
+  { id, kind }: Import,
+  { mapping, wholeList: { supplier, currency } }: Said,
+  version: number,
+  choice: DialectChoice = {},
+): Promise<Import> {
+  const description: ImportDescription = { ...choice, columns: [...mapping], version };
+  if (kind !== 'prices') return mapImport(id, description);
+  const wholeList = { supplier: supplier ?? undefined, currency: currency ?? undefined };
+  return mapImport(id, { ...description, wholeList });
 }

@@ -1,6 +1,6 @@
 import type { WholeList } from '@roothertz/common/imports';
 import { useMutation, type UseMutationResult, useQueryClient } from '@tanstack/react-query';
-import { useEffect, useMemo, useState } from 'react';
+import { useEffect, useMemo, useRef, useState } from 'react';
 import { type DialectChoice, type Import, importKey } from '../../api/imports';
 import { ApiProblem } from '../../api/problem';
 import { useDebounced } from '../../components/useDebounced';
@@ -8,7 +8,7 @@ import { isDescribable } from './importWords';
 import { KINDS } from './kinds';
 import type { Mapping } from './mappingDraft';
 import { readAnew } from './readAnew';
-import { isKept, type Said, startingSaid, stillUnsaid, tell } from './said';
+import { isKept, type Said, startingSaid, tell } from './said';
 import { useTakeImport } from './useImport';
 
 const PAUSE_MS = 500;
@@ -23,7 +23,7 @@ export function useMapping(imported: Import, mayEdit: boolean) {
     () => KINDS[kind].view.columns.check(said.mapping, columns.length, said.wholeList),
     [kind, said, columns],
   );
-  const { check, overrule } = useTelling(imported, said, setDraft);
+  const { check, overrule } = useTelling(imported, said, draft, setDraft);
   const isPending = check.isPending || overrule.isPending;
   useAutomaticCheck({ imported, said, isOff: !mayEdit || errors.length > 0 || isPending }, check);
   return {
@@ -46,9 +46,11 @@ export type ImportMapping = ReturnType<typeof useMapping>;
 function useTelling(
   imported: Import,
   said: Said,
+  draft: Said | null,
   setDraft: React.Dispatch<React.SetStateAction<Said | null>>,
 ) {
   const { id } = imported;
+  const versionRef = useBaseVersionRef(imported, draft);
   const take = useTakeImport();
   const queryClient = useQueryClient();
   const options = {
@@ -61,21 +63,32 @@ function useTelling(
   };
   const check = useMutation({
     ...options,
-    mutationFn: (sent: Said) => tell(imported, sent),
+    mutationFn: (sent: Said) => tell(imported, sent, versionRef.current),
     onSuccess: (answered, sent) => {
+      versionRef.current = answered.version;
       take(answered);
-      setDraft((standing) => stillUnsaid(standing, sent, answered));
+      setDraft((standing) => (standing === sent ? null : standing));
     },
   });
   const overrule = useMutation({
     ...options,
-    mutationFn: (choice: DialectChoice) => readAnew(imported, said, choice),
+    mutationFn: (choice: DialectChoice) => readAnew(imported, said, choice, versionRef.current),
     onSuccess: ({ answered, unsent }) => {
+      versionRef.current = answered.version;
       take(answered);
       setDraft(unsent);
     },
   });
   return { check, overrule };
+}
+
+/** The version on which the next thing said is based: what others say while a draft stands doesn't count for it. */
+function useBaseVersionRef({ version }: Import, draft: Said | null) {
+  const baseRef = useRef(version);
+  useEffect(() => {
+    if (draft === null) baseRef.current = Math.max(baseRef.current, version);
+  }, [draft, version]);
+  return baseRef;
 }
 
 interface Standing {
