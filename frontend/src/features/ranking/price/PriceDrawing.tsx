@@ -108,9 +108,15 @@ function Label({ point, geometry: { xOf, yOf, left, right, top }, tokens }: Labe
       strokeLinejoin="round"
       paintOrder="stroke"
     >
-      {point.partNumber}
+      {shortened(point.partNumber)}
     </text>
   );
+}
+
+const LONGEST = 20;
+
+function shortened(text: string): string {
+  return text.length > LONGEST ? `${text.slice(0, LONGEST - 1)}…` : text;
 }
 
 type AxesProps = Pick<PriceDrawingProps, 'plot' | 'geometry' | 'tokens'>;

@@ -3,6 +3,7 @@ import { Link } from 'react-router-dom';
 import type { WholeStage } from '../../../api/stages';
 import { priceText } from '../priceWords';
 import budgetStyles from '../PartBudget.module.css';
+import styles from './StageParts.module.css';
 import { stageParts, type StagePart } from './stagePartRows';
 
 interface StagePartsProps {
@@ -19,7 +20,7 @@ export function StageParts({ stage, quantity, onTake }: StagePartsProps) {
       <h2 className={budgetStyles.heading}>
         Parts of a stage, priced for {quantity === 1 ? '1 stage' : `${quantity} stages`}
       </h2>
-      <table className={budgetStyles.budget}>
+      <table className={`${budgetStyles.budget} ${styles.parts}`}>
         <thead className="visually-hidden">
           <tr>
             <th>part</th>
@@ -50,7 +51,7 @@ export function StageParts({ stage, quantity, onTake }: StagePartsProps) {
 function PartRow({ symbols, name, path, pieces, price }: StagePart) {
   return (
     <tr>
-      <th scope="row">
+      <th scope="row" className={styles.name}>
         {symbols && `${symbols} `}
         <Link to={path}>{name}</Link>
       </th>
