@@ -26,7 +26,21 @@ describe('describeChange', () => {
     const to = { name: 'Geophone', stage: { gain: 10, network: {} } };
     expect(describeChange(from, to)).toEqual([
       { field: 'stage gain', from: '100', to: '10' },
-      { field: 'stage network minimum total', from: '500', to: null },
+      { field: 'stage network minimum total', from: '500 Ω', to: null },
+    ]);
+  });
+
+  it('writes physical values with their units, and no two of them alike', () => {
+    const from = {
+      amplifier: { voltageNoise: 1.2345e-9 },
+      band: { upper: 20_000 },
+      ambientTemperature: 298.15,
+    };
+    const to = { amplifier: { voltageNoise: 1.2346e-9 }, band: { upper: 100 }, ambientTemperature: 233.15 };
+    expect(describeChange(from, to)).toEqual([
+      { field: 'amplifier voltage noise', from: '1.2345 nV/√Hz', to: '1.2346 nV/√Hz' },
+      { field: 'band upper', from: '20 kHz', to: '100 Hz' },
+      { field: 'ambient temperature', from: '25 °C', to: '−40 °C' },
     ]);
   });
 

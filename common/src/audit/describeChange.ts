@@ -1,3 +1,6 @@
+import { formatEditable, type QuantityKind } from '../units/index.js';
+import { quantityKindOf } from './quantityKindOf.js';
+
 /** One line of a change; null = nothing stood or stands there. */
 export interface FieldChange {
   /** In words: `lead time days`. */
@@ -7,8 +10,8 @@ export interface FieldChange {
 }
 
 /**
- * What a recorded change changed, field by field, in words. Fields that stayed as they were are left out, and so are ids,
- * which say nothing to a reader.
+ * What a recorded change changed, field by field, in words; physical values with their units. Fields that stayed as
+ * they were are left out, and so are ids, which say nothing to a reader.
  *
  * @param from what stood before; null = nothing
  * @param to what stands since; null = nothing
@@ -27,10 +30,10 @@ function flattened(values: object | null, path: readonly string[] = []): Map<str
   const entries = Object.entries(values ?? {}).filter(([field]) => !/^id$|Ids?$/.test(field));
   return new Map(
     entries.flatMap(([field, value]: [string, unknown]): [string, string][] => {
-      const place = [...path, fieldWords(field)];
+      const place = [...path, field];
       if (isValues(value)) return [...flattened(value, place)];
-      const words = valueWords(value);
-      return words === null ? [] : [[place.join(' '), words]];
+      const words = valueWords(value, quantityKindOf(place));
+      return words === null ? [] : [[place.map(fieldWords).join(' '), words]];
     }),
   );
 }
@@ -40,11 +43,11 @@ function fieldWords(field: string): string {
   return field.replace(/[A-Z]/g, (letter) => ` ${letter.toLowerCase()}`);
 }
 
-function valueWords(value: unknown): string | null {
+function valueWords(value: unknown, kind?: QuantityKind): string | null {
   if (value === null || value === undefined || value === '') return null;
   if (typeof value === 'boolean') return value ? 'yes' : 'no';
   if (Array.isArray(value)) return value.length === 0 ? null : value.map(itemWords).join(', ');
-  return String(value as string | number);
+  return typeof value === 'number' && kind ? formatEditable(value, kind) : String(value as string | number);
 }
 
 function itemWords(item: unknown): string {

@@ -1,4 +1,5 @@
-import { actorWords, AUDIT_ACTIONS, describeChange } from '@roothertz/common/audit';
+import { actorWords, AUDIT_ACTIONS, describeChange, type FieldChange } from '@roothertz/common/audit';
+import { Fragment } from 'react';
 import type { AuditEntry } from '../../api/audit';
 import { moment } from '../../components/moments';
 import { ObjectName } from './ObjectName';
@@ -38,6 +39,7 @@ export function TrailTable({ entries }: { entries: readonly AuditEntry[] }) {
 function Changes({ entry: { from, to } }: { entry: AuditEntry }) {
   const changes = describeChange(from, to);
   if (changes.length === 0) return <span className={styles.muted}>–</span>;
+  if (from === null || to === null) return <Whole changes={changes} isGone={to === null} />;
   return (
     <ul className={styles.changes}>
       {changes.map((change) => (
@@ -49,5 +51,20 @@ function Changes({ entry: { from, to } }: { entry: AuditEntry }) {
         </li>
       ))}
     </ul>
+  );
+}
+
+/** What is new, or gone, on one line. */
+function Whole({ changes, isGone }: { changes: readonly FieldChange[]; isGone: boolean }) {
+  const Value = isGone ? 'del' : 'ins';
+  return (
+    <p className={styles.changes}>
+      {changes.map(({ field, from, to }, index) => (
+        <Fragment key={field}>
+          {index > 0 && ', '}
+          <span className={styles.muted}>{field}</span> <Value>{isGone ? from : to}</Value>
+        </Fragment>
+      ))}
+    </p>
   );
 }
