@@ -238,6 +238,12 @@ describe('imports of prices', () => {
     expect(body.counts).toMatchObject({ changed: 2 });
   });
 
+  it('have at most 50 000 rows', async () => {
+    const list = (rows: number) => `maker,mpn,1\n${'Vireo,VR-1108D,4\n'.repeat(rows)}`;
+    const { body } = await sendList(purchasing, 'prices', list(50_001)).expect(413);
+    expect(body).toMatchObject({ code: 'import.too-large', detail: expect.stringContaining('50 000 rows') });
+  });
+
   it('are for purchasing alone, as lists of parts are for librarians', async () => {
     const list = 'maker,mpn,1\nVireo,VR-1108D,4\n';
     const { id } = await checkedList(purchasing, 'prices', list, LARKHOLM);
