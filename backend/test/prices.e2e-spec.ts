@@ -101,6 +101,7 @@ describe('the grid of prices', () => {
         missing: 1,
         usedInConditions: 2,
       });
+      expect(names(await grid(`partId=${without}`))).toEqual(['P-WITHOUT']);
       expect((await grid('usedInConditions=true', stranger)).total).toBe(0);
       await admin.agent.get('/api/prices?usedInConditions=1').expect(400);
     });

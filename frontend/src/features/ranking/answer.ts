@@ -4,7 +4,7 @@ import { formatQuantity } from '@roothertz/common/units';
 import type { Ranking, RankingItem } from '../../api/ranking';
 import { percentText, sharesOf } from '../../components/charts/shares';
 import { noiseKind, rmsText } from './noiseUnit';
-import { priceText } from './priceWords';
+import { priceText } from '../../components/priceText';
 
 /** A piece of a sentence; figures that matter are strong. */
 export interface Piece {

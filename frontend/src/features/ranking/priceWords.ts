@@ -1,4 +1,5 @@
 import type { RankingItem } from '../../api/ranking';
+import { decimalsOf } from '../../components/priceText';
 
 type Price = NonNullable<RankingItem['unitPrice']>;
 
@@ -6,19 +7,6 @@ type Price = NonNullable<RankingItem['unitPrice']>;
 export function amountText({ amount }: Pick<Price, 'amount'>): string {
   const maximumFractionDigits = decimalsOf(amount);
   return new Intl.NumberFormat('en-GB', { minimumFractionDigits: 2, maximumFractionDigits }).format(
-    Number(amount),
-  );
-}
-
-/** Below one unit of the currency, fractions of a hundredth matter. */
-function decimalsOf(amount: string): number {
-  return Number(amount) < 1 ? 4 : 2;
-}
-
-/** The price with its currency, such as "€1.85". */
-export function priceText({ amount, currency }: Pick<Price, 'amount' | 'currency'>): string {
-  const maximumFractionDigits = decimalsOf(amount);
-  return new Intl.NumberFormat('en-GB', { style: 'currency', currency, maximumFractionDigits }).format(
     Number(amount),
   );
 }

@@ -123,6 +123,25 @@ describe('the prices page', () => {
     await waitFor(() => expect(bodies('POST /api/offers/confirm/undo')).toEqual([{ ids: ['11'] }]));
   });
 
+  it('keeps the team’s exchange rates, and says which can’t be read', async () => {
+    const rates = { currency: 'EUR', items: [{ currency: 'USD', rate: '0.91200000', dated: '2026-11-01' }] };
+    const { bodies } = await open('purchasing', {
+      'GET /api/prices/rates': () => json({ ...rates, missing: ['CHF'] }),
+      'PUT /api/prices/rates': () => json({ ...rates, missing: [] }),
+    });
+    await userEvent.click(screen.getByRole('button', { name: 'Currency and rates' }));
+    expect(await screen.findByText(/Offers in CHF don’t count/)).toBeInTheDocument();
+    await userEvent.type(screen.getByLabelText('1 CHF ='), '1,07');
+    expect(screen.getByText(/another decimal mark can be misread/)).toBeInTheDocument();
+    expect(screen.getByRole('button', { name: 'Save the rates' })).toBeDisabled();
+    await userEvent.clear(screen.getByLabelText('1 CHF ='));
+    await userEvent.type(screen.getByLabelText('1 CHF ='), '1.07');
+    await userEvent.click(screen.getByRole('button', { name: 'Save the rates' }));
+    await waitFor(() =>
+      expect(bodies('PUT /api/prices/rates')).toEqual([{ rates: [{ currency: 'CHF', rate: '1.07' }] }]),
+    );
+  });
+
   it('narrows to what calls for a look, which the address keeps', async () => {
     const { asked, router } = await open('purchasing');
     await userEvent.click(screen.getByRole('button', { name: '5 without a price' }));

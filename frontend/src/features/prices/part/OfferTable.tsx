@@ -1,7 +1,7 @@
 import type { Offer } from '../../../api/prices';
 import { formatDay } from '../../../components/formatDay';
+import { priceText } from '../../../components/priceText';
 import { STATE_LABELS } from '../pricesView';
-import { moneyText } from './costWords';
 import styles from './PartPrices.module.css';
 
 /** Each offer with its prices and what goes with them. */
@@ -38,7 +38,8 @@ function OfferRow({ offer }: { offer: Offer }) {
       <td>
         {breaks.map(({ minimumQuantity, unitPrice }) => (
           <span key={minimumQuantity} className={styles.break}>
-            <span className={styles.quiet}>{minimumQuantity}:</span> {moneyText(unitPrice, currency)}
+            <span className={styles.quiet}>{minimumQuantity}:</span>{' '}
+            {priceText({ amount: unitPrice, currency })}
           </span>
         ))}
       </td>

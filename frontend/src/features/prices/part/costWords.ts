@@ -1,14 +1,7 @@
 import type { Order, PriceAtQuantity } from '@roothertz/common/prices';
+import { priceText } from '../../../components/priceText';
 
 const plain = new Intl.NumberFormat('en-GB');
-
-/** An amount with its currency, such as "€4.69"; below one unit, fractions of a hundredth matter. */
-export function moneyText(amount: string, currency: string): string {
-  const maximumFractionDigits = Number(amount) < 1 ? 4 : 2;
-  return new Intl.NumberFormat('en-GB', { style: 'currency', currency, maximumFractionDigits }).format(
-    Number(amount),
-  );
-}
 
 /** What a quantity costs in a sentence, and in another that more pieces cost less in all where they do. */
 export function costWords(price: PriceAtQuantity, quantity: number, currency: string): string {
@@ -20,16 +13,16 @@ export function costWords(price: PriceAtQuantity, quantity: number, currency: st
 function orderWords(order: Order, quantity: number, currency: string): string {
   const { offer, orderQuantity, unitPrice, total } = order;
   const pieces = `${plain.format(quantity)} ${quantity === 1 ? 'piece costs' : 'pieces cost'}`;
-  const each = `${moneyText(unitPrice, currency)} each`;
+  const each = `${priceText({ amount: unitPrice, currency })} each`;
   const ordered =
     orderQuantity === quantity ? 'in all' : `in all, for ${plain.format(orderQuantity)} have to be bought`;
   const wait = offer.leadTimeDays === null ? '' : `, delivered in ${days(offer.leadTimeDays)}`;
-  return `${pieces} ${each} from ${offer.supplier}, ${moneyText(total, currency)} ${ordered}${wait}.`;
+  return `${pieces} ${each} from ${offer.supplier}, ${priceText({ amount: total, currency })} ${ordered}${wait}.`;
 }
 
 function cheaperWords({ offer, orderQuantity, total }: Order, currency: string): string {
   const pieces = plain.format(orderQuantity);
-  return `${pieces} from ${offer.supplier} cost less in all: ${moneyText(total, currency)}.`;
+  return `${pieces} from ${offer.supplier} cost less in all: ${priceText({ amount: total, currency })}.`;
 }
 
 function days(count: number): string {

@@ -3,7 +3,7 @@ import { formatQuantity } from '@roothertz/common/units';
 import type { ChartHandle } from '../../../components/charts/EChart';
 import { useTokens } from '../../../components/useTokens';
 import mapStyles from '../map/QuietestMap.module.css';
-import { priceText } from '../priceWords';
+import { priceText } from '../../../components/priceText';
 import { PriceDrawing } from './PriceDrawing';
 import { PRICE_HEIGHT, PRICE_WIDTH, priceGeometry } from './priceGeometry';
 import type { PricePlot, PricePoint } from './pricePlot';

@@ -1,7 +1,7 @@
 import { Button } from 'antd';
 import { Link } from 'react-router-dom';
 import type { WholeStage } from '../../../api/stages';
-import { priceText } from '../priceWords';
+import { priceText } from '../../../components/priceText';
 import budgetStyles from '../PartBudget.module.css';
 import styles from './StageParts.module.css';
 import { stageParts, type StagePart } from './stagePartRows';

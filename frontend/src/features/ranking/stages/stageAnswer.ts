@@ -5,7 +5,7 @@ import type { Piece } from '../answer';
 import type { AnswerWords } from '../AnswerBlock';
 import { emptyAdvice } from '../exclusionWords';
 import { rmsText } from '../noiseUnit';
-import { priceText } from '../priceWords';
+import { priceText } from '../../../components/priceText';
 import { gainFigure, gainText, nearestGainAdvice, wantedGain } from './gainWords';
 import type { ShownStages } from './useStages';
 

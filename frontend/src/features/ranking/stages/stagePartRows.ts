@@ -1,6 +1,6 @@
 import { formatQuantity } from '@roothertz/common/units';
 import type { WholeStage } from '../../../api/stages';
-import { priceText } from '../priceWords';
+import { priceText } from '../../../components/priceText';
 
 /** A part of a stage with what a piece of it costs. */
 export interface StagePart {
