@@ -1,6 +1,7 @@
 import type { Billing } from '../../api/billing';
 import { Facts } from '../../components/Facts';
-import { dayText, moneyText } from './moneyText';
+import { formatDay } from '../../components/formatDay';
+import { moneyText } from './moneyText';
 
 /** Seats, price and next invoice on lines. */
 export function BillingFacts({ billing }: { billing: Billing }) {
@@ -10,7 +11,7 @@ export function BillingFacts({ billing }: { billing: Billing }) {
   if (payment) entries.push({ term: 'Price', value: `${moneyText(payment.seatPrice)} a seat and month` });
   if (payment?.next) entries.push({ term: 'Next invoice', value: nextText(payment.next) });
   if (endsAt !== null)
-    entries.push({ term: standing === 'cancelled' ? 'Ended on' : 'Ends on', value: dayText(endsAt) });
+    entries.push({ term: standing === 'cancelled' ? 'Ended on' : 'Ends on', value: formatDay(endsAt) });
   return <Facts label="Plan" entries={entries} />;
 }
 
@@ -19,5 +20,5 @@ function seatsText(seats: number, used: number): string {
 }
 
 function nextText({ at, ...money }: NonNullable<NonNullable<Billing['payment']>['next']>): string {
-  return `${moneyText(money)} on ${dayText(at)}`;
+  return `${moneyText(money)} on ${formatDay(at)}`;
 }

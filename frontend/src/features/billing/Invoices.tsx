@@ -1,6 +1,7 @@
 import type { Invoice } from '../../api/billing';
+import { formatDay } from '../../components/formatDay';
 import styles from './Billing.module.css';
-import { dayText, moneyText } from './moneyText';
+import { moneyText } from './moneyText';
 
 const STATUS_WORDS: Partial<Record<string, string>> = {
   open: 'to be paid',
@@ -47,7 +48,7 @@ function InvoiceRow({ invoice }: { invoice: Invoice }) {
           </a>
         )}
       </td>
-      <td>{dayText(createdAt)}</td>
+      <td>{formatDay(createdAt)}</td>
       <td className={status === 'open' ? styles.open : undefined}>{STATUS_WORDS[status] ?? status}</td>
       <td>{moneyText(invoice)}</td>
     </tr>

@@ -9,10 +9,3 @@ export function moneyText({ amount, currency }: Money): string {
 export function monthlyText({ amount, currency }: Money, seats: number): string {
   return moneyText({ amount: String(Number(amount) * seats), currency });
 }
-
-const DAY = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long' });
-
-/** A moment's day, such as "15 December 2026". */
-export function dayText(moment: string): string {
-  return DAY.format(new Date(moment));
-}

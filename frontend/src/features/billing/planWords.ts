@@ -1,6 +1,6 @@
 import { daysLeft, GRACE_DAYS } from '@roothertz/common/access';
 import type { Billing } from '../../api/billing';
-import { dayText } from './moneyText';
+import { formatDay } from '../../components/formatDay';
 
 type Stated = Pick<Billing, 'plan' | 'standing' | 'standingUntil'> &
   Partial<Pick<Billing, 'seats' | 'endsAt'>>;
@@ -9,7 +9,7 @@ type Stated = Pick<Billing, 'plan' | 'standing' | 'standingUntil'> &
 export function planHeadline({ plan, standing, standingUntil, seats, endsAt }: Stated): string {
   if (standing === 'active' && plan === 'free') return 'Free plan';
   if (standing === 'active')
-    return `Team plan${seatsText(seats)}${endsAt ? `, until ${dayText(endsAt)}` : ''}`;
+    return `Team plan${seatsText(seats)}${endsAt ? `, until ${formatDay(endsAt)}` : ''}`;
   if (standing === 'trial') return `Team plan on trial: ${daysText(standingUntil)} left`;
   if (standing === 'trial-over') return 'Free plan: the trial is over';
   if (standing === 'past-due') return 'Team plan: a payment is missing';
@@ -37,7 +37,7 @@ export function planMeaning(billing: Stated): string {
   if (plan === 'free')
     return 'One person, the curated library and the whole ranking. A library of the team’s own needs the Team plan.';
   return endsAt
-    ? `The plan is cancelled and ends on ${dayText(endsAt)}. The team is read-only from then on, and nothing is deleted.`
+    ? `The plan is cancelled and ends on ${formatDay(endsAt)}. The team is read-only from then on, and nothing is deleted.`
     : 'Everything is included.';
 }
 
@@ -47,5 +47,5 @@ export function daysText(until: string | null, now = new Date()): string {
 }
 
 function untilText(until: string | null): string {
-  return until === null ? 'further notice' : dayText(until);
+  return until === null ? 'further notice' : formatDay(until);
 }

@@ -72,7 +72,7 @@ describe('the plan page', () => {
     open(billing());
     expect(await screen.findByRole('heading', { name: 'Team plan, 8 seats' })).toBeInTheDocument();
     const facts = screen.getByLabelText('Plan');
-    for (const text of ['5 of 8 taken', '€19.00 a seat and month', '€152.00 on 21 December 2026'])
+    for (const text of ['5 of 8 taken', '€19.00 a seat and month', '€152.00 on 21 Dec 2026'])
       expect(within(facts).getByText(text)).toBeInTheDocument();
     expect(screen.getByRole('link', { name: 'R-0001' })).toHaveAttribute('href', 'https://pay.example/in_1');
   });
