@@ -24,6 +24,7 @@ const BACKEND_FEATURES = [
   'notices',
 ];
 const FRONTEND_FEATURES = [
+  'account',
   'audit',
   'billing',
   'session',

@@ -18,7 +18,7 @@ describe('the session', () => {
     await screenshot(page, 'sign-in');
     await signIn(page, 'engineer', '/account');
     expect(new URL(page.url()).pathname).toBe('/account');
-    await page.getByLabel('Account', { exact: true }).getByText(emailOf('engineer')).waitFor();
+    await page.getByRole('list', { name: 'Account' }).getByText(emailOf('engineer')).waitFor();
     await screenshot(page, 'account');
     await page.getByRole('button', { name: 'Sign out' }).click();
     await page.getByRole('heading', { name: 'Sign in' }).waitFor();

@@ -2,6 +2,7 @@ import { createBrowserRouter, Navigate, type RouteObject } from 'react-router-do
 import { PageSkeleton } from './components/PageSkeleton';
 import { partsRoutes } from './pages/parts/partsRoutes';
 import { teamRoutes } from './pages/team/teamRoutes';
+import { entryRoutes } from './pages/sign-in/entryRoutes';
 import { ErrorPage } from './shell/ErrorPage';
 import { START_PAGE } from './shell/navigation';
 import { NotFoundPage } from './shell/NotFoundPage';
@@ -35,18 +36,7 @@ const pages: RouteObject[] = [
 ];
 
 export const routes: RouteObject[] = [
-  {
-    path: '/sign-in',
-    lazy: async () => ({ Component: (await import('./pages/sign-in/SignInPage')).SignInPage }),
-    errorElement: <ErrorPage />,
-    HydrateFallback: PageSkeleton,
-  },
-  {
-    path: '/invitations/:token',
-    lazy: async () => ({ Component: (await import('./pages/invitation/InvitationPage')).InvitationPage }),
-    errorElement: <ErrorPage />,
-    HydrateFallback: PageSkeleton,
-  },
+  { errorElement: <ErrorPage />, HydrateFallback: PageSkeleton, children: entryRoutes },
   {
     path: '/',
     element: <RequireSession />,

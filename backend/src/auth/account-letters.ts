@@ -1,7 +1,7 @@
 import type { Letter } from '../mail/letter.js';
 
 const NOT_YOU = 'If it wasn’t you, you need do nothing: without this link nothing happens.';
-const TELL_ADMIN = 'If it wasn’t you, set a new password at once: use “Forgotten?” beside the password.';
+const TELL_ADMIN = 'If it wasn’t you, set a new password at once: use “Forgotten?” below the password.';
 
 export function confirmSignUpLetter(name: string, token: string): Letter {
   return {
@@ -20,7 +20,7 @@ export function accountExistsLetter(): Letter {
     subject: 'You have a Roothertz account already',
     paragraphs: [
       'Somebody, most likely you, has asked for a Roothertz account with this address. There is one already, and nothing has changed.',
-      'Sign in as always; if you don’t know the password any more, use “Forgotten?” beside it.',
+      'Sign in as always; if you don’t know the password any more, use “Forgotten?” below it.',
     ],
     link: { label: 'Sign in', path: '/sign-in' },
     remark: 'If it wasn’t you, you need do nothing.',

@@ -42,3 +42,9 @@ export function takeSession(queryClient: QueryClient, session: Session | null): 
   queryClient.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== SESSION_KEY[0] });
   queryClient.setQueryData(SESSION_KEY, session);
 }
+
+/** Goes on with a new session of the same member: what the page shows stays, and is loaded anew behind it. */
+export function resumeSession(queryClient: QueryClient, session: Session): void {
+  queryClient.setQueryData(SESSION_KEY, session);
+  void queryClient.invalidateQueries({ predicate: ({ queryKey }) => queryKey[0] !== SESSION_KEY[0] });
+}

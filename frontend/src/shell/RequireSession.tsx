@@ -1,19 +1,23 @@
 import { useQuery } from '@tanstack/react-query';
+import { useState } from 'react';
 import { Navigate, useLocation } from 'react-router-dom';
-import { sessionQuery } from '../api/session';
+import { type Session, sessionQuery } from '../api/session';
 import { PageSkeleton } from '../components/PageSkeleton';
 import { MemberContext } from '../components/useMember';
+import { SignInAgain } from '../features/session/SignInAgain';
 import { AppShell } from './AppShell';
 import { UnreachableNotice } from './UnreachableNotice';
 
-/** Everything behind the sign-in. */
+/** Everything behind the sign-in; when the session ends meanwhile, the page stays and the sign-in comes over it. */
 export function RequireSession() {
   const { data: session, error } = useQuery(sessionQuery);
+  const member = useLastMember(session);
   const { pathname, search } = useLocation();
-  if (session) {
+  if (member) {
     return (
-      <MemberContext value={session}>
+      <MemberContext value={member}>
         <AppShell />
+        {session === null && <SignInAgain />}
       </MemberContext>
     );
   }
@@ -26,4 +30,11 @@ export function RequireSession() {
       <PageSkeleton />
     </>
   );
+}
+
+/** Who is signed in, or was until the session ended. */
+function useLastMember(session: Session | null | undefined): Session | null {
+  const [last, setLast] = useState<Session | null>(null);
+  if (session && session !== last) setLast(session);
+  return session ?? last;
 }

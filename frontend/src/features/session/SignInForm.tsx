@@ -1,13 +1,21 @@
+import type { QueryClient } from '@tanstack/react-query';
 import { Alert, Button, Form, Input } from 'antd';
-import type { Credentials } from '../../api/session';
+import { Link } from 'react-router-dom';
+import type { Credentials, Session } from '../../api/session';
 import { signInMessage } from './signInMessage';
 import { useSignIn } from './useSignIn';
 
-export function SignInForm() {
-  const { signIn, isPending, error, wait } = useSignIn();
+interface SignInFormProps {
+  /** What is done with the session; left out = all that was loaded before it is forgotten. */
+  take?: (queryClient: QueryClient, session: Session) => void;
+}
+
+export function SignInForm({ take }: SignInFormProps) {
+  const { signIn, isPending, error, wait } = useSignIn(take);
   const message = signInMessage(error, wait);
   return (
     <Form<Credentials>
+      name="sign-in"
       layout="vertical"
       requiredMark={false}
       onFinish={(credentials) => signIn(credentials)}
@@ -29,6 +37,11 @@ export function SignInForm() {
         name="password"
         label="Password"
         rules={[{ required: true, message: 'Your password is needed' }]}
+        extra={
+          <Link to="/reset-password" target={take && '_blank'}>
+            Forgotten?
+          </Link>
+        }
       >
         <Input.Password autoComplete="current-password" />
       </Form.Item>

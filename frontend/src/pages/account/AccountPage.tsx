@@ -1,7 +1,13 @@
 import { PLAN_LABELS, ROLE_LABELS } from '@roothertz/common/access';
+import type { ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 import { Facts } from '../../components/Facts';
 import { useMember } from '../../components/useMember';
+import { CloseAccount } from '../../features/account/CloseAccount';
+import { MailPreferenceList } from '../../features/account/MailPreferenceList';
+import { OpenSessions } from '../../features/account/OpenSessions';
+import { OwnFacts } from '../../features/account/OwnFacts';
+import { OwnTeams } from '../../features/account/OwnTeams';
 import { SignOutButton } from '../../features/session/SignOutButton';
 import { ThemeChooser } from '../../features/session/ThemeChooser';
 import styles from './AccountPage.module.css';
@@ -13,19 +19,39 @@ export function AccountPage() {
       <title>Account · Roothertz</title>
       <h1>{user.name}</h1>
       <Facts
-        label="Account"
+        label="Standing"
         entries={[
-          { term: 'E-mail', value: user.email },
           { term: 'Team', value: team.name },
           { term: 'Roles', value: roles.map((role) => ROLE_LABELS[role]).join(', ') },
           { term: 'Plan', value: <Link to="/team/plan">{PLAN_LABELS[plan]}</Link> },
         ]}
       />
-      <section className={styles.section}>
-        <h2>Theme in this browser</h2>
-        <ThemeChooser />
-      </section>
+      <OwnFacts />
       <SignOutButton />
+      <Section title="Theme in this browser">
+        <ThemeChooser />
+      </Section>
+      <Section title="E-mails">
+        <MailPreferenceList />
+      </Section>
+      <Section title="Teams">
+        <OwnTeams />
+      </Section>
+      <Section title="Open sessions">
+        <OpenSessions />
+      </Section>
+      <Section title="Close the account">
+        <CloseAccount />
+      </Section>
     </div>
+  );
+}
+
+function Section({ title, children }: { title: string; children: ReactNode }) {
+  return (
+    <section className={styles.section}>
+      <h2>{title}</h2>
+      {children}
+    </section>
   );
 }

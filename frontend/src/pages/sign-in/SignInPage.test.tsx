@@ -2,6 +2,7 @@ import { screen, waitFor } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { describe, expect, it } from 'vitest';
 import { sessionOf } from '../../test/factories';
+import { ACCOUNT } from '../../test/account';
 import { fakeServer, json, problem } from '../../test/fakeServer';
 import { renderApp } from '../../test/renderApp';
 
@@ -14,12 +15,16 @@ async function signIn() {
 
 describe('signing in', () => {
   it('is asked of who opens a page without a session, and leads to that page', async () => {
-    const asked = fakeServer({ ...NOBODY, 'POST /api/auth/sign-in': () => json(sessionOf('librarian')) });
+    const asked = fakeServer({
+      ...ACCOUNT,
+      ...NOBODY,
+      'POST /api/auth/sign-in': () => json(sessionOf('librarian')),
+    });
     const router = renderApp('/account?from=mail');
     await signIn();
     expect(await screen.findByRole('heading', { name: 'Ada Merrow' })).toBeInTheDocument();
     expect(router.state.location).toMatchObject({ pathname: '/account', search: '?from=mail' });
-    expect(asked.at(-1)?.body).toEqual({
+    expect(asked.find(({ route }) => route === 'POST /api/auth/sign-in')?.body).toEqual({
       email: 'librarian@tarnfield.example',
       password: 'quiet-bench-2026',
     });
@@ -62,6 +67,7 @@ describe('the shell', () => {
   it('says that the server is away and shows the page when it is back', async () => {
     let isAway = true;
     fakeServer({
+      ...ACCOUNT,
       'GET /api/auth/me': () => (isAway ? problem(503, 'database.unavailable') : json(sessionOf('reviewer'))),
     });
     renderApp('/account');
@@ -79,7 +85,7 @@ describe('the shell', () => {
   });
 
   it('keeps the chosen theme', async () => {
-    fakeServer({ 'GET /api/auth/me': () => json(sessionOf('reviewer')) });
+    fakeServer({ ...ACCOUNT, 'GET /api/auth/me': () => json(sessionOf('reviewer')) });
     renderApp('/account');
     await userEvent.click(await screen.findByRole('radio', { name: 'Dark' }));
     expect(document.documentElement).toHaveAttribute('data-theme', 'dark');

@@ -1,0 +1,16 @@
+import { Form, Input } from 'antd';
+import { needed } from './fieldRules';
+
+interface PasswordItemProps {
+  name: string;
+  label: string;
+}
+
+/** The password that is asked for again before something important. */
+export function PasswordItem({ name, label }: PasswordItemProps) {
+  return (
+    <Form.Item name={name} label={label} rules={needed('Your password is needed')}>
+      <Input.Password autoComplete="current-password" />
+    </Form.Item>
+  );
+}
