@@ -7,5 +7,7 @@ export default defineConfig({
     fileParallelism: false,
     testTimeout: 120_000,
     hookTimeout: 60_000,
+    // A busy machine takes longer than the usual second to answer and draw.
+    expect: { poll: { timeout: 15_000 } },
   },
 });
