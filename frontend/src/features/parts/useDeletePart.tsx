@@ -1,7 +1,7 @@
-import { hashKey, useMutation, useQueryClient } from '@tanstack/react-query';
+import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { App, Button } from 'antd';
 import { useNavigate } from 'react-router-dom';
-import { partKey, partUsesQuery, type StoredPart } from '../../api/parts';
+import type { StoredPart } from '../../api/parts';
 import { detailOf } from '../../api/problem';
 import type { KindOfPart } from './kindOfPart';
 import { draftOf } from './partDraft';
@@ -34,8 +34,7 @@ export function useDeletePart({ catalogue, reader, create, path }: KindOfPart, p
         placement: 'bottomRight',
         actions: <Button onClick={() => void undo()}>Undo</Button>,
       });
-      const gone = [partKey(reader, part.id), partUsesQuery(part.id).queryKey].map(hashKey);
-      await queryClient.invalidateQueries({ predicate: ({ queryHash }) => !gone.includes(queryHash) });
+      await queryClient.invalidateQueries({ predicate: ({ queryKey }) => !queryKey.includes(part.id) });
     },
   });
 }
