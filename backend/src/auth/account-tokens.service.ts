@@ -1,9 +1,10 @@
 import { createHash, randomBytes } from 'node:crypto';
-import { Injectable } from '@nestjs/common';
+import { Injectable, Logger } from '@nestjs/common';
 import { Interval } from '@nestjs/schedule';
 import { InjectDataSource } from '@nestjs/typeorm';
 import { type DataSource, type EntityManager, LessThan } from 'typeorm';
 import { DomainError } from '../shared/errors/domain-error.js';
+import { logFailure } from '../shared/errors/log-failure.js';
 import { AccountToken } from './entities/account-token.entity.js';
 import { TOKEN_PURPOSES, type TokenDetails, type TokenPurpose } from './token-purposes.js';
 
@@ -21,6 +22,8 @@ const REMEMBERED_MS = 30 * 24 * 3_600_000;
 /** The links in e-mails that confirm an address or set a password: each is good once, for a time. */
 @Injectable()
 export class AccountTokens {
+  private readonly logger = new Logger(AccountTokens.name);
+
   constructor(@InjectDataSource() private readonly dataSource: DataSource) {}
 
   /** Stores what a link does, and answers the token that the link carries. */
@@ -60,7 +63,7 @@ export class AccountTokens {
     const before = new Date(Date.now() - REMEMBERED_MS);
     await this.dataSource.manager
       .delete(AccountToken, { expiresAt: LessThan(before) })
-      .catch(() => undefined);
+      .catch((error: unknown) => logFailure(this.logger, error));
   }
 }
 

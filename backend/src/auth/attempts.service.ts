@@ -1,9 +1,10 @@
 import { createHash } from 'node:crypto';
-import { Injectable } from '@nestjs/common';
+import { Injectable, Logger } from '@nestjs/common';
 import { Interval } from '@nestjs/schedule';
 import { InjectDataSource } from '@nestjs/typeorm';
 import { type DataSource, type EntityManager, In, LessThan, MoreThan } from 'typeorm';
 import { DomainError } from '../shared/errors/domain-error.js';
+import { logFailure } from '../shared/errors/log-failure.js';
 import { type AttemptSubject, waitAfter } from './attempt-limits.js';
 import { AttemptCount } from './entities/attempt-count.entity.js';
 
@@ -12,6 +13,8 @@ const FORGOTTEN_AFTER_MS = 3_600_000;
 /** Counts attempts in the database, so that all processes of the API slow them together. */
 @Injectable()
 export class Attempts {
+  private readonly logger = new Logger(Attempts.name);
+
   constructor(@InjectDataSource() private readonly dataSource: DataSource) {}
 
   /**
@@ -40,7 +43,9 @@ export class Attempts {
   @Interval(FORGOTTEN_AFTER_MS)
   async tidy(): Promise<void> {
     const before = new Date(Date.now() - FORGOTTEN_AFTER_MS);
-    await this.dataSource.manager.delete(AttemptCount, { until: LessThan(before) }).catch(() => undefined);
+    await this.dataSource.manager
+      .delete(AttemptCount, { until: LessThan(before) })
+      .catch((error: unknown) => logFailure(this.logger, error));
   }
 
   private async makeRow(hash: string): Promise<void> {

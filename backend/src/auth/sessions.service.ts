@@ -1,8 +1,9 @@
-import { Injectable } from '@nestjs/common';
+import { Injectable, Logger } from '@nestjs/common';
 import { Interval } from '@nestjs/schedule';
 import { InjectDataSource } from '@nestjs/typeorm';
 import { type DataSource, type EntityManager, LessThan, MoreThan, Not } from 'typeorm';
 import { DomainError } from '../shared/errors/domain-error.js';
+import { logFailure } from '../shared/errors/log-failure.js';
 import { readId } from '../shared/ids/read-id.js';
 import { shortened } from '../shared/text/shortened.js';
 import { type Member, toCaller } from '../teams/member.js';
@@ -24,6 +25,8 @@ const TIDY_EVERY_MS = 3_600_000;
 /** The sign-ins that aren't over. */
 @Injectable()
 export class SessionsService {
+  private readonly logger = new Logger(SessionsService.name);
+
   constructor(
     @InjectDataSource() private readonly dataSource: DataSource,
     private readonly teams: TeamsService,
@@ -95,7 +98,9 @@ export class SessionsService {
 
   @Interval(TIDY_EVERY_MS)
   async tidy(): Promise<void> {
-    await this.dataSource.manager.delete(Session, { createdAt: LessThan(oldest()) }).catch(() => undefined);
+    await this.dataSource.manager
+      .delete(Session, { createdAt: LessThan(oldest()) })
+      .catch((error: unknown) => logFailure(this.logger, error));
   }
 
   private async noteSeen({ id, lastSeenAt }: Session): Promise<void> {
