@@ -11,7 +11,7 @@ import type { SeededTeam } from './seed-team.js';
 /** The demo team's named operating conditions; the first fault ends it, naming conditions and field. */
 export async function seedConditions(
   manager: EntityManager,
-  { teamId, userId }: SeededTeam,
+  { teamId, engineerId }: SeededTeam,
   named: DemoData['conditions'],
 ): Promise<void> {
   const partIds = await findPartIds(manager, teamId);
@@ -19,7 +19,7 @@ export async function seedConditions(
     const [error] = checkConditions(ranking);
     if (error) throw new Error(`Conditions “${name}”, ${error.field}: ${error.message}`);
     const { identifiers } = await manager.insert(SavedConditions, {
-      ...savedNow(userId),
+      ...savedNow(engineerId),
       teamId,
       name,
       nameKey: nameKey(name),

@@ -1,3 +1,4 @@
+import type { Role } from '@roothertz/common/access';
 import type { EntityManager } from 'typeorm';
 import { hashPassword } from '../../auth/passwords.js';
 import { Membership } from '../../teams/entities/membership.entity.js';
@@ -10,8 +11,8 @@ const DEMO_PASSWORD = 'quiet-bench-2026';
 
 export interface SeededTeam {
   teamId: number;
-  /** The first member. */
-  userId: number;
+  /** The first member who designs. */
+  engineerId: number;
   /** The first member who keeps the prices. */
   buyerId: number;
 }
@@ -31,6 +32,6 @@ export async function seedTeam(
     userIds.push(userId);
   }
   await manager.update(Team, { id: teamId }, { ownerId: userIds[0] });
-  const buyer = members.findIndex(({ roles }) => roles.includes('purchasing'));
-  return { teamId, userId: userIds[0], buyerId: userIds[buyer] };
+  const firstWho = (role: Role) => userIds[members.findIndex(({ roles }) => roles.includes(role))];
+  return { teamId, engineerId: firstWho('engineer'), buyerId: firstWho('purchasing') };
 }
