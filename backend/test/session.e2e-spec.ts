@@ -194,12 +194,19 @@ describe('session', () => {
     expect(answer.body.roles).toEqual(['reviewer']);
   });
 
-  it('tells somebody without a team so, but only with the right password', async () => {
+  it('founds one team for somebody who has left every other one, so that an invitation can still be taken', async () => {
     const { email, caller } = await signInMember(app, team, ['engineer']);
-    await app.dataSource.getRepository(Membership).delete({ userId: caller.userId });
+    const { userId } = caller;
+    const memberships = app.dataSource.getRepository(Membership);
+    await memberships.delete({ userId });
     await signIn(email, 'wrong').expect(401);
-    const answer = await signIn(email, PASSWORD).expect(403);
-    expect(answer.body.code).toBe('session.no-team');
+    expect(await memberships.countBy({ userId })).toBe(0);
+    const answers = await Promise.all([signIn(email, PASSWORD), signIn(email, PASSWORD)]);
+    expect(answers.map(({ status, body }) => [status, body.roles, body.plan])).toEqual([
+      [200, ['admin'], 'free'],
+      [200, ['admin'], 'free'],
+    ]);
+    expect(await memberships.countBy({ userId })).toBe(1);
   });
 });
 

@@ -15,6 +15,7 @@ import { AuthService } from './auth.service.js';
 import { CloseAccount } from './close-account.service.js';
 import { Confirmations } from './confirmations.service.js';
 import { JwtStrategy } from './jwt.strategy.js';
+import { OwnTeams } from './own-teams.service.js';
 import { PasswordChanges } from './password-changes.service.js';
 import { PasswordCheck } from './password-check.service.js';
 import { PasswordReset } from './password-reset.service.js';
@@ -47,6 +48,7 @@ import { SignUpService } from './sign-up.service.js';
     CloseAccount,
     Confirmations,
     JwtStrategy,
+    OwnTeams,
     PasswordChanges,
     PasswordCheck,
     PasswordReset,

@@ -7,6 +7,7 @@ import type { Account } from '../users/account.js';
 import { UsersService } from '../users/users.service.js';
 import { signInSubjects } from './attempt-limits.js';
 import { Attempts } from './attempts.service.js';
+import { OwnTeams } from './own-teams.service.js';
 import { passwordMatches } from './passwords.js';
 
 export interface Credentials {
@@ -19,6 +20,7 @@ export class AuthService {
   constructor(
     private readonly users: UsersService,
     private readonly teams: TeamsService,
+    private readonly ownTeams: OwnTeams,
     private readonly attempts: Attempts,
   ) {}
 
@@ -33,18 +35,12 @@ export class AuthService {
     if (!(await passwordMatches(password, account?.passwordHash ?? null)))
       throw new DomainError('session.wrong-credentials', 'E-mail address or password is wrong.');
     await this.attempts.succeed(subjects);
-    return this.memberOf(account as Account);
+    return this.ownTeams.firstMember(account as Account);
   }
 
   async findSession({ userId, teamId }: Caller): Promise<Member> {
     const member = await this.teams.findMember(userId, teamId);
     if (member === null) throw new DomainError('session.missing', 'Sign in first.');
-    return member;
-  }
-
-  private async memberOf(account: Account): Promise<Member> {
-    const member = await this.teams.findFirstMember(account.id);
-    if (member === null) throw new DomainError('session.no-team', 'This account belongs to no team.');
     return member;
   }
 }

@@ -1,17 +1,16 @@
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
 import type { DataSource, EntityManager } from 'typeorm';
-import { AuditService } from '../audit/audit.service.js';
 import { MailQueue } from '../mail/mail-queue.service.js';
 import { DomainError } from '../shared/errors/domain-error.js';
 import { isDuplicateEntry } from '../shared/errors/duplicate-entry.js';
-import { TeamsService } from '../teams/teams.service.js';
 import { UsersService } from '../users/users.service.js';
 import { accountExistsLetter, confirmSignUpLetter } from './account-letters.js';
 import { AccountTokens } from './account-tokens.service.js';
 import { mailSubjects } from './attempt-limits.js';
 import { Attempts } from './attempts.service.js';
 import type { AccountToken } from './entities/account-token.entity.js';
+import { OwnTeams } from './own-teams.service.js';
 import { assertPassword } from './password-rules.js';
 import { hashPassword } from './passwords.js';
 import { takingAtLeast } from './taking-at-least.js';
@@ -35,11 +34,10 @@ export class SignUpService {
   constructor(
     @InjectDataSource() private readonly dataSource: DataSource,
     private readonly users: UsersService,
-    private readonly teams: TeamsService,
+    private readonly ownTeams: OwnTeams,
     private readonly tokens: AccountTokens,
     private readonly attempts: Attempts,
     private readonly mail: MailQueue,
-    private readonly audit: AuditService,
   ) {}
 
   /** Sends a link to the address; whether there is an account already, only its mailbox learns. */
@@ -53,10 +51,7 @@ export class SignUpService {
   async confirm(manager: EntityManager, { email, details }: AccountToken): Promise<void> {
     const { name, teamName, passwordHash } = details as SignUpDetails;
     const userId = await this.users.create(manager, { email, name, passwordHash }).catch(refuseTaken);
-    const teamId = await this.teams.found(manager, teamName, userId);
-    const object = { kind: 'team' as const, id: teamId, label: teamName };
-    const founded = { action: 'team.founded' as const, object, from: null, to: { name: teamName } };
-    await this.audit.record(manager, { teamId, userId }, [founded]);
+    await this.ownTeams.found(manager, teamName, userId);
   }
 
   private async send({ email, name, teamName, password }: SignUp): Promise<void> {

@@ -29,6 +29,11 @@ export class UsersService {
     await manager.update(User, { id }, changes);
   }
 
+  /** Holds the account until the transaction ends. */
+  async lock(manager: EntityManager, id: number): Promise<void> {
+    await manager.findOneOrFail(User, { where: { id }, lock: { mode: 'pessimistic_write' } });
+  }
+
   /** What the person has made stays. */
   async remove(manager: EntityManager, id: number): Promise<void> {
     await manager.delete(User, { id });

@@ -9,7 +9,6 @@ export const ERROR_CODES = {
   'billing.declined': { status: 402, title: 'Card declined' },
   'access.seats': { status: 402, title: 'No seat left' },
   'plan.saved-conditions': { status: 402, title: 'Not in the team’s plan' },
-  'session.no-team': { status: 403, title: 'No team' },
   'access.origin': { status: 403, title: 'Foreign origin' },
   'access.role': { status: 403, title: 'Not allowed' },
   'access.undeclared': { status: 403, title: 'Not allowed' },
