@@ -23,8 +23,12 @@ export function PriceSettingsDrawer({ isOpen, onClose }: PriceSettingsDrawerProp
         <p role="alert">{detailOf(error)}</p>
       ) : settings.data && rates.data ? (
         <>
-          <SettingsForm key={settings.dataUpdatedAt} settings={settings.data} mayEdit={mayEdit} />
-          <RatesForm key={rates.dataUpdatedAt} rates={rates.data} mayEdit={mayEdit} />
+          <SettingsForm
+            key={`settings ${settings.dataUpdatedAt}`}
+            settings={settings.data}
+            mayEdit={mayEdit}
+          />
+          <RatesForm key={`rates ${rates.dataUpdatedAt}`} rates={rates.data} mayEdit={mayEdit} />
         </>
       ) : (
         <Skeleton />
