@@ -129,10 +129,13 @@ describe('session', () => {
     expect(claims).toMatchObject({ sub: String(caller.userId), exp: claims.iat + 12 * 3600 });
   });
 
-  it('ends when the member leaves the team', async () => {
+  it('ends for good when the member leaves the team', async () => {
     const { agent, caller } = await signInMember(app, team, ['engineer']);
+    const { userId, teamId } = caller;
     await agent.get('/api/auth/me').expect(200);
-    await app.dataSource.getRepository(Membership).delete({ userId: caller.userId });
+    await app.dataSource.getRepository(Membership).delete({ userId });
+    await agent.get('/api/auth/me').expect(401);
+    await app.dataSource.getRepository(Membership).insert({ userId, teamId, roles: ['engineer'] });
     await agent.get('/api/auth/me').expect(401);
   });
 

@@ -61,7 +61,8 @@ async function countOne(manager: EntityManager, subject: AttemptSubject, now: Da
   const hash = hashOf(subject);
   const row = await manager.findOne(AttemptCount, { where: { hash }, lock: { mode: 'pessimistic_write' } });
   const wait = row === null ? 0 : (row.until.getTime() - now.getTime()) / 1000;
-  if (wait > 0) throw tooMany(Math.ceil(wait));
+  // Attempts of one moment may be counted in another order than they came: those that are free make nobody wait.
+  if (row !== null && row.count >= limit.free && wait > 0) throw tooMany(Math.ceil(wait));
   const count = row !== null && -wait < limit.longestWait ? row.count + 1 : 1;
   const until = new Date(now.getTime() + 1000 * waitAfter(count, limit));
   await manager.upsert(AttemptCount, { hash, count, until }, ['hash']);

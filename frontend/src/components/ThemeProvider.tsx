@@ -6,6 +6,9 @@ import { ThemeContext, type ThemeChoice } from './useTokens';
 
 const STORAGE_KEY = 'roothertz.theme';
 
+/** Clear of the bar at the foot of a page, where changes are saved. */
+const NOTICES = { bottom: 76 };
+
 /** Shows the theme that the member chose in this browser, else the system's. */
 export function ThemeProvider({ children }: { children: ReactNode }) {
   const [choice, setChoice] = useState(storedChoice);
@@ -27,7 +30,7 @@ export function ThemeProvider({ children }: { children: ReactNode }) {
   return (
     <ThemeContext value={state}>
       <ConfigProvider theme={antdTheme} locale={enGB} button={{ autoInsertSpace: false }}>
-        <App>{children}</App>
+        <App notification={NOTICES}>{children}</App>
       </ConfigProvider>
     </ThemeContext>
   );

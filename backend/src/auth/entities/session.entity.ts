@@ -1,4 +1,5 @@
 import { Column, Entity, JoinColumn, ManyToOne, PrimaryGeneratedColumn, type Relation } from 'typeorm';
+import { Membership } from '../../teams/entities/membership.entity.js';
 import { Team } from '../../teams/entities/team.entity.js';
 import { User } from '../../users/entities/user.entity.js';
 
@@ -22,6 +23,14 @@ export class Session {
   @ManyToOne(() => Team, { onDelete: 'CASCADE' })
   @JoinColumn({ name: 'team_id', foreignKeyConstraintName: 'sessions_team' })
   team: Relation<Team>;
+
+  /** Ends the session with it. */
+  @ManyToOne(() => Membership, { onDelete: 'CASCADE' })
+  @JoinColumn([
+    { name: 'user_id', referencedColumnName: 'userId', foreignKeyConstraintName: 'sessions_membership' },
+    { name: 'team_id', referencedColumnName: 'teamId', foreignKeyConstraintName: 'sessions_membership' },
+  ])
+  membership: Relation<Membership>;
 
   @Column({ name: 'created_at', type: 'datetime', precision: 3 })
   createdAt: Date;

@@ -17,6 +17,7 @@ import { CreateInvitations1796090600200 } from './1796090600200-CreateInvitation
 import { AddPartsOfConditions1796090900000 } from './1796090900000-AddPartsOfConditions.js';
 import { KeepEarlierConfirmations1796090901000 } from './1796090901000-KeepEarlierConfirmations.js';
 import { CreateNotices1796091000000 } from './1796091000000-CreateNotices.js';
+import { EndSessionsWithMembership1796091100000 } from './1796091100000-EndSessionsWithMembership.js';
 
 /** All migrations; they run in the order of the time in their names. */
 export const MIGRATIONS = [
@@ -39,4 +40,5 @@ export const MIGRATIONS = [
   AddPartsOfConditions1796090900000,
   KeepEarlierConfirmations1796090901000,
   CreateNotices1796091000000,
+  EndSessionsWithMembership1796091100000,
 ];

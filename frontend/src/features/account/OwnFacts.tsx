@@ -1,6 +1,6 @@
 import { useQueryClient } from '@tanstack/react-query';
 import { Form, Input } from 'antd';
-import { changeAddress, changePassword, renameAccount } from '../../api/account';
+import { changeAddress, changePassword, openSessionsQuery, renameAccount } from '../../api/account';
 import { SESSION_KEY } from '../../api/session';
 import { useMember } from '../../components/useMember';
 import styles from './Account.module.css';
@@ -70,6 +70,7 @@ function AddressFact() {
 }
 
 function PasswordFact() {
+  const queryClient = useQueryClient();
   const done = 'The password is changed, and your other sessions are over.';
   return (
     <Change term="Password" value="not shown" verb="Change">
@@ -78,7 +79,10 @@ function PasswordFact() {
           label="Password"
           verb="Change the password"
           act={changePassword}
-          onDone={() => close(done)}
+          onDone={() => {
+            close(done);
+            void queryClient.invalidateQueries({ queryKey: openSessionsQuery.queryKey });
+          }}
         >
           <PasswordItem name="currentPassword" label="Current password" />
           <Form.Item name="newPassword" label="New password" rules={NEW_PASSWORD} extra={PASSWORD_HINT}>

@@ -80,7 +80,6 @@ export function PricesGrid({
     if (!data || !(event instanceof KeyboardEvent) || event.target instanceof HTMLInputElement) return;
     const cell = column.getColId();
     if (event.key === 'Enter' && cell === 'confirm') onConfirm([data]);
-    if (mayEdit && event.key === 'Delete' && isCell(cell)) draft.edit([{ row: data, cell, text: '' }]);
   };
   return (
     <FocusedCellContext value={focused}>

@@ -25,7 +25,9 @@ describe('the account page', () => {
     answer = nothing;
     await userEvent.click(screen.getByRole('button', { name: 'Change the password' }));
     expect(await screen.findByText(/your other sessions are over/)).toBeInTheDocument();
-    expect(asked.at(-1)?.body).toEqual({ currentPassword: 'a guess', newPassword: 'too short no more' });
+    const [sent, then] = asked.slice(-2);
+    expect(sent.body).toEqual({ currentPassword: 'a guess', newPassword: 'too short no more' });
+    expect(then.route).toBe('GET /api/auth/sessions');
   });
 
   it('ends another session', async () => {
