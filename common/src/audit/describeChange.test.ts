@@ -11,6 +11,19 @@ describe('describeChange', () => {
     ]);
   });
 
+  it('writes a moment as a reader would, and leaves other texts alone', () => {
+    const to = {
+      trialEndsAt: '2026-12-15T14:52:10.861Z',
+      note: 'since 2026-12-15T14:52:10.861Z',
+      day: '2026-12-15',
+    };
+    expect(describeChange(null, to).map((change) => change.to)).toEqual([
+      '2026-12-15 14:52 UTC',
+      'since 2026-12-15T14:52:10.861Z',
+      '2026-12-15',
+    ]);
+  });
+
   it('tells of what is new or gone all that it holds', () => {
     expect(describeChange(null, { name: 'Brook', note: '' })).toEqual([
       { field: 'name', from: null, to: 'Brook' },

@@ -25,6 +25,9 @@ export function describeChange(from: object | null, to: object | null): FieldCha
     .filter((change) => change.from !== change.to);
 }
 
+/** A moment as JSON writes it: its day, and the time to the minute. */
+const MOMENT = /^(\d{4}-\d{2}-\d{2})T(\d{2}:\d{2}):[\d.]+Z$/;
+
 /** Each value in words by the words of its path; what is empty is left out. */
 function flattened(values: object | null, path: readonly string[] = []): Map<string, string> {
   const entries = Object.entries(values ?? {}).filter(([field]) => !/^id$|Ids?$/.test(field));
@@ -47,7 +50,8 @@ function valueWords(value: unknown, kind?: QuantityKind): string | null {
   if (value === null || value === undefined || value === '') return null;
   if (typeof value === 'boolean') return value ? 'yes' : 'no';
   if (Array.isArray(value)) return value.length === 0 ? null : value.map(itemWords).join(', ');
-  return typeof value === 'number' && kind ? formatEditable(value, kind) : String(value as string | number);
+  if (typeof value === 'number' && kind) return formatEditable(value, kind);
+  return String(value as string | number).replace(MOMENT, '$1 $2 UTC');
 }
 
 function itemWords(item: unknown): string {

@@ -5,9 +5,14 @@ import { LinkAct } from '../../features/account/LinkAct';
 import { BadLink } from '../sign-in/BadLink';
 import { EntryPage } from '../sign-in/EntryPage';
 
-const DONE = (
+const SIGNED_UP = (
   <p>
     The address is confirmed. <Link to="/sign-in">Sign in</Link> with it.
+  </p>
+);
+const CHANGED = (
+  <p>
+    The address is confirmed: your account belongs to it now. <Link to="/account">Go to your account</Link>.
   </p>
 );
 
@@ -18,7 +23,11 @@ export function ConfirmPage() {
   return (
     <EntryPage title="Confirm your address" note={error && <Link to="/sign-in">Sign in</Link>}>
       {link ? (
-        <LinkAct verb="Confirm the address" act={() => confirmAddress(token)} done={DONE}>
+        <LinkAct
+          verb="Confirm the address"
+          act={() => confirmAddress(token)}
+          done={link.purpose === 'sign-up' ? SIGNED_UP : CHANGED}
+        >
           <p style={{ overflowWrap: 'anywhere' }}>
             {link.purpose === 'sign-up'
               ? `Your account is made for ${link.email}.`
