@@ -72,14 +72,17 @@ describe('the rank page on a desktop', () => {
   });
 
   it('gives a colleague who gets the address the same view', async () => {
+    const before = await answer().textContent();
     await field('source resistance').fill('4k7');
     await field('source resistance').press('Enter');
     await page.waitForURL(/rs=4\.7k/);
+    await expect.poll(() => answer().textContent()).not.toBe(before);
     const chosen = await rows().nth(2).locator('strong').textContent();
+    const budget = page.getByRole('region', { name: `Noise budget of ${chosen}`, exact: true });
     await rows().nth(2).click();
-    await page.waitForURL(/part=/);
+    await budget.waitFor();
     await page.goto(page.url());
-    await page.getByRole('region', { name: `Noise budget of ${chosen}`, exact: true }).waitFor();
+    await budget.waitFor();
     expect(await field('source resistance').inputValue()).toBe('4.7 kΩ');
   });
 
