@@ -20,7 +20,7 @@ import {
 } from './support/index.js';
 import { type DocumentedOperation, operationsOf } from './support/operations.js';
 
-const BODIES_PER_OPERATION = 40;
+const BODIES_PER_OPERATION = 60;
 /**
  * What takes a password, a token or a signature, which can't be guessed, and what a team that has paid can't do a
  * second time.
