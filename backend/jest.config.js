@@ -29,5 +29,5 @@ export default {
   transformIgnorePatterns: [`/node_modules/(?!(${ESM_PACKAGES.join('|')})/)`],
   moduleNameMapper: { '^(\\.{1,2}/.*)\\.js$': '$1' },
   maxWorkers: 2,
-  testTimeout: 30_000,
+  testTimeout: 60_000,
 };

@@ -5,7 +5,7 @@ import { ensureMariadbInstalled, startMariadb } from './mariadb.mjs';
 import { ensureNgspice } from './ngspice.mjs';
 import { endOrphans } from './orphans.mjs';
 import { ensurePackages, refuseOldNode } from './packages.mjs';
-import { addUp, closingLine } from './results.mjs';
+import { addUp, summary } from './results.mjs';
 import { StepError, say } from './steps.mjs';
 import { SUITES } from './suites.mjs';
 import { closeAll, refuseWhenEnding, supervise } from './supervision.mjs';
@@ -22,13 +22,13 @@ await supervise(async () => {
   const counts = await runSuites(names);
   await closeAll();
   const total = addUp(counts);
-  say(closingLine(total));
-  return total.failed === 0 ? 0 : 1;
+  say(summary(total));
+  return total.failures.length === 0 ? 0 : 1;
 });
 
 async function runSuites(names) {
   const context = await setUp(names.map((name) => SUITES[name])).catch(asFailure);
-  if (context.failed) return names.map(() => context);
+  if (context.failures) return [context];
   const counts = [];
   for (const name of names) counts.push(await runSuite(name, context));
   return counts;
@@ -75,6 +75,5 @@ async function runSuite(name, context) {
 
 function asFailure(error) {
   refuseWhenEnding();
-  say(error instanceof StepError ? error.message : error.stack);
-  return { passed: 0, failed: 1 };
+  return { passed: 0, failures: [error instanceof StepError ? error.message : error.stack] };
 }
