@@ -1,4 +1,4 @@
-import { NavLink } from 'react-router-dom';
+import { LinkTabs } from '../../components/LinkTabs';
 import styles from './KindTabs.module.css';
 import type { KindOfPart } from './kindOfPart';
 import { OP_AMPS } from './opAmps';
@@ -7,33 +7,14 @@ import { RESISTORS } from './resistors';
 
 const KINDS = [OP_AMPS, RESISTORS];
 
-interface TabsProps {
-  kind: KindOfPart;
-  place: PartsPlace;
-}
-
 /** The same view of each kind of part. */
-export function KindTabs({ place }: Pick<TabsProps, 'place'>) {
-  return (
-    <nav aria-label="Kinds of part" className={styles.tabs}>
-      {KINDS.map((kind) => (
-        <NavLink key={kind.path} to={placeAddress(kind, place)} end className={styles.tab}>
-          {kind.title}s
-        </NavLink>
-      ))}
-    </nav>
-  );
+export function KindTabs({ place }: { place: PartsPlace }) {
+  const tabs = KINDS.map((kind) => ({ to: placeAddress(kind, place), label: `${kind.title}s` }));
+  return <LinkTabs label="Kinds of part" tabs={tabs} />;
 }
 
 /** The views of a kind's parts. */
-export function ViewTabs({ kind }: Pick<TabsProps, 'kind'>) {
-  return (
-    <nav aria-label="Views of the parts" className={`${styles.tabs} ${styles.views}`}>
-      {PARTS_VIEWS.map(({ place, label }) => (
-        <NavLink key={place} to={placeAddress(kind, place)} end className={styles.tab}>
-          {label}
-        </NavLink>
-      ))}
-    </nav>
-  );
+export function ViewTabs({ kind }: { kind: KindOfPart }) {
+  const tabs = PARTS_VIEWS.map(({ place, label }) => ({ to: placeAddress(kind, place), label }));
+  return <LinkTabs label="Views of the parts" tabs={tabs} className={styles.views} />;
 }
