@@ -38,13 +38,16 @@ const FRONTEND_FEATURES = [
 
 const PAYMENTS_SDK = { name: 'stripe', message: 'Only backend/src/billing talks to the payment service.' };
 
-/** A feature may use another's service, never its repositories' entities or its DTOs. */
-const backendZones = BACKEND_FEATURES.flatMap((feature) =>
-  BACKEND_FEATURES.filter((other) => other !== feature).map((other) => ({
-    target: `./backend/src/${feature}/dto`,
-    from: `./backend/src/${other}`,
-  })),
-);
+/** A feature may use another's service, never its DTOs; its own DTOs use no other feature at all. */
+const backendZones = BACKEND_FEATURES.flatMap((feature) => {
+  const others = BACKEND_FEATURES.filter((other) => other !== feature).map(
+    (other) => `./backend/src/${other}`,
+  );
+  return [
+    { target: `./backend/src/${feature}`, from: others.map((other) => `${other}/dto`) },
+    { target: `./backend/src/${feature}/dto`, from: others },
+  ];
+});
 
 const frontendZones = FRONTEND_FEATURES.map((feature) => ({
   target: `./frontend/src/features/${feature}`,
@@ -86,6 +89,10 @@ export default tseslint.config(
               from: ['./frontend/src/pages', './frontend/src/features'],
             },
             { target: './frontend/src/api', from: ['./frontend/src/pages', './frontend/src/features'] },
+            {
+              target: './backend/src/shared',
+              from: BACKEND_FEATURES.map((feature) => `./backend/src/${feature}`),
+            },
             ...backendZones,
             ...frontendZones,
           ],

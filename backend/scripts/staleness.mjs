@@ -4,7 +4,7 @@ import { join } from 'node:path';
 const isTest = (name) => /\.(test|spec|e2e-spec)\.tsx?$/.test(name);
 
 /** The newest change under a file or directory; a removed file shows in its directory's own time. */
-export function newestChange(path) {
+function newestChange(path) {
   if (!existsSync(path)) return 0;
   const stats = statSync(path);
   if (!stats.isDirectory()) return stats.mtimeMs;

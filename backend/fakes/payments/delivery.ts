@@ -6,7 +6,7 @@ import type { Switches } from './switches.js';
 const RETRIES = 6;
 
 /** The header that proves who sent a body and when: the signature covers both. */
-export function signatureHeader(body: string, secret: string, timestamp: number): string {
+function signatureHeader(body: string, secret: string, timestamp: number): string {
   const signature = createHmac('sha256', secret).update(`${timestamp}.${body}`).digest('hex');
   return `t=${timestamp},v1=${signature}`;
 }

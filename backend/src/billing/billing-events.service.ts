@@ -49,7 +49,7 @@ export class BillingEvents {
 }
 
 /** Whose event it is: the only thing that is read of what it carries. */
-export function customerOf({ data }: Pick<Stripe.Event, 'data'>): string | null {
+function customerOf({ data }: Pick<Stripe.Event, 'data'>): string | null {
   const { customer } = data.object as { customer?: unknown };
   return typeof customer === 'string' ? customer : null;
 }

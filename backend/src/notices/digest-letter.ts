@@ -46,11 +46,11 @@ function paragraphsOf({ counts: { stale, expiring, expired }, staleAfterDays }: 
   return [sentences.filter(Boolean).join(' ')];
 }
 
-export function endingSentence(offer: ListedOffer): string {
+function endingSentence(offer: ListedOffer): string {
   return `${offerWords(offer)}, ends on ${offer.validUntil}`;
 }
 
-export function staleSentence(offer: ListedOffer): string {
+function staleSentence(offer: ListedOffer): string {
   return `${offerWords(offer)}, last confirmed on ${dayOf(new Date(offer.confirmedAt))}`;
 }
 

@@ -2,7 +2,7 @@
 export const PASSWORD_LEAST = 12;
 
 /** Bytes of UTF-8 that a password has at most: what is longer would not count. */
-export const PASSWORD_MOST_BYTES = 72;
+const PASSWORD_MOST_BYTES = 72;
 
 /**
  * What is wrong with the length of a new password, as a sentence; null = nothing. Characters are counted as a reader

@@ -32,5 +32,3 @@ export const RESISTOR_CONDITION_FIELDS = {
   'conditions.band.lowPassOrder': CONDITION_FIELDS['conditions.band.lowPassOrder'],
   quantity: CONDITION_FIELDS.quantity,
 } as const satisfies Record<string, QuantityField>;
-
-export type ResistorConditionFieldPath = keyof typeof RESISTOR_CONDITION_FIELDS;

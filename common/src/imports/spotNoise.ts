@@ -16,7 +16,7 @@ export interface Spot {
 }
 
 /** The band of the peak-to-peak noise that data sheets state, in Hz. */
-export const SLOW_BAND = { lower: 0.1, upper: 10 } as const;
+const SLOW_BAND = { lower: 0.1, upper: 10 } as const;
 
 /**
  * White density and 1/f corner of a noise that is stated at two frequencies.

@@ -17,7 +17,7 @@ export interface StageAmplifier extends Generators {
 }
 
 /** The noise-free, infinitely fast amplifier against which the source floor is stated. */
-export const PERFECT_AMPLIFIER: StageAmplifier = {
+const PERFECT_AMPLIFIER: StageAmplifier = {
   gainBandwidth: Infinity,
   inputCapacitance: 0,
   voltage2: 0,

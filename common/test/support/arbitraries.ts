@@ -22,7 +22,7 @@ export const bands: fc.Arbitrary<BandConditions> = fc
   .map(([lower, ratio, lowPassOrder]) => ({ lower, upper: lower * ratio, lowPassOrder }));
 
 /** Gain and resistors of a stage on a voltage source. */
-export const voltageStages: fc.Arbitrary<StageConditions> = fc.oneof(
+const voltageStages: fc.Arbitrary<StageConditions> = fc.oneof(
   fc.constant<StageConditions>({ topology: 'non-inverting', gain: 1 }),
   fc.record({
     topology: fc.constant('non-inverting' as const),
@@ -50,7 +50,7 @@ export const voltageStages: fc.Arbitrary<StageConditions> = fc.oneof(
   }),
 );
 
-export const transimpedanceStages: fc.Arbitrary<StageConditions> = fc.record({
+const transimpedanceStages: fc.Arbitrary<StageConditions> = fc.record({
   topology: fc.constant('transimpedance' as const),
   feedbackResistance: decades(1e3, 1e9),
   feedbackCapacitance: fc.oneof(fc.constantFrom(0, 'auto' as const), decades(1e-14, 1e-10)),

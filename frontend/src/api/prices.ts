@@ -8,7 +8,6 @@ export type PriceListRow = Schemas['PriceRowResponseDto'];
 export type Offer = Schemas['OfferResponseDto'];
 export type OfferedPart = Schemas['OfferedPartDto'];
 export type Supplier = Schemas['SupplierResponseDto'];
-export type PriceCounts = Schemas['PriceCountsDto'];
 export type PriceSettings = Schemas['PriceSettingsDto'];
 export type SavedPriceRow = Schemas['PriceRowDto'];
 export type PriceHistory = Schemas['PriceHistoryDto'];
@@ -23,7 +22,7 @@ export type PriceQuery = Omit<
 export const MOST_LISTED = 1000;
 export const MOST_SAVED = 500;
 
-export const PRICES_KEY = ['prices'] as const;
+const PRICES_KEY = ['prices'] as const;
 
 export function pricesQuery(view: PriceQuery) {
   const query = { ...view, limit: MOST_LISTED, offset: 0 };

@@ -35,7 +35,7 @@ export function priceRow(changes: Partial<Offer> = {}, usedIn: string[] = []): P
 }
 
 /** A second part's offer, and a part without one. */
-export const OTHER_PART = { ...offerOf().part, id: '42', partNumber: 'LQ-12' };
+const OTHER_PART = { ...offerOf().part, id: '42', partNumber: 'LQ-12' };
 
 export function otherRow(): PriceListRow {
   return priceRow({ id: '12', part: OTHER_PART, supplierNumber: 'BW-2', version: 1, states: [] });

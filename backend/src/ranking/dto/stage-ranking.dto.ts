@@ -27,7 +27,7 @@ export class RankedNetworkDto {
   feedbackResistor: NetworkPartDto | null;
 }
 
-export const STAGE_PLACES = ['op-amp', 'gain', 'feedback'] as const;
+const STAGE_PLACES = ['op-amp', 'gain', 'feedback'] as const;
 export type StagePlace = (typeof STAGE_PLACES)[number];
 
 export class StagePieceDto {

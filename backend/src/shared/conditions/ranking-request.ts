@@ -15,7 +15,7 @@ import type { RankingRequestDto } from './ranking-request.dto.js';
 import type { ResistorRankingRequestDto } from './resistor-ranking-request.dto.js';
 
 /** A request as the noise model takes it: plain objects, with nothing that was left out and every default. */
-export function toRankingRequest(dto: RankingRequestDto): Required<RankingRequest> {
+function toRankingRequest(dto: RankingRequestDto): Required<RankingRequest> {
   const { filter, target, quantity } = dto;
   return {
     conditions: toOperatingConditions(dto.conditions),

@@ -15,7 +15,7 @@ class ProblemFieldError implements FieldError {
 }
 
 /** Problem details of RFC 9457. */
-export class Problem {
+class Problem {
   @ApiProperty({ example: 'urn:roothertz:problem:request.invalid' })
   type: string;
 

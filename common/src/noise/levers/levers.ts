@@ -14,18 +14,16 @@ import { parallelStage } from './parallelStage.js';
 import { behindTransformer, optimumSourceResistance } from './transformer.js';
 
 /** What can be changed about a stage to make it quieter. */
-export const LEVERS = [
-  'cool-source',
-  'cool-circuit',
-  'halve-band',
-  'lower-network',
-  'raise-feedback',
-  'lower-voltage',
-  'parallel',
-  'transformer',
-  'quieter-part',
-] as const;
-export type LeverKey = (typeof LEVERS)[number];
+export type LeverKey =
+  | 'cool-source'
+  | 'cool-circuit'
+  | 'halve-band'
+  | 'lower-network'
+  | 'raise-feedback'
+  | 'lower-voltage'
+  | 'parallel'
+  | 'transformer'
+  | 'quieter-part';
 
 export interface Lever {
   key: LeverKey;

@@ -41,7 +41,7 @@ export function planMeaning(billing: Stated): string {
     : 'Everything is included.';
 }
 
-export function daysText(until: string | null, now = new Date()): string {
+function daysText(until: string | null, now = new Date()): string {
   const days = until === null ? 0 : daysLeft(new Date(until), now);
   return days === 1 ? '1 day' : `${days} days`;
 }

@@ -55,7 +55,7 @@ const OTHER_UNITS: Partial<Record<QuantityKind, readonly string[]>> = {
 };
 
 /** The units that a column of a kind may be in; the one of the file is among them, however it is spelt. */
-export function unitChoices(kind: QuantityKind, present: string | null): { value: string; label: string }[] {
+function unitChoices(kind: QuantityKind, present: string | null): { value: string; label: string }[] {
   const usual = PREFIXES_OF[kind]?.map((prefix) => prefix + QUANTITIES[kind].unit) ?? OTHER_UNITS[kind] ?? [];
   const spelt = present !== null && !usual.includes(present) && parseUnit(present, kind) ? [present] : [];
   return [...spelt, ...usual].map((unit) => ({ value: unit, label: unit }));

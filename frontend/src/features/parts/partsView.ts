@@ -13,7 +13,7 @@ export interface PartsFilter {
 }
 
 /** The ends of the window of values that the list can be narrowed by. */
-export const WINDOW_ENDS = ['resistanceFrom', 'resistanceTo'] as const;
+const WINDOW_ENDS = ['resistanceFrom', 'resistanceTo'] as const;
 
 const SORTED_WORDS = [
   'partNumber',

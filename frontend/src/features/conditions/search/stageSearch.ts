@@ -11,7 +11,7 @@ import type { SearchContent } from './searchAddress';
 import type { PLACE_KEYS, STAGE_SEARCH_KEYS } from './searchKeys';
 
 /** Ω, what an output drives where nothing else is stated (common practice, no source). */
-export const USUAL_MINIMUM_TOTAL = 500;
+const USUAL_MINIMUM_TOTAL = 500;
 
 export interface StageChoices {
   sort: StageSort;

@@ -23,7 +23,6 @@ export interface SearchForm<Keys extends SearchKeys> extends SearchContent<Keys>
 }
 
 export type StageSearchForm = SearchForm<typeof STAGE_SEARCH_KEYS>;
-export type PlaceForm = SearchForm<typeof PLACE_KEYS>;
 
 /** What the address says beside the operating conditions: what is ranked, and the fields of that. */
 export function useSearchAddress(address: Address) {

@@ -9,7 +9,7 @@ const POINTS_PER_DECADE = 20;
 const FREQUENCY = { label: 'frequency', kind: 'frequency' } as const;
 
 /** Density e·√(1 + f_c/f) over frequency; an unknown corner counts as 0 Hz. */
-export function densityCurve(white: number, corner: number | null): CurvePoint[] {
+function densityCurve(white: number, corner: number | null): CurvePoint[] {
   return logSteps(FROM, TO, POINTS_PER_DECADE).map((frequency) => [
     frequency,
     white * Math.sqrt(1 + (corner ?? 0) / frequency),

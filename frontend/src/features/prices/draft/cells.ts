@@ -76,7 +76,7 @@ export function cellText({ offer }: GridRow, cell: CellKey): string {
 }
 
 /** A unit price without the zeros that say nothing: `4.6900` is `4.69`, `0.0125` stays. */
-export function shortPrice(unitPrice: string): string {
+function shortPrice(unitPrice: string): string {
   return unitPrice.replace(/(\.\d\d)(\d*?)0*$/, '$1$2');
 }
 
