@@ -4,7 +4,7 @@ import { InjectDataSource } from '@nestjs/typeorm';
 import type Stripe from 'stripe';
 import type { DataSource, EntityManager } from 'typeorm';
 import { type Actor, AuditService } from '../audit/audit.service.js';
-import { Subscription } from '../plans/entities/subscription.entity.js';
+import type { Subscription } from '../plans/entities/subscription.entity.js';
 import { PlansService } from '../plans/plans.service.js';
 import { Payments } from './payments.js';
 import { chooseSubscription, type PaidFacts, statusOf, subscriptionFacts } from './subscription-facts.js';
@@ -33,7 +33,7 @@ export class BillingSync {
     const kept = await this.plans.lock(manager, actor.teamId);
     const facts = kept?.customerId ? await this.ask(kept.customerId, kept.pastDueSince) : null;
     if (kept === null || facts === null || isSame(kept, facts, KEPT)) return;
-    await manager.update(Subscription, { teamId: actor.teamId }, facts);
+    await this.plans.change(manager, actor.teamId, facts);
     if (!isSame(kept, facts, TOLD)) await this.record(manager, actor, kept, facts);
   }
 

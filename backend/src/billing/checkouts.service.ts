@@ -1,7 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
 import type { DataSource, EntityManager } from 'typeorm';
-import { Subscription } from '../plans/entities/subscription.entity.js';
 import { PlansService } from '../plans/plans.service.js';
 import type { Caller } from '../shared/access/caller.js';
 import { DomainError } from '../shared/errors/domain-error.js';
@@ -9,7 +8,6 @@ import { TeamsService } from '../teams/teams.service.js';
 import { BillingSync } from './billing-sync.service.js';
 import { Payments } from './payments.js';
 import { SeatChanges } from './seat-changes.service.js';
-import { ensureSubscription } from './team-subscription.js';
 
 const PLAN_PATH = '/team/plan';
 
@@ -28,7 +26,7 @@ export class Checkouts {
   /** The address where the plan is paid; one that was opened before can be paid no more. */
   async open(caller: Caller, seats: number, origin: string): Promise<string> {
     await this.syncs.sync(caller);
-    await ensureSubscription(this.dataSource.manager, caller.teamId);
+    await this.plans.ensure(caller.teamId);
     const { id: price } = await this.payments.price();
     return this.dataSource.transaction(async (manager) => {
       const customer = await this.ensureCustomer(manager, caller);
@@ -71,7 +69,7 @@ export class Checkouts {
         metadata: { team: String(teamId) },
       }),
     );
-    await manager.update(Subscription, { teamId }, { customerId: id });
+    await this.plans.change(manager, teamId, { customerId: id });
     return id;
   }
 

@@ -3,11 +3,10 @@ import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
 import type { DataSource } from 'typeorm';
 import { AuditService } from '../audit/audit.service.js';
-import { Subscription } from '../plans/entities/subscription.entity.js';
+import type { Subscription } from '../plans/entities/subscription.entity.js';
 import { PlansService } from '../plans/plans.service.js';
 import type { Caller } from '../shared/access/caller.js';
 import { DomainError } from '../shared/errors/domain-error.js';
-import { ensureSubscription } from './team-subscription.js';
 
 const DAY_MS = 86_400_000;
 
@@ -22,12 +21,12 @@ export class Trials {
 
   async start(caller: Caller): Promise<void> {
     const { teamId } = caller;
-    await ensureSubscription(this.dataSource.manager, teamId);
+    await this.plans.ensure(teamId);
     await this.dataSource.transaction(async (manager) => {
       if (!mayTry(await this.plans.lock(manager, teamId)))
         throw new DomainError('billing.trial-used', 'The team has had its trial, or a plan already.');
       const trialEndsAt = new Date(Date.now() + TRIAL_DAYS * DAY_MS);
-      await manager.update(Subscription, { teamId }, { trialEndsAt });
+      await this.plans.change(manager, teamId, { trialEndsAt });
       await this.audit.record(manager, caller, [
         {
           action: 'plan.trial-started',

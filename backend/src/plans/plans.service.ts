@@ -4,6 +4,8 @@ import { InjectRepository } from '@nestjs/typeorm';
 import type { EntityManager, Repository } from 'typeorm';
 import { Subscription } from './entities/subscription.entity.js';
 
+type SubscriptionChanges = Partial<Omit<Subscription, 'teamId' | 'team'>>;
+
 @Injectable()
 export class PlansService {
   constructor(@InjectRepository(Subscription) private readonly subscriptions: Repository<Subscription>) {}
@@ -22,8 +24,20 @@ export class PlansService {
     return planState(await this.find(teamId), new Date());
   }
 
+  /**
+   * Makes sure that the team has a row to keep its trial or subscription in, so that it can be held. Not within the
+   * transaction that holds it: of two that met here, both would wait for each other there.
+   */
+  async ensure(teamId: number): Promise<void> {
+    await this.subscriptions.createQueryBuilder().insert().values({ teamId }).orIgnore().execute();
+  }
+
   /** Holds the team's subscription until the transaction ends, so that seats are counted and changed by one at a time. */
   lock(manager: EntityManager, teamId: number): Promise<Subscription | null> {
     return manager.findOne(Subscription, { where: { teamId }, lock: { mode: 'pessimistic_write' } });
+  }
+
+  async change(manager: EntityManager, teamId: number, changes: SubscriptionChanges): Promise<void> {
+    await manager.update(Subscription, { teamId }, changes);
   }
 }
