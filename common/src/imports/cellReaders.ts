@@ -10,9 +10,11 @@ import {
 import type { ColumnMapping } from './columnMapping.js';
 import { originalCell } from './csvCells.js';
 import { type DecimalMark, ungrouped } from './decimalMark.js';
+import { figureOfCell, isGapCell } from './listCell.js';
 import type { PartValue } from './rowVerdict.js';
 
 const KEPT_READINGS = 5000;
+const UNSTATED: Reading<PartValue> = { ok: true, value: null };
 
 /** The voltage from peak to peak, which is no parameter but gives one. */
 const PEAK_TO_PEAK: ParameterDefinition = {
@@ -31,6 +33,7 @@ export interface CellReader extends ColumnMapping {
   /** Where the part holds what the column states. */
   path: string;
   source: PartColumn;
+  /** Null = the cell says that the value is unknown. */
   read(cell: string): Reading<PartValue>;
 }
 
@@ -61,11 +64,19 @@ function readCell(
   mark: DecimalMark,
 ): Reading<PartValue> {
   const original = originalCell(cell);
-  if (source.holds !== 'figure') return readPartCell(catalogue, source, original);
-  const figure = ungrouped(original, mark);
-  return form === 'peak-to-peak'
-    ? readFigure(PEAK_TO_PEAK, figure, source.unit)
-    : readPartCell(catalogue, source, figure);
+  if (source.holds !== 'figure') return readPartCell(catalogue, source, onOneLine(original));
+  const parameter = form === 'peak-to-peak' ? PEAK_TO_PEAK : parameterOf(catalogue, source.key);
+  if (!parameter.required && isGapCell(original)) return UNSTATED;
+  return readFigure(parameter, ungrouped(figureOfCell(original, parameter.kind), mark), source.unit);
+}
+
+function parameterOf({ parameters }: ListedFields, key: string): ParameterDefinition {
+  return parameters.find((parameter) => parameter.key === key)!;
+}
+
+/** A text that its list breaks into lines goes on after a space. */
+function onOneLine(text: string): string {
+  return text.trim().replace(/\s*[\r\n]+\s*/g, ' ');
 }
 
 function remembered(read: (cell: string) => Reading<PartValue>): (cell: string) => Reading<PartValue> {

@@ -21,7 +21,8 @@ export interface ImportRowReader {
 }
 
 /**
- * Makes a reader of the rows of a list whose columns are mapped. An empty cell states nothing. Spot noise and
+ * Makes a reader of the rows of a list whose columns are mapped. An empty cell, or one that
+ * says that its value is unknown, states nothing. Spot noise and
  * peak-to-peak noise become the white density and its corner; a corner that has its own cell stands.
  */
 export function importRowReader(
@@ -65,6 +66,7 @@ function readPlain(
     });
     return;
   }
+  if (reading.value === null) return;
   stated.set(column.path, reading.value);
   if (column.origin !== null && column.form === 'value') stateOrigin(stated, column);
 }

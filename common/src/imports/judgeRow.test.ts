@@ -104,11 +104,32 @@ describe('rowJudge', () => {
     });
   });
 
-  it('refuses a supply minimum above the maximum', () => {
+  it('doubts a supply minimum above the maximum', () => {
     const headings = ['maker', 'mpn', 'en', 'vs min', 'vs max'];
     expect(judge(['Vireo', 'VR-3', '1', '5', '3'], null, null, headings)).toMatchObject({
+      state: 'doubtful',
+      doubts: [{ code: 'contradiction', field: 'amplifier.supplyMaximum' }],
+    });
+  });
+
+  it('takes a dash or “n/a” for a gap, but not where the figure is needed', () => {
+    const part = { state: 'new', part: { amplifier: { voltageNoise: 1e-9, currentNoise: null } } };
+    expect(judge(['Vireo', 'VR-6', '1', 'n/a'], null, null, ['maker', 'mpn', 'en', 'in'])).toMatchObject(
+      part,
+    );
+    expect(judge(['Vireo', 'VR-6', 'n/a', '1'], null, null, ['maker', 'mpn', 'en', 'in'])).toMatchObject({
       state: 'refused',
-      errors: [{ column: 4, value: '3' }],
+      errors: [{ column: 2, value: 'n/a' }],
+    });
+  });
+
+  it('understands the words of German and French lists', () => {
+    const headings = ['Hersteller', 'Typ', 'en', 'Status', 'Freigabe'];
+    expect(judge(['Vireo', 'VR-7', '1', 'abgekündigt', 'gesperrt'], null, null, headings)).toMatchObject({
+      part: { lifecycle: 'last-time-buy', approval: 'not-approved' },
+    });
+    expect(judge(['Vireo', 'VR-7', '1', 'obsolète', 'oui'], null, null, headings)).toMatchObject({
+      part: { lifecycle: 'obsolete', approval: 'approved' },
     });
   });
 

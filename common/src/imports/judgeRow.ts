@@ -11,7 +11,7 @@ import {
 } from '../parts/index.js';
 import { doubtsOf } from './doubts.js';
 import type { ImportRowReader, ImportRowReading } from './importRow.js';
-import type { FieldChange, PartValue, RowError, RowVerdict } from './rowVerdict.js';
+import type { Doubt, FieldChange, PartValue, RowError, RowVerdict } from './rowVerdict.js';
 
 /** What is there already of the part that a row describes. */
 export interface KnownParts<Part> {
@@ -54,18 +54,17 @@ export function rowJudge<Part extends LibraryPart>(
         : { values: new Map([...current, ...reading.stated]), errors: [] };
     if (errors.length > 0) return { state: 'refused', errors };
     const part = partOfValues<Part>(catalogue, values);
-    const faults = catalogue.check(part);
-    if (faults.length > 0)
-      return {
-        state: 'refused',
-        errors: faults.map(({ field, message }) => reader.errorAt(field, message, reading.cells)),
-      };
-    const doubts = doubtsOf(catalogue, part, [existing, curated]);
+    const doubts = [...contradictions(catalogue, part), ...doubtsOf(catalogue, part, [existing, curated])];
     const changes = current && changesBetween(current, valuesOfPart(catalogue, part));
     if (changes?.length === 0) return { state: 'unchanged', part, doubts };
     const state = changes === null ? 'new' : 'changed';
     return { state: doubts.length > 0 ? 'doubtful' : state, part, changes: changes ?? [], doubts };
   };
+}
+
+/** Limits that contradict each other are the list’s to mend, and no reason to leave the rest of the part out. */
+function contradictions<Part extends LibraryPart>(catalogue: PartCatalogue<Part>, part: Part): Doubt[] {
+  return catalogue.check(part).map((fault) => ({ code: 'contradiction', ...fault }));
 }
 
 function changesBetween(

@@ -11,9 +11,16 @@ export interface ListColumns {
   /** What a column becomes whose field is known: unit, frequency and quantity are read from its heading. */
   proposeField(field: string, heading: string): ProposedColumn;
   /** What the fields are called, for headings that only resemble them. */
-  names: readonly { field: string; name: string }[];
+  names: readonly FieldName[];
   /** What is wrong with a mapping, by paths such as `columns.3.unit`; empty = the rows can be read. */
   check(mapping: readonly ColumnMapping[], columnCount: number, wholeList?: WholeList): FieldError[];
+}
+
+/** A name of a field; one that isn't sure may mean something else. */
+export interface FieldName {
+  field: string;
+  name: string;
+  isSure: boolean;
 }
 
 /** The columns of a list of parts of a kind. */
@@ -33,9 +40,10 @@ export function partColumns(catalogue: ListedFields): ListColumns {
 
 /** Every name of each field. */
 export function namesOf(
-  fields: readonly { key: string; label: string; synonyms: readonly string[] }[],
-): { field: string; name: string }[] {
-  return fields.flatMap(({ key, label, synonyms }) =>
-    [label, ...synonyms].map((name) => ({ field: key, name })),
-  );
+  fields: readonly { key: string; label: string; synonyms: readonly string[]; perhaps?: readonly string[] }[],
+): FieldName[] {
+  return fields.flatMap(({ key: field, label, synonyms, perhaps = [] }) => [
+    ...[label, ...synonyms].map((name) => ({ field, name, isSure: true })),
+    ...perhaps.map((name) => ({ field, name, isSure: false })),
+  ]);
 }

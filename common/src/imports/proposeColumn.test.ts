@@ -25,6 +25,26 @@ describe('columnProposer', () => {
     ['boîtier', { field: 'package', form: 'value' }],
     ['voltage noise origin', { field: 'voltageNoise', form: 'origin', unit: null }],
     ['GBW [V]', { field: 'gainBandwidth', unit: 'MHz', unitAssumed: true }],
+    ['EN_NV_RTHZ_1KHZ', { field: 'voltageNoise', form: 'spot', unit: 'nV/√Hz', frequency: 1000 }],
+    ['IN_PA_RTHZ', { field: 'currentNoise', unit: 'pA/√Hz' }],
+    ['IQ_MA', { field: 'supplyCurrent', unit: 'mA' }],
+    ['CIN_PF', { field: 'inputCapacitance', unit: 'pF' }],
+    ['GBW_MHZ', { field: 'gainBandwidth', unit: 'MHz' }],
+    ['VS_MAX_V', { field: 'supplyMaximum', unit: 'V', origin: null }],
+    ['Input Bias Current (Max) (nA)', { field: 'inputBiasCurrent', unit: 'nA', origin: 'maximum' }],
+    ['Ib @ 25 °C [pA]', { field: 'inputBiasCurrent', unit: 'pA' }],
+    ['Versorgungsspannung max. [V]', { field: 'supplyMaximum', unit: 'V', origin: null }],
+    ["Tension d'alimentation min (V)", { field: 'supplyMinimum', unit: 'V' }],
+    ['Spannungsrauschdichte (f = 1 kHz) / nV/√Hz', { field: 'voltageNoise', form: 'spot', frequency: 1000 }],
+    ['Densité de bruit en tension (nV/vHz)', { field: 'voltageNoise', unit: 'nV/vHz', unitAssumed: false }],
+    ['Eingangsruhestrom in nA', { field: 'inputBiasCurrent', unit: 'nA' }],
+    ['Manufacturer Part Number', { field: 'partNumber' }],
+    ['MFR_NAME', { field: 'manufacturer' }],
+    ['MFR_PN', { field: 'partNumber' }],
+    ['Hersteller-Teilenummer', { field: 'partNumber' }],
+    ['Package / Case', { field: 'package' }],
+    ['Part Status', { field: 'lifecycle' }],
+    ['Étage d’entrée', { field: 'inputType' }],
   ])('knows the column %s of op-amps', (heading, expected) => {
     expect(opAmp(heading)).toMatchObject(expected);
   });
@@ -34,6 +54,10 @@ describe('columnProposer', () => {
     ['Toleranz %', { field: 'tolerance', unit: '%' }],
     ['TCR ppm/°C', { field: 'temperatureCoefficient', unit: 'ppm/°C' }],
     ['Stromrauschen', { field: 'noiseIndex', unit: 'dB' }],
+    ['Nennleistung in mW', { field: 'powerRating', unit: 'mW' }],
+    ['Puissance nominale (W)', { field: 'powerRating', unit: 'W' }],
+    ['RESISTANCE_KOHM', { field: 'resistance', unit: 'kΩ' }],
+    ['Tolérance (%)', { field: 'tolerance', unit: '%' }],
   ])('knows the column %s of resistors', (heading, expected) => {
     expect(resistor(heading)).toMatchObject(expected);
   });

@@ -24,11 +24,14 @@ const SLOW_NOISE = 'voltageNoise';
 export function columnProposer(catalogue: ListedFields): (heading: string) => ProposedColumn | null {
   const read = headingReader(catalogue);
   return (heading) => {
-    const whole = read(heading);
     const pieces = readHeading(heading);
-    if (whole !== null) return proposal(catalogue, whole, { ...pieces, ...plainly(whole) });
-    const named = read(pieces.name) ?? slowNoise(catalogue, pieces);
-    return named && proposal(catalogue, named, pieces);
+    const whole = read(heading);
+    const asWhole = whole && proposal(catalogue, whole, { ...pieces, ...plainly(whole) });
+    if (whole !== null && hasPlainUnit(whole)) return asWhole;
+    const named = read(pieces.wholeName);
+    if (named !== null && hasPlainUnit(named)) return proposal(catalogue, named, { ...pieces, origin: null });
+    const stripped = read(pieces.name) ?? slowNoise(catalogue, pieces);
+    return stripped === null ? asWhole : proposal(catalogue, stripped, pieces);
   };
 }
 
@@ -39,6 +42,10 @@ export function proposeField(catalogue: ListedFields, field: string, heading: st
     ? { holds: 'figure', key: field, unit: '' }
     : { holds: 'text', key: field };
   return proposal(catalogue, column, readHeading(heading));
+}
+
+function hasPlainUnit(column: PartColumn): boolean {
+  return column.holds !== 'figure' || parseUnit(column.unit) !== null;
 }
 
 /** A heading that is a name as a whole has no “max” or frequency of its own: “supply voltage max”. */

@@ -25,6 +25,7 @@ export const DOUBT_CODES = [
   'below-shot-noise',
   'implausibly-quiet',
   'factor-of-1000',
+  'contradiction',
   'repeated',
   'price-slip',
   'new-supplier',

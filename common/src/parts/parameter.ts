@@ -46,6 +46,8 @@ export interface ParameterDefinition<Key extends string = string> extends Quanti
   displayUnit: string;
   /** Other names that lists give this column; compared without case, accents and punctuation. */
   synonyms: readonly string[];
+  /** Names that may mean the parameter, and do where no other column is surer. */
+  perhaps?: readonly string[];
 }
 
 /** Whether a part can be kept without the parameter: not what is required, and not a count. */

@@ -1,4 +1,5 @@
 import { readFigure } from './figureCell.js';
+import { FIELD_OPTION_WORDS, ORIGIN_WORDS } from './optionWords.js';
 import type { ListedFields } from './partCatalogue.js';
 import type { PartColumn } from './partColumns.js';
 import { PART_FIELDS, type TextField } from './partFields.js';
@@ -24,7 +25,7 @@ export function readPartCell(
   const parameter = parameterOf(catalogue, column.key);
   if (column.holds === 'figure') return readFigure(parameter, cell, column.unit);
   if (cell.trim() === '') return { ok: true, value: null };
-  return readOption(`${parameter.label} origin`, ORIGIN_LABELS, cell);
+  return readOption(`${parameter.label} origin`, ORIGIN_LABELS, cell, ORIGIN_WORDS);
 }
 
 /** What stands where a list has no such column: the field's default, if it isn't required. */
@@ -48,5 +49,5 @@ function parameterOf({ parameters }: ListedFields, key: string) {
 function readTextCell(field: TextField, cell: string): Reading<string | null> {
   if (field.options === undefined) return readText(field, cell);
   if (cell.trim() === '') return { ok: true, value: field.fallback };
-  return readOption(field.label, OPTION_LABELS[field.key], cell);
+  return readOption(field.label, OPTION_LABELS[field.key], cell, FIELD_OPTION_WORDS[field.key]);
 }

@@ -1,4 +1,5 @@
 import { normaliseWord } from './normalise.js';
+import type { OptionWords } from './optionWords.js';
 import type { TextField } from './partFields.js';
 import type { Reading } from './reading.js';
 
@@ -14,17 +15,20 @@ export function readText(field: TextField, input: string): Reading<string> {
 }
 
 /**
- * The option of a field that a list means by a word: the option itself or its label, compared without
- * case, accents and punctuation. Refused, naming the options, where it means none of them.
+ * The option of a field that a list means by a word: the option itself, its label or another word for it, compared
+ * without case, accents and punctuation. Refused, naming the options, where it means none of them.
  */
 export function readOption<Option extends string>(
   label: string,
   labels: Record<Option, string>,
   input: string,
+  words?: OptionWords<Option>,
 ): Reading<Option> {
   const word = normaliseWord(input);
   const options = Object.keys(labels) as Option[];
-  const value = options.find((o) => normaliseWord(o) === word || normaliseWord(labels[o]) === word);
+  const value = options.find((option) =>
+    [option, labels[option], ...(words?.[option] ?? [])].some((name) => normaliseWord(name) === word),
+  );
   return value === undefined
     ? { ok: false, message: `${label}: one of ${options.join(', ')} was expected` }
     : { ok: true, value };

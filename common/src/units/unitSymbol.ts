@@ -1,4 +1,5 @@
-const ROOT_HERTZ = /\/(?:√|sqrt|root|rt)-?\(?hz\)?$/i;
+/** Lists in Windows-1252 have no `√`: programs write `v` or `?` for it. */
+const ROOT_HERTZ = /\/(?:√|sqrt|root|rt|v|\?)-?\(?hz\)?$/i;
 const HERTZ_TO_HALF = /\/\(?hz\)?\^?\(?(?:0[.,]5|1[/⁄]2)\)?$/i;
 const HERTZ_TO_MINUS_HALF = /[·⋅*]?\(?hz\)?\^\(?-(?:0[.,]5|1[/⁄]2)\)?$/i;
 const RMS = /(?<=[va])\(?rms\)?/i;

@@ -1715,7 +1715,7 @@ export interface components {
         };
         DoubtDto: {
             /** @enum {string} */
-            code: "below-shot-noise" | "implausibly-quiet" | "factor-of-1000" | "repeated" | "price-slip" | "new-supplier" | "in-use";
+            code: "below-shot-noise" | "implausibly-quiet" | "factor-of-1000" | "contradiction" | "repeated" | "price-slip" | "new-supplier" | "in-use";
             field: string | null;
             message: string;
         };

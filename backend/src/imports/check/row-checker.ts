@@ -1,6 +1,7 @@
 import {
   type ImportRowReader,
   importRowReader,
+  type PartValue,
   type RowError,
   rowJudge,
   type RowVerdict,
@@ -30,9 +31,15 @@ export interface CheckedRow {
 
 interface Seen {
   line: number;
-  /** The fingerprint of its cells as they stand in the file. */
-  written: number;
+  /** The fingerprint of what it says of the part besides its names. */
+  said: number;
 }
+
+const NAMES = new Set(['manufacturer', 'partNumber']);
+const FIRST_HASH = 0x811c9dc5;
+const PRIME = 0x01000193;
+const DOUBLE = new Float64Array(1);
+const DOUBLE_BITS = new Uint32Array(DOUBLE.buffer);
 
 /** Checks the rows of one list, which it remembers by their keys. */
 export class RowChecker {
@@ -62,10 +69,10 @@ export class RowChecker {
     if (existing !== null && existing.part === null)
       return this.refuseAt(record, reading, key, 'the library has a part of another kind by this name');
     const before = key === null ? undefined : this.seen.get(key);
-    const written = fingerprint(record.cells);
-    if (before !== undefined) return this.checkAgain(record, reading, key!, before, written, existing);
+    const said = fingerprint(reading.stated);
+    if (before !== undefined) return this.checkAgain(record, reading, key!, before, said, existing);
     const verdict = this.judge(reading, { existing: existing?.part ?? null, curated });
-    if (key !== null && verdict.state !== 'refused') this.seen.set(key, { line: record.line, written });
+    if (key !== null && verdict.state !== 'refused') this.seen.set(key, { line: record.line, said });
     return { record, key, verdict: this.remarked(verdict, existing), existing };
   }
 
@@ -83,11 +90,11 @@ export class RowChecker {
     record: CsvRecord,
     reading: Extract<Reading, { ok: true }>,
     key: string,
-    { line, written: before }: Seen,
-    written: number,
+    { line, said: before }: Seen,
+    said: number,
     existing: FoundPart<LibraryPart> | null,
   ): CheckedRow {
-    if (written !== before)
+    if (said !== before)
       return this.refuseAt(record, reading, key, `stands on line ${line} too, with other values`);
     const part = Object.fromEntries(reading.stated) as unknown as LibraryPart;
     const doubts = [{ code: 'repeated' as const, field: null, message: `the same as line ${line}` }];
@@ -105,15 +112,27 @@ export class RowChecker {
   }
 }
 
-/** A number that tells rows of one part from each other (the hash of FNV-1a over their characters). */
-function fingerprint(cells: readonly string[]): number {
-  let hash = 0x811c9dc5;
-  for (const cell of cells) {
-    for (let index = 0; index < cell.length; index += 1)
-      hash = Math.imul(hash ^ cell.charCodeAt(index), 0x01000193);
-    hash = Math.imul(hash ^ 0xffff, 0x01000193);
+/** A number that tells rows of one part from each other by their values, whatever way its names are written. */
+function fingerprint(stated: ReadonlyMap<string, PartValue>): number {
+  let hash = FIRST_HASH;
+  for (const [path, value] of stated) {
+    if (NAMES.has(path)) continue;
+    hash = hashed(hash, path);
+    hash = typeof value === 'number' ? hashedNumber(hash, value) : hashed(hash, value ?? '');
   }
   return hash;
+}
+
+function hashedNumber(before: number, value: number): number {
+  DOUBLE[0] = value;
+  return Math.imul(Math.imul(before ^ DOUBLE_BITS[0], PRIME) ^ DOUBLE_BITS[1], PRIME);
+}
+
+/** One more text in a hash of FNV-1a. */
+function hashed(before: number, text: string): number {
+  let hash = before;
+  for (let index = 0; index < text.length; index += 1) hash = Math.imul(hash ^ text.charCodeAt(index), PRIME);
+  return Math.imul(hash ^ 0xffff, PRIME);
 }
 
 function refused(record: CsvRecord, key: string | null, errors: RowError[]): CheckedRow {

@@ -1,8 +1,9 @@
-import type { DecimalMark, ListColumns } from '@roothertz/common/imports';
+import type { ListColumns } from '@roothertz/common/imports';
 import { parse } from 'csv-parse/sync';
 import iconv from 'iconv-lite';
 import { type CsvRecord, type ParsedRecord, parserOptions, toRecord } from './csv-records.js';
 import { type Delimiter, DELIMITERS } from '../../shared/csv/csv-format.js';
+import { decimalMarkOf } from './decimal-mark.js';
 import type { Dialect, DialectChoice } from './dialect.js';
 import type { FileFacts } from './text-encoding.js';
 
@@ -10,8 +11,6 @@ const SAMPLE_RECORDS = 100;
 const HEADER_WITHIN = 20;
 /** A number alone may head a column of prices, but it doesn't tell headings from other rows. */
 const LETTER = /\p{L}/u;
-const WITH_COMMA = /(?<![\d.,])\d+,\d+(?![\d.,])/;
-const WITH_POINT = /(?<![\d.,])\d+\.\d+(?![\d.,])/;
 
 /** A list's dialect as it was detected, where it isn't overruled, with the first rows from the headings on. */
 export interface DetectedDialect {
@@ -39,7 +38,7 @@ export function detectDialect(
     .sort((one, other) => other.known - one.known || other.evenness - one.evenness);
   if (best === undefined) return null;
   const { delimiter, header, sample, recordsBefore } = best;
-  const decimalMark = choice.decimalMark ?? decimalMarkOf(sample);
+  const decimalMark = choice.decimalMark ?? markOf(sample, delimiter);
   const { byteOrderMark } = facts;
   return {
     dialect: { encoding, byteOrderMark, delimiter, decimalMark, headerLine: header.line },
@@ -114,10 +113,11 @@ function evennessOf(records: readonly CsvRecord[]): number {
   return (width - 1) * share ** 2;
 }
 
-function decimalMarkOf(sample: readonly CsvRecord[]): DecimalMark {
-  const cells = sample.flatMap((record) => record.cells);
-  const count = (pattern: RegExp) => cells.filter((cell) => cell.length < 40 && pattern.test(cell)).length;
-  return count(WITH_COMMA) > count(WITH_POINT) ? 'comma' : 'point';
+function markOf(sample: readonly CsvRecord[], delimiter: Delimiter) {
+  return decimalMarkOf(
+    sample.flatMap(({ cells }) => cells),
+    delimiter,
+  );
 }
 
 function rememberedTest(test: (text: string) => boolean): (text: string) => boolean {

@@ -32,6 +32,12 @@ const SAMPLES = 5;
 const LONGEST_TEXT = 200;
 const LEAST_CONFIDENCE = 0.7;
 const SHORTEST_WORD = 4;
+const PERHAPS = 0.8;
+const MOST_RESEMBLING = 5;
+/** So much of the longer of two words must the shorter one be. */
+const LEAST_LENGTH = 0.6;
+/** A range is no value of any field. */
+const RANGE = /(?:range|bereich|plage)/i;
 const MOST_SPOTS = 2;
 
 /** The columns of a list with what each is proposed to become. */
@@ -78,18 +84,29 @@ function toProposal(proposed: ProposedColumn, column: number, confidence: number
   return { column, ...proposed, confidence };
 }
 
-/** Finds the field whose names a heading resembles. */
+/** Finds the field whose names a heading resembles, and what one that may mean a field means. */
 function fieldGuesser({ names }: ListColumns) {
-  const words = names.map(({ field, name }) => ({ field, word: normaliseWord(name) }));
+  const words = names.map(({ name, ...field }) => ({ ...field, word: normaliseWord(name) }));
+  const perhaps = new Map(words.filter(({ isSure }) => !isSure).map(({ word, field }) => [word, field]));
   const known = words.filter(({ word }) => word.length >= SHORTEST_WORD);
   const fuse = new Fuse(known, { keys: ['word'], includeScore: true, threshold: 1 - LEAST_CONFIDENCE });
   return (heading: string): { field: string; confidence: number } | null => {
     const word = normaliseWord(readHeading(heading).name);
-    if (word.length < SHORTEST_WORD) return null;
-    const [best] = fuse.search(word, { limit: 1 });
+    const field = perhaps.get(word);
+    if (field !== undefined) return { field, confidence: PERHAPS };
+    if (word.length < SHORTEST_WORD || RANGE.test(heading)) return null;
+    const best = fuse.search(word, { limit: MOST_RESEMBLING }).find(({ item }) => isAsLong(item.word, word));
     const confidence = Math.round((1 - (best?.score ?? 1)) * 100) / 100;
-    return confidence < LEAST_CONFIDENCE ? null : { field: best.item.field, confidence };
+    return best === undefined || confidence < LEAST_CONFIDENCE
+      ? null
+      : { field: best.item.field, confidence };
   };
+}
+
+/** A few letters stand in many a long name without meaning it. */
+function isAsLong(name: string, heading: string): boolean {
+  const [short, long] = [name.length, heading.length].sort((one, other) => one - other);
+  return short >= long * LEAST_LENGTH;
 }
 
 /**
