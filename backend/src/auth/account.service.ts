@@ -2,8 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
 import type { DataSource, EntityManager } from 'typeorm';
 import { MailQueue } from '../mail/mail-queue.service.js';
-import { DomainError } from '../shared/errors/domain-error.js';
-import { isDuplicateEntry } from '../shared/errors/duplicate-entry.js';
+import { duplicateAs } from '../shared/errors/duplicate-entry.js';
 import { UsersService } from '../users/users.service.js';
 import { accountExistsLetter, addressChangedLetter, confirmAddressLetter } from './account-letters.js';
 import { AccountTokens } from './account-tokens.service.js';
@@ -19,6 +18,8 @@ import { takingAtLeast } from './taking-at-least.js';
 import type { AddressDetails } from './token-purposes.js';
 
 const ANSWERED_AFTER_MS = 150;
+
+const refuseTaken = duplicateAs('account.exists', 'This address has an account of its own already.');
 
 /** What a person changes of their own account. */
 @Injectable()
@@ -66,12 +67,8 @@ export class AccountService {
     await this.sessions.endOthers(manager, id, (details as AddressDetails).sessionId);
     await this.tokens.revoke(manager, id, ['reset-password', 'change-address']);
     const to = { email: oldAddress, userId: id };
-    await this.mail.enqueue(manager, {
-      kind: 'address-changed',
-      to,
-      teamId: null,
-      letter: addressChangedLetter(name, email),
-    });
+    const letter = addressChangedLetter(name, email);
+    await this.mail.enqueue(manager, { kind: 'address-changed', to, letter });
   }
 
   private async sendTo(
@@ -83,28 +80,12 @@ export class AccountService {
     const other = await this.users.findByEmail(email);
     if (other !== null) {
       const to = { email, userId: other.id };
-      await this.mail.enqueue(manager, {
-        kind: 'account-exists',
-        to,
-        teamId: null,
-        letter: accountExistsLetter(),
-      });
+      await this.mail.enqueue(manager, { kind: 'account-exists', to, letter: accountExistsLetter() });
       return;
     }
     const details = { sessionId };
     const token = await this.tokens.issue(manager, { purpose: 'change-address', userId, email, details });
     const letter = confirmAddressLetter(name, token);
-    await this.mail.enqueue(manager, {
-      kind: 'confirm-address',
-      to: { email, userId },
-      teamId: null,
-      letter,
-    });
+    await this.mail.enqueue(manager, { kind: 'confirm-address', to: { email, userId }, letter });
   }
-}
-
-function refuseTaken(error: unknown): never {
-  if (isDuplicateEntry(error))
-    throw new DomainError('account.exists', 'This address has an account of its own already.');
-  throw error;
 }

@@ -28,11 +28,6 @@ export class PasswordChanges {
 
   private async tell(manager: EntityManager, { id: userId, email, name }: Account): Promise<void> {
     const letter = passwordChangedLetter(name);
-    await this.mail.enqueue(manager, {
-      kind: 'password-changed',
-      to: { email, userId },
-      teamId: null,
-      letter,
-    });
+    await this.mail.enqueue(manager, { kind: 'password-changed', to: { email, userId }, letter });
   }
 }

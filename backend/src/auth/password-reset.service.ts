@@ -52,12 +52,7 @@ export class PasswordReset {
         details: {},
       });
       const letter = resetPasswordLetter(name, token);
-      await this.mail.enqueue(manager, {
-        kind: 'reset-password',
-        to: { email, userId },
-        teamId: null,
-        letter,
-      });
+      await this.mail.enqueue(manager, { kind: 'reset-password', to: { email, userId }, letter });
     });
   }
 }

@@ -2,8 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
 import type { DataSource, EntityManager } from 'typeorm';
 import { MailQueue } from '../mail/mail-queue.service.js';
-import { DomainError } from '../shared/errors/domain-error.js';
-import { isDuplicateEntry } from '../shared/errors/duplicate-entry.js';
+import { duplicateAs } from '../shared/errors/duplicate-entry.js';
 import { UsersService } from '../users/users.service.js';
 import { accountExistsLetter, confirmSignUpLetter } from './account-letters.js';
 import { AccountTokens } from './account-tokens.service.js';
@@ -24,6 +23,8 @@ export interface SignUp {
 }
 
 const ANSWERED_AFTER_MS = 400;
+
+const refuseTaken = duplicateAs('account.exists', 'This address has an account already: sign in.');
 
 /**
  * Makes accounts. Until its address is confirmed a sign-up stands in its link alone, so that nobody can take a name,
@@ -60,29 +61,13 @@ export class SignUpService {
     await this.dataSource.transaction(async (manager) => {
       if (account !== null) {
         const to = { email, userId: account.id };
-        await this.mail.enqueue(manager, {
-          kind: 'account-exists',
-          to,
-          teamId: null,
-          letter: accountExistsLetter(),
-        });
+        await this.mail.enqueue(manager, { kind: 'account-exists', to, letter: accountExistsLetter() });
         return;
       }
       const details = { name, teamName, passwordHash };
       const token = await this.tokens.issue(manager, { purpose: 'sign-up', userId: null, email, details });
       const letter = confirmSignUpLetter(name, token);
-      await this.mail.enqueue(manager, {
-        kind: 'confirm-address',
-        to: { email, userId: null },
-        teamId: null,
-        letter,
-      });
+      await this.mail.enqueue(manager, { kind: 'confirm-address', to: { email, userId: null }, letter });
     });
   }
-}
-
-function refuseTaken(error: unknown): never {
-  if (isDuplicateEntry(error))
-    throw new DomainError('account.exists', 'This address has an account already: sign in.');
-  throw error;
 }

@@ -6,7 +6,7 @@ import { AuditService } from '../audit/audit.service.js';
 import type { Caller } from '../shared/access/caller.js';
 import { checkedRankingRequest } from '../shared/conditions/ranking-request.js';
 import { DomainError } from '../shared/errors/domain-error.js';
-import { isDuplicateEntry } from '../shared/errors/duplicate-entry.js';
+import { duplicateAs } from '../shared/errors/duplicate-entry.js';
 import { readId } from '../shared/ids/read-id.js';
 import type { ListQueryDto } from '../shared/list/list-query.dto.js';
 import { parseSort } from '../shared/list/sort.js';
@@ -24,6 +24,12 @@ import { SavedConditions } from './entities/saved-conditions.entity.js';
 import { nameKey } from '../shared/text/name-key.js';
 
 const SORTS = ['name', 'updatedAt'] as const;
+
+const refuseDuplicate = duplicateAs(
+  'conditions.duplicate',
+  'The team has saved conditions of this name already.',
+  [{ field: 'name', message: 'name: another one was expected, for this one is taken' }],
+);
 
 /** What is done whenever conditions have been saved, in the transaction that saves them. */
 export type SavedListener = (manager: EntityManager, caller: Caller) => Promise<void>;
@@ -188,11 +194,4 @@ async function assertRoom(manager: EntityManager, { teamId, plan }: Caller): Pro
   const { savedConditions: limit } = PLAN_LIMITS[plan];
   if (limit !== null && (await manager.countBy(SavedConditions, { teamId })) >= limit)
     throw new DomainError('plan.saved-conditions', `The team’s plan holds ${limit} saved conditions.`);
-}
-
-function refuseDuplicate(error: unknown): never {
-  if (!isDuplicateEntry(error)) throw error;
-  throw new DomainError('conditions.duplicate', 'The team has saved conditions of this name already.', {
-    errors: [{ field: 'name', message: 'name: another one was expected, for this one is taken' }],
-  });
 }

@@ -3,7 +3,7 @@ import type { DataSource, EntityManager } from 'typeorm';
 import type { AuditService } from '../audit/audit.service.js';
 import type { Caller } from '../shared/access/caller.js';
 import { DomainError } from '../shared/errors/domain-error.js';
-import { isDuplicateEntry } from '../shared/errors/duplicate-entry.js';
+import { duplicateAs } from '../shared/errors/duplicate-entry.js';
 import type { List } from '../shared/list/list-response.js';
 import { Library } from './entities/library.entity.js';
 import { Part } from './entities/part.entity.js';
@@ -15,6 +15,13 @@ import { filterParts, type PartFilters, type PartQuery, selectParts, sortParts }
 import { idsOfChanges, restood, type StandingChange, writeStandings } from './part-standings.js';
 import type { PartTable } from './part-tables.js';
 import { type PartChange, trailOf } from './part-trail.js';
+
+const refuseDuplicate = duplicateAs('part.duplicate', 'The library has this part already.', [
+  {
+    field: 'partNumber',
+    message: 'part number: the library has this part of this manufacturer already',
+  },
+]);
 
 /** Keeps the parts of a kind: each change bumps its library's revision in the same transaction. */
 export class PartStore<Kind extends LibraryPart> {
@@ -168,12 +175,4 @@ export class PartStore<Kind extends LibraryPart> {
       throw new DomainError('part.stale', 'Somebody has changed this part meanwhile: load it again.');
     return current;
   }
-}
-
-function refuseDuplicate(error: unknown): never {
-  if (!isDuplicateEntry(error)) throw error;
-  const message = 'part number: the library has this part of this manufacturer already';
-  throw new DomainError('part.duplicate', 'The library has this part already.', {
-    errors: [{ field: 'partNumber', message }],
-  });
 }

@@ -17,8 +17,8 @@ export interface Mail {
   kind: MailKind;
   /** The address, and whose it is; null = nobody's account. */
   to: { email: string; userId: number | null };
-  /** The team in whose work the message is sent; null = none. */
-  teamId: number | null;
+  /** The team in whose work the message is sent, if any. */
+  teamId?: number;
   letter: Letter;
 }
 

@@ -3,8 +3,7 @@ import { InjectDataSource } from '@nestjs/typeorm';
 import type { DataSource, EntityManager } from 'typeorm';
 import { AuditService } from '../audit/audit.service.js';
 import type { Caller } from '../shared/access/caller.js';
-import { DomainError } from '../shared/errors/domain-error.js';
-import { isDuplicateEntry } from '../shared/errors/duplicate-entry.js';
+import { duplicateAs } from '../shared/errors/duplicate-entry.js';
 import { likePattern } from '../shared/list/like-pattern.js';
 import type { ListQueryDto } from '../shared/list/list-query.dto.js';
 import { parseSort } from '../shared/list/sort.js';
@@ -18,6 +17,10 @@ import {
 import { Supplier } from './entities/supplier.entity.js';
 
 const SORTS = ['name'] as const;
+
+const refuseDuplicate = duplicateAs('supplier.duplicate', 'The team has a supplier of this name already.', [
+  { field: 'name', message: 'name: another one was expected, for this one is taken' },
+]);
 
 @Injectable()
 export class SuppliersService {
@@ -66,11 +69,4 @@ export class SuppliersService {
     ]);
     return { id, name };
   }
-}
-
-function refuseDuplicate(error: unknown): never {
-  if (!isDuplicateEntry(error)) throw error;
-  throw new DomainError('supplier.duplicate', 'The team has a supplier of this name already.', {
-    errors: [{ field: 'name', message: 'name: another one was expected, for this one is taken' }],
-  });
 }

@@ -6,7 +6,7 @@ import { assertPassword } from '../../auth/password-rules.js';
 import { hashPassword } from '../../auth/passwords.js';
 import type { Caller } from '../../shared/access/caller.js';
 import { DomainError } from '../../shared/errors/domain-error.js';
-import { isDuplicateEntry } from '../../shared/errors/duplicate-entry.js';
+import { duplicateAs } from '../../shared/errors/duplicate-entry.js';
 import { UsersService } from '../../users/users.service.js';
 import type { TeamResponseDto } from '../dto/team.dto.js';
 import { Membership } from '../entities/membership.entity.js';
@@ -15,6 +15,11 @@ import { TeamsService } from '../teams.service.js';
 import { type JoinTeamDto, type OpenInvitationDto, toOpenInvitation } from './dto/acceptance.dto.js';
 import { Invitation } from './entities/invitation.entity.js';
 import { findByToken, holdByToken } from './invitation-select.js';
+
+const refuseKnown = duplicateAs(
+  'invitation.account-exists',
+  'This address has an account: sign in with it to join.',
+);
 
 /** What the holder of an invitation's link can do with it. */
 @Injectable()
@@ -84,9 +89,4 @@ export class AcceptanceService {
       { action: 'member.joined', object, from: null, to: { roles } },
     ]);
   }
-}
-
-function refuseKnown(error: unknown): never {
-  if (!isDuplicateEntry(error)) throw error;
-  throw new DomainError('invitation.account-exists', 'This address has an account: sign in with it to join.');
 }

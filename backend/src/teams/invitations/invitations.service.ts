@@ -5,7 +5,7 @@ import type { DataSource, EntityManager } from 'typeorm';
 import { MailQueue } from '../../mail/mail-queue.service.js';
 import type { Caller } from '../../shared/access/caller.js';
 import { DomainError } from '../../shared/errors/domain-error.js';
-import { isDuplicateEntry } from '../../shared/errors/duplicate-entry.js';
+import { duplicateAs } from '../../shared/errors/duplicate-entry.js';
 import type { Roster } from '../roster.js';
 import { SeatsService } from '../seats.service.js';
 import { TeamChanges } from '../team-changes.service.js';
@@ -21,6 +21,10 @@ import { findInvitation, findStanding } from './invitation-select.js';
 import { newInvitationToken } from './invitation-token.js';
 
 const PAUSE_SECONDS = 60;
+const MEMBER = 'Somebody with this address is in your team already.';
+const INVITED = 'This address is invited already: send that invitation again.';
+
+const refuseDuplicate = duplicateAs('invitation.duplicate', INVITED, [{ field: 'email', message: INVITED }]);
 
 /** Whom a team has invited. */
 @Injectable()
@@ -102,7 +106,7 @@ function objectOf({ id, email }: Invitation) {
 
 function refuseMember({ members }: Roster, email: string): void {
   if (members.some(({ user }) => user.email === email))
-    throw atEmail('invitation.member', 'Somebody with this address is in your team already.');
+    throw new DomainError('invitation.member', MEMBER, { errors: [{ field: 'email', message: MEMBER }] });
 }
 
 function refuseHaste({ sentAt }: Invitation): void {
@@ -111,13 +115,4 @@ function refuseHaste({ sentAt }: Invitation): void {
     throw new DomainError('request.too-many', `It was just sent: try again in ${retryAfter} s.`, {
       retryAfter,
     });
-}
-
-function refuseDuplicate(error: unknown): never {
-  if (!isDuplicateEntry(error)) throw error;
-  throw atEmail('invitation.duplicate', 'This address is invited already: send that invitation again.');
-}
-
-function atEmail(code: 'invitation.member' | 'invitation.duplicate', detail: string): DomainError {
-  return new DomainError(code, detail, { errors: [{ field: 'email', message: detail }] });
 }
