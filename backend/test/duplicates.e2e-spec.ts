@@ -1,3 +1,4 @@
+import { AuditEntry } from '../src/audit/entities/audit-entry.entity.js';
 import { seedCuratedLibrary } from '../src/database/seeds/library-seed.js';
 import { KeptPair } from '../src/parts/entities/kept-pair.entity.js';
 import { createOpAmp } from './factories/op-amps.js';
@@ -76,6 +77,16 @@ describe('parts that may be one', () => {
     await decide('ask-again', pair).expect(204);
     expect(await isListed()).toBe(true);
     expect(await app.dataSource.manager.count(KeptPair)).toBe(0);
+    await decide('ask-again', pair).expect(204);
+    const trail = await app.dataSource.manager.find(AuditEntry, { where: { objectKind: 'pair' } });
+    expect(trail).toMatchObject([
+      {
+        action: 'pair.kept',
+        objectLabel: 'Lock LC-5/SOIC-8 and Lock & Co LC-5',
+        userId: librarian.caller.userId,
+      },
+      { action: 'pair.asked-again' },
+    ]);
   });
 
   it('can’t be decided of what isn’t a pair of readable parts', async () => {

@@ -5,6 +5,7 @@ import { saveConditions } from './factories/conditions.js';
 import { checkedList } from './factories/imports.js';
 import { createOffer, createSupplier } from './factories/offers.js';
 import { createOpAmp } from './factories/op-amps.js';
+import { changedStandings } from './factories/standings.js';
 import { createResistor } from './factories/resistors.js';
 import { SAMPLES } from './fuzz/samples.js';
 import { createTeam, signInMember, startTestApp, type TestApp, type TestMember } from './support/index.js';
@@ -60,6 +61,8 @@ describe('two teams', () => {
       '/api/team/invitations': (await theirs.agent.post('/api/team/invitations').send(INVITED).expect(201))
         .body.id,
     });
+    for (const kind of ['op-amps', 'resistors'])
+      ids[`/api/${kind}/standings`] = await changedStandings(theirs, kind);
     Object.assign(named, {
       oneId: part.id,
       otherId: part.id,

@@ -12,6 +12,8 @@ import { Library } from '../library/entities/library.entity.js';
 import { OpAmp } from '../library/entities/op-amp.entity.js';
 import { Part } from '../library/entities/part.entity.js';
 import { Resistor } from '../library/entities/resistor.entity.js';
+import { StandingBefore } from '../library/entities/standing-before.entity.js';
+import { StandingChange } from '../library/entities/standing-change.entity.js';
 import { Subscription } from '../plans/entities/subscription.entity.js';
 import { OutboxMail } from '../mail/entities/outbox-mail.entity.js';
 import { RefusedMail } from '../mail/entities/refused-mail.entity.js';
@@ -40,6 +42,8 @@ export const ENTITIES = [
   Part,
   OpAmp,
   Resistor,
+  StandingChange,
+  StandingBefore,
   KeptPair,
   SavedConditions,
   SavedConditionsPart,

@@ -1,4 +1,4 @@
-import type { LibraryPart } from '@roothertz/common/parts';
+import type { LibraryPart, Standing } from '@roothertz/common/parts';
 import type { DataSource, EntityManager } from 'typeorm';
 import type { AuditService } from '../audit/audit.service.js';
 import type { Caller } from '../shared/access/caller.js';
@@ -11,10 +11,24 @@ import type { LibraryService } from './library.service.js';
 import { type PartRecord, toPartRecord } from './part-record.js';
 import { insertParts, updatePart } from './part-rows.js';
 import { countGaps, type GapCounts } from './gap-counts.js';
-import { filterParts, type PartFilters, type PartQuery, selectParts, sortParts } from './part-select.js';
+import {
+  filterParts,
+  type PartFilters,
+  type PartQuery,
+  type PartSelect,
+  selectParts,
+  sortParts,
+} from './part-select.js';
+import {
+  bringBack,
+  changeMatching,
+  findStandingChange,
+  outcomeOf,
+  type StandingOutcome,
+} from './matching-standings.js';
 import { idsOfChanges, restood, type StandingChange, writeStandings } from './part-standings.js';
 import type { PartTable } from './part-tables.js';
-import { type PartChange, trailOf } from './part-trail.js';
+import { matchingTrail, type PartChange, trailOf } from './part-trail.js';
 
 const refuseDuplicate = duplicateAs('part.duplicate', 'The library has this part already.', [
   {
@@ -34,7 +48,7 @@ export class PartStore<Kind extends LibraryPart> {
 
   async list(caller: Caller, query: PartQuery): Promise<List<PartRecord<Kind>>> {
     const { catalogue } = this.table;
-    const select = filterParts(selectParts(this.dataSource.manager, this.table, caller), catalogue, query);
+    const select = this.selectMatching(this.dataSource.manager, caller, query);
     const [rows, total] = await sortParts(select, catalogue, query.sort)
       .limit(query.limit)
       .offset(query.offset)
@@ -44,9 +58,7 @@ export class PartStore<Kind extends LibraryPart> {
 
   /** How many of the parts lack each parameter that can be unknown, and how many lack none. */
   async countGaps(caller: Caller, query: PartFilters): Promise<GapCounts> {
-    const { catalogue } = this.table;
-    const select = filterParts(selectParts(this.dataSource.manager, this.table, caller), catalogue, query);
-    return countGaps(select, catalogue);
+    return countGaps(this.selectMatching(this.dataSource.manager, caller, query), this.table.catalogue);
   }
 
   find(caller: Caller, id: number | null): Promise<PartRecord<Kind>> {
@@ -112,6 +124,61 @@ export class PartStore<Kind extends LibraryPart> {
       );
       return changes.map(({ id }) => named(id));
     });
+  }
+
+  /** What would become of all parts of a filter, said of the team's library as it is now. */
+  async standingOutcome(
+    caller: Caller,
+    filters: PartFilters,
+    wanted: Partial<Standing>,
+  ): Promise<StandingOutcome & { libraryRevision: number }> {
+    const libraryId = await this.libraries.editableLibrary(caller);
+    const { revision } = await this.dataSource.manager.findOneByOrFail(Library, { id: libraryId });
+    const select = this.selectMatching(this.dataSource.manager, caller, filters);
+    return { ...(await outcomeOf(select, wanted)), libraryRevision: revision };
+  }
+
+  /** Changes how all own parts of a filter stand, or none where the library isn't the one any more of which the outcome was said. */
+  changeMatching(
+    caller: Caller,
+    filters: PartFilters,
+    { libraryRevision, ...wanted }: Partial<Standing> & { libraryRevision: number },
+  ): Promise<{ id: number; changed: number }> {
+    const { kind } = this.table.catalogue;
+    return this.changeLibrary(caller, async (manager, libraryId) => {
+      const { revision } = await manager.findOneByOrFail(Library, { id: libraryId });
+      if (revision !== libraryRevision + 1)
+        throw new DomainError(
+          'part.library-changed',
+          'Somebody has changed the library meanwhile: look again.',
+        );
+      const select = this.selectMatching(manager, caller, filters);
+      const { id, partCount: parts } = await changeMatching(manager, caller, kind, select, wanted);
+      await this.audit.record(manager, caller, [
+        matchingTrail('standings.changed', kind, { id, parts }, { ...wanted, of: filters }),
+      ]);
+      return { id, changed: parts };
+    });
+  }
+
+  /** Brings back how the parts of such a change stood; those that were changed since stay as they are. */
+  undoMatching(caller: Caller, id: number | null): Promise<{ takenBack: number; kept: number }> {
+    const { kind } = this.table.catalogue;
+    return this.changeLibrary(caller, async (manager) => {
+      const change = await findStandingChange(manager, caller, kind, id);
+      const takenBack = await bringBack(manager, caller, change);
+      const outcome = { takenBack, kept: change.partCount - takenBack };
+      const parts = change.partCount;
+      await this.audit.record(manager, caller, [
+        matchingTrail('standings.undone', kind, { id: change.id, parts }, outcome),
+      ]);
+      return outcome;
+    });
+  }
+
+  private selectMatching(manager: EntityManager, caller: Caller, filters: PartFilters): PartSelect {
+    const { catalogue } = this.table;
+    return filterParts(selectParts(manager, this.table, caller), catalogue, filters);
   }
 
   /** The bump comes first: its lock on the library lets one writer after the other see what is there. */

@@ -21,6 +21,17 @@ export function trailOf<Kind extends LibraryPart>(kind: PartKind, change: PartCh
   };
 }
 
+/** What the trail says of a change of all parts of a filter. */
+export function matchingTrail(
+  action: 'standings.changed' | 'standings.undone',
+  kind: PartKind,
+  { id, parts }: { id: number; parts: number },
+  to: object,
+): Recorded {
+  const label = `${parts} ${parts === 1 ? kind : `${kind}s`}`;
+  return { action, object: { kind: 'standings', id, label }, from: null, to };
+}
+
 function actionOf<Kind extends LibraryPart>([before, after]: PartChange<Kind>): AuditAction {
   if (before === null) return 'part.created';
   if (after === null) return 'part.deleted';

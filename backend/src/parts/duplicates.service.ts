@@ -7,9 +7,10 @@ import {
   type PartKind,
 } from '@roothertz/common/parts';
 import type { DataSource } from 'typeorm';
+import { AuditService, type Recorded } from '../audit/audit.service.js';
 import { LibraryService, type ReadableLibrary } from '../library/library.service.js';
 import type { PartTable } from '../library/part-tables.js';
-import { findReadableIds } from '../library/readable-parts.js';
+import { findReadableParts } from '../library/readable-parts.js';
 import { RevisionCache } from '../library/revision-cache.js';
 import type { Caller } from '../shared/access/caller.js';
 import { DomainError } from '../shared/errors/domain-error.js';
@@ -24,6 +25,12 @@ export interface FoundPair {
   otherId: number;
   reasons: DuplicateReason[];
   likelihood: number;
+}
+
+/** Two parts with what the trail calls them. */
+interface NamedPair {
+  ids: { oneId: number; otherId: number };
+  label: string;
 }
 
 /** What the search depends on: it is done anew when one of the libraries has changed. */
@@ -41,6 +48,7 @@ export class DuplicatesService {
   constructor(
     @InjectDataSource() private readonly dataSource: DataSource,
     private readonly libraries: LibraryService,
+    private readonly audit: AuditService,
   ) {}
 
   async list<Kind extends LibraryPart>(
@@ -60,18 +68,20 @@ export class DuplicatesService {
 
   async keepBoth(caller: Caller, dto: PartPairDto): Promise<void> {
     const pair = await this.readablePair(caller, dto);
-    await this.dataSource.manager
-      .createQueryBuilder()
-      .insert()
-      .into(KeptPair)
-      .values({ teamId: caller.teamId, ...pair, decidedAt: new Date(), decidedById: caller.userId })
-      .orIgnore()
-      .execute();
+    const decided = { teamId: caller.teamId, ...pair.ids, decidedAt: new Date(), decidedById: caller.userId };
+    await this.dataSource.transaction(async (manager) => {
+      if (await manager.existsBy(KeptPair, { teamId: caller.teamId, ...pair.ids })) return;
+      await manager.createQueryBuilder().insert().into(KeptPair).values(decided).orIgnore().execute();
+      await this.audit.record(manager, caller, [recordOf('pair.kept', pair)]);
+    });
   }
 
   async askAgain(caller: Caller, dto: PartPairDto): Promise<void> {
     const pair = await this.readablePair(caller, dto);
-    await this.dataSource.manager.delete(KeptPair, { teamId: caller.teamId, ...pair });
+    await this.dataSource.transaction(async (manager) => {
+      const { affected } = await manager.delete(KeptPair, { teamId: caller.teamId, ...pair.ids });
+      if (affected !== 0) await this.audit.record(manager, caller, [recordOf('pair.asked-again', pair)]);
+    });
   }
 
   private cacheOf<Kind extends LibraryPart>(table: PartTable<Kind>): RevisionCache<FoundPair[], Searched> {
@@ -100,16 +110,22 @@ export class DuplicatesService {
     return new Set(kept.map(keyOf));
   }
 
-  private async readablePair(caller: Caller, dto: PartPairDto) {
+  private async readablePair(caller: Caller, dto: PartPairDto): Promise<NamedPair> {
     const [oneId, otherId] = [readId(dto.oneId)!, readId(dto.otherId)!];
-    const readable = await findReadableIds(this.dataSource.manager, caller, [oneId, otherId]);
-    if (!readable.has(oneId) || !readable.has(otherId))
+    const found = await findReadableParts(this.dataSource.manager, caller, [oneId, otherId]);
+    const [one, other] = [oneId, otherId].map((id) => found.find((part) => part.id === id));
+    if (one === undefined || other === undefined)
       throw new DomainError('part.not-found', 'There is no such part in your libraries.');
-    if (oneId !== otherId) return ordered(oneId, otherId);
+    const label = [one, other].map(({ manufacturer, partNumber }) => `${manufacturer} ${partNumber}`);
+    if (oneId !== otherId) return { ids: ordered(oneId, otherId), label: label.join(' and ') };
     throw new DomainError('request.invalid', 'A part can’t be its own duplicate.', {
       errors: [{ field: 'otherId', message: 'another part was expected' }],
     });
   }
+}
+
+function recordOf(action: 'pair.kept' | 'pair.asked-again', { ids, label }: NamedPair): Recorded {
+  return { action, object: { kind: 'pair', id: keyOf(ids), label }, from: null, to: null };
 }
 
 function ordered(oneId: number, otherId: number): { oneId: number; otherId: number } {

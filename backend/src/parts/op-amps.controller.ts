@@ -7,8 +7,14 @@ import { VersionQueryDto } from '../shared/list/version-query.dto.js';
 import { ChangeStandingsDto } from './dto/change-standings.dto.js';
 import { CreateOpAmpDto } from './dto/create-op-amp.dto.js';
 import { ListDuplicatesDto } from './dto/list-duplicates.dto.js';
+import {
+  ChangeMatchingDto,
+  MatchingChangedDto,
+  StandingOutcomeDto,
+  StandingsBackDto,
+} from './dto/matching-standings.dto.js';
 import { GapCountsDto } from './dto/gap-counts.dto.js';
-import { ListOpAmpsDto, OpAmpFilterDto } from './dto/list-op-amps.dto.js';
+import { ListOpAmpsDto, OpAmpFilterDto, OpAmpMatchDto, OpAmpOutcomeDto } from './dto/list-op-amps.dto.js';
 import { OpAmpDuplicateListDto, OpAmpListDto, OpAmpResponseDto } from './dto/op-amp-response.dto.js';
 import { UpdateOpAmpDto } from './dto/update-op-amp.dto.js';
 import { OpAmpsService } from './op-amps.service.js';
@@ -40,6 +46,38 @@ export class OpAmpsController {
     @Body() { parts }: ChangeStandingsDto,
   ): Promise<OpAmpListDto> {
     return this.opAmps.changeStandings(caller, parts);
+  }
+
+  /** What would become of all op-amps of a filter that are to stand otherwise. */
+  @Get('standings')
+  @Access('parts.edit')
+  @ApiOkResponse({ type: StandingOutcomeDto })
+  getOpAmpStandingOutcome(
+    @Caller() caller: CallerOfRequest,
+    @Query() query: OpAmpOutcomeDto,
+  ): Promise<StandingOutcomeDto> {
+    return this.opAmps.outcome(caller, query);
+  }
+
+  @Post('standings')
+  @HttpCode(200)
+  @Access('parts.edit')
+  @ApiOkResponse({ type: MatchingChangedDto })
+  changeMatchingOpAmps(
+    @Caller() caller: CallerOfRequest,
+    @Query() filter: OpAmpMatchDto,
+    @Body() dto: ChangeMatchingDto,
+  ): Promise<MatchingChangedDto> {
+    return this.opAmps.change(caller, filter, dto);
+  }
+
+  /** Within a day; parts that were changed since stay as they are. */
+  @Post('standings/:id/undo')
+  @HttpCode(200)
+  @Access('parts.edit')
+  @ApiOkResponse({ type: StandingsBackDto })
+  undoMatchingOpAmps(@Caller() caller: CallerOfRequest, @Param('id') id: string): Promise<StandingsBackDto> {
+    return this.opAmps.undoMatching(caller, id);
   }
 
   @Get('completeness')

@@ -1,4 +1,5 @@
 import { Module } from '@nestjs/common';
+import { AuditModule } from '../audit/audit.module.js';
 import { ConditionsModule } from '../conditions/conditions.module.js';
 import { LibraryModule } from '../library/library.module.js';
 import { TeamsModule } from '../teams/teams.module.js';
@@ -12,7 +13,7 @@ import { ResistorsController } from './resistors.controller.js';
 import { ResistorsService } from './resistors.service.js';
 
 @Module({
-  imports: [ConditionsModule, LibraryModule, TeamsModule],
+  imports: [AuditModule, ConditionsModule, LibraryModule, TeamsModule],
   controllers: [OpAmpsController, ResistorsController, PartUsesController, DuplicatesController],
   providers: [DuplicatesService, PartUsesService, OpAmpsService, ResistorsService],
 })

@@ -1,6 +1,6 @@
 import type { Library, LibraryPart, PartFields } from '@roothertz/common/parts';
 import type { PartRecord } from '../library/part-record.js';
-import { type PartQuery, partSorts } from '../library/part-select.js';
+import { type PartFilters, type PartQuery, partSorts } from '../library/part-select.js';
 import type { StandingChange } from '../library/part-standings.js';
 import type { PartStore } from '../library/part-store.js';
 import type { Caller } from '../shared/access/caller.js';
@@ -9,6 +9,13 @@ import type { List } from '../shared/list/list-response.js';
 import { parseSort } from '../shared/list/sort.js';
 import type { UpdatePartDto } from './dto/update-part.dto.js';
 import type { Duplicate } from './dto/duplicate-response.dto.js';
+import type {
+  ChangeMatchingDto,
+  MatchingChangedDto,
+  StandingOutcomeDto,
+  StandingsBackDto,
+  WantedStandingDto,
+} from './dto/matching-standings.dto.js';
 import type { ListDuplicatesDto } from './dto/list-duplicates.dto.js';
 import type { DuplicatesService } from './duplicates.service.js';
 import type { PartUsesService } from './part-uses.service.js';
@@ -47,6 +54,27 @@ export class PartsService<Kind extends LibraryPart> {
   async changeStandings(caller: Caller, changes: readonly StandingChange[]): Promise<List<Answer<Kind>>> {
     const records = await this.store.changeStandings(caller, changes);
     return { items: records.map((record) => toAnswer(record)), total: records.length };
+  }
+
+  standingOutcome(
+    caller: Caller,
+    filters: PartFilters,
+    { toLifecycle: lifecycle, toApproval: approval }: WantedStandingDto,
+  ): Promise<StandingOutcomeDto> {
+    return this.store.standingOutcome(caller, filters, { lifecycle, approval });
+  }
+
+  async changeMatching(
+    caller: Caller,
+    filters: PartFilters,
+    dto: ChangeMatchingDto,
+  ): Promise<MatchingChangedDto> {
+    const { id, changed } = await this.store.changeMatching(caller, filters, dto);
+    return { id: String(id), changed };
+  }
+
+  undoMatching(caller: Caller, id: string): Promise<StandingsBackDto> {
+    return this.store.undoMatching(caller, readId(id));
   }
 
   remove(caller: Caller, id: string, version: number): Promise<void> {

@@ -7,8 +7,19 @@ import { VersionQueryDto } from '../shared/list/version-query.dto.js';
 import { ChangeStandingsDto } from './dto/change-standings.dto.js';
 import { CreateResistorDto } from './dto/create-resistor.dto.js';
 import { ListDuplicatesDto } from './dto/list-duplicates.dto.js';
+import {
+  ChangeMatchingDto,
+  MatchingChangedDto,
+  StandingOutcomeDto,
+  StandingsBackDto,
+} from './dto/matching-standings.dto.js';
 import { GapCountsDto } from './dto/gap-counts.dto.js';
-import { ListResistorsDto, ResistorFilterDto } from './dto/list-resistors.dto.js';
+import {
+  ListResistorsDto,
+  ResistorFilterDto,
+  ResistorMatchDto,
+  ResistorOutcomeDto,
+} from './dto/list-resistors.dto.js';
 import {
   ResistorDuplicateListDto,
   ResistorListDto,
@@ -50,6 +61,41 @@ export class ResistorsController {
     @Body() { parts }: ChangeStandingsDto,
   ): Promise<ResistorListDto> {
     return this.resistors.changeStandings(caller, parts);
+  }
+
+  /** What would become of all resistors of a filter that are to stand otherwise. */
+  @Get('standings')
+  @Access('parts.edit')
+  @ApiOkResponse({ type: StandingOutcomeDto })
+  getResistorStandingOutcome(
+    @Caller() caller: CallerOfRequest,
+    @Query() query: ResistorOutcomeDto,
+  ): Promise<StandingOutcomeDto> {
+    return this.resistors.outcome(caller, query);
+  }
+
+  @Post('standings')
+  @HttpCode(200)
+  @Access('parts.edit')
+  @ApiOkResponse({ type: MatchingChangedDto })
+  changeMatchingResistors(
+    @Caller() caller: CallerOfRequest,
+    @Query() filter: ResistorMatchDto,
+    @Body() dto: ChangeMatchingDto,
+  ): Promise<MatchingChangedDto> {
+    return this.resistors.change(caller, filter, dto);
+  }
+
+  /** Within a day; parts that were changed since stay as they are. */
+  @Post('standings/:id/undo')
+  @HttpCode(200)
+  @Access('parts.edit')
+  @ApiOkResponse({ type: StandingsBackDto })
+  undoMatchingResistors(
+    @Caller() caller: CallerOfRequest,
+    @Param('id') id: string,
+  ): Promise<StandingsBackDto> {
+    return this.resistors.undoMatching(caller, id);
   }
 
   @Get('completeness')

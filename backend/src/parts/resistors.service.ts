@@ -4,8 +4,18 @@ import type { PartFilters } from '../library/part-select.js';
 import { ResistorStore } from '../library/resistor-store.service.js';
 import type { Caller } from '../shared/access/caller.js';
 import type { GapCountsDto } from './dto/gap-counts.dto.js';
-import type { ListResistorsDto, ResistorFilterDto } from './dto/list-resistors.dto.js';
+import type {
+  ListResistorsDto,
+  ResistorFilterDto,
+  ResistorMatchDto,
+  ResistorOutcomeDto,
+} from './dto/list-resistors.dto.js';
 import type { ResistorListDto } from './dto/resistor-response.dto.js';
+import type {
+  ChangeMatchingDto,
+  MatchingChangedDto,
+  StandingOutcomeDto,
+} from './dto/matching-standings.dto.js';
 import { DuplicatesService } from './duplicates.service.js';
 import { PartUsesService } from './part-uses.service.js';
 import { PartsService } from './parts.service.js';
@@ -16,8 +26,19 @@ export class ResistorsService extends PartsService<ResistorPart> {
     super(store, uses, duplicates);
   }
 
-  list(caller: Caller, { limit, offset, sort, missing, ...dto }: ListResistorsDto): Promise<ResistorListDto> {
-    return this.listParts(caller, { limit, offset, sort, missing, ...filtersOf(dto) });
+  list(caller: Caller, { limit, offset, sort, ...dto }: ListResistorsDto): Promise<ResistorListDto> {
+    return this.listParts(caller, { limit, offset, sort, ...filtersOf(dto) });
+  }
+
+  outcome(
+    caller: Caller,
+    { toLifecycle, toApproval, ...filter }: ResistorOutcomeDto,
+  ): Promise<StandingOutcomeDto> {
+    return this.standingOutcome(caller, filtersOf(filter), { toLifecycle, toApproval });
+  }
+
+  change(caller: Caller, filter: ResistorMatchDto, dto: ChangeMatchingDto): Promise<MatchingChangedDto> {
+    return this.changeMatching(caller, filtersOf(filter), dto);
   }
 
   countGaps(caller: Caller, dto: ResistorFilterDto): Promise<GapCountsDto> {
@@ -25,7 +46,7 @@ export class ResistorsService extends PartsService<ResistorPart> {
   }
 }
 
-function filtersOf(dto: ResistorFilterDto): PartFilters {
+function filtersOf(dto: ResistorMatchDto): PartFilters {
   const { technology, resistanceFrom: from, resistanceTo: to, ...filters } = dto;
   return { ...filters, choice: technology, range: { key: 'resistance', from, to } };
 }

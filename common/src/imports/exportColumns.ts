@@ -11,7 +11,8 @@ export interface ExportColumn<Part> {
 
 /**
  * The columns in which a library is exported; an import reads each of their cells back to the very same value.
- * Figures stand in the catalogue's unit with all their digits, an unknown one as an empty cell.
+ * Figures stand in the catalogue's unit with all their digits, an unknown one as an empty cell; 1.234 stands as 1.2340,
+ * so that nobody takes its mark for one that groups thousands.
  */
 export function exportColumns<Part extends LibraryPart>(
   catalogue: ListedFields,
@@ -46,5 +47,9 @@ export function exportColumns<Part extends LibraryPart>(
 function figureCell(value: number | null, exponent: number, mark: DecimalMark): string {
   if (value === null) return '';
   const text = shortestNumber(value, exponent).replaceAll('−', '-');
+  return inMark(/^-?[1-9]\d{0,2}\.\d{3}$/.test(text) ? `${text}0` : text, mark);
+}
+
+function inMark(text: string, mark: DecimalMark): string {
   return mark === 'comma' ? text.replace('.', ',') : text;
 }

@@ -884,6 +884,38 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/op-amps/standings": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["getOpAmpStandingOutcome"];
+        put?: never;
+        post: operations["changeMatchingOpAmps"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/op-amps/standings/{id}/undo": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["undoMatchingOpAmps"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/op-amps/{id}": {
         parameters: {
             query?: never;
@@ -1150,6 +1182,38 @@ export interface paths {
         get: operations["listResistorDuplicates"];
         put?: never;
         post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/resistors/standings": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["getResistorStandingOutcome"];
+        put?: never;
+        post: operations["changeMatchingResistors"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/resistors/standings/{id}/undo": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["undoMatchingResistors"];
         delete?: never;
         options?: never;
         head?: never;
@@ -1458,7 +1522,7 @@ export interface components {
         };
         AuditEntryResponseDto: {
             /** @enum {string} */
-            action: "offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.founded" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.account-closed" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked";
+            action: "offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "standings.changed" | "standings.undone" | "pair.kept" | "pair.asked-again" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.founded" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.account-closed" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked";
             /** Format: date-time */
             at: string;
             /** @description null where the account is gone. */
@@ -1478,7 +1542,7 @@ export interface components {
         AuditObjectDto: {
             id: string;
             /** @enum {string} */
-            kind: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
+            kind: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "standings" | "pair" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
             /** @description What it was called then. */
             label: string | null;
         };
@@ -1539,6 +1603,14 @@ export interface components {
             /** @enum {string} */
             kind: "price-digest" | "part-notice";
             wanted: boolean;
+        };
+        ChangeMatchingDto: {
+            /** @enum {string} */
+            approval?: "approved" | "restricted" | "not-approved";
+            /** @description The version that was last read. */
+            libraryRevision: number;
+            /** @enum {string} */
+            lifecycle?: "active" | "not-recommended" | "last-time-buy" | "obsolete";
         };
         ChangePasswordDto: {
             currentPassword: string;
@@ -1724,7 +1796,7 @@ export interface components {
             email: string;
         };
         /** @enum {string} */
-        ErrorCode: "request.invalid" | "billing.event" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "billing.declined" | "access.seats" | "plan.saved-conditions" | "access.origin" | "access.role" | "access.undeclared" | "invitation.other-address" | "part.curated" | "request.unknown-path" | "part.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "invitation.not-found" | "member.not-found" | "import.not-found" | "mail.unknown-link" | "session.not-found" | "team.not-found" | "token.unknown" | "invitation.member" | "invitation.duplicate" | "invitation.used" | "invitation.account-exists" | "account.exists" | "account.needed" | "team.last-admin" | "team.owner" | "part.stale" | "part.duplicate" | "part.in-use" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "billing.trial-used" | "billing.subscribed" | "billing.not-subscribed" | "billing.outdated" | "import.state" | "import.stale" | "import.too-many" | "import.outdated" | "invitation.expired" | "invitation.revoked" | "token.used" | "token.expired" | "import.too-large" | "request.too-large" | "request.unsupported" | "account.invalid" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "team.owner-invalid" | "billing.seats" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "billing.unavailable" | "database.unavailable";
+        ErrorCode: "request.invalid" | "billing.event" | "session.missing" | "session.wrong-credentials" | "access.plan" | "access.read-only" | "billing.declined" | "access.seats" | "plan.saved-conditions" | "access.origin" | "access.role" | "access.undeclared" | "invitation.other-address" | "part.curated" | "request.unknown-path" | "part.not-found" | "standing-change.not-found" | "conditions.not-found" | "supplier.not-found" | "offer.not-found" | "invitation.not-found" | "member.not-found" | "import.not-found" | "mail.unknown-link" | "session.not-found" | "team.not-found" | "token.unknown" | "invitation.member" | "invitation.duplicate" | "invitation.used" | "invitation.account-exists" | "account.exists" | "account.needed" | "team.last-admin" | "team.owner" | "part.stale" | "part.library-changed" | "part.duplicate" | "part.in-use" | "conditions.stale" | "conditions.duplicate" | "supplier.duplicate" | "offer.stale" | "offer.duplicate" | "billing.trial-used" | "billing.subscribed" | "billing.not-subscribed" | "billing.outdated" | "import.state" | "import.stale" | "import.too-many" | "import.outdated" | "invitation.expired" | "invitation.revoked" | "token.used" | "token.expired" | "import.too-large" | "request.too-large" | "request.unsupported" | "account.invalid" | "part.invalid" | "conditions.invalid" | "offer.invalid" | "rates.invalid" | "team.owner-invalid" | "billing.seats" | "import.unreadable" | "import.mapping" | "request.too-many" | "server.failed" | "billing.unavailable" | "database.unavailable";
         EvaluateStageDto: {
             amplifier: components["schemas"]["AmplifierDto"];
             conditions: components["schemas"]["OperatingConditionsDto"];
@@ -1974,6 +2046,11 @@ export interface components {
             /** @description The version that was last read. */
             version?: number;
             wholeList?: components["schemas"]["WholeListDto"];
+        };
+        MatchingChangedDto: {
+            changed: number;
+            /** @description By which the change can be taken back for a day. */
+            id: string;
         };
         MemberDto: {
             id: string;
@@ -2948,6 +3025,22 @@ export interface components {
             /** @description The version that was last read. */
             version: number;
         };
+        StandingOutcomeDto: {
+            changed: number;
+            /** @description Parts that the filter lets through. */
+            chosen: number;
+            /** @description They can’t be changed. */
+            curated: number;
+            /** @description What the outcome was said of: the team’s library then. */
+            libraryRevision: number;
+            /** @description They stand so already. */
+            unchanged: number;
+        };
+        StandingsBackDto: {
+            /** @description They were changed since, and stay. */
+            kept: number;
+            takenBack: number;
+        };
         StatedOfListDto: {
             currency: string | null;
             supplier: string | null;
@@ -3259,8 +3352,8 @@ export interface operations {
     listAuditEntries: {
         parameters: {
             query?: {
-                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.founded" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.account-closed" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
-                objectKind?: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
+                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "standings.changed" | "standings.undone" | "pair.kept" | "pair.asked-again" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.founded" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.account-closed" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
+                objectKind?: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "standings" | "pair" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
                 objectId?: string;
                 userId?: string;
                 from?: string;
@@ -3296,8 +3389,8 @@ export interface operations {
     exportAuditEntries: {
         parameters: {
             query?: {
-                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.founded" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.account-closed" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
-                objectKind?: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
+                action?: ("offer.opened" | "offer.changed" | "offer.confirmed" | "offer.confirmation-undone" | "offer.closed" | "supplier.added" | "rates.changed" | "price-settings.changed" | "part.created" | "part.changed" | "part.retired" | "part.restored" | "part.deleted" | "standings.changed" | "standings.undone" | "pair.kept" | "pair.asked-again" | "import.applied" | "import.undone" | "import.cancelled" | "import.discarded" | "conditions.saved" | "conditions.changed" | "conditions.deleted" | "plan.trial-started" | "plan.changed" | "team.founded" | "team.renamed" | "team.handed-over" | "member.roles-changed" | "member.removed" | "member.left" | "member.account-closed" | "member.joined" | "invitation.sent" | "invitation.resent" | "invitation.revoked")[];
+                objectKind?: "offer" | "supplier" | "rate" | "price-settings" | "op-amp" | "resistor" | "standings" | "pair" | "import" | "conditions" | "plan" | "team" | "member" | "invitation";
                 objectId?: string;
                 userId?: string;
                 from?: string;
@@ -5145,6 +5238,112 @@ export interface operations {
             };
         };
     };
+    getOpAmpStandingOutcome: {
+        parameters: {
+            query?: {
+                search?: string;
+                library?: ("curated" | "team")[];
+                lifecycle?: ("active" | "not-recommended" | "last-time-buy" | "obsolete")[];
+                approval?: ("approved" | "restricted" | "not-approved")[];
+                inputType?: ("bipolar" | "jfet" | "cmos" | "zero-drift")[];
+                missing?: ("currentNoise" | "gainBandwidth" | "voltageNoiseCorner" | "currentNoiseCorner" | "inputCapacitance" | "minimumStableGain" | "inputType" | "inputBiasCurrent" | "supplyMinimum" | "supplyMaximum" | "supplyCurrent")[];
+                toLifecycle?: "active" | "not-recommended" | "last-time-buy" | "obsolete";
+                toApproval?: "approved" | "restricted" | "not-approved";
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StandingOutcomeDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    changeMatchingOpAmps: {
+        parameters: {
+            query?: {
+                search?: string;
+                library?: ("curated" | "team")[];
+                lifecycle?: ("active" | "not-recommended" | "last-time-buy" | "obsolete")[];
+                approval?: ("approved" | "restricted" | "not-approved")[];
+                inputType?: ("bipolar" | "jfet" | "cmos" | "zero-drift")[];
+                missing?: ("currentNoise" | "gainBandwidth" | "voltageNoiseCorner" | "currentNoiseCorner" | "inputCapacitance" | "minimumStableGain" | "inputType" | "inputBiasCurrent" | "supplyMinimum" | "supplyMaximum" | "supplyCurrent")[];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChangeMatchingDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MatchingChangedDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    undoMatchingOpAmps: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StandingsBackDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
     getOpAmp: {
         parameters: {
             query?: never;
@@ -5908,6 +6107,120 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["ResistorDuplicateListDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    getResistorStandingOutcome: {
+        parameters: {
+            query?: {
+                search?: string;
+                library?: ("curated" | "team")[];
+                lifecycle?: ("active" | "not-recommended" | "last-time-buy" | "obsolete")[];
+                approval?: ("approved" | "restricted" | "not-approved")[];
+                technology?: ("metal-foil" | "thin-film" | "metal-film" | "wirewound" | "thick-film" | "carbon-film" | "carbon-composition")[];
+                /** @description The least value that the list holds. In Ω. */
+                resistanceFrom?: number;
+                /** @description The greatest value that the list holds. In Ω. */
+                resistanceTo?: number;
+                missing?: ("noiseIndex" | "tolerance" | "powerRating" | "technology" | "temperatureRise" | "temperatureCoefficient")[];
+                toLifecycle?: "active" | "not-recommended" | "last-time-buy" | "obsolete";
+                toApproval?: "approved" | "restricted" | "not-approved";
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StandingOutcomeDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    changeMatchingResistors: {
+        parameters: {
+            query?: {
+                search?: string;
+                library?: ("curated" | "team")[];
+                lifecycle?: ("active" | "not-recommended" | "last-time-buy" | "obsolete")[];
+                approval?: ("approved" | "restricted" | "not-approved")[];
+                technology?: ("metal-foil" | "thin-film" | "metal-film" | "wirewound" | "thick-film" | "carbon-film" | "carbon-composition")[];
+                /** @description The least value that the list holds. In Ω. */
+                resistanceFrom?: number;
+                /** @description The greatest value that the list holds. In Ω. */
+                resistanceTo?: number;
+                missing?: ("noiseIndex" | "tolerance" | "powerRating" | "technology" | "temperatureRise" | "temperatureCoefficient")[];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChangeMatchingDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MatchingChangedDto"];
+                };
+            };
+            /** @description Problem details (RFC 9457) */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    undoMatchingResistors: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StandingsBackDto"];
                 };
             };
             /** @description Problem details (RFC 9457) */

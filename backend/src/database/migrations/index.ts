@@ -18,6 +18,7 @@ import { AddPartsOfConditions1796090900000 } from './1796090900000-AddPartsOfCon
 import { KeepEarlierConfirmations1796090901000 } from './1796090901000-KeepEarlierConfirmations.js';
 import { CreateNotices1796091000000 } from './1796091000000-CreateNotices.js';
 import { EndSessionsWithMembership1796091100000 } from './1796091100000-EndSessionsWithMembership.js';
+import { CreateStandingChanges1796103000000 } from './1796103000000-CreateStandingChanges.js';
 
 /** All migrations; they run in the order of the time in their names. */
 export const MIGRATIONS = [
@@ -41,4 +42,5 @@ export const MIGRATIONS = [
   KeepEarlierConfirmations1796090901000,
   CreateNotices1796091000000,
   EndSessionsWithMembership1796091100000,
+  CreateStandingChanges1796103000000,
 ];

@@ -11,7 +11,9 @@ describe('the decimal mark of a list', () => {
     [['1.000.000', '4.700'], 'tab', 'comma'],
     [['0,125', '1.000'], 'tab', 'comma'],
     [['1.234', '1.5'], 'semicolon', 'point'],
-    [['1.234'], 'semicolon', 'point'],
+    [['1.000', '4.700'], 'semicolon', 'comma'],
+    [['1.234'], 'tab', 'point'],
+    [['1,234'], 'tab', 'comma'],
     [['4,7 kΩ', 'R-1,000-A'], 'semicolon', 'comma'],
     [['SOIC-8', '', '1200'], 'tab', 'point'],
   ] as const)('%j, parted by a %s, is a %s', (cells, delimiter, mark) => {

@@ -30,12 +30,12 @@ export class ChangeStandingsDto {
 }
 
 /** A change that changes nothing is a slip of its sender. */
-function SaysSomething(): PropertyDecorator {
+export function SaysSomething(): PropertyDecorator {
   return ValidateBy({
     name: 'saysSomething',
     validator: {
       validate: (_value, args) => {
-        const { lifecycle, approval } = args!.object as StandingChangeDto;
+        const { lifecycle, approval } = args!.object as Partial<StandingChangeDto>;
         return lifecycle !== undefined || approval !== undefined;
       },
       defaultMessage: () => 'a lifecycle or an approval was expected',

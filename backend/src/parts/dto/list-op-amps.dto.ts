@@ -1,7 +1,8 @@
 import { gapFields, INPUT_TYPES, type InputType, OP_AMP_CATALOGUE } from '@roothertz/common/parts';
-import { OmitType } from '@nestjs/swagger';
+import { IntersectionType, OmitType } from '@nestjs/swagger';
 import { Options } from '../../shared/validation/option.decorator.js';
 import { IN_QUERY, ListPartsDto } from './list-parts.dto.js';
+import { WantedStandingDto } from './matching-standings.dto.js';
 
 const MISSING = gapFields(OP_AMP_CATALOGUE).map(({ key }) => key);
 
@@ -12,6 +13,11 @@ export class ListOpAmpsDto extends ListPartsDto {
   @Options(MISSING, IN_QUERY)
   missing?: string[];
 }
+
+/** Which op-amps are meant, as the list narrows them. */
+export class OpAmpMatchDto extends OmitType(ListOpAmpsDto, ['limit', 'offset', 'sort']) {}
+
+export class OpAmpOutcomeDto extends IntersectionType(OpAmpMatchDto, WantedStandingDto) {}
 
 /** What narrows the parts whose gaps are counted. */
 export class OpAmpFilterDto extends OmitType(ListOpAmpsDto, ['limit', 'offset', 'sort', 'missing']) {}

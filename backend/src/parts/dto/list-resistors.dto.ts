@@ -7,10 +7,11 @@ import {
   type Technology,
 } from '@roothertz/common/parts';
 import { Type } from 'class-transformer';
-import { OmitType } from '@nestjs/swagger';
+import { IntersectionType, OmitType } from '@nestjs/swagger';
 import { Options } from '../../shared/validation/option.decorator.js';
 import { Quantity } from '../../shared/validation/quantity.decorator.js';
 import { IN_QUERY, ListPartsDto } from './list-parts.dto.js';
+import { WantedStandingDto } from './matching-standings.dto.js';
 
 const RESISTANCE: QuantityField = RESISTOR_PARAMETERS[0];
 const FROM = { ...RESISTANCE, label: 'resistance from', help: 'The least value that the list holds.' };
@@ -33,6 +34,11 @@ export class ListResistorsDto extends ListPartsDto {
   @Options(MISSING, IN_QUERY)
   missing?: string[];
 }
+
+/** Which resistors are meant, as the list narrows them. */
+export class ResistorMatchDto extends OmitType(ListResistorsDto, ['limit', 'offset', 'sort']) {}
+
+export class ResistorOutcomeDto extends IntersectionType(ResistorMatchDto, WantedStandingDto) {}
 
 /** What narrows the parts whose gaps are counted. */
 export class ResistorFilterDto extends OmitType(ListResistorsDto, ['limit', 'offset', 'sort', 'missing']) {}
