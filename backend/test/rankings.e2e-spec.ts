@@ -210,6 +210,15 @@ describe('rankings', () => {
     expect(body.errors).toEqual([{ field: 'resistance.to', message: expect.any(String) }]);
   });
 
+  it('refuses at its beginning a map from a frequency below any band', async () => {
+    const axes = { resistance: { from: 1, to: 10, steps: 3 }, frequency: { from: 1e-6, to: 10, steps: 3 } };
+    const { body } = await librarian.agent
+      .post('/api/rankings/quietest-map')
+      .send({ conditions, ...axes })
+      .expect(422);
+    expect(body.errors).toEqual([{ field: 'frequency.from', message: expect.any(String) }]);
+  });
+
   it.each([
     [400, 'conditions.source.resistance', { source: { resistance: -1 } }],
     [400, 'conditions.source.resistance', { source: { resistance: 1e300 } }],

@@ -92,6 +92,25 @@ describe('rankings of whole stages', () => {
     expect(body).toMatchObject({ total: 0, pairs: 0, items: [], nearestGain: 2 });
   });
 
+  it('finds the feedback resistor of a transimpedance stage, however large, where no limit is stated', async () => {
+    await addResistor('R-1M', 1e6);
+    const { body } = await librarian.agent
+      .post('/api/rankings/stages')
+      .send({
+        conditions: {
+          ...conditions,
+          source: { resistance: 1e9, capacitance: 1e-11 },
+          stage: { topology: 'transimpedance', feedbackResistance: 1e6, feedbackCapacitance: 'auto' },
+        },
+      })
+      .expect(200);
+    expect(body).toMatchObject({ total: 2, pairs: 1, nearestGain: 1e6 });
+    expect(body.items[0].network).toMatchObject({
+      gainResistor: null,
+      feedbackResistor: { partNumber: 'R-1M' },
+    });
+  });
+
   it('joins channels of one package where that is quieter', async () => {
     const { body } = await rank({}, { parallelMaximum: 4 }).expect(200);
     expect(body.items[0].channelsInParallel).toBe(2);

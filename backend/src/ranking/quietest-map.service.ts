@@ -42,5 +42,10 @@ function checkCells(
   conditions: OperatingConditions,
   { resistance, frequency }: QuietestMapDto,
 ): FieldError[] {
-  return checkConditions({ conditions: cellConditions(conditions, resistance.from, frequency.from) });
+  const cell = cellConditions(conditions, resistance.from, frequency.from);
+  return checkConditions({ conditions: cell }).map(({ field, message }) =>
+    field === 'conditions.band.lower'
+      ? { field: 'frequency.from', message: 'a frequency of 2 µHz or more was expected' }
+      : { field, message },
+  );
 }

@@ -2,6 +2,7 @@ import {
   checkStageSearch,
   rankStages,
   resistorFilterExclusion,
+  STAGE_SEARCH_FIELDS,
   type SoughtConditions,
   type StageRanking,
 } from '@roothertz/common/noise';
@@ -10,7 +11,7 @@ import { LibraryService } from '../library/library.service.js';
 import type { ListedResistor } from '../library/listed-resistors.js';
 import type { Caller } from '../shared/access/caller.js';
 import { refuseConditions, toPartFilter, toPlainConditions } from '../shared/conditions/ranking-request.js';
-import type { RankStagesDto } from './dto/rank-stages.dto.js';
+import type { RankStagesDto, SoughtConditionsDto } from './dto/rank-stages.dto.js';
 import type { StageRankingDto } from './dto/stage-ranking.dto.js';
 import { type IndexedLibrary, LibraryIndex } from './library-index.service.js';
 import { PriceIndex } from './price-index.service.js';
@@ -26,7 +27,7 @@ export class StageRankingService {
   ) {}
 
   async rank(caller: Caller, dto: RankStagesDto): Promise<StageRankingDto> {
-    const conditions = toPlainConditions<SoughtConditions>(dto.conditions);
+    const conditions = toSoughtConditions(dto.conditions);
     const filter = toPartFilter(dto.filter);
     refuseConditions(checkStageSearch(conditions, filter));
     const libraries = await this.index.opAmpsReadableBy(caller, filter);
@@ -65,6 +66,18 @@ export class StageRankingService {
           words.every((word) => resistor.searchText.includes(word)),
       );
   }
+}
+
+const USUAL_MAXIMUM_TOTAL = 100_000;
+const NO_LIMIT = STAGE_SEARCH_FIELDS['conditions.stage.network.maximumTotal'].bounds.to;
+
+/** The one resistor of a transimpedance stage is near the wanted value, whatever that is. */
+function toSoughtConditions(dto: SoughtConditionsDto): SoughtConditions {
+  const conditions = toPlainConditions<SoughtConditions>(dto);
+  const { topology, network } = dto.stage;
+  const usual = topology === 'transimpedance' ? NO_LIMIT : USUAL_MAXIMUM_TOTAL;
+  const { minimumTotal, maximumTotal = usual } = network;
+  return { ...conditions, stage: { ...conditions.stage, network: { minimumTotal, maximumTotal } } };
 }
 
 const MOST_CANDIDATES = 5000;

@@ -145,7 +145,7 @@ export const CONDITION_FIELDS = {
     symbol: 'f_ref',
     kind: 'frequency',
     bounds: { from: 1e-6, to: 1e12 },
-    help: 'Where gain, density and noise figure are stated; inside the band.',
+    help: 'Where gain, density and noise figure are stated; inside the band, left out = the geometric mean of its limits.',
   },
   'conditions.bandwidthMargin': {
     label: 'bandwidth margin',

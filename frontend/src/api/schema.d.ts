@@ -1841,11 +1841,11 @@ export interface components {
             old: (string | number) | null;
         };
         FrequencyAxisDto: {
-            /** @description Where gain, density and noise figure are stated; inside the band. In Hz. */
+            /** @description Where gain, density and noise figure are stated; inside the band, left out = the geometric mean of its limits. In Hz. */
             from: number;
             /** @description Points of the axis, both ends included, in equal factors. */
             steps: number;
-            /** @description Where gain, density and noise figure are stated; inside the band. In Hz. */
+            /** @description Where gain, density and noise figure are stated; inside the band, left out = the geometric mean of its limits. In Hz. */
             to: number;
         };
         FrontierPartDto: {
@@ -2075,7 +2075,7 @@ export interface components {
             minimumTotal: number;
         };
         NetworkLimitsDto: {
-            /** @description The largest feedback network that noise and leakage allow. In Ω. */
+            /** @description The largest feedback network that noise and leakage allow; left out = 100 kΩ, in a transimpedance stage none. In Ω. */
             maximumTotal?: number;
             /** @description The least feedback network that the output can drive; a lower one is marked. In Ω. */
             minimumTotal?: number;
@@ -2244,7 +2244,7 @@ export interface components {
             band: components["schemas"]["BandDto"];
             /** @description Closed-loop bandwidth over the upper band limit that a part needs; 0 excludes none. */
             bandwidthMargin?: number;
-            /** @description Where gain, density and noise figure are stated; inside the band. In Hz. */
+            /** @description Where gain, density and noise figure are stated; inside the band, left out = the geometric mean of its limits. In Hz. */
             referenceFrequency?: number;
             source: components["schemas"]["SourceDto"];
             stage: components["schemas"]["StageDto"];
@@ -2891,7 +2891,7 @@ export interface components {
             band: components["schemas"]["BandDto"];
             /** @description Closed-loop bandwidth over the upper band limit that a part needs; 0 excludes none. */
             bandwidthMargin?: number;
-            /** @description Where gain, density and noise figure are stated; inside the band. In Hz. */
+            /** @description Where gain, density and noise figure are stated; inside the band, left out = the geometric mean of its limits. In Hz. */
             referenceFrequency?: number;
             source: components["schemas"]["SourceDto"];
             stage: components["schemas"]["SoughtStageDto"];

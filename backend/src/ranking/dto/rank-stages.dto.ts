@@ -15,13 +15,13 @@ export class NetworkLimitsDto {
   minimumTotal: number = 500;
 
   @Quantity(STAGE_SEARCH_FIELDS['conditions.stage.network.maximumTotal'], { optional: true })
-  maximumTotal: number = 100_000;
+  maximumTotal?: number;
 }
 
 /** A stage whose network is to be found in the library. */
 export class SoughtStageDto
   extends OmitType(StageDto, ['gainResistance', 'gainNoiseIndex', 'feedbackNoiseIndex', 'network'])
-  implements SoughtStage
+  implements Omit<SoughtStage, 'network'>
 {
   @Quantity(STAGE_SEARCH_FIELDS['conditions.stage.gainTolerance'], { optional: true })
   gainTolerance: number = 0.01;

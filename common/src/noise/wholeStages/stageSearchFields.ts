@@ -12,7 +12,7 @@ export const STAGE_SEARCH_FIELDS = {
     label: 'network, at most',
     kind: 'resistance',
     bounds: { from: 1e-3, to: 1e15 },
-    help: 'The largest feedback network that noise and leakage allow.',
+    help: 'The largest feedback network that noise and leakage allow; left out = 100 kΩ, in a transimpedance stage none.',
   },
   'conditions.stage.parallelMaximum': {
     label: 'channels in parallel, at most',
