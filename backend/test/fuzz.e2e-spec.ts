@@ -30,7 +30,7 @@ const FUZZ = {
  * second time.
  */
 const REFUSED =
-  /sign-in|auth\/confirm|reset-password|account\/|\{token\}|billing\/(trial|checkout|webhook|seats)$/;
+  /sign-in|auth\/confirm|reset-password|account\/|\{token\}|billing\/(trial|checkout|webhook|seats)$|\/standings(\/|$)/;
 /** Stands for the id of what the operation's sample made. */
 const OWN = 'own';
 const IDS = [

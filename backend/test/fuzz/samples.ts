@@ -122,9 +122,11 @@ export const SAMPLES: Record<string, unknown[]> = {
   'post /api/duplicates/ask-again': [{ oneId: '1', otherId: '2' }],
   'patch /api/op-amps': [{ parts: [{ id: '1', version: 1, lifecycle: 'obsolete', approval: 'restricted' }] }],
   'patch /api/resistors': [{ parts: [{ id: '2', version: 1, approval: 'not-approved' }] }],
-  'post /api/op-amps/standings': [{ libraryRevision: 1, lifecycle: 'obsolete', approval: 'restricted' }],
+  'post /api/op-amps/standings': [
+    { libraryRevision: 4_000_000_000, lifecycle: 'obsolete', approval: 'restricted' },
+  ],
   'post /api/op-amps/standings/{id}/undo': [{}],
-  'post /api/resistors/standings': [{ libraryRevision: 1, approval: 'not-approved' }],
+  'post /api/resistors/standings': [{ libraryRevision: 4_000_000_000, approval: 'not-approved' }],
   'post /api/resistors/standings/{id}/undo': [{}],
   'post /api/resistors': [resistor],
   'patch /api/resistors/{id}': [{ version: 1, partNumber: 'AR102', resistor: { noiseIndex: -20 } }],

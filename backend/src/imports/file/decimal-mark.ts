@@ -9,8 +9,7 @@ const OTHER: Record<DecimalMark, DecimalMark> = { comma: 'point', point: 'comma'
 /**
  * The decimal mark of a list's cells. A mark that stands twice in a number groups thousands, and of two marks the last
  * one is decimal; what has other than three digits behind it is decimal as well. Where every number could be read
- * either way, the delimiter tells: programs part cells by semicolons where the comma is the decimal mark, and a comma
- * between commas groups thousands.
+ * either way, the mark counts as decimal, but for a comma in a list whose cells are parted by commas.
  */
 export function decimalMarkOf(cells: readonly string[], delimiter: Delimiter): DecimalMark {
   const sure = { comma: 0, point: 0 };
@@ -23,9 +22,7 @@ export function decimalMarkOf(cells: readonly string[], delimiter: Delimiter): D
     else sure[mark] += 1;
   }
   if (sure.comma !== sure.point) return sure.comma > sure.point ? 'comma' : 'point';
-  if (delimiter === 'comma') return 'point';
-  if (delimiter === 'semicolon' && perhaps.comma + perhaps.point > 0) return 'comma';
-  return perhaps.comma > perhaps.point ? 'comma' : 'point';
+  return perhaps.comma > perhaps.point && delimiter !== 'comma' ? 'comma' : 'point';
 }
 
 /** Null where the number may have one decimal mark, or one that groups thousands. */
