@@ -1,6 +1,12 @@
 import type { StageConditions } from '../conditions/index.js';
 
-/** Ω, the R_g with which the output sees just `total`; null where there is none. */
+/**
+ * The R_g with which the output sees just `total`, so that any smaller one loads it more.
+ *
+ * @param sourceResistance Ω
+ * @param total Ω, of the network from the output to ground
+ * @returns Ω; null where the stage has no R_g to choose
+ */
 export function leastGainResistance(
   { topology, gain = 1 }: Pick<StageConditions, 'topology' | 'gain'>,
   sourceResistance: number,

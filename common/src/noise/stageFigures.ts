@@ -141,6 +141,7 @@ function decibels(power: number, reference: number): number {
   return 10 * (Math.log10(power) - Math.log10(reference));
 }
 
+/** Every contributor's value changed in the same way. */
 export function mapContributions(
   contributions: Contributions,
   change: (value: number) => number,

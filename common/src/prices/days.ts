@@ -6,7 +6,13 @@ export function dayOf(moment: Date): string {
   return moment.toISOString().slice(0, 10);
 }
 
-/** The day a number of days after another; before it where the number is negative. */
+/**
+ * The day a number of days after another; before it where the number is negative.
+ *
+ * @param day one that `isDay` accepts
+ * @throws RangeError for a text that is no date
+ * @example addDays('2026-12-31', 1) // '2027-01-01'
+ */
 export function addDays(day: string, days: number): string {
   return dayOf(new Date(Date.parse(day) + days * MILLISECONDS_A_DAY));
 }

@@ -8,7 +8,12 @@ export const PRICE_DECIMALS = 4;
 /** The decimals that an exchange rate may have. */
 export const RATE_DECIMALS = 8;
 
-/** The scaled number of a decimal text that is not negative; places beyond `decimals` are dropped. */
+/**
+ * The scaled number of a decimal text that is not negative; places beyond `decimals` are dropped.
+ *
+ * @param text digits with at most one point, as `readPrice` and the database give it; not checked here
+ * @example toScaled('1.23', 4) // 12300n
+ */
 export function toScaled(text: string, decimals: number): bigint {
   const [whole, fraction = ''] = text.split('.');
   return BigInt(whole + fraction.padEnd(decimals, '0').slice(0, decimals));

@@ -22,15 +22,18 @@ export function decimalToNumber({ coefficient, exponent }: Decimal): number {
   return Number(`${coefficient}e${exponent}`);
 }
 
+/** The value times 10^exponent, exact. */
 export function shiftDecimal(value: Decimal, exponent: number): Decimal {
   return value.coefficient === 0n ? value : { ...value, exponent: value.exponent + exponent };
 }
 
+/** The sum, exact. */
 export function addDecimals(left: Decimal, right: Decimal): Decimal {
   const exponent = Math.min(left.exponent, right.exponent);
   return { coefficient: scaledTo(left, exponent) + scaledTo(right, exponent), exponent };
 }
 
+/** The value with the other sign. */
 export function negateDecimal(value: Decimal): Decimal {
   return { ...value, coefficient: -value.coefficient };
 }

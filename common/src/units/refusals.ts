@@ -20,6 +20,7 @@ function quoted(text: string): string {
   return `“${characters.length > 40 ? `${characters.slice(0, 40).join('')}…` : characters.join('')}”`;
 }
 
+/** Says that nothing stands where a quantity of a kind was expected, with an example. */
 export function emptyMessage(kind: QuantityKind): string {
   return `nothing was entered: ${expectation(kind)}`;
 }
@@ -30,15 +31,18 @@ export function notANumberMessage(text: string, normalised: string, kind: Quanti
   return `${quoted(text)} is not ${QUANTITIES[kind].noun}: ${reason}`;
 }
 
+/** Says that a text states a quantity of one kind where another was expected. */
 export function wrongKindMessage(text: string, found: QuantityKind, kind: QuantityKind): string {
   const { noun, example } = QUANTITIES[kind];
   return `${quoted(text)} is ${QUANTITIES[found].noun}; ${noun} was expected, such as ${example}`;
 }
 
+/** Says that `mhz` in lower case leaves open which prefix is meant. */
 export function ambiguousHertzMessage(text: string): string {
   return `${quoted(text)} may be millihertz or megahertz: write mHz or MHz`;
 }
 
+/** Says that a value lies beyond the range of numbers, about 1e±308. */
 export function outOfRangeMessage(text: string, kind: QuantityKind): string {
   return `${quoted(text)} is too large or too small for a number: ${expectation(kind)}`;
 }

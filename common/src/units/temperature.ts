@@ -6,6 +6,7 @@ export function isCold(kelvin: number): boolean {
   return kelvin < 173.15;
 }
 
+/** A finite temperature in K as °C, without binary dust: 298.15 is 25. */
 export function inCelsius(kelvin: number): number {
   return decimalToNumber(fromSi(decimalOfNumber(kelvin), CELSIUS));
 }

@@ -37,6 +37,7 @@ export const FAHRENHEIT: Unit = {
   offset: (459.67 * 5) / 9,
 };
 
+/** The unit of a kind, or of a pure number, with the prefix that stands for 10^exponent. */
 export function linearUnit(kind: QuantityKind | null, exponent = 0): Unit {
   return { kind, scale: 'linear', exponent, factor: Number(`1e${exponent}`), offset: 0 };
 }

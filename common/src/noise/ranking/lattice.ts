@@ -12,6 +12,13 @@ export interface Axis {
   cornersOf(cell: number): number[];
 }
 
+/**
+ * The axis that the given rows of a column need: its corners enclose all their values, a tenth of a decade from each
+ * to the next.
+ *
+ * @param values > 0, but for `apart`
+ * @param apart the value that has a place of its own
+ */
 export function logarithmicAxis(values: Float64Array, rows: Uint32Array, apart: number): Axis {
   let least = Infinity;
   let most = 0;

@@ -33,7 +33,9 @@ export interface MapQuery {
 }
 
 export interface QuietestMap {
+  /** Ω */
   resistances: number[];
+  /** Hz */
   frequencies: number[];
   /** The parts that win anywhere. */
   parts: PartPlace[];
@@ -49,7 +51,7 @@ export function axisPoints({ from, to, steps }: MapAxis): number[] {
   );
 }
 
-/** The conditions of one cell: its resistance, and its frequency as reference and as end of the band. */
+/** The conditions of one cell: its resistance in Ω, and its frequency in Hz as reference and as end of the band. */
 export function cellConditions(
   conditions: OperatingConditions,
   resistance: number,

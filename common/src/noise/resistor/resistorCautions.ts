@@ -31,6 +31,11 @@ export const RESISTOR_CAUTION_DETAILS: Record<ResistorCaution, string> = {
 const NOTICEABLE_LOAD = 0.05;
 const NEAR_RATING = 0.5;
 
+/**
+ * The cautions that apply to a resistor at its place, in the order of `RESISTOR_CAUTIONS`.
+ *
+ * @param dissipation W, that of the place
+ */
 export function resistorCautions(
   { dcVoltage }: ResistorConditions,
   { noiseIndex, powerRating, temperatureRise }: Resistor,

@@ -25,7 +25,7 @@ export interface ResistorFigures {
 /** Thermal noise over the band of one ohm at a temperature in K, in V. */
 export type OhmNoise = (temperature: number) => number;
 
-/** The noise of one ohm over a band, with Planck's factor where it matters. */
+/** The thermal noise of one ohm over a band at a temperature, with Planck's factor where it matters; times √R it is that of R. */
 export function ohmNoise(band: BandConditions): OhmNoise {
   return (temperature) =>
     sourceFloor({

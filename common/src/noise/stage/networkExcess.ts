@@ -10,7 +10,10 @@ export interface NetworkExcess {
 /**
  * The excess noise of the feedback network that a direct current makes.
  *
- * @param current A through both resistors
+ * @param current A through both resistors, either sign
+ * @param gainResistance Ω, R_g
+ * @param feedbackResistance Ω, R_f
+ * @returns 0 for a resistor whose noise index isn't stated
  * Source: IEC 60195.
  */
 export function networkExcess(

@@ -48,7 +48,7 @@ export function listCandidates(
   );
 }
 
-/** The input noise rms of a candidate with a network. */
+/** The input noise rms of a candidate with a network, in V (A in a transimpedance stage). */
 export function noiseOf(
   sought: SoughtConditions,
   { amplifier, channelsInParallel }: Candidate,
