@@ -1,9 +1,8 @@
 import { AuditEntry } from '../src/audit/entities/audit-entry.entity.js';
-import { seedCuratedLibrary } from '../src/database/seeds/library-seed.js';
 import { KeptPair } from '../src/parts/entities/kept-pair.entity.js';
 import { createOpAmp } from './factories/op-amps.js';
 import { createResistor } from './factories/resistors.js';
-import { createTeam, signInMember, startTestApp, type TestApp, type TestMember } from './support/index.js';
+import { signInLibraryTeam, startTestApp, type TestApp, type TestMember } from './support/index.js';
 
 interface Pair {
   likelihood: number;
@@ -20,11 +19,7 @@ describe('parts that may be one', () => {
 
   beforeAll(async () => {
     app = await startTestApp();
-    await seedCuratedLibrary(app.dataSource.manager);
-    const team = await createTeam(app);
-    librarian = await signInMember(app, team, ['librarian']);
-    engineer = await signInMember(app, team, ['engineer']);
-    stranger = await signInMember(app, await createTeam(app), ['librarian']);
+    ({ librarian, engineer, stranger } = await signInLibraryTeam(app));
   });
   afterAll(() => app.close());
 

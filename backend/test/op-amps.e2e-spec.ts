@@ -1,6 +1,12 @@
 import { createOpAmp, opAmpBody } from './factories/op-amps.js';
-import { createTeam, signInMember, startTestApp, type TestApp, type TestMember } from './support/index.js';
-import { seedCuratedLibrary } from '../src/database/seeds/library-seed.js';
+import {
+  createTeam,
+  signInLibraryTeam,
+  signInMember,
+  startTestApp,
+  type TestApp,
+  type TestMember,
+} from './support/index.js';
 import { Part } from '../src/library/entities/part.entity.js';
 
 describe('op-amps', () => {
@@ -10,10 +16,7 @@ describe('op-amps', () => {
 
   beforeAll(async () => {
     app = await startTestApp();
-    await seedCuratedLibrary(app.dataSource.manager);
-    const team = await createTeam(app);
-    librarian = await signInMember(app, team, ['librarian']);
-    engineer = await signInMember(app, team, ['engineer']);
+    ({ librarian, engineer } = await signInLibraryTeam(app));
   });
   afterAll(() => app.close());
 

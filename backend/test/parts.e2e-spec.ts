@@ -1,7 +1,13 @@
 import { opAmpBody } from './factories/op-amps.js';
 import { resistorBody } from './factories/resistors.js';
-import { createTeam, signInMember, startTestApp, type TestApp, type TestMember } from './support/index.js';
-import { seedCuratedLibrary } from '../src/database/seeds/library-seed.js';
+import {
+  createTeam,
+  signInLibraryTeam,
+  signInMember,
+  startTestApp,
+  type TestApp,
+  type TestMember,
+} from './support/index.js';
 import { Part } from '../src/library/entities/part.entity.js';
 import { LibraryService } from '../src/library/library.service.js';
 
@@ -18,11 +24,7 @@ describe.each(KINDS)('parts at $path', ({ path, other, bodyOf, curated }) => {
 
   beforeAll(async () => {
     app = await startTestApp();
-    await seedCuratedLibrary(app.dataSource.manager);
-    const team = await createTeam(app);
-    librarian = await signInMember(app, team, ['librarian']);
-    engineer = await signInMember(app, team, ['engineer']);
-    stranger = await signInMember(app, await createTeam(app), ['admin']);
+    ({ librarian, engineer, stranger } = await signInLibraryTeam(app));
   });
   afterAll(() => app.close());
 

@@ -1,11 +1,10 @@
 import { AuditEntry } from '../src/audit/entities/audit-entry.entity.js';
-import { seedCuratedLibrary } from '../src/database/seeds/library-seed.js';
 import { Part } from '../src/library/entities/part.entity.js';
 import { LibraryService } from '../src/library/library.service.js';
 import { conditionsBody } from './factories/conditions.js';
 import { createOpAmp, opAmpBody } from './factories/op-amps.js';
 import { createResistor } from './factories/resistors.js';
-import { createTeam, signInMember, startTestApp, type TestApp, type TestMember } from './support/index.js';
+import { signInLibraryTeam, startTestApp, type TestApp, type TestMember } from './support/index.js';
 
 describe('changing many parts', () => {
   let app: TestApp;
@@ -15,11 +14,7 @@ describe('changing many parts', () => {
 
   beforeAll(async () => {
     app = await startTestApp();
-    await seedCuratedLibrary(app.dataSource.manager);
-    const team = await createTeam(app);
-    librarian = await signInMember(app, team, ['librarian']);
-    engineer = await signInMember(app, team, ['engineer']);
-    stranger = await signInMember(app, await createTeam(app), ['admin']);
+    ({ librarian, engineer, stranger } = await signInLibraryTeam(app));
   });
   afterAll(() => app.close());
 

@@ -3,6 +3,7 @@ import { hash } from 'bcryptjs';
 import supertest from 'supertest';
 import { SESSION_COOKIE } from '../../src/auth/session-cookie.js';
 import { SessionsService } from '../../src/auth/sessions.service.js';
+import { seedCuratedLibrary } from '../../src/database/seeds/library-seed.js';
 import type { Caller } from '../../src/shared/access/caller.js';
 import { Subscription } from '../../src/plans/entities/subscription.entity.js';
 import { Membership } from '../../src/teams/entities/membership.entity.js';
@@ -52,6 +53,17 @@ export async function signInMember(app: TestApp, team: TestTeam, roles: Role[]):
     caller: { userId, teamId: team.id, roles, plan: team.plan, standing: 'active' },
     agent,
     cookie,
+  };
+}
+
+/** A team's librarian and engineer, and the admin of another team: all read the curated library. */
+export async function signInLibraryTeam(app: TestApp) {
+  await seedCuratedLibrary(app.dataSource.manager);
+  const team = await createTeam(app);
+  return {
+    librarian: await signInMember(app, team, ['librarian']),
+    engineer: await signInMember(app, team, ['engineer']),
+    stranger: await signInMember(app, await createTeam(app), ['admin']),
   };
 }
 
