@@ -42,10 +42,14 @@ const isBuildStale = ({ name, folder = name, sources, needs }) =>
     ],
   });
 
-/** The stamp carries the time at which the build began: what is edited meanwhile counts as newer. */
+/**
+ * Builds for use, whatever NODE_ENV says here. The stamp carries the time at which the build began: what is edited
+ * meanwhile counts as newer.
+ */
 async function build({ name, folder = name, workspace = name, script = 'build', emptiesItsOutput }) {
   const began = Date.now();
-  await run('npm', ['run', script, '-w', workspace], { cwd: inRoot() });
+  const env = { ...process.env, NODE_ENV: 'production' };
+  await run('npm', ['run', script, '-w', workspace], { cwd: inRoot(), env });
   if (!emptiesItsOutput) leftovers(inRoot(folder, 'dist'), began).forEach((path) => rmSync(path));
   mkdirSync(inLocal('built'), { recursive: true });
   writeFileSync(stampOf(name), '');
