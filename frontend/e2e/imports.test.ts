@@ -1,6 +1,7 @@
 import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { launchBrowser, PHONE, visit } from './support/browser';
+import { uniqueNumber } from './support/parts';
 import { screenshot } from './support/screenshot';
 import { signIn } from './support/session';
 
@@ -11,10 +12,6 @@ beforeAll(async () => {
 afterAll(() => browser.close());
 
 const HEADINGS = 'Hersteller;Bestellnr.;en @1kHz (nV/rtHz);in typ;GBP [MHz];Bauart';
-
-function uniqueNumber(): string {
-  return `E2E-I-${Date.now().toString(36)}-${Math.random().toString(36).slice(2, 6)}`;
-}
 
 /** A list as a German spreadsheet writes it: Windows-1252, semicolons, decimal commas, a title above. */
 function listOf(partNumber: string): Buffer {

@@ -1,6 +1,7 @@
-import type { Browser, Page } from 'playwright-core';
+import type { Browser } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { launchBrowser, PHONE, visit } from './support/browser';
+import { createPart, removePart, uniqueNumber } from './support/parts';
 import { screenshot } from './support/screenshot';
 import { signIn } from './support/session';
 
@@ -10,28 +11,11 @@ beforeAll(async () => {
 });
 afterAll(() => browser.close());
 
-async function createPart(page: Page, partNumber: string): Promise<string> {
-  await page.goto('/parts/new');
-  const fill = (label: string, text: string) => page.getByLabel(label, { exact: true }).fill(text);
-  await fill('manufacturer', 'Harbour Test Works');
-  await fill('part number', partNumber);
-  await fill('voltage noise e_n', '3n3');
-  await page.getByRole('button', { name: 'Add to your library' }).click();
-  await page.getByRole('heading', { level: 1, name: partNumber }).waitFor();
-  return page.url();
-}
-
-async function removePart(page: Page, address: string): Promise<void> {
-  await page.goto(address);
-  await page.getByRole('button', { name: 'Delete' }).click();
-  await page.getByText('is deleted').first().waitFor();
-}
-
 describe('the library work', () => {
   it('fills in what the ranking misses, and settles what looks like one part', async () => {
     const { page, problems, close } = await visit(browser);
     await signIn(page, 'librarian', '/parts');
-    const number = `E2E-${Date.now().toString(36)}-1`;
+    const number = `${uniqueNumber()}-1`;
     const first = await createPart(page, `${number}0`);
     const second = await createPart(page, `${number}O`);
 

@@ -1,6 +1,7 @@
 import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { launchBrowser, PHONE, visit } from './support/browser';
+import { createPart, fill, removePart, uniqueNumber } from './support/parts';
 import { screenshot } from './support/screenshot';
 import { signIn } from './support/session';
 
@@ -10,33 +11,8 @@ beforeAll(async () => {
 });
 afterAll(() => browser.close());
 
-function uniqueNumber(): string {
-  return `E2E-${Date.now().toString(36)}-${Math.random().toString(36).slice(2, 6)}`;
-}
-
 function rows(page: Page) {
   return page.getByRole('region', { name: 'Op-amps' }).locator('a');
-}
-
-async function fill(page: Page, label: string, text: string): Promise<void> {
-  await page.getByLabel(label, { exact: true }).fill(text);
-}
-
-async function createPart(page: Page, partNumber: string): Promise<string> {
-  await page.goto('/parts/new');
-  await fill(page, 'manufacturer', 'Harbour Test Works');
-  await fill(page, 'part number', partNumber);
-  await fill(page, 'voltage noise e_n', '3n3');
-  await fill(page, 'gain–bandwidth product GBW', '40 MHz');
-  await page.getByRole('button', { name: 'Add to your library' }).click();
-  await page.getByRole('heading', { level: 1, name: partNumber }).waitFor();
-  return page.url();
-}
-
-async function removePart(page: Page, address: string): Promise<void> {
-  await page.goto(address);
-  await page.getByRole('button', { name: 'Delete' }).click();
-  await page.getByText('is deleted').waitFor();
 }
 
 describe('the parts', () => {

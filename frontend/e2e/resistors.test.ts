@@ -1,6 +1,7 @@
 import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { launchBrowser, PHONE, visit } from './support/browser';
+import { createPart, fill, removePart, uniqueNumber } from './support/parts';
 import { screenshot } from './support/screenshot';
 import { signIn } from './support/session';
 
@@ -12,33 +13,8 @@ beforeAll(async () => {
 });
 afterAll(() => browser.close());
 
-function uniqueNumber(): string {
-  return `E2E-R-${Date.now().toString(36)}-${Math.random().toString(36).slice(2, 6)}`;
-}
-
 function rows(page: Page) {
   return page.getByRole('region', { name: 'Resistors' }).locator('a');
-}
-
-async function fill(page: Page, label: string, text: string): Promise<void> {
-  await page.getByLabel(label, { exact: true }).fill(text);
-}
-
-async function createResistor(page: Page, partNumber: string): Promise<string> {
-  await page.goto(`${LIST}/new`);
-  await fill(page, 'manufacturer', 'Harbour Test Works');
-  await fill(page, 'part number', partNumber);
-  await fill(page, 'resistance R', '4k7');
-  await fill(page, 'power rating P_r', '125 mW');
-  await page.getByRole('button', { name: 'Add to your library' }).click();
-  await page.getByRole('heading', { level: 1, name: partNumber }).waitFor();
-  return page.url();
-}
-
-async function removeResistor(page: Page, address: string): Promise<void> {
-  await page.goto(address);
-  await page.getByRole('button', { name: 'Delete' }).click();
-  await page.getByText('is deleted').waitFor();
 }
 
 describe('the resistors', () => {
@@ -88,7 +64,7 @@ describe('the resistors', () => {
     const { page, problems, close } = await visit(browser);
     await signIn(page, 'librarian', LIST);
     const partNumber = uniqueNumber();
-    await createResistor(page, partNumber);
+    await createPart(page, partNumber, 'resistor');
     await page.getByText('The noise index is unknown').waitFor();
     await page.getByRole('link', { name: 'Edit' }).click();
     await fill(page, 'noise index NI', '-10');
@@ -105,7 +81,7 @@ describe('the resistors', () => {
     await page.getByRole('button', { name: 'Undo' }).click();
     await page.getByRole('heading', { level: 1, name: partNumber }).waitFor();
     await page.getByText('316\u2009nV/V').waitFor();
-    await removeResistor(page, page.url());
+    await removePart(page, page.url());
     expect(problems).toEqual([]);
     await close();
   });
@@ -113,7 +89,7 @@ describe('the resistors', () => {
   it('show what a second librarian changed meanwhile, value by value', async () => {
     const { page, problems, close } = await visit(browser, { expected: [409] });
     await signIn(page, 'librarian', LIST);
-    const address = await createResistor(page, uniqueNumber());
+    const address = await createPart(page, uniqueNumber(), 'resistor');
     const other = await visit(browser);
     await signIn(other.page, 'admin', new URL(address).pathname);
     await page.getByRole('link', { name: 'Edit' }).click();
@@ -128,7 +104,7 @@ describe('the resistors', () => {
     await page.getByRole('radio', { name: 'Take theirs: 0.1 %' }).check();
     await page.getByRole('button', { name: 'Save with these values' }).click();
     await page.getByLabel('Parameters').getByText('0.1 %').waitFor();
-    await removeResistor(page, address);
+    await removePart(page, address);
     expect([...problems, ...other.problems]).toEqual([]);
     await other.close();
     await close();
