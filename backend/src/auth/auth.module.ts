@@ -3,6 +3,7 @@ import { JwtModule } from '@nestjs/jwt';
 import { AuditModule } from '../audit/audit.module.js';
 import { AppConfig } from '../config/app-config.js';
 import { MailModule } from '../mail/mail.module.js';
+import { PlansModule } from '../plans/plans.module.js';
 import { TeamsModule } from '../teams/teams.module.js';
 import { UsersModule } from '../users/users.module.js';
 import { AccountController } from './account.controller.js';
@@ -29,6 +30,7 @@ import { SignUpService } from './sign-up.service.js';
   imports: [
     AuditModule,
     MailModule,
+    PlansModule,
     TeamsModule,
     UsersModule,
     JwtModule.registerAsync({

@@ -1,3 +1,4 @@
+import { createSecretKey } from 'node:crypto';
 import { Injectable } from '@nestjs/common';
 import { PassportStrategy } from '@nestjs/passport';
 import { Strategy } from 'passport-jwt';
@@ -6,6 +7,14 @@ import type { SessionCaller } from './session-caller.js';
 import { readSessionCookie } from './session-cookie.js';
 import type { SessionClaims } from './session-token.service.js';
 import { SessionsService } from './sessions.service.js';
+
+/**
+ * A text would be tried as a public key at each verification before it is taken for a secret; a key is taken as it is,
+ * though the strategy's types name none.
+ */
+function keyOf(secret: string): Buffer {
+  return createSecretKey(secret, 'utf8') as unknown as Buffer;
+}
 
 /** Makes the caller of a session's token, where the session isn't over. */
 @Injectable()
@@ -16,7 +25,7 @@ export class JwtStrategy extends PassportStrategy(Strategy) {
   ) {
     super({
       jwtFromRequest: readSessionCookie,
-      secretOrKey: config.JWT_SECRET,
+      secretOrKey: keyOf(config.JWT_SECRET),
       algorithms: ['HS256'],
     });
   }

@@ -6,7 +6,8 @@ import { DomainError } from '../shared/errors/domain-error.js';
 import { logFailure } from '../shared/errors/log-failure.js';
 import { readId } from '../shared/ids/read-id.js';
 import { shortened } from '../shared/text/shortened.js';
-import { type Member, toCaller } from '../teams/member.js';
+import { PlansService } from '../plans/plans.service.js';
+import type { Member } from '../teams/member.js';
 import { TeamsService } from '../teams/teams.service.js';
 import { Session } from './entities/session.entity.js';
 import type { SessionCaller } from './session-caller.js';
@@ -30,6 +31,7 @@ export class SessionsService {
   constructor(
     @InjectDataSource() private readonly dataSource: DataSource,
     private readonly teams: TeamsService,
+    private readonly plans: PlansService,
     private readonly tokens: SessionTokenService,
   ) {}
 
@@ -49,11 +51,15 @@ export class SessionsService {
 
   /** The member whose session a token belongs to, as they stand in the database now; null = it is over. */
   async callerOf({ sub, sid }: SessionClaims): Promise<SessionCaller | null> {
-    const session = await this.dataSource.manager.findOneBy(Session, { id: sid, userId: Number(sub) });
-    const member = session && (await this.teams.findMember(session.userId, session.teamId));
-    if (!session || !member) return null;
-    await this.noteSeen(session);
-    return { ...toCaller(member), sessionId: sid };
+    const session = await this.dataSource.manager
+      .createQueryBuilder(Session, 'session')
+      .innerJoinAndSelect('session.membership', 'membership')
+      .where({ id: sid, userId: Number(sub) })
+      .getOne();
+    if (session === null) return null;
+    const { userId, teamId, membership } = session;
+    const [{ plan, standing }] = await Promise.all([this.plans.stateOf(teamId), this.noteSeen(session)]);
+    return { userId, teamId, roles: membership.roles, plan, standing, sessionId: sid };
   }
 
   list({ userId }: SessionCaller): Promise<Session[]> {

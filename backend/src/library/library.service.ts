@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
-import type { Library as LibraryName, LibraryPart, Lifecycle, OpAmpPart } from '@roothertz/common/parts';
+import type { Library as LibraryName, LibraryPart, Lifecycle } from '@roothertz/common/parts';
 import { type DataSource, type EntityManager, IsNull } from 'typeorm';
 import type { Caller } from '../shared/access/caller.js';
 import { type IdentifiedPart, toComparedParts } from './compared-parts.js';
@@ -8,8 +8,6 @@ import { Library } from './entities/library.entity.js';
 import { type ListedResistor, toListedResistors } from './listed-resistors.js';
 import { readListedRows } from './listed-rows.js';
 import { type LibraryColumns, toLibraryColumns } from './op-amp-columns.js';
-import { type OpAmpRecord, toPartRecord } from './part-record.js';
-import { selectParts } from './part-select.js';
 import { findReadableParts, type PartName, toPartName } from './readable-parts.js';
 import { OP_AMPS, type PartTable, RESISTORS } from './part-tables.js';
 
@@ -45,18 +43,6 @@ export class LibraryService {
     if (own !== null) return own.id;
     await libraries.createQueryBuilder().insert().values({ teamId }).orIgnore().execute();
     return (await libraries.findOneByOrFail({ teamId })).id;
-  }
-
-  /** The op-amps that the caller may read among the given ids, in the order of the ids. */
-  async findOpAmps(caller: Caller, ids: readonly number[]): Promise<OpAmpRecord[]> {
-    if (ids.length === 0) return [];
-    const found = await selectParts(this.dataSource.manager, OP_AMPS, caller)
-      .andWhere('part.id IN (:...ids)', { ids })
-      .getMany();
-    const records = new Map(
-      found.map((row) => [row.partId, toPartRecord<OpAmpPart>(OP_AMPS.catalogue, row)]),
-    );
-    return ids.flatMap((id) => records.get(id) ?? []);
   }
 
   /** The parts of every kind that a team may read among the given ids, as a transaction sees them. */

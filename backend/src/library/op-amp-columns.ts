@@ -7,6 +7,8 @@ export interface LibraryColumns {
   ids: Uint32Array;
   manufacturers: string[];
   partNumbers: string[];
+  /** where each part's figures come from; parts with the same origins share them */
+  origins: AmplifierOrigins[];
   columns: AmplifierColumns;
 }
 
@@ -14,6 +16,7 @@ export function toLibraryColumns(rows: readonly ListedRow[]): LibraryColumns {
   const columns = emptyColumns(rows.length);
   const originsOf = originsReader();
   const shared = sharedTexts();
+  const origins = rows.map(originsOf);
   rows.forEach((row, index) => {
     const [, , , , packageName, lifecycle, approval, inputType] = row;
     columns.package[index] = shared(packageName);
@@ -21,13 +24,14 @@ export function toLibraryColumns(rows: readonly ListedRow[]): LibraryColumns {
     columns.approval[index] = shared(approval);
     columns.inputType[index] = shared(inputType as InputType | null);
     columns.searchText[index] = searchText(row);
-    keepOrigins(columns, index, originsOf(row));
+    keepOrigins(columns, index, origins[index]);
     keepFigures(columns, index, row);
   });
   return {
     ids: Uint32Array.from(rows, ([id]) => id),
     manufacturers: rows.map(([, manufacturer]) => shared(manufacturer)),
     partNumbers: rows.map(([, , partNumber]) => partNumber),
+    origins,
     columns,
   };
 }

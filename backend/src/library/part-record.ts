@@ -1,4 +1,4 @@
-import type { Library, LibraryPart, ListedFields, OpAmpPart } from '@roothertz/common/parts';
+import type { Library, LibraryPart, ListedFields } from '@roothertz/common/parts';
 import type { ParameterRow } from './part-tables.js';
 
 /** A part of a library as other features see it. */
@@ -8,8 +8,6 @@ export type PartRecord<Kind extends LibraryPart> = Kind & {
   version: number;
   updatedAt: Date;
 };
-
-export type OpAmpRecord = PartRecord<OpAmpPart>;
 
 export function toPartRecord<Kind extends LibraryPart>(
   { group }: ListedFields,

@@ -24,6 +24,7 @@ export interface PriceBook {
 export class QuantityPrices {
   private readonly today = dayOf(new Date());
   private readonly rates: ExchangeRates;
+  private readonly known = new WeakMap<ArrayLike<number>, Float64Array>();
 
   constructor(
     readonly book: PriceBook,
@@ -32,9 +33,22 @@ export class QuantityPrices {
     this.rates = toExchangeRates(currentRates(book.rates, this.today));
   }
 
-  /** What each part costs in all; NaN where no offer counts. */
+  /** Whether these are the prices at a quantity on the day that it is now. */
+  areAt(quantity: number): boolean {
+    return this.quantity === quantity && this.today === dayOf(new Date());
+  }
+
+  /** What each part costs in all, NaN where no offer counts; of the same list only worked out once. */
   totals(partIds: ArrayLike<number>): Float64Array {
-    return Float64Array.from(partIds, (id) => Number(this.of(id)?.total ?? NaN));
+    const known = this.known.get(partIds);
+    if (known) return known;
+    const totals = new Float64Array(partIds.length).fill(NaN);
+    for (let place = 0; place < totals.length; place++) {
+      const price = this.of(partIds[place]);
+      if (price !== null) totals[place] = Number(price.total);
+    }
+    this.known.set(partIds, totals);
+    return totals;
   }
 
   /** Null where no offer for the part counts. */

@@ -10,7 +10,7 @@ import {
 } from '../shared/conditions/ranking-request.js';
 import type { QuietestMapDto, QuietestMapResponseDto } from './dto/quietest-map.dto.js';
 import { LibraryIndex, revisionOf } from './library-index.service.js';
-import { partNameAt } from './part-name-at.js';
+import { partNameAt } from './part-at.js';
 
 @Injectable()
 export class QuietestMapService {

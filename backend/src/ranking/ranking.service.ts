@@ -10,7 +10,6 @@ import {
 import type { RankingRequest } from '@roothertz/common/conditions';
 import { type Amplifier, OP_AMP_PARAMETERS } from '@roothertz/common/parts';
 import { Injectable } from '@nestjs/common';
-import { LibraryService } from '../library/library.service.js';
 import type { Caller } from '../shared/access/caller.js';
 import { checkedConditions, checkedRankingRequest } from '../shared/conditions/ranking-request.js';
 import { DomainError } from '../shared/errors/domain-error.js';
@@ -22,7 +21,7 @@ import type { RankOpAmpsDto } from './dto/rank-op-amps.dto.js';
 import type { RankingResponseDto } from './dto/ranking-response.dto.js';
 import type { StageFiguresDto } from './dto/stage-figures.dto.js';
 import { type IndexedLibrary, LibraryIndex } from './library-index.service.js';
-import { partNameAt } from './part-name-at.js';
+import { partNameAt } from './part-at.js';
 import { PriceIndex } from './price-index.service.js';
 import { toRankingResponse } from './ranking-response.js';
 
@@ -30,7 +29,6 @@ import { toRankingResponse } from './ranking-response.js';
 export class RankingService {
   constructor(
     private readonly index: LibraryIndex,
-    private readonly library: LibraryService,
     private readonly prices: PriceIndex,
   ) {}
 
@@ -38,28 +36,27 @@ export class RankingService {
     const request = checkedRankingRequest(dto);
     const { key: sort, descending } = parseSort(dto.sort, PRICED_RANKING_SORTS);
     const { limit, offset } = dto;
-    const libraries = await this.index.opAmpsReadableBy(caller, request.filter);
-    const prices = await this.prices.at(caller, request.quantity);
+    const [libraries, prices] = await Promise.all([
+      this.index.opAmpsReadableBy(caller, request.filter),
+      this.prices.at(caller, request.quantity),
+    ]);
     const totals = libraries.map(({ ids }) => prices.totals(ids));
     const ranking = rankAmplifiers(
       { ...request, sort, descending, limit, offset, prices: totals },
       libraries.map(({ columns }) => columns),
     );
-    const ids = ranking.items.map(({ library, row }) => libraries[library].ids[row]);
-    const records = await this.library.findOpAmps(caller, ids);
-    const byId = new Map(records.map((record) => [record.id, record]));
-    return toRankingResponse(ranking, libraries, byId, prices);
+    return toRankingResponse(ranking, libraries, prices);
   }
 
   async exclusions(caller: Caller, dto: RankOpAmpsDto): Promise<ExclusionListDto> {
     const request = checkedRankingRequest(dto);
     const libraries = await this.index.opAmpsReadableBy(caller, request.filter);
-    const excluded = findExcluded(
+    const { items, total } = findExcluded(
       request,
       libraries.map(({ columns }) => columns),
+      dto,
     );
-    const page = excluded.slice(dto.offset, dto.offset + dto.limit);
-    return { items: page.map((part) => toExclusion(part, request, libraries)), total: excluded.length };
+    return { items: items.map((part) => toExclusion(part, request, libraries)), total };
   }
 
   stage(dto: EvaluateStageDto): StageFiguresDto {

@@ -1,6 +1,7 @@
 import {
   type RankedResistor,
   rankResistors,
+  type ResistorExclusionReason,
   RESISTOR_SORTS,
   type ResistorRanking,
 } from '@roothertz/common/noise';
@@ -20,8 +21,7 @@ import type {
 import { LibraryIndex, type ResistorLibrary, revisionOf } from './library-index.service.js';
 import { PriceIndex } from './price-index.service.js';
 import { toPrice } from './price-response.js';
-import { toPartName } from './part-name-at.js';
-import { countReasons } from './ranking-response.js';
+import { toPartName } from './part-at.js';
 
 interface Ranked extends ResistorRanking {
   libraries: ResistorLibrary[];
@@ -83,4 +83,12 @@ function toRankedResistor(
   const resistor = Object.fromEntries(PARAMETERS.map((key) => [key, listed[key as keyof Resistor]]));
   const part = { ...toPartName(listed), resistor: resistor as unknown as Resistor, origins: listed.origins };
   return { rank, part, ...figures, unitPrice: toPrice(prices, listed.id) };
+}
+
+/** How many parts are excluded for each reason, the most frequent one first. */
+function countReasons(excluded: ResistorRanking['excluded']): ResistorRankingDto['excluded'] {
+  const counts = new Map<ResistorExclusionReason, number>();
+  for (const { reason } of excluded) counts.set(reason, (counts.get(reason) ?? 0) + 1);
+  const reasons = [...counts].map(([reason, count]) => ({ reason, count }));
+  return { total: excluded.length, reasons: reasons.sort((a, b) => b.count - a.count) };
 }

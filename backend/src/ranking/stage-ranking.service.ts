@@ -4,10 +4,8 @@ import {
   resistorFilterExclusion,
   STAGE_SEARCH_FIELDS,
   type SoughtConditions,
-  type StageRanking,
 } from '@roothertz/common/noise';
 import { Injectable } from '@nestjs/common';
-import { LibraryService } from '../library/library.service.js';
 import type { ListedResistor } from '../library/listed-resistors.js';
 import type { Caller } from '../shared/access/caller.js';
 import { refuseConditions, toPartFilter, toPlainConditions } from '../shared/conditions/ranking-request.js';
@@ -22,7 +20,6 @@ import { toStageRanking } from './stage-response.js';
 export class StageRankingService {
   constructor(
     private readonly index: LibraryIndex,
-    private readonly library: LibraryService,
     private readonly prices: PriceIndex,
   ) {}
 
@@ -41,15 +38,7 @@ export class StageRankingService {
       resistors,
     );
     const { topology } = conditions.stage;
-    const records = await this.recordsOf(caller, ranking, libraries);
-    return toStageRanking(ranking, { topology, libraries, resistors, records, pricing });
-  }
-
-  private async recordsOf(caller: Caller, ranking: StageRanking, libraries: readonly IndexedLibrary[]) {
-    const stages = [...ranking.items, ...ranking.frontier];
-    const ids = new Set(stages.map(({ library, row }) => libraries[library].ids[row]));
-    const records = await this.library.findOpAmps(caller, [...ids]);
-    return new Map(records.map((record) => [record.id, record]));
+    return toStageRanking(ranking, { topology, libraries, resistors, pricing });
   }
 
   private async usableResistors(

@@ -1,7 +1,6 @@
 import type { Network, StageRanking, WholeStage } from '@roothertz/common/noise';
 import type { Topology } from '@roothertz/common/conditions';
 import type { ListedResistor } from '../library/listed-resistors.js';
-import type { OpAmpRecord } from '../library/part-record.js';
 import type {
   NetworkPartDto,
   RankedNetworkDto,
@@ -9,8 +8,7 @@ import type {
   WholeStageDto,
 } from './dto/stage-ranking.dto.js';
 import { type IndexedLibrary, revisionOf } from './library-index.service.js';
-import { toPartName } from './part-name-at.js';
-import { countReasons } from './ranking-response.js';
+import { partAt, toPartName } from './part-at.js';
 import type { StagePricing } from './stage-pricing.js';
 
 /** What the stages of a ranking were made of. */
@@ -18,42 +16,32 @@ export interface StageSources {
   topology: Topology;
   libraries: readonly IndexedLibrary[];
   resistors: readonly ListedResistor[];
-  records: ReadonlyMap<number, OpAmpRecord>;
   pricing: StagePricing;
 }
 
-/** Stages whose op-amp is gone since they were ranked are left out. */
 export function toStageRanking(
-  { items, frontier, excluded, ...ranking }: StageRanking,
+  { items, frontier, ...ranking }: StageRanking,
   sources: StageSources,
 ): StageRankingDto {
   return {
     ...ranking,
-    excluded: countReasons(excluded),
     libraryRevision: revisionOf(sources.libraries),
-    items: items.flatMap((stage) =>
-      toWholeStage(stage, sources).map((whole) => ({ rank: stage.rank, ...whole })),
-    ),
-    frontier: frontier.flatMap((stage) => toWholeStage(stage, sources)),
+    items: items.map((stage) => ({ rank: stage.rank, ...toWholeStage(stage, sources) })),
+    frontier: frontier.map((stage) => toWholeStage(stage, sources)),
   };
 }
 
-function toWholeStage(stage: WholeStage, sources: StageSources): WholeStageDto[] {
-  const { libraries, records, pricing, resistors, topology } = sources;
-  const record = records.get(libraries[stage.library].ids[stage.row]);
-  if (record === undefined) return [];
-  const { amplifier, origins } = record;
+function toWholeStage(stage: WholeStage, sources: StageSources): WholeStageDto {
+  const { libraries, pricing, resistors, topology } = sources;
   const pieces = pricing.piecesOf(stage, topology);
-  return [
-    {
-      part: { ...toPartName(record), amplifier, origins },
-      channelsInParallel: stage.channelsInParallel,
-      network: toNetwork(stage.network, resistors),
-      unitPrice: pricing.priceOf(pieces),
-      pieces,
-      ...stage.figures,
-    },
-  ];
+  return {
+    part: partAt(stage, libraries),
+    channelsInParallel: stage.channelsInParallel,
+    network: toNetwork(stage.network, resistors),
+    unitPrice: pricing.priceOf(pieces),
+    pieces,
+    ...stage.figures,
+  };
 }
 
 function toNetwork(

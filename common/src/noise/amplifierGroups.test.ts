@@ -30,7 +30,7 @@ function groupsOf(polesByRow: readonly Complex[][], qualities: readonly number[]
   };
   const rows = polesByRow.map((_, row) => row);
   const columns = { gainBandwidth: rows, inputCapacitance: rows.map(() => 0) };
-  const groups = groupAmplifiers(conditions, model, columns, rows);
+  const groups = groupAmplifiers(conditions, model, columns);
   return { rows: groups.map((group) => group.rows), counts };
 }
 

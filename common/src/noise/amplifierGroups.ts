@@ -8,7 +8,7 @@ export interface DynamicColumns {
   inputCapacitance: ArrayLike<number>;
 }
 
-/** Amplifiers that share the nodes of a quadrature, and the sum over those nodes. */
+/** Amplifiers, by their places in the columns, that share the nodes of a quadrature, and the sum over those nodes. */
 export interface AmplifierGroup {
   rows: number[];
   evaluate: Evaluate;
@@ -29,14 +29,12 @@ export function groupAmplifiers(
   conditions: OperatingConditions,
   model: StageModel,
   columns: DynamicColumns,
-  rows: ArrayLike<number>,
 ): AmplifierGroup[] {
   const staysClosed = model.resistive && isClassical(conditions);
   const closedForm: number[] = [];
   const smooth = new QuadratureRows(model, columns);
   const resonant: ResonantRow[] = [];
-  for (let i = 0; i < rows.length; i++) {
-    const row = rows[i];
+  for (let row = 0; row < columns.gainBandwidth.length; row++) {
     const inputCapacitance = columns.inputCapacitance[row];
     if (staysClosed && inputCapacitance === 0 && columns.gainBandwidth[row] === Infinity)
       closedForm.push(row);

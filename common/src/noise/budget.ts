@@ -1,6 +1,5 @@
-import type { Origin } from '../parts/index.js';
 import { CONTRIBUTORS, type Contributions, type Contributor } from './contributors.js';
-import { ORIGIN_SPREAD, type Spread } from './relativeSpread.js';
+import type { Spread } from './relativeSpread.js';
 import { INTEGRAL } from './stage/model.js';
 
 /** An amplifier's generators at the ambient temperature: squared densities and corners, nothing unknown. */
@@ -67,12 +66,12 @@ export function fixedPower(integrals: Float64Array): number {
   );
 }
 
-/** Where the figures of an amplifier's four noise parameters come from. */
-export interface NoiseOrigins {
-  voltageNoise: Origin;
-  voltageNoiseCorner: Origin;
-  currentNoise: Origin;
-  currentNoiseCorner: Origin;
+/** How far an amplifier's four noise parameters may lie from their figures. */
+export interface NoiseSpreads {
+  voltageNoise: Spread;
+  voltageNoiseCorner: Spread;
+  currentNoise: Spread;
+  currentNoiseCorner: Spread;
 }
 
 /**
@@ -86,7 +85,7 @@ export interface NoiseOrigins {
 export function totalSpread(
   integrals: Float64Array,
   generators: Generators,
-  origins: NoiseOrigins,
+  spreads: NoiseSpreads,
   power: number,
 ): Spread {
   const { voltage2, voltageCorner, current2, currentCorner } = generators;
@@ -99,14 +98,12 @@ export function totalSpread(
   const current =
     current2 * (integrals[INTEGRAL.currentSourceWhite] + integrals[INTEGRAL.currentFeedbackWhite]) +
     currentFlicker;
-  const of = (share: number, origin: Origin, side: keyof Spread) =>
-    (share * ORIGIN_SPREAD[origin][side]) ** 2;
   const spread = (side: keyof Spread) =>
     Math.sqrt(
-      of(voltage, origins.voltageNoise, side) +
-        of(voltageFlicker / 2, origins.voltageNoiseCorner, side) +
-        of(current, origins.currentNoise, side) +
-        of(currentFlicker / 2, origins.currentNoiseCorner, side),
+      (voltage * spreads.voltageNoise[side]) ** 2 +
+        ((voltageFlicker / 2) * spreads.voltageNoiseCorner[side]) ** 2 +
+        (current * spreads.currentNoise[side]) ** 2 +
+        ((currentFlicker / 2) * spreads.currentNoiseCorner[side]) ** 2,
     ) / power;
   return { below: spread('below'), above: spread('above') };
 }

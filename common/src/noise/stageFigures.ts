@@ -39,7 +39,7 @@ export function bandEvaluation(
     gainBandwidth: [amplifier.gainBandwidth],
     inputCapacitance: [amplifier.inputCapacitance],
   };
-  return groupAmplifiers(conditions, model, columns, [0])[0].evaluate;
+  return groupAmplifiers(conditions, model, columns)[0].evaluate;
 }
 
 /**

@@ -1,60 +1,43 @@
 /**
  * The positions of the `count` smallest keys, in ascending order of key; equal keys in ascending order of
- * position. Keys that are NaN come last.
+ * position. Keys that are NaN count as Infinity.
  *
- * Quickselect narrows the positions to the wanted ones before they are sorted, so that a page of a
- * hundred thousand keys costs one pass and not a full sort.
+ * A heap of the smallest keys so far has the largest of them on top: a page of a hundred thousand keys costs
+ * little more than a comparison a key.
  *
  * @param keys the keys
  * @param count how many are wanted; more than there are = all
  */
 export function smallestPositions(keys: Float64Array, count: number): Uint32Array {
-  const comparable = new Float64Array(keys.length);
-  const positions = new Uint32Array(keys.length);
-  for (let i = 0; i < keys.length; i++) {
-    comparable[i] = Number.isNaN(keys[i]) ? Infinity : keys[i];
-    positions[i] = i;
+  const heap = Uint32Array.from({ length: Math.min(count, keys.length) }, (_, position) => position);
+  for (let parent = (heap.length >> 1) - 1; parent >= 0; parent--) sink(keys, heap, parent);
+  for (let position = heap.length; position < keys.length && heap.length > 0; position++) {
+    if (!isAfter(keys, heap[0], position)) continue;
+    heap[0] = position;
+    sink(keys, heap, 0);
   }
-  const wanted = Math.min(count, keys.length);
-  if (wanted > 0 && wanted < keys.length) select(comparable, positions, wanted - 1);
-  return positions
-    .subarray(0, wanted)
-    .sort((a, b) => (comparable[a] < comparable[b] ? -1 : comparable[a] > comparable[b] ? 1 : a - b));
+  return heap.sort((a, b) => (isAfter(keys, a, b) ? 1 : -1));
 }
 
-function select(keys: Float64Array, positions: Uint32Array, target: number): void {
-  let low = 0;
-  let high = positions.length - 1;
-  while (low < high) {
-    const pivot = positions[(low + high) >> 1];
-    const [lower, upper] = partition(keys, positions, low, high, pivot);
-    if (target <= upper) high = upper;
-    else if (target >= lower) low = lower;
-    else return;
-  }
+function isAfter(keys: Float64Array, one: number, other: number): boolean {
+  const a = comparable(keys[one]);
+  const b = comparable(keys[other]);
+  return a > b || (a === b && one > other);
 }
 
-function partition(
-  keys: Float64Array,
-  positions: Uint32Array,
-  low: number,
-  high: number,
-  pivot: number,
-): [lower: number, upper: number] {
-  const pivotKey = keys[pivot];
-  const before = (position: number) =>
-    keys[position] < pivotKey || (keys[position] === pivotKey && position < pivot);
-  const after = (position: number) =>
-    keys[position] > pivotKey || (keys[position] === pivotKey && position > pivot);
-  let i = low;
-  let j = high;
-  while (i <= j) {
-    while (before(positions[i])) i++;
-    while (after(positions[j])) j--;
-    if (i > j) break;
-    const moved = positions[i];
-    positions[i++] = positions[j];
-    positions[j--] = moved;
+function comparable(key: number): number {
+  return Number.isNaN(key) ? Infinity : key;
+}
+
+/** Moves the entry at a place of the heap down to where none below it is larger. */
+function sink(keys: Float64Array, heap: Uint32Array, place: number): void {
+  const moved = heap[place];
+  let parent = place;
+  for (let child = 2 * parent + 1; child < heap.length; child = 2 * parent + 1) {
+    if (child + 1 < heap.length && isAfter(keys, heap[child + 1], heap[child])) child++;
+    if (!isAfter(keys, heap[child], moved)) break;
+    heap[parent] = heap[child];
+    parent = child;
   }
-  return [i, j];
+  heap[parent] = moved;
 }

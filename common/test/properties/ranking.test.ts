@@ -3,9 +3,12 @@ import { describe, expect, it } from 'vitest';
 import type { OperatingConditions, PartFilter } from '../../src/conditions/index.js';
 import {
   evaluateStage,
+  EXCLUSION_REASONS,
+  findExcluded,
   ORIGIN_SPREAD,
   rankAmplifiers,
   RANKING_SORTS,
+  type ExcludedPart,
   type NoiseParameter,
   type PartPlace,
   type RankingQuery,
@@ -102,6 +105,7 @@ describe('a ranking of any libraries', () => {
     fc.assert(
       fc.property(selective, libraries, filters, (conditions, parts, filter) => {
         const { items, excluded, total } = rank(parts, { conditions, filter });
+        const left = findExcluded({ conditions, filter }, parts.map(libraryOf), ALL);
         const sought = parts.flatMap((library, index) =>
           library.flatMap(({ name }, row) =>
             (filter.search ?? '')
@@ -112,13 +116,25 @@ describe('a ranking of any libraries', () => {
               : [],
           ),
         );
-        expect([...items, ...excluded].map(place).sort()).toEqual(sought.sort());
+        expect([...items, ...left.items].map(place).sort()).toEqual(sought.sort());
+        expect(excluded).toEqual({ total: left.items.length, reasons: countedReasons(left.items) });
+        expect(left.total).toBe(left.items.length);
         expect(total).toBe(items.length);
       }),
       seeded(60),
     );
   });
 });
+
+/** How often each reason stands among excluded parts, the most frequent one first. */
+function countedReasons(excluded: readonly ExcludedPart[]) {
+  return EXCLUSION_REASONS.map((reason) => ({
+    reason,
+    count: excluded.filter((part) => part.reason === reason).length,
+  }))
+    .filter(({ count }) => count > 0)
+    .sort((a, b) => b.count - a.count);
+}
 
 /** One sigma of a part's total below and above it, from the changes of its stage's power, parameter by parameter. */
 function spreadOf(conditions: OperatingConditions, { amplifier, origins = {} }: LibraryPart) {

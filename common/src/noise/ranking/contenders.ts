@@ -1,54 +1,72 @@
-import type { OperatingConditions } from '../../conditions/index.js';
 import { smallestPositions } from '../../numeric/index.js';
-import { ORIGIN_SPREAD } from '../relativeSpread.js';
-import type { StageModel } from '../stage/model.js';
-import type { AmplifierColumns } from './columns.js';
-import { leastNoise, type LeastNoise } from './leastNoise.js';
-import { SPREAD_GROWTH, preparedColumns } from './preparedColumns.js';
-import { scoreRows } from './scores.js';
-
-/** From this many parts on, bounds cost less than they save. */
-const WORTH_BOUNDING = 4000;
-const WIDEST_ABOVE = SPREAD_GROWTH * Math.max(...Object.values(ORIGIN_SPREAD).map(({ above }) => above));
+import { score, type Entrants } from './entrants.js';
+import type { LeastNoise } from './leastNoise.js';
+import type { RowPlace } from './page.js';
+import { preparedColumns } from './preparedColumns.js';
+import { findQuietest, type Quietest } from './quietSet.js';
+import type { Scores } from './scores.js';
 
 /**
- * The rows that can be among the `count` quietest or in the quiet set: all others have a lower bound that
- * rules them out, and needn't be integrated. Few rows are all kept.
+ * Scores the rows that can be among the `count` quietest or in the quiet set, and those that are wanted
+ * besides: all others have a lower bound that rules them out, and needn't be integrated.
  *
- * @param accepted the rows to rank, one array a library
- * @returns rows in the order of `accepted`
+ * @param count at least 1
+ * @param wanted places in `accepted`
+ * @returns scores with rows in the order of `accepted`
  */
-export function findContenders(
-  conditions: OperatingConditions,
-  model: StageModel,
-  libraries: readonly AmplifierColumns[],
-  accepted: readonly Uint32Array[],
+export function scoreContenders(
+  entrants: Entrants,
   count: number,
-): Uint32Array[] {
-  return libraries.map((columns, library) => {
-    const rows = accepted[library];
-    if (rows.length < WORTH_BOUNDING || model.canNotch) return rows;
-    const least = leastNoise(conditions, model, columns, rows);
-    const likely = smallestPositions(least.total, count).map((position) => rows[position]);
-    const totals = scoreRows(conditions, model, columns, likely).inputNoiseRms;
-    const last = likely.length < count ? Infinity : totals.reduce((a, b) => Math.max(a, b), 0);
-    const isNear = nearQuietest(totals, least, preparedColumns(columns).spreadLimit, rows);
-    return rows.filter((_, position) => least.total[position] <= last || isNear(position));
+  wanted: readonly RowPlace[] = [],
+): Scores[] {
+  const { accepted, bounds } = entrants;
+  const isLikely = bounds.map((bound, library) => bound && amongQuietest(entrants, library, bound, count));
+  const likely = isLikely.map((keeps, library) =>
+    score(entrants, library, keeps ? rowsAt(accepted[library], keeps) : accepted[library]),
+  );
+  const quietest = findQuietest(likely);
+  return bounds.map((bound, library) => {
+    if (bound === null || quietest === null) return likely[library];
+    const isNear = nearQuietest(entrants, library, bound, quietest);
+    const isWanted = new Set(wanted.flatMap((place) => (place.library === library ? place.position : [])));
+    const keeps = (position: number) =>
+      isNear(position) || isLikely[library]!(position) || isWanted.has(position);
+    return score(entrants, library, rowsAt(accepted[library], keeps));
   });
 }
 
+function rowsAt(rows: Uint32Array, keeps: (position: number) => boolean): Uint32Array {
+  const kept = [];
+  for (let position = 0; position < rows.length; position++) if (keeps(position)) kept.push(rows[position]);
+  return Uint32Array.from(kept);
+}
+
+/** Says of a position whether it can be among a library's `count` quietest. */
+function amongQuietest(entrants: Entrants, library: number, { total }: LeastNoise, count: number) {
+  const rows = entrants.accepted[library];
+  if (rows.length <= count) return () => true;
+  const likely = smallestPositions(total, count).map((position) => rows[position]);
+  const last = score(entrants, library, likely).inputNoiseRms.reduce((a, b) => Math.max(a, b), 0);
+  return (position: number) => total[position] <= last;
+}
+
 /**
- * Says of a position whether its total may not be told from the quietest one's, at the widest spreads. Only
- * the amplifier's share of a total spreads: T − F²/T of a total T with a fixed part F.
+ * Says of a position whether its total may not be told from the quietest one's, at the widest spread
+ * downwards. Only the amplifier's share of a total spreads: T − F²/T of a total T with a fixed part F.
  */
-function nearQuietest(totals: Float64Array, least: LeastNoise, spreadLimit: Float64Array, rows: Uint32Array) {
-  const quietest = totals.reduce((a, b) => Math.min(a, b), Infinity);
-  const leastFixed = least.fixed.reduce((a, b) => Math.min(a, b), Infinity);
-  const above = WIDEST_ABOVE * (quietest - leastFixed ** 2 / quietest);
-  return (position: number) => {
+function nearQuietest(
+  { libraries, accepted }: Entrants,
+  library: number,
+  least: LeastNoise,
+  { inputNoiseRms, above }: Quietest,
+): (position: number) => boolean {
+  const { classes, spreadLimits } = preparedColumns(libraries[library]);
+  const rows = accepted[library];
+  return (position) => {
     const total = least.total[position];
-    const difference = total - quietest;
-    const below = spreadLimit[rows[position]] * (total - least.fixed[position] ** 2 / total);
+    const difference = total - inputNoiseRms;
+    const limit = spreadLimits[classes.of[rows[position]]];
+    const below = limit * (total - (least.fixed[position] * least.fixed[position]) / total);
     return difference <= 0 || difference * difference <= below * below + above * above;
   };
 }

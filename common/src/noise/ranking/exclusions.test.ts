@@ -18,7 +18,8 @@ function exclusionOf(
   conditions: OperatingConditions = conditionsWith(),
 ): { reason: ExclusionReason; detail: string } | null {
   const library = libraryOf([{ amplifier: amplifierWith(), ...part }]);
-  const [excluded] = findExcluded({ conditions, filter }, [library]);
+  const { items } = findExcluded({ conditions, filter }, [library], { limit: 10, offset: 0 });
+  const [excluded] = items;
   if (!excluded) return null;
   const detail = exclusionDetail(excluded.reason, conditions, filter, library, 0);
   return { reason: excluded.reason, detail: detail.replace(/\s/g, ' ') };

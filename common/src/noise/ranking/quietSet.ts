@@ -8,14 +8,15 @@ export interface Quietest {
 
 /** The quietest part of all libraries, or null where nothing is ranked. */
 export function findQuietest(libraries: readonly Scores[]): Quietest | null {
-  let best: { scores: Scores; position: number; inputNoiseRms: number } | null = null;
-  for (const scores of libraries) {
-    for (let position = 0; position < scores.rows.length; position++) {
-      const inputNoiseRms = scores.inputNoiseRms[position];
-      if (best === null || inputNoiseRms < best.inputNoiseRms) best = { scores, position, inputNoiseRms };
+  let best: Quietest | null = null;
+  for (const { inputNoiseRms, spreadAbove } of libraries) {
+    for (let position = 0; position < inputNoiseRms.length; position++) {
+      const total = inputNoiseRms[position];
+      if (best === null || total < best.inputNoiseRms)
+        best = { inputNoiseRms: total, above: total * spreadAbove[position] };
     }
   }
-  return best && { ...best, above: best.inputNoiseRms * best.scores.spreadAt(best.position).above };
+  return best;
 }
 
 /**
@@ -27,8 +28,7 @@ export function findQuietest(libraries: readonly Scores[]): Quietest | null {
 export function isInQuietSet(scores: Scores, position: number, quietest: Quietest): boolean {
   const total = scores.inputNoiseRms[position];
   const difference = total - quietest.inputNoiseRms;
-  const isNear = (spread: number) => difference ** 2 <= (total * spread) ** 2 + quietest.above ** 2;
-  return isNear(scores.spreadLimitAt(position)) && isNear(scores.spreadAt(position).below);
+  return difference ** 2 <= (total * scores.spreadBelow[position]) ** 2 + quietest.above ** 2;
 }
 
 /** How many parts belong to the quiet set. */

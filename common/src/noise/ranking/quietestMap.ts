@@ -4,7 +4,7 @@ import { INTEGRAL, INTEGRALS, type Evaluate, type StageModel } from '../stage/mo
 import { stageModel } from '../stage/stageModel.js';
 import { referenceEvaluation } from '../stageFigures.js';
 import type { AmplifierColumns } from './columns.js';
-import { filterExclusions, isSought, prepareExclusions, searchWords } from './exclusions.js';
+import { conditionExclusions, filterExclusions, isSought, RANKED, searchWords } from './exclusions.js';
 import { prepareGenerators } from './generators.js';
 import { preparedColumns } from './preparedColumns.js';
 import type { PartPlace } from './sift.js';
@@ -87,7 +87,7 @@ export function quietestMap(query: MapQuery, libraries: readonly AmplifierColumn
     let previous: PartPlace | null = null;
     return frequencies.map((frequency) => {
       const conditions = cellConditions(query.conditions, resistance, frequency);
-      previous = findWinner({ conditions, filter: query.filter }, libraries, candidates, previous);
+      previous = findWinner(conditions, libraries, candidates, previous);
       return indexOf(previous);
     });
   });
@@ -96,29 +96,23 @@ export function quietestMap(query: MapQuery, libraries: readonly AmplifierColumn
 
 /** The rows that are sought and that the filter allows, whatever the cell. */
 function findCandidates(filter: PartFilter, libraries: readonly AmplifierColumns[]): Uint32Array[] {
-  const exclude = filterExclusions(filter);
   const words = searchWords(filter.search);
-  return libraries.map((columns) =>
-    Uint32Array.from({ length: columns.count }, (_, row) => row).filter(
-      (row) => isSought(columns, row, words) && exclude(columns, row) === null,
-    ),
-  );
-}
-
-interface Cell {
-  conditions: OperatingConditions;
-  filter: PartFilter;
+  return libraries.map((columns) => {
+    const exclude = filterExclusions(filter, columns);
+    const rows = Uint32Array.from({ length: columns.count }, (_, row) => row);
+    return rows.filter((row) => isSought(columns, row, words) && exclude(row) === RANKED);
+  });
 }
 
 function findWinner(
-  { conditions, filter }: Cell,
+  conditions: OperatingConditions,
   libraries: readonly AmplifierColumns[],
   candidates: readonly Uint32Array[],
   previous: PartPlace | null,
 ): PartPlace | null {
   const model = stageModel(conditions);
   const evaluate = referenceEvaluation(conditions, model);
-  const exclude = prepareExclusions(conditions, filter, model);
+  const excludes = libraries.map((columns) => conditionExclusions(conditions, model, columns));
   const densities = libraries.map((columns) => densitiesOf(conditions, model, evaluate, columns));
   let best = Infinity;
   let winner: PartPlace | null = null;
@@ -127,7 +121,7 @@ function findWinner(
     const place = { library, row };
     if (density2 > best * (1 + ROUNDING)) return;
     if (density2 >= best * (1 - ROUNDING) && winner !== null && !isBefore(place, winner)) return;
-    if (exclude(libraries[library], row)) return;
+    if (excludes[library](row) !== RANKED) return;
     best = density2;
     winner = place;
   };

@@ -123,7 +123,7 @@ describe('rankAmplifiers', () => {
   it('ranks nothing where every part is excluded, and still states the source floor', () => {
     const ranking = rank([[{ gainBandwidth: 10 }], []]);
     expect(ranking).toMatchObject({ total: 0, items: [], quietSetTotal: 0 });
-    expect(ranking.excluded).toEqual([{ library: 0, row: 0, reason: 'too-slow' }]);
+    expect(ranking.excluded).toEqual({ total: 1, reasons: [{ reason: 'too-slow', count: 1 }] });
     expect(ranking.floor.inputNoiseDensity).toBeCloseTo(4.002e-9, 12);
   });
 

@@ -1,7 +1,6 @@
 import type { OperatingConditions } from '../../conditions/index.js';
 import { groupAmplifiers, type AmplifierGroup } from '../amplifierGroups.js';
 import { outputPower, totalSpread } from '../budget.js';
-import type { Spread } from '../relativeSpread.js';
 import { INTEGRAL, INTEGRALS, type Evaluate, type StageModel } from '../stage/model.js';
 import { referenceEvaluation } from '../stageFigures.js';
 import type { AmplifierColumns } from './columns.js';
@@ -12,14 +11,13 @@ import { preparedColumns } from './preparedColumns.js';
 export interface Scores {
   rows: Uint32Array;
   inputNoiseRms: Float64Array;
+  /** Relative spread of the total downwards and upwards. */
+  spreadBelow: Float64Array;
+  spreadAbove: Float64Array;
   /** The sum over the band that the row at each position was scored with. */
   groupOf: Uint32Array;
   groups: AmplifierGroup[];
   atReference: Evaluate;
-  /** Relative spread of the total at a position. */
-  spreadAt(position: number): Spread;
-  /** What the spread downwards can be at most, without summing over the band. */
-  spreadLimitAt(position: number): number;
 }
 
 /** Scores every given row in one pass: the parts of the work that no part changes are done once. */
@@ -29,45 +27,47 @@ export function scoreRows(
   columns: AmplifierColumns,
   rows: Uint32Array,
 ): Scores {
-  const { gainBandwidth, inputCapacitance, spreadLimit } = preparedColumns(columns);
+  const { classes, spreads, ...prepared } = preparedColumns(columns);
+  const gainBandwidth = pick(prepared.gainBandwidth, rows);
+  const inputCapacitance = pick(prepared.inputCapacitance, rows);
   const generatorsAt = prepareGenerators(conditions, columns);
   const integrals = new Float64Array(INTEGRALS);
-  const groups = groupAmplifiers(conditions, model, { gainBandwidth, inputCapacitance }, rows);
+  const groups = groupAmplifiers(conditions, model, { gainBandwidth, inputCapacitance });
   const atReference = referenceEvaluation(conditions, model);
-  const positions = new Uint32Array(columns.count);
-  rows.forEach((row, position) => (positions[row] = position));
-  const scores: Scores = {
-    rows,
-    inputNoiseRms: new Float64Array(rows.length),
-    groupOf: new Uint32Array(rows.length),
-    groups,
-    atReference,
-    spreadLimitAt: (position) => spreadLimit[rows[position]],
-    spreadAt(position) {
+  const scores = emptyScores(rows, groups, atReference);
+  groups.forEach((group, index) => {
+    for (const position of group.rows) {
       const row = rows[position];
       const generators = generatorsAt(row);
-      groups[scores.groupOf[position]].evaluate(gainBandwidth[row], inputCapacitance[row], integrals);
-      return totalSpread(integrals, generators, originsAt(columns, row), outputPower(integrals, generators));
-    },
-  };
-  groups.forEach((group, index) => {
-    for (const row of group.rows) {
-      const position = positions[row];
-      atReference(gainBandwidth[row], inputCapacitance[row], integrals);
+      atReference(gainBandwidth[position], inputCapacitance[position], integrals);
       const gain2 = integrals[INTEGRAL.source];
-      group.evaluate(gainBandwidth[row], inputCapacitance[row], integrals);
-      scores.inputNoiseRms[position] = Math.sqrt(outputPower(integrals, generatorsAt(row)) / gain2);
+      group.evaluate(gainBandwidth[position], inputCapacitance[position], integrals);
+      const power = outputPower(integrals, generators);
+      const { below, above } = totalSpread(integrals, generators, spreads[classes.of[row]], power);
+      scores.inputNoiseRms[position] = Math.sqrt(power / gain2);
+      scores.spreadBelow[position] = below;
+      scores.spreadAbove[position] = above;
       scores.groupOf[position] = index;
     }
   });
   return scores;
 }
 
-function originsAt({ origins }: AmplifierColumns, row: number) {
+function pick(values: Float64Array, rows: Uint32Array): Float64Array {
+  const picked = new Float64Array(rows.length);
+  for (let position = 0; position < rows.length; position++) picked[position] = values[rows[position]];
+  return picked;
+}
+
+function emptyScores(rows: Uint32Array, groups: AmplifierGroup[], atReference: Evaluate): Scores {
+  const column = () => new Float64Array(rows.length);
   return {
-    voltageNoise: origins.voltageNoise[row],
-    voltageNoiseCorner: origins.voltageNoiseCorner[row],
-    currentNoise: origins.currentNoise[row],
-    currentNoiseCorner: origins.currentNoiseCorner[row],
+    rows,
+    inputNoiseRms: column(),
+    spreadBelow: column(),
+    spreadAbove: column(),
+    groupOf: new Uint32Array(rows.length),
+    groups,
+    atReference,
   };
 }

@@ -3,10 +3,12 @@ import { amplifierWith, libraryOf } from '../../../test/support/stages.js';
 import { preferredValuesBetween } from '../../parts/index.js';
 import { evaluateStage } from '../evaluateStage.js';
 import { parallelStage } from '../levers/index.js';
+import { findExcluded } from '../ranking/index.js';
 import { findNetworks } from './networks.js';
 import { rankStages } from './rankStages.js';
 import { StageCosts } from './stageCosts.js';
 import {
+  nominalNetwork,
   STAGE_SORTS,
   withNetwork,
   type NetworkResistor,
@@ -134,7 +136,11 @@ describe('rankStages', () => {
     ],
   ])('finds what trying every network finds, for %s', (_, conditions) => {
     const ranking = rank(conditions);
-    const excluded = new Set(ranking.excluded.map(({ row }) => row));
+    const nominal = withNetwork(conditions, nominalNetwork(conditions));
+    const page = { limit: amplifiers.length, offset: 0 };
+    const { items } = findExcluded({ conditions: nominal, filter: {} }, [library], page);
+    const excluded = new Set(items.map(({ row }) => row));
+    expect(ranking.excluded.total).toBe(excluded.size);
     const expected = exhaustive(
       conditions,
       amplifiers.map((_, row) => row).filter((row) => !excluded.has(row)),

@@ -2,7 +2,7 @@ import { evaluateStage, sourceFloor } from '../evaluateStage.js';
 import type { SourceFloor, StageFigures } from '../figures.js';
 import { parallelStage } from '../levers/parallelStage.js';
 import type { AmplifierColumns } from '../ranking/columns.js';
-import { sift, type ExcludedPart, type PartPlace } from '../ranking/sift.js';
+import { sift, type ExclusionCounts, type PartPlace } from '../ranking/sift.js';
 import { stageModel } from '../stage/stageModel.js';
 import { Blocks } from './blocks.js';
 import { listCandidates, noiseOf, type Candidate, type FoundStage } from './candidates.js';
@@ -28,7 +28,7 @@ export interface RankedStage extends WholeStage {
 export interface StageRanking {
   /** how many amplifiers are ranked; 0 where no network gives the gain */
   total: number;
-  excluded: ExcludedPart[];
+  excluded: ExclusionCounts;
   floor: SourceFloor;
   /** how many pairs of library resistors give the gain */
   pairs: number;
