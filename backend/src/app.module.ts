@@ -18,6 +18,8 @@ import { PricesModule } from './prices/prices.module.js';
 import { RankingModule } from './ranking/ranking.module.js';
 import { AccessGuard } from './shared/access/access.guard.js';
 import { CallerThrottlerGuard } from './shared/access/caller-throttler.guard.js';
+import { RequestCounts } from './throttling/request-counts.service.js';
+import { ThrottlingModule } from './throttling/throttling.module.js';
 
 const REQUESTS_A_MINUTE = 600;
 
@@ -26,7 +28,14 @@ const REQUESTS_A_MINUTE = 600;
     ConfigModule,
     DatabaseModule,
     ScheduleModule.forRoot(),
-    ThrottlerModule.forRoot([{ ttl: 60_000, limit: REQUESTS_A_MINUTE }]),
+    ThrottlerModule.forRootAsync({
+      imports: [ThrottlingModule],
+      inject: [RequestCounts],
+      useFactory: (storage: RequestCounts) => ({
+        throttlers: [{ ttl: 60_000, limit: REQUESTS_A_MINUTE }],
+        storage,
+      }),
+    }),
     AuditModule,
     AuthModule,
     BillingModule,

@@ -130,9 +130,18 @@ describe('an account', () => {
       expect(await mails()).toEqual([]);
     });
 
+    it('is refused at all the fields at once that are at fault', async () => {
+      const answer = await signUp('nobody', { name: ' ', password: '1qaz2wsx3edc' }).expect(400);
+      expect(answer.body.errors).toMatchObject([
+        { field: 'name' },
+        { field: 'email', message: expect.stringMatching(/such as name@company.example/) },
+        { field: 'password', message: expect.stringMatching(/everybody tries first/) },
+      ]);
+    });
+
     it('is refused where the password is the address', async () => {
       const email = 'long.address@bourne.example';
-      const answer = await signUp(email, { password: email.toUpperCase() }).expect(422);
+      const answer = await signUp(email, { password: email.toUpperCase() }).expect(400);
       expect(answer.body.errors[0]).toMatchObject({ field: 'password' });
     });
 

@@ -3,6 +3,8 @@ import { METHOD_METADATA } from '@nestjs/common/constants.js';
 import { MetadataScanner, ModulesContainer } from '@nestjs/core';
 import { ACCESS_KEY } from '../src/shared/access/access.decorator.js';
 import { PUBLIC_KEY } from '../src/shared/access/public.decorator.js';
+import { RequestCount } from '../src/throttling/entities/request-count.entity.js';
+import { RequestCounts } from '../src/throttling/request-counts.service.js';
 import { createTeam, signInMember, startTestApp, type TestApp } from './support/index.js';
 
 interface Route {
@@ -68,6 +70,34 @@ describe('guards', () => {
       closed.map(async (address) => [address, await statusOf(app, address)]),
     );
     expect(statuses.filter(([, status]) => status !== 401)).toEqual([]);
+  });
+
+  it('counts requests in the database, so that a limit is one for several processes', async () => {
+    const { agent } = await signInMember(app, await createTeam(app), ['engineer']);
+    const counts = app.dataSource.getRepository(RequestCount);
+    await counts.clear();
+    await agent.get('/api/auth/me').expect(200);
+    await agent.get('/api/auth/me').expect(200);
+    const [{ hash, count }] = await counts.find();
+    expect(count).toBe(2);
+    await counts.update({ hash }, { count: 600 });
+    const refused = await agent.get('/api/auth/me').expect(429);
+    expect(refused.body.code).toBe('request.too-many');
+    expect(Number(refused.headers['retry-after'])).toBeGreaterThan(0);
+    await agent.get('/api/auth/teams').expect(200);
+    await counts.update({ hash }, { until: new Date(Date.now() - 1000) });
+    await agent.get('/api/auth/me').expect(200);
+    const other = new RequestCounts(app.dataSource);
+    expect((await other.increment(hash, 60_000, 600)).totalHits).toBe(2);
+    await other.tidy();
+    expect(await counts.count()).toBe(2);
+  });
+
+  it('lets requests through that can’t be counted', async () => {
+    const { agent } = await signInMember(app, await createTeam(app), ['engineer']);
+    await app.dataSource.query('RENAME TABLE request_counts TO counts_elsewhere');
+    await agent.get('/api/auth/me').expect(200);
+    await app.dataSource.query('RENAME TABLE counts_elsewhere TO request_counts');
   });
 
   it('refuses by role with 403 and by plan with 402', async () => {

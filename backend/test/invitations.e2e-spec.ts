@@ -174,6 +174,22 @@ describe('an invitation', () => {
     expect(await mailsTo(email)).toHaveLength(2);
   });
 
+  it('says, opened again after its member was removed, that there is a newer one', async () => {
+    await invite();
+    const old = await tokenFor();
+    await join(old).expect(201);
+    const { id } = await app.dataSource.manager.findOneByOrFail(User, { email });
+    await admin.agent.delete(`/api/team/members/${id}`).expect(204);
+    const before = await app.request.get(`/api/invitations/${old}`).expect(409);
+    expect(before.body.detail).toMatch(/accepted already/);
+    await invite().expect(201);
+    for (const answer of [await app.request.get(`/api/invitations/${old}`), await join(old)]) {
+      expect(codes([answer])).toEqual([[409, 'invitation.used']]);
+      expect(answer.body.detail).toMatch(/A newer invitation took this one’s place/);
+    }
+    await app.request.get(`/api/invitations/${await tokenFor()}`).expect(200);
+  });
+
   it('keeps its seat: past the paid ones nobody is invited, and nobody joins', async () => {
     const seats = (count: number) =>
       app.dataSource.manager.update(Subscription, { teamId: team.id }, { seats: count });

@@ -45,6 +45,7 @@ describe('session', () => {
     expect(answer.body).toEqual({
       user: { id: String(caller.userId), email, name: expect.any(String) },
       team: { id: String(team.id), name: 'Weir & Sons' },
+      teams: [{ id: String(team.id), name: 'Weir & Sons' }],
       roles: ['librarian', 'engineer'],
       plan: 'team',
       standing: 'active',
@@ -181,6 +182,7 @@ describe('session', () => {
       .send({ teamId: String(second.id) })
       .expect(200);
     expect(answer.body).toMatchObject({ team: { id: String(second.id) }, roles: ['admin'], plan: 'free' });
+    expect(answer.body.teams).toMatchObject([{ id: String(team.id) }, { id: String(second.id) }]);
     const refused = await agent
       .post('/api/auth/team')
       .send({ teamId: String(foreign.id) })
@@ -188,6 +190,23 @@ describe('session', () => {
     expect(refused.body.code).toBe('team.not-found');
     const me = await agent.get('/api/auth/me').expect(200);
     expect(me.body).toEqual(answer.body);
+  });
+
+  it('begins in the team that was opened last, by whichever session', async () => {
+    const { email, agent, caller } = await signInMember(app, team, ['engineer']);
+    const second = await createTeam(app);
+    const membership = { userId: caller.userId, teamId: second.id, roles: ['admin' as const] };
+    await app.dataSource.getRepository(Membership).insert(membership);
+    const teamOf = async () => (await signIn(email, PASSWORD).expect(200)).body.team.id;
+    expect(await teamOf()).toBe(String(team.id));
+    await agent
+      .post('/api/auth/team')
+      .send({ teamId: String(second.id) })
+      .expect(200);
+    await agent.post('/api/auth/sign-out').expect(204);
+    expect(await teamOf()).toBe(String(second.id));
+    await app.dataSource.getRepository(Membership).delete({ userId: caller.userId, teamId: second.id });
+    expect(await teamOf()).toBe(String(team.id));
   });
 
   it('follows a change of roles at once', async () => {

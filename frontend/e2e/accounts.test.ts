@@ -15,7 +15,7 @@ afterAll(() => browser.close());
 
 describe('an account of one’s own', () => {
   it('is signed up for, confirmed by e-mail, given a new password, and ended in another browser', async () => {
-    const { page, problems, close } = await visit(browser, { expected: [410, 422] });
+    const { page, problems, close } = await visit(browser, { expected: [400, 410] });
     const email = `nell.${Date.now()}@weir.example`;
     const signIn = async (password: string) => {
       await page.goto('/sign-in?next=/account');

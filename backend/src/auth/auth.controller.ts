@@ -8,7 +8,7 @@ import { Caller } from '../shared/access/caller.decorator.js';
 import type { Caller as SignedIn } from '../shared/access/caller.js';
 import { Public } from '../shared/access/public.decorator.js';
 import { AuthService } from './auth.service.js';
-import { SessionResponseDto, toSessionResponse } from './dto/session-response.dto.js';
+import { SessionResponseDto } from './dto/session-response.dto.js';
 import { SignInDto } from './dto/sign-in.dto.js';
 import { clearSessionCookie, readSessionCookie, setSessionCookie } from './session-cookie.js';
 import { SessionsService } from './sessions.service.js';
@@ -37,7 +37,7 @@ export class AuthController {
   ): Promise<SessionResponseDto> {
     const member = await this.auth.signIn(credentials, address);
     setSessionCookie(response, await this.sessions.begin(member, { address, userAgent }), this.config);
-    return toSessionResponse(member);
+    return this.auth.describe(member);
   }
 
   @Public()
@@ -53,7 +53,7 @@ export class AuthController {
   @Access('session.own')
   @Get('me')
   @ApiOkResponse({ type: SessionResponseDto })
-  async getSession(@Caller() caller: SignedIn): Promise<SessionResponseDto> {
-    return toSessionResponse(await this.auth.findSession(caller));
+  getSession(@Caller() caller: SignedIn): Promise<SessionResponseDto> {
+    return this.auth.findSession(caller);
   }
 }

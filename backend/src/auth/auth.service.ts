@@ -7,6 +7,7 @@ import type { Account } from '../users/account.js';
 import { UsersService } from '../users/users.service.js';
 import { signInSubjects } from './attempt-limits.js';
 import { Attempts } from './attempts.service.js';
+import { type SessionResponseDto, toSessionResponse } from './dto/session-response.dto.js';
 import { OwnTeams } from './own-teams.service.js';
 import { passwordMatches } from './passwords.js';
 
@@ -35,12 +36,21 @@ export class AuthService {
     if (!(await passwordMatches(password, account?.passwordHash ?? null)))
       throw new DomainError('session.wrong-credentials', 'E-mail address or password is wrong.');
     await this.attempts.succeed(subjects);
-    return this.ownTeams.firstMember(account as Account);
+    return this.ownTeams.lastMember(account as Account);
   }
 
-  async findSession({ userId, teamId }: Caller): Promise<Member> {
+  async findSession({ userId, teamId }: Caller): Promise<SessionResponseDto> {
     const member = await this.teams.findMember(userId, teamId);
     if (member === null) throw new DomainError('session.missing', 'Sign in first.');
-    return member;
+    return this.describe(member);
+  }
+
+  /** What a member is told of their session. */
+  async describe(member: Member): Promise<SessionResponseDto> {
+    const teams = await this.teams.teamsOf(member.account.id);
+    return toSessionResponse(
+      member,
+      teams.map(({ team }) => team),
+    );
   }
 }

@@ -25,15 +25,15 @@ export class OwnTeams {
     await this.audit.record(manager, { teamId, userId }, [founded]);
   }
 
-  /** The member in the person's first team, which is founded where there is none: so nobody is shut out for good. */
-  async firstMember(account: Account): Promise<Member> {
-    const member = await this.teams.findFirstMember(account.id);
+  /** The member in the team where the person worked last; one is founded where there is none, so that nobody is shut out. */
+  async lastMember(account: Account): Promise<Member> {
+    const member = await this.teams.findLastMember(account.id);
     if (member !== null) return member;
     await this.dataSource.transaction(async (manager) => {
       await this.users.lock(manager, account.id);
-      if ((await this.teams.findFirstMember(account.id)) === null)
+      if ((await this.teams.findLastMember(account.id)) === null)
         await this.found(manager, shortened(`Team of ${account.name}`, 120), account.id);
     });
-    return (await this.teams.findFirstMember(account.id)) as Member;
+    return (await this.teams.findLastMember(account.id)) as Member;
   }
 }

@@ -3,9 +3,10 @@ import { ApiNoContentResponse, ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import { Access } from '../shared/access/access.decorator.js';
 import { Caller } from '../shared/access/caller.decorator.js';
 import { TeamsService } from '../teams/teams.service.js';
+import { AuthService } from './auth.service.js';
 import { OpenSessionListDto, OwnTeamListDto, toOpenSession, toOwnTeam } from './dto/account-response.dto.js';
 import { SwitchTeamDto } from './dto/account.dto.js';
-import { SessionResponseDto, toSessionResponse } from './dto/session-response.dto.js';
+import { SessionResponseDto } from './dto/session-response.dto.js';
 import type { SessionCaller } from './session-caller.js';
 import { SessionsService } from './sessions.service.js';
 
@@ -15,6 +16,7 @@ export class SessionsController {
   constructor(
     private readonly sessions: SessionsService,
     private readonly teams: TeamsService,
+    private readonly auth: AuthService,
   ) {}
 
   @Get('sessions')
@@ -56,6 +58,6 @@ export class SessionsController {
     @Caller() caller: SessionCaller,
     @Body() { teamId }: SwitchTeamDto,
   ): Promise<SessionResponseDto> {
-    return toSessionResponse(await this.sessions.switchTeam(caller, teamId));
+    return this.auth.describe(await this.sessions.switchTeam(caller, teamId));
   }
 }

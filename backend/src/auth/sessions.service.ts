@@ -38,6 +38,7 @@ export class SessionsService {
   /** Begins a session of the member; answers its token. */
   async begin({ account, team }: Member, { address, userAgent }: Origin): Promise<string> {
     const now = new Date();
+    await this.teams.noteOpened(account.id, team.id);
     const { identifiers } = await this.dataSource.manager.insert(Session, {
       userId: account.id,
       teamId: team.id,
@@ -99,6 +100,7 @@ export class SessionsService {
     if (member === null) throw new DomainError('team.not-found', 'You are in no such team.');
     const { id: teamId } = member.team;
     await this.dataSource.manager.update(Session, { id: sessionId, userId }, { teamId });
+    await this.teams.noteOpened(userId, teamId);
     return member;
   }
 

@@ -10,7 +10,6 @@ import { mailSubjects } from './attempt-limits.js';
 import { Attempts } from './attempts.service.js';
 import type { AccountToken } from './entities/account-token.entity.js';
 import { OwnTeams } from './own-teams.service.js';
-import { assertPassword } from './password-rules.js';
 import { hashPassword } from './passwords.js';
 import { takingAtLeast } from './taking-at-least.js';
 import type { SignUpDetails } from './token-purposes.js';
@@ -43,7 +42,6 @@ export class SignUpService {
 
   /** Sends a link to the address; whether there is an account already, only its mailbox learns. */
   async signUp(asked: SignUp, address: string): Promise<void> {
-    assertPassword(asked.password, asked.email, 'password');
     await this.attempts.count(mailSubjects(asked.email, address));
     await takingAtLeast(ANSWERED_AFTER_MS, this.send(asked));
   }

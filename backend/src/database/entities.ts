@@ -28,6 +28,7 @@ import { Supplier } from '../prices/entities/supplier.entity.js';
 import { Invitation } from '../teams/invitations/entities/invitation.entity.js';
 import { Membership } from '../teams/entities/membership.entity.js';
 import { Team } from '../teams/entities/team.entity.js';
+import { RequestCount } from '../throttling/entities/request-count.entity.js';
 import { User } from '../users/entities/user.entity.js';
 
 /** The entities of all features. */
@@ -59,6 +60,7 @@ export const ENTITIES = [
   Session,
   AccountToken,
   AttemptCount,
+  RequestCount,
   OutboxMail,
   RefusedMail,
   PriceDigest,

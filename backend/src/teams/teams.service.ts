@@ -21,14 +21,19 @@ export class TeamsService {
     return membership && this.toMember(membership);
   }
 
-  /** The member in the first of the person's teams. */
-  async findFirstMember(userId: number): Promise<Member | null> {
+  /** The member in the team that the person opened last, or in the first of them where none was. */
+  async findLastMember(userId: number): Promise<Member | null> {
     const membership = await this.memberships.findOne({
       where: { userId },
-      order: { teamId: 'ASC' },
+      order: { openedAt: 'DESC', teamId: 'ASC' },
       relations: { user: true, team: true },
     });
     return membership && this.toMember(membership);
+  }
+
+  /** Notes that the person goes to work in a team: the next sign-in opens it. */
+  async noteOpened(userId: number, teamId: number): Promise<void> {
+    await this.memberships.update({ userId, teamId }, { openedAt: new Date() });
   }
 
   /** The team's admins, as they stand in the transaction. */

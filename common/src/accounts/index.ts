@@ -1,1 +1,2 @@
+export * from './addressFault.js';
 export * from './passwordFault.js';

@@ -2861,6 +2861,8 @@ export interface components {
              */
             standingUntil: string | null;
             team: components["schemas"]["SessionTeamDto"];
+            /** @description All teams that the person is in. */
+            teams: components["schemas"]["SessionTeamDto"][];
             user: components["schemas"]["SessionUserDto"];
         };
         SessionTeamDto: {

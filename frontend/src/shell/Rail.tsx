@@ -4,9 +4,10 @@ import { Mark } from '../components/Mark';
 import { useMember } from '../components/useMember';
 import { NAVIGATION, START_PAGE } from './navigation';
 import styles from './Shell.module.css';
+import { TeamSwitch } from './TeamSwitch';
 
 export function Rail() {
-  const { team, roles } = useMember();
+  const { roles } = useMember();
   const entries = NAVIGATION.filter(({ action }) => mayDo(roles, action));
   return (
     <header className={styles.rail}>
@@ -14,7 +15,7 @@ export function Rail() {
         <Link to={START_PAGE} className={styles.home}>
           <Mark />
         </Link>
-        <span className={styles.team}>{team.name}</span>
+        <TeamSwitch />
       </div>
       <nav aria-label="Pages" className={styles.pages}>
         {entries.map(({ to, label }) => (

@@ -7,6 +7,7 @@ export function sessionOf(role: Role, plan: Session['plan'] = 'team'): Session {
   return {
     user: { id: '7', email: `${role}@tarnfield.example`, name: 'Ada Merrow' },
     team: { id: '1', name: 'Tarnfield Instruments' },
+    teams: [{ id: '1', name: 'Tarnfield Instruments' }],
     roles: [role],
     plan,
     standing: 'active',

@@ -3,7 +3,7 @@ import { ApiProperty } from '@nestjs/swagger';
 import type { AccountToken } from '../entities/account-token.entity.js';
 import type { Session } from '../entities/session.entity.js';
 import { TOKEN_PURPOSES, type TokenPurpose } from '../token-purposes.js';
-import { SessionTeamDto } from './session-response.dto.js';
+import { SessionTeamDto, type TeamName, toTeamName } from './session-response.dto.js';
 
 export class LinkResponseDto {
   @ApiProperty({ enum: Object.keys(TOKEN_PURPOSES) })
@@ -67,11 +67,6 @@ export class DepartureListDto {
   items: DepartureDto[];
 }
 
-interface TeamName {
-  id: number;
-  name: string;
-}
-
 export function toLinkResponse({ purpose, email }: AccountToken): LinkResponseDto {
   return { purpose, email };
 }
@@ -99,8 +94,4 @@ interface Departure extends Pick<DepartureDto, 'closes' | 'obstacle'> {
 
 export function toDeparture({ team, closes, obstacle }: Departure): DepartureDto {
   return { team: toTeamName(team), closes, obstacle };
-}
-
-function toTeamName({ id, name }: TeamName): SessionTeamDto {
-  return { id: String(id), name };
 }

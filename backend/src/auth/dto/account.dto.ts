@@ -1,4 +1,4 @@
-import { Name, Password } from './account-fields.js';
+import { Name, NewPassword, Password } from './account-fields.js';
 import { Email } from '../../shared/validation/email.decorator.js';
 import { Text } from '../../shared/validation/text.decorator.js';
 import { Id } from '../../shared/validation/id.decorator.js';
@@ -10,7 +10,7 @@ export class SignUpDto {
   @Email()
   email: string;
 
-  @Password()
+  @NewPassword()
   password: string;
 
   @Name('name of the team')

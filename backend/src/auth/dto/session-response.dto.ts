@@ -35,6 +35,9 @@ export class SessionResponseDto {
   @ApiProperty()
   team: SessionTeamDto;
 
+  @ApiProperty({ type: [SessionTeamDto], description: 'All teams that the person is in.' })
+  teams: SessionTeamDto[];
+
   @ApiProperty({ enum: ROLES, isArray: true })
   roles: Role[];
 
@@ -55,25 +58,31 @@ export class SessionResponseDto {
 
 interface Session extends Pick<PlanState, 'plan' | 'standing' | 'until'> {
   account: { id: number; email: string; name: string };
-  team: { id: number; name: string };
+  team: TeamName;
   roles: Role[];
 }
 
-export function toSessionResponse({
-  account,
-  team,
-  roles,
-  plan,
-  standing,
-  until,
-}: Session): SessionResponseDto {
+export interface TeamName {
+  id: number;
+  name: string;
+}
+
+export function toSessionResponse(
+  { account, team, roles, plan, standing, until }: Session,
+  teams: readonly TeamName[],
+): SessionResponseDto {
   const { id, email, name } = account;
   return {
     user: { id: String(id), email, name },
-    team: { id: String(team.id), name: team.name },
+    team: toTeamName(team),
+    teams: teams.map(toTeamName),
     roles,
     plan,
     standing,
     standingUntil: until?.toISOString() ?? null,
   };
+}
+
+export function toTeamName({ id, name }: TeamName): SessionTeamDto {
+  return { id: String(id), name };
 }

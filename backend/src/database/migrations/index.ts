@@ -19,6 +19,8 @@ import { KeepEarlierConfirmations1796090901000 } from './1796090901000-KeepEarli
 import { CreateNotices1796091000000 } from './1796091000000-CreateNotices.js';
 import { EndSessionsWithMembership1796091100000 } from './1796091100000-EndSessionsWithMembership.js';
 import { CreateStandingChanges1796103000000 } from './1796103000000-CreateStandingChanges.js';
+import { CountRequests1796105000000 } from './1796105000000-CountRequests.js';
+import { RememberOpenTeams1796105001000 } from './1796105001000-RememberOpenTeams.js';
 
 /** All migrations; they run in the order of the time in their names. */
 export const MIGRATIONS = [
@@ -43,4 +45,6 @@ export const MIGRATIONS = [
   CreateNotices1796091000000,
   EndSessionsWithMembership1796091100000,
   CreateStandingChanges1796103000000,
+  CountRequests1796105000000,
+  RememberOpenTeams1796105001000,
 ];

@@ -37,4 +37,8 @@ export class Membership {
     default: () => 'CURRENT_TIMESTAMP(3)',
   })
   joinedAt: Date;
+
+  /** When the person last signed in to the team or went over to it; null = never. */
+  @Column({ name: 'opened_at', type: 'datetime', precision: 3, nullable: true })
+  openedAt: Date | null;
 }

@@ -1,4 +1,4 @@
-import { type EntityManager, IsNull, Not } from 'typeorm';
+import { type EntityManager, IsNull, MoreThan, Not } from 'typeorm';
 import type { Caller } from '../../shared/access/caller.js';
 import { DomainError } from '../../shared/errors/domain-error.js';
 import { readId } from '../../shared/ids/read-id.js';
@@ -6,6 +6,7 @@ import { Invitation } from './entities/invitation.entity.js';
 import { hashOf } from './invitation-token.js';
 
 const RELATIONS = { team: true, invitedBy: true };
+const REPLACED = 'A newer invitation took this one’s place: open it from the latest e-mail.';
 
 /** The invitations of a caller's team that nobody has accepted or withdrawn. */
 export function findStanding(manager: EntityManager, { teamId }: Caller): Promise<Invitation[]> {
@@ -33,7 +34,7 @@ export async function findByToken(manager: EntityManager, token: string): Promis
   const where = { tokenHash: hashOf(token) };
   const invitation = await manager.findOne(Invitation, { where, relations: RELATIONS });
   if (invitation === null) throw unknownLink();
-  assertStands(invitation);
+  await assertStands(manager, invitation);
   return invitation;
 }
 
@@ -42,7 +43,7 @@ export async function holdByToken(manager: EntityManager, token: string): Promis
   const where = { tokenHash: hashOf(token) };
   const invitation = await manager.findOne(Invitation, { where, lock: { mode: 'pessimistic_write' } });
   if (invitation === null) throw unknownLink();
-  assertStands(invitation);
+  await assertStands(manager, invitation);
   return invitation;
 }
 
@@ -53,11 +54,24 @@ function unknownLink(): DomainError {
   );
 }
 
-function assertStands({ acceptedAt, revokedAt, expiresAt }: Invitation): void {
+/** @throws saying why the invitation is of no use; where a newer one stands, that it does */
+async function assertStands(manager: EntityManager, invitation: Invitation): Promise<void> {
+  const fault = faultOf(invitation);
+  if (fault === null) return;
+  const { teamId, email: openEmail } = invitation;
+  const hasNewer = await manager.existsBy(Invitation, { teamId, openEmail, expiresAt: MoreThan(new Date()) });
+  throw hasNewer ? new DomainError(fault.code, REPLACED) : fault;
+}
+
+function faultOf({ acceptedAt, revokedAt, expiresAt }: Invitation): DomainError | null {
   if (acceptedAt !== null)
-    throw new DomainError('invitation.used', 'This invitation has been accepted already: sign in.');
+    return new DomainError('invitation.used', 'This invitation has been accepted already: sign in.');
   if (revokedAt !== null)
-    throw new DomainError('invitation.revoked', 'The team has withdrawn this invitation.');
+    return new DomainError('invitation.revoked', 'The team has withdrawn this invitation.');
   if (expiresAt <= new Date())
-    throw new DomainError('invitation.expired', 'This invitation is too old: ask the team to send it again.');
+    return new DomainError(
+      'invitation.expired',
+      'This invitation is too old: ask the team to send it again.',
+    );
+  return null;
 }

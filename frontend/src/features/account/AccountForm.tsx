@@ -1,8 +1,8 @@
 import { Button, Form } from 'antd';
 import type { ReactNode } from 'react';
 import styles from './Account.module.css';
-import { FormProblem } from './FormProblem';
-import { useFormAct } from './useFormAct';
+import { FormProblem } from '../../components/FormProblem';
+import { useFormAct } from '../../components/useFormAct';
 
 interface AccountFormProps<Values extends object> {
   label: string;

@@ -1,8 +1,8 @@
 import { Button, Form, Input } from 'antd';
 import { resetPassword } from '../../api/account';
-import { NEW_PASSWORD, PASSWORD_HINT } from './fieldRules';
-import { FormProblem } from './FormProblem';
-import { useFormAct } from './useFormAct';
+import { NEW_PASSWORD, PASSWORD_HINT } from '../../components/accountRules';
+import { FormProblem } from '../../components/FormProblem';
+import { useFormAct } from '../../components/useFormAct';
 
 interface NewPasswordFormProps {
   token: string;

@@ -6,7 +6,7 @@ import { useMember } from '../../components/useMember';
 import styles from './Account.module.css';
 import { AccountForm } from './AccountForm';
 import { Change } from './Change';
-import { needed, NEW_PASSWORD, PASSWORD_HINT } from './fieldRules';
+import { ADDRESS, needed, NEW_PASSWORD, PASSWORD_HINT } from '../../components/accountRules';
 import { PasswordItem } from './PasswordItem';
 
 /** Name, address and password, each with the form that changes it. */
@@ -59,7 +59,7 @@ function AddressFact() {
           act={changeAddress}
           onDone={() => close(ASKED)}
         >
-          <Form.Item name="email" label="New e-mail" rules={needed('The new address is needed')}>
+          <Form.Item name="email" label="New e-mail" rules={ADDRESS}>
             <Input autoFocus type="email" autoComplete="email" maxLength={254} />
           </Form.Item>
           <PasswordItem name="password" label="Your password" />

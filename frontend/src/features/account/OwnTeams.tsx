@@ -1,20 +1,17 @@
 import { ROLE_LABELS } from '@roothertz/common/access';
-import { useMutation, useQuery } from '@tanstack/react-query';
+import { useQuery } from '@tanstack/react-query';
 import { Button, Skeleton } from 'antd';
 import { type OwnTeam, ownTeamsQuery } from '../../api/account';
 import { detailOf } from '../../api/problem';
-import { switchTeam } from '../../api/session';
 import { FieldMessage } from '../../components/FieldMessage';
 import { useMember } from '../../components/useMember';
+import { useSwitchTeam } from '../../components/useSwitchTeam';
 import styles from './Account.module.css';
 
 /** The person's teams; in which of them the session works is chosen here. */
 export function OwnTeams() {
   const { data, error } = useQuery(ownTeamsQuery);
-  const change = useMutation({
-    mutationFn: switchTeam,
-    onSuccess: () => window.location.assign('/'),
-  });
+  const change = useSwitchTeam();
   if (error) return <FieldMessage>{detailOf(error)}</FieldMessage>;
   if (!data) return <Skeleton title={false} paragraph={{ rows: 1 }} />;
   return (

@@ -1,5 +1,5 @@
 import { Form, Input } from 'antd';
-import { needed } from './fieldRules';
+import { needed } from '../../components/accountRules';
 
 interface PasswordItemProps {
   name: string;

@@ -1,8 +1,8 @@
 import { Button, Form, Input } from 'antd';
 import { askForPasswordReset } from '../../api/account';
-import { needed } from './fieldRules';
-import { FormProblem } from './FormProblem';
-import { useFormAct } from './useFormAct';
+import { ADDRESS } from '../../components/accountRules';
+import { FormProblem } from '../../components/FormProblem';
+import { useFormAct } from '../../components/useFormAct';
 
 /** Asks for a link by which a new password is set. */
 export function ResetRequestForm({ onSent }: { onSent: (email: string) => void }) {
@@ -20,7 +20,7 @@ export function ResetRequestForm({ onSent }: { onSent: (email: string) => void }
       onFinish={(asked) => submit(asked)}
     >
       <FormProblem problem={problem} />
-      <Form.Item name="email" label="E-mail" rules={needed('Your e-mail address is needed')}>
+      <Form.Item name="email" label="E-mail" rules={ADDRESS}>
         <Input type="email" autoComplete="username" maxLength={254} autoFocus />
       </Form.Item>
       <Button type="primary" htmlType="submit" block loading={isPending}>

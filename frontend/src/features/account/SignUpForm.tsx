@@ -1,8 +1,8 @@
 import { Button, Form, Input } from 'antd';
 import { type SignUp, signUp } from '../../api/account';
-import { needed, NEW_PASSWORD, PASSWORD_HINT } from './fieldRules';
-import { FormProblem } from './FormProblem';
-import { useFormAct } from './useFormAct';
+import { ADDRESS, needed, NEW_PASSWORD, PASSWORD_HINT } from '../../components/accountRules';
+import { FormProblem } from '../../components/FormProblem';
+import { useFormAct } from '../../components/useFormAct';
 
 /** Asks for an account of one's own, with a team of one's own. */
 export function SignUpForm({ onSent }: { onSent: (asked: SignUp) => void }) {
@@ -23,7 +23,7 @@ export function SignUpForm({ onSent }: { onSent: (asked: SignUp) => void }) {
       <Form.Item name="name" label="Your name" rules={needed('Your name is needed')}>
         <Input autoComplete="name" maxLength={120} autoFocus />
       </Form.Item>
-      <Form.Item name="email" label="E-mail" rules={needed('Your e-mail address is needed')}>
+      <Form.Item name="email" label="E-mail" rules={ADDRESS}>
         <Input type="email" autoComplete="username" maxLength={254} />
       </Form.Item>
       <Form.Item name="password" label="Password" rules={NEW_PASSWORD} extra={PASSWORD_HINT}>

@@ -7,11 +7,12 @@ import styles from './Billing.module.css';
 import { monthlyText } from './moneyText';
 import { SeatsInput } from './SeatsInput';
 import { useLeaveFor } from './useBillingAct';
+import { useSeatsToAdd } from './useSeatsToAdd';
 
 /** Buying the Team plan: how many seats, and what they cost. */
 export function BuyPlan({ billing, seatPrice }: { billing: Billing; seatPrice: Money }) {
   const { usedSeats, standing } = billing;
-  const [seats, setSeats] = useState(usedSeats);
+  const [seats, setSeats] = useState(usedSeats + useSeatsToAdd());
   const checkout = useLeaveFor(checkoutAddress);
   return (
     <section className={styles.section} aria-labelledby="buy">

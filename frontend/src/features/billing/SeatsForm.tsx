@@ -9,10 +9,11 @@ import styles from './Billing.module.css';
 import { previewText } from './previewText';
 import { SeatsInput } from './SeatsInput';
 import { useBillingAct } from './useBillingAct';
+import { useSeatsToAdd } from './useSeatsToAdd';
 
 /** More or fewer seats: what it costs is said before it is done. */
 export function SeatsForm({ billing: { seats, usedSeats } }: { billing: Billing }) {
-  const [wanted, setWanted] = useState(seats);
+  const [wanted, setWanted] = useState(seats + useSeatsToAdd());
   const asked = useDebounced(wanted, 300);
   const isChange = wanted !== seats;
   const { data: preview, error } = useQuery({

@@ -1,15 +1,19 @@
 import { useQuery } from '@tanstack/react-query';
 import { invitationsQuery } from '../../api/team';
+import { useFocusAfterLoss } from '../../components/lostFocus';
 import { InvitationRow } from './InvitationRow';
 import styles from './Team.module.css';
 
 /** The invitations that wait for an answer; nothing where there are none. */
 export function Invitations() {
   const { data = [] } = useQuery(invitationsQuery);
+  const heading = useFocusAfterLoss<HTMLHeadingElement>(data.length);
   if (data.length === 0) return null;
   return (
     <section className={styles.section} aria-label="Open invitations">
-      <h2>{data.length === 1 ? 'One open invitation' : `${data.length} open invitations`}</h2>
+      <h2 ref={heading} tabIndex={-1}>
+        {data.length === 1 ? 'One open invitation' : `${data.length} open invitations`}
+      </h2>
       <table className={styles.table}>
         <thead>
           <tr>

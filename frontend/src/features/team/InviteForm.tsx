@@ -1,6 +1,8 @@
 import type { Role } from '@roothertz/common/access';
 import { Button, Form, Input, Select } from 'antd';
 import { useState } from 'react';
+import { ADDRESS } from '../../components/accountRules';
+import { useFormAct } from '../../components/useFormAct';
 import { InviteProblem } from './InviteProblem';
 import styles from './Team.module.css';
 import { ROLE_OPTIONS } from './teamWords';
@@ -13,18 +15,12 @@ interface Invited {
 
 /** Invites a person by e-mail. */
 export function InviteForm() {
-  const [form] = Form.useForm<Invited>();
   const [sentTo, setSentTo] = useState<string | null>(null);
-  const invite = useInvite();
-  const send = (invited: Invited) => {
+  const { mutateAsync: invite } = useInvite();
+  const { form, submit, isPending, error } = useFormAct<Invited>(async (invited) => {
     setSentTo(null);
-    invite.mutate(invited, {
-      onSuccess: ({ email }) => {
-        setSentTo(email);
-        form.resetFields();
-      },
-    });
-  };
+    setSentTo((await invite(invited)).email);
+  });
   return (
     <section className={styles.section} aria-label="Invite">
       <h2>Invite a colleague</h2>
@@ -32,11 +28,12 @@ export function InviteForm() {
         form={form}
         layout="vertical"
         requiredMark={false}
+        noValidate
         className={styles.invite}
         initialValues={{ roles: ['engineer'] }}
-        onFinish={send}
+        onFinish={(invited) => submit(invited)}
       >
-        <Form.Item name="email" label="E-mail" rules={[{ required: true, message: 'An address is needed' }]}>
+        <Form.Item name="email" label="E-mail" rules={ADDRESS}>
           <Input type="email" autoComplete="off" placeholder="name@company.example" />
         </Form.Item>
         <Form.Item
@@ -46,11 +43,11 @@ export function InviteForm() {
         >
           <Select<Role[]> mode="multiple" showSearch={false} options={ROLE_OPTIONS} />
         </Form.Item>
-        <Button type="primary" htmlType="submit" loading={invite.isPending}>
+        <Button type="primary" htmlType="submit" loading={isPending}>
           Send invitation
         </Button>
       </Form>
-      {invite.error && <InviteProblem error={invite.error} />}
+      {error && <InviteProblem error={error} />}
       <p role="status" className={styles.hint}>
         {sentTo === null
           ? 'They get an e-mail with a link that is good for 7 days. Every member reads and ranks; roles add to that.'

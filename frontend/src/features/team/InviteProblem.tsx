@@ -2,13 +2,12 @@ import { Link } from 'react-router-dom';
 import { ApiProblem, detailOf } from '../../api/problem';
 import { FieldMessage } from '../../components/FieldMessage';
 
-/** Why nobody was invited; without a free seat it leads to where one is added. */
+/** Why nobody was invited; without a free seat it leads to where one is added and what it costs is said. */
 export function InviteProblem({ error }: { error: Error }) {
-  if (!(error instanceof ApiProblem)) return <FieldMessage>{detailOf(error)}</FieldMessage>;
-  const [first] = error.errors;
+  const isSeat = error instanceof ApiProblem && error.status === 402;
   return (
     <FieldMessage>
-      {first?.message ?? error.detail} {error.status === 402 && <Link to="/team/plan">Go to the plan</Link>}
+      {detailOf(error)} {isSeat && <Link to="/team/plan?add">See what a seat more costs</Link>}
     </FieldMessage>
   );
 }

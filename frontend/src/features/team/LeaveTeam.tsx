@@ -1,5 +1,6 @@
-import { Button, Popconfirm } from 'antd';
+import { Button } from 'antd';
 import { detailOf } from '../../api/problem';
+import { AskFirst } from '../../components/AskFirst';
 import { FieldMessage } from '../../components/FieldMessage';
 import { useMember } from '../../components/useMember';
 import { useLeaveTeam } from './useTeamActs';
@@ -10,14 +11,14 @@ export function LeaveTeam() {
   const leave = useLeaveTeam();
   return (
     <div>
-      <Popconfirm
-        title={`Leave ${name}?`}
-        description="Your work stays with the team. You come back only by a new invitation."
-        okText="Leave"
-        onConfirm={() => leave.mutate()}
+      <AskFirst
+        question={`Leave ${name}?`}
+        outcome="Your work stays with the team. You come back only by a new invitation."
+        verb="Leave"
+        onAgree={() => leave.mutate()}
       >
         <Button loading={leave.isPending}>Leave the team</Button>
-      </Popconfirm>
+      </AskFirst>
       {leave.error && <FieldMessage>{detailOf(leave.error)}</FieldMessage>}
     </div>
   );

@@ -1,6 +1,7 @@
-import { Button, Popconfirm } from 'antd';
+import { Button } from 'antd';
 import { detailOf } from '../../api/problem';
 import type { TeamMember } from '../../api/team';
+import { AskFirst } from '../../components/AskFirst';
 import { FieldMessage } from '../../components/FieldMessage';
 import { useHandOver, useRemoveMember } from './useTeamActs';
 
@@ -12,28 +13,28 @@ export function MemberActs({ member, isSelf }: { member: TeamMember; isSelf: boo
   return (
     <>
       {roles.includes('admin') && !isOwner && (
-        <Popconfirm
-          title={`Hand the team’s plan over to ${name}?`}
-          description="They hold the plan from then on; the holder of the plan can’t leave or be removed."
-          okText="Hand over"
-          onConfirm={() => handOver.mutate(id)}
+        <AskFirst
+          question={`Hand the team’s plan over to ${name}?`}
+          outcome="They hold the plan from then on; the holder of the plan can’t leave or be removed."
+          verb="Hand over"
+          onAgree={() => handOver.mutate(id)}
         >
           <Button size="small" aria-label={`Hand over to ${name}`} loading={handOver.isPending}>
             Hand over
           </Button>
-        </Popconfirm>
+        </AskFirst>
       )}
       {!isSelf && (
-        <Popconfirm
-          title={`Remove ${name} from the team?`}
-          description="Their work stays, and their session ends at once."
-          okText="Remove"
-          onConfirm={() => remove.mutate(id)}
+        <AskFirst
+          question={`Remove ${name} from the team?`}
+          outcome="Their work stays, and their session ends at once."
+          verb="Remove"
+          onAgree={() => remove.mutate(id)}
         >
           <Button size="small" aria-label={`Remove ${name}`} loading={remove.isPending}>
             Remove
           </Button>
-        </Popconfirm>
+        </AskFirst>
       )}
       {error && <FieldMessage>{detailOf(error)}</FieldMessage>}
     </>

@@ -2,12 +2,14 @@ import { useQuery } from '@tanstack/react-query';
 import { Button, Skeleton } from 'antd';
 import { detailOf } from '../../api/problem';
 import { teamMembersQuery } from '../../api/team';
+import { useFocusAfterLoss } from '../../components/lostFocus';
 import { MemberRow } from './MemberRow';
 import styles from './Team.module.css';
 
 /** Everybody in the team; an admin changes roles in their place. */
 export function MemberTable({ mayManage }: { mayManage: boolean }) {
   const { data, error, refetch } = useQuery(teamMembersQuery);
+  const heading = useFocusAfterLoss<HTMLHeadingElement>(data?.length ?? 0);
   if (error)
     return (
       <p role="alert">
@@ -17,7 +19,9 @@ export function MemberTable({ mayManage }: { mayManage: boolean }) {
   if (data === undefined) return <Skeleton title={false} paragraph={{ rows: 5, width: '100%' }} />;
   return (
     <section className={styles.section} aria-label="Members">
-      <h2>{data.length === 1 ? 'One member' : `${data.length} members`}</h2>
+      <h2 ref={heading} tabIndex={-1}>
+        {data.length === 1 ? 'One member' : `${data.length} members`}
+      </h2>
       <table className={styles.table}>
         <thead>
           <tr>

@@ -5,11 +5,12 @@ import { detailOf } from '../../api/problem';
 import type { TeamMember } from '../../api/team';
 import { FieldMessage } from '../../components/FieldMessage';
 import { ROLE_OPTIONS } from './teamWords';
-import { useChangeRoles } from './useTeamActs';
+import { useRoleChange } from './useRoleChange';
 
 /** The roles of a member: each choice is in force at once. */
-export function RolesSelect({ member: { id, name, roles } }: { member: TeamMember }) {
-  const change = useChangeRoles(id);
+export function RolesSelect({ member }: { member: TeamMember }) {
+  const { name, roles } = member;
+  const change = useRoleChange(member);
   const [isEmpty, setIsEmpty] = useState(false);
   const choose = (chosen: Role[]) => {
     setIsEmpty(chosen.length === 0);

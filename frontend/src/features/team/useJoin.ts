@@ -1,4 +1,4 @@
-import { useMutation, useQueryClient } from '@tanstack/react-query';
+import { useQueryClient } from '@tanstack/react-query';
 import { useNavigate } from 'react-router-dom';
 import { joinWithNewAccount, type NewAccount } from '../../api/invitation';
 import { signIn, takeSession } from '../../api/session';
@@ -7,14 +7,9 @@ import { signIn, takeSession } from '../../api/session';
 export function useJoin(token: string, email: string) {
   const queryClient = useQueryClient();
   const navigate = useNavigate();
-  return useMutation({
-    mutationFn: async (account: NewAccount) => {
-      await joinWithNewAccount(token, account);
-      return signIn({ email, password: account.password });
-    },
-    onSuccess: async (session) => {
-      takeSession(queryClient, session);
-      await navigate('/');
-    },
-  });
+  return async (account: NewAccount) => {
+    await joinWithNewAccount(token, account);
+    takeSession(queryClient, await signIn({ email, password: account.password }));
+    await navigate('/');
+  };
 }

@@ -1,8 +1,6 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
-import type { Role } from '@roothertz/common/access';
 import { SESSION_KEY } from '../../api/session';
 import {
-  changeRoles,
   handOverTeam,
   inviteMember,
   leaveTeam,
@@ -13,13 +11,23 @@ import {
   TEAM_KEY,
 } from '../../api/team';
 
+interface Afterwards<Result> {
+  onDone?: (result: Result) => void;
+  onError?: (error: Error) => void;
+}
+
 /** An act on the team, after which its lists and the own session are read anew. */
-function useTeamAct<Argument, Result>(act: (argument: Argument) => Promise<Result>) {
+export function useTeamAct<Argument, Result>(
+  act: (argument: Argument) => Promise<Result>,
+  { onDone, onError }: Afterwards<Result> = {},
+) {
   const queryClient = useQueryClient();
   return useMutation({
     mutationFn: act,
     scope: { id: 'team' },
-    onSuccess: async () => {
+    onError,
+    onSuccess: async (result) => {
+      onDone?.(result);
       await queryClient.invalidateQueries({ queryKey: TEAM_KEY });
       await queryClient.invalidateQueries({ queryKey: SESSION_KEY });
       await queryClient.invalidateQueries({ queryKey: ['audit'] });
@@ -33,7 +41,6 @@ export const useRemoveMember = () => useTeamAct(removeMember);
 export const useInvite = () => useTeamAct(inviteMember);
 export const useResend = () => useTeamAct(resendInvitation);
 export const useRevoke = () => useTeamAct(revokeInvitation);
-export const useChangeRoles = (id: string) => useTeamAct((roles: Role[]) => changeRoles(id, roles));
 
 /** Leaving ends the session: the page is loaded anew, so that nothing of it stays in memory. */
 export function useLeaveTeam() {

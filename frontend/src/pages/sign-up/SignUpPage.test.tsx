@@ -8,9 +8,24 @@ const NOBODY = { 'GET /api/auth/me': () => problem(401, 'session.missing') };
 const nothing = () => new Response(null, { status: 204 });
 
 describe('signing up', () => {
+  it('names every fault at its field at once, before anything is sent', async () => {
+    const asked = fakeServer(NOBODY);
+    renderApp('/sign-up');
+    await userEvent.type(await screen.findByLabelText('E-mail'), 'nell');
+    await userEvent.type(screen.getByLabelText('Password'), 'short{Enter}');
+    for (const fault of [
+      'Your name is needed',
+      'An address such as name@company.example is needed.',
+      'At least 12 characters are needed.',
+      'A name for your team is needed',
+    ])
+      expect(await screen.findByText(fault)).toBeInTheDocument();
+    expect(asked.filter(({ route }) => route.startsWith('POST'))).toEqual([]);
+  });
+
   it('shows a refusal at its field, then where to go on, and sends the e-mail again', async () => {
     const message = 'This is one of the passwords that everybody tries first.';
-    let answer = () => problem(422, 'account.invalid', { errors: [{ field: 'password', message }] });
+    let answer = () => problem(400, 'request.invalid', { errors: [{ field: 'password', message }] });
     const asked = fakeServer({ ...NOBODY, 'POST /api/auth/sign-up': () => answer() });
     renderApp('/sign-up');
     await userEvent.type(await screen.findByLabelText('Your name'), 'Nell Weir');

@@ -32,6 +32,10 @@ describe('the team’s page', () => {
     await userEvent.click(await screen.findByTitle('reviewer'));
     await waitFor(() => expect(told('PATCH /api/team/members/9')).toHaveLength(1));
     expect(told('PATCH /api/team/members/9')[0].body).toEqual({ roles: ['engineer', 'reviewer'] });
+    expect(await screen.findByText('Jonas Hartwell is now engineer, reviewer')).toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: 'Undo' }));
+    await waitFor(() => expect(told('PATCH /api/team/members/9')).toHaveLength(2));
+    expect(told('PATCH /api/team/members/9')[1].body).toEqual({ roles: ['engineer'] });
 
     const own = screen.getByLabelText('Roles of Ada Merrow');
     await userEvent.click(own);
@@ -42,13 +46,28 @@ describe('the team’s page', () => {
     expect(await screen.findByText(detail)).toBeInTheDocument();
   });
 
-  it('asks before a member is removed, and offers no way to remove oneself', async () => {
-    const told = asAdmin({ 'DELETE /api/team/members/9': () => new Response(null, { status: 204 }) });
-    await userEvent.click(await screen.findByRole('button', { name: 'Remove Jonas Hartwell' }));
+  it('asks before a member is removed, by keyboard too, and offers no way to remove oneself', async () => {
+    let items = MEMBERS;
+    const told = asAdmin({
+      'GET /api/team/members': () => json({ items, total: items.length }),
+      'DELETE /api/team/members/9': () => {
+        items = MEMBERS.slice(0, 2);
+        return new Response(null, { status: 204 });
+      },
+    });
+    const remove = await screen.findByRole('button', { name: 'Remove Jonas Hartwell' });
+    remove.focus();
+    await userEvent.keyboard('{Enter}');
+    await waitFor(() => expect(screen.getByRole('button', { name: 'Cancel' })).toHaveFocus());
+    await userEvent.keyboard('{Enter}');
+    await waitFor(() => expect(remove).toHaveFocus());
+    await userEvent.keyboard('{Enter}');
     expect(await screen.findByText('Their work stays, and their session ends at once.')).toBeInTheDocument();
     expect(told('DELETE /api/team/members/9')).toHaveLength(0);
-    await userEvent.click(screen.getByRole('button', { name: 'Remove' }));
+    await waitFor(() => expect(screen.getByRole('button', { name: 'Cancel' })).toHaveFocus());
+    await userEvent.keyboard('{Tab}{Enter}');
     await waitFor(() => expect(told('DELETE /api/team/members/9')).toHaveLength(1));
+    await waitFor(() => expect(screen.getByRole('heading', { name: '2 members' })).toHaveFocus());
     expect(screen.queryByRole('button', { name: 'Remove Ada Merrow' })).toBeNull();
     expect(screen.queryByRole('button', { name: 'Hand over to Jonas Hartwell' })).toBeNull();
     expect(screen.getByRole('button', { name: 'Hand over to Tobias Fenn' })).toBeInTheDocument();
@@ -69,7 +88,7 @@ describe('the team’s page', () => {
     await userEvent.type(screen.getByLabelText('E-mail'), 'more@weir.example{Enter}');
     const refusal = await screen.findByRole('alert');
     expect(refusal).toHaveTextContent('3 seats are taken.');
-    expect(within(refusal).getByRole('link')).toHaveAttribute('href', '/team/plan');
+    expect(within(refusal).getByRole('link')).toHaveAttribute('href', '/team/plan?add');
   });
 
   it('shows other members who is in the team, and nothing to change', async () => {

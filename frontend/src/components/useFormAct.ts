@@ -1,6 +1,6 @@
 import { useMutation } from '@tanstack/react-query';
 import { Form, type FormInstance } from 'antd';
-import { ApiProblem, detailOf } from '../../api/problem';
+import { ApiProblem, detailOf } from '../api/problem';
 
 /** Sends a form; what the server refuses stands at the field, and what belongs to none above the form. */
 export function useFormAct<Values extends object>(
@@ -16,13 +16,14 @@ export function useFormAct<Values extends object>(
     },
     onError: (error) => showAtFields(form, error),
   });
-  const problem = mutation.error && !isAtFields(form, mutation.error) ? detailOf(mutation.error) : null;
+  const error = mutation.error && !isAtFields(form, mutation.error) ? mutation.error : null;
   return {
     form,
     submit: mutation.mutate,
     isPending: mutation.isPending,
     isDone: mutation.isSuccess,
-    problem,
+    error,
+    problem: error && detailOf(error),
   };
 }
 
