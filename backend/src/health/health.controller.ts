@@ -1,9 +1,10 @@
 import { Controller, Get } from '@nestjs/common';
-import { ApiOkResponse } from '@nestjs/swagger';
+import { ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import { Public } from '../shared/access/public.decorator.js';
 import { HealthResponseDto } from './health-response.dto.js';
 import { HealthService } from './health.service.js';
 
+@ApiTags('health')
 @Controller('health')
 export class HealthController {
   constructor(private readonly health: HealthService) {}
