@@ -5,7 +5,7 @@ interface ActionRule {
   /** Who may do it, by role. */
   roles: readonly Role[] | 'every member';
   /** What the team's plan must include. */
-  needs?: 'ownLibrary' | 'prices' | 'records';
+  needs?: 'ownLibrary' | 'prices';
   /** Changes what the team keeps: refused while the plan is read-only. */
   writes?: true;
 }

@@ -8,15 +8,13 @@ export interface PlanLimits {
   ownLibrary: boolean;
   /** The team keeps suppliers' prices. */
   prices: boolean;
-  /** The team keeps selection records, with review and signature. */
-  records: boolean;
   /** Named operating conditions that the team may save; null = unlimited. */
   savedConditions: number | null;
 }
 
 export const PLAN_LIMITS: Record<Plan, PlanLimits> = {
-  free: { seats: 1, ownLibrary: false, prices: false, records: false, savedConditions: 3 },
-  team: { seats: null, ownLibrary: true, prices: true, records: true, savedConditions: null },
+  free: { seats: 1, ownLibrary: false, prices: false, savedConditions: 3 },
+  team: { seats: null, ownLibrary: true, prices: true, savedConditions: null },
 };
 
 export const PLAN_LABELS: Record<Plan, string> = { free: 'Free', team: 'Team' };

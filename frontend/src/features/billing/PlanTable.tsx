@@ -6,7 +6,6 @@ const ROWS: readonly { label: string; value: (limits: PlanLimits) => string }[] 
   { label: 'Curated library, the whole ranking', value: () => 'included' },
   { label: 'Library of your own, with imports', value: ({ ownLibrary }) => included(ownLibrary) },
   { label: 'Suppliers’ prices', value: ({ prices }) => included(prices) },
-  { label: 'Selection records', value: ({ records }) => included(records) },
   { label: 'Saved conditions', value: ({ savedConditions }) => String(savedConditions ?? 'unlimited') },
 ];
 

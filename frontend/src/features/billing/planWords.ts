@@ -27,7 +27,7 @@ export function planMeaning(billing: Stated): string {
   if (standing === 'trial')
     return `Everything works until ${untilText(standingUntil)}. The team is on Free from then on: what it has stays readable.`;
   if (standing === 'trial-over')
-    return 'The team’s library, prices and records are all there to read and export. Buy the Team plan to go on with them.';
+    return 'The team’s library and prices are all there to read and export. Buy the Team plan to go on with them.';
   if (standing === 'past-due')
     return `The last payment has failed. Everything works until ${untilText(standingUntil)}; the team is read-only from then on, and nothing is deleted. Use another card under “Card and cancellation”.`;
   if (standing === 'unpaid')
