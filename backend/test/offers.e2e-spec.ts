@@ -63,6 +63,7 @@ describe('offers', () => {
       openedAt: expect.any(String),
       openedBy: { id: String(purchasing.caller.userId), name: expect.any(String) },
       closedAt: null,
+      closedBy: null,
       states: [],
       version: 1,
     });
@@ -90,7 +91,8 @@ describe('offers', () => {
     expect(after.id).not.toBe(before.id);
     const { current, history } = await ofPart();
     expect(current).toEqual([after]);
-    expect(history).toEqual([{ ...before, closedAt: expect.any(String) }]);
+    const closedBy = { id: String(purchasing.caller.userId), name: expect.any(String) };
+    expect(history).toEqual([{ ...before, closedAt: expect.any(String), closedBy }]);
   });
 
   it('opens nothing where nothing changes', async () => {
@@ -125,6 +127,18 @@ describe('offers', () => {
     const { current, history } = await ofPart();
     expect(current).toEqual([]);
     expect(history.map((offer: { id: string }) => offer.id)).toEqual([next, id]);
+  });
+
+  it('tells in what currency each supplier made its latest offer', async () => {
+    await make({ currency: 'GBP' });
+    const { id } = await make({ currency: 'USD', supplierNumber: 'Reel' });
+    await purchasing.agent.delete(`/api/offers/${id}?version=1`).expect(204);
+    const { name } = await createSupplier(purchasing);
+    const { body } = await purchasing.agent.get('/api/suppliers?limit=1000').expect(200);
+    const currencies = body.items.filter(
+      (one: { id: string; name: string }) => one.id === supplierId || one.name === name,
+    );
+    expect(currencies.map((one: { currency: string | null }) => one.currency)).toEqual(['USD', null]);
   });
 
   it('lets only one of several changes at once through', async () => {

@@ -8,6 +8,15 @@ import { createResistor } from './factories/resistors.js';
 import { createTeam, signInMember, startTestApp, type TestApp, type TestMember } from './support/index.js';
 
 const TODAY = dayOf(new Date());
+/** Terms of an offer that says all that it can. */
+const LONG = {
+  minimumOrderQuantity: 10,
+  orderMultiple: 10,
+  leadTimeDays: 14,
+  stock: 250_000,
+  validFrom: TODAY,
+  validUntil: addDays(TODAY, 365),
+};
 
 interface Row {
   part: { partNumber: string };
@@ -116,8 +125,12 @@ describe('the grid of prices', () => {
       expect(names(await grid('sort=-leadTimeDays'))).toEqual(['P-1', 'P-2', 'P-3']);
       expect(names(await grid('sort=-supplier'))).toEqual(['P-2', 'P-1', 'P-3']);
       expect(names(await grid(`supplierId=${otherSupplierId}`))).toEqual(['P-2']);
+      await offered('P-4', { breaks: [{ minimumQuantity: 100, unitPrice: '0.5' }] });
+      expect(names(await grid('sort=price:100'))).toEqual(['P-4', 'P-1', 'P-2', 'P-3']);
+      expect(names(await grid('sort=-price:1'))).toEqual(['P-1', 'P-2', 'P-3', 'P-4']);
+      await admin.agent.get('/api/prices?sort=price:0').expect(400);
       const page = await grid('limit=1&offset=1');
-      expect([names(page), page.total]).toEqual([['P-2'], 3]);
+      expect([names(page), page.total]).toEqual([['P-2'], 4]);
       await admin.agent.get('/api/prices?sort=price').expect(400);
       await admin.agent.get('/api/prices?state=cheap').expect(400);
     });
@@ -212,20 +225,29 @@ describe('the grid of prices', () => {
       expect((await grid()).total).toBe(1);
     });
 
-    it('for five hundred rows at once', async () => {
+    it('a pasted list of some thousand rows at once, or none of it', async () => {
       const { id: partId } = await createOpAmp(admin);
       const fresh = {
         partId,
         supplierId,
         currency: 'EUR',
-        breaks: [{ minimumQuantity: 1, unitPrice: '1' }],
+        breaks: [1, 10, 1000].map((minimumQuantity) => ({ minimumQuantity, unitPrice: '1' })),
       };
-      const rows = Array.from({ length: 500 }, (_, n) => ({ ...fresh, supplierNumber: `N-${n}` }));
+      const number = (n: number) => `N-${n}`.padEnd(60, 'x');
+      const rows = Array.from({ length: 3000 }, (_, n) => ({ ...LONG, ...fresh, supplierNumber: number(n) }));
+      expect(JSON.stringify({ rows }).length).toBeGreaterThan(2 ** 20);
+      const wrong = { ...rows[2999], validUntil: addDays(TODAY, -1) };
+      expect(fields((await save([...rows.slice(0, -1), wrong]).expect(422)).body)).toEqual([
+        'rows[2999].validUntil',
+      ]);
+      expect((await grid()).total).toBe(0);
       const { body } = await save(rows).expect(200);
+      expect((await grid()).total).toBe(3000);
       expect(body.items.map((offer: { supplierNumber: string }) => offer.supplierNumber)).toEqual(
         rows.map(({ supplierNumber }) => supplierNumber),
       );
-      await save([...rows, fresh]).expect(400);
+      const tooMany = Array.from({ length: 5001 }, () => ({ id: '1', version: 1, stock: 1 }));
+      expect(fields((await save(tooMany).expect(400)).body)).toEqual(['rows']);
     });
   });
 
@@ -308,8 +330,8 @@ describe('the grid of prices', () => {
     const list = await admin.agent.get('/api/suppliers?sort=-name').expect(200);
     expect(list.body).toEqual({
       items: [
-        { id: otherSupplierId, name: 'Fenway Électronique' },
-        { id: supplierId, name: 'Brook & Weir' },
+        { id: otherSupplierId, name: 'Fenway Électronique', currency: null },
+        { id: supplierId, name: 'Brook & Weir', currency: null },
       ],
       total: 2,
     });

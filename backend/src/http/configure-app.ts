@@ -14,6 +14,9 @@ import { neverStored, securityHeaders } from './security-headers.js';
 /** What is sent here is signed byte by byte, and so isn't read as JSON before its signature is. */
 const SIGNED_BODIES = '/api/billing/webhook';
 
+/** A pasted price list is saved in one request, and may be longer than any other. */
+const LONG_BODIES = '/api/prices';
+
 /** Everything around the routes, in the order in which a request meets it. The app is made without a body parser. */
 export function configureApp(app: NestExpressApplication): void {
   const config = app.get(AppConfig);
@@ -25,6 +28,7 @@ export function configureApp(app: NestExpressApplication): void {
   app.use('/api', neverStored);
   app.use(originCheck(config.PUBLIC_ORIGIN, SIGNED_BODIES), cookieParser());
   app.use(SIGNED_BODIES, express.raw({ type: () => true, limit: '1mb' }));
+  app.use(LONG_BODIES, express.json({ limit: '4mb' }));
   app.useBodyParser('json', { limit: '1mb' });
   app.use(refuseDeepBodies);
   app.useGlobalPipes(createValidationPipe());

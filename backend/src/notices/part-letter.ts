@@ -1,7 +1,7 @@
 import type { PartKind } from '@roothertz/common/parts';
-import { dividedHalfUp, PRICE_DECIMALS, toScaled } from '@roothertz/common/prices';
+import { dividedHalfUp, PRICE_DECIMALS, shortPrice, toScaled } from '@roothertz/common/prices';
 import type { Letter } from '../mail/letter.js';
-import { amountText, moneyText } from './money-text.js';
+import { moneyText } from './money-text.js';
 import type { PartChange, WatchedState } from './watched-state.js';
 
 /** A part that changed, and the saved conditions at which it is chosen. */
@@ -50,7 +50,7 @@ function words(change: PartChange, { quantity, currency }: WatchedState): string
   if (change.kind === 'unavailable')
     return 'no longer available: no supplier with a valid offer has any in stock';
   const { from, to } = change;
-  return `${percentDearer(from, to)} dearer at ${quantity}: ${amountText(from)} → ${moneyText(to, currency!)}`;
+  return `${percentDearer(from, to)} dearer at ${quantity}: ${shortPrice(from)} → ${moneyText(to, currency!)}`;
 }
 
 function percentDearer(from: string, to: string): string {

@@ -26,6 +26,7 @@ export function toOfferResponse(offer: Offer, { staleAfterDays, today }: OfferVi
     openedAt: offer.openedAt.toISOString(),
     openedBy: toMemberDto(offer.openedBy),
     closedAt: offer.closedAt && offer.closedAt.toISOString(),
+    closedBy: toMemberDto(offer.closedBy),
     states: offerStates({ confirmedAt, validUntil: offer.validUntil }, staleAfterDays, today),
     version: offer.version,
   };

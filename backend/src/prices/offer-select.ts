@@ -16,6 +16,8 @@ export function selectOffers(manager: EntityManager, { teamId }: Caller): OfferS
     .addSelect(['confirmedBy.id', 'confirmedBy.name'])
     .leftJoin('offer.openedBy', 'openedBy')
     .addSelect(['openedBy.id', 'openedBy.name'])
+    .leftJoin('offer.closedBy', 'closedBy')
+    .addSelect(['closedBy.id', 'closedBy.name'])
     .where('offer.teamId = :teamId', { teamId });
 }
 

@@ -4,14 +4,13 @@ import type { DataSource } from 'typeorm';
 import { ConditionsService } from '../conditions/conditions.service.js';
 import { findReadableParts, toPartName } from '../library/readable-parts.js';
 import type { Caller } from '../shared/access/caller.js';
-import { parseSort } from '../shared/list/sort.js';
 import type { ListPricesDto, PriceListDto } from './dto/list-prices.dto.js';
 import type { PriceCountsDto } from './dto/price-counts.dto.js';
 import { toOfferedPart, toOfferResponse } from './offer-response.js';
 import { findOffers } from './offer-select.js';
 import {
   filterPrices,
-  PRICE_SORTS,
+  parsePriceSort,
   type PriceQuery,
   type PriceSelect,
   selectPrices,
@@ -35,7 +34,7 @@ export class PriceListService {
 
   async list(caller: Caller, query: ListPricesDto): Promise<PriceListDto> {
     const { manager } = this.dataSource;
-    const sort = parseSort(query.sort ?? 'manufacturer', PRICE_SORTS);
+    const sort = parsePriceSort(query.sort ?? 'manufacturer');
     const view = await this.settings.view(caller);
     const uses = await this.conditions.partsInUse(caller);
     const select = filterPrices(selectPrices(manager, caller), query, view, [...uses.keys()]);

@@ -5,7 +5,8 @@ import type { Part } from '../library/entities/part.entity.js';
 import { selectReadableParts } from '../library/readable-parts.js';
 import type { Caller } from '../shared/access/caller.js';
 import { likePattern } from '../shared/list/like-pattern.js';
-import type { Sort } from '../shared/list/sort.js';
+import { parseSort, type Sort } from '../shared/list/sort.js';
+import { OfferBreak } from './entities/offer-break.entity.js';
 import { Offer } from './entities/offer.entity.js';
 import type { OfferView } from './offer-response.js';
 
@@ -39,9 +40,17 @@ const SORT_COLUMNS = {
   validUntil: 'offer.validUntil',
   confirmedAt: 'offer.confirmedAt',
 } as const;
-export type PriceSort = keyof typeof SORT_COLUMNS;
+type SortColumn = keyof typeof SORT_COLUMNS;
+/** A column of the offers, or the price from a quantity on such as `price:100`. */
+export type PriceSort = SortColumn | `price:${number}`;
 
-export const PRICE_SORTS = Object.keys(SORT_COLUMNS) as PriceSort[];
+const SORTS = Object.keys(SORT_COLUMNS) as SortColumn[];
+const PRICE_AT = /^(-?)(price:[1-9]\d{0,9})$/;
+
+export function parsePriceSort(sort: string): Sort<PriceSort> {
+  const [, minus, key] = PRICE_AT.exec(sort) ?? [];
+  return key === undefined ? parseSort(sort, SORTS) : { key: key as PriceSort, descending: minus === '-' };
+}
 
 const SEARCHED = ['part.manufacturer', 'part.partNumber', 'supplier.name', 'offer.supplierNumber'];
 
@@ -77,11 +86,19 @@ export function filterPrices(
 
 /** Sorts with unknown values last, and by name so that pages never overlap. */
 export function sortPrices(select: PriceSelect, { key, descending }: Sort<PriceSort>): PriceSelect {
-  const column = SORT_COLUMNS[key];
+  const column = sortColumn(select, key);
   select.orderBy(`${column} IS NULL`).addOrderBy(column, descending ? 'DESC' : 'ASC');
   for (const next of ['part.manufacturer', 'part.partNumber', 'part.id', 'offer.id'])
     if (next !== column) select.addOrderBy(next);
   return select;
+}
+
+function sortColumn(select: PriceSelect, key: PriceSort): string {
+  if (key in SORT_COLUMNS) return SORT_COLUMNS[key as SortColumn];
+  const quantity = Number(key.slice('price:'.length));
+  const on = 'sorted.offerId = offer.id AND sorted.minimumQuantity = :quantity';
+  select.leftJoin(OfferBreak, 'sorted', on, { quantity });
+  return 'sorted.unitPrice';
 }
 
 function anyState(states: readonly PriceState[], { today, staleAfterDays }: OfferView): Brackets {

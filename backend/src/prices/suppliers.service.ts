@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
-import type { DataSource, EntityManager } from 'typeorm';
+import { type DataSource, type EntityManager, In } from 'typeorm';
 import { AuditService } from '../audit/audit.service.js';
 import type { Caller } from '../shared/access/caller.js';
 import { duplicateAs } from '../shared/errors/duplicate-entry.js';
@@ -14,6 +14,7 @@ import {
   type SupplierResponseDto,
   toSupplierResponse,
 } from './dto/supplier.dto.js';
+import { Offer } from './entities/offer.entity.js';
 import { Supplier } from './entities/supplier.entity.js';
 
 const SORTS = ['name'] as const;
@@ -40,7 +41,15 @@ export class SuppliersService {
       .limit(query.limit)
       .offset(query.offset)
       .getManyAndCount();
-    return { items: items.map(toSupplierResponse), total };
+    const currencies = await this.lastCurrencies(
+      teamId,
+      items.map(({ id }) => id),
+    );
+    const listed = items.map((item) => ({
+      ...toSupplierResponse(item),
+      currency: currencies.get(item.id) ?? null,
+    }));
+    return { items: listed, total };
   }
 
   create(caller: Caller, { name }: CreateSupplierDto): Promise<SupplierResponseDto> {
@@ -57,6 +66,23 @@ export class SuppliersService {
   ): Promise<Map<string, Pick<Supplier, 'id' | 'name'>>> {
     const suppliers = await manager.findBy(Supplier, { teamId });
     return new Map(suppliers.map(({ id, name, nameKey: key }) => [key, { id, name }]));
+  }
+
+  /** The currency of the offer that each of a team's suppliers made last. */
+  private async lastCurrencies(teamId: number, supplierIds: readonly number[]): Promise<Map<number, string>> {
+    if (supplierIds.length === 0) return new Map();
+    const { manager } = this.dataSource;
+    const last = await manager
+      .createQueryBuilder(Offer, 'offer')
+      .select('MAX(offer.id)', 'id')
+      .where('offer.teamId = :teamId AND offer.supplierId IN (:...supplierIds)', { teamId, supplierIds })
+      .groupBy('offer.supplierId')
+      .getRawMany<{ id: number }>();
+    const offers = await manager.find(Offer, {
+      where: { teamId, id: In(last.map(({ id }) => id)) },
+      select: { id: true, supplierId: true, currency: true },
+    });
+    return new Map(offers.map(({ supplierId, currency }) => [supplierId, currency]));
   }
 
   async add(manager: EntityManager, caller: Caller, name: string): Promise<Pick<Supplier, 'id' | 'name'>> {

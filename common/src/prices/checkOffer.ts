@@ -1,7 +1,7 @@
 import { boundsError, type FieldError } from '../parts/index.js';
 import { currencyError } from './currencies.js';
 import { isDay } from './days.js';
-import { toScaled, PRICE_DECIMALS } from './money.js';
+import { PRICE_DECIMALS, shortPrice, toScaled } from './money.js';
 import type { Offer, PriceBreak } from './offer.js';
 import { MOST_BREAKS, OFFER_FIELDS } from './offerFields.js';
 import { readPrice } from './readPrice.js';
@@ -57,7 +57,7 @@ function checkOrder(before: PriceBreak, current: PriceBreak, index: number): Fie
   if (!readPrice(before.unitPrice).ok || scaled(current) <= scaled(before)) return [];
   return entry(
     `breaks[${index}].unitPrice`,
-    `unit price: not more than the ${before.unitPrice} of the break before was expected`,
+    `unit price: not more than the ${shortPrice(before.unitPrice)} of the break before was expected`,
   );
 }
 

@@ -4,6 +4,7 @@ export * from './days.js';
 export * from './offer.js';
 export * from './offerStates.js';
 export * from './offerFields.js';
+export * from './plainNumber.js';
 export * from './readPrice.js';
 export * from './checkOffer.js';
 export * from './priceAt.js';

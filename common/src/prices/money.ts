@@ -39,3 +39,9 @@ export function dividedHalfUp(dividend: bigint, divisor: bigint): bigint {
 export function priceText(text: string): string {
   return scaledText(toScaled(text, PRICE_DECIMALS), PRICE_DECIMALS);
 }
+
+/** A unit price with two decimals, or more where it has them: `4.6900` is `4.69`, `0.0125` stays, `4` is `4.00`. */
+export function shortPrice(unitPrice: string): string {
+  const [whole, decimals = ''] = unitPrice.split('.');
+  return `${whole}.${decimals.replace(/0+$/, '').padEnd(2, '0')}`;
+}

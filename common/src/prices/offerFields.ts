@@ -65,5 +65,8 @@ export const SUPPLIER_NUMBER = {
   synonyms: [],
 } as const satisfies TextField;
 
+/** The most offers that are saved or confirmed at once: a supplier's whole list, pasted. */
+export const MOST_OFFERS_SAVED = 5000;
+
 /** The most breaks that an offer has. */
 export const MOST_BREAKS = 20;

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { currencyError, isDay, offerStates, readPrice, readRate } from './index.js';
+import { currencyError, isDay, offerStates, plainNumber, readPrice, readRate } from './index.js';
 
 describe('readPrice', () => {
   it.each([
@@ -18,10 +18,11 @@ describe('readPrice', () => {
   it.each([
     ['1.234,56', '.', /1234\.56/],
     ['1,234.56', '.', /1234\.56/],
-    ['1,23', '.', /1234\.56/],
-    ['1 234.56', '.', /1234\.56/],
+    ['1,23', '.', /write it as 1\.23$/],
+    ['1,234', '.', /write it as 1\.234 or 1234$/],
+    ['1 234.56', '.', /write it as 1234\.56$/],
     ['1.234,56', ',', /1234,56/],
-    ['1.23', ',', /1234,56/],
+    ['1.23', ',', /write it as 1,23$/],
     ['1.', '.', /misread|such as/],
     ['EUR 1.20', '.', /one currency/],
     ['1.20 $', '.', /one currency/],
@@ -41,6 +42,23 @@ describe('readPrice', () => {
   it('reads rates to eight decimals', () => {
     expect(readRate('0.00003512')).toEqual({ ok: true, value: '0.00003512' });
     expect(readRate('0.000000001').ok).toBe(false);
+  });
+});
+
+describe('plainNumber', () => {
+  it.each([
+    ['8,95', '8.95', null],
+    ['1.234,56', '1234.56', null],
+    ['1,234.56', null, '1234.56'],
+    ['1,234', '1.234', '1234'],
+    ['1 234\u202f567,8', '1234567.8', null],
+    ['1’234.5', null, '1234.5'],
+    ['1,23,456', null, null],
+    ['12.34.56', null, null],
+    ['', null, null],
+    ['-8,95', null, null],
+  ])('reads “%s” with a decimal comma as %s, with a full stop as %s', (text, comma, stop) => {
+    expect([plainNumber(text, ','), plainNumber(text, '.')]).toEqual([comma, stop]);
   });
 });
 

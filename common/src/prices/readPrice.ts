@@ -1,4 +1,5 @@
 import type { Reading } from '../parts/index.js';
+import { plainNumbers } from './plainNumber.js';
 import { priceText, RATE_DECIMALS, scaledText, toScaled } from './money.js';
 
 /** Digits before the decimal mark that a price or rate may have. */
@@ -40,13 +41,19 @@ function numberError(text: string, mark: '.' | ',', decimals: number): string | 
   if (/\p{Sc}|[A-Z]{3}/u.test(text))
     return 'a number without a currency was expected: an offer has one currency for all its prices';
   if (/^\d[\d.,\s’']*$/.test(text) && !isPlain(text, mark))
-    return `digits in groups or another decimal mark can be misread: write it as ${example}`;
+    return `digits in groups or another decimal mark can be misread: write it as ${plainly(text, mark) || example}`;
   if (!isPlain(text, mark)) return `a number such as ${example} was expected`;
   const [whole, fraction = ''] = text.split(mark);
   if (whole.length > WHOLE_DIGITS)
     return `at most ${WHOLE_DIGITS} digits before the decimal mark were expected`;
   if (fraction.length > decimals) return `at most ${decimals} decimals were expected`;
   return /[1-9]/.test(text) ? null : 'a value above 0 was expected';
+}
+
+function plainly(text: string, mark: '.' | ','): string {
+  return plainNumbers(text)
+    .map((number) => number.replace('.', mark))
+    .join(' or ');
 }
 
 function isPlain(text: string, mark: '.' | ','): boolean {

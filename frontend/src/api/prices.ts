@@ -1,5 +1,6 @@
-import { keepPreviousData, queryOptions } from '@tanstack/react-query';
+import { queryOptions } from '@tanstack/react-query';
 import { answer, client } from './client';
+import { pagesQuery } from './pages';
 import type { components, operations } from './schema';
 
 type Schemas = components['schemas'];
@@ -7,7 +8,8 @@ type Schemas = components['schemas'];
 export type PriceListRow = Schemas['PriceRowResponseDto'];
 export type Offer = Schemas['OfferResponseDto'];
 export type OfferedPart = Schemas['OfferedPartDto'];
-export type Supplier = Schemas['SupplierResponseDto'];
+export type Supplier = Schemas['ListedSupplierDto'];
+export type PriceListPage = Schemas['PriceListDto'];
 export type PriceSettings = Schemas['PriceSettingsDto'];
 export type SavedPriceRow = Schemas['PriceRowDto'];
 export type PriceHistory = Schemas['PriceHistoryDto'];
@@ -18,18 +20,18 @@ export type PriceQuery = Omit<
   'limit' | 'offset'
 >;
 
-/** The most rows that the server gives, and the most that it saves or confirms at once. */
-export const MOST_LISTED = 1000;
-export const MOST_SAVED = 500;
+/** The rows that are loaded at once, and the most that the server gives. */
+const ROWS_A_PAGE = 500;
+const MOST_LISTED = 1000;
 
-const PRICES_KEY = ['prices'] as const;
+export const PRICES_KEY = ['prices'] as const;
+
+export const PRICE_LISTS_KEY = [...PRICES_KEY, 'list'] as const;
 
 export function pricesQuery(view: PriceQuery) {
-  const query = { ...view, limit: MOST_LISTED, offset: 0 };
-  return queryOptions({
-    queryKey: [...PRICES_KEY, 'list', view],
-    queryFn: ({ signal }) => answer(client.GET('/api/prices', { params: { query }, signal })),
-    placeholderData: keepPreviousData,
+  return pagesQuery([...PRICE_LISTS_KEY, view], (offset, signal) => {
+    const query = { ...view, limit: ROWS_A_PAGE, offset };
+    return answer(client.GET('/api/prices', { params: { query }, signal }));
   });
 }
 
@@ -100,8 +102,8 @@ export function reopenOffer(offer: Offer): Promise<Offer> {
   return answer(client.POST('/api/offers', { body }));
 }
 
-export function addSupplier(name: string): Promise<Supplier> {
-  return answer(client.POST('/api/suppliers', { body: { name } }));
+export async function addSupplier(name: string): Promise<void> {
+  await answer(client.POST('/api/suppliers', { body: { name } }));
 }
 
 export function saveSettings(body: PriceSettings): Promise<PriceSettings> {

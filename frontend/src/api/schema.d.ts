@@ -2023,6 +2023,12 @@ export interface components {
             /** @enum {string} */
             purpose: "sign-up" | "change-address" | "reset-password";
         };
+        ListedSupplierDto: {
+            /** @description Of its latest offer (ISO 4217); null = it has made none. */
+            currency: string | null;
+            id: string;
+            name: string;
+        };
         MailPreferenceDto: {
             /** @enum {string} */
             kind: "price-digest" | "part-notice";
@@ -2131,6 +2137,8 @@ export interface components {
              * @description When other terms took their place, or none; null = they stand.
              */
             closedAt: string | null;
+            /** @description null while they stand. */
+            closedBy: components["schemas"]["MemberDto"] | null;
             /** Format: date-time */
             confirmedAt: string;
             confirmedBy: components["schemas"]["MemberDto"] | null;
@@ -3048,7 +3056,7 @@ export interface components {
             supplier: string | null;
         };
         SupplierListDto: {
-            items: components["schemas"]["SupplierResponseDto"][];
+            items: components["schemas"]["ListedSupplierDto"][];
             /** @description How many there are in all, whatever the page holds. */
             total: number;
         };

@@ -23,6 +23,7 @@ export function offerOf(changes: Partial<Offer> = {}): Offer {
     openedAt: '2026-01-05T10:00:00.000Z',
     openedBy: { id: '7', name: 'Ada Merrow' },
     closedAt: null,
+    closedBy: null,
     states: ['stale'],
     version: 2,
     ...changes,

@@ -87,6 +87,9 @@ export class OfferResponseDto {
   })
   closedAt: string | null;
 
+  @ApiProperty({ type: MemberDto, nullable: true, description: 'null while they stand.' })
+  closedBy: MemberDto | null;
+
   @ApiProperty({ enum: OFFER_STATES, isArray: true, description: 'What calls for a look at it.' })
   states: OfferState[];
 

@@ -1,11 +1,9 @@
-import { MOST_BREAKS } from '@roothertz/common/prices';
+import { MOST_BREAKS, MOST_OFFERS_SAVED } from '@roothertz/common/prices';
 import { OmitType } from '@nestjs/swagger';
 import { Id, Ids } from '../../shared/validation/id.decorator.js';
 import { NestedList } from '../../shared/validation/nested.decorator.js';
 import { Version } from '../../shared/validation/version.decorator.js';
 import { Currency, OfferTermsDto, PriceBreakDto } from './offer-terms.dto.js';
-
-const MOST_ROWS = 500;
 
 export class CreateOfferDto extends OmitType(OfferTermsDto, ['currency', 'breaks']) {
   @Id()
@@ -42,11 +40,11 @@ export class PriceRowDto extends OfferTermsDto {
 }
 
 export class SavePricesDto {
-  @NestedList(() => PriceRowDto, { most: MOST_ROWS })
+  @NestedList(() => PriceRowDto, { most: MOST_OFFERS_SAVED })
   rows: PriceRowDto[];
 }
 
 export class ConfirmOffersDto {
-  @Ids(MOST_ROWS)
+  @Ids(MOST_OFFERS_SAVED)
   ids: string[];
 }

@@ -17,7 +17,16 @@ export class SupplierResponseDto {
   name: string;
 }
 
-export class SupplierListDto extends listOf(SupplierResponseDto) {}
+export class ListedSupplierDto extends SupplierResponseDto {
+  @ApiProperty({
+    type: String,
+    nullable: true,
+    description: 'Of its latest offer (ISO 4217); null = it has made none.',
+  })
+  currency: string | null;
+}
+
+export class SupplierListDto extends listOf(ListedSupplierDto) {}
 
 export function toSupplierResponse({ id, name }: Pick<Supplier, 'id' | 'name'>): SupplierResponseDto {
   return { id: String(id), name };

@@ -6,7 +6,7 @@ const BY_STATUS: Record<number, [ErrorCode, string]> = {
   401: ['session.missing', 'Sign in first.'],
   403: ['access.role', 'This isn’t allowed.'],
   404: ['request.unknown-path', 'There is nothing at this address.'],
-  413: ['request.too-large', 'The request is larger than 1 MB.'],
+  413: ['request.too-large', 'The request is larger than this address takes.'],
   415: ['request.unsupported', 'The body’s encoding or character set isn’t supported.'],
   429: ['request.too-many', 'Too many requests: wait a moment.'],
 };

@@ -101,7 +101,7 @@ describe('judgeOffer in the wide form', () => {
     [2, '1.234,56', /digits in groups/],
     [2, '-4', /above 0/],
     [2, '€ 4,20', /without a currency/],
-    [4, '4,30', /not more than the 3\.9000/],
+    [4, '4,30', /not more than the 3\.90/],
     [5, '0', /a value from 1/],
     [7, '6-8', /a whole number of days or weeks/],
     [8, '2026-11-30', /a day not before 2026-12-01/],

@@ -3,7 +3,8 @@ import { Button } from 'antd';
 import { useState } from 'react';
 import { addSupplier } from '../../api/prices';
 import { detailOf } from '../../api/problem';
-import { type CellProblem, commasMended, unknownSuppliers } from './draftProblems';
+import { type CellProblem, numbersMended, unknownSuppliers } from './draftProblems';
+import { OverrunView } from './OverrunView';
 import styles from './SaveBar.module.css';
 import type { PriceDraft } from './usePriceDraft';
 
@@ -21,7 +22,6 @@ export function DraftProblems({ draft, problems, onShow }: DraftProblemsProps) {
     onShow(problem);
     setNext((next % problems.length) + 1);
   };
-  const commas = commasMended(problems);
   return (
     <>
       <span className={styles.problem}>
@@ -31,17 +31,12 @@ export function DraftProblems({ draft, problems, onShow }: DraftProblemsProps) {
       <Button size="small" onClick={show}>
         Show it
       </Button>
-      {problem.row.isOverrun && <Overrun draft={draft} problem={problem} />}
-      {problem.column === 'part' && !problem.row.isOverrun && (
+      {problem.column === 'part' && !problem.row.overrun && (
         <Button size="small" onClick={() => draft.dropRow(problem.row.key)}>
           Give up the changes of this row
         </Button>
       )}
-      {commas.length > 0 && (
-        <Button size="small" onClick={() => draft.edit(commas)}>
-          Read the comma as decimal mark in {commas.length}
-        </Button>
-      )}
+      <MendNumbers draft={draft} problems={problems} />
       {draft.draft.refusals.some(({ from }) => from === 'paste') && (
         <Button size="small" onClick={draft.leaveOut}>
           Leave out what has no place
@@ -50,19 +45,27 @@ export function DraftProblems({ draft, problems, onShow }: DraftProblemsProps) {
       {unknownSuppliers(problems).map((name) => (
         <AddSupplier key={name} name={name} />
       ))}
+      {problem.row.overrun && <OverrunView draft={draft} row={problem.row} />}
     </>
   );
 }
 
-function Overrun({ draft, problem: { row } }: { draft: PriceDraft; problem: CellProblem }) {
+/** How numbers that can be misread are meant is for the reader to say, for all of them at once. */
+function MendNumbers({ draft, problems }: Omit<DraftProblemsProps, 'onShow'>) {
+  const commas = numbersMended(problems, ',');
+  const groups = numbersMended(problems, '.');
   return (
     <>
-      <Button size="small" onClick={() => draft.keepMine(row)}>
-        Keep mine
-      </Button>
-      <Button size="small" onClick={() => draft.dropRow(row.key)}>
-        Take theirs
-      </Button>
+      {commas.length > 0 && (
+        <Button size="small" onClick={() => draft.edit(commas)}>
+          Read the comma as decimal mark in {commas.length}
+        </Button>
+      )}
+      {groups.length > 0 && (
+        <Button size="small" onClick={() => draft.edit(groups)}>
+          Leave out what groups the digits in {groups.length}
+        </Button>
+      )}
     </>
   );
 }

@@ -4,6 +4,8 @@ import type { ChangeFields } from '../../components/useAddressFields';
 import styles from './PricesFacts.module.css';
 import { PRICE_STATES, type PricesView } from './pricesView';
 
+const plain = new Intl.NumberFormat('en-GB');
+
 interface PricesFactsProps {
   view: PricesView;
   change: ChangeFields;
@@ -23,7 +25,7 @@ export function PricesFacts({ view, change }: PricesFactsProps) {
   const words = { stale: 'stale', expiring: 'expiring', expired: 'expired', missing: 'without a price' };
   return (
     <div className={styles.facts} role="group" aria-label="What calls for a look">
-      <span>{counts.offers} offers</span>
+      <span>{plain.format(counts.offers)} offers</span>
       {PRICE_STATES.map((state) => {
         const isOn = view.state?.includes(state) ?? false;
         const library = !isOn && state === 'missing' ? 'team' : undefined;
@@ -34,7 +36,7 @@ export function PricesFacts({ view, change }: PricesFactsProps) {
             help={help[state]}
             onClick={() => change({ state: isOn ? undefined : state, library })}
           >
-            {counts[state]} {words[state]}
+            {plain.format(counts[state])} {words[state]}
           </Fact>
         );
       })}
@@ -43,7 +45,7 @@ export function PricesFacts({ view, change }: PricesFactsProps) {
         help="parts that are chosen in saved conditions"
         onClick={() => change({ usedInConditions: view.usedInConditions ? undefined : 'true' })}
       >
-        {counts.usedInConditions} used in saved conditions
+        {plain.format(counts.usedInConditions)} used in saved conditions
       </Fact>
     </div>
   );

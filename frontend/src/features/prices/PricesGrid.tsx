@@ -5,9 +5,11 @@ import type {
   ColDef,
   GridApi,
   SelectionChangedEvent,
+  SortChangedEvent,
+  ViewportChangedEvent,
 } from 'ag-grid-community';
 import { AgGridReact } from 'ag-grid-react';
-import { type Ref, useImperativeHandle, useMemo, useRef, useState } from 'react';
+import { type Ref, useCallback, useImperativeHandle, useMemo, useRef, useState } from 'react';
 import type { Supplier } from '../../api/prices';
 import { gridTheme } from '../../components/gridTheme';
 import { isCell } from './draft/cells';
@@ -15,12 +17,15 @@ import type { ShownRow } from './draft/shownRows';
 import { type FocusedCell, FocusedCellContext } from './FocusedCell';
 import { pricesColumns } from './pricesColumns';
 import styles from './PricesGrid.module.css';
-import { useGridKeys } from './useGridKeys';
+import { sortKeyOf } from './pricesView';
+import { type PastedRectangle, useGridKeys } from './useGridKeys';
 import type { PriceDraft } from './usePriceDraft';
 
 export interface PricesGridHandle {
   /** Puts the focus on a cell, scrolled into sight. */
   focus: (cell: FocusedCell) => void;
+  /** Begins to edit a cell, of a row that may only come with the next rendering. */
+  edit: (cell: FocusedCell) => void;
 }
 
 interface PricesGridProps {
@@ -28,6 +33,12 @@ interface PricesGridProps {
   quantities: readonly number[];
   suppliers: readonly Supplier[];
   mayEdit: boolean;
+  sort: string | undefined;
+  onSort: (sort: string | undefined) => void;
+  /** Told when the last rows come into sight. */
+  onEnd: () => void;
+  onPaste: (rectangle: PastedRectangle) => void;
+  onSave: () => void;
   onConfirm: (rows: readonly ShownRow[]) => void;
   onSelect: (rows: readonly ShownRow[]) => void;
   onFocus: (key: string) => void;
@@ -53,6 +64,11 @@ export function PricesGrid({
   quantities,
   suppliers,
   mayEdit,
+  sort,
+  onSort,
+  onEnd,
+  onPaste,
+  onSave,
   onConfirm,
   onSelect,
   onFocus,
@@ -62,11 +78,30 @@ export function PricesGrid({
   const [focused, setFocused] = useState<FocusedCell | null>(null);
   const isNarrow = window.innerWidth <= 760;
   const columns = useMemo(
-    () => pricesColumns({ quantities, suppliers, mayEdit, isNarrow, onConfirm }),
-    [quantities, suppliers, mayEdit, isNarrow, onConfirm],
+    () => pricesColumns({ quantities, suppliers, mayEdit, isNarrow, sort, onConfirm }),
+    [quantities, suppliers, mayEdit, isNarrow, sort, onConfirm],
   );
-  useImperativeHandle(ref, () => ({ focus: (cell) => focusCell(api.current, cell) }), []);
-  const keys = useGridKeys(api, draft, mayEdit);
+  const wanted = useRef<FocusedCell | null>(null);
+  const editWanted = useCallback(() => {
+    if (wanted.current && startEditing(api.current, wanted.current)) wanted.current = null;
+  }, []);
+  useImperativeHandle(
+    ref,
+    () => ({
+      focus: (cell) => void focusCell(api.current, cell),
+      edit: (cell) => {
+        wanted.current = cell;
+        editWanted();
+      },
+    }),
+    [editWanted],
+  );
+  const keys = useGridKeys(api, { draft, mayEdit, onPaste, onSave });
+  const sortBy = (event: SortChangedEvent<ShownRow>) => {
+    if (event.source !== 'uiColumnSorted') return;
+    event.api.ensureIndexVisible(0, 'top');
+    onSort(sortIn(event));
+  };
   const noteFocus = (event: CellFocusedEvent<ShownRow>) => {
     const cell = cellAt(event);
     setFocused(cell);
@@ -96,7 +131,12 @@ export function PricesGrid({
           singleClickEdit={isNarrow}
           rowSelection={mayEdit ? SELECTION : undefined}
           selectionColumnDef={SELECTION_COLUMN}
+          tabToNextCell={({ editing, nextCellPosition }) => editing && (nextCellPosition ?? false)}
+          focusGridInnerElement={({ api: entered }) => focusEntered(entered)}
           onGridReady={(event) => (api.current = event.api)}
+          onRowDataUpdated={editWanted}
+          onSortChanged={sortBy}
+          onViewportChanged={(event) => isNearEnd(event) && onEnd()}
           onCellFocused={noteFocus}
           onCellKeyDown={onCellKeyDown as (event: object) => void}
           onCellEditRequest={({ data, column, newValue }) => {
@@ -118,10 +158,40 @@ function cellAt({ api, rowIndex, column }: CellFocusedEvent<ShownRow>): FocusedC
   return { key: row.key, column: typeof column === 'string' ? column : column.getColId() };
 }
 
-function focusCell(api: GridApi<ShownRow> | null, { key, column }: FocusedCell): void {
+/** Answers the index of the row; null where the grid doesn't hold it. */
+function focusCell(api: GridApi<ShownRow> | null, { key, column }: FocusedCell): number | null {
   const index = api?.getRowNode(key)?.rowIndex;
-  if (!api || index === null || index === undefined) return;
+  if (!api || index === null || index === undefined) return null;
   api.ensureIndexVisible(index);
   api.ensureColumnVisible(column);
   api.setFocusedCell(index, column);
+  return index;
+}
+
+function startEditing(api: GridApi<ShownRow> | null, cell: FocusedCell): boolean {
+  const rowIndex = focusCell(api, cell);
+  if (rowIndex === null) return false;
+  api!.startEditingCell({ rowIndex, colKey: cell.column });
+  return true;
+}
+
+function sortIn({ api }: SortChangedEvent<ShownRow>): string | undefined {
+  const sorted = api.getColumnState().find(({ sort }) => sort);
+  return sorted && `${sorted.sort === 'desc' ? '-' : ''}${sortKeyOf(sorted.colId)}`;
+}
+
+/** Whoever comes back by Tab stands where they left; the headers are reached by the arrows. */
+function focusEntered(api: GridApi<ShownRow>): boolean {
+  const { rowIndex, column } = api.getFocusedCell() ?? { rowIndex: 0, column: 'part' };
+  if (api.getDisplayedRowAtIndex(rowIndex) === undefined) return false;
+  api.ensureIndexVisible(rowIndex);
+  api.setFocusedCell(rowIndex, column);
+  return true;
+}
+
+/** How many rows before the last the next ones are loaded. */
+const ROWS_AHEAD = 100;
+
+function isNearEnd({ api, lastRow }: ViewportChangedEvent<ShownRow>): boolean {
+  return lastRow >= api.getDisplayedRowCount() - ROWS_AHEAD;
 }

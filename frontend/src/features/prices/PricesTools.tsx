@@ -1,44 +1,81 @@
 import { OFFER_FIELDS } from '@roothertz/common/prices';
 import { Button, Input } from 'antd';
 import { useState } from 'react';
+import { ConfirmButton } from './ConfirmButton';
 import { readCount } from './draft/readCell';
 import type { ShownRow } from './draft/shownRows';
 import styles from './PricesTools.module.css';
+import type { PriceList } from './usePriceList';
 
 interface PricesToolsProps {
   /** The row that has the focus. */
   row: ShownRow | undefined;
+  rows: readonly ShownRow[];
+  selected: readonly ShownRow[];
+  list: PriceList;
   mayEdit: boolean;
   isPanelOpen: boolean;
+  isConfirming: boolean;
   onNewOffer: (row: ShownRow) => void;
   onCloseOffer: (row: ShownRow) => void;
   onPanel: () => void;
   onColumn: (quantity: number) => void;
   onSettings: () => void;
+  onConfirm: (rows: readonly ShownRow[]) => void;
 }
 
 /** What can be done with the row that has the focus, and with the grid. */
 export function PricesTools(props: PricesToolsProps) {
-  const { row, mayEdit, isPanelOpen, onNewOffer, onCloseOffer, onPanel, onColumn, onSettings } = props;
+  const { row, list, mayEdit, isPanelOpen, onPanel, onSettings } = props;
+  return (
+    <div className={styles.bar}>
+      <div className={styles.tools}>
+        <Button disabled={!row} aria-pressed={isPanelOpen} onClick={onPanel}>
+          Price history
+        </Button>
+        {mayEdit && <EditTools {...props} />}
+        <Button onClick={onSettings}>Currency and rates</Button>
+      </div>
+      <Loaded list={list} />
+      {mayEdit && (
+        <ConfirmButton
+          rows={props.rows}
+          selected={props.selected}
+          areAllLoaded={list.items.length >= list.total}
+          isPending={props.isConfirming}
+          onConfirm={props.onConfirm}
+        />
+      )}
+    </div>
+  );
+}
+
+function EditTools({ row, onNewOffer, onCloseOffer, onColumn }: PricesToolsProps) {
   const name = row?.part.partNumber;
   return (
-    <div className={styles.tools}>
-      <Button disabled={!row} aria-pressed={isPanelOpen} onClick={onPanel}>
-        Price history
+    <>
+      <Button disabled={!row} onClick={() => row && onNewOffer(row)}>
+        New offer{name && ` for ${name}`}
       </Button>
-      {mayEdit && (
-        <>
-          <Button disabled={!row} onClick={() => row && onNewOffer(row)}>
-            New offer{name && ` for ${name}`}
-          </Button>
-          <Button disabled={!row?.offer} onClick={() => row && onCloseOffer(row)}>
-            Close this offer
-          </Button>
-          <AddColumn onColumn={onColumn} />
-        </>
-      )}
-      <Button onClick={onSettings}>Currency and rates</Button>
-    </div>
+      <Button disabled={!row?.offer} onClick={() => row && onCloseOffer(row)}>
+        Close this offer
+      </Button>
+      <AddColumn onColumn={onColumn} />
+    </>
+  );
+}
+
+const plain = new Intl.NumberFormat('en-GB');
+
+/** How much of a long list is loaded. */
+function Loaded({ list: { items, total, isLoadingMore } }: { list: PriceList }) {
+  if (items.length >= total) return null;
+  return (
+    <span className={styles.loaded}>
+      {isLoadingMore
+        ? `Loading more of ${plain.format(total)} rows …`
+        : `${plain.format(items.length)} of ${plain.format(total)} rows, more as you scroll`}
+    </span>
   );
 }
 

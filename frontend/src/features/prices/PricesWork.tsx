@@ -1,10 +1,9 @@
 import { type ReactNode, useCallback, useRef, useState } from 'react';
-import type { PriceListRow, Supplier } from '../../api/prices';
 import { LeaveQuestion } from '../../components/LeaveQuestion';
 import { useLeaveGuard, useMarkedDirty } from '../../components/useLeaveGuard';
 import { useMayDo } from '../../components/useMember';
-import { ConfirmButton } from './ConfirmButton';
-import { draftProblems } from './draftProblems';
+import { type CellProblem, draftProblems } from './draftProblems';
+import { nextAddedKey } from './draft/draft';
 import type { ShownRow } from './draft/shownRows';
 import { PricePanel } from './history/PricePanel';
 import { PricesGrid, type PricesGridHandle } from './PricesGrid';
@@ -13,13 +12,16 @@ import styles from './PricesWork.module.css';
 import { SaveBar } from './SaveBar';
 import { useCloseOffer } from './useCloseOffer';
 import { useConfirmPrices } from './useConfirmPrices';
+import { usePaste } from './usePaste';
 import { usePriceColumns } from './usePriceColumns';
 import { usePriceDraft } from './usePriceDraft';
+import type { PriceList } from './usePriceList';
 import { useSavePrices } from './useSavePrices';
 
 interface PricesWorkProps {
-  items: readonly PriceListRow[];
-  suppliers: readonly Supplier[];
+  list: PriceList;
+  sort: string | undefined;
+  onSort: (sort: string | undefined) => void;
   onSettings: () => void;
   /** What to do where there is no row. */
   children: ReactNode;
@@ -28,10 +30,11 @@ interface PricesWorkProps {
 const NONE: readonly ShownRow[] = [];
 
 /** The grid with what can be done in it and what isn't saved of it. */
-export function PricesWork({ items, suppliers, onSettings, children }: PricesWorkProps) {
+export function PricesWork({ list, sort, onSort, onSettings, children }: PricesWorkProps) {
   const mayEdit = useMayDo('prices.edit');
-  const draft = usePriceDraft(items, suppliers);
+  const draft = usePriceDraft(list.items, list);
   const { quantities, addColumn } = usePriceColumns(draft);
+  const { paste, isPending: isPasting } = usePaste(draft, list);
   const { confirm, isPending } = useConfirmPrices();
   const close = useCloseOffer();
   const save = useSavePrices(draft);
@@ -43,25 +46,34 @@ export function PricesWork({ items, suppliers, onSettings, children }: PricesWor
   const [isPanelOpen, setPanelOpen] = useState(false);
   const row = draft.rows.find(({ key }) => key === focusedKey);
   const problems = draftProblems(draft.rows);
-  const sendable = draft.rows.flatMap(({ key, body }) => (body ? [{ key, body }] : []));
   const togglePanel = useCallback(() => setPanelOpen((isOpen) => !isOpen), []);
+  const show = ({ row: { key }, column }: CellProblem) => grid.current?.focus({ key, column });
+  const addOffer = (part: ShownRow) => {
+    grid.current?.edit({ key: nextAddedKey(draft.draft), column: 'supplier' });
+    draft.addRow(part);
+  };
+  const submit = () => {
+    const sendable = draft.rows.flatMap((one) => (one.body ? [{ row: one, body: one.body }] : []));
+    if (problems.length > 0) show(problems[0]);
+    else if (sendable.length > 0 && !save.isPending) save.mutate(sendable);
+  };
   return (
     <div className={styles.work}>
-      <div className={styles.tools}>
-        <PricesTools
-          row={row}
-          mayEdit={mayEdit}
-          isPanelOpen={isPanelOpen}
-          onNewOffer={draft.addRow}
-          onCloseOffer={({ offer }) => offer && close.mutate(offer)}
-          onPanel={togglePanel}
-          onColumn={addColumn}
-          onSettings={onSettings}
-        />
-        {mayEdit && (
-          <ConfirmButton rows={draft.rows} selected={selected} isPending={isPending} onConfirm={confirm} />
-        )}
-      </div>
+      <PricesTools
+        row={row}
+        rows={draft.rows}
+        selected={selected}
+        list={list}
+        mayEdit={mayEdit}
+        isPanelOpen={isPanelOpen}
+        isConfirming={isPending}
+        onNewOffer={addOffer}
+        onCloseOffer={({ offer }) => offer && close.mutate(offer)}
+        onPanel={togglePanel}
+        onColumn={addColumn}
+        onSettings={onSettings}
+        onConfirm={confirm}
+      />
       {draft.rows.length === 0 ? (
         children
       ) : (
@@ -69,8 +81,13 @@ export function PricesWork({ items, suppliers, onSettings, children }: PricesWor
           ref={grid}
           draft={draft}
           quantities={quantities}
-          suppliers={suppliers}
+          suppliers={list.suppliers}
           mayEdit={mayEdit}
+          sort={sort}
+          onSort={onSort}
+          onEnd={list.loadMore}
+          onPaste={paste}
+          onSave={submit}
           onConfirm={confirm}
           onSelect={setSelected}
           onFocus={setFocusedKey}
@@ -81,9 +98,10 @@ export function PricesWork({ items, suppliers, onSettings, children }: PricesWor
         <SaveBar
           draft={draft}
           problems={problems}
+          isPasting={isPasting}
           isSaving={save.isPending}
-          onSave={() => save.mutate(sendable)}
-          onShow={(problem) => grid.current?.focus({ key: problem.row.key, column: problem.column })}
+          onSave={submit}
+          onShow={show}
         />
       )}
       <LeaveQuestion blocker={guard.blocker} />

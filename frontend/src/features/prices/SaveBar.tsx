@@ -1,5 +1,5 @@
 import { Button } from 'antd';
-import { MOST_SAVED } from '../../api/prices';
+import { MOST_OFFERS_SAVED } from '@roothertz/common/prices';
 import { DraftProblems } from './DraftProblems';
 import type { CellProblem } from './draftProblems';
 import styles from './SaveBar.module.css';
@@ -8,34 +8,26 @@ import type { PriceDraft } from './usePriceDraft';
 interface SaveBarProps {
   draft: PriceDraft;
   problems: readonly CellProblem[];
+  isPasting: boolean;
   isSaving: boolean;
   onSave: () => void;
   onShow: (problem: CellProblem) => void;
 }
 
 /** What isn't saved yet, what stands in its way, and how to save, undo or give it up. */
-export function SaveBar({ draft, problems, isSaving, onSave, onShow }: SaveBarProps) {
+export function SaveBar({ draft, problems, isPasting, isSaving, onSave, onShow }: SaveBarProps) {
   const { changed, canUndo, canRedo, undo, redo, discard } = draft;
-  const cells = changed.reduce(
-    (
-      sum,
-      [
-        ,
-        {
-          cells: { size },
-        },
-      ],
-    ) => sum + size,
-    0,
-  );
-  const isTooMany = changed.length > MOST_SAVED;
+  const cells = changed.reduce((sum, [, change]) => sum + change.cells.size, 0);
+  const isTooMany = changed.length > MOST_OFFERS_SAVED;
   return (
     <div className={styles.bar}>
       <div className={styles.words} role="status">
-        {problems.length > 0 ? (
+        {isPasting ? (
+          'Loading the rows that are pasted into …'
+        ) : problems.length > 0 ? (
           <DraftProblems draft={draft} problems={problems} onShow={onShow} />
         ) : isTooMany ? (
-          `${changed.length} offers are changed: at most ${MOST_SAVED} can be saved at once.`
+          `${changed.length} offers are changed: at most ${MOST_OFFERS_SAVED} can be saved at once.`
         ) : cells > 0 ? (
           `${plural(cells, 'change')} in ${plural(changed.length, 'offer')}, not saved yet.`
         ) : (
@@ -66,8 +58,8 @@ export function SaveBar({ draft, problems, isSaving, onSave, onShow }: SaveBarPr
 function Hint() {
   return (
     <span className={styles.hint}>
-      Type or press Enter to edit a cell, Tab to go on; paste cells from a spreadsheet with Ctrl+V; undo with
-      Ctrl+Z.
+      Type or press Enter to edit a cell, Tab for the next; paste from a spreadsheet with Ctrl+V, undo with
+      Ctrl+Z, save with Ctrl+S.
     </span>
   );
 }

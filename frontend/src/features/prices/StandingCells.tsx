@@ -44,7 +44,7 @@ export function StateCell(params: Params) {
 }
 
 function StateWords({ row }: { row: ShownRow }) {
-  if (row.isOverrun) return <span className={styles.alarm}>changed by others</span>;
+  if (row.overrun) return <span className={styles.alarm}>{row.overrun} by others</span>;
   if (row.offer === null)
     return <span className={styles.quiet}>{isAdded(row.key) ? 'new' : STATE_LABELS.missing}</span>;
   const { states } = row.offer;

@@ -1,6 +1,7 @@
-import { readPrice } from '@roothertz/common/prices';
-import { quantityOf } from './draft/cells';
+import { plainNumber } from '@roothertz/common/prices';
+import { isCell } from './draft/cells';
 import type { CellEdit } from './draft/draft';
+import { isNumberOf } from './draft/readCell';
 import { type ShownRow, shownText } from './draft/shownRows';
 
 /** Why a cell stands in the way of saving. */
@@ -13,25 +14,24 @@ export interface CellProblem {
 /** Every cell that stands in the way of saving, in the order of the rows. */
 export function draftProblems(rows: readonly ShownRow[]): CellProblem[] {
   return rows.flatMap((row) => [
-    ...(row.isOverrun ? [{ row, column: 'part', message: overrunWords(row) }] : []),
+    ...(row.overrun ? [{ row, column: 'part', message: overrunWords(row) }] : []),
     ...[...row.errors].map(([column, message]) => ({ row, column, message })),
   ]);
 }
 
-function overrunWords({ offer, part }: ShownRow): string {
-  const who = offer?.openedBy?.name ?? 'Somebody else';
-  return `${who} has changed the offer for ${part.partNumber} meanwhile`;
+function overrunWords({ offer, part, overrun }: ShownRow): string {
+  const who = (overrun === 'closed' ? offer?.closedBy : offer?.openedBy)?.name ?? 'Somebody else';
+  return `${who} has ${overrun} the offer for ${part.partNumber} meanwhile`;
 }
 
-/** Refused prices that are numbers where the comma is the decimal mark, with a point in its place. */
-export function commasMended(problems: readonly CellProblem[]): CellEdit[] {
+/** Refused numbers with digits in groups or a decimal comma, written plainly as they read with a decimal mark. */
+export function numbersMended(problems: readonly CellProblem[], mark: '.' | ','): CellEdit[] {
   return problems.flatMap(({ row, column }): CellEdit[] => {
-    const quantity = quantityOf(column);
-    if (quantity === null) return [];
-    const cell = `price:${quantity}` as const;
-    const text = shownText(row, cell);
-    const reading = readPrice(text, ',');
-    return text.includes(',') && reading.ok ? [{ row, cell, text: text.replace(',', '.') }] : [];
+    if (!isCell(column)) return [];
+    const text = shownText(row, column);
+    const plain = plainNumber(text, mark);
+    if (plain === null || plain === text || (mark === ',' && !text.includes(','))) return [];
+    return isNumberOf(column, plain) ? [{ row, cell: column, text: plain }] : [];
   });
 }
 

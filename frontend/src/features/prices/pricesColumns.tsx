@@ -1,11 +1,12 @@
 import { CURRENCIES } from '@roothertz/common/prices';
 import type { ColDef } from 'ag-grid-community';
 import type { Supplier } from '../../api/prices';
-import { cellText, type CellKey, isEditable, priceCell, standingText } from './draft/cells';
+import { type CellKey, isEditable, priceCell, standingText } from './draft/cells';
 import { type ShownRow, shownText } from './draft/shownRows';
 import { ConfirmCell } from './ConfirmCell';
 import { EditedCell } from './EditedCell';
 import { ListEditor } from './ListEditor';
+import { sortKeyOf, sortOf } from './pricesView';
 import { ConfirmedCell, PartCell, StateCell } from './StandingCells';
 
 type Column = ColDef<ShownRow, string>;
@@ -15,6 +16,8 @@ interface ColumnsOptions {
   suppliers: readonly Supplier[];
   mayEdit: boolean;
   isNarrow: boolean;
+  /** A column as the server calls it, with a minus in front for descending order. */
+  sort: string | undefined;
   onConfirm: (rows: readonly ShownRow[]) => void;
 }
 
@@ -24,6 +27,7 @@ export function pricesColumns({
   suppliers,
   mayEdit,
   isNarrow,
+  sort,
   onConfirm,
 }: ColumnsOptions): Column[] {
   const editable = (cell: CellKey, headerName: string, width: number, more: Column = {}): Column => ({
@@ -31,13 +35,12 @@ export function pricesColumns({
     headerName,
     width,
     valueGetter: ({ data }) => data && shownText(data, cell),
-    comparator: byText(cell),
     editable: ({ data }) => mayEdit && data !== undefined && isEditable(data, cell),
     cellRenderer: EditedCell,
     ...more,
   });
   const numeric = (cell: CellKey, headerName: string, width: number) =>
-    editable(cell, headerName, width, { type: 'rightAligned', comparator: byNumber(cell) });
+    editable(cell, headerName, width, { type: 'rightAligned' });
   const listed = (options: readonly string[]): Column => ({
     cellEditor: ListEditor,
     cellEditorParams: { options },
@@ -49,7 +52,7 @@ export function pricesColumns({
     editable('currency', 'Currency', 78, listed(CURRENCIES)),
   ];
   const priced = quantities.map((quantity) => numeric(priceCell(quantity), `at ${quantity}`, 74));
-  return [
+  const columns = [
     standing('part', 'Part', isNarrow ? 132 : 204, PartCell, { pinned: 'left' }),
     ...(isNarrow ? [...priced, ...named] : [...named, ...priced]),
     numeric('minimumOrderQuantity', 'MOQ', 68),
@@ -62,13 +65,20 @@ export function pricesColumns({
     standing('usedIn', 'Used in conditions', 220, EditedCell),
     ...(mayEdit ? [confirmColumn(onConfirm, isNarrow)] : []),
   ];
+  return columns.map((column) => sortedColumn(column, sort));
+}
+
+/** The server sorts, for not all rows may be loaded; the grid keeps the order in which they come. */
+function sortedColumn(column: Column, sort: string | undefined): Column {
+  const id = column.colId!;
+  const sortable = sortKeyOf(id) !== undefined;
+  return { ...column, sortable, comparator: () => 0, sort: sortOf(id, sort) };
 }
 
 function confirmColumn(onConfirm: ColumnsOptions['onConfirm'], isNarrow: boolean): Column {
   return standing('confirm', 'Confirm', 102, ConfirmCell, {
     pinned: isNarrow ? undefined : 'right',
     cellRendererParams: { onConfirm },
-    sortable: false,
     resizable: false,
   });
 }
@@ -82,30 +92,4 @@ function standing(
 ): Column {
   const valueGetter: Column['valueGetter'] = ({ data }) => data && standingText(data, colId);
   return { colId, headerName, width, cellRenderer, valueGetter, ...more };
-}
-
-/** Rows are sorted by what is saved, so that they stay where they are while they are edited; empty cells come last. */
-function byText(cell: CellKey): Column['comparator'] {
-  return compared(
-    (row) => cellText(row, cell),
-    (a, b) => a.localeCompare(b, 'en'),
-  );
-}
-
-function byNumber(cell: CellKey): Column['comparator'] {
-  return compared(
-    (row) => cellText(row, cell),
-    (a, b) => Number(a) - Number(b),
-  );
-}
-
-function compared(
-  textOf: (row: ShownRow) => string,
-  compare: (a: string, b: string) => number,
-): Column['comparator'] {
-  return (_a, _b, one, other, descending) => {
-    const [a, b] = [one, other].map(({ data }) => (data ? textOf(data) : ''));
-    if (a === '' || b === '') return a === b ? 0 : (a === '' ? 1 : -1) * (descending ? -1 : 1);
-    return compare(a, b);
-  };
 }

@@ -1,5 +1,6 @@
 import { LIBRARIES, PART_KINDS } from '@roothertz/common/parts';
 import type { PriceQuery } from '../../api/prices';
+import { PLAIN_CELLS, quantityOf } from './draft/cells';
 
 /** What an offer can be looked for by: what calls for a look, and parts without one. */
 export const PRICE_STATES = ['stale', 'expiring', 'expired', 'missing'] as const;
@@ -13,7 +14,25 @@ export const STATE_LABELS: Record<PriceState, string> = {
 };
 
 /** What the grid shows, as the page's address holds it. */
-export type PricesView = Omit<PriceQuery, 'sort'> & { search: string };
+export type PricesView = PriceQuery & { search: string };
+
+/** What the server calls the columns that rows can be sorted by; those of prices are sorted by their own names. */
+const SORT_KEYS: Readonly<Record<string, string>> = {
+  part: 'partNumber',
+  confirmed: 'confirmedAt',
+  ...Object.fromEntries(PLAIN_CELLS.map((cell) => [cell, cell])),
+};
+
+/** What to sort by for a column; undefined = it can't be sorted. */
+export function sortKeyOf(column: string): string | undefined {
+  return quantityOf(column) === null ? SORT_KEYS[column] : column;
+}
+
+/** How the rows are sorted by a column. */
+export function sortOf(column: string, sort = ''): 'asc' | 'desc' | null {
+  if (sort.replace('-', '') !== sortKeyOf(column)) return null;
+  return sort.startsWith('-') ? 'desc' : 'asc';
+}
 
 export function readPricesView(address: URLSearchParams): PricesView {
   return {
@@ -23,6 +42,7 @@ export function readPricesView(address: URLSearchParams): PricesView {
     ...chosen('library', LIBRARIES, address),
     ...idOf('partId', address),
     ...idOf('supplierId', address),
+    ...sortIn(address),
     ...(address.get('usedInConditions') === 'true' && { usedInConditions: true }),
   };
 }
@@ -42,8 +62,15 @@ function idOf<Key extends string>(key: Key, address: URLSearchParams): Partial<R
   return /^\d{1,10}$/.test(id) ? ({ [key]: id } as Record<Key, string>) : {};
 }
 
-export function isNarrowed({ search, ...filters }: PricesView): boolean {
-  return search.trim() !== '' || Object.keys(filters).length > 0;
+function sortIn(address: URLSearchParams): Pick<PricesView, 'sort'> {
+  const sort = address.get('sort') ?? '';
+  const key = sort.replace(/^-/, '');
+  const isKnown = Object.values(SORT_KEYS).includes(key) || /^price:[1-9]\d{0,9}$/.test(key);
+  return isKnown ? { sort } : {};
+}
+
+export function isNarrowed(view: PricesView): boolean {
+  return view.search.trim() !== '' || NARROWING_KEYS.some((key) => key !== 'search' && key in view);
 }
 
 /** Everything in the address that hides rows. */

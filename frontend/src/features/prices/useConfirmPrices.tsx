@@ -1,7 +1,8 @@
+import { MOST_OFFERS_SAVED } from '@roothertz/common/prices';
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { App, Button } from 'antd';
 import { useCallback } from 'react';
-import { confirmOffers, MOST_SAVED, undoConfirmation } from '../../api/prices';
+import { confirmOffers, undoConfirmation } from '../../api/prices';
 import { detailOf } from '../../api/problem';
 import { isConfirmable } from './confirmable';
 import type { ShownRow } from './draft/shownRows';
@@ -39,7 +40,7 @@ export function useConfirmPrices() {
   const confirm = useCallback(
     (rows: readonly ShownRow[]) => {
       const ids = rows.filter(isConfirmable).map(({ offer }) => offer!.id);
-      if (ids.length > 0 && ids.length <= MOST_SAVED) mutate(ids);
+      if (ids.length > 0 && ids.length <= MOST_OFFERS_SAVED) mutate(ids);
     },
     [mutate],
   );

@@ -1,12 +1,13 @@
 import { dayOf } from '@roothertz/common/prices';
 import { useMemo, useReducer } from 'react';
-import type { PriceListRow, Supplier } from '../../api/prices';
+import type { PriceListRow } from '../../api/prices';
 import { type GridRow, toGridRow } from './draft/cells';
 import {
   type CellEdit,
   changedRows,
   type Draft,
   EMPTY_DRAFT,
+  type Overrun,
   rebased,
   type Refusal,
   withAddedRow,
@@ -17,22 +18,20 @@ import {
 } from './draft/draft';
 import { NO_HISTORY, stepHistory } from './draft/history';
 import { type PasteTarget, pasteRectangle } from './draft/pasteRectangle';
+import type { ReadContext } from './draft/readRow';
 import { plainRow, shownRows } from './draft/shownRows';
-
-const NO_ROWS: readonly PriceListRow[] = [];
-const NO_SUPPLIERS: readonly Supplier[] = [];
 
 /** The rows of the grid with what isn't saved of them yet, each step of which can be undone. */
 export function usePriceDraft(
-  items: readonly PriceListRow[] = NO_ROWS,
-  suppliers: readonly Supplier[] = NO_SUPPLIERS,
+  items: readonly PriceListRow[],
+  { suppliers, currency }: Omit<ReadContext, 'today'>,
 ) {
   const [history, step] = useReducer(stepHistory, NO_HISTORY);
   const { present, past, future } = history;
   const listed = useMemo(() => items.map((item) => plainRow(toGridRow(item))), [items]);
   const rows = useMemo(
-    () => shownRows(listed, present, { suppliers, today: dayOf(new Date()) }),
-    [listed, present, suppliers],
+    () => shownRows(listed, present, { suppliers, currency, today: dayOf(new Date()) }),
+    [listed, present, suppliers, currency],
   );
   const acts = useMemo(() => {
     const change = (to: (draft: Draft) => Draft) => step({ type: 'change', to });
@@ -47,8 +46,11 @@ export function usePriceDraft(
       discard: () => change(() => EMPTY_DRAFT),
       undo: () => step({ type: 'undo' }),
       redo: () => step({ type: 'redo' }),
-      refuse: (refusals: readonly Refusal[]) =>
-        step({ type: 'note', to: (draft) => withRefusals(withoutRefusals(draft, 'server'), refusals) }),
+      refuse: (refusals: readonly Refusal[], overruns: ReadonlyMap<string, Overrun>) =>
+        step({
+          type: 'note',
+          to: (draft) => ({ ...withRefusals(withoutRefusals(draft, 'server'), refusals), overruns }),
+        }),
       saved: () => step({ type: 'saved' }),
     };
   }, []);

@@ -1,7 +1,7 @@
 import type { RankingRequest } from '@roothertz/common/conditions';
 import { useMemo } from 'react';
 import { rankingQuery, type RankingPage } from '../../api/ranking';
-import { useKeptPages } from './useKeptPages';
+import { useKeptPages } from '../../components/useKeptPages';
 
 /** A ranking that is shown, as far as it is loaded. */
 export interface Shown<Request, Page extends { items: readonly unknown[]; request: Request }> {

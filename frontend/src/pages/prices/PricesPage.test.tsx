@@ -10,6 +10,7 @@ import { renderApp } from '../../test/renderApp';
 /** A computed style goes through the rules of grid and controls each time, which takes seconds; none matters here. */
 window.getComputedStyle = (element) => (element as HTMLElement).style;
 
+const AT = '2026-11-30T10:00:00.000Z';
 const COUNTS = { offers: 2, stale: 1, expiring: 0, expired: 0, missing: 5, usedInConditions: 1 };
 
 async function open(role: Role, answers: Parameters<typeof fakeServer>[0] = {}, address = '/prices') {
@@ -18,7 +19,8 @@ async function open(role: Role, answers: Parameters<typeof fakeServer>[0] = {}, 
     'GET /api/prices': () => json({ items: [priceRow({}, ['River geophone']), otherRow()], total: 2 }),
     'GET /api/prices/counts': () => json(COUNTS),
     'GET /api/prices/settings': () => json({ currency: 'EUR', staleAfterDays: 90 }),
-    'GET /api/suppliers': () => json({ items: [{ id: '3', name: 'Brook & Weir' }], total: 1 }),
+    'GET /api/suppliers': () =>
+      json({ items: [{ id: '3', name: 'Brook & Weir', currency: 'GBP' }], total: 1 }),
     ...answers,
   });
   const router = renderApp(address);
@@ -79,9 +81,17 @@ describe('the prices page', () => {
 
   it('loses nothing where somebody else was quicker, and lets mine or theirs be taken', async () => {
     let isChanged = false;
-    const theirs = { id: '20', version: 3, openedBy: { id: '9', name: 'Tobias Fenn' } };
+    const theirs = {
+      id: '20',
+      version: 3,
+      stock: 5,
+      openedAt: AT,
+      openedBy: { id: '9', name: 'Tobias Fenn' },
+    };
     const { bodies } = await open('purchasing', {
       'GET /api/prices': () => json({ items: [priceRow(isChanged ? theirs : {}), otherRow()], total: 2 }),
+      'GET /api/parts/41/offers': () =>
+        json({ current: [offerOf(theirs)], history: [offerOf({ closedAt: AT })] }),
       'PUT /api/prices': (body) => {
         if (isChanged) return json({ items: [offerOf({ id: '21' })], total: 1 });
         isChanged = true;
@@ -96,10 +106,47 @@ describe('the prices page', () => {
       await screen.findByText(/Tobias Fenn has changed the offer for VR-1108 meanwhile/),
     ).toBeInTheDocument();
     expect(await cell(0, 'stock')).toHaveTextContent('8, not saved yet');
+    const table = screen.getByRole('table', { name: 'Theirs and yours for VR-1108' });
+    expect(within(table).getByRole('row', { name: 'stock none 5 8' })).toBeInTheDocument();
     await userEvent.click(screen.getByRole('button', { name: 'Keep mine' }));
     await userEvent.click(save());
     await waitFor(() => expect(bodies('PUT /api/prices')).toHaveLength(2));
     expect(bodies('PUT /api/prices')[1]).toEqual({ rows: [{ id: '20', version: 3, stock: 8 }] });
+  });
+
+  it('begins a new offer in its supplier’s cell, in the currency of the supplier’s latest offer', async () => {
+    const { bodies } = await open('purchasing', {
+      'PUT /api/prices': () => json({ items: [offerOf({ id: '21' })], total: 1 }),
+    });
+    await userEvent.click(await cell(1, 'price:1'));
+    await userEvent.click(screen.getByRole('button', { name: 'New offer for LQ-12' }));
+    await waitFor(async () => expect(within(await cell(0, 'supplier')).getByRole('combobox')).toHaveFocus());
+    await userEvent.keyboard('Brook & Weir{Enter}');
+    expect(await cell(0, 'currency')).toHaveTextContent(/^GBP$/);
+    await paste(0, 'supplierNumber', 'BW-9');
+    await paste(0, 'price:1', '2.5');
+    fireEvent.keyDown(await cell(0, 'price:1'), { key: 's', ctrlKey: true });
+    await waitFor(() => expect(bodies('PUT /api/prices')).toHaveLength(1));
+    expect(bodies('PUT /api/prices')[0]).toMatchObject({
+      rows: [{ partId: '42', supplierId: '3', supplierNumber: 'BW-9', currency: 'GBP' }],
+    });
+  });
+
+  it('loads the rows that a longer rectangle covers, and pastes into them', async () => {
+    const last = (n: number) => priceRow({ id: `${n}`, supplierNumber: `N-${n}` });
+    const { asked } = await open('purchasing', {
+      'GET /api/prices': (_body, { searchParams }) =>
+        json({ items: searchParams.get('offset') === '0' ? [priceRow(), otherRow()] : [last(13)], total: 3 }),
+    });
+    await paste(1, 'stock', '7\n8\n9');
+    await waitFor(async () =>
+      expect(await cell(2, 'stock')).toHaveTextContent(/^8, refused: .* 1 row longer/),
+    );
+    expect(await cell(1, 'stock')).toHaveTextContent('7, not saved yet');
+    const offsets = asked
+      .filter(({ route }) => route === 'GET /api/prices')
+      .map(({ url }) => url.searchParams.get('offset'));
+    expect(new Set(offsets)).toEqual(new Set(['0', '2']));
   });
 
   it('asks before it is left with unsaved changes', async () => {
@@ -134,8 +181,8 @@ describe('the prices page', () => {
     await userEvent.type(screen.getByLabelText('1 CHF ='), '1,07');
     expect(screen.getByText(/another decimal mark can be misread/)).toBeInTheDocument();
     expect(screen.getByRole('button', { name: 'Save the rates' })).toBeDisabled();
-    await userEvent.clear(screen.getByLabelText('1 CHF ='));
-    await userEvent.type(screen.getByLabelText('1 CHF ='), '1.07');
+    await userEvent.click(screen.getByRole('button', { name: 'Take it as 1.07' }));
+    expect(screen.getByLabelText('1 CHF =')).toHaveValue('1.07');
     await userEvent.click(screen.getByRole('button', { name: 'Save the rates' }));
     await waitFor(() =>
       expect(bodies('PUT /api/prices/rates')).toEqual([{ rates: [{ currency: 'CHF', rate: '1.07' }] }]),

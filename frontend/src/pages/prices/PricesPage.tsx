@@ -1,6 +1,5 @@
 import { Button, Skeleton } from 'antd';
 import { useState } from 'react';
-import { MOST_LISTED } from '../../api/prices';
 import { detailOf } from '../../api/problem';
 import { NoPrices } from '../../features/prices/NoPrices';
 import { PricesFacts } from '../../features/prices/PricesFacts';
@@ -17,7 +16,7 @@ const EVERYTHING = Object.fromEntries(NARROWING_KEYS.map((key) => [key, undefine
 /** What the team pays for its parts, kept true by purchasing and seen by everybody. */
 export function PricesPage() {
   const { view, change } = usePricesView();
-  const { items, total, suppliers, isPending, error, retry } = usePriceList(view);
+  const { list, error, retry } = usePriceList(view);
   const [areSettingsOpen, setSettingsOpen] = useState(false);
   return (
     <div className={styles.page}>
@@ -27,32 +26,33 @@ export function PricesPage() {
         <PricesFacts view={view} change={change} />
       </div>
       <div>
-        <PricesFilters view={view} change={change} suppliers={suppliers} />
+        <PricesFilters view={view} change={change} suppliers={list?.suppliers ?? []} />
         {view.partId !== undefined && (
           <p className={styles.note}>
             Only one part is shown. <Button onClick={() => change(EVERYTHING)}>Show all offers</Button>
           </p>
         )}
-        {total > MOST_LISTED && (
-          <p className={styles.note}>
-            The first {MOST_LISTED} of {total} rows are shown: search or narrow for the others.
+        {error && (
+          <p role="alert" className={styles.note}>
+            {detailOf(error)} <Button onClick={retry}>Try again</Button>
           </p>
         )}
       </div>
-      {error ? (
-        <p role="alert">
-          {detailOf(error)} <Button onClick={retry}>Try again</Button>
-        </p>
-      ) : isPending || !items ? (
-        <Skeleton title={false} paragraph={{ rows: 12, width: '100%' }} />
-      ) : (
-        <PricesWork items={items} suppliers={suppliers} onSettings={() => setSettingsOpen(true)}>
+      {list ? (
+        <PricesWork
+          list={list}
+          sort={view.sort}
+          onSort={(sort) => change({ sort })}
+          onSettings={() => setSettingsOpen(true)}
+        >
           <NoPrices
             isNarrowed={isNarrowed(view)}
             onShowAll={() => change(EVERYTHING)}
             onShowMissing={() => change({ state: 'missing', library: 'team' })}
           />
         </PricesWork>
+      ) : error ? null : (
+        <Skeleton title={false} paragraph={{ rows: 12, width: '100%' }} />
       )}
       <PriceSettingsDrawer isOpen={areSettingsOpen} onClose={() => setSettingsOpen(false)} />
     </div>

@@ -1,3 +1,4 @@
+import { shortPrice } from '@roothertz/common/prices';
 import type { Offer, OfferedPart, PriceListRow } from '../../../api/prices';
 
 /** A cell that can be edited; those of unit prices are named by their quantity. */
@@ -33,6 +34,33 @@ export const PLAIN_CELLS = [
   'validFrom',
   'validUntil',
 ] as const satisfies readonly CellKey[];
+
+const LABELS: Record<(typeof PLAIN_CELLS)[number], string> = {
+  supplier: 'supplier',
+  supplierNumber: 'supplier’s number',
+  currency: 'currency',
+  minimumOrderQuantity: 'MOQ',
+  orderMultiple: 'multiple',
+  leadTimeDays: 'lead time in days',
+  stock: 'stock',
+  validFrom: 'valid from',
+  validUntil: 'valid until',
+};
+
+/** What a cell is called in a sentence. */
+export function cellLabel(cell: CellKey): string {
+  const quantity = quantityOf(cell);
+  return quantity === null ? LABELS[cell as keyof typeof LABELS] : `at ${quantity}`;
+}
+
+/** The cells in which rows can differ: prices in ascending order of quantity, then the others. */
+export function comparedCells(rows: readonly GridRow[], more: Iterable<CellKey> = []): CellKey[] {
+  const offered = rows.flatMap(
+    ({ offer }) => offer?.breaks.map(({ minimumQuantity }) => minimumQuantity) ?? [],
+  );
+  const quantities = new Set([...offered, ...[...more].flatMap((cell) => quantityOf(cell) ?? [])]);
+  return [...[...quantities].sort((a, b) => a - b).map(priceCell), ...PLAIN_CELLS];
+}
 
 export function priceCell(quantity: number): CellKey {
   return `price:${quantity}`;
@@ -73,11 +101,6 @@ export function cellText({ offer }: GridRow, cell: CellKey): string {
   }
   if (cell === 'supplier') return offer.supplier.name;
   return String(offer[cell as keyof Offer] ?? '');
-}
-
-/** A unit price without the zeros that say nothing: `4.6900` is `4.69`, `0.0125` stays. */
-function shortPrice(unitPrice: string): string {
-  return unitPrice.replace(/(\.\d\d)(\d*?)0*$/, '$1$2');
 }
 
 /** What a column that can't be edited says of a row. */

@@ -6,12 +6,17 @@ import { readClipboard } from './clipboard';
 import { type Draft, EMPTY_DRAFT, rebased, withAddedRow, withEdits } from './draft';
 import { NO_HISTORY, stepHistory } from './history';
 import { pasteRectangle } from './pasteRectangle';
-import { plainRow, shownRows } from './shownRows';
+import { differences, overrunOf } from './overruns';
+import { plainRow, shownRows, shownText } from './shownRows';
 import { savedRefusals } from './savedRefusals';
 
 const [first, second, without] = [priceRow(), otherRow(), rowWithout()].map(toGridRow);
 const COLUMNS = ['supplier', 'supplierNumber', 'currency', 'price:1', 'price:10', 'price:100', 'state'];
-const context = { suppliers: [{ id: '3', name: 'Brook & Weir' }], today: '2026-12-01' };
+const context = {
+  suppliers: [{ id: '3', name: 'Brook & Weir', currency: 'GBP' }],
+  currency: 'EUR',
+  today: '2026-12-01',
+};
 
 const edit = (cell: CellKey, text: string, row = first, draft: Draft = EMPTY_DRAFT) =>
   withEdits(draft, [{ row, cell, text }]);
@@ -53,7 +58,7 @@ describe('an edited cell', () => {
     ['price:1', '1,234.56', /write it as 1234\.56/],
     ['price:1', '4.20 USD', /one currency for all its prices/],
     ['price:1', '€4.20', /one currency for all its prices/],
-    ['price:10', '9.99', /not more than the 4\.2000 of the break before/],
+    ['price:10', '9.99', /not more than the 4\.20 of the break before/],
     ['currency', 'EURO', /ISO 4217/],
     ['minimumOrderQuantity', '1,000', /without groups/],
     ['stock', '-3', /stock/],
@@ -70,7 +75,7 @@ describe('an edited cell', () => {
 describe('a part without a price', () => {
   it('gets an offer that is sent whole, and says what it lacks', () => {
     const begun = edit('price:1', '2', without);
-    expect(errorsOf(begun).map(([, column]) => column)).toEqual(['supplier', 'currency']);
+    expect(errorsOf(begun).map(([, column]) => column)).toEqual(['supplier']);
     const named = edit('supplier', 'brook & WEIR', without, begun);
     expect(bodies(edit('currency', 'USD', without, named))).toEqual([
       expect.objectContaining({
@@ -83,6 +88,15 @@ describe('a part without a price', () => {
         validUntil: null,
       }),
     ]);
+  });
+
+  it('is in the currency of the supplier’s latest offer, or the team’s, until another is typed', () => {
+    const currency = (draft: Draft) => shownText(shown(draft)[2], 'currency');
+    const begun = edit('price:1', '2', without);
+    expect([currency(EMPTY_DRAFT), currency(begun)]).toEqual(['', 'EUR']);
+    const named = edit('supplier', 'Brook & Weir', without, begun);
+    expect([currency(named), bodies(named)[0].currency]).toEqual(['GBP', 'GBP']);
+    expect(currency(edit('currency', 'USD', without, named))).toBe('USD');
   });
 
   it('or another one in a row of its own', () => {
@@ -164,20 +178,55 @@ describe('an offer that somebody else has changed', () => {
   it('is shown as such with what was typed, and taken as the new ground where mine is kept', () => {
     const draft = edit('stock', '9');
     const [row] = shownRows([plainRow(theirs)], draft, context);
-    expect([row.isOverrun, row.offer?.leadTimeDays, row.change?.cells.get('stock')]).toEqual([true, 7, '9']);
+    expect([row.overrun, row.offer?.leadTimeDays, row.change?.cells.get('stock')]).toEqual([
+      'changed',
+      7,
+      '9',
+    ]);
+    expect(differences(row, row.change!)).toEqual([
+      { cell: 'leadTimeDays', was: '42', theirs: '7', mine: '42' },
+      { cell: 'stock', was: '', theirs: '', mine: '9' },
+    ]);
     const [mine] = shownRows([plainRow(theirs)], rebased(draft, theirs), context);
-    expect([mine.isOverrun, mine.body]).toEqual([false, { id: '20', version: 3, stock: 9 }]);
+    expect([mine.overrun, mine.body]).toEqual([null, { id: '20', version: 3, stock: 9 }]);
   });
 
   it('stays in sight while the list no longer holds it', () => {
     expect(shownRows([], edit('stock', '9'), context)).toHaveLength(1);
   });
+
+  it('is followed to what it has become', () => {
+    const at = '2026-11-30T10:00:00.000Z';
+    const before = offerOf({ closedAt: at });
+    const after = offerOf({ id: '20', version: 3, openedAt: at });
+    const other = offerOf({ id: '21', version: 3, openedAt: at, supplier: { id: '4', name: 'Tidewrack' } });
+    const found = overrunOf('11', { current: [other, after], history: [before] });
+    expect(found).toEqual({ offer: after, isClosed: false });
+    expect(overrunOf('20', { current: [after], history: [before] })).toBeNull();
+    expect(overrunOf('11', { current: [], history: [before] })).toEqual({ offer: before, isClosed: true });
+  });
+
+  it('can be opened again with what was typed where it was closed', () => {
+    const closed = offerOf({
+      closedAt: '2026-11-30T10:00:00.000Z',
+      closedBy: { id: '9', name: 'Tobias Fenn' },
+    });
+    const overruns = new Map([[first.key, { offer: closed, isClosed: true }]]);
+    const draft = { ...edit('stock', '9'), overruns };
+    const [row] = shown(draft);
+    expect([row.overrun, row.offer?.closedBy?.name]).toEqual(['closed', 'Tobias Fenn']);
+    const again = rebased(draft, row);
+    expect(again.overruns.size).toBe(0);
+    expect(bodies(again)).toMatchObject([
+      { partId: '41', supplierId: '3', supplierNumber: 'BW-1', currency: 'EUR', stock: 9, breaks: [{}, {}] },
+    ]);
+  });
 });
 
 it('puts what the server refuses at the cells that it is about', () => {
   const sent = [
-    { key: 'one', body: { id: '1', version: 1, stock: 2 } },
-    { key: 'two', body: { id: '2', version: 1, breaks: offerOf().breaks } },
+    { row: first, body: { id: '11', version: 1, stock: 2 } },
+    { row: second, body: { id: '12', version: 1, breaks: offerOf().breaks } },
   ];
   const errors = ['rows[1].breaks[1].unitPrice', 'rows[0].version', 'rows[0].stock', 'rows'].map((field) => ({
     field,
@@ -189,8 +238,8 @@ it('puts what the server refuses at the cells that it is about', () => {
       column,
     ]),
   ).toEqual([
-    ['two', 'price:100'],
-    ['one', 'part'],
-    ['one', 'stock'],
+    [second.key, 'price:100'],
+    [first.key, 'part'],
+    [first.key, 'stock'],
   ]);
 });

@@ -1,4 +1,13 @@
-import { cellText, type CellKey, type GridRow, isEditable, quantityOf } from './cells';
+import type { Offer } from '../../../api/prices';
+import {
+  cellText,
+  type CellKey,
+  type GridRow,
+  isEditable,
+  PLAIN_CELLS,
+  priceCell,
+  quantityOf,
+} from './cells';
 import { sameValue } from './readCell';
 
 /** What is changed of a row, as it was typed or pasted. */
@@ -16,13 +25,22 @@ export interface Refusal {
   from: 'paste' | 'server';
 }
 
+/** What somebody else has made of an offer since its change was begun. */
+export interface Overrun {
+  /** As it stands now, or stood at last. */
+  offer: Offer;
+  isClosed: boolean;
+}
+
 /** Everything that isn't saved yet. */
 export interface Draft {
   changes: ReadonlyMap<string, Change>;
   refusals: readonly Refusal[];
+  /** What a refused save has told, by row. */
+  overruns: ReadonlyMap<string, Overrun>;
 }
 
-export const EMPTY_DRAFT: Draft = { changes: new Map(), refusals: [] };
+export const EMPTY_DRAFT: Draft = { changes: new Map(), refusals: [], overruns: new Map() };
 
 const NO_CELLS: Change['cells'] = new Map();
 
@@ -51,14 +69,22 @@ export function withEdits(draft: Draft, edits: readonly CellEdit[]): Draft {
     touched.add(`${row.key} ${cell}`);
   }
   const refusals = draft.refusals.filter(({ key, column }) => !touched.has(`${key} ${column}`));
-  return { changes, refusals };
+  return { ...draft, changes, refusals };
 }
 
 /** Adds a row for another offer for a part. */
-export function withAddedRow(draft: Draft, { part, usedIn }: GridRow): Draft {
-  const number = Math.max(0, ...[...draft.changes.keys()].map((key) => Number(addedNumber(key)))) + 1;
-  const base: GridRow = { key: `${ADDED}${number}`, part, usedIn, offer: null };
-  return { ...draft, changes: new Map([[base.key, { base, cells: NO_CELLS }], ...draft.changes]) };
+export function withAddedRow(
+  draft: Draft,
+  { part, usedIn }: GridRow,
+  cells: Change['cells'] = NO_CELLS,
+): Draft {
+  const base: GridRow = { key: nextAddedKey(draft), part, usedIn, offer: null };
+  return { ...draft, changes: new Map([[base.key, { base, cells }], ...draft.changes]) };
+}
+
+/** The key of the row that is added next. */
+export function nextAddedKey({ changes }: Draft): string {
+  return `${ADDED}${Math.max(0, ...[...changes.keys()].map((key) => Number(addedNumber(key)))) + 1}`;
 }
 
 const ADDED = 'added ';
@@ -75,15 +101,29 @@ function addedNumber(key: string): string {
 export function withoutRow(draft: Draft, key: string): Draft {
   const changes = new Map(draft.changes);
   changes.delete(key);
-  return { changes, refusals: draft.refusals.filter((refusal) => refusal.key !== key) };
+  const overruns = new Map(draft.overruns);
+  overruns.delete(key);
+  return { changes, overruns, refusals: draft.refusals.filter((refusal) => refusal.key !== key) };
 }
 
-/** Keeps the changes of a row on top of what somebody else has made of it. */
+/**
+ * Keeps the changes of a row on top of what somebody else has made of it; an offer that was closed is to be opened
+ * again with them.
+ */
 export function rebased(draft: Draft, current: GridRow): Draft {
   const change = draft.changes.get(current.key);
   if (change === undefined) return draft;
+  if (draft.overruns.get(current.key)?.isClosed)
+    return withAddedRow(withoutRow(draft, current.key), current, allCells(current, change));
   const edits = [...change.cells].map(([cell, text]) => ({ row: current, cell, text }));
   return withEdits(withoutRow(draft, current.key), edits);
+}
+
+/** Every cell of an offer as its change shows it. */
+function allCells(row: GridRow, change: Change): Change['cells'] {
+  const offered = row.offer?.breaks.map(({ minimumQuantity }) => priceCell(minimumQuantity)) ?? [];
+  const keys = new Set([...PLAIN_CELLS, ...offered, ...change.cells.keys()]);
+  return new Map([...keys].map((cell) => [cell, draftText(row, change, cell)]));
 }
 
 export function withRefusals(draft: Draft, refusals: readonly Refusal[]): Draft {

@@ -24,6 +24,12 @@ export function readSupplierNumber(input: string): Reading<string> {
   return readText(SUPPLIER_NUMBER, input);
 }
 
+/** Whether a text is a number that a cell can take. */
+export function isNumberOf(cell: CellKey, text: string): boolean {
+  const isNumeric = quantityOf(cell) !== null || cell in OFFER_FIELDS;
+  return isNumeric && readingOf(cell, text)!.ok;
+}
+
 type CountCell = keyof typeof OFFER_FIELDS & CellKey;
 
 /** Whether two texts of a cell mean the same. */

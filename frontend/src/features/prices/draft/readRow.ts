@@ -13,13 +13,16 @@ export interface RowReading {
 
 export interface ReadContext {
   suppliers: readonly Supplier[];
+  /** The team's own. */
+  currency: string;
   today: string;
 }
 
 type Terms = Required<Omit<SavedPriceRow, 'id' | 'version' | 'partId'>>;
 
 /** Reads a changed row by the same rules as the server: each cell by itself, then the offer as a whole. */
-export function readRow({ base, cells }: Change, { suppliers, today }: ReadContext): RowReading {
+export function readRow({ base, cells }: Change, context: ReadContext): RowReading {
+  const { suppliers, today } = context;
   const errors = new Map<string, string>();
   const text = (cell: CellKey) => draftText(base, { base, cells }, cell);
   const take = <Value>(cell: CellKey, reading: Reading<Value>, instead: Value): Value => {
@@ -39,7 +42,11 @@ export function readRow({ base, cells }: Change, { suppliers, today }: ReadConte
   const terms: Terms = {
     supplierId: take('supplier', readSupplier(base, text('supplier'), suppliers), ''),
     supplierNumber: take('supplierNumber', readSupplierNumber(text('supplierNumber')), ''),
-    currency: take('currency', readCurrency(text('currency')), 'EUR'),
+    currency: take(
+      'currency',
+      readCurrency(text('currency') || usualCurrency(text('supplier'), context)),
+      'EUR',
+    ),
     breaks,
     minimumOrderQuantity: count('minimumOrderQuantity', 1),
     orderMultiple: count('orderMultiple', 1),
@@ -66,10 +73,19 @@ function pricedCells(base: GridRow, cells: Change['cells']): number[] {
 function readSupplier({ offer }: GridRow, name: string, suppliers: readonly Supplier[]): Reading<string> {
   if (offer !== null) return { ok: true, value: offer.supplier.id };
   if (name === '') return { ok: false, message: 'supplier: a name was expected' };
-  const found = suppliers.find((supplier) => supplier.name.toLowerCase() === name.toLowerCase());
+  const found = supplierNamed(name, suppliers);
   return found
     ? { ok: true, value: found.id }
     : { ok: false, message: `supplier: the team has none called “${name}” yet` };
+}
+
+function supplierNamed(name: string, suppliers: readonly Supplier[]): Supplier | undefined {
+  return suppliers.find((supplier) => supplier.name.toLowerCase() === name.toLowerCase());
+}
+
+/** What a new offer is in where nothing else is said: the currency of the supplier's latest one, or the team's. */
+export function usualCurrency(supplier: string, { suppliers, currency }: ReadContext): string {
+  return supplierNamed(supplier, suppliers)?.currency ?? currency;
 }
 
 /** The cell that an error of the offer as a whole belongs to; one about all prices belongs to the first. */

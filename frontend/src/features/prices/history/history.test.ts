@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { offerOf } from '../../../test/prices';
+import { labelOffsets } from './labelOffsets';
 import { offerEvents } from './offerEvents';
 import { priceLines } from './priceSteps';
 
@@ -19,6 +20,7 @@ const other = offerOf({
   supplier: { id: '4', name: 'Tidewrack' },
   openedAt: SPRING,
   closedAt: AUTUMN,
+  closedBy: { id: '8', name: 'Tobias Fenn' },
 });
 
 describe('the history of a part’s prices', () => {
@@ -27,10 +29,10 @@ describe('the history of a part’s prices', () => {
     expect(events.map(({ at, supplier, changes }) => [at, supplier, changes])).toEqual([
       [AUTUMN, 'Tidewrack', ['closed']],
       [AUTUMN, 'Brook & Weir', ['at 100: 3.10 → 3.45 EUR', 'lead time in days: 30 → 42']],
-      [SPRING, 'Tidewrack', ['new: 4.2 EUR at 1, 3.1 EUR at 100']],
-      [SPRING, 'Brook & Weir', ['new: 4.2 EUR at 1, 3.1 EUR at 100']],
+      [SPRING, 'Tidewrack', ['new: 4.20 EUR at 1, 3.10 EUR at 100']],
+      [SPRING, 'Brook & Weir', ['new: 4.20 EUR at 1, 3.10 EUR at 100']],
     ]);
-    expect(events[1].who).toBe('Amara Lindqvist');
+    expect(events.slice(0, 2).map(({ who }) => who)).toEqual(['Tobias Fenn', 'Amara Lindqvist']);
   });
 
   it('is a line for each supplier that ends where nothing follows', () => {
@@ -66,5 +68,11 @@ describe('the history of a part’s prices', () => {
         ],
       },
     ]);
+  });
+
+  it('names its lines beside each other’s names, not over them', () => {
+    expect(labelOffsets([5], 140)).toEqual([0]);
+    expect(labelOffsets([4, 4, 4], 140)).toEqual([0, 15, 30]);
+    expect(labelOffsets([1, 9, 8.9], 140)).toEqual([0, 0, expect.closeTo(13.95)]);
   });
 });

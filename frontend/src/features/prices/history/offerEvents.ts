@@ -1,5 +1,7 @@
 import type { Offer, PartOffers } from '../../../api/prices';
-import { cellText, type CellKey, PLAIN_CELLS, priceCell } from '../draft/cells';
+import { shortPrice } from '@roothertz/common/prices';
+import { cellLabel, cellText, comparedCells, quantityOf } from '../draft/cells';
+import { isFollowedBy } from '../draft/overruns';
 
 /** What happened to an offer on a day. */
 export interface OfferEvent {
@@ -10,18 +12,6 @@ export interface OfferEvent {
   /** Each in words, such as "at 100: 4.69 → 4.83 EUR". */
   changes: readonly string[];
 }
-
-const LABELS: Record<(typeof PLAIN_CELLS)[number], string> = {
-  supplier: 'supplier',
-  supplierNumber: 'supplier’s number',
-  currency: 'currency',
-  minimumOrderQuantity: 'MOQ',
-  orderMultiple: 'multiple',
-  leadTimeDays: 'lead time in days',
-  stock: 'stock',
-  validFrom: 'valid from',
-  validUntil: 'valid until',
-};
 
 /** What became of a part's offers, the latest first: who opened or changed which terms from what to what. */
 export function offerEvents({ current, history }: PartOffers): OfferEvent[] {
@@ -38,42 +28,25 @@ function openedEvent(offer: Offer, offers: readonly Offer[]): OfferEvent {
 }
 
 function closedEvent(offer: Offer, offers: readonly Offer[]): OfferEvent[] {
-  const { id, closedAt, supplier } = offer;
+  const { id, closedAt, closedBy, supplier } = offer;
   if (closedAt === null || offers.some((other) => isFollowedBy(offer, other))) return [];
-  return [{ id: `${id}`, at: closedAt, who: null, supplier: supplier.name, changes: ['closed'] }];
-}
-
-/** A change closes an offer at the moment at which it opens the next. */
-function isFollowedBy(one: Offer, next: Offer): boolean {
-  return (
-    one.closedAt === next.openedAt && one.supplier.id === next.supplier.id && one.version + 1 === next.version
-  );
+  return [
+    { id: `${id}`, at: closedAt, who: closedBy?.name ?? null, supplier: supplier.name, changes: ['closed'] },
+  ];
 }
 
 function changesOf(before: Offer, after: Offer): string[] {
   const rows = [before, after].map((offer) => ({ key: '', part: offer.part, offer, usedIn: [] }));
-  const quantities = new Set(
-    [...before.breaks, ...after.breaks].map(({ minimumQuantity }) => minimumQuantity),
-  );
-  const cells: [CellKey, string, string][] = [
-    ...[...quantities]
-      .sort((a, b) => a - b)
-      .map((quantity): [CellKey, string, string] => [
-        priceCell(quantity),
-        `at ${quantity}`,
-        ` ${after.currency}`,
-      ]),
-    ...PLAIN_CELLS.map((cell): [CellKey, string, string] => [cell, LABELS[cell], '']),
-  ];
-  return cells.flatMap(([cell, label, unit]) => {
+  return comparedCells(rows).flatMap((cell) => {
     const [from, to] = rows.map((row) => cellText(row, cell));
-    return from === to ? [] : [`${label}: ${from || 'none'} → ${to || 'none'}${to && unit}`];
+    const unit = quantityOf(cell) === null || to === '' ? '' : ` ${after.currency}`;
+    return from === to ? [] : [`${cellLabel(cell)}: ${from || 'none'} → ${to || 'none'}${unit}`];
   });
 }
 
 function pricesOf({ breaks, currency }: Offer): string {
   const texts = breaks.map(
-    ({ minimumQuantity, unitPrice }) => `${Number(unitPrice)} ${currency} at ${minimumQuantity}`,
+    ({ minimumQuantity, unitPrice }) => `${shortPrice(unitPrice)} ${currency} at ${minimumQuantity}`,
   );
   return texts.join(', ');
 }

@@ -2,29 +2,41 @@ import type { EChartsCoreOption } from 'echarts/core';
 import { format } from 'echarts/core';
 import { formatDay } from '../../../components/formatDay';
 import { FONT_FAMILY, type Tokens } from '../../../theme';
+import { labelOffsets } from './labelOffsets';
 import type { PriceLine } from './priceSteps';
 
-const STROKES: readonly [keyof Tokens, 'solid' | number[]][] = [
-  ['damson', 'solid'],
-  ['verdigris', [6, 4]],
-  ['ochre', [2, 3]],
-  ['rust', [8, 3, 2, 3]],
-  ['slate', 'solid'],
-];
+const COLOURS = ['damson', 'verdigris', 'ochre', 'rust', 'slate'] as const satisfies (keyof Tokens)[];
+const DASHES: readonly ('solid' | number[])[] = ['solid', [6, 4], [2, 3], [8, 3, 2, 3], [12, 3]];
+
+const TOP = 26;
+const BOTTOM = 24;
+/** A line that has just begun is shown in a span of time, too. */
+const LEAST_SPAN = 30 * 86_400_000;
 
 /** Step lines over time with their names at their ends, in the colours of the theme. */
 export function priceHistoryOption(
   lines: readonly PriceLine[],
   currency: string,
   tokens: Tokens,
+  height: number,
 ): EChartsCoreOption {
+  const offsets = labelOffsets(
+    lines.map(({ points }) => lastPrice(points)?.[1] ?? 0),
+    height - TOP - BOTTOM,
+  );
   const text = { color: tokens.muted, fontSize: 12 };
   const axis = { axisLine: { show: true, lineStyle: { color: tokens.muted } }, axisTick: { show: false } };
   return {
     animation: false,
     textStyle: { fontFamily: FONT_FAMILY, ...text },
-    grid: { left: 46, right: 150, top: 26, bottom: 24 },
-    xAxis: { type: 'time', ...axis, axisLabel: { ...text, hideOverlap: true }, splitLine: { show: false } },
+    grid: { left: 46, right: 150, top: TOP, bottom: BOTTOM },
+    xAxis: {
+      type: 'time',
+      min: beginning,
+      ...axis,
+      axisLabel: { ...text, hideOverlap: true },
+      splitLine: { show: false },
+    },
     yAxis: {
       type: 'value',
       scale: true,
@@ -35,19 +47,44 @@ export function priceHistoryOption(
       splitLine: { lineStyle: { color: tokens.rule } },
     },
     tooltip: tooltipOf(currency, tokens),
-    series: lines.map((line, index) => seriesOf(line, STROKES[index % STROKES.length], tokens)),
+    series: lines.map((line, index) => seriesOf(line, index, offsets[index], tokens)),
   };
 }
 
-function seriesOf({ name, points }: PriceLine, [colour, type]: (typeof STROKES)[number], tokens: Tokens) {
+/** The time axis begins no later than this. */
+function beginning({ min, max }: { min: number; max: number }): number {
+  return Math.min(min, max - LEAST_SPAN);
+}
+
+/** Each line has a stroke of its own: after the colours are used up, they come again with other dashes. */
+function strokeOf(index: number) {
+  const round = Math.floor(index / COLOURS.length);
+  return [COLOURS[index % COLOURS.length], DASHES[(index + round) % DASHES.length]] as const;
+}
+
+function lastPrice(points: PriceLine['points']): readonly [number, number] | undefined {
+  return points.findLast((point): point is readonly [number, number] => point[1] !== null);
+}
+
+/** Each price is marked where it begins, which shows one that has just begun; not where the line ends. */
+function marked(points: PriceLine['points']) {
+  return points.map((value, index) => ({
+    value,
+    symbol: value[1] === null || points[index + 1]?.[1] === null ? 'none' : 'circle',
+  }));
+}
+
+function seriesOf({ name, points }: PriceLine, index: number, offset: number, tokens: Tokens) {
+  const [colour, type] = strokeOf(index);
   const ink = colour === 'slate' ? tokens.muted : tokens[colour];
-  const last = points.findLast(([, price]) => price !== null);
+  const last = lastPrice(points);
   return {
     type: 'line',
     name,
     step: 'end',
-    symbol: 'none',
-    data: points,
+    symbolSize: 5,
+    showAllSymbol: true,
+    data: marked(points),
     lineStyle: { color: tokens[colour], width: 1.8, type },
     itemStyle: { color: tokens[colour] },
     markPoint: last && {
@@ -57,6 +94,7 @@ function seriesOf({ name, points }: PriceLine, [colour, type]: (typeof STROKES)[
       label: {
         show: true,
         position: 'right',
+        offset: [0, offset],
         color: ink,
         fontSize: 12,
         width: 136,

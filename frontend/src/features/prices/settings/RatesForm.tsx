@@ -1,4 +1,4 @@
-import { CURRENCIES, readRate } from '@roothertz/common/prices';
+import { CURRENCIES, plainNumbers, readRate } from '@roothertz/common/prices';
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { Button, Input, Select } from 'antd';
 import { useState } from 'react';
@@ -102,6 +102,21 @@ function RateField({ code, base, dated, text, isChanged, disabled, onChange }: R
       />
       <span className={styles.quiet}>{isChanged ? 'from today' : dated && `since ${formatDay(dated)}`}</span>
       {isWrong && <FieldMessage>{reading.message}</FieldMessage>}
+      {isWrong && <PlainRates text={text} onChange={onChange} />}
+    </div>
+  );
+}
+
+/** How a rate that can be misread may be meant, each taken with one click. */
+function PlainRates({ text, onChange }: Pick<RateFieldProps, 'text' | 'onChange'>) {
+  const meant = plainNumbers(text).filter((number) => readRate(number).ok);
+  return (
+    <div className={styles.meant}>
+      {meant.map((number) => (
+        <Button key={number} size="small" onClick={() => onChange(number)}>
+          Take it as {number}
+        </Button>
+      ))}
     </div>
   );
 }

@@ -1,7 +1,7 @@
 import type { ResistorRankingRequest } from '@roothertz/common/conditions';
 import { useMemo } from 'react';
 import { resistorRankingQuery, type ResistorPage } from '../../../api/resistorRanking';
-import { useKeptPages } from '../useKeptPages';
+import { useKeptPages } from '../../../components/useKeptPages';
 import { shownOf, type Shown } from '../useRanking';
 
 export type ShownResistors = Shown<ResistorRankingRequest, ResistorPage>;

@@ -1,6 +1,6 @@
 import { useMemo } from 'react';
 import { stagesQuery, type StagePage, type StageRequest } from '../../../api/stages';
-import { useKeptPages } from '../useKeptPages';
+import { useKeptPages } from '../../../components/useKeptPages';
 import { shownOf, type Shown } from '../useRanking';
 
 export type ShownStages = Shown<StageRequest, StagePage>;
