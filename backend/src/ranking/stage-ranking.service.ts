@@ -69,12 +69,20 @@ function toSoughtConditions(dto: SoughtConditionsDto): SoughtConditions {
   return { ...conditions, stage: { ...conditions.stage, network: { minimumTotal, maximumTotal } } };
 }
 
-const MOST_CANDIDATES = 5000;
+const MOST_CANDIDATES = 10_000;
 
-/** Each op-amp and number of channels is a search of its own: more than a few thousand keep everybody waiting. */
-function refuseMany(libraries: readonly IndexedLibrary[], { stage }: SoughtConditions): void {
-  const candidates = libraries.reduce((sum, { ids }) => sum + ids.length, 0) * stage.parallelMaximum;
+/**
+ * Where the source drives the network and its impedance goes with frequency, each op-amp takes a search of its own:
+ * more than some thousands would keep everybody waiting.
+ */
+function refuseMany(
+  libraries: readonly IndexedLibrary[],
+  { source, stage: { topology } }: SoughtConditions,
+): void {
+  const isReactive = source.inductance > 0 || source.capacitance > 0;
+  if (!isReactive || (topology !== 'inverting' && topology !== 'difference')) return;
+  const candidates = libraries.reduce((sum, { ids }) => sum + ids.length, 0);
   if (candidates <= MOST_CANDIDATES) return;
-  const message = `at most ${MOST_CANDIDATES} op-amps, counted for each number of channels, can be searched: choose one library or fewer channels in parallel`;
+  const message = `at most ${MOST_CANDIDATES} op-amps can be searched for ${topology} stages on a source with inductance or capacitance: choose one library`;
   refuseConditions([{ field: 'filter.library', message }]);
 }

@@ -17,7 +17,6 @@ export interface ParallelStage {
  */
 export function parallelStage({ conditions, amplifier }: ParallelStage, count: number): ParallelStage {
   if (count === 1) return { conditions, amplifier };
-  const { stage } = conditions;
   const { inputType = null, inputBiasCurrent = null, inputCapacitance = null } = amplifier;
   const currentNoise = amplifier.currentNoise ?? leastCurrentNoise(inputType, inputBiasCurrent);
   return {
@@ -27,8 +26,15 @@ export function parallelStage({ conditions, amplifier }: ParallelStage, count: n
       currentNoise: currentNoise * Math.sqrt(count),
       inputCapacitance: inputCapacitance && inputCapacitance * count,
     },
-    conditions: { ...conditions, stage: { ...stage, ...networkOfMany(stage, count) } },
+    conditions: parallelConditions(conditions, count),
   };
+}
+
+/** What of a parallel stage doesn't depend on the amplifier: the networks of all channels as one. */
+export function parallelConditions(conditions: OperatingConditions, count: number): OperatingConditions {
+  if (count === 1) return conditions;
+  const { stage } = conditions;
+  return { ...conditions, stage: { ...stage, ...networkOfMany(stage, count) } };
 }
 
 function networkOfMany(stage: StageConditions, count: number): Partial<StageConditions> {

@@ -1,14 +1,16 @@
 import type { PricedNetwork } from './networks.js';
 import type { Network } from './stageSearch.js';
 
-/** Networks that stand next to each other in the order of their gain resistance. */
+/** Networks that lie near to each other in gain resistance and gain. */
 export interface Block {
-  from: number;
-  /** the first network after the block */
-  to: number;
-  /** The corners of the block: its least and largest gain resistance and gain, where the noise is least. */
-  corners: Network[];
-  /** How much less than at the corners the noise inside may be at least: a factor, 0 = unknown. */
+  networks: readonly PricedNetwork[];
+  /** The corners at the least gain resistance: one with the least gain, one with the largest. */
+  least: Network[];
+  /** The corners at the largest gain resistance, alike. */
+  most: Network[];
+  /** How much less than at its least corners the noise along the gain may be at least: a factor. */
+  gainDip: number;
+  /** How much less than at all corners the noise inside may be at least: a factor, 0 = unknown. */
   dip: number;
   /** the least price of its networks */
   price: number;
@@ -16,52 +18,70 @@ export interface Block {
 
 /** From this many networks on, bounds cost less than they save. */
 const WORTH_BOUNDING = 8;
-
+/** Blocks whose noise may dip further say too little of what is inside. */
+const TELLING_DIP = 0.5;
 /** Halves blocks of networks, each block made once for all amplifiers. */
 export class Blocks {
-  private readonly known = new Map<string, Block>();
+  private readonly known = new Map<Block, [Block, Block]>();
+  private all?: Block;
 
-  /** @param neverFalls the noise never falls with more gain resistance */
+  /**
+   * @param networks at least one, where any block is asked for
+   * @param inSeries Ω, what the gain resistance counts together with
+   */
   constructor(
     private readonly networks: readonly PricedNetwork[],
-    private readonly neverFalls: boolean,
+    private readonly inSeries: number,
   ) {}
 
   whole(): Block {
-    return this.block(0, this.networks.length);
+    return (this.all ??= describe(this.networks, this.inSeries));
   }
 
   /** The two halves of a block, or null where it is small enough to evaluate each of its networks. */
-  halves({ from, to }: Block): [Block, Block] | null {
-    if (to - from <= WORTH_BOUNDING) return null;
-    const middle = (from + to) >> 1;
-    return [this.block(from, middle), this.block(middle, to)];
+  halves(block: Block): [Block, Block] | null {
+    if (block.networks.length <= WORTH_BOUNDING) return null;
+    const halves = this.known.get(block) ?? halve(block, this.inSeries);
+    this.known.set(block, halves);
+    return halves;
   }
 
-  /** The networks of a block. */
-  of({ from, to }: Block): readonly PricedNetwork[] {
-    return this.networks.slice(from, to);
+  /** All networks, in blocks that are small enough for their corners to tell of what is inside. */
+  telling(block = this.whole()): Block[] {
+    const halves = block.dip < TELLING_DIP ? this.halves(block) : null;
+    return halves ? halves.flatMap((half) => this.telling(half)) : [block];
   }
+}
 
-  private block(from: number, to: number): Block {
-    const key = `${from} ${to}`;
-    const known = this.known.get(key) ?? this.describe(from, to);
-    this.known.set(key, known);
-    return known;
-  }
+/** Halves across the wider of the two ranges. */
+function halve({ networks, least, most }: Block, inSeries: number): [Block, Block] {
+  const alongGain = span(least[0].gain, least[1].gain);
+  const alongResistance = span(inSeries + least[0].gainResistance, inSeries + most[0].gainResistance);
+  const key = alongGain > alongResistance ? 'gain' : 'gainResistance';
+  const inOrder = networks.toSorted((a, b) => a[key] - b[key]);
+  const middle = inOrder.length >> 1;
+  return [describe(inOrder.slice(0, middle), inSeries), describe(inOrder.slice(middle), inSeries)];
+}
 
-  private describe(from: number, to: number): Block {
-    const members = this.networks.slice(from, to);
-    const [least, most] = ends(members.map(({ gainResistance }) => gainResistance));
-    const gains = ends(members.map(({ gain }) => gain));
-    const resistances = this.neverFalls ? [least] : [least, most];
-    const dip = dipWithin(this.neverFalls ? 1 : most / least, gains[1] / gains[0]);
-    const corners = resistances.flatMap((gainResistance) =>
-      gains.map((gain) => cornerOf(members, gain, gainResistance)),
-    );
-    const [price] = ends(members.map((network) => network.price));
-    return { from, to, corners, dip, price };
-  }
+function describe(networks: readonly PricedNetwork[], inSeries: number): Block {
+  const [low, high] = ends(networks.map(({ gainResistance }) => gainResistance));
+  const gains = ends(networks.map(({ gain }) => gain));
+  const cornersAt = (gainResistance: number) => gains.map((gain) => cornerOf(networks, gain, gainResistance));
+  const alongGain = span(...gains);
+  const [price] = ends(networks.map((network) => network.price));
+  return {
+    networks,
+    least: cornersAt(low),
+    most: cornersAt(high),
+    gainDip: dipWithin(alongGain),
+    dip: dipWithin(span(inSeries + low, inSeries + high) + alongGain),
+    price,
+  };
+}
+
+/** Step between two values along the logarithm; that of none is 0. */
+function span(least: number, most: number): number {
+  return most === least ? 0 : Math.log(most / least);
 }
 
 /** A network at a corner of its block, with the least excess noise that any of the block has. */
@@ -80,8 +100,7 @@ function cornerOf(members: readonly Network[], gain: number, gainResistance: num
  * Along the logarithms of its resistances the noise is a smooth function: over a step h it may dip below both
  * ends by some h²/8 times its curvature, for which h²/2 leaves room.
  */
-function dipWithin(resistanceRatio: number, gainRatio: number): number {
-  const step = Math.log(resistanceRatio || 1) + Math.log(gainRatio);
+function dipWithin(step: number): number {
   return Number.isFinite(step) ? Math.max(0, 1 - (step * step) / 2) : 0;
 }
 

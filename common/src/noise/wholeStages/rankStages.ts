@@ -5,7 +5,10 @@ import type { AmplifierColumns } from '../ranking/columns.js';
 import { sift, type ExclusionCounts, type PartPlace } from '../ranking/sift.js';
 import { stageModel } from '../stage/stageModel.js';
 import { Blocks } from './blocks.js';
-import { listCandidates, noiseOf, type Candidate, type FoundStage } from './candidates.js';
+import { prepareBlockBounds } from './blockBound.js';
+import { noiseOf, type Candidate, type FoundStage } from './candidates.js';
+import { leastInSeries } from './leastInSeries.js';
+import { listCandidates, type Candidates } from './listCandidates.js';
 import { findNetworks } from './networks.js';
 import { StageCosts } from './stageCosts.js';
 import { nominalNetwork, withNetwork, type Network, type NetworkResistor } from './stageSearch.js';
@@ -57,15 +60,16 @@ export function rankStages(
   const costs = new StageCosts(conditions.stage.topology, search.prices);
   const nominal = withNetwork(conditions, nominalNetwork(conditions));
   const { accepted, excluded } = sift({ conditions: nominal, filter }, stageModel(nominal), libraries);
-  const candidates = listCandidates(conditions, libraries, accepted, costs);
   const { pairs, nearestGain, blocksFor } = prepareNetworks(conditions, resistors, costs);
-  const evaluations = { made: 0, exhaustive: pairs * candidates.length };
+  const candidates = listCandidates(conditions, libraries, pairs === 0 ? [] : accepted, costs, blocksFor);
+  const evaluations = { made: 0, exhaustive: pairs * candidates.all.length };
   const countedNoise = (candidate: Candidate, network: Network) => {
     evaluations.made++;
     return noiseOf(conditions, candidate, network);
   };
-  const space = { candidates: pairs === 0 ? [] : candidates, blocksFor, noiseOf: countedNoise };
-  const { total, rows, frontier } = findStages(search, space);
+  const boundOf = prepareBlockBounds(conditions, countedNoise);
+  const space = { candidates: candidates.all, blocksFor, noiseOf: countedNoise, boundOf };
+  const { total, rows, frontier } = findStages(search, space, candidates);
   return {
     total: total ?? (pairs === 0 ? 0 : accepted.reduce((sum, { length }) => sum + length, 0)),
     excluded,
@@ -86,25 +90,27 @@ function prepareNetworks(
   resistors: readonly NetworkResistor[],
   costs: StageCosts,
 ) {
-  const neverFalls = conditions.stage.topology === 'non-inverting';
   const single = findNetworks(conditions, resistors, costs.network(1));
-  const known = [new Blocks(single.all, neverFalls)];
+  const inSeries = leastInSeries(conditions);
+  const known = [new Blocks(single.all, inSeries)];
   const blocksFor: StageSpace['blocksFor'] = (channelsInParallel) => {
     const count = costs.distinct(channelsInParallel);
     return (known[count - 1] ??= new Blocks(
       findNetworks(conditions, resistors, costs.network(count)).all,
-      neverFalls,
+      inSeries,
     ));
   };
   return { ...single, blocksFor };
 }
 
-function findStages({ sort, within, offset, limit }: StageSearch, space: StageSpace) {
+function findStages({ sort, within, offset, limit }: StageSearch, space: StageSpace, candidates: Candidates) {
   if (sort === 'inputNoiseRms') return { total: null, ...findQuietest(space, offset + limit) };
   const { rows, frontier } = findQuietest(space, 1);
   const [quietest] = rows;
-  const cheapest = quietest ? findCheapest(space, quietest.noise * 10 ** (within / 20)) : [];
-  return { total: cheapest.length, rows: cheapest, frontier };
+  if (quietest === undefined) return { total: 0, rows: [], frontier };
+  const most = quietest.noise * 10 ** (within / 20);
+  const sure = candidates.within(most, quietest.network);
+  return { ...findCheapest(space, most, offset + limit, sure), frontier };
 }
 
 function toStage({ conditions, filter }: StageSearch, stage: FoundStage): WholeStage {

@@ -14,11 +14,15 @@ export interface OrderedSearch {
   /** what comes first; among equals the other counts */
   by: 'noise' | 'price';
   noiseOf: (candidate: Candidate, network: Network) => number;
+  /** with no network of the block is the candidate's noise lower */
+  boundOf: (candidate: Candidate, block: Block) => number;
   /** Nothing at or above the bound is wanted any more. */
   isOut: (bound: Bound) => boolean;
 }
 
-type Entry = Bound & ({ block: Block } | { network: PricedNetwork; block?: undefined });
+/** A block that is rough has no bound of its own yet, but the candidate's. */
+type Entry = Bound &
+  ({ block: Block; isRough?: boolean } | { network: PricedNetwork; block?: undefined; isRough?: undefined });
 
 /**
  * Whole stages in ascending order of noise or price, by best-first search: blocks of networks wait with lower
@@ -28,8 +32,9 @@ type Entry = Bound & ({ block: Block } | { network: PricedNetwork; block?: undef
 export function* stagesInOrder(search: OrderedSearch): Generator<FoundStage> {
   const waiting = new Waiting(search);
   for (let entry = waiting.next(); entry !== undefined; entry = waiting.next()) {
-    const { candidate, block, noise, price } = entry;
+    const { candidate, block, noise, price, isRough } = entry;
     if (block === undefined) yield { candidate, network: entry.network, noise, price };
+    else if (isRough) waiting.addBlock(candidate, block);
     else waiting.divide(candidate, block);
   }
 }
@@ -38,8 +43,12 @@ class Waiting {
   private readonly queue = new PriorityQueue<Entry>();
 
   constructor(private readonly search: OrderedSearch) {
-    for (const candidate of search.candidates)
-      this.addBlock(candidate, search.blocksFor(candidate.channelsInParallel).whole());
+    for (const candidate of search.candidates) {
+      const block = search.blocksFor(candidate.channelsInParallel).whole();
+      this.add(candidate, block.price, (price) => {
+        return { candidate, block, price, noise: candidate.leastNoise, isRough: true };
+      });
+    }
   }
 
   /** The least entry that is still wanted. */
@@ -49,23 +58,22 @@ class Waiting {
     return entry;
   }
 
+  addBlock(candidate: Candidate, block: Block): void {
+    this.add(candidate, block.price, (price) => {
+      return { candidate, block, price, noise: this.search.boundOf(candidate, block) };
+    });
+  }
+
   divide(candidate: Candidate, block: Block): void {
     const blocks = this.search.blocksFor(candidate.channelsInParallel);
     const halves = blocks.halves(block);
     if (halves) for (const half of halves) this.addBlock(candidate, half);
-    else for (const network of blocks.of(block)) this.addNetwork(candidate, network);
-  }
-
-  private addBlock(candidate: Candidate, block: Block): void {
-    this.add(candidate, block.price, (price) => {
-      const corners = block.dip === 0 ? [0] : block.corners.map((corner) => this.noise(candidate, corner));
-      return { candidate, block, price, noise: block.dip * Math.min(...corners) };
-    });
+    else for (const network of block.networks) this.addNetwork(candidate, network);
   }
 
   private addNetwork(candidate: Candidate, network: PricedNetwork): void {
     this.add(candidate, network.price, (price) => {
-      return { candidate, network, price, noise: this.noise(candidate, network) };
+      return { candidate, network, price, noise: this.search.noiseOf(candidate, network) };
     });
   }
 
@@ -73,12 +81,8 @@ class Waiting {
   private add(candidate: Candidate, ofNetwork: number, entryAt: (price: number) => Entry): void {
     const { isOut, by } = this.search;
     const price = candidate.price + ofNetwork;
-    if (isOut({ candidate, price, noise: 0 })) return;
+    if (isOut({ candidate, price, noise: candidate.leastNoise })) return;
     const entry = entryAt(price);
     if (!isOut(entry)) this.queue.add(by === 'noise' ? [entry.noise, price] : [price, entry.noise], entry);
-  }
-
-  private noise(candidate: Candidate, network: Network): number {
-    return this.search.noiseOf(candidate, network);
   }
 }

@@ -35,20 +35,38 @@ export function findQuietest(space: StageSpace, count: number): QuietestStages {
   return found;
 }
 
+/** The cheapest stages within a noise, and of how many op-amps there is one. */
+export interface CheapestStages {
+  total: number;
+  rows: FoundStage[];
+}
+
 /**
  * The cheapest stage of each op-amp whose noise is at most `limit`, of equally cheap ones the quietest, in
- * ascending order of price; op-amps of whose stages none has a price come last, in ascending order of noise.
+ * ascending order of price, the first `count` of them; op-amps of whose stages none has a price come last, in
+ * ascending order of noise.
+ *
+ * @param sure candidates that are known to make a stage within the limit
  */
-export function findCheapest(space: StageSpace, limit: number): FoundStage[] {
+export function findCheapest(
+  space: StageSpace,
+  limit: number,
+  count: number,
+  sure: readonly Candidate[],
+): CheapestStages {
   const taken = new Set<string>();
   const isOut: OrderedSearch['isOut'] = ({ candidate, noise }) =>
     noise > limit || taken.has(partOf(candidate));
-  const found: FoundStage[] = [];
-  for (const stage of stagesInOrder({ ...space, by: 'price', isOut })) {
-    found.push(stage);
+  const rows: FoundStage[] = [];
+  const search = { ...space, isOut };
+  for (const stage of count > 0 ? stagesInOrder({ ...search, by: 'price' }) : []) {
+    rows.push(stage);
     taken.add(partOf(stage.candidate));
+    if (rows.length === count) break;
   }
-  return found;
+  for (const candidate of sure) taken.add(partOf(candidate));
+  for (const { candidate } of stagesInOrder({ ...search, by: 'noise' })) taken.add(partOf(candidate));
+  return { total: taken.size, rows };
 }
 
 function partOf({ library, row }: Candidate): string {
