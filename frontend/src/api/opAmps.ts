@@ -16,6 +16,16 @@ export const OP_AMPS_API: PartsApi<OpAmpPart, OpAmp> = {
   gapCounts: (query, signal) =>
     answer(client.GET('/api/op-amps/completeness', { params: { query: ownQuery(query) }, signal })),
   changeStandings: (parts) => answer(client.PATCH('/api/op-amps', { body: { parts } })),
+  standingOutcome: (filter, { lifecycle: toLifecycle, approval: toApproval }, signal) =>
+    answer(
+      client.GET('/api/op-amps/standings', {
+        params: { query: { ...ownQuery(filter), toLifecycle, toApproval } },
+        signal,
+      }),
+    ),
+  changeMatching: (filter, body) =>
+    answer(client.POST('/api/op-amps/standings', { params: { query: ownQuery(filter) }, body })),
+  undoMatching: (id) => answer(client.POST('/api/op-amps/standings/{id}/undo', { params: { path: { id } } })),
   remove: (id, version) =>
     answer(client.DELETE('/api/op-amps/{id}', { params: { path: { id }, query: { version } } })),
 };

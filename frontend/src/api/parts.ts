@@ -47,6 +47,17 @@ export interface StandingChange extends Partial<Standing> {
   version: number;
 }
 
+/** What narrows a list of parts, as the server takes it. */
+export type PartListFilter = Omit<PartListQuery, 'sort' | 'limit' | 'offset'>;
+
+/** What would become of all parts of a filter that are to stand otherwise. */
+export type StandingOutcome = components['schemas']['StandingOutcomeDto'];
+
+/** How all parts of a filter are to stand, of the library of which the outcome was said. */
+export interface MatchingChange extends Partial<Standing> {
+  libraryRevision: number;
+}
+
 interface Page {
   limit: number;
   offset: number;
@@ -70,6 +81,17 @@ export interface PartsReader<Stored extends StoredPart = StoredPart> {
   gapCounts: (query: PartListQuery, signal: AbortSignal) => Promise<GapCounts>;
   /** All of them or none; the answer holds them in the same order. */
   changeStandings: (changes: StandingChange[]) => Promise<{ items: Stored[] }>;
+  standingOutcome: (
+    filter: PartListFilter,
+    wanted: Partial<Standing>,
+    signal: AbortSignal,
+  ) => Promise<StandingOutcome>;
+  /** All own parts of the filter or none. */
+  changeMatching: (
+    filter: PartListFilter,
+    change: MatchingChange,
+  ) => Promise<components['schemas']['MatchingChangedDto']>;
+  undoMatching: (id: string) => Promise<components['schemas']['StandingsBackDto']>;
   remove: (id: string, version: number) => Promise<void>;
 }
 
@@ -87,6 +109,14 @@ export function gapCountsQuery(reader: PartsReader, query: PartListQuery) {
     queryKey: [reader.name, 'gaps', query],
     queryFn: ({ signal }) => reader.gapCounts(query, signal),
     placeholderData: keepPreviousData,
+  });
+}
+
+export function standingOutcomeQuery(reader: PartsReader, filter: PartListFilter, wanted: Partial<Standing>) {
+  return queryOptions({
+    queryKey: [reader.name, 'standing-outcome', filter, wanted],
+    queryFn: ({ signal }) => reader.standingOutcome(filter, wanted, signal),
+    enabled: wanted.lifecycle !== undefined || wanted.approval !== undefined,
   });
 }
 

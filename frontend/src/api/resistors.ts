@@ -18,6 +18,17 @@ export const RESISTORS_API: PartsApi<ResistorPart, StoredResistor> = {
   gapCounts: (query, signal) =>
     answer(client.GET('/api/resistors/completeness', { params: { query: ownQuery(query) }, signal })),
   changeStandings: (parts) => answer(client.PATCH('/api/resistors', { body: { parts } })),
+  standingOutcome: (filter, { lifecycle: toLifecycle, approval: toApproval }, signal) =>
+    answer(
+      client.GET('/api/resistors/standings', {
+        params: { query: { ...ownQuery(filter), toLifecycle, toApproval } },
+        signal,
+      }),
+    ),
+  changeMatching: (filter, body) =>
+    answer(client.POST('/api/resistors/standings', { params: { query: ownQuery(filter) }, body })),
+  undoMatching: (id) =>
+    answer(client.POST('/api/resistors/standings/{id}/undo', { params: { path: { id } } })),
   remove: (id, version) =>
     answer(client.DELETE('/api/resistors/{id}', { params: { path: { id }, query: { version } } })),
 };

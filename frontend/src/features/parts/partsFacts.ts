@@ -6,7 +6,7 @@ import type { PartsList } from './usePartsList';
 /** The list in one line: how many parts, whose, and how many of them lack the figure that ranking needs most. */
 export function partsFacts(
   { catalogue, mostMissed: { key, label } }: KindOfPart,
-  { parts, total, isComplete }: PartsList,
+  { parts, total, isComplete }: Pick<PartsList, 'parts' | 'total' | 'isComplete'>,
   searched: boolean,
 ): string {
   if (searched) return `${countOf(parts.length, 'part')} found among ${countOf(total, 'part')}`;

@@ -1,5 +1,5 @@
 import { APPROVALS, boundsError, gapFields, LIBRARIES, LIFECYCLES } from '@roothertz/common/parts';
-import type { PartListQuery } from '../../api/parts';
+import type { PartListFilter, PartListQuery } from '../../api/parts';
 import type { KindOfPart } from './kindOfPart';
 
 /** What the list shows, as the page's address holds it. */
@@ -70,6 +70,11 @@ function readWindow({ narrowedBy }: KindOfPart, address: URLSearchParams): Parts
   if (narrowedBy === null) return {};
   const ends = WINDOW_ENDS.map((key) => [key, Number(address.get(key) ?? NaN)] as const);
   return Object.fromEntries(ends.filter(([, value]) => boundsError(narrowedBy, value) === null));
+}
+
+/** What narrows the list, as the server takes it. */
+export function filterOf({ sort: _, search, ...narrowed }: PartsView): PartListFilter {
+  return { ...narrowed, search: search.trim() || undefined };
 }
 
 export function isNarrowed(kind: KindOfPart, view: PartsView): boolean {

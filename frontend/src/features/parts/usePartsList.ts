@@ -9,6 +9,8 @@ export interface PartsList {
   parts: readonly StoredPart[];
   /** Parts that the filters let through, whatever was searched for. */
   total: number;
+  /** Parts that the server finds by the filters and the words searched for. */
+  matching: number;
   /** All of these are loaded. */
   isComplete: boolean;
   /** Nothing can be shown or said yet. */
@@ -39,10 +41,12 @@ export function usePartsList(reader: PartsReader, { search, ...narrowed }: Parts
     () => joinFound(searchLoaded(wanted), (isAsked && found) || NOTHING),
     [searchLoaded, wanted, isAsked, found],
   );
+  const matching = (isAsked ? rest.data?.total : undefined) ?? (wanted === '' ? total : parts.length);
   const isAnswered = !isAsked || (asked === wanted && !rest.isPlaceholderData && !rest.isPending);
   return {
     parts,
     total,
+    matching,
     isComplete,
     isPending: list.isPending || (parts.length === 0 && !isAnswered),
     error: list.error ?? rest.error,

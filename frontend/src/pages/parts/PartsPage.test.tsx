@@ -128,6 +128,8 @@ describe('the completeness of the parts', () => {
       'GET /api/auth/me': () => json(sessionOf(role)),
       'GET /api/op-amps': listed([little]),
       'GET /api/op-amps/completeness': () => json(counts),
+      'GET /api/op-amps/41': () =>
+        json({ ...little, version: 9, amplifier: { ...little.amplifier, currentNoise: 2.2e-12 } }),
       'PATCH /api/op-amps/41': () =>
         json({ ...little, version: 4, amplifier: { ...little.amplifier, currentNoise: 2.2e-12 } }),
     });
@@ -159,6 +161,16 @@ describe('the completeness of the parts', () => {
     expect(screen.getByLabelText('current noise of VR-1108')).toHaveValue('2.2 pA/√Hz');
     await userEvent.click(screen.getByRole('button', { name: 'State supply current of VR-1108' }));
     expect(screen.getByLabelText('supply current of VR-1108')).toHaveFocus();
+  });
+
+  it('is taken back by Undo, on what the part is by then', async () => {
+    const { asked } = open('/parts/completeness?library=team&missing=currentNoise');
+    await userEvent.type(await screen.findByLabelText('current noise of VR-1108'), '2.2 pA/√Hz{Enter}');
+    await screen.findByText('current noise of VR-1108 is stated');
+    await userEvent.click(screen.getByRole('button', { name: 'Undo' }));
+    const sent = () => asked.filter(({ route }) => route === 'PATCH /api/op-amps/41').map(({ body }) => body);
+    await waitFor(() => expect(sent()).toHaveLength(2));
+    expect(sent()[1]).toMatchObject({ version: 9, amplifier: { currentNoise: null } });
   });
 
   it('is read by an engineer', async () => {
@@ -261,6 +273,30 @@ describe('the chosen parts', () => {
         { id: '42', version: 6, ...before },
       ],
     });
+  });
+
+  it('are all that match, where the list holds only the first of them', async () => {
+    const outcome = { chosen: 7083, changed: 7000, unchanged: 80, curated: 3, libraryRevision: 12 };
+    const asked = fakeServer({
+      ...SESSION,
+      'GET /api/resistors': listed([resistor(), OTHER], 7083),
+      'GET /api/resistors/standings': () => json(outcome),
+      'POST /api/resistors/standings': () => json({ id: '5', changed: 7000 }),
+      'POST /api/resistors/standings/5/undo': () => json({ takenBack: 6999, kept: 1 }),
+    });
+    renderApp('/parts/resistors?technology=thick-film');
+    await userEvent.click(await screen.findByRole('checkbox', { name: 'Choose all parts listed' }));
+    await userEvent.click(await screen.findByRole('button', { name: /^Choose all 7\s083 that match$/ }));
+    const bar = screen.getByRole('region', { name: 'Chosen parts' });
+    expect(bar).toHaveTextContent(/All 7\s083 parts that match chosen/);
+    await userEvent.click(within(bar).getByRole('button', { name: 'Retire' }));
+    await userEvent.click(await within(bar).findByRole('button', { name: /^Retire 7\s000 parts$/ }));
+    expect(await screen.findByText(/^7\s000 parts are retired$/)).toBeInTheDocument();
+    const change = asked.find(({ route }) => route === 'POST /api/resistors/standings')!;
+    expect(change.url.searchParams.toString()).toBe('technology=thick-film');
+    expect(change.body).toEqual({ libraryRevision: 12, lifecycle: 'obsolete', approval: 'not-approved' });
+    await userEvent.click(screen.getByRole('button', { name: 'Undo' }));
+    expect(await screen.findByText('1 part changed since and stayed')).toBeInTheDocument();
   });
 
   it('stay chosen where somebody changed one meanwhile, and it is named', async () => {

@@ -5,7 +5,7 @@ import { NoParts } from '../../features/parts/NoParts';
 import { partsFacts } from '../../features/parts/partsFacts';
 import { PartsFilters } from '../../features/parts/PartsFilters';
 import { ChosenParts } from '../../features/parts/ChosenParts';
-import { isNarrowed, narrowingKeys } from '../../features/parts/partsView';
+import { filterOf, isNarrowed, narrowingKeys } from '../../features/parts/partsView';
 import { usePartsList } from '../../features/parts/usePartsList';
 import { usePartsView } from '../../features/parts/usePartsView';
 import { PartsHead } from './PartsHead';
@@ -37,7 +37,8 @@ export function PartsPage({ kind }: { kind: KindOfPart }) {
         <ChosenParts
           kind={kind}
           parts={list.parts}
-          total={view.search.trim() === '' ? list.total : list.parts.length}
+          matching={list.matching}
+          filter={filterOf(view)}
           sort={view.sort}
           onSort={(sort) => change({ sort })}
         />

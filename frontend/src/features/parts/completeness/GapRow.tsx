@@ -50,7 +50,7 @@ export function GapRow({ kind, part, asked }: GapRowProps) {
               isAsked={asked.includes(gap.key)}
               isOpen={opened.includes(gap.key)}
               onOpen={mayEdit ? () => setOpened([...opened, gap.key]) : null}
-              onFill={(value) => mutate({ part, key: gap.key, value })}
+              onFill={(value) => mutate({ part, key: gap.key, label: gap.label, value })}
             />
           ))}
         </div>

@@ -1,5 +1,5 @@
 import { RETIRED, type Standing } from '@roothertz/common/parts';
-import type { StandingChange, StoredPart } from '../../../api/parts';
+import type { StandingChange, StandingOutcome, StoredPart } from '../../../api/parts';
 import { optionLabel } from '../../../components/optionLabels';
 import { countOf, grouped } from '../countOf';
 
@@ -46,10 +46,18 @@ export function changesBack(
 }
 
 /** "Sets 37 of 40 parts to obsolete; 3 curated ones can’t be changed." */
-export function planWords({ wanted, chosen, changed, unchanged, curated }: StandingPlan): string {
+export function planWords({ wanted, changed, ...counts }: StandingPlan): string {
+  return outcomeWords(wanted, { ...counts, changed: changed.length });
+}
+
+/** The same of parts of which only the numbers are known. */
+export function outcomeWords(
+  wanted: Wanted,
+  { chosen, changed, unchanged, curated }: Omit<StandingOutcome, 'libraryRevision'>,
+): string {
   const acts = isRetirement(wanted) ? 'Retires' : 'Sets';
   const target = isRetirement(wanted) ? ': obsolete and not approved' : ` to ${wantedWords(wanted)}`;
-  const share = changed.length === chosen ? '' : `${grouped(changed.length)} of `;
+  const share = changed === chosen ? '' : `${grouped(changed)} of `;
   const rest = [
     ...(unchanged > 0 ? [`${grouped(unchanged)} ${unchanged === 1 ? 'is' : 'are'} so already`] : []),
     ...(curated > 0 ? [`${countOf(curated, 'curated one')} can’t be changed`] : []),
@@ -60,8 +68,16 @@ export function planWords({ wanted, chosen, changed, unchanged, curated }: Stand
 /** "37 parts are set to obsolete" */
 export function doneWords({ wanted, changed }: StandingPlan): string {
   const which = changed.length === 1 ? changed[0].partNumber : countOf(changed.length, 'part');
-  const are = changed.length === 1 ? 'is' : 'are';
+  return setWords(wanted, which, changed.length);
+}
+
+export function setWords(wanted: Wanted, which: string, count: number): string {
+  const are = count === 1 ? 'is' : 'are';
   return `${which} ${are} ${isRetirement(wanted) ? 'retired' : `set to ${wantedWords(wanted)}`}`;
+}
+
+export function isStated({ lifecycle, approval }: Wanted): boolean {
+  return lifecycle !== undefined || approval !== undefined;
 }
 
 export function isRetirement(wanted: Wanted): boolean {
