@@ -2,13 +2,14 @@ import { actorWords, AUDIT_ACTIONS, describeChange, type FieldChange } from '@ro
 import { Fragment } from 'react';
 import type { AuditEntry } from '../../api/audit';
 import { moment } from '../../components/moments';
+import { Table } from '../../components/Table';
 import { ObjectName } from './ObjectName';
 import styles from './Trail.module.css';
 
 /** One row an act: when, who, what, and what it changed. */
 export function TrailTable({ entries }: { entries: readonly AuditEntry[] }) {
   return (
-    <table className={styles.table}>
+    <Table stacks className={styles.table}>
       <thead>
         <tr>
           <th scope="col">when</th>
@@ -32,7 +33,7 @@ export function TrailTable({ entries }: { entries: readonly AuditEntry[] }) {
           </tr>
         ))}
       </tbody>
-    </table>
+    </Table>
   );
 }
 

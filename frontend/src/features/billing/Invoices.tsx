@@ -1,5 +1,6 @@
 import type { Invoice } from '../../api/billing';
 import { formatDay } from '../../components/formatDay';
+import { Table } from '../../components/Table';
 import styles from './Billing.module.css';
 import { moneyText } from './moneyText';
 
@@ -15,7 +16,7 @@ export function Invoices({ invoices }: { invoices: readonly Invoice[] }) {
   return (
     <section className={styles.section} aria-labelledby="invoices">
       <h2 id="invoices">Invoices</h2>
-      <table className={styles.table} aria-labelledby="invoices">
+      <Table className={styles.table} aria-labelledby="invoices">
         <thead>
           <tr>
             <th scope="col">Number</th>
@@ -29,7 +30,7 @@ export function Invoices({ invoices }: { invoices: readonly Invoice[] }) {
             <InvoiceRow key={invoice.id} invoice={invoice} />
           ))}
         </tbody>
-      </table>
+      </Table>
     </section>
   );
 }

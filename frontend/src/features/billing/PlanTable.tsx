@@ -1,4 +1,5 @@
 import { type Plan, PLAN_LABELS, PLAN_LIMITS, type PlanLimits, PLANS } from '@roothertz/common/access';
+import { Table } from '../../components/Table';
 import styles from './Billing.module.css';
 
 const ROWS: readonly { label: string; value: (limits: PlanLimits) => string }[] = [
@@ -14,7 +15,7 @@ export function PlanTable({ current }: { current: Plan }) {
   return (
     <section className={styles.section} aria-labelledby="plans">
       <h2 id="plans">What the plans have</h2>
-      <table className={styles.table} aria-labelledby="plans">
+      <Table className={styles.table} aria-labelledby="plans">
         <thead>
           <tr>
             <td />
@@ -36,7 +37,7 @@ export function PlanTable({ current }: { current: Plan }) {
             </tr>
           ))}
         </tbody>
-      </table>
+      </Table>
     </section>
   );
 }

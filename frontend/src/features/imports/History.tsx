@@ -3,6 +3,7 @@ import { Button, Pagination, Skeleton } from 'antd';
 import { useState } from 'react';
 import { importsQuery } from '../../api/imports';
 import { detailOf } from '../../api/problem';
+import { Table } from '../../components/Table';
 import styles from './History.module.css';
 import { HistoryRow } from './HistoryRow';
 
@@ -27,7 +28,7 @@ export function History() {
   return (
     <>
       <div className={styles.scroll}>
-        <table className={styles.table}>
+        <Table stacks className={styles.table}>
           <thead>
             <tr>
               {COLUMNS.map((label) => (
@@ -42,7 +43,7 @@ export function History() {
               <HistoryRow key={imported.id} imported={imported} />
             ))}
           </tbody>
-        </table>
+        </Table>
       </div>
       {data.total > PAGE && (
         <Pagination

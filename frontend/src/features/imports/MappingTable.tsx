@@ -2,6 +2,7 @@ import { Button } from 'antd';
 import { useState } from 'react';
 import type { Import } from '../../api/imports';
 import { FieldMessage } from '../../components/FieldMessage';
+import { Table } from '../../components/Table';
 import { count } from './importWords';
 import { KINDS } from './kinds';
 import { faultsByColumn, isStatedByColumn, withColumn } from './mappingDraft';
@@ -37,7 +38,7 @@ export function MappingTable({ imported, mapping, canChange }: MappingTableProps
       )}
       <h2>What each column is</h2>
       {fault !== undefined && <FieldMessage>{fault}</FieldMessage>}
-      <table className={styles.table}>
+      <Table className={styles.table}>
         <thead>
           <tr>
             <th scope="col">column in the file</th>
@@ -56,7 +57,7 @@ export function MappingTable({ imported, mapping, canChange }: MappingTableProps
             />
           ))}
         </tbody>
-      </table>
+      </Table>
       {shown.length < columns.length && (
         <Button type="link" onClick={() => setWhole(true)}>
           Show all {count(columns.length)} columns

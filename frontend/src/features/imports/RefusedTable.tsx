@@ -1,4 +1,5 @@
 import type { ImportRow } from '../../api/imports';
+import { Table } from '../../components/Table';
 import { count } from './importWords';
 import styles from './RowsTable.module.css';
 
@@ -6,7 +7,7 @@ import styles from './RowsTable.module.css';
 export function RefusedTable({ rows }: { rows: readonly ImportRow[] }) {
   const errors = rows.flatMap((row) => row.errors.map((error) => ({ ...error, line: row.line })));
   return (
-    <table className={styles.table}>
+    <Table className={styles.table}>
       <thead>
         <tr>
           <th scope="col">line</th>
@@ -28,6 +29,6 @@ export function RefusedTable({ rows }: { rows: readonly ImportRow[] }) {
           </tr>
         ))}
       </tbody>
-    </table>
+    </Table>
   );
 }

@@ -1,4 +1,5 @@
 import type { ImportRow } from '../../api/imports';
+import { Table } from '../../components/Table';
 import { count } from './importWords';
 import type { ListView } from './listView';
 import styles from './RowsTable.module.css';
@@ -11,7 +12,7 @@ interface RowsTableProps {
 /** Rows that are accepted: what each changes, field by field, and what is doubtful in it. */
 export function RowsTable({ view, rows }: RowsTableProps) {
   return (
-    <table className={styles.table}>
+    <Table className={styles.table}>
       <thead>
         <tr>
           <th scope="col">line</th>
@@ -39,7 +40,7 @@ export function RowsTable({ view, rows }: RowsTableProps) {
           </tr>
         ))}
       </tbody>
-    </table>
+    </Table>
   );
 }
 

@@ -6,6 +6,7 @@ import { detailOf } from '../../api/problem';
 import type { PagesQuery } from '../../api/pages';
 import type { ExcludedPart } from '../../api/ranking';
 import { FieldMessage } from '../../components/FieldMessage';
+import { Table } from '../../components/Table';
 import styles from './Exclusions.module.css';
 import { leftOutText, reasonsText, type Excluded } from './exclusionWords';
 
@@ -59,7 +60,7 @@ function ExcludedParts<Reason extends string>({
   const parts = data.pages.flatMap(({ items }) => items);
   return (
     <div id="excluded-parts" className={styles.parts} tabIndex={0} role="region" aria-label="Parts left out">
-      <table>
+      <Table>
         <tbody>
           {parts.map((excluded) => (
             <ExcludedRow
@@ -70,7 +71,7 @@ function ExcludedParts<Reason extends string>({
             />
           ))}
         </tbody>
-      </table>
+      </Table>
       {hasNextPage && (
         <Button size="small" loading={isFetchingNextPage} onClick={() => void fetchNextPage()}>
           Show more of {data.pages[0].total}

@@ -1,6 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { invitationsQuery } from '../../api/team';
 import { useFocusAfterLoss } from '../../components/lostFocus';
+import { Table } from '../../components/Table';
 import { InvitationRow } from './InvitationRow';
 import styles from './Team.module.css';
 
@@ -14,7 +15,7 @@ export function Invitations() {
       <h2 ref={heading} tabIndex={-1}>
         {data.length === 1 ? 'One open invitation' : `${data.length} open invitations`}
       </h2>
-      <table className={styles.table}>
+      <Table stacks className={styles.table}>
         <thead>
           <tr>
             <th scope="col">invited</th>
@@ -30,7 +31,7 @@ export function Invitations() {
             <InvitationRow key={invitation.id} invitation={invitation} />
           ))}
         </tbody>
-      </table>
+      </Table>
     </section>
   );
 }

@@ -3,6 +3,7 @@ import { Button, Skeleton } from 'antd';
 import { detailOf } from '../../api/problem';
 import { teamMembersQuery } from '../../api/team';
 import { useFocusAfterLoss } from '../../components/lostFocus';
+import { Table } from '../../components/Table';
 import { MemberRow } from './MemberRow';
 import styles from './Team.module.css';
 
@@ -22,7 +23,7 @@ export function MemberTable({ mayManage }: { mayManage: boolean }) {
       <h2 ref={heading} tabIndex={-1}>
         {data.length === 1 ? 'One member' : `${data.length} members`}
       </h2>
-      <table className={styles.table}>
+      <Table stacks className={styles.table}>
         <thead>
           <tr>
             <th scope="col">member</th>
@@ -40,7 +41,7 @@ export function MemberTable({ mayManage }: { mayManage: boolean }) {
             <MemberRow key={member.id} member={member} mayManage={mayManage} />
           ))}
         </tbody>
-      </table>
+      </Table>
     </section>
   );
 }

@@ -6,6 +6,7 @@ import { detailOf } from '../../../api/problem';
 import { grouped } from '../countOf';
 import type { KindOfPart } from '../kindOfPart';
 import type { PartsView } from '../partsView';
+import { Table } from '../../../components/Table';
 import styles from './Completeness.module.css';
 import { GapRow } from './GapRow';
 
@@ -33,7 +34,7 @@ export function GapTable({ kind, view }: GapTableProps) {
   return (
     <>
       <div className={styles.scroll}>
-        <table className={styles.table} aria-label="Parts by completeness">
+        <Table className={styles.table} aria-label="Parts by completeness">
           <thead>
             <tr>
               <th scope="col">part</th>
@@ -51,7 +52,7 @@ export function GapTable({ kind, view }: GapTableProps) {
               />
             ))}
           </tbody>
-        </table>
+        </Table>
       </div>
       {data.total > PAGE && (
         <Pagination

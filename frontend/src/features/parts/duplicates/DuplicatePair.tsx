@@ -8,6 +8,7 @@ import { draftOf } from '../partDraft';
 import { partValues } from '../partValues';
 import { refusedWords } from '../standing/refusedWords';
 import { useChangeStandings } from '../standing/useChangeStandings';
+import { Table } from '../../../components/Table';
 import { DuplicatePart } from './DuplicatePart';
 import styles from './Duplicates.module.css';
 import { useKeepBoth } from './useKeepBoth';
@@ -41,7 +42,7 @@ export function DuplicatePair({ kind, pair }: DuplicatePairProps) {
       </p>
       {error && <FieldMessage>{refusedWords(error)}</FieldMessage>}
       <div className={styles.scroll}>
-        <table className={styles.table}>
+        <Table className={styles.table}>
           <thead>
             <tr>
               <td />
@@ -65,7 +66,7 @@ export function DuplicatePair({ kind, pair }: DuplicatePairProps) {
               </tr>
             ))}
           </tbody>
-        </table>
+        </Table>
       </div>
       {differences.length === 0 && <p className={styles.quiet}>Nothing differs.</p>}
     </article>

@@ -2,12 +2,13 @@ import type { Offer } from '../../../api/prices';
 import { formatDay } from '../../../components/formatDay';
 import { priceText } from '../../../components/priceText';
 import { STATE_LABELS } from '../pricesView';
+import { Table } from '../../../components/Table';
 import styles from './PartPrices.module.css';
 
 /** Each offer with its prices and what goes with them. */
 export function OfferTable({ offers }: { offers: readonly Offer[] }) {
   return (
-    <table className={styles.table}>
+    <Table stacks className={styles.table}>
       <thead>
         <tr>
           <th scope="col">Supplier</th>
@@ -23,7 +24,7 @@ export function OfferTable({ offers }: { offers: readonly Offer[] }) {
           <OfferRow key={offer.id} offer={offer} />
         ))}
       </tbody>
-    </table>
+    </Table>
   );
 }
 
