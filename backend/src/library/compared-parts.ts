@@ -7,25 +7,30 @@ export interface IdentifiedPart extends ComparedPart {
   id: number;
 }
 
-/** All but the retired ones: they are out of use already. */
-export function toComparedParts<Kind extends LibraryPart>(
+const PIECE = 1000;
+
+/** All but the retired ones, which are out of use already; made in pieces, so that other work can go on between them. */
+export function* toComparedParts<Kind extends LibraryPart>(
   { catalogue }: PartTable<Kind>,
   rows: readonly ListedRow[],
   isOwn: boolean,
-): IdentifiedPart[] {
+): Generator<void, IdentifiedPart[]> {
   const shared = sharedTexts();
-  const inUse = rows.filter(([, , , , , lifecycle, approval]) => !isRetired({ lifecycle, approval }));
   const nominal = catalogue.parameters.findIndex(({ key }) => key === catalogue.nominal);
-  return inUse.map((row) => {
-    const [id, manufacturer, partNumber, , packageName, , , choice] = row;
-    return {
+  const parts: IdentifiedPart[] = [];
+  for (const [place, row] of rows.entries()) {
+    if (place % PIECE === PIECE - 1) yield;
+    const [id, manufacturer, partNumber, , packageName, lifecycle, approval, choice] = row;
+    if (isRetired({ lifecycle, approval })) continue;
+    parts.push({
       id,
       manufacturer: shared(manufacturer),
       partNumber,
       package: shared(packageName),
-      figures: [shared(choice), ...catalogue.parameters.map((_, place) => figureAt(row, place))],
+      figures: [shared(choice), ...catalogue.parameters.map((_, figure) => figureAt(row, figure))],
       nominal: nominal < 0 ? null : figureAt(row, nominal),
       isOwn,
-    };
-  });
+    });
+  }
+  return parts;
 }

@@ -3,6 +3,7 @@ import { InjectDataSource } from '@nestjs/typeorm';
 import type { Library as LibraryName, LibraryPart, Lifecycle } from '@roothertz/common/parts';
 import { type DataSource, type EntityManager, IsNull } from 'typeorm';
 import type { Caller } from '../shared/access/caller.js';
+import { betweenOtherWork } from '../shared/work/between-other-work.js';
 import { type IdentifiedPart, toComparedParts } from './compared-parts.js';
 import { Library } from './entities/library.entity.js';
 import { type ListedResistor, toListedResistors } from './listed-resistors.js';
@@ -65,7 +66,8 @@ export class LibraryService {
     table: PartTable<Kind>,
     { id, library }: ReadableLibrary,
   ): Promise<IdentifiedPart[]> {
-    return toComparedParts(table, await readListedRows(this.dataSource, table, id), library === 'team');
+    const rows = await readListedRows(this.dataSource, table, id);
+    return betweenOtherWork(toComparedParts(table, rows, library === 'team'));
   }
 
   /** The resistors of a library that {@link readableLibraries} named; to be cached by its revision. */

@@ -2,9 +2,9 @@ import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
 import {
   type DuplicateReason,
-  findDuplicates,
   type LibraryPart,
   type PartKind,
+  searchDuplicates,
 } from '@roothertz/common/parts';
 import type { DataSource } from 'typeorm';
 import { AuditService, type Recorded } from '../audit/audit.service.js';
@@ -14,6 +14,7 @@ import { findReadableParts } from '../library/readable-parts.js';
 import { RevisionCache } from '../library/revision-cache.js';
 import type { Caller } from '../shared/access/caller.js';
 import { DomainError } from '../shared/errors/domain-error.js';
+import { betweenOtherWork } from '../shared/work/between-other-work.js';
 import { readId } from '../shared/ids/read-id.js';
 import type { List } from '../shared/list/list-response.js';
 import type { PartPairDto } from './dto/part-pair.dto.js';
@@ -97,7 +98,8 @@ export class DuplicatesService {
   ): Promise<FoundPair[]> {
     const loaded = libraries.map((library) => this.libraries.loadComparedParts(table, library));
     const parts = (await Promise.all(loaded)).flat();
-    return findDuplicates(parts).map(({ one, other, reasons, likelihood }) => ({
+    const pairs = await betweenOtherWork(searchDuplicates(parts));
+    return pairs.map(({ one, other, reasons, likelihood }) => ({
       oneId: parts[one].id,
       otherId: parts[other].id,
       reasons,

@@ -29,6 +29,7 @@ export interface DuplicatePair {
 const LARGEST_GROUP = 12;
 /** Fewer known figures can be equal by chance. */
 const LEAST_KNOWN = 3;
+const PIECE = 1000;
 
 /**
  * The pairs of parts that may be one: first those within the team's own library, then those of an own and a curated
@@ -37,6 +38,15 @@ const LEAST_KNOWN = 3;
  * that the effort grows with the number of parts and not with its square.
  */
 export function findDuplicates(parts: readonly ComparedPart[]): DuplicatePair[] {
+  const search = searchDuplicates(parts);
+  for (;;) {
+    const { done, value } = search.next();
+    if (done) return value;
+  }
+}
+
+/** The same search in pieces, so that who has other work as well can do it between them. */
+export function* searchDuplicates(parts: readonly ComparedPart[]): Generator<void, DuplicatePair[]> {
   const pairs = new Map<string, DuplicatePair>();
   const keep = (one: number, other: number, compare: Compare) => {
     if (!parts[one].isOwn && !parts[other].isOwn) return;
@@ -47,10 +57,12 @@ export function findDuplicates(parts: readonly ComparedPart[]): DuplicatePair[] 
     const reasons = compare(parts[one], parts[other]);
     if (reasons.length > 0) pairs.set(key, { ...pair, reasons, likelihood: likelihoodOf(reasons) });
   };
-  for (const group of groupsBy(parts, ({ partNumber }) => lookOf(baseNumber(partNumber))))
-    forEachPair(group, (one, other) => keep(one, other, byNumber));
-  for (const group of groupsBy(parts, figuresKey))
+  const alike = yield* groupsBy(parts, ({ partNumber }) => lookOf(baseNumber(partNumber)));
+  yield* inPieces(alike, (group) => forEachPair(group, (one, other) => keep(one, other, byNumber)));
+  const equal = yield* groupsBy(parts, figuresKeyer());
+  yield* inPieces(equal, (group) => {
     if (group.length <= LARGEST_GROUP) forEachPair(group, (one, other) => keep(one, other, byFigures));
+  });
   const strangeness = ({ one, other }: DuplicatePair) => (parts[one].isOwn && parts[other].isOwn ? 0 : 1);
   return [...pairs.values()].sort(
     (left, right) =>
@@ -99,15 +111,32 @@ function likelihoodOf(reasons: readonly DuplicateReason[]): number {
   return 1 - reasons.reduce((doubt, reason) => doubt * (1 - DUPLICATE_LIKELIHOODS[reason]), 1);
 }
 
-function figuresKey({ manufacturer, package: name, figures }: ComparedPart): string | null {
-  if (figures.filter((figure) => figure !== null).length < LEAST_KNOWN) return null;
-  return `${normaliseMaker(manufacturer)}|${lettersAndDigits(name)}|${figures.join('|')}`;
+function figuresKeyer(): (part: ComparedPart) => string | null {
+  const makers = remembered(normaliseMaker);
+  const packages = remembered(lettersAndDigits);
+  return ({ manufacturer, package: name, figures }) => {
+    if (figures.filter((figure) => figure !== null).length < LEAST_KNOWN) return null;
+    return `${makers(manufacturer)}|${packages(name)}|${figures.join('|')}`;
+  };
+}
+
+/** A library repeats few makers and packages in all its parts. */
+function remembered(read: (text: string) => string): (text: string) => string {
+  const known = new Map<string, string>();
+  return (text) => {
+    const result = known.get(text) ?? read(text);
+    known.set(text, result);
+    return result;
+  };
 }
 
 /** The places of parts of an equal key, where there are several; a key of null is equal to none. */
-function groupsBy(parts: readonly ComparedPart[], keyOf: (part: ComparedPart) => string | null): number[][] {
+function* groupsBy(
+  parts: readonly ComparedPart[],
+  keyOf: (part: ComparedPart) => string | null,
+): Generator<void, number[][]> {
   const groups = new Map<string, number[]>();
-  parts.forEach((part, place) => {
+  yield* inPieces(parts, (part, place) => {
     const key = keyOf(part);
     if (key === null) return;
     const group = groups.get(key);
@@ -115,6 +144,16 @@ function groupsBy(parts: readonly ComparedPart[], keyOf: (part: ComparedPart) =>
     else groups.set(key, [place]);
   });
   return [...groups.values()].filter(({ length }) => length > 1);
+}
+
+function* inPieces<Item>(
+  items: readonly Item[],
+  visit: (item: Item, place: number) => void,
+): Generator<void, void> {
+  for (let place = 0; place < items.length; place += 1) {
+    visit(items[place], place);
+    if (place % PIECE === PIECE - 1) yield;
+  }
 }
 
 function forEachPair(group: readonly number[], visit: (one: number, other: number) => void): void {

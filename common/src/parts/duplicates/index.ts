@@ -1,2 +1,2 @@
 export * from './duplicateReasons.js';
-export { findDuplicates, type ComparedPart, type DuplicatePair } from './findDuplicates.js';
+export { findDuplicates, searchDuplicates, type ComparedPart, type DuplicatePair } from './findDuplicates.js';
