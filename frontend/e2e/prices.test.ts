@@ -1,6 +1,6 @@
-import type { Browser, Page } from 'playwright-core';
+import type { Browser, Locator, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { launchBrowser, PHONE, visit, type Visit } from './support/browser';
+import { BASE_URL, launchBrowser, PHONE, visit, type Visit } from './support/browser';
 import { screenshot } from './support/screenshot';
 import { signIn } from './support/session';
 
@@ -39,6 +39,13 @@ const textOf = (row: number, column: string) => () => cell(row, column).textCont
 const button = (name: string | RegExp) => page.getByRole('button', { name });
 const press = (...keys: string[]) =>
   keys.reduce((done, key) => done.then(() => page.keyboard.press(key)), Promise.resolve());
+
+/** Goes on by a key until something has the focus. */
+async function go(key: 'Tab' | 'Shift+Tab', to: Locator) {
+  const isThere = () => to.evaluateAll((found) => found.includes(document.activeElement as HTMLElement));
+  for (let step = 0; step < 40 && !(await isThere()); step++) await press(key);
+  expect(await isThere()).toBe(true);
+}
 
 /** Prices that no other run has left here. */
 const fresh = () => (1 + (Date.now() % 1e6) / 1e7).toFixed(4);
@@ -101,6 +108,84 @@ describe('the prices page', () => {
     await expect.poll(textOf(last, 'stock')).toBe('4321, not saved yet');
     await button('Discard').click();
     await expect.poll(textOf(last, 'stock')).not.toContain('4321');
+    await end();
+  });
+
+  it('opens an offer of a new supplier by keyboard alone, closes it, takes that back and closes it again', async () => {
+    await start('purchasing', '/prices?search=TN-610');
+    const supplier = `Saltmarsh Parts ${Date.now()}`;
+    const row = page.locator('.ag-row', { hasText: supplier });
+
+    await page.getByRole('searchbox', { name: 'Search prices' }).focus();
+    await go('Tab', cell(0, 'part'));
+    await go('Shift+Tab', button('New offer for TN-610'));
+    await press('Enter');
+    await cell(0, 'supplier').getByRole('combobox').waitFor();
+    await page.keyboard.type(supplier);
+    await press('Tab', 'Tab', 'Tab');
+    await cell(0, 'price:1').getByRole('textbox').waitFor();
+    await page.keyboard.type('7.5');
+    await press('Enter');
+    await expect.poll(textOf(0, 'currency')).toBe('EUR');
+    await go('Tab', button(`Add the supplier “${supplier}”`));
+    await press('Enter');
+    await expect.poll(() => button(/^Save/).isEnabled()).toBe(true);
+    await go('Shift+Tab', cell(1, 'price:1'));
+    await press('Control+s');
+    await page.getByText('1 offer is saved').waitFor();
+    await expect.poll(() => row.locator('[col-id="price:1"]').textContent()).toBe('7.50');
+
+    await row.locator('[col-id="price:1"]').click();
+    await go('Shift+Tab', button('Close this offer'));
+    await press('Enter');
+    const closed = page
+      .getByRole('alert')
+      .filter({ hasText: `The offer of ${supplier} for TN-610 is closed` });
+    await closed.waitFor();
+    await row.first().waitFor({ state: 'detached' });
+    await closed.getByRole('button', { name: 'Undo' }).click();
+    await row.locator('[col-id="price:1"]').click();
+    await button('Close this offer').click();
+    await row.first().waitFor({ state: 'detached' });
+
+    await cell(0, 'price:1').click();
+    await button('Price history').click();
+    const latest = page
+      .getByRole('list', { name: 'Changes, the latest first' })
+      .getByRole('listitem')
+      .first();
+    await expect.poll(() => latest.textContent()).toMatch(new RegExp(`Amara Lindqvist ${supplier}: closed`));
+    await screenshot(page, 'prices-closed');
+    await end();
+  });
+
+  it('shows theirs beside mine where somebody was quicker', async () => {
+    await start('purchasing', '/prices?search=VR-1136', { expected: [409] });
+    const listed = await page.request.get('/api/prices?search=VR-1136');
+    const [{ offer }] = (await listed.json()).items;
+    const other = await visit(browser);
+    await signIn(other.page, 'admin');
+    const theirs = { rows: [{ id: offer.id, version: offer.version, stock: (offer.stock ?? 0) + 1 }] };
+    const saved = await other.page.request.put('/api/prices', {
+      data: theirs,
+      headers: { origin: BASE_URL },
+    });
+    expect(saved.status()).toBe(200);
+    await other.close();
+
+    await cell(0, 'price:1000').click();
+    await page.keyboard.type('0.0123');
+    await press('Enter');
+    await button('Save 1 change').click();
+    const table = page.getByRole('table', { name: 'Theirs and yours for VR-1136' });
+    await table
+      .getByRole('row', { name: `stock ${offer.stock ?? 'none'} ${(offer.stock ?? 0) + 1}` })
+      .waitFor();
+    expect(await table.getByRole('row', { name: /^at 1000 .* 0\.0123$/ }).count()).toBe(1);
+    await screenshot(page, 'prices-theirs-and-mine');
+    await button('Take theirs').click();
+    await table.waitFor({ state: 'detached' });
+    await expect.poll(() => button(/^Save/).isDisabled()).toBe(true);
     await end();
   });
 

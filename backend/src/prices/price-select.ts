@@ -84,12 +84,21 @@ export function filterPrices(
   return select;
 }
 
+/** What a change of its terms leaves an offer, so that it keeps its place; ids are the last resort. */
+const STANDING_ORDER = [
+  'part.manufacturer',
+  'part.partNumber',
+  'part.id',
+  'supplier.name',
+  'offer.supplierNumber',
+  'offer.id',
+];
+
 /** Sorts with unknown values last, and by name so that pages never overlap. */
 export function sortPrices(select: PriceSelect, { key, descending }: Sort<PriceSort>): PriceSelect {
   const column = sortColumn(select, key);
   select.orderBy(`${column} IS NULL`).addOrderBy(column, descending ? 'DESC' : 'ASC');
-  for (const next of ['part.manufacturer', 'part.partNumber', 'part.id', 'offer.id'])
-    if (next !== column) select.addOrderBy(next);
+  for (const next of STANDING_ORDER) if (next !== column) select.addOrderBy(next);
   return select;
 }
 

@@ -44,7 +44,7 @@ export function StateCell(params: Params) {
 }
 
 function StateWords({ row }: { row: ShownRow }) {
-  if (row.overrun) return <span className={styles.alarm}>{row.overrun} by others</span>;
+  if (row.overrun) return <Overrun word={row.overrun} />;
   if (row.offer === null)
     return <span className={styles.quiet}>{isAdded(row.key) ? 'new' : STATE_LABELS.missing}</span>;
   const { states } = row.offer;
@@ -52,6 +52,14 @@ function StateWords({ row }: { row: ShownRow }) {
   return (
     <span className={isAlarming ? styles.alarm : styles.caution}>
       {states.map((state) => STATE_LABELS[state]).join(', ')}
+    </span>
+  );
+}
+
+function Overrun({ word }: { word: string }) {
+  return (
+    <span className={styles.alarm} title={`${word} by somebody else`}>
+      {word}
     </span>
   );
 }

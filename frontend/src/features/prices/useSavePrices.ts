@@ -37,7 +37,7 @@ export function useSavePrices({ refuse, saved }: PriceDraft) {
       notification.error({
         title: 'Nothing is saved, nothing is lost',
         description: detailOf(error),
-        placement: 'bottomRight',
+        placement: 'topRight',
       });
       if (error instanceof ApiProblem) {
         const overruns = await findOverruns(rows, error);
