@@ -92,6 +92,8 @@ describe('findLevers', () => {
     ['halve-band', conditionsWith({ band: { lower: 15e3 }, referenceFrequency: 16e3 })],
     ['cool-source', conditionsWith({ source: { resistance: 0 } })],
     ['transformer', conditionsWith({ source: { resistance: 1e5 } })],
+    ['transformer', conditionsWith({ source: { resistance: 1, inductance: 100 } })],
+    ['halve-band', conditionsWith({ band: { lower: 1e4, upper: 2e4 + 1e-11 }, referenceFrequency: 1e4 })],
     ['quieter-part', stages['a low source resistance']],
     ['parallel', stages['a difference stage']],
     ['parallel', stages['an instrumentation stage']],
@@ -102,6 +104,13 @@ describe('findLevers', () => {
     ],
   ])('leaves out %s where it can’t help', (key, conditions) => {
     expect(keysOf(conditions)).not.toContain(key);
+  });
+
+  it('writes the ratio of a transformer in full', () => {
+    const conditions = conditionsWith({ source: { resistance: 1e-3 } });
+    const lever = findLevers(conditions, part).find(({ key }) => key === 'transformer')!;
+    expect(lever.ratio).toBeGreaterThan(1000);
+    expect(lever.label).toMatch(/^Step-up transformer 1:\d{4} \(ideal\)$/);
   });
 
   it('halves the direct output voltage, and with it the excess noise', () => {

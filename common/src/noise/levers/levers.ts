@@ -1,4 +1,5 @@
 import {
+  checkConditions,
   USUAL_DIFFERENCE_RESISTANCE,
   type OperatingConditions,
   type StageConditions,
@@ -49,7 +50,8 @@ type Proposal = Omit<Lever, 'change' | 'ratio'> & { ratio?: number };
 
 /**
  * The levers of a part in a stage, those that help most first: each is the stage evaluated anew at the
- * changed conditions. What doesn't apply to the stage, or can't be changed any further, is left out.
+ * changed conditions. What doesn't apply to the stage, or can't be changed any further, is left out, and so is what
+ * leads beyond the conditions that can be ranked.
  *
  * @param conditions free of `checkConditions` errors
  * @param quieter the next-quieter part of the ranking, where there is one
@@ -69,9 +71,14 @@ export function findLevers(conditions: OperatingConditions, part: LeverPart, qui
     quieter && quieterPart(conditions, quieter),
   ];
   return proposals
-    .flatMap((proposal) => (proposal ? [{ ratio: 1, ...proposal }] : []))
+    .flatMap((proposal) => (proposal && canBeRanked(proposal) ? [{ ratio: 1, ...proposal }] : []))
     .map((proposal) => ({ ...proposal, change: 20 * Math.log10(noiseOf(proposal) / now) }))
+    .filter(({ change }) => Number.isFinite(change))
     .sort((a, b) => a.change - b.change);
+}
+
+function canBeRanked({ conditions }: Proposal): boolean {
+  return checkConditions({ conditions }).length === 0;
 }
 
 function noiseOf({
@@ -216,7 +223,7 @@ function stepUp(conditions: OperatingConditions, amplifier: NoiseAmplifier): Pro
   if (!TRANSFORMABLE.includes(stage.topology) || !Number.isFinite(ratio) || ratio <= 1) return null;
   return {
     key: 'transformer',
-    label: `Step-up transformer 1:${ratio.toPrecision(2)} (ideal)`,
+    label: `Step-up transformer 1:${Number(ratio.toPrecision(2))} (ideal)`,
     sentence: `It shows the amplifier its optimum of ${show(optimum, 'resistance')}; a real one adds the noise of its windings.`,
     conditions: behindTransformer(conditions, ratio),
     amplifier,
