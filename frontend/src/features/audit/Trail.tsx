@@ -1,8 +1,9 @@
 import { useQuery } from '@tanstack/react-query';
-import { Button, Pagination, Skeleton } from 'antd';
+import { Button, Skeleton } from 'antd';
 import { useState } from 'react';
 import { AUDIT_PAGE, auditExportAddress, auditQuery } from '../../api/audit';
-import { detailOf } from '../../api/problem';
+import { LoadFailure } from '../../components/LoadFailure';
+import { Pages } from '../../components/Pages';
 import styles from './Trail.module.css';
 import { TrailFilters } from './TrailFilters';
 import { TrailTable } from './TrailTable';
@@ -29,9 +30,7 @@ export function Trail() {
         </a>
       </div>
       {error ? (
-        <p role="alert">
-          {detailOf(error)} <Button onClick={() => void refetch()}>Try again</Button>
-        </p>
+        <LoadFailure error={error} onRetry={refetch} />
       ) : data === undefined ? (
         <Skeleton title={false} paragraph={{ rows: 10, width: '100%' }} />
       ) : data.total === 0 ? (
@@ -46,16 +45,8 @@ export function Trail() {
       ) : (
         <TrailTable entries={data.items} />
       )}
-      {data !== undefined && data.total > AUDIT_PAGE && (
-        <Pagination
-          size="small"
-          current={page}
-          pageSize={AUDIT_PAGE}
-          total={data.total}
-          showSizeChanger={false}
-          showTotal={(total, [from, to]) => `${from}–${to} of ${total}`}
-          onChange={setPage}
-        />
+      {data !== undefined && (
+        <Pages page={page} pageSize={AUDIT_PAGE} total={data.total} onChange={setPage} />
       )}
     </>
   );

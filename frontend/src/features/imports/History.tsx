@@ -1,8 +1,9 @@
 import { useQuery } from '@tanstack/react-query';
-import { Button, Pagination, Skeleton } from 'antd';
+import { Skeleton } from 'antd';
 import { useState } from 'react';
 import { importsQuery } from '../../api/imports';
-import { detailOf } from '../../api/problem';
+import { LoadFailure } from '../../components/LoadFailure';
+import { Pages } from '../../components/Pages';
 import { Table } from '../../components/Table';
 import styles from './History.module.css';
 import { HistoryRow } from './HistoryRow';
@@ -14,12 +15,7 @@ const COLUMNS = ['file', 'read by', 'new', 'changed', 'unchanged', 'doubtful', '
 export function History() {
   const [page, setPage] = useState(1);
   const { data, error, refetch } = useQuery(importsQuery(page));
-  if (error)
-    return (
-      <p role="alert">
-        {detailOf(error)} <Button onClick={() => void refetch()}>Try again</Button>
-      </p>
-    );
+  if (error) return <LoadFailure error={error} onRetry={refetch} />;
   if (data === undefined) return <Skeleton title={false} paragraph={{ rows: 6, width: '100%' }} />;
   if (data.total === 0)
     return (
@@ -45,16 +41,7 @@ export function History() {
           </tbody>
         </Table>
       </div>
-      {data.total > PAGE && (
-        <Pagination
-          size="small"
-          current={page}
-          pageSize={PAGE}
-          total={data.total}
-          showSizeChanger={false}
-          onChange={setPage}
-        />
-      )}
+      <Pages page={page} pageSize={PAGE} total={data.total} onChange={setPage} />
     </>
   );
 }

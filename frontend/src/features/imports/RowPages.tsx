@@ -1,9 +1,9 @@
 import { keepPreviousData, useQuery } from '@tanstack/react-query';
-import { Button, Pagination, Skeleton } from 'antd';
+import { Skeleton } from 'antd';
 import { useState } from 'react';
 import { type Import, importRowsQuery, type RowList } from '../../api/imports';
-import { detailOf } from '../../api/problem';
-import { count } from './importWords';
+import { LoadFailure } from '../../components/LoadFailure';
+import { Pages } from '../../components/Pages';
 import { KINDS } from './kinds';
 import { RefusedTable } from './RefusedTable';
 import { RowsTable } from './RowsTable';
@@ -32,12 +32,7 @@ export function RowPages({ imported: { id, kind }, list, limit }: RowPagesProps)
   const [page, setPage] = useState(1);
   const query = importRowsQuery(id, { list, limit, offset: (page - 1) * limit });
   const { data, error, refetch } = useQuery({ ...query, placeholderData: keepPreviousData });
-  if (error)
-    return (
-      <p role="alert">
-        {detailOf(error)} <Button onClick={() => void refetch()}>Try again</Button>
-      </p>
-    );
+  if (error) return <LoadFailure error={error} onRetry={refetch} />;
   if (data === undefined) return <Skeleton title={false} paragraph={{ rows: 6, width: '100%' }} />;
   if (data.items.length === 0) return <p className={styles.nothing}>{nothing(list, KINDS[kind].row)}</p>;
   return (
@@ -49,18 +44,7 @@ export function RowPages({ imported: { id, kind }, list, limit }: RowPagesProps)
           <RowsTable view={KINDS[kind].view} rows={data.items} />
         )}
       </div>
-      {data.total > limit && (
-        <Pagination
-          size="small"
-          className={styles.pages}
-          current={page}
-          pageSize={limit}
-          total={data.total}
-          showSizeChanger={false}
-          showTotal={(total, [from, to]) => `${count(from)}–${count(to)} of ${count(total)}`}
-          onChange={setPage}
-        />
-      )}
+      <Pages page={page} pageSize={limit} total={data.total} onChange={setPage} className={styles.pages} />
     </>
   );
 }

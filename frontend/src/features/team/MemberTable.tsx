@@ -1,7 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
-import { Button, Skeleton } from 'antd';
-import { detailOf } from '../../api/problem';
+import { Skeleton } from 'antd';
 import { teamMembersQuery } from '../../api/team';
+import { LoadFailure } from '../../components/LoadFailure';
 import { useFocusAfterLoss } from '../../components/lostFocus';
 import { Table } from '../../components/Table';
 import { MemberRow } from './MemberRow';
@@ -11,12 +11,7 @@ import styles from './Team.module.css';
 export function MemberTable({ mayManage }: { mayManage: boolean }) {
   const { data, error, refetch } = useQuery(teamMembersQuery);
   const heading = useFocusAfterLoss<HTMLHeadingElement>(data?.length ?? 0);
-  if (error)
-    return (
-      <p role="alert">
-        {detailOf(error)} <Button onClick={() => void refetch()}>Try again</Button>
-      </p>
-    );
+  if (error) return <LoadFailure error={error} onRetry={refetch} />;
   if (data === undefined) return <Skeleton title={false} paragraph={{ rows: 5, width: '100%' }} />;
   return (
     <section className={styles.section} aria-label="Members">

@@ -1,11 +1,11 @@
 import { useQuery } from '@tanstack/react-query';
-import { Button, Skeleton } from 'antd';
+import { Skeleton } from 'antd';
 import { useState } from 'react';
 import { duplicatesQuery } from '../../api/parts';
-import { detailOf } from '../../api/problem';
 import { countOf } from '../../features/parts/countOf';
 import { DuplicatesList } from '../../features/parts/duplicates/DuplicatesList';
 import type { KindOfPart } from '../../features/parts/kindOfPart';
+import { LoadFailure } from '../../components/LoadFailure';
 import { PartsHead } from './PartsHead';
 import styles from './PartsPage.module.css';
 
@@ -26,9 +26,7 @@ export function DuplicatesPage({ kind }: { kind: KindOfPart }) {
         facts={data && data.total > 0 && `${countOf(data.total, 'pair')} of parts that may be one`}
       />
       {error ? (
-        <p role="alert">
-          {detailOf(error)} <Button onClick={() => void refetch()}>Try again</Button>
-        </p>
+        <LoadFailure error={error} onRetry={refetch} />
       ) : data === undefined ? (
         <Skeleton title={false} paragraph={{ rows: 12, width: '100%' }} />
       ) : data.total === 0 ? (

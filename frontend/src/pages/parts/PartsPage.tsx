@@ -1,5 +1,4 @@
-import { Button, Skeleton } from 'antd';
-import { detailOf } from '../../api/problem';
+import { Skeleton } from 'antd';
 import type { KindOfPart } from '../../features/parts/kindOfPart';
 import { NoParts } from '../../features/parts/NoParts';
 import { partsFacts } from '../../features/parts/partsFacts';
@@ -8,6 +7,7 @@ import { ChosenParts } from '../../features/parts/ChosenParts';
 import { filterOf, isNarrowed, narrowingKeys } from '../../features/parts/partsView';
 import { usePartsList } from '../../features/parts/usePartsList';
 import { usePartsView } from '../../features/parts/usePartsView';
+import { LoadFailure } from '../../components/LoadFailure';
 import { PartsHead } from './PartsHead';
 import styles from './PartsPage.module.css';
 
@@ -26,9 +26,7 @@ export function PartsPage({ kind }: { kind: KindOfPart }) {
       />
       <PartsFilters kind={kind} view={view} change={change} />
       {list.error ? (
-        <p role="alert">
-          {detailOf(list.error)} <Button onClick={list.retry}>Try again</Button>
-        </p>
+        <LoadFailure error={list.error} onRetry={list.retry} />
       ) : list.isPending ? (
         <Skeleton title={false} paragraph={{ rows: 12, width: '100%' }} />
       ) : list.parts.length === 0 ? (

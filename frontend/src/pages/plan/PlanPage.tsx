@@ -3,7 +3,7 @@ import { Button, Skeleton } from 'antd';
 import type { ReactNode } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import { billingQuery, syncedBillingQuery } from '../../api/billing';
-import { detailOf } from '../../api/problem';
+import { LoadFailure } from '../../components/LoadFailure';
 import { useMayDo, useMember } from '../../components/useMember';
 import { BillingActs } from '../../features/billing/BillingActs';
 import { BillingFacts } from '../../features/billing/BillingFacts';
@@ -34,9 +34,7 @@ function AdminPlan() {
     return (
       <Page title="Plan">
         {error ? (
-          <p role="alert">
-            {detailOf(error)} <Button onClick={() => void refetch()}>Try again</Button>
-          </p>
+          <LoadFailure error={error} onRetry={refetch} />
         ) : (
           <Skeleton title={false} paragraph={{ rows: 6, width: '100%' }} />
         )}

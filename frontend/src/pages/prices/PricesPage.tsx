@@ -1,6 +1,5 @@
 import { Button, Skeleton } from 'antd';
 import { useState } from 'react';
-import { detailOf } from '../../api/problem';
 import { NoPrices } from '../../features/prices/NoPrices';
 import { PricesFacts } from '../../features/prices/PricesFacts';
 import { PricesFilters } from '../../features/prices/PricesFilters';
@@ -9,6 +8,7 @@ import { PricesWork } from '../../features/prices/PricesWork';
 import { PriceSettingsDrawer } from '../../features/prices/settings/PriceSettingsDrawer';
 import { usePriceList } from '../../features/prices/usePriceList';
 import { usePricesView } from '../../features/prices/usePricesView';
+import { LoadFailure } from '../../components/LoadFailure';
 import styles from './PricesPage.module.css';
 
 const EVERYTHING = Object.fromEntries(NARROWING_KEYS.map((key) => [key, undefined]));
@@ -32,11 +32,7 @@ export function PricesPage() {
             Only one part is shown. <Button onClick={() => change(EVERYTHING)}>Show all offers</Button>
           </p>
         )}
-        {error && (
-          <p role="alert" className={styles.note}>
-            {detailOf(error)} <Button onClick={retry}>Try again</Button>
-          </p>
-        )}
+        {error && <LoadFailure error={error} onRetry={retry} className={styles.note} />}
       </div>
       {list ? (
         <PricesWork

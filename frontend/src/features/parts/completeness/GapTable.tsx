@@ -1,12 +1,12 @@
 import { useQuery } from '@tanstack/react-query';
-import { Button, Pagination, Skeleton } from 'antd';
+import { Skeleton } from 'antd';
 import { useState } from 'react';
 import { partsQuery } from '../../../api/parts';
-import { detailOf } from '../../../api/problem';
-import { grouped } from '../countOf';
+import { LoadFailure } from '../../../components/LoadFailure';
+import { Pages } from '../../../components/Pages';
+import { Table } from '../../../components/Table';
 import type { KindOfPart } from '../kindOfPart';
 import type { PartsView } from '../partsView';
-import { Table } from '../../../components/Table';
 import styles from './Completeness.module.css';
 import { GapRow } from './GapRow';
 
@@ -23,12 +23,7 @@ export function GapTable({ kind, view }: GapTableProps) {
   const [page, setPage] = useState(1);
   const query = { sort: 'completeness', ...view, limit: PAGE, offset: (page - 1) * PAGE };
   const { data, error, refetch } = useQuery({ ...partsQuery(kind.reader, query), staleTime: Infinity });
-  if (error)
-    return (
-      <p role="alert">
-        {detailOf(error)} <Button onClick={() => void refetch()}>Try again</Button>
-      </p>
-    );
+  if (error) return <LoadFailure error={error} onRetry={refetch} />;
   if (data === undefined) return <Skeleton title={false} paragraph={{ rows: 12, width: '100%' }} />;
   if (data.total === 0) return <p>No part matches, or none lacks what you asked for.</p>;
   return (
@@ -54,17 +49,7 @@ export function GapTable({ kind, view }: GapTableProps) {
           </tbody>
         </Table>
       </div>
-      {data.total > PAGE && (
-        <Pagination
-          size="small"
-          current={page}
-          pageSize={PAGE}
-          total={data.total}
-          showSizeChanger={false}
-          showTotal={(total, [from, to]) => `${grouped(from)}–${grouped(to)} of ${grouped(total)}`}
-          onChange={setPage}
-        />
-      )}
+      <Pages page={page} pageSize={PAGE} total={data.total} onChange={setPage} />
     </>
   );
 }

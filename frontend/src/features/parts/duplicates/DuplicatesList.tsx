@@ -1,6 +1,5 @@
-import { Pagination } from 'antd';
 import type { Duplicate } from '../../../api/parts';
-import { grouped } from '../countOf';
+import { Pages } from '../../../components/Pages';
 import type { KindOfPart } from '../kindOfPart';
 import { DuplicatePair } from './DuplicatePair';
 
@@ -20,17 +19,7 @@ export function DuplicatesList({ kind, pairs, total, page, pageSize, onPage }: D
       {pairs.map((pair) => (
         <DuplicatePair key={`${pair.one.id} ${pair.other.id}`} kind={kind} pair={pair} />
       ))}
-      {total > pageSize && (
-        <Pagination
-          size="small"
-          current={page}
-          pageSize={pageSize}
-          total={total}
-          showSizeChanger={false}
-          showTotal={(all, [from, to]) => `${grouped(from)}–${grouped(to)} of ${grouped(all)}`}
-          onChange={onPage}
-        />
-      )}
+      <Pages page={page} pageSize={pageSize} total={total} onChange={onPage} />
     </>
   );
 }
