@@ -7,7 +7,7 @@ import { nameKey } from '../shared/text/name-key.js';
 import { Offer } from './entities/offer.entity.js';
 import type { OfferRow } from './offer-drafts.js';
 import { offerKey } from './offer-key.js';
-import { closeOffers, insertOffers } from './offer-rows.js';
+import { closeOffers, insertOffers, type NewOffer } from './offer-rows.js';
 import { OfferSaver } from './offer-saver.service.js';
 import { findOffers, selectOffers } from './offer-select.js';
 import { objectOf, termsOf } from './offer-terms.js';
@@ -113,7 +113,6 @@ export class QuotedOffers {
     caller: Caller,
     written: readonly WrittenOffer[],
   ): Promise<Set<number>> {
-    const { teamId, userId } = caller;
     const ids = written.flatMap(({ id, before }) => (before === null ? [id] : [id, before]));
     const offers = await findOffers(manager, caller, ids);
     const others = await otherKeys(manager, caller, [...offers.values()], written);
@@ -122,34 +121,15 @@ export class QuotedOffers {
       return isUntouched(offers.get(id)) && !(previous && others.has(offerKey(previous)));
     });
     const now = new Date();
-    await closeOffers(
-      manager,
-      taken.map(({ id }) => id),
-      userId,
-      now,
-    );
+    const takenIds = taken.map(({ id }) => id);
+    await closeOffers(manager, takenIds, caller.userId, now);
     const restored = taken.flatMap(({ id, before }) => {
       const [offer, previous] = [offers.get(id)!, offers.get(before ?? 0)];
       return previous ? [{ offer, previous }] : [];
     });
     const opened = await insertOffers(
       manager,
-      restored.map(({ offer, previous }) => {
-        const { partId, supplierId, confirmedAt, confirmedById } = previous;
-        const version = offer.version + 1;
-        const terms = termsOf(previous);
-        return {
-          teamId,
-          userId,
-          partId,
-          supplierId,
-          terms,
-          version,
-          confirmedAt,
-          confirmedById,
-          openedAt: now,
-        };
-      }),
+      restored.map((one) => toReopened(caller, one, now)),
     );
     const reopened = new Map(restored.map(({ offer }, index) => [offer.id, opened[index]]));
     await this.audit.record(
@@ -157,7 +137,7 @@ export class QuotedOffers {
       caller,
       taken.map(({ id, before }) => toRecorded(offers.get(id)!, offers.get(before ?? 0), reopened.get(id))),
     );
-    const gone = new Set(taken.map(({ id }) => id));
+    const gone = new Set(takenIds);
     return new Set(written.map(({ id }) => id).filter((id) => !gone.has(id)));
   }
 
@@ -190,6 +170,18 @@ async function otherKeys(
   const own = new Set(written.map(({ id }) => id));
   const standing = await manager.findBy(Offer, { teamId, partId, closedAt: IsNull() });
   return new Set(standing.filter(({ id }) => !own.has(id)).map(offerKey));
+}
+
+/** The offer that stood before, opened anew in place of the one that was written. */
+function toReopened(
+  { teamId, userId }: Caller,
+  { offer, previous }: { offer: Offer; previous: Offer },
+  openedAt: Date,
+): NewOffer {
+  const { partId, supplierId, confirmedAt, confirmedById } = previous;
+  const version = offer.version + 1;
+  const terms = termsOf(previous);
+  return { teamId, userId, partId, supplierId, terms, version, confirmedAt, confirmedById, openedAt };
 }
 
 function toRecorded(offer: Offer, previous: Offer | undefined, reopened: number | undefined): Recorded {
