@@ -42,6 +42,14 @@ async function openNewTeam(page: Page): Promise<void> {
   await page.getByRole('button', { name: 'Sign in' }).click();
 }
 
+/** Lets time pass at the stand-in of the payment service, whose page is at an address. */
+async function letPass(page: Page, address: string, span: string): Promise<void> {
+  await page.goto(new URL('/', address).href);
+  const answered = page.waitForResponse(/\/control\/clock$/);
+  await page.getByRole('button', { name: `Let ${span} pass` }).click();
+  await answered;
+}
+
 const shows = (page: Page, headline: string | RegExp) =>
   page.getByRole('heading', { level: 1, name: headline }).waitFor();
 
@@ -84,6 +92,42 @@ describe('the plan', () => {
     await page.getByRole('link', { name: 'Parts' }).click();
     await page.getByText('Read-only, for the plan is cancelled').waitFor();
     expect(await page.getByRole('link', { name: 'New op-amp' }).count()).toBe(0);
+    expect(problems).toEqual([]);
+    await close();
+  });
+  it('is past due for two weeks when a card fails, then read-only until it is paid', async () => {
+    const { page, problems, close } = await visit(browser, { expected: [402] });
+    await openNewTeam(page);
+    await page.getByRole('button', { name: 'Go to payment' }).click();
+    await page.getByLabel('A card that pays once').check();
+    await page.getByRole('button', { name: /^Pay / }).click();
+    await shows(page, 'Team plan, one seat');
+    await page.getByRole('button', { name: 'Card and cancellation' }).click();
+    await page.getByRole('heading', { name: 'Your subscription' }).waitFor();
+    const portal = page.url();
+
+    await letPass(page, portal, '31 days');
+    await page.goto('/team/plan?from=portal');
+    await shows(page, 'Team plan: a payment is missing');
+    await page.getByRole('link', { name: 'Parts' }).click();
+    await page
+      .getByText(/A payment for the team’s plan is missing: the team is read-only in \d+ days/)
+      .waitFor();
+    await page.getByRole('link', { name: 'New op-amp' }).waitFor();
+    await screenshot(page, 'plan-past-due');
+
+    await letPass(page, portal, '15 days');
+    await page.goto('/team/plan?from=portal');
+    await shows(page, 'Read-only: a payment is missing');
+    await page.goto('/parts/new');
+    await page.getByText('Your team is read-only now').waitFor();
+    await screenshot(page, 'plan-read-only');
+
+    await page.goto(portal);
+    await page.getByLabel('A card that pays', { exact: true }).check();
+    await page.getByRole('button', { name: 'Use this card, and pay what is open' }).click();
+    await page.getByRole('link', { name: 'Back to the application' }).click();
+    await shows(page, 'Team plan, one seat');
     expect(problems).toEqual([]);
     await close();
   });

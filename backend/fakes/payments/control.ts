@@ -49,7 +49,8 @@ function controlPage(now: number, { duplicate, reverse, failNext }: Switches, su
     form('/control/switches', `Turn ${on ? 'off' : 'on'}`, hidden(name, String(!on)));
   return page(
     'What it does',
-    paragraph(`By its clock it is ${day(now)}. It keeps ${subscriptions} subscriptions.`),
+    paragraph(`It keeps ${subscriptions} subscriptions, and it is ${day(now)}.`),
+    paragraph('When time passes here, what falls due happens, and all that it keeps is so much older.'),
     ...SPANS.map(([days, label]) =>
       form('/control/clock', `Let ${label} pass`, hidden('days', String(days))),
     ),

@@ -9,11 +9,48 @@ interface Due {
   act: () => void;
 }
 
-/** Lets time pass: everything that falls due until then happens at its own moment, in order. */
+/**
+ * Lets time pass: everything that falls due until then happens at its own moment, in order. The application goes by the
+ * machine's clock, so the stand-in's comes back to it, and what it keeps is so much older instead.
+ */
 export function advance(state: State, seconds: number): void {
   const until = state.now + seconds;
   for (let due = nextDue(state, until); due; due = nextDue(state, until)) due.act();
   state.data.ahead += seconds;
+  if (state.data.ahead > 0) makeOlder(state);
+}
+
+/** Everything that says when something was or will be. */
+const MOMENTS: ReadonlySet<string> = new Set([
+  'created',
+  'current_period_start',
+  'current_period_end',
+  'cancel_at',
+  'canceled_at',
+  'ended_at',
+  'next_payment_attempt',
+  'period_start',
+  'period_end',
+  'start',
+  'end',
+  'finalized_at',
+  'paid_at',
+  'subscription_proration_date',
+]);
+
+function makeOlder(state: State): void {
+  const { ahead, customers, sessions, subscriptions, invoices, portals, events } = state.data;
+  moveMoments({ customers, sessions, subscriptions, invoices, portals, events }, -ahead);
+  state.data.ahead = 0;
+  for (const subscription of Object.values(subscriptions))
+    if (subscription.status !== 'canceled') state.emit('customer.subscription.updated', subscription);
+}
+
+function moveMoments(kept: object, seconds: number): void {
+  for (const [key, value] of Object.entries(kept)) {
+    if (typeof value === 'object' && value !== null) moveMoments(value as object, seconds);
+    else if (typeof value === 'number' && MOMENTS.has(key)) Object.assign(kept, { [key]: value + seconds });
+  }
 }
 
 function nextDue(state: State, until: number): Due | undefined {

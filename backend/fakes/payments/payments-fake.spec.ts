@@ -144,6 +144,11 @@ describe('the stand-in of the payment service, through its official SDK', () => 
     await fake.letDaysPass(32);
     expect(await stripe.subscriptions.retrieve(id)).toMatchObject({ status: 'past_due' });
     expect(types()).toContain('invoice.payment_failed');
+    await fake.letDaysPass(15);
+    const [open] = (await stripe.invoices.list({ subscription: id, status: 'open' })).data;
+    const daysOpen = (Date.now() / 1000 - Number(open.status_transitions.finalized_at)) / DAY;
+    expect(daysOpen).toBeGreaterThan(15);
+    expect(daysOpen).toBeLessThan(20);
     const { url } = await stripe.billingPortal.sessions.create({ customer });
     expect(await (await fetch(url)).text()).toContain('past due');
     await post(`${url}/card`, { card: 'pays' });
@@ -162,7 +167,7 @@ describe('the stand-in of the payment service, through its official SDK', () => 
     await fake.letDaysPass(32);
     expect(await stripe.subscriptions.retrieve(id)).toMatchObject({
       status: 'canceled',
-      ended_at: cancelled.cancel_at,
+      ended_at: Number(cancelled.cancel_at) - 32 * DAY,
     });
     expect(types().at(-1)).toBe('customer.subscription.deleted');
   });

@@ -35,7 +35,7 @@ export interface Reply {
 
 /** Everything that the stand-in keeps. */
 export interface Data {
-  /** Seconds by which its clock is ahead of the machine's. */
+  /** Seconds by which its clock is ahead of the machine's, or below zero behind it. */
   ahead: number;
   customers: Record<string, Customer>;
   cards: Record<string, Card>;

@@ -1,8 +1,9 @@
-import { daysLeft, mayDo } from '@roothertz/common/access';
+import { daysLeft } from '@roothertz/common/access';
 import { Alert } from 'antd';
-import { Link, useLocation } from 'react-router-dom';
+import { useLocation } from 'react-router-dom';
 import type { Session } from '../api/session';
 import { useMember } from '../components/useMember';
+import { SeeToPlan } from '../components/WhyNot';
 
 const PLAN_PAGE = '/team/plan';
 /** A trial is mentioned on every page when so few days are left. */
@@ -20,12 +21,7 @@ export function PlanNotice() {
       type="warning"
       title={
         <>
-          {text}{' '}
-          {mayDo(member.roles, 'billing.manage') ? (
-            <Link to={PLAN_PAGE}>See to the plan</Link>
-          ) : (
-            'A team admin can see to it.'
-          )}
+          {text} <SeeToPlan />
         </>
       }
     />

@@ -1,5 +1,6 @@
 import { Button } from 'antd';
 import { useMayDo } from '../../components/useMember';
+import { WhyNot } from '../../components/WhyNot';
 
 interface NoPricesProps {
   /** A search or a filter hides offers. */
@@ -17,7 +18,17 @@ export function NoPrices({ isNarrowed, onShowAll, onShowMissing }: NoPricesProps
         Nothing matches. <InlineButton onClick={onShowAll}>Show all offers</InlineButton>.
       </p>
     );
-  if (!mayEdit) return <p>There are no prices yet. Purchasing or an admin of your team can enter them.</p>;
+  if (!mayEdit)
+    return (
+      <p>
+        There are no prices yet.{' '}
+        <WhyNot
+          action="prices.edit"
+          byRole="Purchasing or an admin of your team can enter them."
+          byPlan="Your team’s plan has none; the Team plan has them."
+        />
+      </p>
+    );
   return (
     <p>
       There are no prices yet.{' '}

@@ -7,10 +7,12 @@ import { useSignIn } from './useSignIn';
 
 interface SignInFormProps {
   /** What is done with the session; left out = all that was loaded before it is forgotten. */
-  take?: (queryClient: QueryClient, session: Session) => void;
+  take?: (queryClient: QueryClient, session: Session) => void | Promise<void>;
+  /** Who is expected, where that is known. */
+  email?: string;
 }
 
-export function SignInForm({ take }: SignInFormProps) {
+export function SignInForm({ take, email }: SignInFormProps) {
   const { signIn, isPending, error, wait } = useSignIn(take);
   const message = signInMessage(error, wait);
   return (
@@ -18,6 +20,7 @@ export function SignInForm({ take }: SignInFormProps) {
       name="sign-in"
       layout="vertical"
       requiredMark={false}
+      initialValues={{ email }}
       onFinish={(credentials) => signIn(credentials)}
       aria-label="Sign in"
     >
@@ -31,7 +34,7 @@ export function SignInForm({ take }: SignInFormProps) {
         label="E-mail"
         rules={[{ required: true, whitespace: true, message: 'Your e-mail address is needed' }]}
       >
-        <Input type="email" autoComplete="username" autoFocus />
+        <Input type="email" autoComplete="username" autoFocus={email === undefined} />
       </Form.Item>
       <Form.Item
         name="password"
@@ -43,7 +46,7 @@ export function SignInForm({ take }: SignInFormProps) {
           </Link>
         }
       >
-        <Input.Password autoComplete="current-password" />
+        <Input.Password autoComplete="current-password" autoFocus={email !== undefined} />
       </Form.Item>
       <Button type="primary" htmlType="submit" block disabled={wait > 0} loading={isPending}>
         Sign in

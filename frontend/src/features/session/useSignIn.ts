@@ -10,7 +10,9 @@ const LEAST_WAIT = 5;
  *
  * @param take what is done with the session
  */
-export function useSignIn(take: (queryClient: QueryClient, session: Session) => void = takeSession) {
+export function useSignIn(
+  take: (queryClient: QueryClient, session: Session) => void | Promise<void> = takeSession,
+) {
   const queryClient = useQueryClient();
   const [wait, beginWait] = useCountdown();
   const mutation = useMutation({

@@ -72,11 +72,12 @@ describe('the account page', () => {
     await userEvent.click(await screen.findByRole('button', { name: 'Change: Name' }));
     await userEvent.type(screen.getByLabelText('Your name'), ' the Second{Enter}');
     const dialog = within(await screen.findByRole('dialog', { name: 'Your session is over' }));
-    await userEvent.type(dialog.getByLabelText('E-mail'), 'engineer@tarnfield.example');
+    expect(dialog.getByLabelText('E-mail')).toHaveValue('engineer@tarnfield.example');
     isOver = false;
     await userEvent.type(dialog.getByLabelText('Password'), 'quiet-bench-2026{Enter}');
     await expect.poll(() => screen.queryByRole('dialog')).toBeNull();
     expect(screen.getByLabelText('Your name')).toHaveValue('Ada Merrow the Second');
+    expect(screen.getByLabelText('Your name')).toHaveFocus();
     await userEvent.click(screen.getByRole('button', { name: 'Save the name' }));
     expect(await screen.findByText('Saved.')).toBeInTheDocument();
   });
