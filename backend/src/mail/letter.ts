@@ -3,12 +3,18 @@ export interface Letter {
   subject: string;
   /** Plain sentences: nothing in them is read as HTML. */
   paragraphs: string[];
-  /** A list below the paragraphs. */
-  items?: string[];
+  /** Lists below the paragraphs. */
+  lists?: LetterList[];
   /** The one thing to do; `path` is an address of the application's own, such as `/prices`. */
   link?: { label: string; path: string };
   /** What to know about the message itself, in small print. */
   remark?: string;
+}
+
+export interface LetterList {
+  /** What its items have in common; left out = the paragraphs say it. */
+  heading?: string;
+  items: string[];
 }
 
 /** What the layout adds to a letter. */

@@ -1,5 +1,6 @@
-import { dayOf, EXPIRING_DAYS, type Offer } from '@roothertz/common/prices';
-import type { Letter } from '../mail/letter.js';
+import { EXPIRING_DAYS, type Offer } from '@roothertz/common/prices';
+import type { Letter, LetterList } from '../mail/letter.js';
+import { dayText } from '../shared/text/day-text.js';
 import { moneyText } from './money-text.js';
 
 /** An offer that calls for a look. */
@@ -24,16 +25,30 @@ export interface Digest {
 }
 
 export function digestLetter(digest: Digest): Letter {
-  const { team, counts, expiring, stale } = digest;
-  const isCut = expiring.length < counts.expiring || stale.length < counts.stale;
-  const items = [...expiring.map(endingSentence), ...stale.map(staleSentence)];
+  const { team, counts } = digest;
   return {
     subject: `Prices of ${team}: ${[staleWords(counts.stale), endingWords(counts.expiring)].filter(Boolean).join(', ')}`,
     paragraphs: paragraphsOf(digest),
-    items: isCut ? [...items, 'and more, in the list of prices'] : items,
+    lists: listsOf(digest),
     link: { label: 'Open these prices', path: '/prices?state=stale,expiring' },
     remark: 'Sent each Monday on which there are such prices, to those who keep them.',
   };
+}
+
+function listsOf({ counts, expiring, stale }: Digest): LetterList[] {
+  const ending = listOf(expiring.map(endingSentence), counts.expiring, 'Ending soon', 'end first');
+  const old = listOf(
+    stale.map(staleSentence),
+    counts.stale,
+    'Not confirmed for long',
+    'were confirmed longest ago',
+  );
+  return [ending, old].filter(({ items }) => items.length > 0);
+}
+
+/** What all have in common stands above them, or what the first ones do where there are more. */
+function listOf(items: string[], count: number, all: string, first: string): LetterList {
+  return { heading: items.length < count ? `The ${items.length} of ${count} that ${first}` : all, items };
 }
 
 function paragraphsOf({ counts: { stale, expiring, expired }, staleAfterDays }: Digest): string[] {
@@ -47,11 +62,11 @@ function paragraphsOf({ counts: { stale, expiring, expired }, staleAfterDays }: 
 }
 
 function endingSentence(offer: ListedOffer): string {
-  return `${offerWords(offer)}, ends on ${offer.validUntil}`;
+  return `${offerWords(offer)}, ends on ${dayText(new Date(offer.validUntil!))}`;
 }
 
 function staleSentence(offer: ListedOffer): string {
-  return `${offerWords(offer)}, last confirmed on ${dayOf(new Date(offer.confirmedAt))}`;
+  return `${offerWords(offer)}, last confirmed on ${dayText(new Date(offer.confirmedAt))}`;
 }
 
 function offerWords({ part, supplier, breaks: [first], currency }: ListedOffer): string {

@@ -31,7 +31,7 @@ describe('a notice of parts', () => {
     ]);
     expect(letter.subject).toBe('OX-27 by Acme is now obsolete');
     expect(letter.link).toEqual({ label: 'Open OX-27', path: '/parts/7' });
-    expect(letter.items).toHaveLength(2);
+    expect(letter.lists![0].items).toHaveLength(2);
     expect(partLetter('Weir', [part({ kind: 'resistor' })]).link?.path).toBe('/parts/resistors/7');
   });
 
@@ -41,8 +41,8 @@ describe('a notice of parts', () => {
       Array.from({ length: 60 }, (_, id) => part({ id })),
     );
     expect(letter.subject).toBe('60 parts in your saved conditions have changed');
-    expect(letter.items).toHaveLength(51);
-    expect(letter.items!.at(-1)).toBe('and 10 more');
+    expect(letter.lists![0].items).toHaveLength(51);
+    expect(letter.lists![0].items.at(-1)).toBe('and 10 more');
   });
 });
 
@@ -69,9 +69,15 @@ describe('a digest of prices', () => {
     expect(digestLetter(digest())).toMatchObject({
       subject: 'Prices of Weir & Sons: 1 stale, 1 ending soon',
       paragraphs: ['One offer was last confirmed more than 90 days ago. One offer ends within 30 days.'],
-      items: [
-        'OX-27 by Acme, from Fenway at 4.20 EUR for 10 or more, ends on 2026-12-20',
-        'OX-27 by Acme, from Fenway at 4.20 EUR for 10 or more, last confirmed on 2026-07-01',
+      lists: [
+        {
+          heading: 'Ending soon',
+          items: ['OX-27 by Acme, from Fenway at 4.20 EUR for 10 or more, ends on 20 December 2026'],
+        },
+        {
+          heading: 'Not confirmed for long',
+          items: ['OX-27 by Acme, from Fenway at 4.20 EUR for 10 or more, last confirmed on 1 July 2026'],
+        },
       ],
       link: { path: '/prices?state=stale,expiring' },
     });
@@ -83,6 +89,6 @@ describe('a digest of prices', () => {
     expect(letter.paragraphs).toEqual([
       '30 offers were last confirmed more than 90 days ago. 2 offers have ended and no longer count.',
     ]);
-    expect(letter.items!.at(-1)).toBe('and more, in the list of prices');
+    expect(letter.lists).toMatchObject([{ heading: 'The 1 of 30 that were confirmed longest ago' }]);
   });
 });

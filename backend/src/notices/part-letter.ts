@@ -33,7 +33,7 @@ export function partLetter(team: string, parts: readonly ChangedPart[]): Letter 
     paragraphs: [
       `These parts are chosen in saved conditions of yours in the team ${team}, and have changed:`,
     ],
-    items: more > 0 ? [...items, `and ${more} more`] : items,
+    lists: [{ items: more > 0 ? [...items, `and ${more} more`] : items }],
     link: linkOf(parts),
     remark: 'Prices are the team’s own entries. Each change is told once.',
   };

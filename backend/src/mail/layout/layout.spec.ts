@@ -5,7 +5,7 @@ import { textLetter } from './text-letter.js';
 const letter: Letter = {
   subject: 'Prices of <Weir & Sons>',
   paragraphs: ['Two prices of <b>Weir & Sons</b> are stale.'],
-  items: ['OX-27 "quiet"'],
+  lists: [{ heading: 'Ending soon', items: ['OX-27 "quiet"'] }],
   link: { label: 'Open the prices', path: '/prices?state=stale&page=2' },
   remark: 'Sent each Monday.',
 };
@@ -16,6 +16,7 @@ describe('layout of a letter', () => {
     const [html, text] = [htmlLetter(letter, frame), textLetter(letter, frame)];
     for (const said of [
       'are stale.',
+      'Ending soon',
       'OX-27',
       'Open the prices',
       'Sent each Monday.',
