@@ -118,6 +118,14 @@ describe('rankings of resistors', () => {
     expect(numbers((await rank({ ...request, filter: { library: ['curated'] } })).body)).toEqual([]);
   });
 
+  it('leave out what is less close than asked', async () => {
+    const close = { ...request, filter: { ...request.filter, tolerance: 0.005 } };
+    const { body } = await rank(close).expect(200);
+    expect(body.excluded.reasons).toContainEqual({ reason: 'tolerance', count: 4 });
+    const list = (await exclusions(close)).body.items as { reason: string; detail: string }[];
+    expect(list.find(({ reason }) => reason === 'tolerance')!.detail).toMatch(/^its tolerance is 1\s%$/);
+  });
+
   it('take 2 % of window, no voltage and room temperature where these are left out', async () => {
     const { resistance, band } = conditions;
     const { body } = await rank({ conditions: { resistance, band } }).expect(200);

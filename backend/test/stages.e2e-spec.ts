@@ -143,6 +143,31 @@ describe('rankings of whole stages', () => {
     expect(alone.items[0].contributions.excess).toBeCloseTo(found.contributions.excess, 15);
   });
 
+  it('takes only resistors as close as asked, and none of unknown tolerance', async () => {
+    const pairs = async (tolerance: number) =>
+      (await rank({ resistorFilter: { tolerance } }).expect(200)).body.pairs;
+    expect(await pairs(0.01)).toBe(0);
+    await addResistor('R-12', 12, { resistor: { resistance: 12, tolerance: 0.001 } });
+    await addResistor('R-1k2', 1200, { resistor: { resistance: 1200, tolerance: 0.01 } });
+    expect([await pairs(0.01), await pairs(0.005)]).toEqual([1, 0]);
+    const { body } = await rank({ resistorFilter: { tolerance: 0.01 } });
+    expect(body.items[0].network).toMatchObject({
+      gainResistor: { partNumber: 'R-12', tolerance: 0.001 },
+      feedbackResistor: { partNumber: 'R-1k2', tolerance: 0.01 },
+    });
+    for (const partNumber of ['R-12', 'R-1k2'])
+      await librarian.agent.delete(`/api/resistors/${ids[partNumber]}?version=1`).expect(204);
+    const { body: problem } = await rank({ resistorFilter: { tolerance: 2 } }).expect(400);
+    expect(problem.errors[0].field).toBe('resistorFilter.tolerance');
+  });
+
+  it('says what a stage takes that isn’t sought', async () => {
+    const instrumentation = { topology: 'instrumentation', gain: 201, network: { minimumTotal: 500 } };
+    const { body } = await rank({}, instrumentation).expect(200);
+    expect(body.items[0].unsought).toEqual([{ place: 'difference', pieces: 4, value: 10_000 }]);
+    expect((await rank().expect(200)).body.items[0].unsought).toEqual([]);
+  });
+
   it.each([
     [400, 'conditions.stage.gainTolerance', { gainTolerance: 2 }],
     [400, 'conditions.stage.feedbackNoiseIndex', { feedbackNoiseIndex: -20 }],

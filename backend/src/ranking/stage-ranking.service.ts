@@ -37,8 +37,7 @@ export class StageRankingService {
       libraries.map(({ columns }) => columns),
       resistors,
     );
-    const { topology } = conditions.stage;
-    return toStageRanking(ranking, { topology, libraries, resistors, pricing });
+    return toStageRanking(ranking, { sought: conditions.stage, libraries, resistors, pricing });
   }
 
   private async usableResistors(

@@ -1,5 +1,10 @@
-import type { Network, StageRanking, WholeStage } from '@roothertz/common/noise';
-import type { Topology } from '@roothertz/common/conditions';
+import {
+  type Network,
+  type SoughtStage,
+  type StageRanking,
+  unsoughtPieces,
+  type WholeStage,
+} from '@roothertz/common/noise';
 import type { ListedResistor } from '../library/listed-resistors.js';
 import type {
   NetworkPartDto,
@@ -13,7 +18,7 @@ import type { StagePricing } from './stage-pricing.js';
 
 /** What the stages of a ranking were made of. */
 export interface StageSources {
-  topology: Topology;
+  sought: SoughtStage;
   libraries: readonly IndexedLibrary[];
   resistors: readonly ListedResistor[];
   pricing: StagePricing;
@@ -32,14 +37,15 @@ export function toStageRanking(
 }
 
 function toWholeStage(stage: WholeStage, sources: StageSources): WholeStageDto {
-  const { libraries, pricing, resistors, topology } = sources;
-  const pieces = pricing.piecesOf(stage, topology);
+  const { libraries, pricing, resistors, sought } = sources;
+  const pieces = pricing.piecesOf(stage, sought.topology);
   return {
     part: partAt(stage, libraries),
     channelsInParallel: stage.channelsInParallel,
     network: toNetwork(stage.network, resistors),
     unitPrice: pricing.priceOf(pieces),
     pieces,
+    unsought: unsoughtPieces(sought, stage.channelsInParallel),
     ...stage.figures,
   };
 }
@@ -50,8 +56,8 @@ function toNetwork(
 ): RankedNetworkDto {
   const partOf = (index: number | null): NetworkPartDto | null => {
     if (index === null) return null;
-    const { resistance, noiseIndex, technology } = resistors[index];
-    return { ...toPartName(resistors[index]), resistance, noiseIndex, technology };
+    const { resistance, tolerance, noiseIndex, technology } = resistors[index];
+    return { ...toPartName(resistors[index]), resistance, tolerance, noiseIndex, technology };
   };
   return { gain, gainResistor: partOf(gainResistor), feedbackResistor: partOf(feedbackResistor) };
 }

@@ -30,5 +30,11 @@ export const RESISTOR_CONDITION_FIELDS = {
   'conditions.band.lower': CONDITION_FIELDS['conditions.band.lower'],
   'conditions.band.upper': CONDITION_FIELDS['conditions.band.upper'],
   'conditions.band.lowPassOrder': CONDITION_FIELDS['conditions.band.lowPassOrder'],
+  'filter.tolerance': {
+    label: 'tolerance, at most',
+    kind: 'fraction',
+    bounds: { from: 0, to: 1 },
+    help: 'How far a new part may lie from its nominal value at most; parts of unknown tolerance are left out.',
+  },
   quantity: CONDITION_FIELDS.quantity,
 } as const satisfies Record<string, QuantityField>;

@@ -17,6 +17,8 @@ export interface ResistorConditions {
 /** Which resistors are considered at all, and which of them are excluded with a reason. */
 export type ResistorFilter = Pick<PartFilter, 'search' | 'library' | 'lifecycle' | 'approval' | 'package'> & {
   technology?: Technology[];
+  /** at most so wide; a part of unknown tolerance isn't considered then. 0.01 = 1 % */
+  tolerance?: number;
 };
 
 /** What resistors are ranked by, and what the page's address holds. */

@@ -2106,6 +2106,8 @@ export interface components {
              * @enum {string|null}
              */
             technology: "metal-foil" | "thin-film" | "metal-film" | "wirewound" | "thick-film" | "carbon-film" | "carbon-composition" | null;
+            /** @description 0.01 = 1 %; null = unknown. */
+            tolerance: number | null;
         };
         NextInvoiceDto: {
             /**
@@ -2600,6 +2602,8 @@ export interface components {
             signalGain: number;
             /** @description Of op-amps and found resistors; null where one of them is without a price. */
             unitPrice: components["schemas"]["StagePriceDto"] | null;
+            /** @description What a stage takes besides: the search doesn’t choose these parts, and the price is without them. */
+            unsought: components["schemas"]["UnsoughtPiecesDto"][];
         };
         RankingResponseDto: {
             /** @description The cheapest part of the quiet set; null where none of it has a price. */
@@ -2710,14 +2714,14 @@ export interface components {
         ResistorExclusionCountDto: {
             count: number;
             /** @enum {string} */
-            reason: "lifecycle" | "approval" | "retired" | "technology" | "package" | "over-rating";
+            reason: "lifecycle" | "approval" | "retired" | "technology" | "tolerance" | "package" | "over-rating";
         };
         ResistorExclusionDto: {
             /** @description The reason in plain words, with its figures. */
             detail: string;
             part: components["schemas"]["PartNameDto"];
             /** @enum {string} */
-            reason: "lifecycle" | "approval" | "retired" | "technology" | "package" | "over-rating";
+            reason: "lifecycle" | "approval" | "retired" | "technology" | "tolerance" | "package" | "over-rating";
         };
         ResistorExclusionListDto: {
             items: components["schemas"]["ResistorExclusionDto"][];
@@ -2731,6 +2735,8 @@ export interface components {
             package?: string;
             search?: string;
             technology?: ("metal-foil" | "thin-film" | "metal-film" | "wirewound" | "thick-film" | "carbon-film" | "carbon-composition")[];
+            /** @description How far a new part may lie from its nominal value at most; parts of unknown tolerance are left out. */
+            tolerance?: number;
         };
         ResistorListDto: {
             items: components["schemas"]["ResistorResponseDto"][];
@@ -3095,6 +3101,14 @@ export interface components {
         TokenDto: {
             token: string;
         };
+        UnsoughtPiecesDto: {
+            /** @description In one stage. */
+            pieces: number;
+            /** @enum {string} */
+            place: "load" | "bias" | "difference" | "feedback-capacitor" | "averaging";
+            /** @description In Ω, of the capacitor in F; null = not stated. */
+            value: number | null;
+        };
         UpdateConditionsDto: {
             conditions?: components["schemas"]["OperatingConditionsDto"];
             filter?: components["schemas"]["PartFilterDto"];
@@ -3199,6 +3213,8 @@ export interface components {
             signalGain: number;
             /** @description Of op-amps and found resistors; null where one of them is without a price. */
             unitPrice: components["schemas"]["StagePriceDto"] | null;
+            /** @description What a stage takes besides: the search doesn’t choose these parts, and the price is without them. */
+            unsought: components["schemas"]["UnsoughtPiecesDto"][];
         };
     };
     responses: never;

@@ -27,14 +27,15 @@ export function rankedStage(request: StageRequest, rank: number, partNumber: str
       { places: ['gain'], pieces: 1, unitPrice: null },
       { places: ['feedback'], pieces: 1, unitPrice: null },
     ],
+    unsought: [],
   };
 }
 
 function networkPart(id: string, partNumber: string, resistance: number) {
   const { description: _description, version: _version, updatedAt: _updatedAt, ...part } = resistor();
   const { resistor: parameters, origins: _origins, ...name } = part;
-  const { noiseIndex, technology } = parameters;
-  return { ...name, id, partNumber, resistance, noiseIndex, technology };
+  const { noiseIndex, technology, tolerance } = parameters;
+  return { ...name, id, partNumber, resistance, noiseIndex, technology, tolerance };
 }
 
 /** The server's answer with these stages. */

@@ -1,3 +1,4 @@
+import { UNSOUGHT_PLACES, type UnsoughtPieces, type UnsoughtPlace } from '@roothertz/common/noise';
 import { TECHNOLOGIES, type Technology } from '@roothertz/common/parts';
 import { ApiProperty } from '@nestjs/swagger';
 import { PartNameDto } from '../../shared/parts/part-name.dto.js';
@@ -11,6 +12,9 @@ export class NetworkPartDto extends PartNameDto {
 
   @ApiProperty({ type: Number, nullable: true, description: 'In dB (IEC 60195); null = unknown.' })
   noiseIndex: number | null;
+
+  @ApiProperty({ type: Number, nullable: true, description: '0.01 = 1 %; null = unknown.' })
+  tolerance: number | null;
 
   @ApiProperty({ enum: TECHNOLOGIES, nullable: true, description: 'null = unknown' })
   technology: Technology | null;
@@ -49,6 +53,21 @@ export class StagePieceDto {
   unitPrice: PriceDto | null;
 }
 
+export class UnsoughtPiecesDto implements UnsoughtPieces {
+  @ApiProperty({ enum: UNSOUGHT_PLACES })
+  place: UnsoughtPlace;
+
+  @ApiProperty({ type: 'integer', description: 'In one stage.' })
+  pieces: number;
+
+  @ApiProperty({
+    type: Number,
+    nullable: true,
+    description: 'In Ω, of the capacitor in F; null = not stated.',
+  })
+  value: number | null;
+}
+
 export class StagePriceDto {
   @ApiProperty({ description: 'Decimal number: the total over the stages that are wanted.' })
   amount: string;
@@ -82,6 +101,13 @@ export class WholeStageDto extends StageFiguresDto {
 
   @ApiProperty({ type: [StagePieceDto], description: 'The parts of a stage that the price is made of.' })
   pieces: StagePieceDto[];
+
+  @ApiProperty({
+    type: [UnsoughtPiecesDto],
+    description:
+      'What a stage takes besides: the search doesn’t choose these parts, and the price is without them.',
+  })
+  unsought: UnsoughtPiecesDto[];
 }
 
 export class RankedStageDto extends WholeStageDto {

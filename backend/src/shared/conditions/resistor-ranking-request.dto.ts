@@ -30,6 +30,9 @@ export class ResistorConditionsDto implements ResistorConditions {
 export class ResistorFilterDto extends LibraryFilterDto implements ResistorFilter {
   @Options(TECHNOLOGIES, { optional: true })
   technology?: Technology[];
+
+  @Quantity(RESISTOR_CONDITION_FIELDS['filter.tolerance'], { optional: true })
+  tolerance?: number;
 }
 
 /** What resistors are ranked by. */

@@ -27,6 +27,7 @@ export const RESISTOR_EXCLUSION_REASONS = [
   'approval',
   'retired',
   'technology',
+  'tolerance',
   'package',
   'over-rating',
 ] as const;
@@ -37,6 +38,7 @@ export const RESISTOR_EXCLUSION_LABELS: Record<ResistorExclusionReason, string> 
   approval: 'approval not chosen',
   retired: 'retired',
   technology: 'technology not chosen',
+  tolerance: 'tolerance too wide',
   package: 'other package',
   'over-rating': 'dissipates more than its rating',
 };
@@ -142,13 +144,15 @@ function exclusion(
 /** Why the filter alone leaves a resistor out, or null where it may be used. */
 export function resistorFilterExclusion(
   filter: ResistorFilter,
-  { lifecycle, approval, technology, package: name }: LibraryResistor,
+  { lifecycle, approval, technology, tolerance, package: name }: LibraryResistor,
 ): ResistorExclusionReason | null {
   if (filter.lifecycle?.length && !filter.lifecycle.includes(lifecycle)) return 'lifecycle';
   if (filter.approval?.length && !filter.approval.includes(approval)) return 'approval';
   if (isRetiredUnasked({ lifecycle, approval }, filter)) return 'retired';
   if (filter.technology?.length && (!technology || !filter.technology.includes(technology)))
     return 'technology';
+  if (filter.tolerance !== undefined && (tolerance === null || tolerance > filter.tolerance))
+    return 'tolerance';
   const packageName = filter.package?.trim().toLowerCase() ?? '';
   return name.toLowerCase().includes(packageName) ? null : 'package';
 }
@@ -165,6 +169,10 @@ function detailOf(
     retired: () => RETIRED_DETAIL,
     technology: () =>
       resistor.technology ? `it is ${TECHNOLOGY_LABELS[resistor.technology]}` : 'its technology is unknown',
+    tolerance: () =>
+      resistor.tolerance === null
+        ? 'its tolerance is unknown'
+        : `its tolerance is ${formatQuantity(resistor.tolerance, 'fraction', { trim: true })}`,
     package: () => `its package is ${resistor.package || 'unknown'}`,
     'over-rating': () =>
       `would dissipate ${watts(dcVoltage ** 2 / resistor.resistance)}, rated for ${watts(resistor.powerRating!)}`,

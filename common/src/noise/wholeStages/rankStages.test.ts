@@ -5,6 +5,7 @@ import { evaluateStage } from '../evaluateStage.js';
 import { parallelStage } from '../levers/index.js';
 import { findExcluded } from '../ranking/index.js';
 import { findNetworks } from './networks.js';
+import { unsoughtPieces } from './pieces.js';
 import { rankStages } from './rankStages.js';
 import { StageCosts } from './stageCosts.js';
 import {
@@ -217,5 +218,30 @@ describe('rankStages', () => {
         items: [],
         frontier: [],
       });
+  });
+});
+
+describe('what a stage takes besides what is sought', () => {
+  const told = (stage: Partial<SoughtStage>, channels = 1) =>
+    unsoughtPieces(sought(stage).stage, channels).map(({ place, pieces, value }) => [place, pieces, value]);
+
+  it('is nothing where op-amp and network are the whole stage', () => {
+    for (const topology of ['non-inverting', 'inverting', 'difference', 'transimpedance'] as const)
+      expect(told({ topology, biasResistance: 0, feedbackCapacitance: 0 })).toEqual([]);
+  });
+
+  it('is each stated resistor, and each that the stage can’t do without', () => {
+    expect(told({ loadResistance: 47e3 }, 2)).toEqual([
+      ['load', 1, 47e3],
+      ['averaging', 2, null],
+    ]);
+    expect(told({ topology: 'inverting', biasResistance: 1000 })).toEqual([['bias', 1, 1000]]);
+    expect(told({ topology: 'instrumentation', loadResistance: 1e6 })).toEqual([
+      ['load', 2, 1e6],
+      ['difference', 4, 10e3],
+    ]);
+    expect(told({ topology: 'transimpedance', feedbackCapacitance: 'auto' })).toEqual([
+      ['feedback-capacitor', 1, null],
+    ]);
   });
 });

@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import type { Contributions } from '@roothertz/common/noise';
 import { ConditionList } from './ConditionList';
 import { ConditionsContext, type ConditionsForm } from './ConditionsContext';
@@ -10,14 +11,17 @@ interface ConditionsPanelProps {
   shares: Contributions | null;
   /** The resistors of the network are what is sought. */
   isNetworkSought: boolean;
+  /** What is to be known of the values in the schematic. */
+  note?: ReactNode;
 }
 
 /** The operating conditions: the schematic, which is the form, and the list of what it doesn't show. */
-export function ConditionsPanel({ form, shares, isNetworkSought }: ConditionsPanelProps) {
+export function ConditionsPanel({ form, shares, isNetworkSought, note }: ConditionsPanelProps) {
   return (
     <ConditionsContext value={form}>
       <StageSwitch />
       <Schematic shares={shares} />
+      {note}
       <ConditionList isNetworkSought={isNetworkSought} />
     </ConditionsContext>
   );

@@ -1,4 +1,4 @@
-import { checkConditions, type RankingRequest } from '@roothertz/common/conditions';
+import { checkConditions, type RankingRequest, type StageConditions } from '@roothertz/common/conditions';
 import type { FieldError } from '@roothertz/common/parts';
 import { useCallback, useMemo, useRef } from 'react';
 import type { Address } from '../../components/useAddress';
@@ -7,7 +7,9 @@ import { writeAddress } from './address/writeAddress';
 import { exampleRequest } from './exampleRequest';
 import { valueAt, withValue } from './requestPath';
 import { withView } from './search/searchAddress';
-import { SEARCH_KEYS, type View } from './search/searchKeys';
+import { SEARCH_KEYS, WANTED_KEY, type View } from './search/searchKeys';
+import { withNetworkOf } from './search/takenNetwork';
+import { keepsNetwork, readWanted, withWanted, withWantedAgain } from './search/wantedGain';
 
 const NAMED_KEY = 'named';
 const PART_KEY = 'part';
@@ -46,12 +48,18 @@ export function useConditionsAddress({ params, change: changeAddress }: Address)
     },
     [request, replace],
   );
-  /** Other conditions in another view, one step back for both. */
-  const showIn = useCallback(
-    (view: View, next: (before: RankingRequest) => RankingRequest) =>
-      changeAddress((before) =>
-        withView(addressOf(next(requestOf(before)), before.get(NAMED_KEY), before), view),
-      ),
+  const showView = useCallback(
+    (view: View) => changeAddress((before) => inView(before, view)),
+    [changeAddress],
+  );
+  /** A found network in the schematic, shown among op-amps: one step back for both. */
+  const takeNetwork = useCallback(
+    (found: StageConditions) =>
+      changeAddress((before) => {
+        const asked = requestOf(before);
+        const taken = addressOf(withNetworkOf(asked, found), before.get(NAMED_KEY), before);
+        return withView(withWanted(taken, asked.conditions.stage, found), 'op-amps');
+      }),
     [changeAddress],
   );
   const selectPart = useCallback(
@@ -71,9 +79,17 @@ export function useConditionsAddress({ params, change: changeAddress }: Address)
     change,
     replace,
     show,
-    showIn,
+    showView,
+    takeNetwork,
+    wanted: readWanted(params, request.conditions.stage),
     selectPart,
   };
+}
+
+/** Whole stages are sought for what was wanted, not for what a network that was taken gives. */
+function inView(before: URLSearchParams, view: View): URLSearchParams {
+  const { stage } = requestOf(before).conditions;
+  return withView(view === 'stages' ? withWantedAgain(before, stage) : before, view);
 }
 
 function requestOf(params: URLSearchParams): RankingRequest {
@@ -101,6 +117,8 @@ function addressOf(request: ShownRequest, named: string | null, before: URLSearc
     const text = before.get(key);
     if (text !== null) params.set(key, text);
   }
+  const wanted = before.get(WANTED_KEY);
+  if (wanted !== null && keepsNetwork(requestOf(before), request)) params.set(WANTED_KEY, wanted);
   if (request.partIds?.[0] !== undefined) params.set(PART_KEY, request.partIds[0]);
   return params;
 }

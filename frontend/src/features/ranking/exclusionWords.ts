@@ -71,6 +71,7 @@ const RESISTOR_ADVICE: Record<ResistorExclusionReason, string> = {
   approval: ADVICE.approval,
   retired: ADVICE.retired,
   technology: 'Choose more technologies.',
+  tolerance: 'Allow wider tolerances.',
   package: 'Change or clear the package.',
   'over-rating': 'Lower the direct voltage, or share it among several resistors in series.',
 };

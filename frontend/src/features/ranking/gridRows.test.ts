@@ -33,6 +33,12 @@ describe('the ranking’s rows', () => {
     ]);
   });
 
+  it('say the library of parts whose number two libraries have', () => {
+    const twin = { ...items[1], part: { ...items[1].part, id: '77', library: 'curated' as const } };
+    const { rows: told } = gridRows(rankingOf(request, items), [...items, twin], request);
+    expect(told.map(({ part }) => part.library)).toEqual([null, 'own', null, 'curated']);
+  });
+
   it('state prices in the currency and for the quantity of the heading, only where there are any', () => {
     const unitPrice = { amount: '3.6', currency: 'EUR' } as NonNullable<(typeof items)[0]['unitPrice']>;
     const priced = [{ ...items[0], unitPrice }, items[1]];

@@ -6,6 +6,7 @@ import { formatQuantity } from '@roothertz/common/units';
 import type { Ranking, RankingItem } from '../../api/ranking';
 import { barOf, barScale, type Bar } from './barScale';
 import { cautionsOfPart } from './cautionsOf';
+import { libraryOf, sharedNumbers } from './libraryWords';
 import { commonUnit, inUnit, noiseKind } from './noiseUnit';
 import { amountText, priceHeading } from './priceWords';
 
@@ -15,7 +16,7 @@ export type Bracket = 'only' | 'first' | 'middle' | 'last' | null;
 export interface GridRow {
   id: string;
   place: { rank: number | null; bracket: Bracket };
-  part: { name: string; maker: string; cautions: Caution[]; approval: string | null };
+  part: { name: string; library: string | null; maker: string; cautions: Caution[]; approval: string | null };
   noise: { text: string; meetsTarget: boolean | null };
   aboveFloor: string;
   budget: { bar: Bar; contributions: Contributions };
@@ -42,7 +43,11 @@ export function gridRows(
   const quietest = items[0]?.inputNoiseRms ?? floor.inputNoiseRms;
   const unit = commonUnit(floor.inputNoiseRms || quietest, noiseKind(request.conditions.stage.topology));
   const scale = barScale(floor.inputNoiseRms, quietest);
-  const rows = items.map((item, index) => rowOf(item, bracketOf(items, index), unit, scale));
+  const shared = sharedNumbers(items.map(({ part }) => part));
+  const rows = items.map((item, index) => {
+    const row = rowOf(item, bracketOf(items, index), unit, scale);
+    return { ...row, part: { ...row.part, library: libraryOf(item.part, shared) } };
+  });
   return {
     unit,
     priceHeading: priceHeading(items, request.quantity ?? 1),
@@ -58,6 +63,7 @@ function rowOf(item: RankingItem, bracket: Bracket, unit: string, scale: number)
     place: { rank, bracket },
     part: {
       name: part.partNumber,
+      library: null,
       maker: part.manufacturer,
       cautions: cautionsOfPart(item.cautions),
       approval: part.approval === 'approved' ? null : part.approval,
@@ -77,7 +83,13 @@ function floorRow(rms: number, { conditions }: RankingRequest, unit: string, sca
   return {
     id: FLOOR_ID,
     place: { rank: null, bracket: null },
-    part: { name: '', maker: `source floor, ${resistance} at ${temperature}`, cautions: [], approval: null },
+    part: {
+      name: '',
+      library: null,
+      maker: `source floor, ${resistance} at ${temperature}`,
+      cautions: [],
+      approval: null,
+    },
     noise: { text: inUnit(rms, unit), meetsTarget: null },
     aboveFloor: rms > 0 ? formatQuantity(0, 'decibel') : '–',
     budget: { bar: barOf(contributions, scale), contributions },

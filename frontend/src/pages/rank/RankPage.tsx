@@ -6,7 +6,7 @@ import { useMayDo } from '../../components/useMember';
 import { ConditionsContext } from '../../features/conditions/ConditionsContext';
 import { ConditionsPanel } from '../../features/conditions/ConditionsPanel';
 import { NamedConditionsBar } from '../../features/conditions/NamedConditionsBar';
-import { withNetworkOf } from '../../features/conditions/search/takenNetwork';
+import { WantedGain } from '../../features/conditions/search/WantedGain';
 import { useSearchAddress } from '../../features/conditions/search/useSearchAddress';
 import { useConditionsAddress } from '../../features/conditions/useConditionsAddress';
 import { useFormState } from '../../features/conditions/useFormState';
@@ -18,13 +18,13 @@ import { PictureColumn } from './PictureColumn';
 import { Results } from './Results';
 import { Shortcuts } from './Shortcuts';
 import { useLookedAt } from './useLookedAt';
-import { useRanked } from './useRanked';
+import { useRanked, type Address } from './useRanked';
 
 /** The product's main page: the conditions, the ranking at them, and the picture of the selected part. */
 export function RankPage() {
   const query = useAddress();
   const address = useConditionsAddress(query);
-  const { isBlank, request, namedId, partId, show, showIn, replace, selectPart } = address;
+  const { isBlank, request, namedId, partId, show, replace, selectPart } = address;
   const search = useSearchAddress(query);
   useStartingConditions(isBlank, show);
   const ranked = useRanked(address, search);
@@ -52,11 +52,12 @@ export function RankPage() {
             form={form}
             isNetworkSought={search.view === 'stages'}
             shares={lookedAt && sharesOf(lookedAt.selected.figures.contributions)}
+            note={search.view !== 'stages' && <WantedNote address={address} />}
           />
         )}
       </section>
       <ConditionsContext value={form}>
-        <AnswerColumn view={search.view} onView={search.show} words={words} note={note}>
+        <AnswerColumn view={search.view} onView={address.showView} words={words} note={note}>
           <Results
             ranked={ranked}
             search={search}
@@ -72,12 +73,18 @@ export function RankPage() {
           isAwaited={!words && note === null}
           onChange={replace}
           onSelect={selectPart}
-          onTake={(single) => showIn('op-amps', (before) => withNetworkOf(before, single))}
+          onTake={address.takeNetwork}
         />
       )}
       <Shortcuts />
     </div>
   );
+}
+
+function WantedNote({ address: { wanted, request, showView } }: { address: Address }) {
+  if (wanted === null) return null;
+  const { stage } = request.conditions;
+  return <WantedGain stage={stage} wanted={wanted} onReturn={() => showView('stages')} />;
 }
 
 const NO_FIELDS: ApiProblem['errors'] = [];

@@ -129,10 +129,13 @@ describe('whole stages by price', () => {
     await userEvent.click(screen.getByRole('button', { name: /^technology of the resistors: any/ }));
     await userEvent.click(screen.getByRole('checkbox', { name: 'thin film' }));
     const last = () => bodies<StageRequest>(STAGES).at(-1)!;
-    await waitFor(() => expect(last().resistorFilter).toEqual({ technology: ['thin-film'] }));
+    await userEvent.selectOptions(screen.getByLabelText('tolerance of the resistors at most'), '0.01');
+    await waitFor(() =>
+      expect(last().resistorFilter).toEqual({ technology: ['thin-film'], tolerance: 0.01 }),
+    );
     expect(last()).toMatchObject({ sort: 'unitPrice', within: 2 });
     expect(router.state.location.search).toBe(
-      '?stage=non-inverting&view=stages&by=unitPrice&within=2dB&tech=thin-film',
+      '?stage=non-inverting&view=stages&by=unitPrice&within=2dB&tech=thin-film&tol=1%25',
     );
   });
 
@@ -168,6 +171,20 @@ describe('whole stages by price', () => {
     });
     await router.navigate(-1);
     expect(await answer(/^VR-1108 with/)).toBeInTheDocument();
+  });
+
+  it('say what the network taken gives instead of what was wanted, and are sought for that again', async () => {
+    const { router, bodies } = open('/rank?stage=non-inverting&view=stages', { [STAGES]: withPrices });
+    await userEvent.click(
+      await screen.findByRole('button', { name: 'Take this network into the schematic' }),
+    );
+    expect(
+      await screen.findByText(/^The resistors taken give a gain of 101; 100 was wanted\./),
+    ).toBeVisible();
+    await userEvent.click(screen.getByRole('button', { name: 'Seek whole stages for 100 again' }));
+    await answer(/^VR-1108 with/);
+    expect(bodies<StageRequest>(STAGES).at(-1)!.conditions.stage.gain).toBe(100);
+    expect(router.state.location.search).not.toContain('want');
   });
 
   it('count the excess noise of their resistors in budget and levers', async () => {

@@ -17,13 +17,13 @@ type Search = ReturnType<typeof useSearchAddress>;
 
 /** What the chosen view ranks at the conditions of the address, and what stands in the way of it. */
 export function useRanked({ isBlank, request, problems }: Address, search: Search) {
-  const { view, stageSearch, place, sort, technologies } = search;
+  const { view, stageSearch, place, sort, technologies, tolerance } = search;
   const requests = useMemo(
     () => ({
-      stages: stageRequest(request, stageSearch.values, { sort, technologies }),
-      resistors: resistorRequest(request, place.values, technologies),
+      stages: stageRequest(request, stageSearch.values, { sort, technologies, tolerance }),
+      resistors: resistorRequest(request, place.values, { technologies, tolerance }),
     }),
-    [request, stageSearch.values, place.values, sort, technologies],
+    [request, stageSearch.values, place.values, sort, technologies, tolerance],
   );
   const blocking = useMemo(() => {
     const { conditions, filter } = requests.stages;

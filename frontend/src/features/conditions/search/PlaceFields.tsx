@@ -4,15 +4,16 @@ import { placesOf, type CircuitPlace } from './placesOf';
 import { SearchFieldInput } from './SearchFieldInput';
 import styles from './SearchFields.module.css';
 import { TechnologyChoice } from './TechnologyChoice';
+import { ToleranceChoice } from './ToleranceChoice';
 import type { useSearchAddress } from './useSearchAddress';
 
 type PlaceFieldsProps = Pick<
   ReturnType<typeof useSearchAddress>,
-  'place' | 'technologies' | 'chooseTechnologies'
+  'place' | 'technologies' | 'chooseTechnologies' | 'tolerance' | 'limitTolerance'
 >;
 
 /** The place in the circuit for which a resistor is sought; band and temperature are those of the conditions. */
-export function PlaceFields({ place: form, technologies, chooseTechnologies }: PlaceFieldsProps) {
+export function PlaceFields({ place: form, ...choices }: PlaceFieldsProps) {
   const places = placesOf(useConditionsForm().request);
   return (
     <div role="group" aria-label="Place of the resistor" className={styles.line}>
@@ -30,7 +31,8 @@ export function PlaceFields({ place: form, technologies, chooseTechnologies }: P
       </span>
       <SearchFieldInput form={form} name="rtol" label="within" />
       <SearchFieldInput form={form} name="vr" label="direct voltage across it" />
-      <TechnologyChoice chosen={technologies} onChange={chooseTechnologies} />
+      <ToleranceChoice most={choices.tolerance} onChange={choices.limitTolerance} />
+      <TechnologyChoice chosen={choices.technologies} onChange={choices.chooseTechnologies} />
     </div>
   );
 }

@@ -5,11 +5,12 @@ import styles from './SearchFields.module.css';
 import { SortChoice } from './SortChoice';
 import { canBeParallel, isNetworkLimited } from './stageSearch';
 import { TechnologyChoice } from './TechnologyChoice';
+import { ToleranceChoice } from './ToleranceChoice';
 import type { useSearchAddress } from './useSearchAddress';
 
 type StageSearchFieldsProps = Pick<
   ReturnType<typeof useSearchAddress>,
-  'stageSearch' | 'sort' | 'sortBy' | 'technologies' | 'chooseTechnologies'
+  'stageSearch' | 'sort' | 'sortBy' | 'technologies' | 'chooseTechnologies' | 'tolerance' | 'limitTolerance'
 >;
 
 /** What a search for whole stages asks beside the conditions. */
@@ -26,6 +27,7 @@ export function StageSearchFields({ stageSearch: form, ...choices }: StageSearch
       {canBeParallel(stage) && <SearchFieldInput form={form} name="par" label="in parallel up to" />}
       {!isFollower && (
         <>
+          <ToleranceChoice most={choices.tolerance} onChange={choices.limitTolerance} />
           <TechnologyChoice chosen={choices.technologies} onChange={choices.chooseTechnologies} />
           <span className={styles.label}>
             {stage.topology === 'transimpedance'

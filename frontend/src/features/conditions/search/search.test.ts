@@ -9,10 +9,12 @@ import {
   readSearch,
   readSort,
   readTechnologies,
+  readTolerance,
   readView,
   withSearch,
   withSort,
   withTechnologies,
+  withTolerance,
   withView,
 } from './searchAddress';
 import { PLACE_KEYS, STAGE_SEARCH_KEYS } from './searchKeys';
@@ -20,7 +22,7 @@ import { resistorRequest, stageRequest } from './stageSearch';
 
 const params = (query: string) => new URLSearchParams(query);
 const usualSearch = readSearch(params(''), STAGE_SEARCH_KEYS).values;
-const BY_NOISE = { sort: 'inputNoiseRms', technologies: [] } as const;
+const BY_NOISE = { sort: 'inputNoiseRms', technologies: [], tolerance: null } as const;
 const usualPlace = readSearch(params(''), PLACE_KEYS).values;
 
 describe('the address beside the conditions', () => {
@@ -62,15 +64,17 @@ describe('the choices of the address', () => {
     expect(withTechnologies(withSort(written, 'inputNoiseRms'), []).toString()).toBe('');
     expect(readSort(params('by=luck'))).toBe('inputNoiseRms');
     expect(readTechnologies(params('tech=unobtainium'))).toEqual([]);
+    expect(readTolerance(withTolerance(params(''), 0.0005))).toBe(0.0005);
+    expect(readTolerance(params('tol=wide'))).toBeNull();
   });
 });
 
 describe('a search for whole stages', () => {
   it('is sorted by price within so many dB, with the technologies that count', () => {
-    const choices = { sort: 'unitPrice', technologies: ['thin-film'] } as const;
+    const choices = { sort: 'unitPrice', technologies: ['thin-film'], tolerance: 0.005 } as const;
     const request = stageRequest(exampleRequest('non-inverting'), { ...usualSearch, within: 2 }, choices);
     expect(request).toMatchObject({ sort: 'unitPrice', within: 2, quantity: 1 });
-    expect(request.resistorFilter).toEqual({ technology: ['thin-film'] });
+    expect(request.resistorFilter).toEqual({ technology: ['thin-film'], tolerance: 0.005 });
   });
 
   it.each(STAGE_KINDS)('can be ranked as it stands, for the %s example', (kind) => {
@@ -124,9 +128,14 @@ describe('a search for whole stages', () => {
 
 describe('the place of a resistor', () => {
   it('has band and temperature of the conditions', () => {
-    const request = resistorRequest(exampleRequest('non-inverting'), { ...usualPlace, r: 4700 }, [
-      'metal-foil',
-    ]);
+    const request = resistorRequest(
+      exampleRequest('non-inverting'),
+      { ...usualPlace, r: 4700 },
+      {
+        technologies: ['metal-foil'],
+        tolerance: null,
+      },
+    );
     expect(checkResistorConditions(request)).toEqual([]);
     expect(request.filter).toEqual({ technology: ['metal-foil'] });
     expect(request.conditions).toMatchObject({

@@ -1,7 +1,16 @@
+import { RESISTOR_CONDITION_FIELDS } from '@roothertz/common/conditions';
 import { STAGE_SORTS, type StageSort } from '@roothertz/common/noise';
 import { TECHNOLOGIES, type Technology } from '@roothertz/common/parts';
 import { readAddressQuantity, writeAddressQuantity } from '../address/addressQuantity';
-import { SORT_KEY, TECHNOLOGY_KEY, VIEW_KEY, VIEWS, type SearchField, type View } from './searchKeys';
+import {
+  SORT_KEY,
+  TECHNOLOGY_KEY,
+  TOLERANCE_KEY,
+  VIEW_KEY,
+  VIEWS,
+  type SearchField,
+  type View,
+} from './searchKeys';
 
 export type SearchKeys = Record<string, SearchField>;
 
@@ -37,6 +46,19 @@ export function readTechnologies(params: URLSearchParams): Technology[] {
 
 export function withTechnologies(params: URLSearchParams, chosen: readonly Technology[]): URLSearchParams {
   return withText(params, TECHNOLOGY_KEY, chosen.length === 0 ? null : chosen.join(' '));
+}
+
+const TOLERANCE = RESISTOR_CONDITION_FIELDS['filter.tolerance'];
+
+/** The widest tolerance of resistors that an address names; null = any. */
+export function readTolerance(params: URLSearchParams): number | null {
+  const text = params.get(TOLERANCE_KEY);
+  const reading = text === null ? null : readAddressQuantity(text, TOLERANCE, false);
+  return reading?.ok ? (reading.value as number) : null;
+}
+
+export function withTolerance(params: URLSearchParams, most: number | null): URLSearchParams {
+  return withText(params, TOLERANCE_KEY, most === null ? null : writeAddressQuantity(most, TOLERANCE.kind));
 }
 
 /** The fields that an address holds beside the operating conditions. */

@@ -46,12 +46,17 @@ export const PLACE_KEYS = {
 export const SORT_KEY = 'by';
 /** The technologies of resistors that count; all where none is named. */
 export const TECHNOLOGY_KEY = 'tech';
+/** The widest tolerance of resistors that count; any where none is named. */
+export const TOLERANCE_KEY = 'tol';
+/** What was wanted of a network that has been taken into the schematic since, where it doesn't give just that. */
+export const WANTED_KEY = 'want';
 
 /** What stays in the address when the conditions change. */
 export const SEARCH_KEYS: readonly string[] = [
   VIEW_KEY,
   SORT_KEY,
   TECHNOLOGY_KEY,
+  TOLERANCE_KEY,
   ...Object.keys(STAGE_SEARCH_KEYS),
   ...Object.keys(PLACE_KEYS),
 ];

@@ -13,16 +13,22 @@ import type { PLACE_KEYS, STAGE_SEARCH_KEYS } from './searchKeys';
 /** Ω, what an output drives where nothing else is stated (common practice, no source). */
 const USUAL_MINIMUM_TOTAL = 500;
 
-export interface StageChoices {
-  sort: StageSort;
+/** Which resistors count. */
+export interface ResistorChoices {
   technologies: readonly Technology[];
+  /** at most so wide; null = any */
+  tolerance: number | null;
+}
+
+export interface StageChoices extends ResistorChoices {
+  sort: StageSort;
 }
 
 /** The search for whole stages at the conditions: the network's resistors are what is to be found. */
 export function stageRequest(
   { conditions, filter = {}, quantity }: RankingRequest,
   { gtol, nmax, par, within }: SearchContent<typeof STAGE_SEARCH_KEYS>['values'],
-  { sort, technologies }: StageChoices,
+  { sort, ...choices }: StageChoices,
 ) {
   const { network, ...stage } = withoutNetwork(conditions.stage);
   const minimumTotal = network?.minimumTotal ?? USUAL_MINIMUM_TOTAL;
@@ -38,7 +44,7 @@ export function stageRequest(
   return {
     conditions: sought,
     filter,
-    resistorFilter: resistorFilterOf(filter, technologies),
+    resistorFilter: resistorFilterOf(filter, choices),
     quantity,
     sort,
     ...(sort === 'unitPrice' && { within }),
@@ -73,12 +79,12 @@ export function canBeParallel({ topology }: Pick<StageConditions, 'topology'>): 
 export function resistorRequest(
   { conditions, filter = {}, quantity }: RankingRequest,
   { r, rtol, vr }: SearchContent<typeof PLACE_KEYS>['values'],
-  technologies: readonly Technology[],
+  choices: ResistorChoices,
 ): ResistorRankingRequest {
   const { ambientTemperature, band } = conditions;
   return {
     conditions: { resistance: r, resistanceTolerance: rtol, dcVoltage: vr, ambientTemperature, band },
-    filter: resistorFilterOf(filter, technologies),
+    filter: resistorFilterOf(filter, choices),
     quantity,
   };
 }
@@ -86,10 +92,11 @@ export function resistorRequest(
 /** Search and package name op-amps; which libraries, lifecycles and approvals count holds for all parts. */
 function resistorFilterOf(
   { library, lifecycle, approval }: PartFilter,
-  technologies: readonly Technology[],
+  { technologies, tolerance }: ResistorChoices,
 ): ResistorFilter {
   return {
     ...(technologies.length > 0 && { technology: [...technologies] }),
+    ...(tolerance !== null && { tolerance }),
     ...(library && { library }),
     ...(lifecycle && { lifecycle }),
     ...(approval && { approval }),

@@ -6,15 +6,16 @@ import {
   readSearch,
   readSort,
   readTechnologies,
+  readTolerance,
   readView,
   withSearch,
   withSort,
   withTechnologies,
-  withView,
+  withTolerance,
   type SearchContent,
   type SearchKeys,
 } from './searchAddress';
-import { PLACE_KEYS, STAGE_SEARCH_KEYS, type View } from './searchKeys';
+import { PLACE_KEYS, STAGE_SEARCH_KEYS } from './searchKeys';
 
 /** Fields of the address, and how to change them. */
 export interface SearchForm<Keys extends SearchKeys> extends SearchContent<Keys> {
@@ -27,19 +28,23 @@ export type StageSearchForm = SearchForm<typeof STAGE_SEARCH_KEYS>;
 /** What the address says beside the operating conditions: what is ranked, and the fields of that. */
 export function useSearchAddress(address: Address) {
   const { params, change } = address;
-  const show = useCallback((view: View) => change((before) => withView(before, view)), [change]);
   const sortBy = useCallback((sort: StageSort) => change((before) => withSort(before, sort)), [change]);
   const chooseTechnologies = useCallback(
     (chosen: readonly Technology[]) => change((before) => withTechnologies(before, chosen)),
     [change],
   );
+  const limitTolerance = useCallback(
+    (most: number | null) => change((before) => withTolerance(before, most)),
+    [change],
+  );
   return {
     view: readView(params),
-    show,
     sort: readSort(params),
     sortBy,
     technologies: useMemo(() => readTechnologies(params), [params]),
     chooseTechnologies,
+    tolerance: readTolerance(params),
+    limitTolerance,
     stageSearch: useSearchForm(address, STAGE_SEARCH_KEYS),
     place: useSearchForm(address, PLACE_KEYS),
   };

@@ -1,5 +1,6 @@
 import type { PartName, RankingItem } from '../../../api/ranking';
 import { noiseKind } from '../noiseUnit';
+import { numberOf, sharedNumbers } from '../libraryWords';
 import type { ShownRanking } from '../useRanking';
 import { pricePlot, type PricePlot } from './pricePlot';
 
@@ -7,10 +8,11 @@ type Priced = Pick<RankingItem, 'inputNoiseRms' | 'unitPrice'> & { part: PartNam
 
 /** The ranked op-amps by price and noise. */
 export function opAmpPricePlot({ first, items, request }: ShownRanking): PricePlot {
+  const shared = sharedNumbers([...items, ...first.frontier].map(({ part }) => part));
   const point = ({ part, inputNoiseRms, unitPrice }: Priced) => ({
     id: part.id,
-    name: part.partNumber,
-    partNumber: part.partNumber,
+    name: numberOf(part, shared),
+    partNumber: numberOf(part, shared),
     noise: inputNoiseRms,
     unitPrice,
   });

@@ -2,6 +2,7 @@ import type { ResistorCaution } from '@roothertz/common/noise';
 import { TECHNOLOGY_LABELS } from '@roothertz/common/parts';
 import { formatQuantity } from '@roothertz/common/units';
 import type { ResistorItem } from '../../../api/resistorRanking';
+import { libraryOf, sharedNumbers } from '../libraryWords';
 import { commonUnit, inUnit } from '../noiseUnit';
 import { amountText, priceHeading } from '../priceWords';
 import type { ShownResistors } from './useResistors';
@@ -9,7 +10,7 @@ import type { ShownResistors } from './useResistors';
 export interface ResistorRow {
   id: string;
   place: number;
-  part: { id: string; name: string; maker: string; cautions: ResistorCaution[] };
+  part: { id: string; name: string; library: string | null; maker: string; cautions: ResistorCaution[] };
   technology: string;
   value: string;
   thermal: string;
@@ -30,17 +31,24 @@ export interface ResistorRows {
 /** The rows of the resistors, all noise in one unit. */
 export function resistorRows({ items, request }: Pick<ShownResistors, 'items' | 'request'>): ResistorRows {
   const unit = commonUnit(items[0]?.thermalRms ?? 1, 'voltage');
+  const shared = sharedNumbers(items.map(({ part }) => part));
   const heading = priceHeading(items, request.quantity ?? 1);
-  return { unit, priceHeading: heading, rows: items.map((item) => rowOf(item, unit)) };
+  return { unit, priceHeading: heading, rows: items.map((item) => rowOf(item, unit, shared)) };
 }
 
-function rowOf(item: ResistorItem, unit: string): ResistorRow {
+function rowOf(item: ResistorItem, unit: string, shared: ReadonlySet<string>): ResistorRow {
   const { part, rank, excessRms, aboveThermal, cautions } = item;
   const { technology } = part.resistor;
   return {
     id: part.id,
     place: rank,
-    part: { id: part.id, name: part.partNumber, maker: part.manufacturer, cautions },
+    part: {
+      id: part.id,
+      name: part.partNumber,
+      library: libraryOf(part, shared),
+      maker: part.manufacturer,
+      cautions,
+    },
     technology: technology === null ? 'unknown' : TECHNOLOGY_LABELS[technology],
     value: valueText(part.resistor),
     thermal: inUnit(item.thermalRms, unit),

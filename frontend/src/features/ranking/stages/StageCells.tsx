@@ -3,12 +3,20 @@ import styles from './StageCells.module.css';
 import type { StageRow } from './stageRows';
 
 /** The op-amp over its maker, and what one should know of it. */
-export function StagePartCell({ name, maker, cautions }: StageRow['part']) {
+export function StagePartCell({ name, library, maker, cautions }: StageRow['part']) {
   const [caution] = cautions;
-  const title = [`${name} ${maker}`, ...cautions.map((key) => CAUTION_DETAILS[key])].join('\n');
+  const title = [
+    [name, library, maker].filter(Boolean).join(' '),
+    ...cautions.map((key) => CAUTION_DETAILS[key]),
+  ].join('\n');
   return (
     <span className={styles.two} title={title}>
-      {name && <span className={styles.name}>{name}</span>}
+      {name && (
+        <span className={styles.name}>
+          {name}
+          {library && <span className={styles.library}> {library}</span>}
+        </span>
+      )}
       <span className={styles.second}>
         {maker}
         {caution && <span className={styles.caution}> △ {CAUTION_LABELS[caution]}</span>}

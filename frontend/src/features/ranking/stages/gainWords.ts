@@ -32,7 +32,8 @@ export function nearestGainAdvice(stage: SoughtStage, nearest: number | null): s
 }
 
 function emptyLibraryAdvice(stage: SoughtStage): string {
-  const more = 'tick more lifecycles, approvals and technologies under Parts, or add resistors';
+  const more =
+    'tick more lifecycles and approvals under Parts, choose more technologies or wider tolerances, or add resistors';
   return isLimited(stage)
     ? `The chosen libraries hold no resistors that keep the network’s limits: ${LIMITS}, ${more}.`
     : `The chosen libraries hold no resistors: ${more}.`;

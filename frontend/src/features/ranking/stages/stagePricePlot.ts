@@ -1,4 +1,5 @@
 import type { WholeStage } from '../../../api/stages';
+import { numberOf, sharedNumbers } from '../libraryWords';
 import { noiseKind } from '../noiseUnit';
 import { pricePlot, type PricePlot } from '../price/pricePlot';
 import { networkText } from './stageAnswer';
@@ -7,10 +8,11 @@ import type { ShownStages } from './useStages';
 
 /** The ranked whole stages by price and noise. */
 export function stagePricePlot({ first, items, request }: ShownStages): PricePlot {
+  const shared = sharedNumbers([...items, ...first.frontier].map(({ part }) => part));
   const point = (stage: WholeStage) => ({
     id: stageKey(stage),
-    name: `${stage.part.partNumber}${networkText(stage)}`,
-    partNumber: stage.part.partNumber,
+    name: `${numberOf(stage.part, shared)}${networkText(stage)}`,
+    partNumber: numberOf(stage.part, shared),
     noise: stage.inputNoiseRms,
     unitPrice: stage.unitPrice,
   });

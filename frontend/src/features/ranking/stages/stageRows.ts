@@ -1,9 +1,10 @@
 import { CONTRIBUTORS, type Contributions, isFollower, type SoughtStage } from '@roothertz/common/noise';
 import { formatQuantity } from '@roothertz/common/units';
-import type { StageItem } from '../../../api/stages';
+import type { StageItem, WholeStage } from '../../../api/stages';
 import { barOf, barScale, type Bar } from '../barScale';
 import { cautionsOfPart } from '../cautionsOf';
 import { FLOOR_ID, type GridRow } from '../gridRows';
+import { libraryOf, numberOf, sharedNumbers } from '../libraryWords';
 import { commonUnit, inUnit, noiseKind } from '../noiseUnit';
 import { amountText, priceHeading } from '../priceWords';
 import { stageParts } from './stagePartRows';
@@ -44,21 +45,33 @@ export function stageRows({ first, items, request }: ShownStages): StageRows {
   const quietest = items.length === 0 ? floor : Math.min(...items.map((item) => item.inputNoiseRms));
   const unit = commonUnit(floor || quietest, noiseKind(stage.topology));
   const scale = barScale(floor, quietest);
+  const shared = sharedNumbers(items.flatMap(partsOf));
   return {
     unit,
     priceHeading: priceHeading([...items, ...first.frontier], request.quantity ?? 1),
     floor: floorRow(floor, unit, scale),
-    rows: items.map((item) => rowOf(item, stage, unit, scale)),
+    rows: items.map((item) => rowOf(item, stage, unit, scale, shared)),
   };
 }
 
-function rowOf(item: StageItem, stage: SoughtStage, unit: string, scale: number): StageRow {
+function rowOf(
+  item: StageItem,
+  stage: SoughtStage,
+  unit: string,
+  scale: number,
+  shared: ReadonlySet<string>,
+): StageRow {
   const { part, rank, contributions, network, channelsInParallel, aboveFloor } = item;
   return {
     id: part.id,
     place: rank,
-    part: { name: part.partNumber, maker: part.manufacturer, cautions: cautionsOfPart(item.cautions) },
-    network: networkOf(network),
+    part: {
+      name: part.partNumber,
+      library: libraryOf(part, shared),
+      maker: part.manufacturer,
+      cautions: cautionsOfPart(item.cautions),
+    },
+    network: networkOf(network, shared),
     gain: { text: gainOf(network.gain, stage), channelsInParallel },
     noise: {
       text: inUnit(item.inputNoiseRms, unit),
@@ -69,12 +82,20 @@ function rowOf(item: StageItem, stage: SoughtStage, unit: string, scale: number)
   };
 }
 
+/** The op-amp and the resistors of a stage. */
+export function partsOf({ part, network: { gainResistor, feedbackResistor } }: WholeStage) {
+  return [part, gainResistor, feedbackResistor].filter((one) => one !== null);
+}
+
 function priceOf(item: StageItem): StageRow['price'] {
   const title = stageParts(item).map(({ pieces, name, price }) => `${pieces} ${name}: ${price}`);
   return { text: item.unitPrice ? amountText(item.unitPrice) : 'no price', title: title.join('\n') };
 }
 
-function networkOf({ gainResistor, feedbackResistor }: StageItem['network']): NetworkPart[] {
+function networkOf(
+  { gainResistor, feedbackResistor }: StageItem['network'],
+  shared: ReadonlySet<string>,
+): NetworkPart[] {
   const places = [
     { symbol: 'R_g', resistor: gainResistor },
     { symbol: 'R_f', resistor: feedbackResistor },
@@ -85,7 +106,7 @@ function networkOf({ gainResistor, feedbackResistor }: StageItem['network']): Ne
           {
             symbol,
             value: formatQuantity(resistor.resistance, 'resistance', { trim: true, digits: 4 }),
-            partNumber: resistor.partNumber,
+            partNumber: numberOf(resistor, shared),
             maker: resistor.manufacturer,
           },
         ]
@@ -104,7 +125,7 @@ function floorRow(rms: number, unit: string, scale: number): StageRow {
   return {
     id: FLOOR_ID,
     place: null,
-    part: { name: '', maker: 'source floor', cautions: [] },
+    part: { name: '', library: null, maker: 'source floor', cautions: [] },
     network: [],
     gain: { text: '', channelsInParallel: 1 },
     noise: { text: inUnit(rms, unit), aboveFloor: rms > 0 ? formatQuantity(0, 'decibel') : '–' },

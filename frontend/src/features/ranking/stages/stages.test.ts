@@ -4,6 +4,8 @@ import { EXAMPLE } from '../../../test/exampleRanking';
 import { rankedStage, stageRankingOf } from '../../../test/stages';
 import { plainText } from '../answer';
 import { stageAnswer } from './stageAnswer';
+import { stageParts, unsoughtParts } from './stagePartRows';
+import { stagePricePlot } from './stagePricePlot';
 import { stageRows } from './stageRows';
 
 const { gainResistance: _sought, ...stage } = EXAMPLE.conditions.stage;
@@ -124,5 +126,38 @@ describe('the rows of whole stages', () => {
       text: 'no price',
       title: '1 × VR-1108: no price\n1 × TN-5R00: no price\n1 × TN-500R: no price',
     });
+  });
+
+  it('say the library of parts whose number two libraries have', () => {
+    const twin = { ...leader, rank: 2, part: { ...leader.part, id: '99', library: 'curated' as const } };
+    const { gainResistor } = leader.network;
+    const own = { ...gainResistor!, id: '903', library: 'curated' as const };
+    const items = [leader, { ...twin, network: { ...twin.network, gainResistor: own } }];
+    const { rows } = stageRows(shown({}, items));
+    expect(rows.map(({ part }) => part.library)).toEqual(['own', 'curated']);
+    expect(rows.map(({ network }) => network[0].partNumber)).toEqual(['TN-5R00 (own)', 'TN-5R00 (curated)']);
+    expect(rows[0].network[1].partNumber).toBe('TN-500R');
+    expect(stagePricePlot(shown({}, items)).unpriced.map(({ partNumber }) => partNumber)).toEqual([
+      'VR-1108 (own)',
+      'VR-1108 (curated)',
+    ]);
+  });
+});
+
+describe('the parts of a stage', () => {
+  it('say value, tolerance and library, and what the price is without', () => {
+    const stage = {
+      ...leader,
+      unsought: [
+        { place: 'difference' as const, pieces: 4, value: 10e3 },
+        { place: 'averaging' as const, pieces: 2, value: null },
+      ],
+    };
+    expect(stageParts(stage)[1]).toMatchObject({ name: 'TN-5R00', library: 'own' });
+    expect(plain(stageParts(stage)[1].symbols)).toMatch(/^5 Ω ±[\d.]+ %$/);
+    expect(unsoughtParts(stage).map(({ symbols, pieces }) => `${pieces} ${plain(symbols)}`)).toEqual([
+      '4 × R_d 10 kΩ',
+      '2 × R',
+    ]);
   });
 });
