@@ -75,6 +75,7 @@ describe('the quietest map', () => {
     expect((await saved('PNG')).slice(1, 4)).toBe('PNG');
     const svg = await saved('SVG');
     expect(svg).toMatch(/^<svg[^>]*><rect[^>]*fill="#/);
+    expect(svg.includes('@font-face')).toBe(true);
     expect(svg).not.toContain('var(');
     const lines = (await saved('CSV')).split('\r\n');
     expect(lines).toHaveLength(1 + 36 * 33 + 1);

@@ -5,6 +5,7 @@ export type { Unit } from './unit.js';
 export * from './parseUnit.js';
 export * from './displayUnit.js';
 export * from './parseQuantity.js';
+export * from './parseRange.js';
 export * from './splitQuantity.js';
 export * from './formatQuantity.js';
 export * from './formatEditable.js';

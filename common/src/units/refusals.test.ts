@@ -53,7 +53,8 @@ describe('parseQuantity refuses', () => {
   it.each<[string, QuantityKind]>([
     ['10k', 'temperature'],
     ['10k', 'temperatureDifference'],
-    ['10k', 'count'],
+    ['9999 dB', 'gain'],
+    ['×', 'gain'],
     ['10m', 'fraction'],
     ['10m', 'decibel'],
     ['4k7', 'temperature'],

@@ -102,6 +102,29 @@ describe('a quantity field', () => {
     expect(onCommit.mock.calls).toEqual([[680], [820], [680]]);
   });
 
+  it('shows what was committed until the page has taken it, and then what the page says', async () => {
+    const field = (value: number) => <QuantityInput field={FIELD} value={value} onCommit={() => {}} />;
+    const { rerender } = render(field(600));
+    const input = screen.getByRole('textbox', { name: 'source resistance' });
+    await type(input, '4k7{Enter}');
+    expect(input).toHaveValue('4.7 kΩ');
+    rerender(field(4700));
+    expect(input).toHaveValue('4.7 kΩ');
+    rerender(field(600));
+    expect(input).toHaveValue('600 Ω');
+  });
+
+  it('hands over both ends of a range where somebody takes them', async () => {
+    const onRange = vi.fn();
+    const { input, onCommit } = setUp({ onRange });
+    await type(input, '1k-10k{Enter}');
+    expect(onRange.mock.calls).toEqual([[{ from: 1e3, to: 10e3 }]]);
+    expect(input).toHaveValue('600 Ω');
+    await type(input, '1k to 1e15{Enter}');
+    expect(screen.getByRole('alert')).toHaveTextContent(/this is a range/);
+    expect(onCommit).not.toHaveBeenCalled();
+  });
+
   it('shows an error that comes from elsewhere', () => {
     expect(setUp({ error: 'too high for this source' }).input).toHaveAccessibleDescription(
       'too high for this source',

@@ -1,24 +1,15 @@
-import type { QuantityField } from '@roothertz/common/parts';
 import { QUANTITIES } from '@roothertz/common/units';
 import { Input } from 'antd';
 import { useId } from 'react';
 import styles from './QuantityInput.module.css';
-import { useQuantityDraft } from './useQuantityDraft';
+import { useQuantityDraft, type DraftOptions } from './useQuantityDraft';
 
-export interface QuantityInputProps {
-  field: QuantityField;
-  /** In SI units; null = empty, which only a field with an `emptyText` allows. */
-  value: number | null;
-  onCommit: (value: number | null) => void;
+export interface QuantityInputProps extends DraftOptions {
   variant?: 'inline' | 'form';
-  /** What an empty field means, such as "unknown"; left out = the field can't be empty. */
-  emptyText?: string;
   /** The accessible name; left out = the field's label. Empty = a label element names it. */
   label?: string;
   /** What is wrong according to somebody else, such as the server. */
   error?: string | null;
-  /** Told of a text that can't be read, and when it is gone. */
-  onInvalid?: (message: string | null) => void;
   id?: string;
   disabled?: boolean;
 }

@@ -1,5 +1,5 @@
 import { boundsError, type QuantityField } from '@roothertz/common/parts';
-import { parseQuantity } from '@roothertz/common/units';
+import { parseQuantity, parseRange, type Range } from '@roothertz/common/units';
 
 export type FieldReading = { ok: true; value: number | null } | { ok: false; message: string };
 
@@ -12,4 +12,11 @@ export function readField(field: QuantityField, text: string, emptyText?: string
   if (!parsed.ok) return parsed;
   const message = boundsError(field, parsed.value);
   return message === null ? parsed : { ok: false, message };
+}
+
+/** The range that a text states, both ends within the field's bounds; null = it states none. */
+export function readRange({ kind, ...field }: QuantityField, text: string): Range | null {
+  const range = parseRange(text, kind);
+  const isWithin = (end: number) => boundsError({ kind, ...field }, end) === null;
+  return range !== null && isWithin(range.from) && isWithin(range.to) ? range : null;
 }

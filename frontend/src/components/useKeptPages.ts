@@ -1,4 +1,4 @@
-import { useInfiniteQuery } from '@tanstack/react-query';
+import { useInfiniteQuery, type UseInfiniteQueryResult } from '@tanstack/react-query';
 import { useState } from 'react';
 import type { PagesQuery } from '../api/pages';
 
@@ -7,8 +7,9 @@ export function useKeptPages<Page extends { items: readonly unknown[]; total: nu
   query: PagesQuery<Page>,
   enabled: boolean,
 ) {
-  const { data, error, isPlaceholderData, fetchNextPage, hasNextPage, isFetchingNextPage, refetch } =
-    useInfiniteQuery({ ...query, enabled });
+  const asked = useInfiniteQuery({ ...query, enabled });
+  const { data, isPlaceholderData, fetchNextPage, hasNextPage, isFetchingNextPage, refetch } = asked;
+  const error = asked.error ?? unanswered(asked);
   const [pages, setPages] = useState(data?.pages);
   if (data && data.pages !== pages) setPages(data.pages);
   return {
@@ -22,4 +23,13 @@ export function useKeptPages<Page extends { items: readonly unknown[]; total: nu
       if (hasNextPage && !isFetchingNextPage && !isPlaceholderData) void fetchNextPage();
     },
   };
+}
+
+/** Why there is no answer to the question yet, while the server can't be reached and is asked again and again. */
+function unanswered({
+  data,
+  isPlaceholderData,
+  failureReason,
+}: Pick<UseInfiniteQueryResult, 'data' | 'isPlaceholderData' | 'failureReason'>): Error | null {
+  return data === undefined || isPlaceholderData ? failureReason : null;
 }

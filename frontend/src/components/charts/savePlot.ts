@@ -1,4 +1,5 @@
 import type { ChartHandle } from './EChart';
+import { fontSheet } from './fontSheet';
 
 /** What can be saved of a chart beside its drawing. */
 export interface SavedPlot {
@@ -32,10 +33,8 @@ function csvBlob(plot: SavedPlot): Blob {
 async function drawingBlob(chart: ChartHandle, as: 'PNG' | 'SVG', paper: string): Promise<Blob | null> {
   const drawing = chart.svg();
   if (!drawing) return null;
-  const text = drawing.text.replace(
-    /^<svg[^>]*>/,
-    (tag) => `${tag}<rect width="100%" height="100%" fill="${paper}"/>`,
-  );
+  const ground = `<rect width="100%" height="100%" fill="${paper}"/><style>${await fontSheet()}</style>`;
+  const text = drawing.text.replace(/^<svg[^>]*>/, (tag) => `${tag}${ground}`);
   const svg = new Blob([text], { type: 'image/svg+xml' });
   return as === 'SVG' ? svg : rasterise(svg, drawing.width, drawing.height);
 }
@@ -43,17 +42,27 @@ async function drawingBlob(chart: ChartHandle, as: 'PNG' | 'SVG', paper: string)
 async function rasterise(svg: Blob, width: number, height: number): Promise<Blob | null> {
   const url = URL.createObjectURL(svg);
   try {
-    const image = new Image(width, height);
-    image.src = url;
-    await image.decode();
     const canvas = document.createElement('canvas');
     canvas.width = width * SHARPNESS;
     canvas.height = height * SHARPNESS;
-    canvas.getContext('2d')!.drawImage(image, 0, 0, canvas.width, canvas.height);
+    await draw(url, canvas);
+    await new Promise(requestAnimationFrame);
+    await draw(url, canvas);
     return await new Promise((resolve) => canvas.toBlob(resolve, 'image/png'));
   } finally {
     URL.revokeObjectURL(url);
   }
+}
+
+/** The font within a drawing is asked for when it is drawn: the next one that holds it has it from the start. */
+async function draw(url: string, canvas: HTMLCanvasElement): Promise<void> {
+  const { width, height } = canvas;
+  const image = new Image(width, height);
+  image.src = url;
+  await image.decode();
+  const context = canvas.getContext('2d')!;
+  context.clearRect(0, 0, width, height);
+  context.drawImage(image, 0, 0, width, height);
 }
 
 function download(blob: Blob, name: string): void {

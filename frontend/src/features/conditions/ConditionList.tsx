@@ -1,5 +1,6 @@
 import { AMPLIFIER_TEMPERATURE_MODELS, CONDITION_FIELDS } from '@roothertz/common/conditions';
 import type { ReactNode } from 'react';
+import { BandFields } from './BandFields';
 import { ConditionField } from './ConditionField';
 import styles from './ConditionList.module.css';
 import { useConditionsForm } from './ConditionsContext';
@@ -21,7 +22,7 @@ export function ConditionList({ isNetworkSought }: ConditionListProps) {
   return (
     <div className={styles.list}>
       <Row label="Band">
-        <ConditionField path="conditions.band.lower" /> to <ConditionField path="conditions.band.upper" />
+        <BandFields />
       </Row>
       <Row label="Low-pass order" note={conditions.band.lowPassOrder > 0 ? 'Butterworth' : 'brick wall'}>
         <ConditionField path="conditions.band.lowPassOrder" />

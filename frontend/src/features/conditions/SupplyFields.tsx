@@ -1,4 +1,5 @@
 import { CONDITION_FIELDS } from '@roothertz/common/conditions';
+import { parseQuantity, type Range } from '@roothertz/common/units';
 import { QuantityInput } from '../../components/QuantityInput';
 import { useConditionsForm } from './ConditionsContext';
 
@@ -13,17 +14,31 @@ export function SupplyFields() {
       'filter.supply',
       value === null ? undefined : { minimum: value, maximum: value, ...supply, [end]: value },
     );
+  const setBoth = ({ from, to }: Range) => change('filter.supply', { minimum: from, maximum: to });
+  const endOf = (end: End) => <SupplyEnd end={end} onCommit={(value) => set(end, value)} onRange={setBoth} />;
   return supply === undefined ? (
-    <SupplyEnd end="minimum" onCommit={(value) => set('minimum', value)} />
+    endOf('minimum')
   ) : (
     <>
-      <SupplyEnd end="minimum" onCommit={(value) => set('minimum', value)} /> to{' '}
-      <SupplyEnd end="maximum" onCommit={(value) => set('maximum', value)} />
+      {endOf('minimum')} to {endOf('maximum')}
     </>
   );
 }
 
-function SupplyEnd({ end, onCommit }: { end: End; onCommit: (value: number | null) => void }) {
+/** "±5 V" is a supply of 10 V from rail to rail. */
+function railToRail(typed: string): string {
+  const half = /^\s*(?:±|\+\/-)(.+)$/.exec(typed)?.[1];
+  const parsed = half === undefined ? null : parseQuantity(half, 'voltage');
+  return parsed?.ok ? `${2 * parsed.value} V` : typed;
+}
+
+interface SupplyEndProps {
+  end: End;
+  onCommit: (value: number | null) => void;
+  onRange: (range: Range) => void;
+}
+
+function SupplyEnd({ end, ...taking }: SupplyEndProps) {
   const { request, messages, reportDraft } = useConditionsForm();
   const path = `filter.supply.${end}` as const;
   return (
@@ -33,7 +48,8 @@ function SupplyEnd({ end, onCommit }: { end: End; onCommit: (value: number | nul
       value={request.filter?.supply?.[end] ?? null}
       emptyText="any"
       error={messages.get(path)}
-      onCommit={onCommit}
+      spell={railToRail}
+      {...taking}
       onInvalid={(message) => reportDraft(path, message)}
     />
   );

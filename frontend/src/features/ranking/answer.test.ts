@@ -33,16 +33,25 @@ function follow(request: RankingRequest, more: Parameters<typeof rankingOf>[2] =
   return plain(followingSentences(rankingOf(request, items, more), items, request));
 }
 
+function cheapestOf(part: object) {
+  const unitPrice = { amount: '1.85', currency: 'EUR' };
+  return { part, unitPrice, aboveQuietest: 0.2 } as NonNullable<ReturnType<typeof rankingOf>['cheapest']>;
+}
+
 describe('the answer', () => {
   it('names the cheapest of those that can’t be told apart, and its price', () => {
-    const unitPrice = { amount: '1.85', currency: 'EUR' };
-    const cheapest = { part: { partNumber: 'HT-2013' }, unitPrice, aboveQuietest: 0.2 } as NonNullable<
-      ReturnType<typeof rankingOf>['cheapest']
-    >;
+    const cheapest = cheapestOf({ partNumber: 'HT-2013' });
     expect(follow(REQUEST, { cheapest, quietSet: { total: 4 }, total: 9 })).toMatch(
       /^3 parts can’t be told apart from it\. The cheapest of them is HT-2013 at €1\.85\./,
     );
     expect(follow(REQUEST, { cheapest, quietSet: { total: 1 }, total: 9 })).toMatch(/It costs €1\.85\./);
+  });
+
+  it('says where the quietest is the cheapest of them itself', () => {
+    const cheapest = cheapestOf(leader.part);
+    expect(follow(REQUEST, { cheapest, quietSet: { total: 2 }, total: 9 })).toMatch(
+      /^1 part can’t be told apart from it\. None of them is cheaper than it, at €1\.85\./,
+    );
   });
 
   it('names the quietest part, its noise and its distance from the floor', () => {
@@ -78,7 +87,7 @@ describe('the answer', () => {
   it('says how much a better amplifier gains at most', () => {
     expect(leftToGain(leader.contributions)).toBeCloseTo(3.01, 2);
     expect(follow(REQUEST)).toContain(
-      '50 % of its noise is the source’s: a better amplifier gains at most 3.01 dB.',
+      '50 % of the noise is the source’s: a better amplifier gains at most 3.01 dB.',
     );
   });
 

@@ -31,7 +31,7 @@ export function followingSentences(
   const [leader] = items;
   const sentences = [
     quietSetSentence(ranking),
-    cheapestSentence(ranking),
+    cheapestSentence(ranking, leader),
     gainSentence(leader),
     targetSentence(ranking, items, request),
   ];
@@ -47,18 +47,22 @@ function quietSetSentence({ quietSet, total }: Pick<Ranking, 'quietSet' | 'total
     : `${others} parts can’t be told apart from it.`;
 }
 
-function cheapestSentence({ quietSet, cheapest }: Pick<Ranking, 'quietSet' | 'cheapest'>): string {
+function cheapestSentence(
+  { quietSet, cheapest }: Pick<Ranking, 'quietSet' | 'cheapest'>,
+  leader: RankingItem,
+): string {
   if (cheapest === null) return '';
   const price = priceText(cheapest.unitPrice);
-  return quietSet.total > 1
-    ? `The cheapest of them is ${cheapest.part.partNumber} at ${price}.`
-    : `It costs ${price}.`;
+  if (quietSet.total === 1) return `It costs ${price}.`;
+  return cheapest.part.id === leader.part.id
+    ? `None of them is cheaper than it, at ${price}.`
+    : `The cheapest of them is ${cheapest.part.partNumber} at ${price}.`;
 }
 
 function gainSentence({ contributions }: RankingItem): string {
   const gain = formatQuantity(leftToGain(contributions), 'decibel');
   const { source } = sharesOf(contributions);
-  const share = source > 0 ? `${percentText(source)} of its noise is the source’s: a` : 'A';
+  const share = source > 0 ? `${percentText(source)} of the noise is the source’s: a` : 'A';
   return `${share} better amplifier gains at most ${gain}.`;
 }
 

@@ -1,6 +1,6 @@
 import { CONTRIBUTORS, type Contributions, type Contributor } from '@roothertz/common/noise';
 
-export const BAR_WIDTH = 86;
+export const BAR_WIDTH = 80;
 
 /** The floor's length where there is room, and the most that the quietest part's bar takes. */
 const FLOOR_PART = 0.25;

@@ -43,7 +43,7 @@ export function gridColumns(unit: string, priceHeading: string | null): ColDef<G
       colId: 'budget',
       field: 'budget',
       headerName: 'budget, power',
-      width: 112,
+      width: 104,
       cellStyle: { paddingLeft: 6, paddingRight: 4 },
       cellRenderer: ({ value }: Cell<GridRow['budget']>) => value && <BudgetBar {...value} />,
     },

@@ -1,6 +1,6 @@
 import type { Role } from '@roothertz/common/access';
 import type { RankingRequest } from '@roothertz/common/conditions';
-import { screen, waitFor, within } from '@testing-library/react';
+import { act, screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { describe, expect, it } from 'vitest';
 import { exampleRequest } from '../../features/conditions/exampleRequest';
@@ -123,6 +123,36 @@ describe('the rank page', () => {
     await type('gain', '900');
     expect(await screen.findByText('gain: too much of it')).toBeInTheDocument();
     expect(screen.getByText('VR-1108', { selector: 'strong' })).toBeInTheDocument();
+  });
+
+  it('says that the ranking is the one from before while the server can’t be reached', async () => {
+    open('/rank?stage=non-inverting', {
+      'POST /api/rankings/op-amps': (body) => {
+        const request = body as RankingRequest;
+        if (request.conditions.stage.gain === 100) return json(exampleRanking(request).answer);
+        return problem(503, 'server.unreachable', { detail: 'The database doesn’t answer.' });
+      },
+    });
+    await answer();
+    await type('gain', '900');
+    expect(
+      await screen.findByText('This is the ranking from before. The database doesn’t answer.', {
+        selector: 'p',
+      }),
+    ).toBeInTheDocument();
+  });
+
+  it('takes a range that is typed for the band, ± for a supply, and undoes each in one step', async () => {
+    const { router, ranked } = open('/rank?stage=non-inverting');
+    await answer();
+    await type('lower band limit', '1–500 kHz');
+    await waitFor(() => expect(ranked().at(-1)?.conditions.band).toMatchObject({ lower: 1e3, upper: 500e3 }));
+    await type('supply, lowest', '±15 V');
+    await waitFor(() => expect(ranked().at(-1)?.filter?.supply).toEqual({ minimum: 30, maximum: 30 }));
+    await type('supply, highest', '5-36 V');
+    await waitFor(() => expect(ranked().at(-1)?.filter?.supply).toEqual({ minimum: 5, maximum: 36 }));
+    await act(() => router.navigate(-3));
+    expect(screen.getByLabelText('lower band limit')).toHaveValue('20 Hz');
   });
 
   it('says which limit leaves all parts out', async () => {
