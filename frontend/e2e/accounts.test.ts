@@ -1,21 +1,16 @@
-import type { Browser } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { launchBrowser, PHONE, visit } from './support/browser';
+import { describe, expect, it } from 'vitest';
+import { openBrowser, PHONE, visit } from './support/browser';
 import { mailTo, pathIn } from './support/mail';
 import { screenshot } from './support/screenshot';
 
 const PASSWORD = 'four quiet brown owls';
 const NEW_PASSWORD = 'five quiet brown owls';
 
-let browser: Browser;
-beforeAll(async () => {
-  browser = await launchBrowser();
-});
-afterAll(() => browser.close());
+const browser = openBrowser();
 
 describe('an account of one’s own', () => {
   it('is signed up for, confirmed by e-mail, given a new password, and ended in another browser', async () => {
-    const { page, problems, close } = await visit(browser, { expected: [400, 410] });
+    const { page, problems, close } = await visit(browser(), { expected: [400, 410] });
     const email = `nell.${Date.now()}@weir.example`;
     const signIn = async (password: string) => {
       await page.goto('/sign-in?next=/account');
@@ -62,7 +57,7 @@ describe('an account of one’s own', () => {
     await signIn(NEW_PASSWORD);
     await page.getByRole('heading', { name: 'Nell Weir' }).waitFor();
 
-    const phone = await visit(browser, { viewport: PHONE });
+    const phone = await visit(browser(), { viewport: PHONE });
     await phone.page.goto('/sign-in?next=/account');
     await phone.page.getByLabel('E-mail').fill(email);
     await phone.page.getByLabel('Password', { exact: true }).fill(NEW_PASSWORD);

@@ -1,15 +1,11 @@
-import type { Browser, Page } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { launchBrowser, PHONE, visit } from './support/browser';
+import type { Page } from 'playwright-core';
+import { describe, expect, it } from 'vitest';
+import { openBrowser, PHONE, visit } from './support/browser';
 import { uniqueNumber } from './support/parts';
 import { screenshot } from './support/screenshot';
 import { signIn } from './support/session';
 
-let browser: Browser;
-beforeAll(async () => {
-  browser = await launchBrowser();
-});
-afterAll(() => browser.close());
+const browser = openBrowser();
 
 const HEADINGS = 'Hersteller;Bestellnr.;en @1kHz (nV/rtHz);in typ;GBP [MHz];Bauart';
 
@@ -40,7 +36,7 @@ async function shownInParts(page: Page, partNumber: string): Promise<boolean> {
 
 describe('a list', () => {
   it('is read, mapped, applied and undone on one page', async () => {
-    const { page, problems, close } = await visit(browser);
+    const { page, problems, close } = await visit(browser());
     await signIn(page, 'librarian', '/rank');
     await page.getByRole('navigation', { name: 'Pages' }).getByRole('link', { name: 'Import' }).click();
     const partNumber = uniqueNumber();
@@ -72,7 +68,7 @@ describe('a list', () => {
   });
 
   it('is checked again in another dialect, and remembers what was said of its headings', async () => {
-    const { page, problems, close } = await visit(browser);
+    const { page, problems, close } = await visit(browser());
     await signIn(page, 'librarian', '/imports');
     await upload(page, uniqueNumber());
     await page.getByLabel('Bauart becomes').fill('description');
@@ -100,7 +96,7 @@ describe('a list', () => {
   });
 
   it('fits a narrow screen, and isn’t for engineers to bring in', async () => {
-    const { page, problems, close } = await visit(browser, { viewport: PHONE });
+    const { page, problems, close } = await visit(browser(), { viewport: PHONE });
     await signIn(page, 'engineer', '/imports');
     await page.getByText('Lists of parts are imported by your team’s librarians').waitFor();
     await page
@@ -135,7 +131,7 @@ function quotation(): Buffer {
 
 describe('a quotation', () => {
   it('is compared with the prices that stand, applied and undone by purchasing', async () => {
-    const { page, problems, close } = await visit(browser);
+    const { page, problems, close } = await visit(browser());
     await signIn(page, 'purchasing', '/rank');
     await page.getByRole('navigation', { name: 'Pages' }).getByRole('link', { name: 'Import' }).click();
     const file = { name: 'angebot.csv', mimeType: 'text/csv', buffer: quotation() };

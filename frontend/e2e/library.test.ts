@@ -1,19 +1,14 @@
-import type { Browser } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { launchBrowser, PHONE, visit } from './support/browser';
+import { describe, expect, it } from 'vitest';
+import { openBrowser, PHONE, visit } from './support/browser';
 import { createPart, removePart, uniqueNumber } from './support/parts';
 import { screenshot } from './support/screenshot';
 import { signIn } from './support/session';
 
-let browser: Browser;
-beforeAll(async () => {
-  browser = await launchBrowser();
-});
-afterAll(() => browser.close());
+const browser = openBrowser();
 
 describe('the library work', () => {
   it('fills in what the ranking misses, and settles what looks like one part', async () => {
-    const { page, problems, close } = await visit(browser);
+    const { page, problems, close } = await visit(browser());
     await signIn(page, 'librarian', '/parts');
     const number = `${uniqueNumber()}-1`;
     const first = await createPart(page, `${number}0`);
@@ -46,7 +41,7 @@ describe('the library work', () => {
   });
 
   it('fits a narrow screen', async () => {
-    const { page, problems, close } = await visit(browser, { viewport: PHONE });
+    const { page, problems, close } = await visit(browser(), { viewport: PHONE });
     await signIn(page, 'engineer', '/parts');
     for (const path of ['/parts/completeness?library=team', '/parts/resistors/duplicates']) {
       await page.goto(path);

@@ -1,24 +1,16 @@
 import { readFile } from 'node:fs/promises';
-import type { Browser, Page } from 'playwright-core';
-import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from 'vitest';
-import { launchBrowser, visit, type Visit } from './support/browser';
+import type { Page } from 'playwright-core';
+import { afterEach, beforeEach, describe, expect, it } from 'vitest';
+import { openBrowser, visit, type Visit } from './support/browser';
 import { screenshot } from './support/screenshot';
 import { signIn } from './support/session';
 
-let browser: Browser;
+const browser = openBrowser();
 let open: Visit;
 let page: Page;
 
-beforeAll(async () => {
-  browser = await launchBrowser();
-});
-
-afterAll(async () => {
-  await browser.close();
-});
-
 beforeEach(async () => {
-  open = await visit(browser, { acceptDownloads: true });
+  open = await visit(browser(), { acceptDownloads: true });
   page = open.page;
   await signIn(page, 'engineer', '/rank');
   await page.locator('#answer h1').waitFor();

@@ -1,15 +1,11 @@
-import type { Browser, Page } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { launchBrowser, PHONE, visit } from './support/browser';
+import type { Page } from 'playwright-core';
+import { describe, expect, it } from 'vitest';
+import { openBrowser, PHONE, visit } from './support/browser';
 import { createPart, fill, removePart, uniqueNumber } from './support/parts';
 import { screenshot } from './support/screenshot';
 import { signIn } from './support/session';
 
-let browser: Browser;
-beforeAll(async () => {
-  browser = await launchBrowser();
-});
-afterAll(() => browser.close());
+const browser = openBrowser();
 
 function rows(page: Page) {
   return page.getByRole('region', { name: 'Op-amps' }).locator('a');
@@ -17,7 +13,7 @@ function rows(page: Page) {
 
 describe('the parts', () => {
   it('are searched, narrowed and sorted, all of it kept in the address', async () => {
-    const { page, problems, close } = await visit(browser);
+    const { page, problems, close } = await visit(browser());
     await signIn(page, 'engineer', '/parts');
     await rows(page).first().waitFor();
     await page.getByText(/\d+ parts: \d+ curated, \d+ of your own/).waitFor();
@@ -38,7 +34,7 @@ describe('the parts', () => {
   });
 
   it('open by keyboard alone', async () => {
-    const { page, problems, close } = await visit(browser);
+    const { page, problems, close } = await visit(browser());
     await signIn(page, 'engineer', '/parts');
     await rows(page).first().waitFor();
     await page.getByLabel('Search parts').focus();
@@ -54,7 +50,7 @@ describe('the parts', () => {
   });
 
   it('are read-only for an engineer, and where they are curated', async () => {
-    const { page, problems, close } = await visit(browser);
+    const { page, problems, close } = await visit(browser());
     await signIn(page, 'engineer', '/parts?library=team');
     await rows(page).first().click();
     await page.getByLabel('Parameters').waitFor();
@@ -66,7 +62,7 @@ describe('the parts', () => {
   });
 
   it('are created, edited, deleted and brought back by a librarian', async () => {
-    const { page, problems, close } = await visit(browser);
+    const { page, problems, close } = await visit(browser());
     await signIn(page, 'librarian', '/parts');
     const partNumber = uniqueNumber();
     await createPart(page, partNumber);
@@ -90,7 +86,7 @@ describe('the parts', () => {
   });
 
   it('can’t be entered twice, and the form says so at the field', async () => {
-    const { page, problems, close } = await visit(browser, { expected: [409] });
+    const { page, problems, close } = await visit(browser(), { expected: [409] });
     await signIn(page, 'librarian', '/parts');
     const partNumber = uniqueNumber();
     const address = await createPart(page, partNumber);
@@ -108,10 +104,10 @@ describe('the parts', () => {
   });
 
   it('show what a second librarian changed meanwhile, value by value', async () => {
-    const { page, problems, close } = await visit(browser, { expected: [409] });
+    const { page, problems, close } = await visit(browser(), { expected: [409] });
     await signIn(page, 'librarian', '/parts');
     const address = await createPart(page, uniqueNumber());
-    const other = await visit(browser);
+    const other = await visit(browser());
     await signIn(other.page, 'admin', new URL(address).pathname);
     await page.getByRole('link', { name: 'Edit' }).click();
     await page.getByRole('button', { name: 'Save' }).waitFor();
@@ -134,7 +130,7 @@ describe('the parts', () => {
   });
 
   it('are chosen, retired in one act and brought back by Undo', async () => {
-    const { page, problems, close } = await visit(browser);
+    const { page, problems, close } = await visit(browser());
     await signIn(page, 'librarian', '/parts');
     const partNumber = uniqueNumber();
     const address = await createPart(page, partNumber);
@@ -158,7 +154,7 @@ describe('the parts', () => {
   });
 
   it('warn before unsaved changes are left', async () => {
-    const { page, problems, close } = await visit(browser);
+    const { page, problems, close } = await visit(browser());
     await signIn(page, 'librarian', '/parts/new');
     await fill(page, 'part number', 'half written');
     await page.getByRole('navigation').getByRole('link', { name: 'Parts' }).click();
@@ -172,7 +168,7 @@ describe('the parts', () => {
   });
 
   it('fit a narrow screen', async () => {
-    const { page, problems, close } = await visit(browser, { viewport: PHONE });
+    const { page, problems, close } = await visit(browser(), { viewport: PHONE });
     await signIn(page, 'librarian', '/parts');
     await rows(page).first().waitFor();
     await screenshot(page, 'parts-narrow');

@@ -1,27 +1,19 @@
-import type { Browser, Locator, Page } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { BASE_URL, launchBrowser, PHONE, visit, type Visit } from './support/browser';
+import type { Locator, Page } from 'playwright-core';
+import { describe, expect, it } from 'vitest';
+import { BASE_URL, openBrowser, PHONE, visit, type Visit } from './support/browser';
 import { screenshot } from './support/screenshot';
 import { signIn } from './support/session';
 
-let browser: Browser;
+const browser = openBrowser();
 let open: Visit;
 let page: Page;
-
-beforeAll(async () => {
-  browser = await launchBrowser();
-});
-
-afterAll(async () => {
-  await browser.close();
-});
 
 async function start(
   role: 'purchasing' | 'engineer',
   path: string,
   options: Parameters<typeof visit>[1] = {},
 ) {
-  open = await visit(browser, { permissions: ['clipboard-read', 'clipboard-write'], ...options });
+  open = await visit(browser(), { permissions: ['clipboard-read', 'clipboard-write'], ...options });
   page = open.page;
   await signIn(page, role, path);
   await cell(0, 'price:1').waitFor();
@@ -163,7 +155,7 @@ describe('the prices page', () => {
     await start('purchasing', '/prices?search=VR-1136', { expected: [409] });
     const listed = await page.request.get('/api/prices?search=VR-1136');
     const [{ offer }] = (await listed.json()).items;
-    const other = await visit(browser);
+    const other = await visit(browser());
     await signIn(other.page, 'admin');
     const theirs = { rows: [{ id: offer.id, version: offer.version, stock: (offer.stock ?? 0) + 1 }] };
     const saved = await other.page.request.put('/api/prices', {

@@ -1,28 +1,20 @@
 import { readFile } from 'node:fs/promises';
-import type { Browser, Page } from 'playwright-core';
-import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
-import { DESKTOP, launchBrowser, PHONE, visit, type Visit } from './support/browser';
+import type { Page } from 'playwright-core';
+import { beforeEach, describe, expect, it } from 'vitest';
+import { DESKTOP, openBrowser, PHONE, visit, type Visit } from './support/browser';
 import { screenshot } from './support/screenshot';
 import { signIn } from './support/session';
 
-let browser: Browser;
+const browser = openBrowser();
 let open: Visit;
 let page: Page;
-
-beforeAll(async () => {
-  browser = await launchBrowser();
-});
-
-afterAll(async () => {
-  await browser.close();
-});
 
 const answer = () => page.locator('#answer h1');
 const field = (label: string) => page.getByLabel(label, { exact: true });
 const rows = () => page.locator('#ranking [row-id]:not([row-id="floor"])');
 
 async function start(options: Parameters<typeof visit>[1] = {}, path = '/rank') {
-  open = await visit(browser, options);
+  open = await visit(browser(), options);
   page = open.page;
   await signIn(page, 'engineer', path);
   await answer().waitFor();
@@ -212,7 +204,7 @@ describe('the rank page elsewhere', () => {
   });
 
   it('holds long names without breaking its columns', async () => {
-    open = await visit(browser);
+    open = await visit(browser());
     page = open.page;
     await page.route('**/api/rankings/op-amps', async (route) => {
       const response = await route.fetch();

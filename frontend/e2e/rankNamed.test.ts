@@ -1,19 +1,11 @@
-import type { Browser, Page } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { launchBrowser, visit, type Visit } from './support/browser';
+import type { Page } from 'playwright-core';
+import { describe, expect, it } from 'vitest';
+import { openBrowser, visit, type Visit } from './support/browser';
 import { signIn } from './support/session';
 
-let browser: Browser;
+const browser = openBrowser();
 let open: Visit;
 let page: Page;
-
-beforeAll(async () => {
-  browser = await launchBrowser();
-});
-
-afterAll(async () => {
-  await browser.close();
-});
 
 const heading = (name: string) => page.getByRole('heading', { name, exact: true });
 
@@ -29,7 +21,7 @@ async function giveName(name: string) {
 
 describe('named conditions', () => {
   it('are saved, changed, renamed, deleted and brought back', async () => {
-    open = await visit(browser, { expected: [409] });
+    open = await visit(browser(), { expected: [409] });
     page = open.page;
     await signIn(page, 'engineer', '/rank?stage=non-inverting&rs=1.5k');
     await heading('Conditions without a name').waitFor();
@@ -70,7 +62,7 @@ describe('named conditions', () => {
   });
 
   it('are offered without saving to who may not save', async () => {
-    open = await visit(browser);
+    open = await visit(browser());
     page = open.page;
     await signIn(page, 'purchasing', '/rank');
     await heading('River geophone').waitFor();

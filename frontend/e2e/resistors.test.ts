@@ -1,17 +1,13 @@
-import type { Browser, Page } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { launchBrowser, PHONE, visit } from './support/browser';
+import type { Page } from 'playwright-core';
+import { describe, expect, it } from 'vitest';
+import { openBrowser, PHONE, visit } from './support/browser';
 import { createPart, fill, removePart, uniqueNumber } from './support/parts';
 import { screenshot } from './support/screenshot';
 import { signIn } from './support/session';
 
 const LIST = '/parts/resistors';
 
-let browser: Browser;
-beforeAll(async () => {
-  browser = await launchBrowser();
-});
-afterAll(() => browser.close());
+const browser = openBrowser();
 
 function rows(page: Page) {
   return page.getByRole('region', { name: 'Resistors' }).locator('a');
@@ -19,7 +15,7 @@ function rows(page: Page) {
 
 describe('the resistors', () => {
   it('stand beside the op-amps and are searched on the server where not all are loaded', async () => {
-    const { page, problems, close } = await visit(browser);
+    const { page, problems, close } = await visit(browser());
     await signIn(page, 'engineer', '/parts');
     await page.getByRole('link', { name: 'Resistors' }).click();
     await rows(page).first().waitFor();
@@ -36,7 +32,7 @@ describe('the resistors', () => {
   });
 
   it('are narrowed by technology and by values typed as one writes them', async () => {
-    const { page, problems, close } = await visit(browser);
+    const { page, problems, close } = await visit(browser());
     await signIn(page, 'engineer', `${LIST}?technology=thick-film&library=curated&sort=-noiseIndex`);
     await fill(page, 'resistance from', '4k7');
     await page.keyboard.press('Enter');
@@ -61,7 +57,7 @@ describe('the resistors', () => {
   });
 
   it('are created, edited, deleted and brought back by a librarian', async () => {
-    const { page, problems, close } = await visit(browser);
+    const { page, problems, close } = await visit(browser());
     await signIn(page, 'librarian', LIST);
     const partNumber = uniqueNumber();
     await createPart(page, partNumber, 'resistor');
@@ -87,10 +83,10 @@ describe('the resistors', () => {
   });
 
   it('show what a second librarian changed meanwhile, value by value', async () => {
-    const { page, problems, close } = await visit(browser, { expected: [409] });
+    const { page, problems, close } = await visit(browser(), { expected: [409] });
     await signIn(page, 'librarian', LIST);
     const address = await createPart(page, uniqueNumber(), 'resistor');
-    const other = await visit(browser);
+    const other = await visit(browser());
     await signIn(other.page, 'admin', new URL(address).pathname);
     await page.getByRole('link', { name: 'Edit' }).click();
     await page.getByRole('button', { name: 'Save' }).waitFor();
@@ -111,7 +107,7 @@ describe('the resistors', () => {
   });
 
   it('fit a narrow screen', async () => {
-    const { page, problems, close } = await visit(browser, { viewport: PHONE });
+    const { page, problems, close } = await visit(browser(), { viewport: PHONE });
     await signIn(page, 'librarian', `${LIST}?technology=metal-foil`);
     await rows(page).first().waitFor();
     const first = (await rows(page).first().getAttribute('href'))!;

@@ -1,18 +1,13 @@
-import type { Browser } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { launchBrowser, PHONE, visit } from './support/browser';
+import { describe, expect, it } from 'vitest';
+import { openBrowser, PHONE, visit } from './support/browser';
 import { screenshot } from './support/screenshot';
 import { emailOf, signIn } from './support/session';
 
-let browser: Browser;
-beforeAll(async () => {
-  browser = await launchBrowser();
-});
-afterAll(() => browser.close());
+const browser = openBrowser();
 
 describe('the session', () => {
   it('leads through the sign-in to the page that was asked for, and ends with the sign-out', async () => {
-    const { page, problems, close } = await visit(browser);
+    const { page, problems, close } = await visit(browser());
     await page.goto('/account');
     await page.getByRole('heading', { name: 'Sign in' }).waitFor();
     await screenshot(page, 'sign-in');
@@ -29,7 +24,7 @@ describe('the session', () => {
   });
 
   it('refuses a wrong password at the form, by keyboard alone', async () => {
-    const { page, problems, close } = await visit(browser);
+    const { page, problems, close } = await visit(browser());
     await page.goto('/sign-in');
     await page.getByLabel('E-mail').waitFor();
     await page.keyboard.type('nobody@tarnfield.example');
@@ -43,7 +38,7 @@ describe('the session', () => {
   });
 
   it('keeps the chosen theme over a reload', async () => {
-    const { page, problems, close } = await visit(browser);
+    const { page, problems, close } = await visit(browser());
     await signIn(page, 'reviewer', '/account');
     await page.getByRole('radio', { name: 'Dark' }).check();
     await page.reload();
@@ -56,7 +51,7 @@ describe('the session', () => {
   });
 
   it('puts the rail on top of a narrow screen without anything running out of it', async () => {
-    const { page, problems, close } = await visit(browser, { viewport: PHONE });
+    const { page, problems, close } = await visit(browser(), { viewport: PHONE });
     await signIn(page, 'engineer', '/account');
     const width = await page.evaluate(() => document.documentElement.scrollWidth);
     expect(width).toBeLessThanOrEqual(PHONE.width);
@@ -66,7 +61,7 @@ describe('the session', () => {
   });
 
   it('skips to the page by keyboard', async () => {
-    const { page, problems, close } = await visit(browser);
+    const { page, problems, close } = await visit(browser());
     await signIn(page, 'engineer', '/account');
     await page.reload();
     await page.getByRole('heading', { level: 1 }).waitFor();

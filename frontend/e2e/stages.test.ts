@@ -1,20 +1,12 @@
-import type { Browser, Page } from 'playwright-core';
-import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
-import { DESKTOP, launchBrowser, PHONE, visit, type Visit } from './support/browser';
+import type { Page } from 'playwright-core';
+import { afterEach, describe, expect, it } from 'vitest';
+import { DESKTOP, openBrowser, PHONE, visit, type Visit } from './support/browser';
 import { screenshot } from './support/screenshot';
 import { signIn } from './support/session';
 
-let browser: Browser;
+const browser = openBrowser();
 let open: Visit;
 let page: Page;
-
-beforeAll(async () => {
-  browser = await launchBrowser();
-});
-
-afterAll(async () => {
-  await browser.close();
-});
 
 afterEach(async () => {
   const { problems, close } = open;
@@ -29,7 +21,7 @@ const rows = (label: string) =>
   page.getByRole('region', { name: label, exact: true }).locator('[row-id]:not([row-id="floor"])');
 
 async function start(path: string, options: Parameters<typeof visit>[1] = {}) {
-  open = await visit(browser, options);
+  open = await visit(browser(), options);
   page = open.page;
   await signIn(page, 'engineer', path);
   await answer().waitFor();

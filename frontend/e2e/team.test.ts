@@ -1,15 +1,11 @@
-import type { Browser, Page } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { launchBrowser, PHONE, visit } from './support/browser';
+import type { Page } from 'playwright-core';
+import { describe, expect, it } from 'vitest';
+import { openBrowser, PHONE, visit } from './support/browser';
 import { mailTo, pathIn } from './support/mail';
 import { screenshot } from './support/screenshot';
 import { signIn } from './support/session';
 
-let browser: Browser;
-beforeAll(async () => {
-  browser = await launchBrowser();
-});
-afterAll(() => browser.close());
+const browser = openBrowser();
 
 async function invite(page: Page, email: string): Promise<void> {
   await page.getByLabel('E-mail').fill(email);
@@ -20,13 +16,13 @@ async function invite(page: Page, email: string): Promise<void> {
 describe('the team', () => {
   it('invites a colleague by e-mail, who joins, gets a role and is removed again', async () => {
     const email = `nell.${Date.now().toString(36)}@weir.example`;
-    const { page, problems, close } = await visit(browser);
+    const { page, problems, close } = await visit(browser());
     await signIn(page, 'admin', '/team');
     await invite(page, email);
     await page.getByRole('region', { name: 'Open invitations' }).getByText(email).waitFor();
     await screenshot(page, 'team');
 
-    const guest = await visit(browser, { expected: [409] });
+    const guest = await visit(browser(), { expected: [409] });
     const path = pathIn(await mailTo(email));
     await guest.page.goto(path);
     await guest.page.getByLabel('Your name').fill('Nell Weir');
@@ -70,7 +66,7 @@ describe('the team', () => {
   });
 
   it('shows the others who is in it, on a narrow screen too', async () => {
-    const { page, problems, close } = await visit(browser, { viewport: PHONE });
+    const { page, problems, close } = await visit(browser(), { viewport: PHONE });
     await signIn(page, 'engineer', '/team');
     await page.getByRole('row', { name: /Ingrid Marlowe.*team admin/ }).waitFor();
     expect(await page.getByRole('button', { name: 'Send invitation' }).count()).toBe(0);

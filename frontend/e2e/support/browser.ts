@@ -1,4 +1,5 @@
 import { chromium, type Browser, type BrowserContextOptions, type Page } from 'playwright-core';
+import { afterAll, beforeAll } from 'vitest';
 
 export const BASE_URL = process.env.E2E_BASE_URL ?? 'http://127.0.0.1:3000';
 
@@ -21,6 +22,16 @@ export function launchBrowser(): Promise<Browser> {
     executablePath: process.env.CHROMIUM_PATH ?? '/usr/bin/chromium',
     args: FLAGS,
   });
+}
+
+/** The browser of a file's journeys, open from the first of them to the last. */
+export function openBrowser(): () => Browser {
+  let browser: Browser;
+  beforeAll(async () => {
+    browser = await launchBrowser();
+  });
+  afterAll(() => browser.close());
+  return () => browser;
 }
 
 /** A page in a session of its own, and what went wrong in it. */
