@@ -27,9 +27,10 @@ describe('the library work', () => {
     await pair.getByText('part numbers that read alike').waitFor();
     await screenshot(page, 'parts-duplicates');
     await pair.getByRole('button', { name: 'Keep both' }).click();
-    await page.getByText('are both kept').waitFor();
+    const kept = page.getByRole('alert').filter({ hasText: 'are both kept' });
+    await kept.waitFor();
     await pair.waitFor({ state: 'detached' });
-    await page.getByRole('button', { name: 'Undo' }).click();
+    await kept.getByRole('button', { name: 'Undo' }).click();
     await pair.getByRole('button', { name: `Retire ${number}O` }).click();
     await page.getByText(`${number}O is retired`).waitFor();
     await pair.waitFor({ state: 'detached' });

@@ -68,7 +68,8 @@ export function showTheme(mode: ThemeMode): void {
     style.setProperty(variableOf(token as keyof Tokens), colour);
 }
 
-export function antdThemeOf(mode: ThemeMode): ThemeConfig {
+/** `isStill` = without motion, so that nothing waits for the end of one. */
+export function antdThemeOf(mode: ThemeMode, { isStill }: { isStill: boolean }): ThemeConfig {
   const tokens = TOKENS[mode];
   return {
     algorithm: mode === 'dark' ? antdTheme.darkAlgorithm : antdTheme.defaultAlgorithm,
@@ -80,6 +81,7 @@ export function antdThemeOf(mode: ThemeMode): ThemeConfig {
       borderRadiusLG: 4,
       borderRadiusSM: 4,
       controlHeight: 34,
+      motion: !isStill,
     },
     components: {
       Button: {

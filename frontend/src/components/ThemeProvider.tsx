@@ -1,7 +1,7 @@
 import { App, ConfigProvider } from 'antd';
 import enGB from 'antd/locale/en_GB';
-import { useLayoutEffect, useMemo, useState, useSyncExternalStore, type ReactNode } from 'react';
-import { antdThemeOf, showTheme, type ThemeMode } from '../theme';
+import { useCallback, useLayoutEffect, useMemo, useState, useSyncExternalStore, type ReactNode } from 'react';
+import { antdThemeOf, showTheme } from '../theme';
 import { ThemeContext, type ThemeChoice } from './useTokens';
 
 const STORAGE_KEY = 'roothertz.theme';
@@ -12,8 +12,9 @@ const NOTICES = { bottom: 76 };
 /** Shows the theme that the member chose in this browser, else the system's. */
 export function ThemeProvider({ children }: { children: ReactNode }) {
   const [choice, setChoice] = useState(storedChoice);
-  const system = useSystemMode();
-  const mode = choice === 'system' ? system : choice;
+  const isDark = useMedia('(prefers-color-scheme: dark)');
+  const isStill = useMedia('(prefers-reduced-motion: reduce)');
+  const mode = choice !== 'system' ? choice : isDark ? 'dark' : 'light';
   useLayoutEffect(() => showTheme(mode), [mode]);
   const state = useMemo(
     () => ({
@@ -26,7 +27,7 @@ export function ThemeProvider({ children }: { children: ReactNode }) {
     }),
     [choice, mode],
   );
-  const antdTheme = useMemo(() => antdThemeOf(mode), [mode]);
+  const antdTheme = useMemo(() => antdThemeOf(mode, { isStill }), [mode, isStill]);
   return (
     <ThemeContext value={state}>
       <ConfigProvider theme={antdTheme} locale={enGB} button={{ autoInsertSpace: false }}>
@@ -41,16 +42,15 @@ function storedChoice(): ThemeChoice {
   return stored === 'light' || stored === 'dark' ? stored : 'system';
 }
 
-function useSystemMode(): ThemeMode {
-  return useSyncExternalStore(subscribeToSystem, () => (darkQuery().matches ? 'dark' : 'light'));
-}
-
-function subscribeToSystem(onChange: () => void): () => void {
-  const query = darkQuery();
-  query.addEventListener('change', onChange);
-  return () => query.removeEventListener('change', onChange);
-}
-
-function darkQuery(): MediaQueryList {
-  return window.matchMedia('(prefers-color-scheme: dark)');
+/** Whether what a media query asks holds, also when that changes. */
+function useMedia(query: string): boolean {
+  const subscribe = useCallback(
+    (onChange: () => void) => {
+      const media = window.matchMedia(query);
+      media.addEventListener('change', onChange);
+      return () => media.removeEventListener('change', onChange);
+    },
+    [query],
+  );
+  return useSyncExternalStore(subscribe, () => window.matchMedia(query).matches);
 }
