@@ -10,6 +10,8 @@ export interface PreparedColumns {
   gainBandwidth: Float64Array;
   /** F; 0 where unknown */
   inputCapacitance: Float64Array;
+  /** F, of all rows */
+  leastCapacitance: number;
   lattice: Lattice;
   classes: PartClasses;
   /** The spreads of each class's noise parameters. */
@@ -50,6 +52,7 @@ function prepare(columns: AmplifierColumns): PreparedColumns {
   return {
     gainBandwidth,
     inputCapacitance,
+    leastCapacitance: inputCapacitance.reduce((a, b) => Math.min(a, b), Infinity),
     lattice: latticeOf(gainBandwidth, inputCapacitance),
     classes,
     spreads,

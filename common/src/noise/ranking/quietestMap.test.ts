@@ -50,7 +50,7 @@ const query = (conditions: OperatingConditions): MapQuery => ({
 });
 
 describe('quietestMap', () => {
-  const libraries = [library(60, 1), library(80, 2)];
+  const libraries = [library(60, 1), library(400, 2)];
 
   it.each(stages)('has in each cell the leader of a ranking at that cell, for %s', (_, conditions) => {
     const map = quietestMap(query(conditions), libraries);

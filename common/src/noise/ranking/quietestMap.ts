@@ -1,11 +1,12 @@
 import type { OperatingConditions, PartFilter } from '../../conditions/index.js';
-import { addedPower } from '../budget.js';
+import { addedPower, type Generators } from '../budget.js';
 import { INTEGRAL, INTEGRALS, type Evaluate, type StageModel } from '../stage/model.js';
 import { stageModel } from '../stage/stageModel.js';
 import { referenceEvaluation } from '../stageFigures.js';
 import type { AmplifierColumns } from './columns.js';
 import { conditionExclusions, filterExclusions, isSought, RANKED, searchWords } from './exclusions.js';
 import { prepareGenerators } from './generators.js';
+import { bucketsOf, type Bucket } from './mapBuckets.js';
 import { preparedColumns } from './preparedColumns.js';
 import type { PartPlace } from './sift.js';
 
@@ -70,12 +71,14 @@ export function cellConditions(
  * frequency: in each cell the leader of a ranking by `inputNoiseDensity` at `cellConditions`.
  *
  * Where a part's density never falls with its input capacitance and doesn't depend on its gain–bandwidth
- * product, the value at the least capacitance is a lower bound, and few parts are evaluated.
+ * product, the value at the least capacitance is a lower bound, and few parts are evaluated: most are passed over
+ * in buckets of parts with nearly the same noise.
  */
 export function quietestMap(query: MapQuery, libraries: readonly AmplifierColumns[]): QuietestMap {
   const resistances = axisPoints(query.resistance);
   const frequencies = axisPoints(query.frequency);
   const candidates = findCandidates(query.filter, libraries);
+  const buckets = bucketsOf(query.conditions, libraries, candidates);
   const parts = new Map<string, { index: number; place: PartPlace }>();
   const indexOf = (place: PartPlace | null) => {
     if (place === null) return -1;
@@ -87,7 +90,7 @@ export function quietestMap(query: MapQuery, libraries: readonly AmplifierColumn
     let previous: PartPlace | null = null;
     return frequencies.map((frequency) => {
       const conditions = cellConditions(query.conditions, resistance, frequency);
-      previous = findWinner(conditions, libraries, candidates, previous);
+      previous = findWinner(conditions, libraries, buckets, previous);
       return indexOf(previous);
     });
   });
@@ -107,7 +110,7 @@ function findCandidates(filter: PartFilter, libraries: readonly AmplifierColumns
 function findWinner(
   conditions: OperatingConditions,
   libraries: readonly AmplifierColumns[],
-  candidates: readonly Uint32Array[],
+  buckets: readonly Bucket[],
   previous: PartPlace | null,
 ): PartPlace | null {
   const model = stageModel(conditions);
@@ -126,9 +129,11 @@ function findWinner(
     winner = place;
   };
   if (previous) consider(previous.library, previous.row);
-  candidates.forEach((rows, library) => {
-    for (const row of rows) if (densities[library].atLeast(row) <= best) consider(library, row);
-  });
+  for (const { library, rows, least } of buckets) {
+    const { leastOf, generatorsAt } = densities[library];
+    if (leastOf(least) > best) continue;
+    for (const row of rows) if (leastOf(generatorsAt(row)) <= best) consider(library, row);
+  }
   return winner;
 }
 
@@ -144,19 +149,19 @@ function densitiesOf(
   columns: AmplifierColumns,
 ) {
   const isBounded = model.spotRises && conditions.source.inductance === 0;
-  const { gainBandwidth, inputCapacitance } = preparedColumns(columns);
+  const { gainBandwidth, inputCapacitance, leastCapacitance } = preparedColumns(columns);
   const generatorsAt = prepareGenerators(conditions, columns);
   const exact = new Float64Array(INTEGRALS);
   const least = new Float64Array(INTEGRALS);
-  const leastCapacitance = inputCapacitance.reduce((a, b) => Math.min(a, b), Infinity);
   if (isBounded) evaluate(Infinity, leastCapacitance, least);
   return {
     at(row: number): number {
       evaluate(gainBandwidth[row], inputCapacitance[row], exact);
       return addedPower(exact, generatorsAt(row)) / exact[INTEGRAL.source];
     },
-    atLeast(row: number): number {
-      return isBounded ? (ALMOST * addedPower(least, generatorsAt(row))) / least[INTEGRAL.source] : 0;
+    generatorsAt,
+    leastOf(generators: Generators): number {
+      return isBounded ? (ALMOST * addedPower(least, generators)) / least[INTEGRAL.source] : 0;
     },
   };
 }
