@@ -170,7 +170,7 @@ describe('imports', () => {
       },
       {
         line: 3,
-        partNumber: 'E1',
+        partNumber: 'E-1',
         doubts: [{ code: 'in-use', message: 'used in the saved conditions “River geophone”' }],
       },
     ]);
@@ -186,7 +186,7 @@ describe('imports', () => {
     ]);
     const { body: now } = await librarian.agent.get(`/api/op-amps/${edited.id}`).expect(200);
     expect(now).toMatchObject({
-      manufacturer: 'Kestrel-Analog Inc.',
+      manufacturer: 'Kestrel Analog',
       amplifier: { voltageNoise: 3e-9 },
       version: 2,
     });
@@ -203,14 +203,14 @@ describe('imports', () => {
       undoneBy: expect.any(Object),
     });
     expect(await rowsOf(librarian, done, 'state=kept')).toMatchObject([
-      { line: 3, partNumber: 'E1', kept: true },
+      { line: 3, partNumber: 'E-1', kept: true },
       { line: 5, partNumber: 'N-2', kept: true },
     ]);
     const after = (await librarian.agent.get(`/api/op-amps/${changed.id}`)).body;
     expect(after).toEqual({ ...before, version: 3, updatedAt: expect.any(String) });
     expect((await opAmps()).map(({ partNumber }: { partNumber: string }) => partNumber).sort()).toEqual([
       'C-1',
-      'E1',
+      'E-1',
       'N-2',
     ]);
     await librarian.agent.post(`/api/imports/${done.id}/undo`).expect(409);

@@ -71,10 +71,14 @@ describe('rowJudge', () => {
     expect(verdict).toMatchObject({
       state: 'changed',
       part: { description: 'Kept', lifecycle: 'obsolete', amplifier: { gainBandwidth: 6e7 } },
-      changes: [
-        { field: 'manufacturer', old: 'Vireo', new: 'VIREO' },
-        { field: 'amplifier.currentNoise', old: 1.2e-12, new: 1.4e-12 },
-      ],
+      changes: [{ field: 'amplifier.currentNoise', old: 1.2e-12, new: 1.4e-12 }],
+    });
+  });
+
+  it('takes another spelling of its names for no change', () => {
+    expect(judge(['VIREO Inc.', 'vr 1', '', '', '', '', ''], accepted(ROW))).toMatchObject({
+      state: 'unchanged',
+      part: { manufacturer: 'Vireo', partNumber: 'VR-1' },
     });
   });
 

@@ -23,7 +23,8 @@ export interface KnownParts<Part> {
 
 /**
  * Makes the judge of a list's rows. A new part takes defaults for what its row doesn't state; of an existing
- * part, what the row doesn't state stays as it is: an empty cell never takes away what the library knows.
+ * part, what the row doesn't state stays as it is: an empty cell never takes away what the library knows. Its names
+ * stay as the library spells them, for "ACME  corp." of a list is no change of "Acme Corp".
  */
 export function rowJudge<Part extends LibraryPart>(
   catalogue: PartCatalogue<Part>,
@@ -51,7 +52,7 @@ export function rowJudge<Part extends LibraryPart>(
     const { values, errors } =
       current === null
         ? withDefaults(reading)
-        : { values: new Map([...current, ...reading.stated]), errors: [] };
+        : { values: new Map([...current, ...withoutNames(reading.stated)]), errors: [] };
     if (errors.length > 0) return { state: 'refused', errors };
     const part = partOfValues<Part>(catalogue, values);
     const doubts = [...contradictions(catalogue, part), ...doubtsOf(catalogue, part, [existing, curated])];
@@ -60,6 +61,10 @@ export function rowJudge<Part extends LibraryPart>(
     const state = changes === null ? 'new' : 'changed';
     return { state: doubts.length > 0 ? 'doubtful' : state, part, changes: changes ?? [], doubts };
   };
+}
+
+function withoutNames(stated: ReadonlyMap<string, PartValue>): [string, PartValue][] {
+  return [...stated].filter(([path]) => path !== 'manufacturer' && path !== 'partNumber');
 }
 
 /** Limits that contradict each other are the list’s to mend, and no reason to leave the rest of the part out. */

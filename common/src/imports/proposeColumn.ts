@@ -26,7 +26,7 @@ export function columnProposer(catalogue: ListedFields): (heading: string) => Pr
   return (heading) => {
     const pieces = readHeading(heading);
     const whole = read(heading);
-    const asWhole = whole && proposal(catalogue, whole, { ...pieces, ...plainly(whole) });
+    const asWhole = whole && proposal(catalogue, whole, { ...pieces, ...plainly(whole, pieces) });
     if (whole !== null && hasPlainUnit(whole)) return asWhole;
     const named = read(pieces.wholeName);
     if (named !== null && hasPlainUnit(named)) return proposal(catalogue, named, { ...pieces, origin: null });
@@ -49,8 +49,8 @@ function hasPlainUnit(column: PartColumn): boolean {
 }
 
 /** A heading that is a name as a whole has no “max” or frequency of its own: “supply voltage max”. */
-function plainly(column: PartColumn): Partial<HeadingPieces> {
-  const unit = column.holds === 'figure' && column.unit !== '' ? column.unit : null;
+function plainly(column: PartColumn, pieces: HeadingPieces): Partial<HeadingPieces> {
+  const unit = column.holds === 'figure' && column.unit !== '' ? pieces.unit : null;
   return { unit, frequency: null, peakToPeak: false, origin: null };
 }
 

@@ -42,7 +42,7 @@ export function readHeading(heading: string): HeadingPieces {
   return {
     name: tidy(qualifier ? plain.replace(qualifier[0], ' ') : plain),
     wholeName: tidy(plain),
-    unit: unit !== null && isInCapitals(heading) ? (unitInCapitals(unit) ?? unit) : unit,
+    unit: unit && withRoot(isInCapitals(heading) ? (unitInCapitals(unit) ?? unit) : unit),
     frequency: frequency && hertz(frequency[1] + frequency[2]),
     peakToPeak: peaks || slow !== heading || PEAKS.test(rest),
     origin: qualifier?.[1] ?? null,
@@ -63,6 +63,11 @@ function tidy(name: string): string {
 
 function isInCapitals(heading: string): boolean {
   return !/\p{Ll}/u.test(heading);
+}
+
+/** Lists in Windows-1252, which has no root sign, write `nV/vHz` or `nV/?Hz`. */
+function withRoot(unit: string): string {
+  return unit.replace(/\/[v?](?=\(?hz)/i, '/√');
 }
 
 /** Programs that write their headings in capitals mean pF by PF, MHz by MHZ, and mA by MA. */

@@ -5,7 +5,7 @@ import type { Dialect, DialectChoice, Import } from '../../api/imports';
 import { QuantityInput } from '../../components/QuantityInput';
 import styles from './Detected.module.css';
 import { moment } from '../../components/moments';
-import { count } from './importWords';
+import { grouped } from '../../components/countOf';
 
 interface DetectedProps {
   imported: Import;
@@ -65,7 +65,7 @@ export function Detected({ imported, canChange, onOverrule }: DetectedProps) {
             dialect.headerLine
           )}
         </Fact>
-        <Fact term="Rows">{count(rowCount)}</Fact>
+        <Fact term="Rows">{grouped(rowCount)}</Fact>
       </dl>
       <p className={styles.reader}>
         read by {createdBy?.name ?? 'a former member'}

@@ -7,7 +7,8 @@ import { FieldMessage } from '../../components/FieldMessage';
 import { useMayDo } from '../../components/useMember';
 import styles from './History.module.css';
 import { moment } from '../../components/moments';
-import { count, rows, stateWords } from './importWords';
+import { grouped } from '../../components/countOf';
+import { rows, stateWords } from './importWords';
 import { KINDS } from './kinds';
 import { useImportActs } from './useImportActs';
 
@@ -33,7 +34,7 @@ export function HistoryRow({ imported }: HistoryRowProps) {
       </td>
       {ROW_STATES.map((one) => (
         <td key={one} className={styles.count} data-label={one}>
-          {counts === null ? '–' : count(counts[one])}
+          {counts === null ? '–' : grouped(counts[one])}
         </td>
       ))}
       <td>
@@ -60,7 +61,7 @@ export function HistoryRow({ imported }: HistoryRowProps) {
 function outcomeNote(imported: ImportSummary): string {
   const { state, progress, appliedAt, appliedBy, undoneAt, undoneBy, keptCount } = imported;
   if (isRunning(imported))
-    return progress === null ? '' : `${count(progress.done)} of ${count(progress.total)} rows`;
+    return progress === null ? '' : `${grouped(progress.done)} of ${grouped(progress.total)} rows`;
   if (state === 'applied') return `by ${appliedBy?.name ?? 'a former member'}, ${moment(appliedAt!)}`;
   if (state !== 'undone') return '';
   const kept = keptCount === 0 ? '' : `; ${rows(keptCount)} kept`;

@@ -3,7 +3,7 @@ import { useState } from 'react';
 import type { Import } from '../../api/imports';
 import { FieldMessage } from '../../components/FieldMessage';
 import { Table } from '../../components/Table';
-import { count } from './importWords';
+import { grouped } from '../../components/countOf';
 import { KINDS } from './kinds';
 import { faultsByColumn, isStatedByColumn, withColumn } from './mappingDraft';
 import { MappingRow } from './MappingRow';
@@ -60,7 +60,7 @@ export function MappingTable({ imported, mapping, canChange }: MappingTableProps
       </Table>
       {shown.length < columns.length && (
         <Button type="link" onClick={() => setWhole(true)}>
-          Show all {count(columns.length)} columns
+          Show all {grouped(columns.length)} columns
         </Button>
       )}
     </section>

@@ -5,7 +5,8 @@ import { detailOf } from '../../api/problem';
 import { FieldMessage } from '../../components/FieldMessage';
 import { DiscardButton } from './DiscardButton';
 import { moment } from '../../components/moments';
-import { acceptedRows, count, isApplicable, isMappable, rows } from './importWords';
+import { grouped } from '../../components/countOf';
+import { acceptedRows, isApplicable, isMappable, rows } from './importWords';
 import { KINDS } from './kinds';
 import styles from './Outcome.module.css';
 import type { useImportActs } from './useImportActs';
@@ -27,7 +28,7 @@ export function Outcome({ imported, acts, mayEdit, isStale }: OutcomeProps) {
       {mayEdit && counts && <NextAct imported={imported} acts={acts} isStale={isStale} />}
       {counts && counts.refused > 0 && (
         <Button href={refusedRowsAddress(id)} download disabled={isStale}>
-          Download the {count(counts.refused)} refused {counts.refused === 1 ? 'row' : 'rows'}
+          Download the {grouped(counts.refused)} refused {counts.refused === 1 ? 'row' : 'rows'}
         </Button>
       )}
       {mayEdit && isMappable(imported) && <DiscardButton discard={acts.discard} />}

@@ -1,6 +1,6 @@
 import type { ImportRow } from '../../api/imports';
 import { Table } from '../../components/Table';
-import { count } from './importWords';
+import { grouped } from '../../components/countOf';
 import styles from './RowsTable.module.css';
 
 /** Rows that are refused: at which column, for which value, why. */
@@ -19,7 +19,7 @@ export function RefusedTable({ rows }: { rows: readonly ImportRow[] }) {
       <tbody>
         {errors.map(({ line, column, value, why, expected }, index) => (
           <tr key={index}>
-            <td className={styles.line}>{count(line)}</td>
+            <td className={styles.line}>{grouped(line)}</td>
             <td>{column ?? '–'}</td>
             <td className={styles.value}>{value || <span className={styles.maker}>empty</span>}</td>
             <td>

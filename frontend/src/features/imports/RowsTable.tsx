@@ -1,6 +1,6 @@
 import type { ImportRow } from '../../api/imports';
 import { Table } from '../../components/Table';
-import { count } from './importWords';
+import { grouped } from '../../components/countOf';
 import type { ListView } from './listView';
 import styles from './RowsTable.module.css';
 
@@ -24,7 +24,7 @@ export function RowsTable({ view, rows }: RowsTableProps) {
       <tbody>
         {rows.map((row) => (
           <tr key={row.line}>
-            <td className={styles.line}>{count(row.line)}</td>
+            <td className={styles.line}>{grouped(row.line)}</td>
             <td>
               <strong>{row.partNumber}</strong> <span className={styles.maker}>{row.manufacturer}</span>
               {row.supplier !== null && <span className={styles.supplier}>{row.supplier}</span>}

@@ -1,7 +1,7 @@
 import { ROW_STATES } from '@roothertz/common/imports';
 import type { KeyboardEvent } from 'react';
 import type { Import, RowCounts, RowList } from '../../api/imports';
-import { count } from './importWords';
+import { grouped } from '../../components/countOf';
 import { countOf } from './useRowList';
 import styles from './VerdictTabs.module.css';
 
@@ -39,7 +39,7 @@ export function VerdictTabs({ imported, counts, list, onChoose, panelId }: Verdi
           onClick={() => onChoose(one)}
         >
           <span className={`${styles.count} ${countOf(imported, counts, one) > 0 ? (TONES[one] ?? '') : ''}`}>
-            {count(countOf(imported, counts, one))}
+            {grouped(countOf(imported, counts, one))}
           </span>{' '}
           {one}
         </button>

@@ -1,6 +1,7 @@
 import { Button, Progress } from 'antd';
 import type { ImportSummary } from '../../api/imports';
-import { count, timeLeft } from './importWords';
+import { grouped } from '../../components/countOf';
+import { timeLeft } from './importWords';
 import styles from './WorkProgress.module.css';
 
 interface WorkProgressProps {
@@ -28,7 +29,7 @@ export function WorkProgress({ imported, onCancel, isCancelling }: WorkProgressP
       <p role="status">{words}</p>
       <Progress percent={percent} showInfo={false} aria-label={words} />
       <p className={styles.figures}>
-        {[`${count(done)} of ${count(total)} rows`, ...pace(progress)].join(' · ')}
+        {[`${grouped(done)} of ${grouped(total)} rows`, ...pace(progress)].join(' · ')}
       </p>
       {onCancel && (
         <Button onClick={onCancel} loading={isCancelling}>
@@ -42,7 +43,7 @@ export function WorkProgress({ imported, onCancel, isCancelling }: WorkProgressP
 function pace(progress: ImportSummary['progress']): string[] {
   const { rowsPerSecond = null, secondsLeft = null } = progress ?? {};
   return [
-    ...(rowsPerSecond === null ? [] : [`${count(Math.round(rowsPerSecond))} rows/s`]),
+    ...(rowsPerSecond === null ? [] : [`${grouped(Math.round(rowsPerSecond))} rows/s`]),
     ...(secondsLeft === null ? [] : [timeLeft(secondsLeft)]),
   ];
 }

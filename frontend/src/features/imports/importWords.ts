@@ -1,5 +1,5 @@
-import { formatQuantity } from '@roothertz/common/units';
 import type { Import, ImportState, RowCounts } from '../../api/imports';
+import { countOf } from '../../components/countOf';
 
 const STATE_WORDS: Readonly<Record<ImportState, string>> = {
   uploaded: 'not checked yet',
@@ -49,12 +49,8 @@ export function acceptedRows(counts: RowCounts): number {
   return counts.new + counts.changed + counts.doubtful;
 }
 
-export function count(number: number): string {
-  return formatQuantity(number, 'count');
-}
-
 export function rows(number: number): string {
-  return `${count(number)} ${number === 1 ? 'row' : 'rows'}`;
+  return countOf(number, 'row');
 }
 
 /** How long the work still takes, roughly. */

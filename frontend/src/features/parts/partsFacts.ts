@@ -1,4 +1,4 @@
-import { countOf, grouped } from './countOf';
+import { countOf, grouped } from '../../components/countOf';
 import type { KindOfPart } from './kindOfPart';
 import { figuresOf } from './partDraft';
 import type { PartsList } from './usePartsList';

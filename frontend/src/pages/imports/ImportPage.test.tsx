@@ -101,7 +101,7 @@ describe('the page of an import', () => {
     keeps(importOf({ state: 'applying', progress }));
     renderApp('/imports/5');
     expect(
-      await screen.findByText('12 000 of 100 000 rows · 8000 rows/s · about 11 s left'),
+      await screen.findByText(/^12\s000 of 100\s000 rows · 8\s000 rows\/s · about 11 s left$/),
     ).toBeInTheDocument();
     await userEvent.click(screen.getByRole('button', { name: 'Cancel' }));
     expect(await screen.findByText('Cancelled: the library is as it was before.')).toBeInTheDocument();

@@ -2,7 +2,7 @@ import { useQuery } from '@tanstack/react-query';
 import { gapCountsQuery } from '../../api/parts';
 import { GapCounts } from '../../features/parts/completeness/GapCounts';
 import { GapTable } from '../../features/parts/completeness/GapTable';
-import { countOf, grouped } from '../../features/parts/countOf';
+import { countOf, grouped } from '../../components/countOf';
 import type { KindOfPart } from '../../features/parts/kindOfPart';
 import { PartsFilters } from '../../features/parts/PartsFilters';
 import { usePartsView } from '../../features/parts/usePartsView';

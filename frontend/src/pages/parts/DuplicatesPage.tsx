@@ -2,7 +2,7 @@ import { useQuery } from '@tanstack/react-query';
 import { Skeleton } from 'antd';
 import { useState } from 'react';
 import { duplicatesQuery } from '../../api/parts';
-import { countOf } from '../../features/parts/countOf';
+import { countOf } from '../../components/countOf';
 import { DuplicatesList } from '../../features/parts/duplicates/DuplicatesList';
 import type { KindOfPart } from '../../features/parts/kindOfPart';
 import { LoadFailure } from '../../components/LoadFailure';

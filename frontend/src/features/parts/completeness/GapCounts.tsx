@@ -1,7 +1,7 @@
 import { gapFields } from '@roothertz/common/parts';
 import { Button } from 'antd';
 import type { GapCounts as Counts } from '../../../api/parts';
-import { grouped } from '../countOf';
+import { grouped } from '../../../components/countOf';
 import type { KindOfPart } from '../kindOfPart';
 import styles from './Completeness.module.css';
 

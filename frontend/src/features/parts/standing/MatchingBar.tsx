@@ -3,7 +3,7 @@ import { Button } from 'antd';
 import { useState } from 'react';
 import { type PartListFilter, standingOutcomeQuery } from '../../../api/parts';
 import { FieldMessage } from '../../../components/FieldMessage';
-import { countOf } from '../countOf';
+import { countOf } from '../../../components/countOf';
 import type { KindOfPart } from '../kindOfPart';
 import { refusedWords } from './refusedWords';
 import styles from './StandingBar.module.css';

@@ -2,7 +2,7 @@ import { Button } from 'antd';
 import { useState } from 'react';
 import type { StoredPart } from '../../../api/parts';
 import { FieldMessage } from '../../../components/FieldMessage';
-import { countOf, grouped } from '../countOf';
+import { countOf, grouped } from '../../../components/countOf';
 import type { KindOfPart } from '../kindOfPart';
 import { refusedWords } from './refusedWords';
 import styles from './StandingBar.module.css';

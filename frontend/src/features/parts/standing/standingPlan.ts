@@ -1,7 +1,7 @@
 import { RETIRED, type Standing } from '@roothertz/common/parts';
 import type { StandingChange, StandingOutcome, StoredPart } from '../../../api/parts';
 import { optionLabel } from '../../../components/optionLabels';
-import { countOf, grouped } from '../countOf';
+import { countOf, grouped } from '../../../components/countOf';
 
 export type Wanted = Partial<Standing>;
 

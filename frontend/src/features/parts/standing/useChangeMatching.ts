@@ -1,7 +1,7 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import type { PartListFilter, StandingOutcome } from '../../../api/parts';
 import { useUndoNotice } from '../../../components/useUndoNotice';
-import { countOf } from '../countOf';
+import { countOf } from '../../../components/countOf';
 import type { KindOfPart } from '../kindOfPart';
 import { refusedWords } from './refusedWords';
 import { setWords, type Wanted } from './standingPlan';
