@@ -21,6 +21,9 @@ describe('the library work', () => {
     await page.getByLabel(`current noise of ${number}0`).press('Tab');
     await page.getByRole('button', { name: 'current noise 1' }).waitFor();
     await screenshot(page, 'parts-completeness');
+    await page.getByText(`current noise of ${number}0 is stated`).waitFor();
+    await page.getByRole('button', { name: 'Undo' }).click();
+    await page.getByRole('button', { name: 'current noise 2' }).waitFor();
 
     await page.getByRole('link', { name: 'Duplicates' }).click();
     const pair = page.getByRole('article', { name: new RegExp(`${number}[0O] and ${number}[0O]`) });
