@@ -1,5 +1,5 @@
-import { formatQuantity } from '@roothertz/common/units';
 import { Pagination } from 'antd';
+import { grouped } from './countOf';
 
 interface PagesProps {
   page: number;
@@ -8,8 +8,6 @@ interface PagesProps {
   onChange: (page: number) => void;
   className?: string;
 }
-
-const grouped = (count: number) => formatQuantity(count, 'count');
 
 /** Leads through a list that has more than one page, and says which of its entries are shown. */
 export function Pages({ page, pageSize, total, onChange, className }: PagesProps) {
