@@ -1,5 +1,5 @@
 import { checkConditions, type OperatingConditions } from '@roothertz/common/conditions';
-import { cellConditions, quietestMap } from '@roothertz/common/noise';
+import { cellConditions, quietestMapInPieces } from '@roothertz/common/noise';
 import type { FieldError } from '@roothertz/common/parts';
 import { Injectable } from '@nestjs/common';
 import type { Caller } from '../shared/access/caller.js';
@@ -8,6 +8,7 @@ import {
   toOperatingConditions,
   toPartFilter,
 } from '../shared/conditions/ranking-request.js';
+import { betweenOtherWork } from '../shared/work/between-other-work.js';
 import type { QuietestMapDto, QuietestMapResponseDto } from './dto/quietest-map.dto.js';
 import { LibraryIndex, revisionOf } from './library-index.service.js';
 import { partNameAt } from './part-at.js';
@@ -22,9 +23,11 @@ export class QuietestMapService {
     const filter = toPartFilter(dto.filter);
     refuseConditions([...checkAxes(dto), ...checkCells(conditions, dto)]);
     const libraries = await this.index.opAmpsReadableBy(caller, filter);
-    const map = quietestMap(
-      { conditions, filter, resistance, frequency },
-      libraries.map(({ columns }) => columns),
+    const map = await betweenOtherWork(
+      quietestMapInPieces(
+        { conditions, filter, resistance, frequency },
+        libraries.map(({ columns }) => columns),
+      ),
     );
     const parts = map.parts.map((place) => partNameAt(place, libraries));
     return { ...map, parts, libraryRevision: revisionOf(libraries) };

@@ -12,6 +12,8 @@ export interface PreparedColumns {
   inputCapacitance: Float64Array;
   /** F, of all rows */
   leastCapacitance: number;
+  /** F, of all rows */
+  greatestCapacitance: number;
   lattice: Lattice;
   classes: PartClasses;
   /** The spreads of each class's noise parameters. */
@@ -53,6 +55,7 @@ function prepare(columns: AmplifierColumns): PreparedColumns {
     gainBandwidth,
     inputCapacitance,
     leastCapacitance: inputCapacitance.reduce((a, b) => Math.min(a, b), Infinity),
+    greatestCapacitance: inputCapacitance.reduce((a, b) => Math.max(a, b), 0),
     lattice: latticeOf(gainBandwidth, inputCapacitance),
     classes,
     spreads,

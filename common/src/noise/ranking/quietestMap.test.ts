@@ -28,6 +28,22 @@ const stages: [string, OperatingConditions][] = [
   ['a non-inverting stage', base],
   ['a non-inverting stage with a coil', { ...base, source: { ...base.source, inductance: 0.1 } }],
   ['an inverting stage', { ...base, stage: { topology: 'inverting', gain: 5, gainResistance: 1000 } }],
+  [
+    'an inverting stage with a coil',
+    {
+      ...base,
+      source: { ...base.source, inductance: 0.01 },
+      stage: { topology: 'inverting', gain: 5, gainResistance: 10 },
+    },
+  ],
+  [
+    'a difference stage with a coil',
+    {
+      ...base,
+      source: { resistance: 600, inductance: 1.5, capacitance: 0 },
+      stage: { topology: 'difference', gain: 5, gainResistance: 100 },
+    },
+  ],
   ['a difference stage', { ...base, stage: { topology: 'difference', gain: 5, gainResistance: 1000 } }],
   [
     'an instrumentation stage of high impedance',

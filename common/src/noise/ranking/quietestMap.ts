@@ -6,6 +6,7 @@ import { referenceEvaluation } from '../stageFigures.js';
 import type { AmplifierColumns } from './columns.js';
 import { conditionExclusions, filterExclusions, isSought, RANKED, searchWords } from './exclusions.js';
 import { prepareGenerators } from './generators.js';
+import { leastAddedIntegrals } from './leastAddedIntegrals.js';
 import { bucketsOf, type Bucket } from './mapBuckets.js';
 import { preparedColumns } from './preparedColumns.js';
 import type { PartPlace } from './sift.js';
@@ -70,11 +71,23 @@ export function cellConditions(
  * Which part has the lowest noise density, referred to the source, for each source resistance and each
  * frequency: in each cell the leader of a ranking by `inputNoiseDensity` at `cellConditions`.
  *
- * Where a part's density never falls with its input capacitance and doesn't depend on its gain–bandwidth
- * product, the value at the least capacitance is a lower bound, and few parts are evaluated: most are passed over
- * in buckets of parts with nearly the same noise.
+ * Where no gain–bandwidth product lowers the density, the least value between the library's extreme input
+ * capacitances is a lower bound, and few parts are evaluated: most are passed over in buckets of parts with nearly
+ * the same noise.
  */
 export function quietestMap(query: MapQuery, libraries: readonly AmplifierColumns[]): QuietestMap {
+  const pieces = quietestMapInPieces(query, libraries);
+  for (;;) {
+    const { done, value } = pieces.next();
+    if (done) return value;
+  }
+}
+
+/** `quietestMap`, a cell at a time: other work can be done at each `yield`. */
+export function* quietestMapInPieces(
+  query: MapQuery,
+  libraries: readonly AmplifierColumns[],
+): Generator<void, QuietestMap> {
   const resistances = axisPoints(query.resistance);
   const frequencies = axisPoints(query.frequency);
   const candidates = findCandidates(query.filter, libraries);
@@ -86,14 +99,18 @@ export function quietestMap(query: MapQuery, libraries: readonly AmplifierColumn
     if (!parts.has(key)) parts.set(key, { index: parts.size, place });
     return parts.get(key)!.index;
   };
-  const winners = resistances.map((resistance) => {
+  const winners: number[][] = [];
+  for (const resistance of resistances) {
+    const row: number[] = [];
     let previous: PartPlace | null = null;
-    return frequencies.map((frequency) => {
+    for (const frequency of frequencies) {
       const conditions = cellConditions(query.conditions, resistance, frequency);
       previous = findWinner(conditions, libraries, buckets, previous);
-      return indexOf(previous);
-    });
-  });
+      row.push(indexOf(previous));
+      yield;
+    }
+    winners.push(row);
+  }
   return { resistances, frequencies, parts: [...parts.values()].map(({ place }) => place), winners };
 }
 
@@ -148,12 +165,12 @@ function densitiesOf(
   evaluate: Evaluate,
   columns: AmplifierColumns,
 ) {
-  const isBounded = model.spotRises && conditions.source.inductance === 0;
-  const { gainBandwidth, inputCapacitance, leastCapacitance } = preparedColumns(columns);
+  const { gainBandwidth, inputCapacitance, leastCapacitance, greatestCapacitance } = preparedColumns(columns);
   const generatorsAt = prepareGenerators(conditions, columns);
   const exact = new Float64Array(INTEGRALS);
-  const least = new Float64Array(INTEGRALS);
-  if (isBounded) evaluate(Infinity, leastCapacitance, least);
+  const least = model.spotIsQuadratic
+    ? leastAddedIntegrals(evaluate, leastCapacitance, greatestCapacitance)
+    : null;
   return {
     at(row: number): number {
       evaluate(gainBandwidth[row], inputCapacitance[row], exact);
@@ -161,7 +178,7 @@ function densitiesOf(
     },
     generatorsAt,
     leastOf(generators: Generators): number {
-      return isBounded ? (ALMOST * addedPower(least, generators)) / least[INTEGRAL.source] : 0;
+      return least ? ALMOST * addedPower(least, generators) : 0;
     },
   };
 }

@@ -63,7 +63,7 @@ export function instrumentationModel({ source, stage }: OperatingConditions): St
       ),
     growth: (inputCapacitance) => (inputCapacitance > 0 ? 2 : dividerGrowth(circuit, inputCapacitance)),
     canNotch: false,
-    spotRises: false,
+    spotIsQuadratic: false,
     resistive: source.inductance === 0 && source.capacitance === 0,
     networkResistance: Math.min(
       gainResistance > 0 ? feedbackResistance + gainResistance / 2 : Infinity,

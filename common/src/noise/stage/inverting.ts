@@ -43,7 +43,7 @@ export function invertingModel({ source, stage }: OperatingConditions): StageMod
     quality: (gainBandwidth, inputCapacitance) => quality(circuit, gainBandwidth, inputCapacitance),
     growth: (inputCapacitance) => (inputCapacitance > 0 ? 2 : 0),
     canNotch: source.inductance > 0,
-    spotRises: true,
+    spotIsQuadratic: true,
     resistive: source.inductance === 0 && source.capacitance === 0,
     networkResistance: circuit.feedbackResistance,
   };

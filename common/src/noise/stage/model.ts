@@ -47,10 +47,10 @@ export interface StageModel {
    */
   canNotch: boolean;
   /**
-   * Without inductance a spot density, referred to the source, depends on no gain–bandwidth product and never
-   * falls with the input capacitance.
+   * A spot density, referred to the source, is least with an infinite gain–bandwidth product, and then a quadratic
+   * function of the input capacitance.
    */
-  spotRises: boolean;
+  spotIsQuadratic: boolean;
   /** Nothing depends on frequency with an ideal amplifier without input capacitance. */
   resistive: boolean;
   /** Ω that the feedback network puts on the output, Infinity where there is none. */

@@ -36,7 +36,7 @@ export function nonInvertingModel({ source, stage }: OperatingConditions): Stage
       source.inductance === 0 ? 0 : quadraticQuality(...dividerPowers(input, inputCapacitance)),
     growth: (inputCapacitance) => dividerGrowth(input, inputCapacitance),
     canNotch: false,
-    spotRises: true,
+    spotIsQuadratic: true,
     resistive: source.inductance === 0 && source.capacitance === 0,
     networkResistance: gainResistance > 0 ? gainResistance * gain : Infinity,
   };

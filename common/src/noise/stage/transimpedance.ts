@@ -45,7 +45,7 @@ export function transimpedanceModel({ source, stage }: OperatingConditions): Sta
         ? 2
         : 0,
     canNotch: false,
-    spotRises: true,
+    spotIsQuadratic: true,
     resistive: source.capacitance === 0 && !isCapacitive(circuit.feedbackCapacitance),
     networkResistance: feedbackResistance,
   };
