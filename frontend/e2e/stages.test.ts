@@ -162,5 +162,7 @@ describe('resistors', () => {
     await start('/rank?stage=non-inverting&view=resistors&vr=2', { viewport: PHONE });
     await rows('Resistors').first().waitFor();
     expect(await page.evaluate(() => document.documentElement.scrollWidth)).toBe(PHONE.width);
+    const number = rows('Resistors').first().getByRole('link');
+    expect(await number.evaluate((link) => link.scrollWidth <= link.clientWidth)).toBe(true);
   });
 });

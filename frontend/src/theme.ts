@@ -118,6 +118,8 @@ function colourTokens(tokens: Tokens): ThemeConfig['token'] {
     colorBgLayout: tokens.paper,
     colorBgContainer: tokens.sheet,
     colorBgElevated: tokens.sheet,
+    controlItemBgActive: tokens.damsonWash,
+    controlItemBgActiveHover: tokens.damsonWash,
     colorBorder: tokens.rule,
     colorBorderSecondary: tokens.rule,
   };

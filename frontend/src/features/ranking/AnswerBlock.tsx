@@ -1,5 +1,5 @@
 import { Skeleton } from 'antd';
-import { plainText, type Piece } from './answer';
+import { plainText, unbroken, type Piece } from './answer';
 import styles from './Answer.module.css';
 
 /** An answer in words: the sentence on top, and what follows from it. */
@@ -35,10 +35,10 @@ function Sentences({ lead, following }: AnswerWords) {
     <>
       <h1 className={styles.lead}>
         {lead.map(({ text, strong }) =>
-          strong ? <strong key={text}>{text}</strong> : <span key={text}>{text}</span>,
+          strong ? <strong key={text}>{unbroken(text)}</strong> : <span key={text}>{unbroken(text)}</span>,
         )}
       </h1>
-      <p className={styles.following}>{following}</p>
+      <p className={styles.following}>{unbroken(following)}</p>
     </>
   );
 }

@@ -3,13 +3,13 @@ import { APPROVAL_LABELS, type Approval } from '@roothertz/common/parts';
 import type { GridRow } from './gridRows';
 import styles from './RankingGrid.module.css';
 
-/** Part number and maker, and what one should know before relying on the row: the maker makes room for that. */
+/** Part number and maker, and what tells of which part it is and how far to rely on it: the maker makes room for that. */
 export function PartCell({ name, library, maker, cautions, approval }: GridRow['part']) {
   const title = [
     [name, library, maker].filter(Boolean).join(' '),
     ...cautions.map((caution) => CAUTION_DETAILS[caution]),
   ].join('\n');
-  const isMarked = approval !== null || cautions.length > 0;
+  const isMarked = library !== null || approval !== null || cautions.length > 0;
   return (
     <span className={isMarked ? `${styles.part} ${styles.marked}` : styles.part} title={title}>
       {name && (

@@ -1,7 +1,7 @@
 import type { RankingRequest } from '@roothertz/common/conditions';
 import { describe, expect, it } from 'vitest';
 import { rankedItem, rankingOf } from '../../test/rankings';
-import { followingSentences, leadSentence, leftToGain, plainText } from './answer';
+import { followingSentences, leadSentence, leftToGain, plainText, unbroken } from './answer';
 import { emptyAdvice, leftOutText, reasonsText } from './exclusionWords';
 
 /** A 1 kΩ source at 290 K in 10 kHz makes 400 nV: 4kTR is 4.002 nV/√Hz (noise-model.md). */
@@ -121,5 +121,11 @@ describe('the parts left out', () => {
       'All 14 parts are left out. 11 of them: supply out of range. Narrow the supply range.',
     );
     expect(emptyAdvice({ total: 0, reasons: [] }, 'zz')).toContain('No part contains “zz”');
+  });
+});
+
+describe('the figures of an answer', () => {
+  it('are never parted from their units, nor a count within', () => {
+    expect(unbroken('5.6\u2009kΩ of 45\u2009639')).toBe('5.6\u202fkΩ of 45\u202f639');
   });
 });

@@ -95,6 +95,11 @@ function countText(met: number, more: boolean): string {
   return met === 1 ? '1 part meets' : `${met} parts meet`;
 }
 
+/** A text whose figures stay on one line with their units. */
+export function unbroken(text: string): string {
+  return text.replaceAll('\u2009', '\u202f');
+}
+
 export function plainText(pieces: readonly Piece[]): string {
   return pieces.map(({ text }) => text).join('');
 }

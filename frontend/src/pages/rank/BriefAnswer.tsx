@@ -1,3 +1,4 @@
+import { unbroken } from '../../features/ranking/answer';
 import type { AnswerWords } from '../../features/ranking/AnswerBlock';
 import styles from './RankPage.module.css';
 
@@ -7,7 +8,7 @@ export function BriefAnswer({ words }: { words: AnswerWords | undefined }) {
   if (!figure) return null;
   return (
     <a href="#answer" className={styles.brief}>
-      {figure.text}
+      {unbroken(figure.text)}
     </a>
   );
 }

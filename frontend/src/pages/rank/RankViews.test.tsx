@@ -295,6 +295,22 @@ describe('levers', () => {
     await userEvent.click(within(levers).getByRole('button', { name: /^Take VR-1108/ }));
     expect(await screen.findByRole('region', { name: 'Levers for VR-1108' })).toBeInTheDocument();
   });
+
+  it('name the library of a quieter part that has the number of the selected one', async () => {
+    open('/rank?stage=non-inverting&part=2', {
+      'POST /api/rankings/op-amps': (body) => {
+        const { answer: ranking } = exampleRanking(body as RankingRequest);
+        const [leader, second] = ranking.items;
+        const twin = { ...leader, part: { ...leader.part, partNumber: 'LQ-12', library: 'team' as const } };
+        return json({
+          ...ranking,
+          items: [twin, { ...second, part: { ...second.part, library: 'curated' } }],
+        });
+      },
+    });
+    const levers = await screen.findByRole('region', { name: 'Levers for LQ-12' });
+    expect(within(levers).getByRole('button', { name: /^Take LQ-12 \(own\)/ })).toBeInTheDocument();
+  });
 });
 
 describe('the quietest map', () => {

@@ -5,11 +5,13 @@ import type { WholeStage } from '../../api/stages';
 import type { View } from '../../features/conditions/search/searchKeys';
 import { nextQuieter } from '../../features/ranking/levers/leverRows';
 import type { PlottedPart } from '../../features/ranking/comparedPart';
+import { numberOf, sharedNumbers } from '../../features/ranking/libraryWords';
 import { opAmpPricePlot } from '../../features/ranking/price/opAmpPricePlot';
 import type { PricePlot } from '../../features/ranking/price/pricePlot';
 import { stageKey } from '../../features/ranking/stages/stageKey';
 import { stagePricePlot } from '../../features/ranking/stages/stagePricePlot';
 import { useSelectedStage } from '../../features/ranking/stages/useSelectedStage';
+import type { ShownRanking } from '../../features/ranking/useRanking';
 import { useSelectedPart, type SelectedPart } from '../../features/ranking/useSelectedPart';
 import type { Address, Ranked } from './useRanked';
 
@@ -44,13 +46,12 @@ export function useLookedAt(
     if (view !== 'stages') {
       const { ranking } = opAmps;
       if (!ranking || !selectedPart) return null;
-      const quieter = nextQuieter(selectedPart.part.id, ranking.items);
       return {
         selected: selectedPart,
         request: ranking.request,
         prices: opAmpPricePlot(ranking),
         chosen: selectedPart.part.id,
-        quieter,
+        quieter: quieterThan(selectedPart.part.id, ranking.items),
         pulled: [],
         changed: (next) => next,
       };
@@ -67,6 +68,13 @@ export function useLookedAt(
       changed: (next) => withLever(request, looked.request, next),
     };
   }, [view, opAmps, stages, selectedPart, selectedStage, request]);
+}
+
+/** The next-quieter op-amp, by the name that tells it from one of the other library. */
+function quieterThan(partId: string, ranked: ShownRanking['items']): PlottedPart | undefined {
+  const quieter = nextQuieter(partId, ranked);
+  const shared = sharedNumbers(ranked.map(({ part }) => part));
+  return quieter && { ...quieter, partNumber: numberOf(quieter, shared) };
 }
 
 /** Of a lever's stage, what is asked and not found: the rest is the search's to find again. */

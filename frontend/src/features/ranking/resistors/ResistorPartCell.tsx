@@ -3,25 +3,27 @@ import { Link } from 'react-router-dom';
 import styles from '../RankingGrid.module.css';
 import type { ResistorRow } from './resistorRows';
 
-/** Part number and maker, then what one should know before relying on the row. */
+/** Part number, what one should know before relying on the row, and the maker where there is room. */
 export function ResistorPartCell({ id, name, library, maker, cautions }: ResistorRow['part']) {
   const title = [
     [name, library, maker].filter(Boolean).join(' '),
     ...cautions.map((caution) => RESISTOR_CAUTION_DETAILS[caution]),
   ].join('\n');
   return (
-    <span className={styles.part} title={title}>
-      <Link className={styles.number} to={`/parts/resistors/${id}`}>
-        {name}
-      </Link>
-      {library && <span className={styles.library}>{library}</span>}
+    <span className={`${styles.part} ${styles.marked}`} title={title}>
+      <span className={styles.lead}>
+        <Link className={`${styles.number} ${styles.link}`} to={`/parts/resistors/${id}`}>
+          {name}
+        </Link>
+        {library && <span className={styles.library}>{library}</span>}
+        {cautions.length > 0 && (
+          <span className={styles.caution}>
+            △ {RESISTOR_CAUTION_LABELS[cautions[0]]}
+            {cautions.length > 1 && ` +${cautions.length - 1}`}
+          </span>
+        )}
+      </span>
       <span className={styles.maker}>{maker}</span>
-      {cautions.length > 0 && (
-        <span className={styles.caution}>
-          △ {RESISTOR_CAUTION_LABELS[cautions[0]]}
-          {cautions.length > 1 && ` +${cautions.length - 1}`}
-        </span>
-      )}
     </span>
   );
 }
