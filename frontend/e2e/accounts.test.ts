@@ -70,7 +70,8 @@ describe('an account of one’s own', () => {
     await phone.page.getByRole('button', { name: 'Change: Name' }).click();
     await phone.page.getByLabel('Your name').fill('Nell the Second');
     await phone.page.keyboard.press('Enter');
-    await phone.page.getByRole('dialog', { name: 'Your session is over' }).waitFor();
+    const again = phone.page.getByRole('dialog', { name: 'Your session is over' });
+    await again.locator('input[type=password]:focus').waitFor();
     await screenshot(phone.page, 'session-over-narrow');
     expect([...problems, ...phone.problems]).toEqual([]);
     await phone.close();

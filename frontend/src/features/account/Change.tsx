@@ -1,5 +1,6 @@
 import { Button } from 'antd';
 import { type ReactNode, useState } from 'react';
+import { useFocusAfterChange } from '../../components/lostFocus';
 import styles from './Account.module.css';
 
 interface ChangeProps {
@@ -15,6 +16,7 @@ interface ChangeProps {
 export function Change({ term, value, verb, children }: ChangeProps) {
   const [isOpen, setOpen] = useState(false);
   const [outcome, setOutcome] = useState('');
+  const button = useFocusAfterChange<HTMLButtonElement>(outcome);
   const close = (words: string) => {
     setOpen(false);
     setOutcome(words);
@@ -28,6 +30,7 @@ export function Change({ term, value, verb, children }: ChangeProps) {
       <span className={styles.term}>{term}</span>
       <span className={styles.what}>{value}</span>
       <Button
+        ref={button}
         size="small"
         onClick={toggle}
         aria-expanded={isOpen}

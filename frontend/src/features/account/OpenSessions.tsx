@@ -3,6 +3,7 @@ import { Button, Skeleton } from 'antd';
 import { endOtherSessions, endSession, type OpenSession, openSessionsQuery } from '../../api/account';
 import { detailOf } from '../../api/problem';
 import { FieldMessage } from '../../components/FieldMessage';
+import { useFocusAfterLoss } from '../../components/lostFocus';
 import { moment } from '../../components/moments';
 import styles from './Account.module.css';
 import { deviceWords } from './deviceWords';
@@ -11,11 +12,12 @@ import { deviceWords } from './deviceWords';
 export function OpenSessions() {
   const { data, error } = useQuery(openSessionsQuery);
   const end = useEnding();
+  const list = useFocusAfterLoss<HTMLUListElement>(data?.items.length ?? 0);
   if (error) return <FieldMessage>{detailOf(error)}</FieldMessage>;
   if (!data) return <Skeleton title={false} paragraph={{ rows: 2 }} />;
   return (
     <>
-      <ul className={styles.rows} aria-label="Open sessions">
+      <ul ref={list} tabIndex={-1} className={styles.rows} aria-label="Open sessions">
         {data.items.map((session) => (
           <SessionRow key={session.id} session={session} onEnd={() => end.mutate(session.id)} />
         ))}

@@ -84,7 +84,7 @@ function PasswordFact() {
             void queryClient.invalidateQueries({ queryKey: openSessionsQuery.queryKey });
           }}
         >
-          <PasswordItem name="currentPassword" label="Current password" />
+          <PasswordItem name="currentPassword" label="Current password" autoFocus />
           <Form.Item name="newPassword" label="New password" rules={NEW_PASSWORD} extra={PASSWORD_HINT}>
             <Input.Password autoComplete="new-password" />
           </Form.Item>

@@ -1,8 +1,9 @@
 import type { Money } from '../../api/billing';
 
-/** An amount with its currency, such as "€152.00". */
+/** An amount with its currency, such as "€152.00" or "−€57.00". */
 export function moneyText({ amount, currency }: Money): string {
-  return new Intl.NumberFormat('en-GB', { style: 'currency', currency }).format(Number(amount));
+  const text = new Intl.NumberFormat('en-GB', { style: 'currency', currency }).format(Number(amount));
+  return text.replace('-', '−');
 }
 
 /** What so many seats cost a month. */

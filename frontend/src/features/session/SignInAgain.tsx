@@ -1,6 +1,6 @@
 import type { QueryClient } from '@tanstack/react-query';
-import { Modal } from 'antd';
-import { useEffect, useState } from 'react';
+import { type InputRef, Modal } from 'antd';
+import { useEffect, useRef, useState } from 'react';
 import { resumeSession, type Session, switchTeam } from '../../api/session';
 import { useMember } from '../../components/useMember';
 import { SignInForm } from './SignInForm';
@@ -9,15 +9,24 @@ import { SignInForm } from './SignInForm';
 export function SignInAgain() {
   const { user, team } = useMember();
   useFocusAfterwards();
+  const password = useRef<InputRef>(null);
   const take = async (queryClient: QueryClient, session: Session) => {
     const isSame = session.user.id === user.id && session.teams.some(({ id }) => id === team.id);
     if (!isSame) return window.location.reload();
     resumeSession(queryClient, session.team.id === team.id ? session : await switchTeam(team.id));
   };
   return (
-    <Modal open title="Your session is over" footer={null} closable={false} keyboard={false} width={380}>
+    <Modal
+      open
+      title="Your session is over"
+      footer={null}
+      closable={false}
+      keyboard={false}
+      width={380}
+      afterOpenChange={(isOpen) => isOpen && password.current?.focus()}
+    >
       <p style={{ marginBottom: 16 }}>Sign in again to go on: what you were writing is still there.</p>
-      <SignInForm take={take} email={user.email} />
+      <SignInForm take={take} email={user.email} passwordRef={password} />
     </Modal>
   );
 }

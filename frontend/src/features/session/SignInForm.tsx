@@ -1,5 +1,6 @@
 import type { QueryClient } from '@tanstack/react-query';
-import { Alert, Button, Form, Input } from 'antd';
+import { Alert, Button, Form, Input, type InputRef } from 'antd';
+import type { Ref } from 'react';
 import { Link } from 'react-router-dom';
 import type { Credentials, Session } from '../../api/session';
 import { signInMessage } from './signInMessage';
@@ -10,9 +11,11 @@ interface SignInFormProps {
   take?: (queryClient: QueryClient, session: Session) => void | Promise<void>;
   /** Who is expected, where that is known. */
   email?: string;
+  /** Where the password is written. */
+  passwordRef?: Ref<InputRef>;
 }
 
-export function SignInForm({ take, email }: SignInFormProps) {
+export function SignInForm({ take, email, passwordRef }: SignInFormProps) {
   const { signIn, isPending, error, wait } = useSignIn(take);
   const message = signInMessage(error, wait);
   return (
@@ -46,7 +49,7 @@ export function SignInForm({ take, email }: SignInFormProps) {
           </Link>
         }
       >
-        <Input.Password autoComplete="current-password" autoFocus={email !== undefined} />
+        <Input.Password ref={passwordRef} autoComplete="current-password" />
       </Form.Item>
       <Button type="primary" htmlType="submit" block disabled={wait > 0} loading={isPending}>
         Sign in

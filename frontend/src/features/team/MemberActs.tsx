@@ -5,22 +5,27 @@ import { AskFirst } from '../../components/AskFirst';
 import { FieldMessage } from '../../components/FieldMessage';
 import { useHandOver, useRemoveMember } from './useTeamActs';
 
-/** What an admin can do with another member. */
+/** What an admin can do with a member. */
 export function MemberActs({ member, isSelf }: { member: TeamMember; isSelf: boolean }) {
   const { id, name, roles, isOwner } = member;
   const [handOver, remove] = [useHandOver(), useRemoveMember()];
   const error = handOver.error ?? remove.error;
+  const verb = isSelf ? 'Take over' : 'Hand over';
   return (
     <>
       {roles.includes('admin') && !isOwner && (
         <AskFirst
-          question={`Hand the team’s plan over to ${name}?`}
-          outcome="They hold the plan from then on; the holder of the plan can’t leave or be removed."
-          verb="Hand over"
+          question={isSelf ? 'Take the team’s plan over?' : `Hand the team’s plan over to ${name}?`}
+          outcome={`${isSelf ? 'You' : 'They'} hold the plan from then on; the holder of the plan can’t leave or be removed.`}
+          verb={verb}
           onAgree={() => handOver.mutate(id)}
         >
-          <Button size="small" aria-label={`Hand over to ${name}`} loading={handOver.isPending}>
-            Hand over
+          <Button
+            size="small"
+            aria-label={isSelf ? 'Take over the plan' : `Hand over to ${name}`}
+            loading={handOver.isPending}
+          >
+            {verb}
           </Button>
         </AskFirst>
       )}

@@ -17,6 +17,7 @@ describe('the account page', () => {
     const asked = fakeServer({ ...SIGNED_IN, 'POST /api/account/password': () => answer() });
     renderApp('/account');
     await userEvent.click(await screen.findByRole('button', { name: 'Change: Password' }));
+    expect(screen.getByLabelText('Current password')).toHaveFocus();
     await userEvent.type(screen.getByLabelText('Current password'), 'a guess');
     await userEvent.type(screen.getByLabelText('New password'), 'too short{Enter}');
     expect(await screen.findByText('At least 12 characters are needed.')).toBeInTheDocument();
@@ -25,6 +26,7 @@ describe('the account page', () => {
     answer = nothing;
     await userEvent.click(screen.getByRole('button', { name: 'Change the password' }));
     expect(await screen.findByText(/your other sessions are over/)).toBeInTheDocument();
+    expect(screen.getByRole('button', { name: 'Change: Password' })).toHaveFocus();
     const [sent, then] = asked.slice(-2);
     expect(sent.body).toEqual({ currentPassword: 'a guess', newPassword: 'too short no more' });
     expect(then.route).toBe('GET /api/auth/sessions');
@@ -46,6 +48,7 @@ describe('the account page', () => {
     await userEvent.click(list.getByRole('button', { name: /End the session of curl/ }));
     await expect.poll(() => list.queryByText(/curl/)).toBeNull();
     expect(screen.queryByRole('button', { name: 'End all others' })).toBeNull();
+    expect(screen.getByRole('list', { name: 'Open sessions' })).toHaveFocus();
   });
 
   it('says what closing the account means, and doesn’t offer it to the last admin', async () => {

@@ -33,6 +33,14 @@ function billing(changes: Partial<Billing> = {}): Billing {
           url: 'https://pay.example/in_1',
           ...EUR('152.00'),
         },
+        {
+          id: 'in_2',
+          number: 'R-0002',
+          createdAt: '2026-11-21T10:00:00.000Z',
+          status: 'paid',
+          url: null,
+          ...EUR('-57.00'),
+        },
       ],
     },
     ...changes,
@@ -74,6 +82,7 @@ describe('the plan page', () => {
     const facts = screen.getByLabelText('Plan');
     for (const text of ['5 of 8 taken', '€19.00 a seat and month', '€152.00 on 21 Dec 2026'])
       expect(within(facts).getByText(text)).toBeInTheDocument();
+    expect(screen.getByRole('cell', { name: '−€57.00' })).toBeInTheDocument();
     expect(screen.getByRole('link', { name: 'R-0001' })).toHaveAttribute('href', 'https://pay.example/in_1');
   });
 
@@ -90,7 +99,7 @@ describe('the plan page', () => {
       await screen.findByText(/€12.67 now.*€171.00 a month from the next invoice on/),
     ).toBeInTheDocument();
     await userEvent.click(screen.getByRole('button', { name: 'Change to 9 seats' }));
-    expect(await screen.findByRole('heading', { name: 'Team plan, 9 seats' })).toBeInTheDocument();
+    expect(await screen.findByRole('heading', { name: 'Team plan, 9 seats' })).toHaveFocus();
     expect(asked.find(({ route }) => route.startsWith('PUT'))?.body).toEqual({
       seats: 9,
       prorationDate: 1_796_000_000,
@@ -137,6 +146,21 @@ describe('the plan page', () => {
     await userEvent.click(screen.getByRole('button', { name: 'Go to payment' }));
     await waitFor(() => expect(leaveFor).toHaveBeenCalledWith('https://pay.example/cs_1'));
     expect(asked.at(-1)?.body).toEqual({ seats: 4 });
+  });
+
+  it('can lead to the payment again after the browser’s way back', async () => {
+    const asked = open(FREE, {
+      'POST /api/billing/checkout': () => json({ url: 'https://pay.example/cs_1' }, 201),
+    });
+    const button = await screen.findByRole('button', { name: 'Go to payment' });
+    watchLeaving();
+    await userEvent.click(button);
+    await waitFor(() => expect(button).toHaveClass('ant-btn-loading'));
+    window.dispatchEvent(new PageTransitionEvent('pageshow', { persisted: true }));
+    await waitFor(() => expect(button).not.toHaveClass('ant-btn-loading'));
+    await userEvent.click(button);
+    await waitFor(() => expect(leaveFor).toHaveBeenCalledTimes(2));
+    expect(asked.filter(({ route }) => route === 'POST /api/billing/checkout')).toHaveLength(2);
   });
 
   it('asks what has become of the payment when the payer comes back', async () => {

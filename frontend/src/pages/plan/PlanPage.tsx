@@ -4,6 +4,7 @@ import type { ReactNode } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import { billingQuery, syncedBillingQuery } from '../../api/billing';
 import { LoadFailure } from '../../components/LoadFailure';
+import { useFocusAfterChange } from '../../components/lostFocus';
 import { useMayDo, useMember } from '../../components/useMember';
 import { BillingActs } from '../../features/billing/BillingActs';
 import { BillingFacts } from '../../features/billing/BillingFacts';
@@ -41,7 +42,7 @@ function AdminPlan() {
       </Page>
     );
   return (
-    <Page title={planHeadline(billing)} meaning={planMeaning(billing)}>
+    <Page key="known" title={planHeadline(billing)} meaning={planMeaning(billing)}>
       <BillingFacts billing={billing} />
       {billing.payment === null && (
         <p role="alert">
@@ -68,12 +69,15 @@ function useBilling() {
 }
 
 function Page({ title, meaning, children }: { title: string; meaning?: string; children: ReactNode }) {
+  const heading = useFocusAfterChange<HTMLHeadingElement>(title);
   return (
     <div className={styles.page}>
       <title>Plan · Roothertz</title>
       <TeamTabs />
       <div className={styles.lead}>
-        <h1>{title}</h1>
+        <h1 ref={heading} tabIndex={-1}>
+          {title}
+        </h1>
         {meaning && <p>{meaning}</p>}
       </div>
       {children}

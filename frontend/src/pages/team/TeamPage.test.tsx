@@ -91,6 +91,23 @@ describe('the team’s page', () => {
     expect(within(refusal).getByRole('link')).toHaveAttribute('href', '/team/plan?add');
   });
 
+  it('offers an admin to take the plan over from who holds it', async () => {
+    const [own, other] = MEMBERS;
+    const items = [
+      { ...own, isOwner: false },
+      { ...other, isOwner: true },
+    ];
+    const told = asAdmin({
+      'GET /api/team/members': () => json({ items, total: 2 }),
+      'POST /api/team/owner': () => new Response(null, { status: 204 }),
+    });
+    await userEvent.click(await screen.findByRole('button', { name: 'Take over the plan' }));
+    expect(await screen.findByText(/^You hold the plan from then on/)).toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: 'Take over' }));
+    await waitFor(() => expect(told('POST /api/team/owner')).toHaveLength(1));
+    expect(told('POST /api/team/owner')[0].body).toEqual({ memberId: '7' });
+  });
+
   it('shows other members who is in the team, and nothing to change', async () => {
     fakeServer({ 'GET /api/auth/me': () => json(sessionOf('engineer')), ...LISTS });
     renderApp('/team');
