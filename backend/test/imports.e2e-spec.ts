@@ -259,6 +259,9 @@ describe('imports', () => {
     expect(first).toMatch(/^Kestner;KM-31;n\.a\.;;0,4;8\.\.12;SOIC-8;;7;/);
     expect(second).toContain('stands on line 4 too');
     const mended = list.replace('n.a.;', '3,3;').replace('8..12', '12');
+    expect((await uploadList(librarian, 'op-amps', mended)).rememberedMapping).toEqual(
+      proposedMapping(checked),
+    );
     expect((await checkedList(librarian, 'op-amps', mended)).counts).toMatchObject({ new: 2, refused: 0 });
   });
 

@@ -7,12 +7,11 @@ import { parseSort } from '../shared/list/sort.js';
 import { type ImportRowListDto, type ListImportRowsDto, toImportRow } from './dto/import-rows.dto.js';
 import type { Import } from './entities/import.entity.js';
 import { ImportPortion } from './entities/import-portion.entity.js';
+import { REASONS } from './file/import-columns.js';
 import { csvLine, encoderOf, inEncoding, type WrittenList } from '../shared/csv/csv-lines.js';
 import { findImport } from './import-select.js';
 import { type CountedPortion, pageOf } from './row-page.js';
 import { standsIn, type StoredRow } from './stored-row.js';
-
-const REASONS = ['line of the file', 'why refused', 'what was needed'];
 
 /** The rows of an import with their verdicts. */
 @Injectable()

@@ -146,7 +146,7 @@ export class ImportsService {
   }
 
   private async answer(caller: Caller, entity: Import): Promise<ImportResponseDto> {
-    const { id, kind, sha256, headerKey, mapping } = entity;
+    const { id, kind, sha256, headerKey, mapping, columns } = entity;
     const imports = this.dataSource.getRepository(Import);
     const before = { teamId: caller.teamId, kind, id: LessThan(id) };
     const order = { id: 'DESC' as const };
@@ -156,7 +156,7 @@ export class ImportsService {
         ? await imports.findOne({ where: { ...before, headerKey, mapping: Not(IsNull()) }, order })
         : null;
     return toImportResponse(entity, {
-      rememberedMapping: remembered?.mapping ?? null,
+      rememberedMapping: remembered?.mapping?.filter(({ column }) => column < columns.length) ?? null,
       sameFile: same && toSameFile(same),
     });
   }

@@ -28,6 +28,8 @@ export interface ImportColumn {
 }
 
 export const MOST_COLUMNS = 1000;
+/** What stands behind the columns of a list where its refused rows are given back. */
+export const REASONS: readonly string[] = ['line of the file', 'why refused', 'what was needed'];
 const SAMPLES = 5;
 const LONGEST_TEXT = 200;
 const LEAST_CONFIDENCE = 0.7;
@@ -51,10 +53,15 @@ export function importColumns(list: ListColumns, { header, sample }: DetectedDia
   }));
 }
 
-/** The same for lists of the same headings, however their case and punctuation. */
+/** The same for lists of the same headings, however their case and punctuation, and for the refused rows of them. */
 export function headerKey(headings: readonly string[]): string {
-  const words = headings.map((heading) => normaliseWord(heading) || heading.trim());
+  const words = withoutReasons(headings).map((heading) => normaliseWord(heading) || heading.trim());
   return createHash('sha256').update(JSON.stringify(words)).digest('hex');
+}
+
+function withoutReasons(headings: readonly string[]): readonly string[] {
+  const isRefused = REASONS.every((reason, index) => headings.at(index - REASONS.length) === reason);
+  return isRefused ? headings.slice(0, -REASONS.length) : headings;
 }
 
 function shown(text: string): string {
