@@ -3,6 +3,7 @@ import type { QuantityField } from '@roothertz/common/parts';
 import type { ReactNode } from 'react';
 import type { Dialect, DialectChoice, Import } from '../../api/imports';
 import { QuantityInput } from '../../components/QuantityInput';
+import { KINDS } from './kinds';
 import styles from './Detected.module.css';
 import { moment } from '../../components/moments';
 import { grouped } from '../../components/countOf';
@@ -37,12 +38,13 @@ const DECIMAL_MARKS: Record<Dialect['decimalMark'], string> = { point: 'point', 
 
 /** The file, and how it was found to be written; each fact can be overruled. */
 export function Detected({ imported, canChange, onOverrule }: DetectedProps) {
-  const { fileName, dialect, rowCount, createdAt, createdBy } = imported;
+  const { fileName, kind, dialect, rowCount, createdAt, createdBy } = imported;
   const choice = { canChange, dialect, onOverrule };
   return (
     <header className={styles.detected}>
       <h1 className={styles.name}>{fileName}</h1>
       <dl className={styles.facts}>
+        <Fact term="Holds">{KINDS[kind].title.toLowerCase()}</Fact>
         <Fact term="Encoding">
           <Choice name="encoding" label="Encoding" words={ENCODINGS} {...choice} />
         </Fact>

@@ -54,7 +54,7 @@ describe('the facts of the list', () => {
   const list = { isPending: false, error: null, retry: () => undefined };
 
   it('count the libraries and the gaps', () => {
-    const shown = { ...list, parts: [curated, unknown], total: 2, isComplete: true };
+    const shown = { ...list, parts: [curated, unknown], total: 2, matching: 2, isComplete: true };
     expect(partsFacts(OP_AMPS, shown, false)).toBe(
       '2 parts: 1 curated, 1 of your own; 1 without current noise',
     );
@@ -62,21 +62,25 @@ describe('the facts of the list', () => {
 
   it('name the gap that matters for the kind of part', () => {
     const silent = resistor({ resistor: { ...resistor().resistor, noiseIndex: null } });
-    const shown = { ...list, parts: [silent], total: 1, isComplete: true };
+    const shown = { ...list, parts: [silent], total: 1, matching: 1, isComplete: true };
     expect(partsFacts(RESISTORS, shown, false)).toBe(
       '1 part: 0 curated, 1 of your own; 1 without noise index',
     );
   });
 
   it('say that the list goes on', () => {
-    const shown = { ...list, parts: [curated], total: 100_243, isComplete: false };
+    const shown = { ...list, parts: [curated], total: 100_243, matching: 100_243, isComplete: false };
     expect(partsFacts(OP_AMPS, shown, false)).toBe(
       '100\u2009243 parts, of which the first 1 are shown: search or narrow for the others',
     );
   });
 
   it('say how many were found', () => {
-    const shown = { ...list, parts: [curated], total: 283, isComplete: true };
+    const shown = { ...list, parts: [curated], total: 283, matching: 1, isComplete: true };
     expect(partsFacts(OP_AMPS, shown, true)).toBe('1 part found among 283 parts');
+    const first = { ...shown, total: 2311, matching: 1148, isComplete: false };
+    expect(partsFacts(OP_AMPS, first, true)).toBe(
+      '1\u2009148 parts found among 2\u2009311 parts, of which the first 1 are shown',
+    );
   });
 });

@@ -1,5 +1,6 @@
 import { MOST_OFFERS_SAVED } from '@roothertz/common/prices';
 import { Button } from 'antd';
+import { grouped } from '../../components/countOf';
 import { isConfirmable } from './confirmable';
 import type { ShownRow } from './draft/shownRows';
 
@@ -24,7 +25,7 @@ export function ConfirmButton({ rows, selected, areAllLoaded, isPending, onConfi
       title={isTooMany ? `At most ${MOST_OFFERS_SAVED} at once: narrow the list first` : undefined}
       onClick={() => onConfirm(meant)}
     >
-      Confirm the {meant.length} {which} as still valid
+      Confirm the {grouped(meant.length)} {which} as still valid
     </Button>
   );
 }

@@ -45,7 +45,9 @@ export function DraftProblems({ draft, problems, onShow }: DraftProblemsProps) {
       {unknownSuppliers(problems).map((name) => (
         <AddSupplier key={name} name={name} />
       ))}
-      {problem.row.overrun && <OverrunView draft={draft} row={problem.row} />}
+      {problem.row.overrun && (
+        <OverrunView draft={draft} row={problem.row} onSettled={() => onShow(problem)} />
+      )}
     </>
   );
 }

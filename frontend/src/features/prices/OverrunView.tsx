@@ -8,12 +8,18 @@ import type { PriceDraft } from './usePriceDraft';
 interface OverrunViewProps {
   draft: PriceDraft;
   row: ShownRow;
+  /** The choice is made and the view is about to go: the focus needs another place. */
+  onSettled: () => void;
 }
 
 /** What somebody else has made of an offer beside what I was about to, and which of them is to stand. */
-export function OverrunView({ draft, row }: OverrunViewProps) {
+export function OverrunView({ draft, row, onSettled }: OverrunViewProps) {
   if (!row.change) return null;
   const isClosed = row.overrun === 'closed';
+  const settle = (choose: () => void) => () => {
+    choose();
+    onSettled();
+  };
   return (
     <div className={styles.overrun}>
       <table className={styles.table} aria-label={`Theirs and yours for ${row.part.partNumber}`}>
@@ -31,10 +37,10 @@ export function OverrunView({ draft, row }: OverrunViewProps) {
           ))}
         </tbody>
       </table>
-      <Button size="small" onClick={() => draft.keepMine(row)}>
+      <Button size="small" onClick={settle(() => draft.keepMine(row))}>
         {isClosed ? 'Open it again with mine' : 'Keep mine'}
       </Button>
-      <Button size="small" onClick={() => draft.dropRow(row.key)}>
+      <Button size="small" onClick={settle(() => draft.dropRow(row.key))}>
         {isClosed ? 'Leave it closed' : 'Take theirs'}
       </Button>
     </div>

@@ -1,10 +1,9 @@
 import { useQuery } from '@tanstack/react-query';
 import { priceCountsQuery, priceSettingsQuery } from '../../api/prices';
 import type { ChangeFields } from '../../components/useAddressFields';
+import { countOf, grouped } from '../../components/countOf';
 import styles from './PricesFacts.module.css';
 import { PRICE_STATES, type PricesView } from './pricesView';
-
-const plain = new Intl.NumberFormat('en-GB');
 
 interface PricesFactsProps {
   view: PricesView;
@@ -25,7 +24,7 @@ export function PricesFacts({ view, change }: PricesFactsProps) {
   const words = { stale: 'stale', expiring: 'expiring', expired: 'expired', missing: 'without a price' };
   return (
     <div className={styles.facts} role="group" aria-label="What calls for a look">
-      <span>{plain.format(counts.offers)} offers</span>
+      <span>{countOf(counts.offers, 'offer')}</span>
       {PRICE_STATES.map((state) => {
         const isOn = view.state?.includes(state) ?? false;
         const library = !isOn && state === 'missing' ? 'team' : undefined;
@@ -36,7 +35,7 @@ export function PricesFacts({ view, change }: PricesFactsProps) {
             help={help[state]}
             onClick={() => change({ state: isOn ? undefined : state, library })}
           >
-            {plain.format(counts[state])} {words[state]}
+            {grouped(counts[state])} {words[state]}
           </Fact>
         );
       })}
@@ -45,7 +44,7 @@ export function PricesFacts({ view, change }: PricesFactsProps) {
         help="parts that are chosen in saved conditions"
         onClick={() => change({ usedInConditions: view.usedInConditions ? undefined : 'true' })}
       >
-        {plain.format(counts.usedInConditions)} used in saved conditions
+        {grouped(counts.usedInConditions)} used in saved conditions
       </Fact>
     </div>
   );

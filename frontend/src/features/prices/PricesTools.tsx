@@ -1,6 +1,7 @@
 import { OFFER_FIELDS } from '@roothertz/common/prices';
 import { Button, Input } from 'antd';
 import { useState } from 'react';
+import { grouped } from '../../components/countOf';
 import { ConfirmButton } from './ConfirmButton';
 import { readCount } from './draft/readCell';
 import type { ShownRow } from './draft/shownRows';
@@ -65,16 +66,14 @@ function EditTools({ row, onNewOffer, onCloseOffer, onColumn }: PricesToolsProps
   );
 }
 
-const plain = new Intl.NumberFormat('en-GB');
-
 /** How much of a long list is loaded. */
 function Loaded({ list: { items, total, isLoadingMore } }: { list: PriceList }) {
   if (items.length >= total) return null;
   return (
     <span className={styles.loaded}>
       {isLoadingMore
-        ? `Loading more of ${plain.format(total)} rows …`
-        : `${plain.format(items.length)} of ${plain.format(total)} rows, more as you scroll`}
+        ? `Loading more of ${grouped(total)} rows …`
+        : `${grouped(items.length)} of ${grouped(total)} rows, more as you scroll`}
     </span>
   );
 }

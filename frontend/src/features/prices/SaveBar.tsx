@@ -1,5 +1,6 @@
 import { Button } from 'antd';
 import { MOST_OFFERS_SAVED } from '@roothertz/common/prices';
+import { countOf } from '../../components/countOf';
 import { DraftProblems } from './DraftProblems';
 import type { CellProblem } from './draftProblems';
 import styles from './SaveBar.module.css';
@@ -27,9 +28,9 @@ export function SaveBar({ draft, problems, isPasting, isSaving, onSave, onShow }
         ) : problems.length > 0 ? (
           <DraftProblems draft={draft} problems={problems} onShow={onShow} />
         ) : isTooMany ? (
-          `${changed.length} offers are changed: at most ${MOST_OFFERS_SAVED} can be saved at once.`
+          `${countOf(changed.length, 'offer')} are changed: at most ${MOST_OFFERS_SAVED} can be saved at once.`
         ) : cells > 0 ? (
-          `${plural(cells, 'change')} in ${plural(changed.length, 'offer')}, not saved yet.`
+          `${countOf(cells, 'change')} in ${countOf(changed.length, 'offer')}, not saved yet.`
         ) : (
           <Hint />
         )}
@@ -49,7 +50,7 @@ export function SaveBar({ draft, problems, isPasting, isSaving, onSave, onShow }
         loading={isSaving}
         onClick={onSave}
       >
-        {cells === 0 ? 'Save' : `Save ${plural(cells, 'change')}`}
+        {cells === 0 ? 'Save' : `Save ${countOf(cells, 'change')}`}
       </Button>
     </div>
   );
@@ -62,8 +63,4 @@ function Hint() {
       Ctrl+Z, save with Ctrl+S.
     </span>
   );
-}
-
-function plural(count: number, noun: string): string {
-  return `${count} ${noun}${count === 1 ? '' : 's'}`;
 }

@@ -45,6 +45,7 @@ describe('the page of an import', () => {
     keeps(importOf());
     renderApp('/imports/5');
     expect(await screen.findByRole('heading', { name: 'op-amp-liste.csv' })).toBeInTheDocument();
+    expect(screen.getByText('Holds').nextElementSibling).toHaveTextContent('op-amps');
     expect(screen.getByLabelText('header line')).toHaveValue('3');
     expect(screen.getByRole('tab', { name: '1 changed' })).toHaveAttribute('aria-selected', 'true');
     const panel = within(screen.getByRole('tabpanel'));

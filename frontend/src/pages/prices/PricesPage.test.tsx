@@ -112,7 +112,8 @@ describe('the prices page', () => {
     const table = screen.getByRole('table', { name: 'Theirs and yours for VR-1108' });
     expect(within(table).getByRole('row', { name: 'stock none 5 8' })).toBeInTheDocument();
     await userEvent.click(screen.getByRole('button', { name: 'Keep mine' }));
-    await userEvent.click(save());
+    await waitFor(() => expect(document.activeElement).toHaveAttribute('role', 'gridcell'));
+    await userEvent.keyboard('{Control>}s{/Control}');
     await waitFor(() => expect(bodies('PUT /api/prices')).toHaveLength(2));
     expect(bodies('PUT /api/prices')[1]).toEqual({ rows: [{ id: '20', version: 3, stock: 8 }] });
   });

@@ -1,7 +1,6 @@
 import type { Order, PriceAtQuantity } from '@roothertz/common/prices';
+import { grouped } from '../../../components/countOf';
 import { priceText } from '../../../components/priceText';
-
-const plain = new Intl.NumberFormat('en-GB');
 
 /** What a quantity costs in a sentence, and in another that more pieces cost less in all where they do. */
 export function costWords(price: PriceAtQuantity, quantity: number, currency: string): string {
@@ -12,16 +11,16 @@ export function costWords(price: PriceAtQuantity, quantity: number, currency: st
 
 function orderWords(order: Order, quantity: number, currency: string): string {
   const { offer, orderQuantity, unitPrice, total } = order;
-  const pieces = `${plain.format(quantity)} ${quantity === 1 ? 'piece costs' : 'pieces cost'}`;
+  const pieces = `${grouped(quantity)} ${quantity === 1 ? 'piece costs' : 'pieces cost'}`;
   const each = `${priceText({ amount: unitPrice, currency })} each`;
   const ordered =
-    orderQuantity === quantity ? 'in all' : `in all, for ${plain.format(orderQuantity)} have to be bought`;
+    orderQuantity === quantity ? 'in all' : `in all, for ${grouped(orderQuantity)} have to be bought`;
   const wait = offer.leadTimeDays === null ? '' : `, delivered in ${days(offer.leadTimeDays)}`;
   return `${pieces} ${each} from ${offer.supplier}, ${priceText({ amount: total, currency })} ${ordered}${wait}.`;
 }
 
 function cheaperWords({ offer, orderQuantity, total }: Order, currency: string): string {
-  const pieces = plain.format(orderQuantity);
+  const pieces = grouped(orderQuantity);
   return `${pieces} from ${offer.supplier} cost less in all: ${priceText({ amount: total, currency })}.`;
 }
 
