@@ -15,6 +15,7 @@ export function comparedWith<Part extends { id: string }>(
 ): Part | null {
   const [leader] = ranked;
   if (leader && leader.part.id !== selectedId) return leader.part;
-  const beyond = ranked.find(({ quietSet }) => !quietSet) ?? ranked[1];
+  const others = ranked.slice(1);
+  const beyond = others.find(({ quietSet }) => !quietSet) ?? others[0];
   return beyond?.part ?? null;
 }

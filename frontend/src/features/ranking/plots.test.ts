@@ -58,4 +58,9 @@ describe('the compared part', () => {
     expect(comparedWith('a', ranked.slice(0, 2))?.id).toBe('b');
     expect(comparedWith('a', ranked.slice(0, 1))).toBeNull();
   });
+
+  it('is never the selected part, where the first by price is not among the quiet', () => {
+    const byPrice = ranked.map((item, index) => ({ ...item, quietSet: index === 1 }));
+    expect(comparedWith('a', byPrice)?.id).toBe('c');
+  });
 });
