@@ -3,7 +3,7 @@ import { InjectDataSource } from '@nestjs/typeorm';
 import type { Library as LibraryName, LibraryPart, Lifecycle } from '@roothertz/common/parts';
 import { type DataSource, type EntityManager, IsNull } from 'typeorm';
 import type { Caller } from '../shared/access/caller.js';
-import { betweenOtherWork } from '../shared/work/between-other-work.js';
+import { betweenOtherWork } from '../shared/in-pieces/between-other-work.js';
 import { type IdentifiedPart, toComparedParts } from './compared-parts.js';
 import { Library } from './entities/library.entity.js';
 import { type ListedResistor, toListedResistors } from './listed-resistors.js';

@@ -14,7 +14,7 @@ import { findReadableParts } from '../library/readable-parts.js';
 import { RevisionCache } from '../library/revision-cache.js';
 import type { Caller } from '../shared/access/caller.js';
 import { DomainError } from '../shared/errors/domain-error.js';
-import { betweenOtherWork } from '../shared/work/between-other-work.js';
+import { betweenOtherWork } from '../shared/in-pieces/between-other-work.js';
 import { readId } from '../shared/ids/read-id.js';
 import type { List } from '../shared/list/list-response.js';
 import type { PartPairDto } from './dto/part-pair.dto.js';

@@ -8,7 +8,7 @@ import {
   toOperatingConditions,
   toPartFilter,
 } from '../shared/conditions/ranking-request.js';
-import { betweenOtherWork } from '../shared/work/between-other-work.js';
+import { betweenOtherWork } from '../shared/in-pieces/between-other-work.js';
 import type { QuietestMapDto, QuietestMapResponseDto } from './dto/quietest-map.dto.js';
 import { LibraryIndex, revisionOf } from './library-index.service.js';
 import { partNameAt } from './part-at.js';
