@@ -23,7 +23,7 @@ window.ResizeObserver ??= NoResizeObserver as unknown as typeof ResizeObserver;
 
 window.scrollTo = () => undefined;
 HTMLCanvasElement.prototype.getContext = () => null;
-Object.defineProperty(HTMLElement.prototype, 'clientWidth', { value: 800, configurable: true });
+Object.defineProperty(HTMLElement.prototype, 'clientWidth', { value: 800 });
 Object.defineProperty(HTMLElement.prototype, 'clientHeight', { value: 400 });
 
 afterEach(() => {

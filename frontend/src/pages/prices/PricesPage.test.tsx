@@ -1,6 +1,7 @@
 import type { Role } from '@roothertz/common/access';
 import { fireEvent, screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
+import { provideGlobalGridOptions } from 'ag-grid-community';
 import { describe, expect, it } from 'vitest';
 import { sessionOf } from '../../test/factories';
 import { fakeServer, json, problem } from '../../test/fakeServer';
@@ -10,8 +11,8 @@ import { renderApp } from '../../test/renderApp';
 /** A computed style goes through the rules of grid and controls each time, which takes seconds; none matters here. */
 window.getComputedStyle = (element) => (element as HTMLElement).style;
 
-/** Nothing is laid out here, and the grid draws only the columns for which it finds room. */
-Object.defineProperty(HTMLElement.prototype, 'clientWidth', { value: 4000 });
+/** Nothing is laid out here, and the grid would draw only the columns for which it finds room. */
+provideGlobalGridOptions({ suppressColumnVirtualisation: true });
 
 const AT = '2026-11-30T10:00:00.000Z';
 const COUNTS = { offers: 2, stale: 1, expiring: 0, expired: 0, missing: 5, usedInConditions: 1 };
